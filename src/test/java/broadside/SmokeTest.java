@@ -1,3 +1,0 @@
-package broadside;
-import org.junit.jupiter.api.Test;
-class SmokeTest { @Test void x() {} }
