@@ -1,5 +1,7 @@
 package broadside.quantity;
 
+import java.math.BigDecimal;
+
 /**
  * An angle.
  *
@@ -8,7 +10,7 @@ package broadside.quantity;
  */
 public record Angle(double radians, String typed) implements Quantity, Comparable<Angle> {
     public Angle {
-        Quantity.check(radians, typed, Dimension.ANGLE);
+        Finite.check(radians, typed, Dimension.ANGLE);
     }
 
     /** Reads a text with its unit; throws {@link QuantityException} when it is not an angle. */
@@ -18,12 +20,14 @@ public record Angle(double radians, String typed) implements Quantity, Comparabl
 
     /** From a number of radians. */
     public static Angle radians(double radians) {
-        return new Angle(radians, Quantity.plain(radians, Dimension.ANGLE));
+        return new Angle(radians, Finite.plain(radians, Dimension.ANGLE));
     }
 
     /** From a number of degrees. */
     public static Angle degrees(double degrees) {
-        return of(Quantity.plain(degrees, "deg", Dimension.ANGLE));
+        String typed = Finite.plain(degrees, "deg", Dimension.ANGLE);
+        Unit degree = Unit.of(Dimension.ANGLE, "deg").orElseThrow();
+        return new Angle(UnitTable.toSi(BigDecimal.valueOf(degrees), degree), typed);
     }
 
     @Override

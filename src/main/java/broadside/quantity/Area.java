@@ -8,7 +8,7 @@ package broadside.quantity;
  */
 public record Area(double squareMetres, String typed) implements Quantity, Comparable<Area> {
     public Area {
-        Quantity.check(squareMetres, typed, Dimension.AREA);
+        Finite.check(squareMetres, typed, Dimension.AREA);
     }
 
     /** Reads a text with its unit; throws {@link QuantityException} when it is not an area. */
@@ -18,7 +18,7 @@ public record Area(double squareMetres, String typed) implements Quantity, Compa
 
     /** From a number of square metres. */
     public static Area squareMetres(double squareMetres) {
-        return new Area(squareMetres, Quantity.plain(squareMetres, Dimension.AREA));
+        return new Area(squareMetres, Finite.plain(squareMetres, Dimension.AREA));
     }
 
     @Override

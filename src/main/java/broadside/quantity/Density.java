@@ -8,7 +8,7 @@ package broadside.quantity;
  */
 public record Density(double kilogramsPerCubicMetre, String typed) implements Quantity, Comparable<Density> {
     public Density {
-        Quantity.check(kilogramsPerCubicMetre, typed, Dimension.DENSITY);
+        Finite.check(kilogramsPerCubicMetre, typed, Dimension.DENSITY);
     }
 
     /** Reads a text with its unit; throws {@link QuantityException} when it is not a density. */
@@ -18,7 +18,7 @@ public record Density(double kilogramsPerCubicMetre, String typed) implements Qu
 
     /** From a number of kilograms per cubic metre. */
     public static Density kilogramsPerCubicMetre(double kilogramsPerCubicMetre) {
-        return new Density(kilogramsPerCubicMetre, Quantity.plain(kilogramsPerCubicMetre, Dimension.DENSITY));
+        return new Density(kilogramsPerCubicMetre, Finite.plain(kilogramsPerCubicMetre, Dimension.DENSITY));
     }
 
     @Override

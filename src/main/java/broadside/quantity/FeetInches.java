@@ -31,14 +31,20 @@ final class FeetInches {
      */
     static Optional<Result> read(String line, NumberText feet, Optional<Unit> bare, Sentences says) {
         String rest = line.substring(feet.end());
-        if (rest.startsWith("-") && startsNumber(rest.substring(1))) {
-            return Optional.of(hyphen(rest.substring(1), feet, bare, says));
+        if (rest.startsWith("-") && startsNumber(rest.substring(1).strip())) {
+            return Optional.of(hyphen(rest.substring(1).strip(), feet, bare, says));
         }
         Optional<String> after = afterFoot(rest);
         if (after.isEmpty()) {
             return Optional.empty();
         }
         NumberText inches = inches(after.get(), feet, says);
+        // The point in "8 ft.6 in" may end the word or begin the inches.
+        if (after.get().startsWith(".") && rest.contains("t.")) {
+            NumberText whole = inches(after.get().substring(1), feet, says);
+            return Optional.of(new Result.Open(List.of(plain(feet) + " ft " + plain(whole) + " in",
+                    plain(feet) + " ft " + plain(inches) + " in")));
+        }
         boolean likePower = after.get().equals("2") || after.get().equals("3");
         List<String> warnings = likePower
                 ? List.of(Folding.quote(says.text()) + " is read as " + plain(feet) + " ft " + plain(inches) + " in")

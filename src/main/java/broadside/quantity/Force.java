@@ -8,7 +8,7 @@ package broadside.quantity;
  */
 public record Force(double newtons, String typed) implements Quantity, Comparable<Force> {
     public Force {
-        Quantity.check(newtons, typed, Dimension.FORCE);
+        Finite.check(newtons, typed, Dimension.FORCE);
     }
 
     /** Reads a text with its unit; throws {@link QuantityException} when it is not a force. */
@@ -18,7 +18,7 @@ public record Force(double newtons, String typed) implements Quantity, Comparabl
 
     /** From a number of newtons. */
     public static Force newtons(double newtons) {
-        return new Force(newtons, Quantity.plain(newtons, Dimension.FORCE));
+        return new Force(newtons, Finite.plain(newtons, Dimension.FORCE));
     }
 
     @Override

@@ -8,7 +8,7 @@ package broadside.quantity;
  */
 public record Length(double metres, String typed) implements Quantity, Comparable<Length> {
     public Length {
-        Quantity.check(metres, typed, Dimension.LENGTH);
+        Finite.check(metres, typed, Dimension.LENGTH);
     }
 
     /** Reads a text with its unit; throws {@link QuantityException} when it is not a length. */
@@ -18,7 +18,7 @@ public record Length(double metres, String typed) implements Quantity, Comparabl
 
     /** From a number of metres. */
     public static Length metres(double metres) {
-        return new Length(metres, Quantity.plain(metres, Dimension.LENGTH));
+        return new Length(metres, Finite.plain(metres, Dimension.LENGTH));
     }
 
     @Override

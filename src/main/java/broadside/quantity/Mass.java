@@ -8,7 +8,7 @@ package broadside.quantity;
  */
 public record Mass(double kilograms, String typed) implements Quantity, Comparable<Mass> {
     public Mass {
-        Quantity.check(kilograms, typed, Dimension.MASS);
+        Finite.check(kilograms, typed, Dimension.MASS);
     }
 
     /** Reads a text with its unit; throws {@link QuantityException} when it is not a mass. */
@@ -18,7 +18,7 @@ public record Mass(double kilograms, String typed) implements Quantity, Comparab
 
     /** From a number of kilograms. */
     public static Mass kilograms(double kilograms) {
-        return new Mass(kilograms, Quantity.plain(kilograms, Dimension.MASS));
+        return new Mass(kilograms, Finite.plain(kilograms, Dimension.MASS));
     }
 
     @Override

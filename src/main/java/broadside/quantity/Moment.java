@@ -8,7 +8,7 @@ package broadside.quantity;
  */
 public record Moment(double newtonMetres, String typed) implements Quantity, Comparable<Moment> {
     public Moment {
-        Quantity.check(newtonMetres, typed, Dimension.MOMENT);
+        Finite.check(newtonMetres, typed, Dimension.MOMENT);
     }
 
     /** Reads a text with its unit; throws {@link QuantityException} when it is not a moment. */
@@ -18,7 +18,7 @@ public record Moment(double newtonMetres, String typed) implements Quantity, Com
 
     /** From a number of newton metres. */
     public static Moment newtonMetres(double newtonMetres) {
-        return new Moment(newtonMetres, Quantity.plain(newtonMetres, Dimension.MOMENT));
+        return new Moment(newtonMetres, Finite.plain(newtonMetres, Dimension.MOMENT));
     }
 
     @Override

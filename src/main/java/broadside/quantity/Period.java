@@ -8,7 +8,7 @@ package broadside.quantity;
  */
 public record Period(double years, String typed) implements Quantity, Comparable<Period> {
     public Period {
-        Quantity.check(years, typed, Dimension.PERIOD);
+        Finite.check(years, typed, Dimension.PERIOD);
     }
 
     /** Reads a text with its unit; throws {@link QuantityException} when it is not a period. */
@@ -18,7 +18,7 @@ public record Period(double years, String typed) implements Quantity, Comparable
 
     /** From a number of years. */
     public static Period years(double years) {
-        return new Period(years, Quantity.plain(years, Dimension.PERIOD));
+        return new Period(years, Finite.plain(years, Dimension.PERIOD));
     }
 
     @Override

@@ -8,7 +8,7 @@ package broadside.quantity;
  */
 public record Pressure(double pascals, String typed) implements Quantity, Comparable<Pressure> {
     public Pressure {
-        Quantity.check(pascals, typed, Dimension.PRESSURE);
+        Finite.check(pascals, typed, Dimension.PRESSURE);
     }
 
     /** Reads a text with its unit; throws {@link QuantityException} when it is not a pressure. */
@@ -18,7 +18,7 @@ public record Pressure(double pascals, String typed) implements Quantity, Compar
 
     /** From a number of pascals. */
     public static Pressure pascals(double pascals) {
-        return new Pressure(pascals, Quantity.plain(pascals, Dimension.PRESSURE));
+        return new Pressure(pascals, Finite.plain(pascals, Dimension.PRESSURE));
     }
 
     @Override

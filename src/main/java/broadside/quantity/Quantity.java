@@ -1,7 +1,5 @@
 package broadside.quantity;
 
-import java.math.BigDecimal;
-
 /** A physical value in the unit of calculation, together with the text it came from. */
 public sealed interface Quantity
         permits Length, Speed, Pressure, Force, Moment, Mass, Angle, Area, Density, Period {
@@ -14,25 +12,4 @@ public sealed interface Quantity
 
     /** The kind of quantity. */
     Dimension dimension();
-
-    /** Refuses a value that is not finite, and a missing text. */
-    static void check(double value, String typed, Dimension dimension) {
-        if (!Double.isFinite(value)) {
-            throw new QuantityException(dimension.phrase() + " is a finite number of " + dimension.siUnit());
-        }
-        if (typed == null) {
-            throw new QuantityException(dimension.phrase() + " keeps the text it was typed as");
-        }
-    }
-
-    /** A number and the unit of calculation in plain digits; reading it gives the same number again. */
-    static String plain(double value, Dimension dimension) {
-        return plain(value, dimension.siUnit(), dimension);
-    }
-
-    /** A number and a unit in plain digits. */
-    static String plain(double value, String unit, Dimension dimension) {
-        check(value, unit, dimension);
-        return BigDecimal.valueOf(value).stripTrailingZeros().toPlainString() + " " + unit;
-    }
 }

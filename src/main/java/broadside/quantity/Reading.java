@@ -17,7 +17,7 @@ public sealed interface Reading {
     record Value(double si, Unit unit, String typed, List<String> warnings) implements Reading {
         public Value {
             Objects.requireNonNull(unit, "unit");
-            Quantity.check(si, typed, unit.dimension());
+            Finite.check(si, typed, unit.dimension());
             warnings = List.copyOf(warnings);
         }
     }

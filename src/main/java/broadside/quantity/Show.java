@@ -16,7 +16,7 @@ public final class Show {
     /** Steps this close to a printable number, relative to it, are binary noise and not rounded away from it. */
     private static final BigDecimal NOISE = new BigDecimal("1e-9");
     private static final int ECHO_FIGURES = 4;
-    private static final BigDecimal EIGHTH_OF_INCH_PER_METRE_UNDER = new BigDecimal("0.003175");
+    private static final BigDecimal EIGHTH_INCH_METRES = new BigDecimal("0.003175");
 
     private Show() {
     }
@@ -55,7 +55,7 @@ public final class Show {
     /** A length in feet and inches to a whole 1/8 in, rounded as told. */
     public static String feetInches(double metres, Rounding rounding) {
         requireFinite(metres);
-        BigDecimal exact = BigDecimal.valueOf(metres).divide(EIGHTH_OF_INCH_PER_METRE_UNDER, MathContext.DECIMAL128);
+        BigDecimal exact = BigDecimal.valueOf(metres).divide(EIGHTH_INCH_METRES, MathContext.DECIMAL128);
         BigDecimal eighths = withoutNoise(exact, exact.setScale(0, RoundingMode.HALF_UP),
                 exact.setScale(0, mode(rounding)));
         return FeetInchesText.of(eighths.toBigInteger());
@@ -113,7 +113,8 @@ public final class Show {
             return value.setScale(Math.max(places, value.stripTrailingZeros().scale()), RoundingMode.UNNECESSARY)
                     .toPlainString();
         }
-        BigDecimal lead = value.movePointLeft(exponent).setScale(figures - 1, RoundingMode.HALF_UP);
+        BigDecimal digits = value.stripTrailingZeros().movePointLeft(exponent);
+        BigDecimal lead = digits.setScale(Math.max(figures - 1, digits.scale()), RoundingMode.UNNECESSARY);
         return String.format(Locale.ROOT, "%se%d", lead.toPlainString(), exponent);
     }
 

@@ -8,7 +8,7 @@ package broadside.quantity;
  */
 public record Speed(double metresPerSecond, String typed) implements Quantity, Comparable<Speed> {
     public Speed {
-        Quantity.check(metresPerSecond, typed, Dimension.SPEED);
+        Finite.check(metresPerSecond, typed, Dimension.SPEED);
     }
 
     /** Reads a text with its unit; throws {@link QuantityException} when it is not a speed. */
@@ -18,7 +18,7 @@ public record Speed(double metresPerSecond, String typed) implements Quantity, C
 
     /** From a number of metres per second. */
     public static Speed metresPerSecond(double metresPerSecond) {
-        return new Speed(metresPerSecond, Quantity.plain(metresPerSecond, Dimension.SPEED));
+        return new Speed(metresPerSecond, Finite.plain(metresPerSecond, Dimension.SPEED));
     }
 
     @Override

@@ -36,7 +36,8 @@ final class UnitWords {
         if (!kilonewton && !knot) {
             return List.of();
         }
-        return List.of(Folding.quote(words) + " is read as " + unit.symbol() + ", the " + (knot ? "knot" : "kilonewton"));
+        String meaning = knot ? ", the knot" : ", with k for kilo and N for newton";
+        return List.of(Folding.quote(words) + " is read as " + unit.symbol() + meaning);
     }
 
     /** Whether the text ends in a metric length unit, or in a digit in a field with a metric unit. */
