@@ -20,7 +20,12 @@ public record Source(String publication, String edition, String place, Status st
 
     /** For example "EN 1991-1-4:2005, table 4.1". */
     public String citation() {
-        return publication + ":" + edition + ", " + place;
+        return publicationAndEdition() + ", " + place;
+    }
+
+    /** For example "EN 1991-1-4:2005"; an edition that begins with a letter names itself, like "ASCE/SEI 7-16". */
+    public String publicationAndEdition() {
+        return Character.isLetter(edition.charAt(0)) ? edition : publication + ":" + edition;
     }
 
     Source with(String otherPlace, Status otherStatus) {

@@ -1,0 +1,31 @@
+package broadside.action;
+
+import broadside.codes.LoadCase.Windward;
+import broadside.codes.ZonePressure;
+import java.util.List;
+
+/**
+ * What one load case does to the item and at its foot, wind from the front or from the back.
+ *
+ * @param name        name of the case in its code
+ * @param direction   "front" or "back": the face that the wind meets
+ * @param windward    the end from which zones or eccentricity are measured, the worse one
+ * @param zones       pressures on each panel
+ * @param force       N
+ * @param height      of the resultant above the ground, m
+ * @param side        of the resultant from the middle of the item, m, positive to the right seen from the front
+ * @param baseShear   N
+ * @param baseMoment  about the ground line, N m
+ * @param torsion     about the vertical line in the middle of the posts, N m; positive turns the right side backwards
+ */
+public record CaseAction(String name, String label, String direction, Windward windward, List<PanelZones> zones, double force,
+                         double height, double side, double baseShear, double baseMoment, double torsion) {
+
+    /** The zones of one panel; {@code part} is empty when the item has one panel only. */
+    public record PanelZones(String part, double left, List<ZonePressure> zones) { }
+
+    /** The same case with the wind on the back: equal force, torsion the other way. */
+    CaseAction fromBehind() {
+        return new CaseAction(name, label, "back", windward, zones, force, height, side, baseShear, baseMoment, torsion == 0 ? 0 : -torsion);
+    }
+}

@@ -1,0 +1,127 @@
+package broadside.action;
+
+import broadside.action.CaseAction.PanelZones;
+import broadside.codes.LoadCase.Windward;
+import broadside.codes.ZonePressure;
+import broadside.panel.Panel;
+import broadside.trace.Status;
+import broadside.trace.Trace;
+import java.util.ArrayList;
+import java.util.List;
+
+/** From zone pressures to the force on the item and to shear, moment and torsion at its foot: statics, the same for every code. */
+public final class FootActions {
+
+    private static final String STATICS = "statics";
+
+    /** The actions of every case, front and back, and the combinations that posts are worked out from. */
+    public record Result(List<CaseAction> cases, List<Combined> combinations) { }
+
+    /** A combination in the hands of other packages: opaque, but named. */
+    public record Combined(Combination combination) {
+        public String name() {
+            return combination.name();
+        }
+    }
+
+    /** Works out and records each case; of two ends the worse one is recorded. */
+    public static Result of(List<PanelCases> panels, Trace trace) {
+        List<Combination> all = Combination.all(panels);
+        List<CaseAction> cases = new ArrayList<>();
+        for (String name : all.stream().map(Combination::name).distinct().toList()) {
+            Combination worst = all.stream().filter(c -> c.name().equals(name)).reduce(Combination::worse).orElseThrow();
+            CaseAction front = record(worst, trace);
+            cases.add(front);
+            cases.add(front.fromBehind());
+        }
+        return new Result(cases, all.stream().map(Combined::new).toList());
+    }
+
+    private static CaseAction record(Combination combination, Trace trace) {
+        String name = combination.name();
+        boolean one = combination.panels().size() == 1;
+        List<double[]> found = new ArrayList<>();
+        for (PanelForce panel : combination.panels()) {
+            found.add(panel(panel, name, combination.windward(), trace.part(panel.panel().part())));
+        }
+        double force = one ? found.get(0)[0] : sum(found, name, trace);
+        double shear = trace.line("base-shear/" + name, "V", "shear at the ground line").in("F", force, "N").from(STATICS, Status.DERIVED)
+            .gives("F", force, "N");
+        double moment = one ? found.get(0)[1] : total("base-moment/" + name, "M", "moment at the ground line", found, 1, trace);
+        double torsion = one ? found.get(0)[2] : total("torsion/" + name, "T", "torsion about the middle of the posts", found, 2, trace);
+        if (!one) {
+            trace.line("lever-arm/" + name, "z_F", "height of the resultant").in("M", moment, "N m").in("F", force, "N")
+                .from(STATICS, Status.DERIVED).gives("M / F", moment / force, "m");
+        }
+        return new CaseAction(name, combination.label(), "front", combination.windward(), zones(combination), force, moment / force,
+            torsion / force, shear, moment, torsion);
+    }
+
+    /** Force, moment and torsion of one panel. */
+    private static double[] panel(PanelForce panel, String name, Windward windward, Trace trace) {
+        double force = force(panel, name, trace);
+        Panel p = panel.panel();
+        double rise = panel.load().rise();
+        Trace.Line arm = trace.line("lever-arm/" + name, "z_F", "height of the force above the ground").in("z_g", p.clearance(), "m")
+            .in("h", p.height(), "m").from(STATICS, Status.DERIVED);
+        double z = rise == 0 ? arm.gives("z_g + h / 2", panel.height(), "m") : arm.in("Δ", rise, "m").gives("z_g + h / 2 + Δ", panel.height(), "m");
+        double moment = trace.line("base-moment/" + name, "M", "moment at the ground line").in("F", force, "N").in("z_F", z, "m")
+            .from(STATICS, Status.DERIVED).gives("F z_F", force * z, "N m");
+        double sign = windward == Windward.LEFT ? -1 : 1;
+        double e = Math.abs(panel.eccentricity());
+        double towards = panel.eccentricity() < 0 ? -1 : 1;
+        Trace.Line about = trace.line("torsion/" + name, "T", "torsion about the middle of the posts").in("F", force, "N").in("x_b", p.middle(), "m")
+            .from(STATICS, Status.DERIVED);
+        if (e == 0) {
+            return new double[] {force, moment, about.gives("F x_b", force * p.middle(), "N m")};
+        }
+        double shift = trace.line("eccentricity/" + name, "e", "distance of the force from the middle of the panel, towards the "
+            + (sign < 0 ? "left" : "right")).in("b", p.width(), "m").from(STATICS, Status.DERIVED)
+            .reads(panel.load().shift() != 0 ? "by the rule of this case" : "centre of the zone pressures", e, "m");
+        return new double[] {force, moment, about.in("σ", towards).in("e", shift, "m")
+            .gives("F (x_b + σ e)", force * (p.middle() + towards * shift), "N m")};
+    }
+
+    private static double force(PanelForce panel, String name, Trace trace) {
+        List<ZonePressure> zones = panel.load().zones();
+        double h = panel.panel().height();
+        Trace.Line line = trace.line("force/" + name, "F", "wind force on the panel").from(STATICS, Status.DERIVED);
+        StringBuilder formula = new StringBuilder();
+        for (ZonePressure zone : zones) {
+            String width = zones.size() == 1 ? "b" : "l_{" + zone.symbol().replaceAll("^._\\{?|}$", "") + "}";
+            line.in(zone.symbol(), zone.pressure(), "Pa").in(width, zone.width(), "m");
+            formula.append(formula.isEmpty() ? "" : " + ").append(zone.symbol()).append(' ').append(width);
+        }
+        line.in("h", h, "m");
+        String sum = zones.size() == 1 ? formula + " h" : "(" + formula + ") h";
+        if (panel.load().least() > 0) {
+            return line.in("F_{min}", panel.load().least(), "N").gives("max(" + sum + "; F_{min})", panel.force(), "N");
+        }
+        return line.gives(sum, panel.force(), "N");
+    }
+
+    private static double sum(List<double[]> found, String name, Trace trace) {
+        return total("force/" + name, "F", "wind force on all panels", found, 0, trace);
+    }
+
+    private static double total(String step, String symbol, String meaning, List<double[]> found, int which, Trace trace) {
+        String unit = which == 0 ? "N" : "N m";
+        Trace.Line line = trace.line(step, symbol, meaning).from(STATICS, Status.DERIVED);
+        StringBuilder formula = new StringBuilder();
+        double sum = 0;
+        for (int i = 0; i < found.size(); i++) {
+            String each = symbol + "_" + (i + 1);
+            line.in(each, found.get(i)[which], unit);
+            formula.append(i == 0 ? "" : " + ").append(each);
+            sum += found.get(i)[which];
+        }
+        return line.gives(formula.toString(), sum, unit);
+    }
+
+    private static List<PanelZones> zones(Combination combination) {
+        return combination.panels().stream().map(p -> new PanelZones(p.panel().part(), p.panel().middle() - p.panel().width() / 2,
+            p.load().zones())).toList();
+    }
+
+    private FootActions() { }
+}

@@ -1,0 +1,43 @@
+package broadside.action;
+
+import broadside.aero.LineLoad;
+import broadside.codes.LoadCase;
+import broadside.codes.ZonePressure;
+import broadside.panel.Panel;
+import java.util.List;
+
+/**
+ * Resultant of one load case on one panel.
+ *
+ * @param force         N
+ * @param height        of the resultant above the ground, m
+ * @param eccentricity  of the resultant from the middle of the panel, m, positive to the right
+ */
+record PanelForce(Panel panel, LoadCase load, double force, double height, double eccentricity) {
+
+    static PanelForce of(Panel panel, LoadCase load) {
+        double sum = 0;
+        double first = 0;
+        for (ZonePressure zone : load.zones()) {
+            double f = zone.pressure() * zone.width() * panel.height();
+            sum += f;
+            first += f * ((zone.from() + zone.to()) / 2 - panel.width() / 2);
+        }
+        double force = Math.max(sum, load.least());
+        return new PanelForce(panel, load, force, panel.clearance() + panel.height() / 2 + load.rise(), first / sum + load.shift());
+    }
+
+    /** Distance of the resultant from the middle of the item, m, positive to the right. */
+    double side() {
+        return panel.middle() + eccentricity;
+    }
+
+    /** Force per metre along the panel; a least force of the code raises all zones alike. */
+    LineLoad line() {
+        List<ZonePressure> zones = load.zones();
+        double sum = zones.stream().mapToDouble(z -> z.pressure() * z.width() * panel.height()).sum();
+        double raise = force / sum;
+        return new LineLoad(zones.stream().mapToDouble(ZonePressure::from).toArray(), zones.stream().mapToDouble(ZonePressure::to).toArray(),
+            zones.stream().mapToDouble(z -> z.pressure() * panel.height() * raise).toArray(), panel.width(), load.shift());
+    }
+}

@@ -1,0 +1,71 @@
+package broadside.codes;
+
+import broadside.panel.Panel;
+import broadside.site.Averaging;
+import broadside.site.Site;
+import broadside.table.Coefficient;
+import broadside.table.Edition;
+import broadside.trace.Trace;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+
+/** ASCE/SEI 7-16: solid free-standing signs and walls of chapter 29, with K_d inside the velocity pressure. */
+final class Asce716 implements WindCode {
+
+    private static final Set<String> OPTIONS = Set.of("risk-category", "topographic-factor", "ground-elevation", "gust-factor");
+
+    private static final Map<String, String> MEANINGS = Map.of(
+        "B", "towns, suburbs, woods: many obstacles the size of a house or larger",
+        "C", "open ground with scattered obstacles below 30 ft",
+        "D", "flat ground without obstacles, and water");
+
+    private final Edition edition;
+    private final Asce7Velocity velocity;
+    private final Asce7Signs signs;
+    private final Constants constants;
+    private final Level level;
+    private final SiteTerms terms;
+
+    Asce716(Edition edition) {
+        this.edition = edition;
+        this.velocity = new Asce7Velocity(edition);
+        this.signs = new Asce7Signs(edition);
+        this.constants = new Constants(edition);
+        Coefficient service = edition.rows("load-combinations").number("allowable-full-dead", "w");
+        this.level = new Level("strength", "service", service.value(), Numbers.plain(service.value()) + " W, allowable stress design",
+            service.source().citation(), service.source().status());
+        this.terms = new SiteTerms(Averaging.of(edition.property("averaging")).orElseThrow(), edition.rows("exposure").keys().stream()
+            .map(k -> new SiteTerms.Terrain(k, MEANINGS.getOrDefault(k, ""))).toList(), OPTIONS);
+    }
+
+    @Override
+    public Edition edition() {
+        return edition;
+    }
+
+    @Override
+    public SiteTerms terms() {
+        return terms;
+    }
+
+    @Override
+    public Level level() {
+        return level;
+    }
+
+    @Override
+    public double velocityPressure(Site site, double height, Trace trace) {
+        return velocity.pressure(site, height, trace);
+    }
+
+    @Override
+    public List<LoadCase> netPressures(Panel panel, Site site, Trace trace) {
+        double h = trace.line("reference-height", "h", "height of the top").in("z_g", panel.clearance(), "m").in("s", panel.height(), "m")
+            .from(constants.source("openness-limit").publicationAndEdition() + ", 29.3", constants.source("openness-limit").status())
+            .gives("z_g + s", panel.top(), "m");
+        double q = velocityPressure(site, h, trace);
+        double gust = velocity.gustFactor(site, panel.width(), h, trace);
+        return signs.cases(panel, site, this, q, gust, trace);
+    }
+}

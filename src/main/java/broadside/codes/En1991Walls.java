@@ -1,0 +1,128 @@
+package broadside.codes;
+
+import broadside.aero.Strip;
+import broadside.codes.LoadCase.Windward;
+import broadside.panel.Panel;
+import broadside.site.Site;
+import broadside.table.Coefficient;
+import broadside.table.Curve;
+import broadside.table.Edition;
+import broadside.table.Rows;
+import broadside.table.Source;
+import broadside.trace.Trace;
+import java.util.ArrayList;
+import java.util.List;
+
+/** Free-standing walls of EN 1991-1-4, 7.4.1: zones A to D from the windward end, table 7.9. */
+final class En1991Walls {
+
+    private final Constants constants;
+    private final Curve free;
+    private final Rows withReturns;
+    private final Rows open;
+    private final Rows zones;
+
+    En1991Walls(Edition edition) {
+        this.constants = new Constants(edition);
+        this.free = edition.curve("free-standing-walls");
+        this.withReturns = edition.rows("free-standing-walls-with-returns");
+        this.open = edition.rows("free-standing-walls-open");
+        this.zones = edition.rows("wall-zones");
+    }
+
+    /** The case "wall", once for each end as the windward one. Ends that are alike are worked out once. */
+    List<LoadCase> cases(Panel panel, Site site, WindCode code, Trace trace) {
+        Source place = constants.source("wall-return-full");
+        double ze = trace.line("reference-height", "z_e", "reference height: the top of the wall")
+            .in("z_g", panel.clearance(), "m").in("h", panel.height(), "m")
+            .from(place.publicationAndEdition() + ", 7.4.1(2)", constants.source("wall-solidity-limit").status())
+            .gives("z_g + h", panel.top(), "m");
+        double qp = code.velocityPressure(site, ze, trace);
+        double slenderness = trace.line("length-to-height", "l/h", "length of the wall over its height")
+            .in("l", panel.width(), "m").in("h", panel.height(), "m").from(place.citation(), place.status())
+            .gives("l / h", panel.width() / panel.height(), "1");
+        LoadCase left = fromLeft(new Sheet(panel, site, code, qp, slenderness, panel.returnLeft(), trace, ""));
+        LoadCase right = (panel.endsAlike() ? left
+            : fromLeft(new Sheet(panel, site, code, qp, slenderness, panel.returnRight(), trace, "/right-end")))
+            .mirrored(panel.width());
+        return List.of(left, right);
+    }
+
+    /** What the zones of one windward end are worked out from. */
+    private record Sheet(Panel panel, Site site, WindCode code, double qp, double slenderness, double returnLength, Trace trace,
+                         String end) { }
+
+    private LoadCase fromLeft(Sheet sheet) {
+        List<String> names = zones.keys();
+        double h = sheet.panel().height();
+        List<Double> limits = names.stream()
+            .map(z -> zones.isPrinted(z, "to") ? zones.number(z, "to").value() * h : Double.POSITIVE_INFINITY).toList();
+        List<ZonePressure> pressures = new ArrayList<>();
+        for (Strip strip : Strip.cut(sheet.panel().width(), names, limits)) {
+            String zone = strip.name();
+            Source place = zones.number(zone, "from").source();
+            double width = sheet.trace().line("zone-width/" + zone + sheet.end(), "l_" + zone, "width of zone " + zone)
+                .in("h", h, "m").in("l", sheet.panel().width(), "m").from(place.citation(), place.status())
+                .reads("from " + Numbers.plain(round(strip.from())) + " m to " + Numbers.plain(round(strip.to()))
+                    + " m from the windward end", strip.width(), "m");
+            double c = coefficient(sheet, zone);
+            double w = NetPressure.record(sheet.site(), sheet.code().level(), sheet.trace(), zone + sheet.end(), "w_" + zone,
+                (name, symbol) -> sheet.trace().line(name, symbol, "net pressure in zone " + zone).in("q_p", sheet.qp(), "Pa")
+                    .in("c_" + zone, c).from(place.publicationAndEdition() + ", 5.2, 7.4.1", place.status()),
+                "q_p c_" + zone, sheet.qp() * c);
+            pressures.add(new ZonePressure(zone, "w_" + zone, strip.from(), strip.from() + width, c, w));
+        }
+        return new LoadCase("wall", "free-standing wall, zones from the windward end", Windward.LEFT, pressures, 0, 0, 0);
+    }
+
+    private static double round(double metres) {
+        return Math.round(metres * 1e4) / 1e4;
+    }
+
+    /** Straight lines in l/h, in the length of the return up to h, and in solidity from 1 down to the limit. */
+    private double coefficient(Sheet sheet, String zone) {
+        Trace trace = sheet.trace();
+        String symbol = "c_" + zone;
+        String meaning = "net pressure coefficient of zone " + zone;
+        boolean corner = sheet.returnLength() > 0;
+        boolean holes = sheet.panel().solidity() < 1;
+        Coefficient printed = free.at(zone, sheet.slenderness());
+        if (!corner && !holes) {
+            return printed.into(trace.line("coefficient/" + zone + sheet.end(), symbol, meaning).in("l/h", sheet.slenderness()));
+        }
+        double c = printed.into(trace.line("table-coefficient/" + zone + sheet.end(), symbol + "'", meaning + ", free end, closed")
+            .in("l/h", sheet.slenderness()));
+        if (corner) {
+            c = withReturn(sheet, zone, c, holes ? "table-coefficient/" + zone + sheet.end() + "/return" : "coefficient/" + zone + sheet.end(),
+                holes ? symbol + "''" : symbol);
+        }
+        return holes ? withHoles(sheet, zone, c, corner ? symbol + "''" : symbol + "'", symbol) : c;
+    }
+
+    private double withReturn(Sheet sheet, String zone, double freeEnd, String step, String symbol) {
+        Coefficient full = withReturns.number("at least h", zone);
+        double reach = constants.number("wall-return-full") * sheet.panel().height();
+        double share = Math.min(1, sheet.returnLength() / reach);
+        Source weaker = share < 1 ? free.at(zone, free.first()).source() : full.source();
+        Trace.Line line = sheet.trace().line(step, symbol, "net pressure coefficient of zone " + zone + ", with the return corner")
+            .from(weaker.citation(), weaker.status());
+        if (share == 1) {
+            return line.in("l_r", sheet.returnLength(), "m").in("h", sheet.panel().height(), "m")
+                .reads("read in the row with return corners, as the return is not shorter than the height", full.value(), "1");
+        }
+        return line.in("c_" + zone + "'", freeEnd).in("c_r", full.value()).in("l_r", sheet.returnLength(), "m")
+            .in("h", sheet.panel().height(), "m")
+            .gives("c_" + zone + "' + (c_r - c_" + zone + "') l_r / h", freeEnd + (full.value() - freeEnd) * share, "1");
+    }
+
+    private double withHoles(Sheet sheet, String zone, double closed, String closedSymbol, String symbol) {
+        String key = open.keys().get(0);
+        double limit = Double.parseDouble(key);
+        Coefficient atLimit = open.number(key, zone);
+        double phi = sheet.panel().solidity();
+        double c = atLimit.value() + (closed - atLimit.value()) * (phi - limit) / (1 - limit);
+        return sheet.trace().line("coefficient/" + zone + sheet.end(), symbol, "net pressure coefficient of zone " + zone + ", with openings")
+            .in("φ", phi).in(closedSymbol, closed).in("c_o", atLimit.value()).from(atLimit.source().citation(), atLimit.source().status())
+            .gives("c_o + (" + closedSymbol + " - c_o) (φ - " + key + ") / (1 - " + key + ")", c, "1");
+    }
+}

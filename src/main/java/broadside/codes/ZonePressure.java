@@ -1,0 +1,18 @@
+package broadside.codes;
+
+/**
+ * Net pressure on one zone of a panel, both faces together.
+ *
+ * @param zone         name of the zone in its code
+ * @param symbol       symbol of the pressure in the calculation
+ * @param from         where it begins, m from the left edge of the panel seen from the front
+ * @param to           where it ends
+ * @param coefficient  net coefficient, all reductions in
+ * @param pressure     net pressure, Pa
+ */
+public record ZonePressure(String zone, String symbol, double from, double to, double coefficient, double pressure) {
+
+    public double width() {
+        return to - from;
+    }
+}

@@ -1,0 +1,65 @@
+package broadside.panel;
+
+import broadside.quantity.Length;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * A long wall of boards on posts, with or without return corners and gates.
+ *
+ * @param clearance   gap below the boards
+ * @param solidity    solid area over gross area
+ * @param returnLeft  length of the return at the left end, zero for a free end
+ * @param gates       openings; an open gate makes two new free ends
+ * @param spacing     distance of the posts, where it is known
+ */
+public record Hoarding(String mark, Length length, Length height, Length clearance, double solidity, Length returnLeft,
+                       Length returnRight, List<Gate> gates, Optional<Length> spacing, List<Carrying> carrying) implements Item {
+
+    /** An opening; {@code from} is measured from the left end. */
+    public record Gate(Length from, Length width) {
+        public double end() {
+            return from.metres() + width.metres();
+        }
+    }
+
+    public Hoarding {
+        gates = gates.stream().sorted(Comparator.comparing(Gate::from)).toList();
+        carrying = List.copyOf(carrying);
+    }
+
+    @Override
+    public String kind() {
+        return "hoarding";
+    }
+
+    /** The stretches between the ends and the gates, from the left. A gate at an end leaves no stretch there. */
+    @Override
+    public List<Panel> panels() {
+        List<double[]> stretches = new ArrayList<>();
+        double start = 0;
+        for (Gate gate : gates) {
+            if (gate.from().metres() > start) {
+                stretches.add(new double[] {start, gate.from().metres()});
+            }
+            start = gate.end();
+        }
+        if (start < length.metres()) {
+            stretches.add(new double[] {start, length.metres()});
+        }
+        List<Panel> panels = new ArrayList<>();
+        for (int i = 0; i < stretches.size(); i++) {
+            panels.add(panel(stretches.size() == 1 ? "" : "stretch-" + (i + 1), stretches.get(i)[0], stretches.get(i)[1]));
+        }
+        return panels;
+    }
+
+    private Panel panel(String part, double from, double to) {
+        double left = from == 0 ? returnLeft.metres() : 0;
+        double right = to == length.metres() ? returnRight.metres() : 0;
+        return new Panel(part, Panel.Kind.WALL, to - from, height.metres(), clearance.metres(),
+            (from + to) / 2 - length.metres() / 2, solidity, left, right);
+    }
+}

@@ -1,0 +1,36 @@
+package broadside.panel;
+
+/**
+ * One flat, upright rectangle as a code sees it: a board of a sign, or a stretch of hoarding between free ends.
+ * Lengths in metres.
+ *
+ * @param part        its name inside the item; empty when the item has one panel only
+ * @param kind        board held by posts, or wall that stands as a fence
+ * @param width       across the wind
+ * @param height      of the panel itself
+ * @param clearance   gap between the ground and its lower edge
+ * @param middle      distance of its middle from the middle of the item, positive to the right seen from the front
+ * @param solidity    solid area over gross area, 1 for a closed panel
+ * @param returnLeft  length of the return corner at the left end, 0 for a free end
+ * @param returnRight length of the return corner at the right end
+ */
+public record Panel(String part, Kind kind, double width, double height, double clearance, double middle, double solidity,
+                    double returnLeft, double returnRight) {
+
+    /** What the panel is in the words of the codes. */
+    public enum Kind { BOARD, WALL }
+
+    /** Height of the upper edge above the ground, m. */
+    public double top() {
+        return clearance + height;
+    }
+
+    /** Gross area, m2. */
+    public double area() {
+        return width * height;
+    }
+
+    public boolean endsAlike() {
+        return returnLeft == returnRight;
+    }
+}
