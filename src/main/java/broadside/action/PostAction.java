@@ -1,0 +1,18 @@
+package broadside.action;
+
+import java.util.Optional;
+
+/**
+ * What reaches the foot of one post, the worst of all cases, ends and directions.
+ *
+ * @param post      its number from the left, from 1
+ * @param position  of the post, m: from the middle of the posts of a sign, from the left end of a hoarding
+ * @param zone      zone in which it stands in the governing case; empty for a sign
+ * @param gate      width of gate leaf that hangs on it, m, zero for none
+ * @param share     width of panel that it carries, m; empty for a sign, whose posts share by statics
+ * @param named     the case that governs
+ * @param shear     N
+ * @param moment    at the ground line, N m
+ */
+public record PostAction(int post, double position, String zone, double gate, Optional<Double> share, String named, double shear,
+                         double moment) { }

@@ -1,0 +1,85 @@
+package broadside.action;
+
+import broadside.trace.Status;
+import broadside.trace.Trace;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+
+/**
+ * Shares of a sign's posts: the board is stiff, so that force is shared alike and torsion goes into the posts as a
+ * couple in proportion to their distance from the middle. One post takes the torsion itself.
+ */
+public final class SignPosts {
+
+    private static final String STATICS = "statics: stiff board, equal posts";
+
+    /** Works out and records each post in the combination that is worst for its moment. */
+    public static List<PostAction> of(List<Double> positions, List<FootActions.Combined> combinations, Trace trace) {
+        List<Combination> all = combinations.stream().map(FootActions.Combined::combination).toList();
+        double spread = positions.stream().mapToDouble(x -> x * x).sum();
+        List<PostAction> posts = new ArrayList<>();
+        for (int i = 0; i < positions.size(); i++) {
+            double x = positions.get(i);
+            Combination worst = all.stream().max(Comparator.comparingDouble(c -> moment(c, x, positions.size(), spread))).orElseThrow();
+            posts.add(record(i + 1, x, positions.size(), spread, worst, trace));
+        }
+        PostAction most = posts.stream().max(Comparator.comparingDouble(PostAction::moment)).orElseThrow();
+        trace.line("post-shear", "V_p", "greatest shear at the foot of a post: post " + most.post()).in("V_{" + most.post() + "}", most.shear(), "N")
+            .from(STATICS, Status.DERIVED).gives("V_{" + most.post() + "}", most.shear(), "N");
+        trace.line("post-moment", "M_p", "greatest moment at the foot of a post: post " + most.post())
+            .in("M_{" + most.post() + "}", most.moment(), "N m").from(STATICS, Status.DERIVED)
+            .gives("M_{" + most.post() + "}", most.moment(), "N m");
+        return posts;
+    }
+
+    private static double moment(Combination c, double x, int count, double spread) {
+        return c.moment() / count + (spread == 0 ? 0 : c.couple() * x / spread);
+    }
+
+    private static PostAction record(int post, double x, int count, double spread, Combination worst, Trace trace) {
+        String part = Integer.toString(post);
+        double force = worst.force();
+        double moment = worst.moment();
+        if (count == 1) {
+            double v = trace.line("post-shear/1", "V_{1}", "shear at the foot of the post").in("F", force, "N").from(STATICS, Status.DERIVED)
+                .gives("F", force, "N");
+            double m = trace.line("post-moment/1", "M_{1}", "moment at the foot of the post").in("M", moment, "N m").from(STATICS, Status.DERIVED)
+                .gives("M", moment, "N m");
+            return new PostAction(1, x, "", 0, java.util.Optional.empty(), worst.name(), v, m);
+        }
+        double t = couple("T", "torsion of case " + worst.name() + ", wind meeting the " + end(worst), worst.torsion(), "post-couple/torsion/" + part, trace);
+        double j = couple("J", "sum of force, height and side distance in the same case", worst.couple(), "post-couple/moment/" + part, trace);
+        double v = trace.line("post-shear/" + part, "V_{" + part + "}", "shear at the foot of post " + part).in("F", force, "N").in("n", count)
+            .in("T", t, "N m").in("x", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
+            .gives("F / n + T x / S", force / count + t * x / spread, "N");
+        double m = trace.line("post-moment/" + part, "M_{" + part + "}", "moment at the foot of post " + part).in("M", moment, "N m").in("n", count)
+            .in("J", j, "N m²").in("x", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
+            .gives("M / n + J x / S", moment / count + j * x / spread, "N m");
+        return new PostAction(post, x, "", 0, java.util.Optional.empty(), worst.name(), v, m);
+    }
+
+    private static String end(Combination worst) {
+        return switch (worst.windward()) {
+            case LEFT -> "left end";
+            case RIGHT -> "right end";
+            case NONE -> "face square on";
+        };
+    }
+
+    private static double couple(String symbol, String meaning, double value, String step, Trace trace) {
+        return trace.line(step, symbol, meaning).from(STATICS, Status.DERIVED)
+            .reads("sum over the boards of force" + (symbol.equals("J") ? ", height" : "") + " and distance from the middle of the posts", value,
+                symbol.equals("J") ? "N m²" : "N m");
+    }
+
+    /** Sum of the posts' shears in one combination less its force: zero in equilibrium. For tests and the equilibrium line. */
+    public static double shearLeft(FootActions.Combined combined, List<Double> positions) {
+        Combination c = combined.combination();
+        double spread = positions.stream().mapToDouble(x -> x * x).sum();
+        double sum = positions.stream().mapToDouble(x -> c.force() / positions.size() + (spread == 0 ? 0 : c.torsion() * x / spread)).sum();
+        return sum - c.force();
+    }
+
+    private SignPosts() { }
+}
