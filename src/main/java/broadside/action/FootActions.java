@@ -18,9 +18,30 @@ public final class FootActions {
     public record Result(List<CaseAction> cases, List<Combined> combinations) { }
 
     /** A combination in the hands of other packages: opaque, but named. */
-    public record Combined(Combination combination) {
+    public static final class Combined {
+
+        private final Combination combination;
+
+        Combined(Combination combination) {
+            this.combination = combination;
+        }
+
+        Combination combination() {
+            return combination;
+        }
+
         public String name() {
             return combination.name();
+        }
+
+        /** Force on all panels, N. */
+        public double force() {
+            return combination.force();
+        }
+
+        /** Moment at the ground line, N m. */
+        public double moment() {
+            return combination.moment();
         }
     }
 

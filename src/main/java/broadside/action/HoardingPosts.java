@@ -153,5 +153,17 @@ public final class HoardingPosts {
             .in("V_p", shear, "N").in("z_F", z, "m").from(STATICS, Status.DERIVED).gives("V_p z_F", shear * z, "N m");
     }
 
+    /** Sums of the posts' shears, N, and moments, N m, in one combination, boards only. */
+    public static double[] sums(FootActions.Combined combined, Hoarding hoarding, double spacing) {
+        double shear = 0;
+        double moment = 0;
+        for (Bay bay : bays(hoarding, combined.combination(), spacing)) {
+            Worst one = share(combined.combination(), bay);
+            shear += one.boards();
+            moment += one.boards() * one.panel().height();
+        }
+        return new double[] {shear, moment};
+    }
+
     private HoardingPosts() { }
 }

@@ -73,12 +73,18 @@ public final class SignPosts {
                 symbol.equals("J") ? "N m²" : "N m");
     }
 
-    /** Sum of the posts' shears in one combination less its force: zero in equilibrium. For tests and the equilibrium line. */
-    public static double shearLeft(FootActions.Combined combined, List<Double> positions) {
+    /** Sums of the posts' shears, N, and moments, N m, in one combination, each post worked out by itself. */
+    public static double[] sums(FootActions.Combined combined, List<Double> positions) {
         Combination c = combined.combination();
+        int count = positions.size();
         double spread = positions.stream().mapToDouble(x -> x * x).sum();
-        double sum = positions.stream().mapToDouble(x -> c.force() / positions.size() + (spread == 0 ? 0 : c.torsion() * x / spread)).sum();
-        return sum - c.force();
+        double shear = 0;
+        double moment = 0;
+        for (double x : positions) {
+            shear += c.force() / count + (spread == 0 ? 0 : c.torsion() * x / spread);
+            moment += moment(c, x, count, spread);
+        }
+        return new double[] {shear, moment};
     }
 
     private SignPosts() { }

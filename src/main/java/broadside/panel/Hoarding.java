@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 
 /**
  * A long wall of boards on posts, with or without return corners and gates.
@@ -28,6 +29,11 @@ public record Hoarding(String mark, Length length, Length height, Length clearan
     public Hoarding {
         gates = gates.stream().sorted(Comparator.comparing(Gate::from)).toList();
         carrying = List.copyOf(carrying);
+    }
+
+    @Override
+    public <R> R choose(Function<PostSign, R> postSign, Function<Hoarding, R> hoarding) {
+        return hoarding.apply(this);
     }
 
     @Override

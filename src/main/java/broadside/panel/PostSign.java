@@ -2,6 +2,7 @@ package broadside.panel;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Function;
 
 /**
  * One or more boards on one or more posts.
@@ -16,6 +17,11 @@ public record PostSign(String mark, List<Board> boards, int faces, Posts posts, 
         if (boards.isEmpty()) {
             throw new IllegalArgumentException("a sign needs a board");
         }
+    }
+
+    @Override
+    public <R> R choose(Function<PostSign, R> postSign, Function<Hoarding, R> hoarding) {
+        return postSign.apply(this);
     }
 
     @Override

@@ -1,0 +1,201 @@
+package broadside.assess;
+
+import broadside.action.CaseAction;
+import broadside.action.EdgeOn;
+import broadside.action.FootActions;
+import broadside.action.HoardingPosts;
+import broadside.action.PanelCases;
+import broadside.action.PostAction;
+import broadside.action.SignPosts;
+import broadside.assess.ItemResult.Outcome;
+import broadside.assess.ItemResult.Refusal;
+import broadside.codes.CodeLibrary;
+import broadside.codes.NotCovered;
+import broadside.codes.WindCode;
+import broadside.panel.Item;
+import broadside.panel.Panel;
+import broadside.panel.PostSign;
+import broadside.table.OutsideTable;
+import broadside.table.Rows;
+import broadside.table.TableLibrary;
+import broadside.trace.OwnValue;
+import broadside.trace.Status;
+import broadside.trace.Trace;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.function.ToDoubleFunction;
+
+/** Job in, assessment out: the one door that the page, the commands and the document use. */
+public final class Assessor {
+
+    /** Standard acceleration of free fall, m/s2. */
+    private static final double G = 9.80665;
+
+    private final CodeLibrary codes;
+    private final Rows edgeOnRule;
+    private final About about;
+
+    public Assessor(TableLibrary tables) {
+        this.codes = new CodeLibrary(tables);
+        this.edgeOnRule = tables.edition("own-rules/1").orElseThrow().rows("edge-on");
+        this.about = About.of(tables.digest());
+    }
+
+    public CodeLibrary codes() {
+        return codes;
+    }
+
+    public About about() {
+        return about;
+    }
+
+    /**
+     * Assesses every item of a job.
+     *
+     * @throws BadJob when the code is not there, or an override names no step of the calculation
+     */
+    public Assessment assess(Job job) {
+        WindCode code = codes.code(job.basis().key()).orElseThrow(() -> new BadJob(List.of(new Problem("basis.code",
+            "\"" + job.basis().key() + "\" is not among the codes: " + String.join(", ", codes.editions())))));
+        List<ItemResult> results = job.items().stream().map(item -> assess(job, item, code)).toList();
+        checkOverrides(job, results);
+        return new Assessment(job, code, results, about);
+    }
+
+    private static void checkOverrides(Job job, List<ItemResult> results) {
+        Set<OwnValue> used = new HashSet<>();
+        results.forEach(r -> used.addAll(r.sheet().overridesUsed()));
+        boolean complete = results.stream().allMatch(r -> r.outcome() == Outcome.ASSESSED);
+        List<Problem> problems = new ArrayList<>();
+        for (int i = 0; i < job.overrides().size(); i++) {
+            OwnValue own = job.overrides().get(i);
+            if (complete && !used.contains(own)) {
+                Set<String> names = new java.util.TreeSet<>();
+                results.forEach(r -> r.sheet().steps().stream().filter(s -> s.unit().equals(own.unit())).forEach(s -> names.add(s.name())));
+                problems.add(new Problem("overrides[" + i + "].name", "\"" + own.name() + "\" is not a step of this calculation with the unit "
+                    + own.unit() + "; there are " + String.join(", ", names.stream().limit(40).toList())));
+            }
+        }
+        if (!problems.isEmpty()) {
+            throw new BadJob(problems);
+        }
+    }
+
+    private ItemResult assess(Job job, Item item, WindCode code) {
+        Trace sheet = new Trace(job.overrides());
+        try {
+            Loads loads = loads(job, item, code, sheet);
+            return new ItemResult(item, Outcome.ASSESSED, Optional.empty(), Optional.of(loads), Notes.of(job, item, code, sheet), sheet);
+        } catch (NotCovered e) {
+            return refused(job, item, code, sheet, new Refusal(e.code(), e.clause(), e.reason(), e.instead()));
+        } catch (OutsideTable e) {
+            return refused(job, item, code, sheet, new Refusal(e.source().publicationAndEdition(), e.source().place(),
+                "The printed table does not cover this case: " + e.getMessage() + ".",
+                "Change the panel so that it falls inside, or choose a code that covers it."));
+        }
+    }
+
+    private static ItemResult refused(Job job, Item item, WindCode code, Trace sheet, Refusal refusal) {
+        return new ItemResult(item, Outcome.NOT_COVERED, Optional.of(refusal), Optional.empty(), Notes.of(job, item, code, sheet), sheet);
+    }
+
+    private Loads loads(Job job, Item item, WindCode code, Trace sheet) {
+        List<PanelCases> panels = new ArrayList<>();
+        for (Panel panel : item.panels()) {
+            giveDimensions(item, panel, sheet);
+            panels.add(new PanelCases(panel, code.netPressures(panel, job.site(), sheet.part(panel.part()))));
+        }
+        FootActions.Result actions = FootActions.of(panels, sheet);
+        List<PostAction> posts = posts(item, actions, sheet);
+        Map<String, String> governing = governing(actions.cases(), posts);
+        EdgeOn edgeOn = edgeOn(item, sheet);
+        double weight = selfWeight(item, sheet);
+        Loads loads = new Loads(velocity(item, sheet), actions.cases(), governing, posts, edgeOn, code.level(), weight,
+            Balances.of(item, actions, posts, governing));
+        Companions.record(loads, sheet);
+        return loads;
+    }
+
+    private static void giveDimensions(Item item, Panel panel, Trace sheet) {
+        String of = panel.part().isEmpty() ? item.mark() : panel.part();
+        sheet.given("b", "width of " + of, panel.width(), "m", "");
+        sheet.given("h", "height of " + of, panel.height(), "m", "");
+        sheet.given("z_g", "gap below " + of, panel.clearance(), "m", "");
+        if (panel.middle() != 0) {
+            sheet.given("x_b", "middle of " + of + " from the middle of the item, to the right", panel.middle(), "m", "");
+        }
+    }
+
+    private static List<PostAction> posts(Item item, FootActions.Result actions, Trace sheet) {
+        return item.choose(
+            sign -> SignPosts.of(sign.posts().positions(), actions.combinations(), sheet),
+            hoarding -> hoarding.spacing()
+                .map(s -> HoardingPosts.of(hoarding, s.metres(), actions.combinations(), sheet)).orElse(List.of()));
+    }
+
+    private static Map<String, String> governing(List<CaseAction> cases, List<PostAction> posts) {
+        Map<String, String> governing = new LinkedHashMap<>();
+        governing.put("base-shear", most(cases, CaseAction::baseShear));
+        governing.put("base-moment", most(cases, CaseAction::baseMoment));
+        governing.put("torsion", most(cases, c -> Math.abs(c.torsion())));
+        posts.stream().max(Comparator.comparingDouble(PostAction::moment)).ifPresent(p -> governing.put("post-moment", p.named()));
+        return governing;
+    }
+
+    /** The first of the cases that is not less than any other, within rounding. */
+    private static String most(List<CaseAction> cases, ToDoubleFunction<CaseAction> by) {
+        CaseAction best = cases.get(0);
+        for (CaseAction each : cases) {
+            if (by.applyAsDouble(each) > by.applyAsDouble(best) * (1 + 1e-9)) {
+                best = each;
+            }
+        }
+        return best.name();
+    }
+
+    private EdgeOn edgeOn(Item item, Trace sheet) {
+        EdgeOn sum = new EdgeOn(0, 0);
+        List<Panel> panels = item.panels();
+        for (int i = 0; i < panels.size(); i++) {
+            Panel panel = panels.get(i);
+            double depth = item instanceof PostSign sign ? sign.boards().get(i).depth().metres() : 0;
+            String suffix = panel.part().isEmpty() ? "" : "/" + panel.part();
+            double q = sheet.find("velocity-pressure" + suffix).orElseThrow().value();
+            sum = sum.plus(EdgeOn.of(edgeOnRule, panel.width(), panel.height(), panel.clearance() + panel.height() / 2, depth, q,
+                sheet.part(panel.part())));
+        }
+        return sum;
+    }
+
+    private static double selfWeight(Item item, Trace sheet) {
+        if (!(item instanceof PostSign sign) || sign.boards().stream().allMatch(b -> b.mass().isEmpty())) {
+            return 0;
+        }
+        double mass = sign.boards().stream().mapToDouble(b -> b.mass().map(m -> m.kilograms()).orElse(0.0)).sum();
+        double aside = sign.boards().stream().mapToDouble(b -> b.mass().map(m -> m.kilograms()).orElse(0.0) * b.offset().metres()).sum();
+        double weight = sheet.line("self-weight", "G", "weight of the boards").in("m", mass, "kg").in("g", G, "m/s²")
+            .from("standard acceleration of free fall", Status.RECALLED).gives("m g", mass * G, "N");
+        double arm = mass == 0 ? 0 : aside / mass;
+        sheet.line("self-weight-moment", "M_G", "moment of the weight in the plane of the boards, about the middle of the posts")
+            .in("G", weight, "N").in("x_G", arm, "m").from("statics", Status.DERIVED).gives("G x_G", weight * arm, "N m");
+        return weight;
+    }
+
+    private static Loads.Velocity velocity(Item item, Trace sheet) {
+        Loads.Velocity most = new Loads.Velocity(0, -1);
+        for (Panel panel : item.panels()) {
+            String suffix = panel.part().isEmpty() ? "" : "/" + panel.part();
+            double q = sheet.find("velocity-pressure" + suffix).orElseThrow().value();
+            if (q > most.pressure()) {
+                most = new Loads.Velocity(sheet.find("reference-height" + suffix).orElseThrow().value(), q);
+            }
+        }
+        return most;
+    }
+}

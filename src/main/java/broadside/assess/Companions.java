@@ -1,0 +1,28 @@
+package broadside.assess;
+
+import broadside.action.PostAction;
+import broadside.codes.Level;
+import broadside.trace.Trace;
+import java.util.Comparator;
+
+/** The governing loads at the other level: factored beside characteristic, service beside strength. */
+final class Companions {
+
+    static void record(Loads loads, Trace sheet) {
+        Level level = loads.level();
+        double f = sheet.line("companion-factor", "f", "from " + level.name() + " to " + level.companion() + " loads: " + level.rule())
+            .from(level.place(), level.status()).reads("read in the table of combinations", level.factor(), "1");
+        one("companion-base-shear", "V", loads.governs("base-shear").baseShear(), "N", f, level, sheet);
+        one("companion-base-moment", "M", loads.governs("base-moment").baseMoment(), "N m", f, level, sheet);
+        one("companion-torsion", "T", loads.governs("torsion").torsion(), "N m", f, level, sheet);
+        loads.posts().stream().max(Comparator.comparingDouble(PostAction::moment)).ifPresent(post ->
+            one("companion-post-moment", "M_p", post.moment(), "N m", f, level, sheet));
+    }
+
+    private static void one(String step, String symbol, double value, String unit, double f, Level level, Trace sheet) {
+        sheet.line(step, symbol + "*", "governing " + step.substring("companion-".length()).replace('-', ' ') + ", " + level.companion())
+            .in("f", f).in(symbol, value, unit).from(level.place(), level.status()).gives("f " + symbol, f * value, unit);
+    }
+
+    private Companions() { }
+}

@@ -1,0 +1,47 @@
+package broadside.assess;
+
+import broadside.panel.Item;
+import broadside.site.Site;
+import broadside.trace.OwnValue;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * One job: who, by which code, where, what.
+ *
+ * @param header     texts of the head of the job by their names in the job file: title, reference, client and so on
+ * @param remarks    texts of single items by mark and name: what it is fixed to, who gave the solidity
+ * @param overrides  values that the user sets in place of calculated ones
+ */
+public record Job(Map<String, String> header, Basis basis, Site site, List<Item> items, Map<String, String> remarks,
+                  List<OwnValue> overrides) {
+
+    /** The code by which loads are found; {@code stability} names the rule for overturning, where one is chosen. */
+    public record Basis(String code, String edition, Optional<String> overlay, Optional<String> stability) {
+
+        /** Key of the edition or overlay among the tables. */
+        public String key() {
+            return code + "/" + edition + overlay.map(o -> "-" + o).orElse("");
+        }
+    }
+
+    public Job {
+        header = Map.copyOf(header);
+        items = List.copyOf(items);
+        remarks = Map.copyOf(remarks);
+        overrides = List.copyOf(overrides);
+    }
+
+    public Optional<String> head(String name) {
+        return Optional.ofNullable(header.get(name));
+    }
+
+    public Optional<String> remark(String mark, String name) {
+        return Optional.ofNullable(remarks.get(mark + "/" + name));
+    }
+
+    public Job withSite(Site other) {
+        return new Job(header, basis, other, items, remarks, overrides);
+    }
+}

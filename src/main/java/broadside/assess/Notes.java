@@ -1,0 +1,148 @@
+package broadside.assess;
+
+import broadside.codes.WindCode;
+import broadside.panel.Board;
+import broadside.panel.Hoarding;
+import broadside.panel.Item;
+import broadside.panel.PostSign;
+import broadside.site.Site;
+import broadside.site.Topography;
+import broadside.trace.OwnValue;
+import broadside.trace.Status;
+import broadside.trace.Step;
+import broadside.trace.Trace;
+import java.util.ArrayList;
+import java.util.List;
+
+/** The sentences that go with a result: what was assumed, what to mind, what was not checked. */
+final class Notes {
+
+    private static final List<String> NEVER_CHECKED = List.of("ice and snow", "earthquake", "fatigue and vortex shedding", "impact and vehicles",
+        "crowd load", "electrical parts", "anchors in masonry", "any existing structure", "flutter of loose fabric");
+
+    private final List<Note> notes = new ArrayList<>();
+
+    static List<Note> of(Job job, Item item, WindCode code, Trace sheet) {
+        Notes notes = new Notes();
+        notes.overrides(sheet);
+        notes.site(job.site(), code);
+        item.<Runnable>choose(sign -> () -> notes.sign(sign), hoarding -> () -> notes.hoarding(hoarding)).run();
+        notes.solidity(job, item);
+        notes.carrying(item);
+        notes.statuses(sheet);
+        notes.always();
+        return notes.notes;
+    }
+
+    private void add(Note.Kind kind, String text) {
+        notes.add(new Note(kind, text));
+    }
+
+    private void overrides(Trace sheet) {
+        for (OwnValue own : sheet.overridesUsed()) {
+            add(Note.Kind.OVERRIDE, own.name() + " was set to " + number(own.value()) + (own.unit().equals("1") ? "" : " " + own.unit())
+                + " by the user: " + own.reason());
+        }
+    }
+
+    private void site(Site site, WindCode code) {
+        if (site.ground().topography().isEmpty() && site.options().number("topographic-factor").isEmpty()) {
+            add(Note.Kind.ASSUMPTION, "The ground is taken as flat: no hill, ridge or escarpment was given. If the ground within 1 km is higher or lower "
+                + "by more than 10 m, the load can be much larger.");
+        }
+        site.ground().topography().ifPresent(ground -> topography(ground, code));
+        site.authorityMinimum().ifPresent(minimum -> add(Note.Kind.ASSUMPTION, minimum.service() || code.level().name().equals("characteristic")
+            ? "The authority's least pressure of " + minimum.pressure().typed() + " is taken at service level."
+            : "The authority's least pressure of " + minimum.pressure().typed() + " is taken at strength level, as the code's loads are. "
+                + "If the authority means it at allowable stress, say so: the loads are then larger."));
+        if (site.basicSpeed().metresPerSecond() > 90 || site.basicSpeed().metresPerSecond() < 10) {
+            add(Note.Kind.CAUTION, "A basic wind speed of " + site.basicSpeed().typed() + " is unusual. Check its unit.");
+        }
+        if (site.options().number("gust-factor").filter(g -> g < 0.85).isPresent()) {
+            add(Note.Kind.CAUTION, "The gust factor given is below 0.85; a small sign gets more than 0.85 by the formula, not less.");
+        }
+        add(Note.Kind.ASSUMPTION, "No shelter by other structures is counted.");
+    }
+
+    private void topography(Topography ground, WindCode code) {
+        boolean half = ground.halfLength().isPresent();
+        if (code.terms().options().contains("topographic-factor") && !half) {
+            add(Note.Kind.ASSUMPTION, "Half the height of the slope is taken to lie half-way along it, as for an even slope.");
+        }
+        boolean behind = ground.distanceFromCrest().metres() > 0 && ground.feature() != Topography.Feature.ESCARPMENT;
+        if (behind && ground.downwindLength().isEmpty()) {
+            add(Note.Kind.ASSUMPTION, "The downwind slope is taken as long as the upwind one, as it was not given.");
+        }
+    }
+
+    private void sign(PostSign sign) {
+        for (int i = 0; i < sign.boards().size(); i++) {
+            Board board = sign.boards().get(i);
+            if (board.shape() != Board.Shape.RECTANGLE) {
+                add(Note.Kind.ASSUMPTION, "Board " + (board.mark().isEmpty() ? Integer.toString(i + 1) : board.mark()) + " is a "
+                    + board.shape().word() + ": the code has no rule for it, and the rectangle around it is used, which is safe.");
+            }
+        }
+        if (sign.boards().size() > 1) {
+            add(Note.Kind.ASSUMPTION, "Each board is assessed by itself and the forces are added; the wind between boards close to each other is not "
+                + "in any code, and the stack as one board is not compared.");
+        }
+        if (sign.boards().stream().anyMatch(b -> b.depth().metres() == 0)) {
+            add(Note.Kind.ASSUMPTION, "The thickness of a board was not given: wind along the face counts friction on its faces only.");
+        }
+        if (sign.faces() == 2) {
+            add(Note.Kind.ASSUMPTION, "Two parallel faces back to back are taken as one board. Faces that open in a V are outside the scope.");
+        }
+        if (sign.posts().count() > 1) {
+            add(Note.Kind.ASSUMPTION, "The posts share force alike and take torsion as a couple: stiff board, equal posts.");
+        }
+    }
+
+    private void hoarding(Hoarding hoarding) {
+        if (hoarding.spacing().isEmpty()) {
+            add(Note.Kind.ASSUMPTION, "The spacing of the posts was not given: there is no moment for each post.");
+        }
+        if (!hoarding.gates().isEmpty()) {
+            add(Note.Kind.ASSUMPTION, "An open gate makes two new free ends. A shut gate hangs half of its load on the post at each side.");
+        }
+        add(Note.Kind.ASSUMPTION, "The thickness of the hoarding is not known: wind along it counts friction on both faces only.");
+    }
+
+    private void solidity(Job job, Item item) {
+        if (item.panels().stream().anyMatch(p -> p.solidity() < 1)) {
+            add(Note.Kind.CAUTION, "The solidity was given by " + job.remark(item.mark(), "solidity-by").orElse("an unnamed source")
+                + ". A printer's figure for a mesh is not an aerodynamic one.");
+        }
+    }
+
+    private void carrying(Item item) {
+        if (!item.carrying().isEmpty()) {
+            add(Note.Kind.NOT_CHECKED, "What carries it is kept as typed and not checked: " + String.join("; ",
+                item.carrying().stream().map(c -> c.name() + " " + c.typed()).toList()) + ".");
+        } else {
+            add(Note.Kind.NOT_CHECKED, "Posts, footing and ground: loads only.");
+        }
+        add(Note.Kind.NOT_CHECKED, "The wind on the posts themselves is not in these loads.");
+        if (item instanceof PostSign) {
+            add(Note.Kind.NOT_CHECKED, "Torsion of the footing: the value is given, the check is the engineer's.");
+        }
+    }
+
+    private void statuses(Trace sheet) {
+        long recalled = sheet.steps().stream().map(Step::status).filter(s -> s == Status.RECALLED).count();
+        if (recalled > 0) {
+            add(Note.Kind.CAUTION, recalled + " steps rest on figures that are only recalled and not yet checked against print; they are named in the "
+                + "calculation.");
+        }
+    }
+
+    private void always() {
+        add(Note.Kind.NOT_CHECKED, "Not checked: " + String.join(", ", NEVER_CHECKED) + ".");
+        add(Note.Kind.CAUTION, "The local building code, the authority and the engineer of record decide.");
+        add(Note.Kind.CAUTION, "A sign, fence or panel that comes loose is dangerous far below design speed.");
+    }
+
+    private static String number(double value) {
+        return value == Math.rint(value) ? Long.toString((long) value) : Double.toString(value);
+    }
+}

@@ -1,0 +1,183 @@
+package broadside.job;
+
+import broadside.assess.Problem;
+import broadside.panel.Board;
+import broadside.panel.Hoarding;
+import broadside.panel.Item;
+import broadside.panel.PostSign;
+import broadside.panel.Posts;
+import broadside.quantity.Length;
+import broadside.quantity.Mass;
+import broadside.quantity.Quantity;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+
+/** Reads one item and checks what a person may have typed wrongly: sizes, ends, gates. */
+final class ItemReader {
+
+    private static final Length ZERO = new Length(0, "0 m");
+    private static final double LONGEST = 2000;
+
+    private final List<Problem> problems;
+
+    ItemReader(List<Problem> problems) {
+        this.problems = problems;
+    }
+
+    /** The item, or nothing when something needed is missing; what does not fit is noted. */
+    Optional<Item> read(Values values) {
+        return values.text("kind").flatMap(kind -> kind.equals("hoarding") ? hoarding(values) : sign(values));
+    }
+
+    private Optional<Item> sign(Values values) {
+        List<Board> boards = values.list("boards").stream().flatMap(b -> board(b).stream()).toList();
+        values.object("replaces").ifPresent(this::board);
+        int faces = values.whole("faces").orElse(1);
+        if (faces != 1 && faces != 2) {
+            problem(values, "faces", "must be 1 or 2");
+        }
+        if (values.list("boards").size() > 20) {
+            problem(values, "boards", "has " + values.list("boards").size() + " entries; a sign has at most 20 boards");
+        }
+        Optional<Posts> posts = values.object("posts").map(this::posts).orElse(Optional.of(new Posts(1, Optional.empty())));
+        if (boards.isEmpty() || boards.size() != values.list("boards").size() || posts.isEmpty() || values.text("mark").isEmpty()) {
+            return Optional.empty();
+        }
+        return Optional.of(new PostSign(values.text("mark").get(), boards, faces, posts.get(), carrying(values)));
+    }
+
+    private Optional<Board> board(Values values) {
+        Optional<Length> width = size(values, "width");
+        Optional<Length> height = size(values, "height");
+        Optional<Length> clearance = notBelow(values, "clearance", "the lower edge would lie below the ground");
+        Optional<Length> depth = notBelow(values, "depth", "a thickness is not below zero");
+        Optional<Length> offset = values.quantity("offset", Length.class);
+        offset.filter(o -> Math.abs(o.metres()) > 50).ifPresent(o -> problem(values, "offset", "must lie within 50 m of the posts"));
+        Optional<Mass> mass = values.quantity("mass", Mass.class);
+        mass.filter(m -> m.kilograms() < 0).ifPresent(m -> problem(values, "mass", "must not be below zero"));
+        double solidity = solidity(values);
+        if (width.isEmpty() || height.isEmpty() || clearance.isEmpty()) {
+            return Optional.empty();
+        }
+        Board.Shape shape = Board.Shape.valueOf(values.text("shape").orElse("rectangle").toUpperCase(Locale.ROOT));
+        if (shape == Board.Shape.DISC && Math.abs(width.get().metres() - height.get().metres()) > 1e-6) {
+            problem(values, "height", "of a disc must be the same as its width");
+        }
+        return Optional.of(new Board(values.text("mark").orElse(""), shape, width.get(), height.get(), clearance.get(), offset.orElse(ZERO),
+            depth.orElse(ZERO), solidity, mass));
+    }
+
+    private Optional<Posts> posts(Values values) {
+        int count = values.whole("count").orElse(0);
+        Optional<Length> spacing = size(values, "spacing");
+        if (values.whole("count").isPresent() && (count < 1 || count > 20)) {
+            problem(values, "count", "must lie between 1 and 20");
+        }
+        if (count > 1 && spacing.isEmpty()) {
+            problem(values, "spacing", "is missing: two or more posts need the distance between them, like \"2 m\"");
+        }
+        return count < 1 ? Optional.empty() : Optional.of(new Posts(count, spacing));
+    }
+
+    private Optional<Item> hoarding(Values values) {
+        Optional<Length> length = size(values, "length");
+        Optional<Length> height = size(values, "height");
+        Length clearance = notBelow(values, "clearance", "the lower edge would lie below the ground").orElse(ZERO);
+        double solidity = solidity(values);
+        Optional<Values> returns = values.object("returns");
+        Length left = returns.flatMap(r -> returnLength(r, "left", length)).orElse(ZERO);
+        Length right = returns.flatMap(r -> returnLength(r, "right", length)).orElse(ZERO);
+        List<Hoarding.Gate> gates = gates(values, length);
+        Optional<Length> spacing = values.object("posts").flatMap(p -> size(p, "spacing"));
+        if (length.isPresent() && spacing.isPresent() && length.get().metres() / spacing.get().metres() > 1000) {
+            problem(values.object("posts").orElseThrow(), "spacing", "gives more than 1000 posts; check its unit");
+        }
+        if (length.isEmpty() || height.isEmpty() || values.text("mark").isEmpty()) {
+            return Optional.empty();
+        }
+        return Optional.of(new Hoarding(values.text("mark").get(), length.get(), height.get(), clearance, solidity, left, right, gates, spacing,
+            carrying(values)));
+    }
+
+    private Optional<Length> returnLength(Values values, String end, Optional<Length> length) {
+        Optional<Length> found = notBelow(values, end, "a return is not shorter than nothing");
+        found.filter(r -> length.isPresent() && r.metres() > length.get().metres()).ifPresent(r ->
+            problem(values, end, "a return of " + r.typed() + " is longer than the hoarding of " + length.orElseThrow().typed()));
+        return found;
+    }
+
+    private List<Hoarding.Gate> gates(Values values, Optional<Length> length) {
+        List<Hoarding.Gate> gates = new ArrayList<>();
+        for (Values each : values.list("gates")) {
+            Optional<Length> from = notBelow(each, "from", "a gate does not begin before the left end");
+            Optional<Length> width = size(each, "width");
+            if (from.isPresent() && width.isPresent()) {
+                Hoarding.Gate gate = new Hoarding.Gate(from.get(), width.get());
+                if (length.isPresent() && gate.end() > length.get().metres() + 1e-9) {
+                    problem(each, "from", "the gate from " + from.get().typed() + ", " + width.get().typed() + " wide, ends beyond the hoarding of "
+                        + length.get().typed());
+                }
+                gates.add(gate);
+            }
+        }
+        gates.sort(Comparator.comparing(Hoarding.Gate::from));
+        double open = 0;
+        for (int i = 0; i < gates.size(); i++) {
+            open += gates.get(i).width().metres();
+            if (i > 0 && gates.get(i).from().metres() < gates.get(i - 1).end() - 1e-9) {
+                problem(values, "gates", "two gates overlap at " + gates.get(i).from().typed());
+            }
+        }
+        if (length.isPresent() && !gates.isEmpty() && open >= length.get().metres() - 1e-9) {
+            problem(values, "gates", "leave no hoarding between them");
+        }
+        return gates;
+    }
+
+    private Optional<Length> size(Values values, String name) {
+        Optional<Length> found = values.quantity(name, Length.class);
+        found.filter(l -> !(l.metres() >= 0.005 && l.metres() <= LONGEST)).ifPresent(l ->
+            problem(values, name, "must lie between 5 mm and 2000 m; \"" + l.typed() + "\" does not"));
+        return found;
+    }
+
+    private Optional<Length> notBelow(Values values, String name, String why) {
+        Optional<Length> found = values.quantity(name, Length.class);
+        found.filter(l -> l.metres() < 0).ifPresent(l -> problem(values, name, "\"" + l.typed() + "\" is below zero: " + why));
+        found.filter(l -> l.metres() > LONGEST).ifPresent(l -> problem(values, name, "must not be above 2000 m"));
+        return found;
+    }
+
+    private double solidity(Values values) {
+        double solidity = values.number("solidity").orElse(1.0);
+        if (!(solidity > 0 && solidity <= 1)) {
+            problem(values, "solidity", "must be above 0 and not above 1, 1 for a closed panel");
+        }
+        return solidity;
+    }
+
+    /** What carries the item, kept as typed. */
+    private static List<Item.Carrying> carrying(Values values) {
+        List<Item.Carrying> found = new ArrayList<>();
+        for (String part : List.of("posts", "footing", "ballast")) {
+            values.object(part).ifPresent(v -> {
+                for (String name : List.of("section", "grade", "kind", "shape", "ground")) {
+                    v.text(name).ifPresent(text -> found.add(new Item.Carrying(part + " " + name, text)));
+                }
+                for (String name : List.of("width", "length", "depth", "lever", "mass")) {
+                    v.quantity(name, Quantity.class).ifPresent(q -> found.add(new Item.Carrying(part + " " + name, q.typed())));
+                }
+            });
+        }
+        values.object("replaces").flatMap(v -> v.quantity("width", Length.class)).ifPresent(w -> found.add(new Item.Carrying("replaces a board of width",
+            w.typed())));
+        return found;
+    }
+
+    private void problem(Values values, String name, String text) {
+        problems.add(new Problem(values.at(name), text));
+    }
+}

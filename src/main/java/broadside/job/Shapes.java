@@ -1,0 +1,159 @@
+package broadside.job;
+
+import static broadside.quantity.Dimension.DENSITY;
+import static broadside.quantity.Dimension.LENGTH;
+import static broadside.quantity.Dimension.MASS;
+import static broadside.quantity.Dimension.PERIOD;
+import static broadside.quantity.Dimension.PRESSURE;
+import static broadside.quantity.Dimension.SPEED;
+
+import broadside.site.Averaging;
+import java.util.List;
+import java.util.Map;
+
+/** The fields of the job file, version 1. */
+public final class Shapes {
+
+    static final Shape BASIS = new Shape("basis", List.of(
+        Field.text("code", "key of the wind code, such as en-1991-1-4").needed(),
+        Field.text("edition", "edition of the code, such as 2005").needed(),
+        Field.text("overlay", "national or own overlay of the edition; null for none"),
+        Field.text("stability", "rule for overturning, such as en-1990-equ")));
+
+    static final Shape TOPOGRAPHY = new Shape("topography", List.of(
+        Field.choice("feature", "shape of the ground", List.of("hill", "ridge", "escarpment")).needed(),
+        Field.quantity("height", LENGTH, "height of the crest above the foot").needed(),
+        Field.quantity("upwind-length", LENGTH, "length of the upwind slope in plan, from the foot to the crest").needed(),
+        Field.quantity("downwind-length", LENGTH, "length of the downwind slope in plan"),
+        Field.quantity("half-length", LENGTH, "distance in plan upwind from the crest to half the height"),
+        Field.quantity("distance-from-crest", LENGTH, "from the crest to the site, positive downwind").needed()));
+
+    static final Shape SITE = new Shape("site", List.of(
+        Field.text("name", "name of the place"),
+        Field.quantity("basic-speed", SPEED, "basic wind speed as the code defines it").needed(),
+        Field.choice("averaging", "averaging time of the basic speed", Averaging.allWords()).needed(),
+        Field.quantity("return-period", PERIOD, "return period asked for"),
+        Field.text("terrain", "terrain or exposure class in the words of the code").needed(),
+        Field.text("terrain-reason", "why this class was chosen"),
+        Field.quantity("altitude", LENGTH, "altitude above the sea"),
+        Field.object("topography", TOPOGRAPHY, "hill, ridge or escarpment near by"),
+        Field.quantity("authority-minimum-pressure", PRESSURE, "least pressure that the local authority asks for"),
+        Field.choice("authority-minimum-level", "level at which the authority means its least pressure", List.of("code", "service")),
+        Field.number("direction-factor", "direction factor c_dir (EN)"),
+        Field.number("season-factor", "season factor c_season (EN)"),
+        Field.quantity("air-density", DENSITY, "air density (EN)"),
+        Field.choice("risk-category", "risk category (ASCE 7)", List.of("I", "II", "III", "IV")),
+        Field.number("topographic-factor", "topographic factor K_zt, in place of topography (ASCE 7)"),
+        Field.quantity("ground-elevation", LENGTH, "elevation of the ground above the sea, for K_e (ASCE 7)"),
+        Field.numberOrChoice("gust-factor", "gust-effect factor G, or \"computed\" for the formula (ASCE 7)", List.of("computed"))));
+
+    static final Shape BOARD = new Shape("board", List.of(
+        Field.text("mark", "mark of the board"),
+        Field.quantity("width", LENGTH, "across the wind").needed(),
+        Field.quantity("height", LENGTH, "of the board itself").needed(),
+        Field.quantity("clearance", LENGTH, "gap between the ground and the lower edge").needed(),
+        Field.choice("shape", "outline", List.of("rectangle", "disc", "triangle")),
+        Field.quantity("offset", LENGTH, "of the board's middle from the middle of the posts, positive to the right"),
+        Field.quantity("depth", LENGTH, "thickness of the board or box"),
+        Field.number("solidity", "solid area over gross area, 1 for a closed board"),
+        Field.quantity("mass", MASS, "mass of the board")));
+
+    static final Shape POSTS = new Shape("posts", List.of(
+        Field.whole("count", "number of posts").needed(),
+        Field.quantity("spacing", LENGTH, "distance between posts"),
+        Field.text("section", "section of a post"),
+        Field.text("grade", "material grade")));
+
+    static final Shape FOOTING = new Shape("footing", List.of(
+        Field.text("kind", "planted, pier or pad"),
+        Field.text("shape", "round or square"),
+        Field.quantity("width", LENGTH, "width or diameter"),
+        Field.quantity("length", LENGTH, "length in plan"),
+        Field.quantity("depth", LENGTH, "depth below the ground"),
+        Field.text("ground", "class of the ground")));
+
+    private static final List<Field> REMARKS = List.of(
+        Field.text("fixed-to", "what it is fixed to"),
+        Field.text("solidity-by", "who gave the solidity"),
+        Field.text("lighting", "lighting and openings"),
+        Field.text("design-life", "design life"),
+        Field.text("inspection-interval", "inspection interval"));
+
+    static final List<String> REMARK_NAMES = REMARKS.stream().map(Field::name).toList();
+
+    static final Shape POST_SIGN = item("post-sign", List.of(
+        Field.list("boards", BOARD, "boards from the top").needed(),
+        Field.whole("faces", "faces that are read: 1 or 2"),
+        Field.object("posts", POSTS, "posts"),
+        Field.object("footing", FOOTING, "footing"),
+        Field.object("replaces", BOARD, "the old board on the same post")));
+
+    static final Shape HOARDING = item("hoarding", List.of(
+        Field.quantity("length", LENGTH, "over all, from end to end").needed(),
+        Field.quantity("height", LENGTH, "of the boards themselves").needed(),
+        Field.quantity("clearance", LENGTH, "gap below the boards"),
+        Field.number("solidity", "solid area over gross area, 1 for closed boards"),
+        Field.object("returns", new Shape("returns", List.of(
+            Field.quantity("left", LENGTH, "length of the return corner at the left end"),
+            Field.quantity("right", LENGTH, "length of the return corner at the right end"))), "return corners at the ends"),
+        Field.list("gates", new Shape("gate", List.of(
+            Field.quantity("from", LENGTH, "from the left end to the gate").needed(),
+            Field.quantity("width", LENGTH, "width of the gate").needed())), "gates"),
+        Field.object("posts", new Shape("hoarding-posts", List.of(
+            Field.quantity("spacing", LENGTH, "distance between posts").needed(),
+            Field.text("section", "section of a post"),
+            Field.text("grade", "material grade"))), "posts"),
+        Field.object("footing", FOOTING, "footing"),
+        Field.object("ballast", new Shape("ballast", List.of(
+            Field.quantity("mass", MASS, "mass at each brace"),
+            Field.quantity("lever", LENGTH, "from the face to the middle of the ballast"),
+            Field.text("ground", "surface that it stands on"))), "ballast on raking braces")));
+
+    /** The kinds of item and their fields. */
+    public static final Map<String, Shape> KINDS = Map.of("post-sign", POST_SIGN, "hoarding", HOARDING);
+
+    static final Shape OVERRIDE = new Shape("override", List.of(
+        Field.text("name", "name of the step whose value is replaced").needed(),
+        Field.numberOrQuantity("value", "a plain number, or text with its unit").needed(),
+        Field.text("reason", "why").needed()));
+
+    /** Texts of the head of a job. */
+    public static final List<Field> HEADER = List.of(
+        Field.text("title", "name of the job"),
+        Field.text("reference", "reference of the job"),
+        Field.text("revision", "revision letter"),
+        Field.text("prepared-by", "who prepared it"),
+        Field.text("checked-by", "who checked it"),
+        Field.text("client", "client"),
+        Field.text("applicant", "applicant"),
+        Field.text("address", "address of the site"),
+        Field.text("coordinates", "coordinates of the site"),
+        Field.text("drawing-number", "drawing number"),
+        Field.text("date", "date of the job, such as 2026-12-01"),
+        Field.text("engineer", "name and licence of the engineer"),
+        Field.choice("units", "system of units that leads on page and paper", List.of("metric", "us")));
+
+    static final Shape JOB = job();
+
+    private static Shape item(String kind, List<Field> own) {
+        List<Field> fields = new java.util.ArrayList<>();
+        fields.add(Field.text("mark", "mark of the item, unique in the job").needed());
+        fields.add(Field.choice("kind", "kind of item", List.of(kind)).needed());
+        fields.addAll(own);
+        fields.addAll(REMARKS);
+        return new Shape(kind, fields);
+    }
+
+    private static Shape job() {
+        List<Field> fields = new java.util.ArrayList<>();
+        fields.add(Field.whole("broadside", "version of the job file: 1").needed());
+        fields.addAll(HEADER);
+        fields.add(Field.object("basis", BASIS, "code by which loads are found").needed());
+        fields.add(Field.object("site", SITE, "where it stands").needed());
+        fields.add(Field.list("items", new Shape("item", List.of()), "what stands in the wind").needed());
+        fields.add(Field.list("overrides", OVERRIDE, "values set in place of calculated ones"));
+        return new Shape("job", fields);
+    }
+
+    private Shapes() { }
+}

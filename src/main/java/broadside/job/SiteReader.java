@@ -1,0 +1,145 @@
+package broadside.job;
+
+import broadside.assess.Job;
+import broadside.assess.Problem;
+import broadside.codes.CodeLibrary;
+import broadside.codes.SiteTerms;
+import broadside.codes.WindCode;
+import broadside.quantity.Density;
+import broadside.quantity.Length;
+import broadside.quantity.Period;
+import broadside.quantity.Pressure;
+import broadside.quantity.Quantity;
+import broadside.quantity.Rounding;
+import broadside.quantity.Show;
+import broadside.quantity.Speed;
+import broadside.site.Averaging;
+import broadside.site.Site;
+import broadside.site.SiteOptions;
+import broadside.site.SpeedConversion;
+import broadside.site.Topography;
+import broadside.table.OutsideTable;
+import broadside.trace.Trace;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+
+/** Reads the site and holds it against what the chosen code wants to know. */
+final class SiteReader {
+
+    private static final List<String> NUMBERS = List.of("direction-factor", "season-factor", "topographic-factor", "gust-factor");
+
+    private final CodeLibrary codes;
+    private final SpeedConversion conversion;
+    private final List<Problem> problems;
+
+    SiteReader(CodeLibrary codes, SpeedConversion conversion, List<Problem> problems) {
+        this.codes = codes;
+        this.conversion = conversion;
+        this.problems = problems;
+    }
+
+    /** The site, or nothing when something needed is missing; what does not fit is noted. */
+    Optional<Site> read(Values values, Optional<Job.Basis> basis) {
+        Optional<Speed> speed = values.quantity("basic-speed", Speed.class);
+        speed.ifPresent(s -> within(values, "basic-speed", s.metresPerSecond(), 1, 150, "1 m/s and 150 m/s"));
+        values.quantity("return-period", Period.class)
+            .ifPresent(p -> within(values, "return-period", p.years(), 1.05, 10_000, "1.05 years and 10 000 years"));
+        values.quantity("altitude", Length.class).ifPresent(a -> within(values, "altitude", a.metres(), -500, 6000, "-500 m and 6000 m"));
+        values.quantity("ground-elevation", Length.class)
+            .ifPresent(a -> within(values, "ground-elevation", a.metres(), -500, 6000, "-500 m and 6000 m"));
+        values.quantity("air-density", Density.class)
+            .ifPresent(d -> within(values, "air-density", d.kilogramsPerCubicMetre(), 0.5, 1.6, "0.5 kg/m3 and 1.6 kg/m3"));
+        values.quantity("authority-minimum-pressure", Pressure.class)
+            .ifPresent(p -> within(values, "authority-minimum-pressure", p.pascals(), 0, 20_000, "0 and 20 kN/m2"));
+        NUMBERS.forEach(n -> values.number(n).ifPresent(v -> within(values, n, v, 0.3, 5, "0.3 and 5")));
+        Optional<Averaging> averaging = values.text("averaging").flatMap(Averaging::of);
+        Optional<String> terrain = values.text("terrain");
+        basis.flatMap(b -> codes.code(b.key())).ifPresent(code -> holdAgainst(code, values, speed, averaging, terrain));
+        Optional<Topography> topography = values.object("topography").flatMap(this::topography);
+        if (speed.isEmpty() || averaging.isEmpty() || terrain.isEmpty()) {
+            return Optional.empty();
+        }
+        Site.Ground ground = new Site.Ground(terrain.get(), values.quantity("altitude", Length.class), topography);
+        return Optional.of(new Site(values.text("name").orElse(""), speed.get(), averaging.get(), values.quantity("return-period", Period.class),
+            ground, authority(values), options(values)));
+    }
+
+    private static Optional<Site.AuthorityMinimum> authority(Values values) {
+        boolean service = values.text("authority-minimum-level").filter("service"::equals).isPresent();
+        return values.quantity("authority-minimum-pressure", Pressure.class).map(p -> new Site.AuthorityMinimum(p, service));
+    }
+
+    private void holdAgainst(WindCode code, Values values, Optional<Speed> speed, Optional<Averaging> averaging, Optional<String> terrain) {
+        SiteTerms terms = code.terms();
+        String name = code.edition().property("title");
+        terrain.filter(t -> !terms.hasTerrain(t)).ifPresent(t -> problems.add(new Problem(values.at("terrain"), "\"" + StructureReader.clean(t)
+            + "\" is not a terrain class of " + name + "; it has " + terms.terrainNames())));
+        averaging.filter(a -> a != terms.averaging()).ifPresent(a -> problems.add(new Problem(values.at("averaging"), name
+            + " defines its basic speed as a " + terms.averaging().words() + ", and this one is a " + a.words() + ". "
+            + speed.map(s -> offer(s, a, terms.averaging())).orElse(""))));
+        for (String option : options(values).names()) {
+            if (!terms.options().contains(option)) {
+                problems.add(new Problem(values.at(option), "is not a value of " + name + "; beside the wind and the ground it takes "
+                    + String.join(", ", terms.options().stream().sorted().toList())));
+            }
+        }
+        if (values.object("topography").isPresent() && values.number("topographic-factor").isPresent()) {
+            problems.add(new Problem(values.at("topographic-factor"), "stands beside topography; give one of the two"));
+        }
+    }
+
+    /** The conversion that can be taken over, with what it rests on. */
+    private String offer(Speed speed, Averaging from, Averaging to) {
+        try {
+            double converted = conversion.convert(speed, from, to, new Trace());
+            boolean miles = speed.typed().toLowerCase(Locale.ROOT).contains("mph");
+            String text = miles ? Show.number(converted / 0.44704, 4, Rounding.UP) + " mph" : Show.number(converted, 4, Rounding.UP) + " m/s";
+            return "In open country at 10 m " + speed.typed() + " as a " + from.words() + " is about " + text + " as a " + to.words()
+                + " (ratios after Durst); type that with \"" + to.words() + "\" if it is what you mean.";
+        } catch (OutsideTable e) {
+            return "There is no conversion from a " + from.words() + " here; type the speed as a " + to.words() + ".";
+        }
+    }
+
+    private Optional<Topography> topography(Values values) {
+        Optional<Length> height = positive(values, "height");
+        Optional<Length> upwind = positive(values, "upwind-length");
+        Optional<Length> downwind = positive(values, "downwind-length");
+        Optional<Length> half = positive(values, "half-length");
+        Optional<Length> distance = values.quantity("distance-from-crest", Length.class);
+        Optional<String> feature = values.text("feature");
+        if (half.isPresent() && upwind.isPresent() && half.get().metres() >= upwind.get().metres()) {
+            problems.add(new Problem(values.at("half-length"), "must be shorter than upwind-length, as it ends half-way up the slope"));
+        }
+        if (height.isEmpty() || upwind.isEmpty() || distance.isEmpty() || feature.isEmpty()) {
+            return Optional.empty();
+        }
+        return Optional.of(new Topography(Topography.Feature.valueOf(feature.get().toUpperCase(Locale.ROOT)), height.get(), upwind.get(),
+            downwind, half, distance.get()));
+    }
+
+    private Optional<Length> positive(Values values, String name) {
+        Optional<Length> length = values.quantity(name, Length.class);
+        length.ifPresent(l -> within(values, name, l.metres(), 0.1, 20_000, "0.1 m and 20 km"));
+        return length;
+    }
+
+    private void within(Values values, String name, double value, double least, double most, String words) {
+        if (!(value >= least && value <= most)) {
+            problems.add(new Problem(values.at(name), "must lie between " + words));
+        }
+    }
+
+    private static SiteOptions options(Values values) {
+        Map<String, Double> numbers = new HashMap<>();
+        NUMBERS.forEach(n -> values.number(n).ifPresent(v -> numbers.put(n, v)));
+        Map<String, Quantity> quantities = new HashMap<>();
+        List.of("air-density", "ground-elevation").forEach(n -> values.quantity(n, Quantity.class).ifPresent(v -> quantities.put(n, v)));
+        Map<String, String> words = new HashMap<>();
+        List.of("risk-category", "gust-factor").forEach(n -> values.text(n).ifPresent(v -> words.put(n, v)));
+        return new SiteOptions(numbers, quantities, words);
+    }
+}
