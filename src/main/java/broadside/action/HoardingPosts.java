@@ -2,9 +2,11 @@ package broadside.action;
 
 import broadside.aero.LineLoad;
 import broadside.aero.Strip;
+import broadside.codes.LoadCase;
 import broadside.codes.LoadCase.Windward;
 import broadside.codes.ZonePressure;
 import broadside.panel.Hoarding;
+import broadside.panel.Panel;
 import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.ArrayList;
@@ -15,45 +17,97 @@ import java.util.Map;
 import java.util.Optional;
 
 /**
- * Moments of a hoarding's posts: each carries the boards half-way to its neighbours, in the zones that lie there; a post
- * beside a gate also carries half of the shut leaf, at the pressure of the zone beside it.
+ * Moments of a hoarding's posts: each carries the boards half-way to its neighbours, in the zones that lie there. With
+ * gates both states count: open, where each gate makes two free ends, and shut, where the leaf hangs on the posts beside it.
  */
 public final class HoardingPosts {
 
     private static final String STATICS = "statics: each post carries half of the bays beside it";
 
-    /** One post of a stretch: its place and the boards that it carries, in metres from the left end of the stretch. */
-    private record Bay(int panel, double at, double from, double to, double gate) { }
+    /** One post and the boards that it carries, m from the left end of the hoarding; {@code leaf} is its half of a gate. */
+    private record Bay(int stretch, double at, double from, double to, double leafLeft, double leafRight) {
+        double leaf() {
+            return leafLeft + leafRight;
+        }
+    }
 
-    /** Works out every post in every combination, keeps the worst of each, and records the worst of each zone. */
-    public static List<PostAction> of(Hoarding hoarding, double spacing, List<FootActions.Combined> combinations, Trace trace) {
-        List<Combination> all = combinations.stream().map(FootActions.Combined::combination).toList();
+    /** A panel in one case with the place of its left edge, m from the left end of the hoarding. */
+    private record Placed(PanelForce panel, double left, boolean shut) { }
+
+    /** A post in one case. */
+    private record Share(Placed placed, Bay bay, String zone, double from, double to, double force) {
+        double moment() {
+            return force * placed.panel().height();
+        }
+
+        String named() {
+            return placed.panel().load().name();
+        }
+    }
+
+    /**
+     * Works out every post in every case, keeps the worst of each, and records the worst of each zone.
+     *
+     * @param shut  the cases of the whole wall while its gates are shut; empty without gates
+     */
+    public static List<PostAction> of(Hoarding hoarding, double spacing, List<PanelCases> open, Optional<PanelCases> shut, Trace trace) {
         List<PostAction> posts = new ArrayList<>();
-        List<Worst> worst = new ArrayList<>();
-        for (Bay bay : bays(hoarding, all.get(0), spacing)) {
-            Worst found = all.stream().map(c -> share(c, bay)).max(Comparator.comparingDouble(Worst::moment)).orElseThrow();
-            worst.add(found);
-            PanelForce panel = found.panel();
-            double left = panel.panel().middle() - panel.panel().width() / 2 + hoarding.length().metres() / 2;
-            posts.add(new PostAction(posts.size() + 1, left + bay.at(), found.zone(), bay.gate(), Optional.of(bay.to() - bay.from()),
-                found.combination().name(), found.force(), found.moment()));
+        List<Share> worst = new ArrayList<>();
+        for (Bay bay : bays(hoarding, spacing)) {
+            Share most = shares(hoarding, bay, open, shut).stream().max(Comparator.comparingDouble(Share::moment)).orElseThrow();
+            worst.add(most);
+            posts.add(new PostAction(posts.size() + 1, bay.at(), most.zone(), most.placed().shut() ? bay.leaf() : 0,
+                Optional.of(bay.to() - bay.from()), most.named(), most.force(), most.moment()));
         }
         record(posts, worst, trace);
         return posts;
     }
 
-    private static List<Bay> bays(Hoarding hoarding, Combination any, double spacing) {
+    private static List<Share> shares(Hoarding hoarding, Bay bay, List<PanelCases> open, Optional<PanelCases> shut) {
+        List<Share> shares = new ArrayList<>();
+        PanelCases stretch = open.get(bay.stretch());
+        for (LoadCase load : spread(stretch)) {
+            shares.add(share(placed(hoarding, stretch.panel(), load, false), bay, bay.from(), bay.to()));
+        }
+        shut.ifPresent(whole -> spread(whole).forEach(load -> shares.add(share(placed(hoarding, whole.panel(), load, true), bay,
+            bay.from() - bay.leafLeft(), bay.to() + bay.leafRight()))));
+        return shares;
+    }
+
+    /**
+     * The cases that tell how pressure is spread along the wall. A case that only moves the resultant of an even pressure
+     * is spread in a straight line, unless the code also gives zones, which then tell.
+     */
+    private static List<LoadCase> spread(PanelCases panel) {
+        boolean zoned = panel.cases().stream().anyMatch(c -> c.zones().size() > 1);
+        return panel.cases().stream().filter(c -> !(zoned && c.shift() != 0)).toList();
+    }
+
+    private static Placed placed(Hoarding hoarding, Panel panel, LoadCase load, boolean shut) {
+        return new Placed(PanelForce.of(panel, load), panel.middle() - panel.width() / 2 + hoarding.length().metres() / 2, shut);
+    }
+
+    private static Share share(Placed placed, Bay bay, double from, double to) {
+        LineLoad line = placed.panel().line();
+        double force = line.force(from - placed.left(), to - placed.left());
+        return new Share(placed, bay, zone(placed.panel(), bay.at() - placed.left()), from, to, force);
+    }
+
+    private static List<Bay> bays(Hoarding hoarding, double spacing) {
         List<Bay> bays = new ArrayList<>();
+        List<Panel> stretches = hoarding.panels();
         double half = hoarding.length().metres() / 2;
-        for (int i = 0; i < any.panels().size(); i++) {
-            double width = any.panels().get(i).panel().width();
-            double left = any.panels().get(i).panel().middle() - width / 2 + half;
+        for (int i = 0; i < stretches.size(); i++) {
+            double width = stretches.get(i).width();
+            double left = stretches.get(i).middle() - width / 2 + half;
             List<Double> at = positions(width, spacing);
             for (int k = 0; k < at.size(); k++) {
-                double from = k == 0 ? 0 : (at.get(k - 1) + at.get(k)) / 2;
-                double to = k == at.size() - 1 ? width : (at.get(k) + at.get(k + 1)) / 2;
-                double gate = (k == 0 ? leaf(hoarding, left) : 0) + (k == at.size() - 1 ? leaf(hoarding, left + width) : 0);
-                bays.add(new Bay(i, at.get(k), from, to, gate));
+                boolean first = k == 0;
+                boolean last = k == at.size() - 1;
+                double from = first ? 0 : (at.get(k - 1) + at.get(k)) / 2;
+                double to = last ? width : (at.get(k) + at.get(k + 1)) / 2;
+                bays.add(new Bay(i, left + at.get(k), left + from, left + to, first ? leaf(hoarding, left) : 0,
+                    last ? leaf(hoarding, left + width) : 0));
             }
         }
         return bays;
@@ -72,33 +126,17 @@ public final class HoardingPosts {
         return at;
     }
 
+    /** Half of the leaf of a gate that begins or ends at an edge. A gate at the end of the hoarding hangs on one post. */
     private static double leaf(Hoarding hoarding, double edge) {
         for (Hoarding.Gate gate : hoarding.gates()) {
-            if (Math.abs(gate.from().metres() - edge) < 1e-9 || Math.abs(gate.end() - edge) < 1e-9) {
-                return gate.width().metres() / 2;
+            boolean begins = Math.abs(gate.from().metres() - edge) < 1e-9;
+            boolean ends = Math.abs(gate.end() - edge) < 1e-9;
+            boolean atAnEnd = gate.from().metres() == 0 || Math.abs(gate.end() - hoarding.length().metres()) < 1e-9;
+            if (begins || ends) {
+                return atAnEnd ? gate.width().metres() : gate.width().metres() / 2;
             }
         }
         return 0;
-    }
-
-    /** A post in one combination. */
-    private record Worst(Combination combination, PanelForce panel, Bay bay, String zone, double boards, double leaf) {
-        double force() {
-            return boards + leaf;
-        }
-
-        double moment() {
-            return force() * panel.height();
-        }
-    }
-
-    private static Worst share(Combination combination, Bay bay) {
-        PanelForce panel = combination.panels().get(bay.panel());
-        LineLoad line = panel.line();
-        double width = panel.panel().width();
-        double edge = Math.min(0.01, width / 100);
-        double beside = bay.at() < width / 2 ? line.force(0, edge) / edge : line.force(width - edge, width) / edge;
-        return new Worst(combination, panel, bay, zone(panel, bay.at()), line.force(bay.from(), bay.to()), bay.gate() * beside);
     }
 
     private static String zone(PanelForce panel, double at) {
@@ -113,56 +151,52 @@ public final class HoardingPosts {
         return zones.get(0).zone();
     }
 
-    private static void record(List<PostAction> posts, List<Worst> worst, Trace trace) {
+    private static void record(List<PostAction> posts, List<Share> worst, Trace trace) {
         Map<String, Integer> byZone = new LinkedHashMap<>();
         int most = 0;
         for (int i = 0; i < worst.size(); i++) {
             byZone.merge(worst.get(i).zone(), i, (a, b) -> worst.get(b).moment() > worst.get(a).moment() ? b : a);
             most = worst.get(i).moment() > worst.get(most).moment() ? i : most;
         }
-        byZone.values().forEach(i -> recordOne(posts.get(i), worst.get(i), "/" + worst.get(i).zone(), trace));
+        byZone.forEach((zone, i) -> recordOne(posts.get(i), worst.get(i), "/" + zone, trace));
         recordOne(posts.get(most), worst.get(most), "", trace);
     }
 
-    private static void recordOne(PostAction post, Worst worst, String zone, Trace trace) {
-        Trace.Line line = trace.line("post-shear" + zone, "V_p", "shear at the foot of post " + post.post() + ", case " + worst.combination().name())
-            .from(STATICS, Status.DERIVED);
+    private static void recordOne(PostAction post, Share share, String zone, Trace trace) {
+        PanelForce panel = share.placed().panel();
+        String which = post.post() + ", case " + share.named() + (share.placed().shut() ? ", gates shut" : "");
+        Trace.Line line = trace.line("post-shear" + zone, "V_p", "shear at the foot of post " + which).from(STATICS, Status.DERIVED);
         StringBuilder formula = new StringBuilder();
-        double h = worst.panel().panel().height();
-        boolean plain = worst.panel().load().shift() == 0 && worst.panel().load().least() == 0;
-        if (plain) {
-            for (ZonePressure z : worst.panel().load().zones()) {
-                double t = Strip.overlap(worst.bay().from(), worst.bay().to(), z.from(), z.to());
-                if (t > 0) {
-                    String width = "t_{" + z.zone() + "}";
-                    line.in(z.symbol(), z.pressure(), "Pa").in(width, t, "m");
-                    formula.append(formula.isEmpty() ? "" : " + ").append(z.symbol()).append(' ').append(width);
-                }
-            }
-            line.in("h", h, "m");
-            if (worst.leaf() > 0) {
-                line.in("F_g", worst.leaf(), "N");
+        for (ZonePressure z : panel.load().zones()) {
+            double t = Strip.overlap(share.from() - share.placed().left(), share.to() - share.placed().left(), z.from(), z.to());
+            if (t > 1e-9) {
+                String width = "t_{" + z.zone() + "}";
+                line.in(z.symbol(), z.pressure(), "Pa").in(width, t, "m");
+                formula.append(formula.isEmpty() ? "" : " + ").append(z.symbol()).append(' ').append(width);
             }
         }
-        String text = "(" + formula + ") h" + (worst.leaf() > 0 ? " + F_g" : "");
-        double shear = plain ? line.gives(text, worst.force(), "N")
-            : line.reads("line load of the case over the boards that the post carries" + (worst.leaf() > 0 ? " and half of the gate" : ""),
-                worst.force(), "N");
-        double z = worst.panel().height();
-        trace.line("post-moment" + zone, "M_p", "moment at the foot of post " + post.post() + ", case " + worst.combination().name())
-            .in("V_p", shear, "N").in("z_F", z, "m").from(STATICS, Status.DERIVED).gives("V_p z_F", shear * z, "N m");
+        line.in("h", panel.panel().height(), "m");
+        boolean plain = panel.load().shift() == 0 && !panel.raised();
+        double shear = plain ? line.gives("(" + formula + ") h", share.force(), "N")
+            : line.reads("the pressures over the boards that the post carries, "
+                + (panel.raised() ? "raised to the least force of the case" : "spread in a straight line to the resultant of the case"), share.force(), "N");
+        double z = panel.height();
+        trace.line("post-moment" + zone, "M_p", "moment at the foot of post " + which).in("V_p", shear, "N").in("z_F", z, "m")
+            .from(STATICS, Status.DERIVED).gives("V_p z_F", shear * z, "N m");
     }
 
-    /** Sums of the posts' shears, N, and moments, N m, in one combination, boards only. */
-    public static double[] sums(FootActions.Combined combined, Hoarding hoarding, double spacing) {
-        double shear = 0;
-        double moment = 0;
-        for (Bay bay : bays(hoarding, combined.combination(), spacing)) {
-            Worst one = share(combined.combination(), bay);
-            shear += one.boards();
-            moment += one.boards() * one.panel().height();
+    /** Force on the boards in the first zoned or square case, gates open, N, and the sum of what its posts carry. */
+    public static double[] balance(Hoarding hoarding, double spacing, List<PanelCases> open) {
+        double loads = 0;
+        for (PanelCases stretch : open) {
+            loads += PanelForce.of(stretch.panel(), spread(stretch).get(0)).force();
         }
-        return new double[] {shear, moment};
+        double reactions = 0;
+        for (Bay bay : bays(hoarding, spacing)) {
+            PanelCases stretch = open.get(bay.stretch());
+            reactions += share(placed(hoarding, stretch.panel(), spread(stretch).get(0), false), bay, bay.from(), bay.to()).force();
+        }
+        return new double[] {loads, reactions};
     }
 
     private HoardingPosts() { }

@@ -32,6 +32,11 @@ record PanelForce(Panel panel, LoadCase load, double force, double height, doubl
         return panel.middle() + eccentricity;
     }
 
+    /** Whether the least force of the case counts, and not the sum of its zones. */
+    boolean raised() {
+        return load.least() > 0 && force == load.least();
+    }
+
     /** Force per metre along the panel; a least force of the code raises all zones alike. */
     LineLoad line() {
         List<ZonePressure> zones = load.zones();

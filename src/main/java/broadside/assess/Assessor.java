@@ -12,6 +12,7 @@ import broadside.assess.ItemResult.Refusal;
 import broadside.codes.CodeLibrary;
 import broadside.codes.NotCovered;
 import broadside.codes.WindCode;
+import broadside.panel.Hoarding;
 import broadside.panel.Item;
 import broadside.panel.Panel;
 import broadside.panel.PostSign;
@@ -112,12 +113,12 @@ public final class Assessor {
             panels.add(new PanelCases(panel, code.netPressures(panel, job.site(), sheet.part(panel.part()))));
         }
         FootActions.Result actions = FootActions.of(panels, sheet);
-        List<PostAction> posts = posts(item, actions, sheet);
+        List<PostAction> posts = posts(job, item, code, panels, actions, sheet);
         Map<String, String> governing = governing(actions.cases(), posts);
         EdgeOn edgeOn = edgeOn(item, sheet);
         double weight = selfWeight(item, sheet);
         Loads loads = new Loads(velocity(item, sheet), actions.cases(), governing, posts, edgeOn, code.level(), weight,
-            Balances.of(item, actions, posts, governing));
+            Balances.of(item, panels, actions, posts, governing));
         Companions.record(loads, sheet);
         return loads;
     }
@@ -132,11 +133,20 @@ public final class Assessor {
         }
     }
 
-    private static List<PostAction> posts(Item item, FootActions.Result actions, Trace sheet) {
+    private static List<PostAction> posts(Job job, Item item, WindCode code, List<PanelCases> panels, FootActions.Result actions, Trace sheet) {
         return item.choose(
             sign -> SignPosts.of(sign.posts().positions(), actions.combinations(), sheet),
-            hoarding -> hoarding.spacing()
-                .map(s -> HoardingPosts.of(hoarding, s.metres(), actions.combinations(), sheet)).orElse(List.of()));
+            hoarding -> hoarding.spacing().map(spacing -> HoardingPosts.of(hoarding, spacing.metres(), panels,
+                shut(job, hoarding, code, sheet), sheet)).orElse(List.of()));
+    }
+
+    /** The whole wall while its gates are shut. */
+    private static Optional<PanelCases> shut(Job job, Hoarding hoarding, WindCode code, Trace sheet) {
+        if (hoarding.gates().isEmpty()) {
+            return Optional.empty();
+        }
+        Panel whole = hoarding.shut();
+        return Optional.of(new PanelCases(whole, code.netPressures(whole, job.site(), sheet.part(whole.part()))));
     }
 
     private static Map<String, String> governing(List<CaseAction> cases, List<PostAction> posts) {

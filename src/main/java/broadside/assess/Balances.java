@@ -2,27 +2,36 @@ package broadside.assess;
 
 import broadside.action.FootActions;
 import broadside.action.HoardingPosts;
+import broadside.action.PanelCases;
 import broadside.action.PostAction;
 import broadside.action.SignPosts;
+import broadside.panel.Hoarding;
 import broadside.panel.Item;
+import broadside.panel.PostSign;
 import java.util.List;
 import java.util.Map;
 
 /** The equilibrium lines: what acts on the item, and the sum of what its posts answer, in one and the same case. */
 final class Balances {
 
-    static List<Loads.Balance> of(Item item, FootActions.Result actions, List<PostAction> posts, Map<String, String> governing) {
+    static List<Loads.Balance> of(Item item, List<PanelCases> panels, FootActions.Result actions, List<PostAction> posts,
+                                  Map<String, String> governing) {
         if (posts.isEmpty()) {
             return List.of();
         }
-        FootActions.Combined worst = actions.combinations().stream()
-            .filter(c -> c.name().equals(governing.get("post-moment"))).findFirst().orElseThrow();
-        double[] sums = item.choose(
-            sign -> SignPosts.sums(worst, sign.posts().positions()),
-            hoarding -> HoardingPosts.sums(worst, hoarding, hoarding.spacing().orElseThrow().metres()));
-        String gate = item.choose(sign -> "", hoarding -> hoarding.gates().isEmpty() ? "" : ", gate leaves left out");
-        return List.of(new Loads.Balance("shear at the ground, case " + worst.name() + gate, worst.force(), sums[0], "N"),
-            new Loads.Balance("moment at the ground, case " + worst.name() + gate, worst.moment(), sums[1], "N m"));
+        return item.choose(sign -> sign(sign, actions, governing.get("post-moment")), hoarding -> hoarding(hoarding, panels));
+    }
+
+    private static List<Loads.Balance> sign(PostSign sign, FootActions.Result actions, String governing) {
+        FootActions.Combined worst = actions.combinations().stream().filter(c -> c.name().equals(governing)).findFirst().orElseThrow();
+        double[] sums = SignPosts.sums(worst, sign.posts().positions());
+        return List.of(new Loads.Balance("shear at the ground, case " + worst.name(), worst.force(), sums[0], "N"),
+            new Loads.Balance("moment at the ground, case " + worst.name(), worst.moment(), sums[1], "N m"));
+    }
+
+    private static List<Loads.Balance> hoarding(Hoarding hoarding, List<PanelCases> panels) {
+        double[] sums = HoardingPosts.balance(hoarding, hoarding.spacing().orElseThrow().metres(), panels);
+        return List.of(new Loads.Balance("force on the boards and shears of all posts, one case, gates open", sums[0], sums[1], "N"));
     }
 
     private Balances() { }

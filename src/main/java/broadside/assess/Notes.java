@@ -103,7 +103,8 @@ final class Notes {
             add(Note.Kind.ASSUMPTION, "The spacing of the posts was not given: there is no moment for each post.");
         }
         if (!hoarding.gates().isEmpty()) {
-            add(Note.Kind.ASSUMPTION, "An open gate makes two new free ends. A shut gate hangs half of its load on the post at each side.");
+            add(Note.Kind.ASSUMPTION, "Both states of the gates count for the posts: open, where each gate makes two free ends, and shut, where the leaf hangs on the posts "
+                + "beside it. The forces on the whole hoarding are given with the gates open.");
         }
         add(Note.Kind.ASSUMPTION, "The thickness of the hoarding is not known: wind along it counts friction on both faces only.");
     }

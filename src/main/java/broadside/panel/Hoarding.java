@@ -62,6 +62,11 @@ public record Hoarding(String mark, Length length, Length height, Length clearan
         return panels;
     }
 
+    /** The whole wall while its gates are shut. */
+    public Panel shut() {
+        return panel("gates-shut", 0, length.metres());
+    }
+
     private Panel panel(String part, double from, double to) {
         double left = from == 0 ? returnLeft.metres() : 0;
         double right = to == length.metres() ? returnRight.metres() : 0;

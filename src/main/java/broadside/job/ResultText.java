@@ -1,0 +1,131 @@
+package broadside.job;
+
+import broadside.action.CaseAction;
+import broadside.action.CaseAction.PanelZones;
+import broadside.action.PostAction;
+import broadside.assess.Assessment;
+import broadside.assess.ItemResult;
+import broadside.assess.Loads;
+import broadside.codes.Level;
+import broadside.codes.ZonePressure;
+import broadside.trace.OwnValue;
+import broadside.trace.Step;
+import broadside.trace.Trace;
+import tools.jackson.databind.JsonNode;
+import tools.jackson.databind.node.ArrayNode;
+import tools.jackson.databind.node.ObjectNode;
+
+/** The result of a job as JSON. Page, document and commands show this and nothing else. */
+public final class ResultText {
+
+    public static JsonNode of(Assessment assessment) {
+        ObjectNode root = JobText.mapper().createObjectNode();
+        root.put("broadside", 1);
+        root.put("status", "preliminary");
+        root.put("version", assessment.about().version());
+        root.put("tables", assessment.about().tables());
+        root.put("code", assessment.job().basis().key());
+        assessment.job().head("title").ifPresent(t -> root.put("title", t));
+        ArrayNode items = root.putArray("items");
+        assessment.items().forEach(item -> item(items.addObject(), item));
+        return root;
+    }
+
+    private static void item(ObjectNode node, ItemResult result) {
+        node.put("mark", result.item().mark());
+        node.put("kind", result.item().kind());
+        node.put("outcome", result.outcome().word());
+        result.refusal().ifPresent(r -> node.putObject("reason").put("code", r.code()).put("clause", r.clause()).put("reason", r.reason())
+            .put("instead", r.instead()));
+        result.loads().ifPresent(l -> loads(node, l));
+        node.putArray("supports");
+        node.putArray("limits");
+        ArrayNode notes = node.putArray("notes");
+        result.notes().forEach(n -> notes.addObject().put("kind", n.kind().word()).put("text", n.text()));
+        overrides(node, result.sheet());
+        givens(node.putArray("given"), result.sheet());
+        ArrayNode steps = node.putArray("steps");
+        result.sheet().steps().forEach(s -> step(steps.addObject(), s));
+    }
+
+    private static void loads(ObjectNode node, Loads loads) {
+        Level level = loads.level();
+        node.putObject("velocity-pressure").put("height_m", loads.velocity().height()).put("value_Pa", loads.velocity().pressure())
+            .put("level", level.name());
+        ArrayNode cases = node.putArray("cases");
+        loads.cases().forEach(c -> caseOf(cases.addObject(), c, level));
+        ObjectNode governing = node.putObject("governing");
+        loads.governing().entrySet().stream().sorted(java.util.Map.Entry.comparingByKey()).forEach(e -> governing.put(e.getKey(), e.getValue()));
+        node.putObject("companion").put("level", level.companion()).put("factor", level.factor()).put("rule", level.rule());
+        ArrayNode posts = node.putArray("posts");
+        loads.posts().forEach(p -> post(posts.addObject(), p, level));
+        node.putObject("edge-on").put("label", "wind along the face: own rule, of no code").put("force_N", loads.edgeOn().force())
+            .put("base_moment_Nm", loads.edgeOn().moment());
+        if (loads.selfWeight() > 0) {
+            node.put("self_weight_N", loads.selfWeight());
+        }
+        ArrayNode balance = node.putArray("equilibrium");
+        loads.balance().forEach(b -> balance.addObject().put("what", b.what()).put("loads", b.loads()).put("reactions", b.reactions())
+            .put("unit", b.unit()));
+    }
+
+    private static void caseOf(ObjectNode node, CaseAction action, Level level) {
+        node.put("case", action.name()).put("label", action.label()).put("direction", action.direction())
+            .put("windward-end", action.windward().name().toLowerCase(java.util.Locale.ROOT)).put("level", level.name());
+        ArrayNode zones = node.putArray("zones");
+        for (PanelZones panel : action.zones()) {
+            for (ZonePressure zone : panel.zones()) {
+                ObjectNode each = zones.addObject().put("zone", zone.zone());
+                if (!panel.part().isEmpty()) {
+                    each.put("panel", panel.part());
+                }
+                each.put("from_m", zone.from()).put("to_m", zone.to()).put("coefficient", zone.coefficient()).put("pressure_Pa", zone.pressure());
+            }
+        }
+        node.put("force_N", action.force()).put("height_m", action.height()).put("side_m", action.side()).put("base_shear_N", action.baseShear())
+            .put("base_moment_Nm", action.baseMoment()).put("torsion_Nm", action.torsion());
+        node.putObject("companion").put("level", level.companion()).put("force_N", level.factor() * action.force())
+            .put("base_shear_N", level.factor() * action.baseShear()).put("base_moment_Nm", level.factor() * action.baseMoment())
+            .put("torsion_Nm", level.factor() * action.torsion());
+    }
+
+    private static void post(ObjectNode node, PostAction post, Level level) {
+        node.put("post", post.post()).put("position_m", post.position());
+        if (!post.zone().isEmpty()) {
+            node.put("zone", post.zone());
+        }
+        post.share().ifPresent(s -> node.put("carries_m", s));
+        if (post.gate() > 0) {
+            node.put("gate_leaf_m", post.gate());
+        }
+        node.put("case", post.named()).put("shear_N", post.shear()).put("moment_Nm", post.moment())
+            .put("companion_moment_Nm", level.factor() * post.moment());
+    }
+
+    private static void overrides(ObjectNode node, Trace sheet) {
+        if (sheet.overridesUsed().isEmpty()) {
+            return;
+        }
+        ArrayNode overrides = node.putArray("overrides");
+        for (OwnValue own : sheet.overridesUsed()) {
+            overrides.addObject().put("name", own.name()).put("value", own.value()).put("unit", own.unit()).put("reason", own.reason());
+        }
+    }
+
+    private static void givens(ArrayNode node, Trace sheet) {
+        for (Trace.Given given : sheet.givens()) {
+            node.addObject().put("symbol", given.symbol()).put("meaning", given.meaning()).put("value", given.value()).put("unit", given.unit())
+                .put("typed", given.typed());
+        }
+    }
+
+    private static void step(ObjectNode node, Step step) {
+        node.put("name", step.name()).put("symbol", step.symbol()).put("meaning", step.meaning()).put("formula", step.formula());
+        ArrayNode inputs = node.putArray("inputs");
+        step.inputs().forEach(i -> inputs.addObject().put("symbol", i.symbol()).put("value", i.value()).put("unit", i.unit()));
+        node.put("value", step.value()).put("unit", step.unit()).put("place", step.place()).put("status", step.status().word());
+        step.replaced().ifPresent(r -> node.putObject("replaces").put("calculated", r.calculated()).put("reason", r.reason()));
+    }
+
+    private ResultText() { }
+}
