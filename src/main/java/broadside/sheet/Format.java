@@ -1,0 +1,97 @@
+package broadside.sheet;
+
+import broadside.assess.Job;
+import broadside.quantity.Dimension;
+import broadside.quantity.Rounding;
+import broadside.quantity.Show;
+import broadside.quantity.Shown;
+import broadside.quantity.Units;
+import java.util.Locale;
+
+/** Numbers as they are shown: three figures in answers, four in the calculation; loads are rounded up, and only here. */
+final class Format {
+
+    private final Units units;
+
+    Format(Units units) {
+        this.units = units;
+    }
+
+    /** The system of a job: the one it names, else the one its wind speed is typed in. */
+    static Units unitsOf(Job job) {
+        return job.head("units").map(u -> u.equals("us") ? Units.US : Units.METRIC).orElseGet(() -> {
+            String typed = job.site().basicSpeed().typed().toLowerCase(Locale.ROOT);
+            return typed.contains("mph") || typed.contains("ft/s") ? Units.US : Units.METRIC;
+        });
+    }
+
+    Units units() {
+        return units;
+    }
+
+    String force(double newtons) {
+        return load(newtons, Dimension.FORCE);
+    }
+
+    String moment(double newtonMetres) {
+        return load(newtonMetres, Dimension.MOMENT);
+    }
+
+    String pressure(double pascals) {
+        return load(pascals, Dimension.PRESSURE);
+    }
+
+    String speed(double metresPerSecond) {
+        return Show.of(metresPerSecond, Dimension.SPEED, units, 3, Rounding.NEAREST).text();
+    }
+
+    String length(double metres) {
+        return units == Units.US ? Show.feetInches(metres) : trimmed(metres) + " m";
+    }
+
+    String mass(double kilograms) {
+        return load(kilograms, Dimension.MASS);
+    }
+
+    String plain(double number) {
+        return Show.number(number, 4, Rounding.NEAREST);
+    }
+
+    /** A load in both systems: the leading one first. */
+    String both(double si, Dimension dimension) {
+        Units other = units == Units.US ? Units.METRIC : Units.US;
+        return load(si, dimension) + " (" + Show.of(si, dimension, other, 3, Rounding.UP).text() + ")";
+    }
+
+    private String load(double si, Dimension dimension) {
+        if (si == 0) {
+            return "0";
+        }
+        return Show.of(si, dimension, units, 3, Rounding.UP).text();
+    }
+
+    private static String trimmed(double metres) {
+        double rounded = Math.round(metres * 1000) / 1000.0;
+        return rounded == Math.rint(rounded) ? Long.toString((long) rounded) : Double.toString(rounded);
+    }
+
+    /** A value of the calculation in the other system, when that one leads; empty otherwise. */
+    String other(double value, String unit) {
+        if (units != Units.US) {
+            return "";
+        }
+        return dimension(unit).map(d -> Show.of(value, d, Units.US, 4, Rounding.NEAREST)).map(Shown::text).orElse("");
+    }
+
+    private static java.util.Optional<Dimension> dimension(String unit) {
+        return switch (unit) {
+            case "m" -> java.util.Optional.of(Dimension.LENGTH);
+            case "m/s" -> java.util.Optional.of(Dimension.SPEED);
+            case "Pa" -> java.util.Optional.of(Dimension.PRESSURE);
+            case "N" -> java.util.Optional.of(Dimension.FORCE);
+            case "N m" -> java.util.Optional.of(Dimension.MOMENT);
+            case "kg" -> java.util.Optional.of(Dimension.MASS);
+            default -> java.util.Optional.empty();
+        };
+    }
+}

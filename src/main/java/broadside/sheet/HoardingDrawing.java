@@ -1,0 +1,143 @@
+package broadside.sheet;
+
+import broadside.action.CaseAction;
+import broadside.action.CaseAction.PanelZones;
+import broadside.action.PostAction;
+import broadside.assess.Loads;
+import broadside.codes.ZonePressure;
+import broadside.panel.Hoarding;
+import broadside.panel.Panel;
+import broadside.sheet.Drawing.Anchor;
+import broadside.sheet.Drawing.Fill;
+import broadside.sheet.Drawing.Ink;
+import java.util.Optional;
+
+/** Elevation of a hoarding over its whole length, and a side view at a larger scale below it. */
+final class HoardingDrawing {
+
+    private static final double MARGIN = 40;
+    private static final double SIDE = 110;
+
+    private final Hoarding hoarding;
+    private final Optional<Loads> loads;
+    private final Format format;
+    private final double length;
+    private final double top;
+
+    HoardingDrawing(Hoarding hoarding, Optional<Loads> loads, Format format) {
+        this.hoarding = hoarding;
+        this.loads = loads;
+        this.format = format;
+        this.length = hoarding.length().metres();
+        this.top = hoarding.clearance().metres() + hoarding.height().metres();
+    }
+
+    Drawing make() {
+        double scale = Math.min((ItemDrawing.WIDTH - 2 * MARGIN) / length, 120 / top);
+        double ground = 62 + top * scale;
+        Canvas front = new Canvas(MARGIN + ((ItemDrawing.WIDTH - 2 * MARGIN) - length * scale) / 2, ground, scale);
+        front.text(ItemDrawing.WIDTH / 2, 12, "elevation, seen from the front", Anchor.MIDDLE, Ink.BLACK);
+        front.ground(front.x(0) - 20, front.x(length) + 20);
+        for (Panel panel : hoarding.panels()) {
+            front.box(left(panel), panel.clearance(), panel.width(), panel.height(), Canvas.THICK, Fill.PAPER);
+        }
+        zones(front);
+        posts(front);
+        gates(front);
+        returns(front);
+        front.help(front.x(0), front.y(top), front.x(0), 34);
+        front.help(front.x(length), front.y(top), front.x(length), 34);
+        front.across(0, length, 36, hoarding.length().typed());
+        double bar = ItemDrawing.barLength(length, format.units());
+        front.scaleBar(front.x(0), ground + 48, bar, ItemDrawing.barText(bar, format));
+        return side(front, ground + 66);
+    }
+
+    private double left(Panel panel) {
+        return panel.middle() - panel.width() / 2 + length / 2;
+    }
+
+    private void zones(Canvas front) {
+        if (loads.isEmpty()) {
+            return;
+        }
+        CaseAction governing = zoned(loads.get());
+        double most = governing.zones().stream().flatMap(p -> p.zones().stream()).mapToDouble(ZonePressure::pressure).max().orElseThrow();
+        double bottom = hoarding.clearance().metres();
+        for (PanelZones panel : governing.zones()) {
+            double before = -20;
+            for (ZonePressure zone : panel.zones()) {
+                double from = panel.left() + length / 2 + zone.from();
+                front.hatch(from, bottom, zone.width(), hoarding.height().metres(), 4 * most / zone.pressure());
+                front.line(front.x(from), front.y(bottom), front.x(from), front.y(top), Canvas.THIN, Ink.BLACK, false);
+                double middle = front.x(from + zone.width() / 2);
+                if (panel.zones().size() > 1 && middle - before > 9) {
+                    front.boldText(middle, front.y(top) - 4, shortName(zone.zone()), Anchor.MIDDLE, Ink.BLACK);
+                    before = middle + (shortName(zone.zone()).length() > 2 ? 14 : 0);
+                }
+            }
+        }
+    }
+
+    /** The case with zones where there is one, else the one that governs the moment. */
+    private static CaseAction zoned(Loads loads) {
+        return loads.cases().stream().filter(c -> c.direction().equals("front"))
+            .filter(c -> c.zones().stream().anyMatch(p -> p.zones().size() > 1)).findFirst().orElse(loads.governs("base-moment"));
+    }
+
+    /** "case-c/s-2s" becomes "s-2s" on the drawing. */
+    static String shortName(String zone) {
+        return zone.substring(zone.indexOf('/') + 1);
+    }
+
+    private void posts(Canvas front) {
+        if (loads.isEmpty()) {
+            return;
+        }
+        for (PostAction post : loads.get().posts()) {
+            front.line(front.x(post.position()), front.y(0), front.x(post.position()), front.y(0) + 9, Canvas.THICK, Ink.BLACK, false);
+        }
+        if (loads.get().posts().size() > 1) {
+            front.text(front.x(0), front.y(0) + 22, "posts at " + hoarding.spacing().orElseThrow().typed(), Anchor.START, Ink.BLACK);
+        }
+    }
+
+    private void gates(Canvas front) {
+        for (Hoarding.Gate gate : hoarding.gates()) {
+            front.line(front.x(gate.from().metres()), front.y(0), front.x(gate.end()), front.y(top), Canvas.THIN, Ink.BLACK, true);
+            front.line(front.x(gate.from().metres()), front.y(top), front.x(gate.end()), front.y(0), Canvas.THIN, Ink.BLACK, true);
+            front.text(front.x((gate.from().metres() + gate.end()) / 2), front.y(0) + 22, "gate " + gate.width().typed(), Anchor.MIDDLE, Ink.BLACK);
+        }
+    }
+
+    private void returns(Canvas front) {
+        if (hoarding.returnLeft().metres() > 0) {
+            front.text(front.x(0), front.y(0) + 34, "return " + hoarding.returnLeft().typed(), Anchor.START, Ink.BLACK);
+        }
+        if (hoarding.returnRight().metres() > 0) {
+            front.text(front.x(length), front.y(0) + 34, "return " + hoarding.returnRight().typed(), Anchor.END, Ink.BLACK);
+        }
+    }
+
+    private Drawing side(Canvas front, double startY) {
+        double scale = SIDE / top;
+        double ground = startY + 26 + SIDE;
+        Canvas side = front.view(ItemDrawing.WIDTH / 2, ground, scale);
+        double[][] panels = {{hoarding.clearance().metres(), hoarding.height().metres(), 0}};
+        double height = loads.map(l -> l.governs("base-moment").height()).orElse(-1.0);
+        String label = loads.map(l -> "F " + format.force(l.governs("base-moment").force()) + " in all").orElse("");
+        SideView.draw(side, ItemDrawing.WIDTH / 2 - 110, ItemDrawing.WIDTH / 2 + 110, panels, top, height, label,
+            loads.isPresent() ? format.length(height) : "");
+        double dim = ItemDrawing.WIDTH / 2 + 80;
+        side.help(side.x(0.06), side.y(top), dim + 4, side.y(top));
+        side.line(dim, side.y(hoarding.clearance().metres()), dim, side.y(top), Canvas.THIN, Ink.BLACK, false);
+        side.text(dim + 4, (side.y(hoarding.clearance().metres()) + side.y(top)) / 2, hoarding.height().typed(), Anchor.START, Ink.BLACK);
+        if (hoarding.clearance().metres() > 0) {
+            side.text(dim + 4, side.y(0) - 3, hoarding.clearance().typed() + " gap", Anchor.START, Ink.BLACK);
+        }
+        side.text(ItemDrawing.WIDTH / 2, startY + 6, "side view, larger scale", Anchor.MIDDLE, Ink.BLACK);
+        double bar = ItemDrawing.barLength(4 * top, format.units());
+        side.scaleBar(ItemDrawing.WIDTH / 2 - 200, ground, bar / 2, ItemDrawing.barText(bar / 2, format));
+        return new Drawing(ItemDrawing.WIDTH, ground + 12, front.shapes());
+    }
+}

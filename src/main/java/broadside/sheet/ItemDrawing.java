@@ -1,0 +1,52 @@
+package broadside.sheet;
+
+import broadside.assess.Loads;
+import broadside.panel.Item;
+import broadside.quantity.Units;
+import java.util.Optional;
+
+/** The drawing of an item: elevation and side view to scale, with zones and forces once the loads are known. */
+public final class ItemDrawing {
+
+    /** Width of a drawing on paper, points. */
+    static final double WIDTH = 480;
+
+    /** Draws an item; zones and force are those of the case that governs the moment at the ground. */
+    public static Drawing of(Item item, Optional<Loads> loads, Units units) {
+        Format format = new Format(units);
+        return item.choose(sign -> new SignDrawing(sign, loads, format).make(), hoarding -> new HoardingDrawing(hoarding, loads, format).make());
+    }
+
+    /** The content of the drawing in words, for those who cannot see it. */
+    public static String words(Item item, Optional<Loads> loads, Units units) {
+        Format format = new Format(units);
+        String what = item.choose(
+            sign -> "Elevation and side view of a sign of " + (sign.boards().size() == 1 ? "one board" : sign.boards().size() + " boards") + " on "
+                + (sign.posts().count() == 1 ? "one post" : sign.posts().count() + " posts") + ": " + String.join("; ", sign.boards().stream()
+                .map(b -> b.width().typed() + " wide, " + b.height().typed() + " high, " + b.clearance().typed() + " above the ground").toList()),
+            hoarding -> "Elevation and side view of a hoarding " + hoarding.length().typed() + " long and " + hoarding.height().typed() + " high"
+                + (hoarding.gates().isEmpty() ? "" : " with " + hoarding.gates().size() + (hoarding.gates().size() == 1 ? " gate" : " gates")));
+        return what + loads.map(l -> ". The force of the governing case, " + format.force(l.governs("base-moment").force()) + ", acts "
+            + format.length(l.governs("base-moment").height()) + " above the ground.").orElse(".");
+    }
+
+    /** A round length for the scale bar, at most about a quarter of the width drawn. */
+    static double barLength(double widthMetres, Units units) {
+        double unit = units == Units.US ? 0.3048 : 1;
+        double[] round = {0.1, 0.2, 0.5, 1, 2, 5, 10, 20, 50, 100, 200, 500};
+        double best = round[0];
+        for (double each : round) {
+            if (each * unit <= widthMetres / 4) {
+                best = each;
+            }
+        }
+        return best * unit;
+    }
+
+    /** Its text. */
+    static String barText(double metres, Format format) {
+        return format.units() == Units.US ? Math.round(metres / 0.3048 * 10) / 10.0 + " ft" : format.length(metres);
+    }
+
+    private ItemDrawing() { }
+}
