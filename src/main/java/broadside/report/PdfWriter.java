@@ -1,0 +1,78 @@
+package broadside.report;
+
+import broadside.sheet.Sheet;
+import java.awt.color.ColorSpace;
+import java.awt.color.ICC_Profile;
+import java.io.ByteArrayOutputStream;
+import java.io.IOException;
+import java.io.OutputStream;
+import java.nio.ByteBuffer;
+import java.nio.charset.StandardCharsets;
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
+import java.util.List;
+import org.apache.pdfbox.cos.COSDictionary;
+import org.apache.pdfbox.cos.COSName;
+import org.apache.pdfbox.cos.COSStream;
+import org.apache.pdfbox.pdmodel.PDDocument;
+
+/**
+ * Writes a sheet as a tagged PDF that keeps PDF/A-3A and PDF/UA-1, with the job file inside. The same sheet gives the
+ * same bytes. One writer serves all threads; making it reads the fonts.
+ */
+public final class PdfWriter {
+
+    private final Lettering lettering = new Lettering();
+    private final byte[] profile = ICC_Profile.getInstance(ColorSpace.CS_sRGB).getData();
+
+    /** Writes the document and leaves {@code out} open. Nothing is written before the document is complete. */
+    public void write(Sheet sheet, Paper paper, Attachment job, OutputStream out) throws IOException {
+        Typeset typeset = new Typeset(lettering);
+        Flow flow = new Flow(paper, typeset);
+        COSDictionary root = new COSDictionary();
+        List<Heading> headings = new Composer(sheet, flow, Tag.top(root)).compose();
+        ByteArrayOutputStream bytes = new ByteArrayOutputStream(65_536);
+        try (PDDocument document = new PDDocument()) {
+            document.setVersion(1.7f);
+            for (Flow.Leaf leaf : flow.leaves()) {
+                leaf.page().getCOSObject().setItem(COSName.CONTENTS, stream(document, leaf.content().bytes()));
+                document.addPage(leaf.page());
+            }
+            typeset.embed(document, flow.resources());
+            surround(document, sheet, job, new Metadata(sheet), root, headings, flow);
+            document.save(bytes);
+        }
+        bytes.writeTo(out);
+    }
+
+    private void surround(PDDocument document, Sheet sheet, Attachment job, Metadata metadata, COSDictionary root,
+                          List<Heading> headings, Flow flow) throws IOException {
+        Envelope envelope = new Envelope(document);
+        envelope.describe();
+        envelope.parents(root, flow.leaves());
+        envelope.bookmarks(headings, flow);
+        envelope.colours(profile);
+        envelope.attach(job, metadata.pdfDate());
+        metadata.write(document);
+        document.setDocumentId(identity(sheet, job));
+    }
+
+    private static COSStream stream(PDDocument document, byte[] content) throws IOException {
+        COSStream stream = document.getDocument().createCOSStream();
+        try (OutputStream out = stream.createOutputStream(COSName.FLATE_DECODE)) {
+            out.write(content);
+        }
+        return stream;
+    }
+
+    /** Returns a number that is the same for the same sheet and job, and for no others in practice. */
+    private static long identity(Sheet sheet, Attachment job) {
+        try {
+            MessageDigest digest = MessageDigest.getInstance("SHA-256");
+            digest.update(sheet.toString().getBytes(StandardCharsets.UTF_8));
+            return ByteBuffer.wrap(digest.digest(job.bytes())).getLong();
+        } catch (NoSuchAlgorithmException e) {
+            throw new ReportException("this Java has no SHA-256, which every Java must have", e);
+        }
+    }
+}

@@ -1,0 +1,124 @@
+package broadside.report;
+
+import broadside.sheet.Block.Column;
+import broadside.sheet.Block.Row;
+import broadside.sheet.Block.Table;
+import java.util.ArrayList;
+import java.util.List;
+
+/** A table, measured and tagged. Its head is drawn again on each page that it goes on to. */
+final class TableParts implements Part {
+
+    private static final double GUTTER = 10;
+    private static final double PAD = 2.5;
+    /** A head taller than this share of a page is not repeated. */
+    private static final double TALLEST_HEAD = 0.3;
+
+    private final Flow flow;
+    private final Table table;
+    private final double[] widths;
+    private final Band head;
+    private final List<Band> rows = new ArrayList<>();
+    private final List<Band> caption = new ArrayList<>();
+
+    TableParts(Flow flow, Tag parent, Table table) {
+        this.flow = flow;
+        this.table = table;
+        check(table);
+        Tag tag = parent.child("Table");
+        Words title = flow.typeset().words().add(table.caption(), true);
+        if (!title.isEmpty()) {
+            Band.Cell cell = new Band.Cell(0, flow.width()).add(title, Type.TABLE, tag.child("Caption"));
+            caption.add(new Band(9, 0, List.of(cell)));
+        }
+        widths = widths();
+        head = head(tag.child("THead").child("TR"));
+        if (!table.rows().isEmpty()) {
+            Tag body = tag.child("TBody");
+            table.rows().forEach(row -> rows.add(row(row, body.child("TR"))));
+        }
+    }
+
+    private static void check(Table table) {
+        if (table.columns().isEmpty()) {
+            throw new IllegalArgumentException("a table needs at least one column: " + table.caption());
+        }
+        for (Row row : table.rows()) {
+            if (row.cells().size() != table.columns().size()) {
+                throw new IllegalArgumentException("a row has " + row.cells().size() + " cells and its table "
+                    + table.columns().size() + " columns: " + table.caption());
+            }
+        }
+    }
+
+    private double[] widths() {
+        int count = table.columns().size();
+        double[] whole = new double[count];
+        double[] least = new double[count];
+        int[] weights = new int[count];
+        for (int i = 0; i < count; i++) {
+            Column column = table.columns().get(i);
+            weights[i] = column.weight();
+            measure(column.heading(), true, i, whole, least);
+            for (Row row : table.rows()) {
+                measure(row.cells().get(i), row.marked(), i, whole, least);
+            }
+        }
+        return Columns.fit(whole, least, weights, flow.width() - GUTTER * (count - 1));
+    }
+
+    private void measure(String text, boolean bold, int i, double[] whole, double[] least) {
+        Words words = flow.typeset().words().add(text, bold);
+        // A little more than the sum, so that rounding does not break a line that fits.
+        whole[i] = Math.max(whole[i], words.wholeWidth(Type.TABLE.size()) + 0.1);
+        least[i] = Math.max(least[i], words.widestWord(Type.TABLE.size()) + 0.1);
+    }
+
+    private Band head(Tag tag) {
+        List<Band.Cell> cells = new ArrayList<>();
+        for (int i = 0; i < widths.length; i++) {
+            Tag cell = tag.child("TH").attribute(Tag.Attribute.COLUMN_HEADING);
+            cells.add(cell(i).add(flow.typeset().words().add(table.columns().get(i).heading(), true), Type.TABLE, cell));
+        }
+        return new Band(caption.isEmpty() ? 9 : 2, PAD, cells, (content, f, top, bottom) ->
+            content.rule(f.left(), f.y(bottom), f.left() + f.width(), f.y(bottom), 1, Colour.INK));
+    }
+
+    private Band row(Row row, Tag tag) {
+        List<Band.Cell> cells = new ArrayList<>();
+        for (int i = 0; i < widths.length; i++) {
+            Tag cell = tag.child(i == 0 ? "TH" : "TD");
+            if (i == 0) {
+                cell.attribute(Tag.Attribute.ROW_HEADING);
+            }
+            cells.add(cell(i).add(flow.typeset().words().add(row.cells().get(i), row.marked()), Type.TABLE, cell));
+        }
+        return new Band(0, PAD, cells, TextParts::hairline);
+    }
+
+    private Band.Cell cell(int i) {
+        double x = 0;
+        for (int k = 0; k < i; k++) {
+            x += widths[k] + GUTTER;
+        }
+        return new Band.Cell(x, widths[i], table.columns().get(i).number(), 0);
+    }
+
+    @Override
+    public double first() {
+        double above = caption.isEmpty() ? 0 : caption.get(0).first();
+        return above + head.first() + (rows.isEmpty() ? 0 : rows.get(0).first());
+    }
+
+    @Override
+    public void place(Flow target) {
+        target.keep(first());
+        caption.forEach(band -> band.place(target));
+        head.place(target);
+        if (head.height() < target.body() * TALLEST_HEAD) {
+            target.repeat(() -> head.placeAgain(target));
+        }
+        rows.forEach(band -> band.place(target));
+        target.repeat(() -> { });
+    }
+}
