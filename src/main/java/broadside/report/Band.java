@@ -18,7 +18,7 @@ final class Band implements Part {
         private final double x;
         private final double width;
         private final boolean right;
-        private final double drop;
+        private double drop;
         private final List<Row> rows = new ArrayList<>();
 
         /** @param drop how much lower than the others the first line stands, so that base lines agree */
@@ -49,11 +49,22 @@ final class Band implements Part {
         }
     }
 
+    /** Lowers the shorter cells so that all end on the same line, as the headings of columns do. */
+    static List<Cell> level(List<Cell> cells) {
+        double tallest = cells.stream().mapToDouble(Cell::height).max().orElse(0);
+        if (tallest <= TALLEST_LEVEL) {
+            cells.forEach(cell -> cell.drop += cell.rows.isEmpty() ? 0 : tallest - cell.height());
+        }
+        return cells;
+    }
+
     /** Draws what goes with a stretch of the band on one page: a rule below it, a bar beside it. */
     interface Trim {
         void draw(Content content, Flow flow, double top, double bottom);
     }
 
+    /** Cells taller than this may go on to the next page and begin at the top, all of them. */
+    private static final double TALLEST_LEVEL = 150;
     private static final double TOLERANCE = 0.01;
     private static final Trim NONE = (content, flow, top, bottom) -> { };
 

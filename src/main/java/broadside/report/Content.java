@@ -9,6 +9,9 @@ import java.util.Optional;
  */
 final class Content {
 
+    /** Characters in one string; PDF/A allows 32767 bytes, and each character takes two. */
+    private static final int LONGEST_STRING = 8_000;
+
     private final StringBuilder out = new StringBuilder(8192);
     private final Typeset typeset;
     private String font = "";
@@ -107,6 +110,9 @@ final class Content {
             int glyph = typeset.glyph(words.character(i), bold);
             octet(glyph >> 8);
             octet(glyph & 255);
+            if ((i - from + 1) % LONGEST_STRING == 0) {
+                out.append(") Tj (");
+            }
         }
         out.append(") Tj ");
         if (lowered) {

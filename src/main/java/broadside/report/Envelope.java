@@ -2,7 +2,12 @@ package broadside.report;
 
 import java.io.IOException;
 import java.io.OutputStream;
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
+import java.util.Arrays;
+import java.util.HexFormat;
 import java.util.List;
+import java.util.zip.Deflater;
 import org.apache.pdfbox.cos.COSArray;
 import org.apache.pdfbox.cos.COSDictionary;
 import org.apache.pdfbox.cos.COSInteger;
@@ -17,6 +22,8 @@ import org.apache.pdfbox.pdmodel.interactive.documentnavigation.outline.PDOutlin
 
 /** What a PDF holds around its pages: the tree of tags, bookmarks, the colour profile and the job file. */
 final class Envelope {
+
+    private static final int LEVEL = 4;
 
     private final PDDocument document;
     private final COSDictionary catalog;
@@ -79,10 +86,9 @@ final class Envelope {
     }
 
     /** The colours are meant for this profile, sRGB. */
-    void colours(byte[] profile) throws IOException {
-        COSStream stream = document.getDocument().createCOSStream();
+    void colours(byte[] packedProfile) throws IOException {
+        COSStream stream = stream(document, packedProfile);
         stream.setInt(COSName.N, 3);
-        fill(stream, profile);
         COSDictionary intent = new COSDictionary();
         intent.setItem(COSName.TYPE, COSName.getPDFName("OutputIntent"));
         intent.setItem(COSName.S, COSName.getPDFName("GTS_PDFA1"));
@@ -96,15 +102,15 @@ final class Envelope {
 
     /** Embeds the job file as the source of the document. */
     void attach(Attachment job, COSString date) throws IOException {
-        COSStream stream = document.getDocument().createCOSStream();
+        byte[] bytes = job.bytes();
+        COSStream stream = stream(document, pack(bytes));
         stream.setItem(COSName.TYPE, COSName.EMBEDDED_FILE);
         stream.setItem(COSName.SUBTYPE, COSName.getPDFName("application/json"));
         COSDictionary properties = direct();
-        byte[] bytes = job.bytes();
         properties.setInt(COSName.SIZE, bytes.length);
         properties.setItem(COSName.getPDFName("ModDate"), date);
+        properties.setItem(COSName.getPDFName("CheckSum"), checkSum(bytes));
         stream.setItem(COSName.getPDFName("Params"), properties);
-        fill(stream, bytes);
         COSDictionary file = file(job, stream);
         COSArray names = new COSArray();
         names.add(Texts.pdf(job.fileName(), 200));
@@ -117,6 +123,21 @@ final class Envelope {
         COSArray associated = new COSArray();
         associated.add(file);
         catalog.setItem(COSName.AF, associated);
+    }
+
+    private static COSString checkSum(byte[] bytes) throws IOException {
+        COSString sum = COSString.parseHex(sum(bytes));
+        sum.setForceHexForm(true);
+        return sum;
+    }
+
+    /** Returns the MD5 sum in hexadecimal digits, as PDF asks for embedded files; it finds damage, no forgery. */
+    static String sum(byte[] bytes) {
+        try {
+            return HexFormat.of().withUpperCase().formatHex(MessageDigest.getInstance("MD5").digest(bytes));
+        } catch (NoSuchAlgorithmException e) {
+            throw new ReportException("this Java has no MD5, which every Java must have", e);
+        }
     }
 
     private static COSDictionary file(Attachment job, COSStream stream) {
@@ -133,9 +154,33 @@ final class Envelope {
         return file;
     }
 
-    private static void fill(COSStream stream, byte[] bytes) throws IOException {
-        try (OutputStream out = stream.createOutputStream(COSName.FLATE_DECODE)) {
-            out.write(bytes);
+    /** Returns a stream of the document with packed content. */
+    static COSStream stream(PDDocument document, byte[] packed) throws IOException {
+        COSStream stream = document.getDocument().createCOSStream();
+        stream.setItem(COSName.FILTER, COSName.FLATE_DECODE);
+        try (OutputStream out = stream.createRawOutputStream()) {
+            out.write(packed);
+        }
+        return stream;
+    }
+
+    /** Packs the content of a stream; the fast levels cost a third of the time and a few hundredths of the size. */
+    static byte[] pack(byte[] content) {
+        Deflater deflater = new Deflater(LEVEL);
+        try {
+            deflater.setInput(content);
+            deflater.finish();
+            byte[] packed = new byte[content.length / 2 + 64];
+            int length = 0;
+            while (!deflater.finished()) {
+                if (length == packed.length) {
+                    packed = Arrays.copyOf(packed, length * 2);
+                }
+                length += deflater.deflate(packed, length, packed.length - length);
+            }
+            return Arrays.copyOf(packed, length);
+        } finally {
+            deflater.end();
         }
     }
 }

@@ -4,6 +4,7 @@ import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -21,6 +22,10 @@ public final class PdfReader {
     private static final int TAIL = 2_048;
     private static final int LONGEST_DICTIONARY = 2_048;
     private static final Pattern FILE = Pattern.compile("/Type\\s*/EmbeddedFile(?![A-Za-z])");
+    private static final Pattern PACKED = Pattern.compile("/Filter\\s*(/FlateDecode|\\[\\s*/FlateDecode\\s*\\])\\s*(/|>>)");
+    private static final Pattern SIZE = Pattern.compile("/Size\\s+(\\d{1,9})\\b");
+    private static final Pattern SUM = Pattern.compile("/CheckSum\\s*<([0-9A-Fa-f]{32})>");
+    private static final Pattern LOCK = Pattern.compile("/Encrypt\\s");
     private static final Pattern LENGTH = Pattern.compile("/Length\\s+(\\d{1,9})(?!\\s+\\d+\\s+R)\\b");
 
     private final byte[] pdf;
@@ -73,7 +78,7 @@ public final class PdfReader {
     }
 
     private byte[] unpack(String dictionary, int afterKeyword) {
-        if (Pattern.compile("/Encrypt\\s").matcher(text).find()) {
+        if (LOCK.matcher(text).find()) {
             throw new ReportException("the PDF is locked; save it without a password and try again");
         }
         int from = afterKeyword;
@@ -84,12 +89,24 @@ public final class PdfReader {
             from++;
         }
         if (!dictionary.contains("/Filter")) {
-            return plain(dictionary, from);
+            return checked(plain(dictionary, from), dictionary);
         }
-        if (!Pattern.compile("/Filter\\s*\\[?\\s*/FlateDecode\\s*\\]?\\s*(/(?!DecodeParms)|>>)").matcher(dictionary).find()) {
+        if (!PACKED.matcher(dictionary).find() || dictionary.contains("/DecodeParms")) {
             throw new ReportException("the job file in the PDF is packed in a way that is not read here");
         }
-        return inflate(from);
+        return checked(bounded(new InflaterInputStream(new ByteArrayInputStream(pdf, from, pdf.length - from))),
+            dictionary);
+    }
+
+    /** Size and check sum are there in a PDF that was written here; other software may leave them out. */
+    private static byte[] checked(byte[] job, String dictionary) {
+        Matcher size = SIZE.matcher(dictionary);
+        Matcher sum = SUM.matcher(dictionary);
+        if (size.find() && Integer.parseInt(size.group(1)) != job.length
+            || sum.find() && !Envelope.sum(job).equals(sum.group(1).toUpperCase(Locale.ROOT))) {
+            throw new ReportException("the PDF is damaged: the job file in it has changed");
+        }
+        return job;
     }
 
     private byte[] plain(String dictionary, int from) {
@@ -98,10 +115,6 @@ public final class PdfReader {
             throw new ReportException("the PDF is damaged: the job file in it is cut off");
         }
         return bounded(new ByteArrayInputStream(pdf, from, Integer.parseInt(length.group(1))));
-    }
-
-    private byte[] inflate(int from) {
-        return bounded(new InflaterInputStream(new ByteArrayInputStream(pdf, from, pdf.length - from)));
     }
 
     private static byte[] bounded(InputStream source) {

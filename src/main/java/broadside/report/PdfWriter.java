@@ -13,7 +13,6 @@ import java.security.NoSuchAlgorithmException;
 import java.util.List;
 import org.apache.pdfbox.cos.COSDictionary;
 import org.apache.pdfbox.cos.COSName;
-import org.apache.pdfbox.cos.COSStream;
 import org.apache.pdfbox.pdmodel.PDDocument;
 
 /**
@@ -23,7 +22,7 @@ import org.apache.pdfbox.pdmodel.PDDocument;
 public final class PdfWriter {
 
     private final Lettering lettering = new Lettering();
-    private final byte[] profile = ICC_Profile.getInstance(ColorSpace.CS_sRGB).getData();
+    private final byte[] profile = Envelope.pack(ICC_Profile.getInstance(ColorSpace.CS_sRGB).getData());
 
     /** Writes the document and leaves {@code out} open. Nothing is written before the document is complete. */
     public void write(Sheet sheet, Paper paper, Attachment job, OutputStream out) throws IOException {
@@ -35,7 +34,8 @@ public final class PdfWriter {
         try (PDDocument document = new PDDocument()) {
             document.setVersion(1.7f);
             for (Flow.Leaf leaf : flow.leaves()) {
-                leaf.page().getCOSObject().setItem(COSName.CONTENTS, stream(document, leaf.content().bytes()));
+                leaf.page().getCOSObject().setItem(COSName.CONTENTS, Envelope.stream(document,
+                    Envelope.pack(leaf.content().bytes())));
                 document.addPage(leaf.page());
             }
             typeset.embed(document, flow.resources());
@@ -55,14 +55,6 @@ public final class PdfWriter {
         envelope.attach(job, metadata.pdfDate());
         metadata.write(document);
         document.setDocumentId(identity(sheet, job));
-    }
-
-    private static COSStream stream(PDDocument document, byte[] content) throws IOException {
-        COSStream stream = document.getDocument().createCOSStream();
-        try (OutputStream out = stream.createOutputStream(COSName.FLATE_DECODE)) {
-            out.write(content);
-        }
-        return stream;
     }
 
     /** Returns a number that is the same for the same sheet and job, and for no others in practice. */

@@ -21,6 +21,7 @@ final class Shapes {
     private final double left;
     private final double top;
     private final double scale;
+    private double longest;
 
     /** The drawing's upper left corner stands at {@code left}, {@code top} in the coordinates of the page. */
     Shapes(Content content, Typeset typeset, double left, double top, double scale) {
@@ -42,6 +43,7 @@ final class Shapes {
     }
 
     void draw(Drawing drawing) {
+        longest = 2 * (drawing.width() + drawing.height()) * scale;
         content.openClip(left, top - drawing.height() * scale, drawing.width() * scale, drawing.height() * scale);
         for (Shape shape : drawing.shapes()) {
             draw(shape);
@@ -114,7 +116,7 @@ final class Shapes {
         if (words.isEmpty() || size <= 0) {
             return;
         }
-        Words.Line line = words.fitted(size, Double.MAX_VALUE);
+        Words.Line line = words.fitted(size, longest);
         double back = line.width() * (text.anchor() == Anchor.START ? 0 : text.anchor() == Anchor.MIDDLE ? 0.5 : 1);
         double turn = Math.toRadians(text.turn());
         content.turned(line, x(text.x()) - back * Math.cos(turn), y(text.y()) - back * Math.sin(turn), size,

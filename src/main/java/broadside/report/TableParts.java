@@ -32,7 +32,8 @@ final class TableParts implements Part {
             caption.add(new Band(9, 0, List.of(cell)));
         }
         widths = widths();
-        head = head(tag.child("THead").child("TR"));
+        // A head stands only above a body; without rows the headings are the one row of the table.
+        head = head((table.rows().isEmpty() ? tag : tag.child("THead")).child("TR"));
         if (!table.rows().isEmpty()) {
             Tag body = tag.child("TBody");
             table.rows().forEach(row -> rows.add(row(row, body.child("TR"))));
@@ -64,7 +65,17 @@ final class TableParts implements Part {
                 measure(row.cells().get(i), row.marked(), i, whole, least);
             }
         }
-        return Columns.fit(whole, least, weights, flow.width() - GUTTER * (count - 1));
+        double gutters = 0;
+        for (int i = 1; i < count; i++) {
+            gutters += gutter(i);
+        }
+        return Columns.fit(whole, least, weights, flow.width() - gutters);
+    }
+
+    /** The space before a column; text does not stand close beside a number. */
+    private double gutter(int column) {
+        boolean close = table.columns().get(column - 1).number() && !table.columns().get(column).number();
+        return close ? GUTTER * 2 : GUTTER;
     }
 
     private void measure(String text, boolean bold, int i, double[] whole, double[] least) {
@@ -80,7 +91,7 @@ final class TableParts implements Part {
             Tag cell = tag.child("TH").attribute(Tag.Attribute.COLUMN_HEADING);
             cells.add(cell(i).add(flow.typeset().words().add(table.columns().get(i).heading(), true), Type.TABLE, cell));
         }
-        return new Band(caption.isEmpty() ? 9 : 2, PAD, cells, (content, f, top, bottom) ->
+        return new Band(caption.isEmpty() ? 9 : 2, PAD, Band.level(cells), (content, f, top, bottom) ->
             content.rule(f.left(), f.y(bottom), f.left() + f.width(), f.y(bottom), 1, Colour.INK));
     }
 
@@ -99,7 +110,7 @@ final class TableParts implements Part {
     private Band.Cell cell(int i) {
         double x = 0;
         for (int k = 0; k < i; k++) {
-            x += widths[k] + GUTTER;
+            x += widths[k] + gutter(k + 1);
         }
         return new Band.Cell(x, widths[i], table.columns().get(i).number(), 0);
     }

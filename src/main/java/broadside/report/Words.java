@@ -23,6 +23,7 @@ final class Words {
     private char[] characters = new char[32];
     private byte[] marks = new byte[32];
     private int length;
+    private boolean rightToLeft;
 
     Words(Lettering lettering) {
         this.lettering = lettering;
@@ -94,6 +95,7 @@ final class Words {
             characters = Arrays.copyOf(characters, length * 2);
             marks = Arrays.copyOf(marks, length * 2);
         }
+        rightToLeft |= RightToLeft.isIn(c);
         characters[length] = c;
         marks[length++] = mark;
     }
@@ -128,13 +130,26 @@ final class Words {
         int start = 0;
         while (start < length) {
             Line line = next(start, size, width);
-            lines.add(line);
+            lines.add(ordered(line));
             start = line.to();
             while (start < length && characters[start] == ' ') {
                 start++;
             }
         }
         return lines;
+    }
+
+    /** Returns the line with its characters in the order of the paper. */
+    private Line ordered(Line line) {
+        if (!rightToLeft || line.to() == line.from()) {
+            return line;
+        }
+        Words turned = new Words(lettering);
+        turned.characters = Arrays.copyOfRange(characters, line.from(), line.to());
+        turned.marks = Arrays.copyOfRange(marks, line.from(), line.to());
+        turned.length = line.to() - line.from();
+        RightToLeft.reorder(turned.characters, turned.marks);
+        return new Line(turned, 0, turned.length, line.width());
     }
 
     private Line next(int start, double size, double width) {
@@ -147,12 +162,22 @@ final class Words {
                 space = i;
                 untilSpace = sum;
             } else if (sum + here > width && i > start) {
-                return space > start ? new Line(this, start, space, untilSpace) : split(start, i, size);
+                boolean between = space > start && !(untilSpace < width * 0.75 && isWider(space + 1, size, width));
+                return between ? new Line(this, start, space, untilSpace) : split(start, i, size);
             }
             sum += here;
         }
         boolean trailing = characters[length - 1] == ' ';
         return new Line(this, start, trailing ? length - 1 : length, trailing ? untilSpace : sum);
+    }
+
+    /** A word that has to be broken anyway begins on the line that is not full yet. */
+    private boolean isWider(int from, double size, double width) {
+        double sum = 0;
+        for (int i = from; i < length && characters[i] != ' ' && sum <= width; i++) {
+            sum += width(i, size);
+        }
+        return sum > width;
     }
 
     /** Splits a long word, after a sign in its second half if there is one. */
@@ -173,7 +198,7 @@ final class Words {
     Line fitted(double size, double width) {
         double whole = wholeWidth(size);
         if (whole <= width) {
-            return new Line(this, 0, length, whole);
+            return ordered(new Line(this, 0, length, whole));
         }
         double sum = 3 * lettering.width('.', marks[0], size);
         int end = 0;
@@ -185,6 +210,6 @@ final class Words {
             cut.append(characters[i], marks[i]);
         }
         cut.add("...", (marks[0] & BOLD) != 0);
-        return new Line(cut, 0, cut.length, cut.wholeWidth(size));
+        return cut.ordered(new Line(cut, 0, cut.length, cut.wholeWidth(size)));
     }
 }
