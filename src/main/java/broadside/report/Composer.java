@@ -14,7 +14,7 @@ final class Composer {
     private final Flow flow;
     private final Tag top;
     private final TextParts texts;
-    private final List<Heading> headings = new ArrayList<>();
+    private final List<HeadingPart> headings = new ArrayList<>();
 
     Composer(Sheet sheet, Flow flow, Tag top) {
         this.sheet = sheet;
@@ -24,11 +24,11 @@ final class Composer {
     }
 
     /** Fills the pages; returns the headings in order, each with its place. */
-    List<Heading> compose() {
+    List<HeadingPart> compose() {
         List<Part> parts = new ArrayList<>();
         sheet.blocks().forEach(block -> parts.addAll(parts(block)));
         for (int i = 0; i < parts.size(); i++) {
-            if (parts.get(i) instanceof Heading) {
+            if (parts.get(i) instanceof HeadingPart) {
                 flow.keep(withNext(parts, i));
             }
             parts.get(i).place(flow);
@@ -43,7 +43,7 @@ final class Composer {
     private static double withNext(List<Part> parts, int from) {
         double sum = 0;
         int i = from;
-        while (i < parts.size() && parts.get(i) instanceof Heading) {
+        while (i < parts.size() && parts.get(i) instanceof HeadingPart) {
             sum += parts.get(i++).first();
         }
         return i < parts.size() ? sum + parts.get(i).first() : sum;
@@ -74,7 +74,7 @@ final class Composer {
     private List<Part> heading(Block.Heading block) {
         int deepest = headings.isEmpty() ? 1 : Math.min(3, headings.get(headings.size() - 1).level() + 1);
         String text = flow.typeset().words().add(block.text(), true).isEmpty() ? "Untitled" : block.text();
-        Heading heading = new Heading(Math.max(1, Math.min(deepest, block.level())), text, flow, top);
+        HeadingPart heading = new HeadingPart(Math.max(1, Math.min(deepest, block.level())), text, flow, top);
         headings.add(heading);
         return List.of(heading);
     }

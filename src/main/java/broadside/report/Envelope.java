@@ -65,13 +65,13 @@ final class Envelope {
         catalog.setItem(COSName.STRUCT_TREE_ROOT, root);
     }
 
-    void bookmarks(List<Heading> headings, Flow flow) {
+    void bookmarks(List<HeadingPart> headings, Flow flow) {
         if (headings.isEmpty()) {
             return;
         }
         PDDocumentOutline outline = new PDDocumentOutline();
         PDOutlineNode[] nodes = {outline, outline, outline, outline};
-        for (Heading heading : headings) {
+        for (HeadingPart heading : headings) {
             PDPageXYZDestination place = new PDPageXYZDestination();
             place.setPage(flow.leaves().get(heading.page()).page());
             place.setTop((int) flow.y(heading.top()));

@@ -29,7 +29,7 @@ public final class PdfWriter {
         Typeset typeset = new Typeset(lettering);
         Flow flow = new Flow(paper, typeset);
         COSDictionary root = new COSDictionary();
-        List<Heading> headings = new Composer(sheet, flow, Tag.top(root)).compose();
+        List<HeadingPart> headings = new Composer(sheet, flow, Tag.top(root)).compose();
         ByteArrayOutputStream bytes = new ByteArrayOutputStream(65_536);
         try (PDDocument document = new PDDocument()) {
             document.setVersion(1.7f);
@@ -46,7 +46,7 @@ public final class PdfWriter {
     }
 
     private void surround(PDDocument document, Sheet sheet, Attachment job, Metadata metadata, COSDictionary root,
-                          List<Heading> headings, Flow flow) throws IOException {
+                          List<HeadingPart> headings, Flow flow) throws IOException {
         Envelope envelope = new Envelope(document);
         envelope.describe();
         envelope.parents(root, flow.leaves());

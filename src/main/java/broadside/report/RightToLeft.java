@@ -18,7 +18,7 @@ final class RightToLeft {
      * @param marks the marks of the characters, which move with them
      */
     static void reorder(char[] line, byte[] marks) {
-        Bidi bidi = new Bidi(line, 0, null, 0, line.length, Bidi.DIRECTION_DEFAULT_LEFT_TO_RIGHT);
+        Bidi bidi = new Bidi(line, 0, null, 0, line.length, Bidi.DIRECTION_LEFT_TO_RIGHT);
         byte[] levels = new byte[line.length];
         Object[] order = new Object[line.length];
         for (int i = 0; i < line.length; i++) {

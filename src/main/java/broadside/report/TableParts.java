@@ -4,12 +4,15 @@ import broadside.sheet.Block.Column;
 import broadside.sheet.Block.Row;
 import broadside.sheet.Block.Table;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /** A table, measured and tagged. Its head is drawn again on each page that it goes on to. */
 final class TableParts implements Part {
 
     private static final double GUTTER = 10;
+    /** A little more than the sum of the widths, so that rounding does not break a line that fits. */
+    private static final double ROUNDING = 0.1;
     private static final double PAD = 2.5;
     /** A head taller than this share of a page is not repeated. */
     private static final double TALLEST_HEAD = 0.3;
@@ -26,7 +29,7 @@ final class TableParts implements Part {
         this.table = table;
         check(table);
         Tag tag = parent.child("Table");
-        Words title = flow.typeset().words().add(table.caption(), true);
+        Words title = words(table.caption(), true);
         if (!title.isEmpty()) {
             Band.Cell cell = new Band.Cell(0, flow.width()).add(title, Type.TABLE, tag.child("Caption"));
             caption.add(new Band(9, 0, List.of(cell)));
@@ -52,24 +55,41 @@ final class TableParts implements Part {
         }
     }
 
+    /** Headings stand on one line where there is room for all; else those above numbers give way first. */
     private double[] widths() {
         int count = table.columns().size();
-        double[] whole = new double[count];
+        int[] weights = table.columns().stream().mapToInt(Column::weight).toArray();
+        double room = flow.width();
+        for (int i = 1; i < count; i++) {
+            room -= gutter(i);
+        }
         double[] least = new double[count];
-        int[] weights = new int[count];
+        double[] cells = new double[count];
+        double[] whole = new double[count];
         for (int i = 0; i < count; i++) {
             Column column = table.columns().get(i);
-            weights[i] = column.weight();
-            measure(column.heading(), true, i, whole, least);
-            for (Row row : table.rows()) {
-                measure(row.cells().get(i), row.marked(), i, whole, least);
-            }
+            Words heading = words(column.heading(), true);
+            least[i] = heading.widestWord(Type.TABLE.size());
+            cells[i] = column.number() ? least[i] : heading.wholeWidth(Type.TABLE.size());
+            measure(i, cells, least);
+            whole[i] = Math.max(cells[i], heading.wholeWidth(Type.TABLE.size()) + ROUNDING);
         }
-        double gutters = 0;
-        for (int i = 1; i < count; i++) {
-            gutters += gutter(i);
+        boolean roomForCells = Arrays.stream(cells).sum() <= room;
+        return Columns.fit(roomForCells ? whole : cells, roomForCells ? cells : least, weights, room);
+    }
+
+    private void measure(int i, double[] whole, double[] least) {
+        for (Row row : table.rows()) {
+            Words words = words(row.cells().get(i), row.marked());
+            whole[i] = Math.max(whole[i], words.wholeWidth(Type.TABLE.size()));
+            least[i] = Math.max(least[i], words.widestWord(Type.TABLE.size()));
         }
-        return Columns.fit(whole, least, weights, flow.width() - gutters);
+        whole[i] += ROUNDING;
+        least[i] += ROUNDING;
+    }
+
+    private Words words(String text, boolean bold) {
+        return flow.typeset().words().add(text, bold);
     }
 
     /** The space before a column; text does not stand close beside a number. */
@@ -78,18 +98,11 @@ final class TableParts implements Part {
         return close ? GUTTER * 2 : GUTTER;
     }
 
-    private void measure(String text, boolean bold, int i, double[] whole, double[] least) {
-        Words words = flow.typeset().words().add(text, bold);
-        // A little more than the sum, so that rounding does not break a line that fits.
-        whole[i] = Math.max(whole[i], words.wholeWidth(Type.TABLE.size()) + 0.1);
-        least[i] = Math.max(least[i], words.widestWord(Type.TABLE.size()) + 0.1);
-    }
-
     private Band head(Tag tag) {
         List<Band.Cell> cells = new ArrayList<>();
         for (int i = 0; i < widths.length; i++) {
             Tag cell = tag.child("TH").attribute(Tag.Attribute.COLUMN_HEADING);
-            cells.add(cell(i).add(flow.typeset().words().add(table.columns().get(i).heading(), true), Type.TABLE, cell));
+            cells.add(cell(i).add(words(table.columns().get(i).heading(), true), Type.TABLE, cell));
         }
         return new Band(caption.isEmpty() ? 9 : 2, PAD, Band.level(cells), (content, f, top, bottom) ->
             content.rule(f.left(), f.y(bottom), f.left() + f.width(), f.y(bottom), 1, Colour.INK));
@@ -102,7 +115,7 @@ final class TableParts implements Part {
             if (i == 0) {
                 cell.attribute(Tag.Attribute.ROW_HEADING);
             }
-            cells.add(cell(i).add(flow.typeset().words().add(row.cells().get(i), row.marked()), Type.TABLE, cell));
+            cells.add(cell(i).add(words(row.cells().get(i), row.marked()), Type.TABLE, cell));
         }
         return new Band(0, PAD, cells, TextParts::hairline);
     }

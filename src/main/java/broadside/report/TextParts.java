@@ -83,7 +83,7 @@ final class TextParts {
         Optional<Tag> captionTag = caption.isEmpty() ? Optional.empty() : Optional.of(list.child("Caption"));
         boolean remarks = facts.facts().stream().anyMatch(fact -> !fact.remark().isBlank());
         for (Fact fact : facts.facts()) {
-            parts.add(fact(fact, list.child("LI"), parts.isEmpty() && caption.isEmpty() ? GAP : 0, remarks));
+            parts.add(fact(fact, list.child("LI"), parts.isEmpty() ? (caption.isEmpty() ? GAP : 2) : 0, remarks));
         }
         captionTag.ifPresent(tag -> parts.set(0, new Part.Kept(text(caption, Type.TABLE, tag), parts.get(0))));
         return parts;

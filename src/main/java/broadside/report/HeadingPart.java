@@ -3,7 +3,7 @@ package broadside.report;
 import java.util.List;
 
 /** A heading that remembers where it came to stand, for the bookmarks. */
-final class Heading implements Part {
+final class HeadingPart implements Part {
 
     private final int level;
     private final String text;
@@ -12,7 +12,7 @@ final class Heading implements Part {
     private double top;
 
     /** @param level 1 for the title, 2 and 3 below it */
-    Heading(int level, String text, Flow flow, Tag parent) {
+    HeadingPart(int level, String text, Flow flow, Tag parent) {
         this.level = level;
         this.text = text;
         Type type = level == 1 ? Type.TITLE : level == 2 ? Type.SECTION : Type.PART;
