@@ -19,6 +19,7 @@ final class Band implements Part {
         private final double width;
         private final boolean right;
         private double drop;
+        private int next;
         private final List<Row> rows = new ArrayList<>();
 
         /** @param drop how much lower than the others the first line stands, so that base lines agree */
@@ -38,6 +39,46 @@ final class Band implements Part {
                 rows.add(new Row(line, type, tag));
             }
             return this;
+        }
+
+        private void rewind() {
+            next = 0;
+        }
+
+        private boolean isDrawn() {
+            return next == rows.size();
+        }
+
+        /** Draws lines down to the end of the page; returns the height reached, or 0 when none fits. */
+        private double draw(Flow flow, double pad, boolean tagged) {
+            double down = pad + (next == 0 ? drop : 0);
+            Content content = flow.leaf().content();
+            int from = next;
+            while (next < rows.size() && down + rows.get(next).type().leading() <= flow.room() + TOLERANCE) {
+                Row row = rows.get(next);
+                if (next == from || tagged && row.tag() != rows.get(next - 1).tag()) {
+                    open(flow, row.tag(), tagged, next > from);
+                }
+                double start = flow.left() + x + (right ? width - row.line().width() : 0);
+                content.line(row.line(), start, flow.y(flow.top() + down + row.type().base()), row.type());
+                down += row.type().leading();
+                next++;
+            }
+            if (next > from) {
+                content.close();
+            }
+            return next > from ? down : 0;
+        }
+
+        private static void open(Flow flow, Tag tag, boolean tagged, boolean afterAnother) {
+            if (afterAnother) {
+                flow.leaf().content().close();
+            }
+            if (tagged) {
+                flow.leaf().open(tag);
+            } else {
+                flow.leaf().content().openArtifact("<</Type /Pagination>>");
+            }
         }
 
         private double height() {
@@ -100,32 +141,27 @@ final class Band implements Part {
     @Override
     public void place(Flow flow) {
         flow.begin(gap, height());
-        int[] next = new int[cells.size()];
-        while (!stretch(flow, next, true)) {
+        cells.forEach(Cell::rewind);
+        while (!stretch(flow, true)) {
             flow.turn();
         }
     }
 
     /** Draws the band once more as decoration, outside the text. */
     void placeAgain(Flow flow) {
-        stretch(flow, new int[cells.size()], false);
+        cells.forEach(Cell::rewind);
+        stretch(flow, false);
     }
 
     /** Draws the lines that fit on this page; returns whether that was all. */
-    private boolean stretch(Flow flow, int[] next, boolean tagged) {
-        double top = flow.top();
+    private boolean stretch(Flow flow, boolean tagged) {
         double used = 0;
-        boolean all = true;
-        boolean any = false;
-        for (int i = 0; i < cells.size(); i++) {
-            int from = next[i];
-            double start = pad + (from == 0 ? cells.get(i).drop : 0);
-            double end = column(flow, cells.get(i), from, next, i, start, tagged);
-            any |= next[i] > from;
-            used = Math.max(used, next[i] > from ? end : 0);
-            all &= next[i] == cells.get(i).rows.size();
+        for (Cell cell : cells) {
+            used = Math.max(used, cell.draw(flow, pad, tagged));
         }
-        if (any || all) {
+        boolean all = cells.stream().allMatch(Cell::isDrawn);
+        if (used > 0 || all) {
+            double top = flow.top();
             double height = used == 0 ? 2 * pad : used + pad;
             decorate(flow, top, top + height);
             flow.advance(height);
@@ -140,35 +176,5 @@ final class Band implements Part {
             trim.draw(content, flow, top, bottom);
             content.close();
         }
-    }
-
-    /** Draws lines of one cell down to the end of the page; returns the height reached. */
-    private static double column(Flow flow, Cell cell, int from, int[] next, int index, double start, boolean tagged) {
-        double down = start;
-        Tag open = null;
-        Flow.Leaf leaf = flow.leaf();
-        int i = from;
-        if (!tagged && !cell.rows.isEmpty()) {
-            leaf.content().openArtifact("<</Type /Pagination>>");
-        }
-        while (i < cell.rows.size() && down + cell.rows.get(i).type().leading() <= flow.room() + TOLERANCE) {
-            Row row = cell.rows.get(i);
-            if (tagged && row.tag() != open) {
-                if (open != null) {
-                    leaf.content().close();
-                }
-                open = row.tag();
-                leaf.open(open);
-            }
-            double x = flow.left() + cell.x + (cell.right ? cell.width - row.line().width() : 0);
-            leaf.content().line(row.line(), x, flow.y(flow.top() + down + row.type().base()), row.type());
-            down += row.type().leading();
-            i++;
-        }
-        if (open != null || !tagged && !cell.rows.isEmpty()) {
-            leaf.content().close();
-        }
-        next[index] = i;
-        return down;
     }
 }

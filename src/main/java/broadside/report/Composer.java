@@ -83,7 +83,8 @@ final class Composer {
         double left = flow.left();
         double right = left + flow.width();
         content.openArtifact(MARGIN_OF_PAGE.formatted("Header"));
-        content.line(words(sheet.caution(), true).fitted(Type.MARGIN.size(), flow.width()), left, flow.y(36), Type.MARGIN);
+        Words.Line caution = words(sheet.caution(), true).fitted(Type.MARGIN.size(), flow.width());
+        content.line(caution, left, flow.y(36), Type.MARGIN);
         content.rule(left, flow.y(42), right, flow.y(42), 0.5, Colour.GREY);
         content.close();
         content.openArtifact(MARGIN_OF_PAGE.formatted("Footer"));

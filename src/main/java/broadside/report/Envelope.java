@@ -109,7 +109,7 @@ final class Envelope {
         COSDictionary properties = direct();
         properties.setInt(COSName.SIZE, bytes.length);
         properties.setItem(COSName.getPDFName("ModDate"), date);
-        properties.setItem(COSName.getPDFName("CheckSum"), checkSum(bytes));
+        properties.setItem(COSName.getPDFName("CheckSum"), new COSString(HexFormat.of().parseHex(sum(bytes)), true));
         stream.setItem(COSName.getPDFName("Params"), properties);
         COSDictionary file = file(job, stream);
         COSArray names = new COSArray();
@@ -123,12 +123,6 @@ final class Envelope {
         COSArray associated = new COSArray();
         associated.add(file);
         catalog.setItem(COSName.AF, associated);
-    }
-
-    private static COSString checkSum(byte[] bytes) throws IOException {
-        COSString sum = COSString.parseHex(sum(bytes));
-        sum.setForceHexForm(true);
-        return sum;
     }
 
     /** Returns the MD5 sum in hexadecimal digits, as PDF asks for embedded files; it finds damage, no forgery. */

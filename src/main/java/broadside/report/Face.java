@@ -26,8 +26,8 @@ final class Face {
     /** Reads a font from the class path. */
     Face(String resource) {
         try (InputStream in = Face.class.getResourceAsStream(resource)) {
-            file = Optional.ofNullable(in).orElseThrow(() -> new ReportException("the font " + resource + " is missing"))
-                .readAllBytes();
+            file = Optional.ofNullable(in)
+                .orElseThrow(() -> new ReportException("the font " + resource + " is missing")).readAllBytes();
             TrueTypeFont font = parse();
             measure(font);
             idle.offer(font);

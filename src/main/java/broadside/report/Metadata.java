@@ -4,7 +4,6 @@ import broadside.sheet.Sheet;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.OutputStream;
-import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.time.LocalDate;
 import java.time.format.DateTimeFormatter;
@@ -20,6 +19,7 @@ import org.apache.pdfbox.pdmodel.PDDocument;
 /** What the PDF says about itself: title, maker, date and the standards it keeps. */
 final class Metadata {
 
+    private static final String TEMPLATE = "/report/metadata.xml";
     private static final int LONGEST = 1_000;
     private static final DateTimeFormatter DIGITS = DateTimeFormatter.ofPattern("uuuuMMdd", Locale.ROOT);
     /** A sheet whose date cannot be read is dated here, so that every PDF has a date and none depends on the clock. */
@@ -53,7 +53,7 @@ final class Metadata {
         return new COSString("D:" + DIGITS.format(date) + "000000Z");
     }
 
-    void write(PDDocument document) throws IOException {
+    void write(PDDocument document, String template) throws IOException {
         COSDictionary information = document.getDocumentInformation().getCOSObject();
         information.setItem(COSName.TITLE, new COSString(title));
         information.setItem(COSName.PRODUCER, new COSString(maker));
@@ -63,14 +63,15 @@ final class Metadata {
         stream.setItem(COSName.TYPE, COSName.METADATA);
         stream.setItem(COSName.SUBTYPE, COSName.getPDFName("XML"));
         try (OutputStream out = stream.createOutputStream()) {
-            out.write(packet().getBytes(StandardCharsets.UTF_8));
+            out.write(packet(template).getBytes(StandardCharsets.UTF_8));
         }
         document.getDocumentCatalog().getCOSObject().setItem(COSName.METADATA, stream);
     }
 
-    private String packet() {
-        return template().replace("@title@", xml(title)).replace("@maker@", xml(maker))
-            .replace("@date@", date + "T00:00:00Z");
+    private String packet(String template) {
+        // The date goes in first: a title may hold any text, a place mark too.
+        return template.replace("@date@", date + "T00:00:00Z").replace("@maker@", xml(maker).replace("@", "&#64;"))
+            .replace("@title@", xml(title));
     }
 
     private static String xml(String text) {
@@ -79,11 +80,13 @@ final class Metadata {
         return out.toString();
     }
 
-    private static String template() {
-        try (InputStream in = Metadata.class.getResourceAsStream("/report/metadata.xml")) {
-            return new String(in.readAllBytes(), StandardCharsets.UTF_8);
+    /** Returns the description as XML with places for title, maker and date. */
+    static String template() {
+        try (InputStream in = Metadata.class.getResourceAsStream(TEMPLATE)) {
+            return new String(Optional.ofNullable(in).orElseThrow(() -> new ReportException(TEMPLATE + " is missing"))
+                .readAllBytes(), StandardCharsets.UTF_8);
         } catch (IOException e) {
-            throw new UncheckedIOException(e);
+            throw new ReportException(TEMPLATE + " cannot be read", e);
         }
     }
 }

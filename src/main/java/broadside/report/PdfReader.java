@@ -22,7 +22,8 @@ public final class PdfReader {
     private static final int TAIL = 2_048;
     private static final int LONGEST_DICTIONARY = 2_048;
     private static final Pattern FILE = Pattern.compile("/Type\\s*/EmbeddedFile(?![A-Za-z])");
-    private static final Pattern PACKED = Pattern.compile("/Filter\\s*(/FlateDecode|\\[\\s*/FlateDecode\\s*\\])\\s*(/|>>)");
+    private static final Pattern PACKED =
+        Pattern.compile("/Filter\\s*(/FlateDecode|\\[\\s*/FlateDecode\\s*\\])\\s*(/|>>)");
     private static final Pattern SIZE = Pattern.compile("/Size\\s+(\\d{1,9})\\b");
     private static final Pattern SUM = Pattern.compile("/CheckSum\\s*<([0-9A-Fa-f]{32})>");
     private static final Pattern LOCK = Pattern.compile("/Encrypt\\s");

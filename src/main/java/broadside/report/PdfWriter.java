@@ -23,6 +23,7 @@ public final class PdfWriter {
 
     private final Lettering lettering = new Lettering();
     private final byte[] profile = Envelope.pack(ICC_Profile.getInstance(ColorSpace.CS_sRGB).getData());
+    private final String description = Metadata.template();
 
     /** Writes the document and leaves {@code out} open. Nothing is written before the document is complete. */
     public void write(Sheet sheet, Paper paper, Attachment job, OutputStream out) throws IOException {
@@ -53,7 +54,7 @@ public final class PdfWriter {
         envelope.bookmarks(headings, flow);
         envelope.colours(profile);
         envelope.attach(job, metadata.pdfDate());
-        metadata.write(document);
+        metadata.write(document, description);
         document.setDocumentId(identity(sheet, job));
     }
 

@@ -19,8 +19,8 @@ final class Conformance {
              PDFAValidator validator = Foundries.defaultInstance().createValidator(flavour, false)) {
             ValidationResult result = validator.validate(parser);
             List<String> failures = result.getTestAssertions().stream()
-                .map(a -> a.getRuleId().getClause() + "-" + a.getRuleId().getTestNumber() + " " + a.getMessage() + " at "
-                    + a.getLocation().getContext()).distinct().toList();
+                .map(a -> a.getRuleId().getClause() + "-" + a.getRuleId().getTestNumber() + " " + a.getMessage()
+                    + " at " + a.getLocation().getContext()).distinct().toList();
             return result.isCompliant() || !failures.isEmpty() ? failures : List.of("refused without a reason");
         }
     }

@@ -56,16 +56,16 @@ final class OddSheets {
             case 3 -> new Facts(text(), facts());
             case 4 -> table();
             case 5 -> new Picture(drawing(), text(), text());
-            case 6 -> new Steps(IntStream.range(0, random.nextInt(4)).mapToObj(i -> new StepLine(random.nextInt(), text(),
-                text(), text(), text(), text(), text(), text(), text(), text(), text())).toList());
+            case 6 -> new Steps(IntStream.range(0, random.nextInt(4)).mapToObj(i -> new StepLine(random.nextInt(),
+                text(), text(), text(), text(), text(), text(), text(), text(), text(), text())).toList());
             case 7 -> new Notes(IntStream.range(0, random.nextInt(4)).mapToObj(i -> text()).toList());
             default -> new NewPage();
         };
     }
 
     private List<Fact> facts() {
-        return IntStream.range(0, random.nextInt(4)).mapToObj(i -> new Fact(text(), text(), text(), random.nextBoolean()))
-            .toList();
+        return IntStream.range(0, random.nextInt(4))
+            .mapToObj(i -> new Fact(text(), text(), text(), random.nextBoolean())).toList();
     }
 
     private Table table() {

@@ -22,6 +22,7 @@ import java.util.List;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
+import javax.xml.parsers.DocumentBuilderFactory;
 import org.apache.pdfbox.Loader;
 import org.apache.pdfbox.cos.COSName;
 import org.apache.pdfbox.pdmodel.PDDocument;
@@ -34,6 +35,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.ValueSource;
+import org.w3c.dom.Element;
 import org.verapdf.pdfa.flavours.PDFAFlavour;
 
 class PdfWriterTest {
@@ -189,6 +191,25 @@ class PdfWriterTest {
         }
     }
 
+    @ParameterizedTest
+    @ValueSource(strings = {"Sign & Co <left>", "@date@ @maker@ @title@", "two\r\n lines", "\u98a8 \ud83d\ude80"})
+    void theTitleStandsInBothDescriptions(String title) throws Exception {
+        Sheet sheet = new Sheet(title, "", "", "2026-03-14", Samples.CAUTION, "Broadside @title@", List.of());
+        String expected = title.replace("\r\n ", " ");
+        try (PDDocument document = Loader.loadPDF(pdf(sheet, Paper.A4))) {
+            assertThat(document.getDocumentInformation().getTitle()).isEqualTo(expected);
+            assertThat(document.getDocumentInformation().getCreationDate().toInstant())
+                .isEqualTo("2026-03-14T00:00:00Z");
+            Element description = DocumentBuilderFactory.newInstance().newDocumentBuilder()
+                .parse(document.getDocumentCatalog().getMetadata().exportXMPMetadata()).getDocumentElement();
+            assertThat(description.getElementsByTagName("dc:title").item(0).getTextContent()).isEqualTo(expected);
+            assertThat(description.getElementsByTagName("xmp:CreateDate").item(0).getTextContent())
+                .isEqualTo("2026-03-14T00:00:00Z");
+            assertThat(description.getElementsByTagName("pdf:Producer").item(0).getTextContent())
+                .isEqualTo("Broadside @title@");
+        }
+    }
+
     @Test
     void headingsAreBookmarks() throws IOException {
         try (PDDocument document = Loader.loadPDF(pdf(Samples.sheet(), Paper.A4))) {
@@ -259,8 +280,8 @@ class PdfWriterTest {
 
     @Test
     void aWideDrawingIsReducedToTheWidthOfTheText() throws IOException {
-        Drawing wide = new Drawing(2_000, 100, List.of(new Drawing.Text(1_950, 50, "edge", 20, Drawing.Anchor.START, false,
-            0, Drawing.Ink.BLACK)));
+        Drawing wide = new Drawing(2_000, 100, List.of(new Drawing.Text(1_950, 50, "edge", 20, Drawing.Anchor.START,
+            false, 0, Drawing.Ink.BLACK)));
         byte[] pdf = pdf(new Picture(wide, "wide", "a wide drawing"));
         List<double[]> places = Places.of(pdf, "edge");
         assertThat(places).hasSize(1);
@@ -271,12 +292,14 @@ class PdfWriterTest {
     void tablesAndOutlinesThatDoNotFitTogetherAreRefused() {
         List<Column> columns = List.of(new Column("A", false, 1), new Column("B", false, 1));
         assertThatIllegalArgumentException().isThrownBy(() -> pdf(new Table("Cases", columns,
-            List.of(new Row(List.of("only one"), false))))).withMessage("a row has 1 cells and its table 2 columns: Cases");
+            List.of(new Row(List.of("only one"), false)))))
+            .withMessage("a row has 1 cells and its table 2 columns: Cases");
         Drawing odd = new Drawing(10, 10, List.of(new Drawing.Outline(List.of(1d, 2d, 3d), 1, Drawing.Ink.BLACK,
             Drawing.Fill.NONE)));
         assertThatIllegalArgumentException().isThrownBy(() -> pdf(new Picture(odd, "", "")))
             .withMessageContaining("at least two points");
-        Drawing nowhere = new Drawing(10, 10, List.of(new Drawing.Line(0, Double.NaN, 1, 1, 1, Drawing.Ink.BLACK, false)));
+        Drawing nowhere = new Drawing(10, 10, List.of(
+            new Drawing.Line(0, Double.NaN, 1, 1, 1, Drawing.Ink.BLACK, false)));
         assertThatIllegalArgumentException().isThrownBy(() -> pdf(new Picture(nowhere, "", "")))
             .withMessageContaining("NaN");
     }

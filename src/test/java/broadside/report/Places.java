@@ -21,8 +21,8 @@ final class Places {
                 protected void writeString(String run, List<TextPosition> positions) {
                     if (run.contains(text)) {
                         TextPosition last = positions.get(positions.size() - 1);
-                        places.add(new double[] {positions.get(0).getXDirAdj(), last.getXDirAdj() + last.getWidthDirAdj(),
-                            positions.get(0).getYDirAdj()});
+                        places.add(new double[] {positions.get(0).getXDirAdj(),
+                            last.getXDirAdj() + last.getWidthDirAdj(), positions.get(0).getYDirAdj()});
                     }
                 }
             }.writeText(document, new StringWriter());

@@ -27,6 +27,7 @@ import broadside.sheet.Sheet;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /** A sheet with every kind of block on several pages; its figures are made up. */
 final class Samples {
@@ -89,7 +90,7 @@ final class Samples {
         List<Row> rows = new ArrayList<>();
         for (int i = 0; i < 40; i++) {
             rows.add(new Row(List.of("Gust " + (10 + i), Integer.toString(10 + i),
-                String.format(java.util.Locale.ROOT, "%.3f", 0.000613 * (10 + i) * (10 + i)),
+                String.format(Locale.ROOT, "%.3f", 0.000613 * (10 + i) * (10 + i)),
                 i == 14 ? "act: lower the banner" : "watch"), i == 14));
         }
         blocks.add(new Table("", List.of(new Column("Step", false, 1), new Column("Gust m/s", true, 1),
@@ -100,7 +101,8 @@ final class Samples {
         blocks.add(new Heading(2, "What was assumed", "assumed"));
         blocks.add(new Notes(List.of("The board is flat, solid and stiff.", "The ground is level around the posts; a "
             + "slope within ten times the height of the sign would change the pressure and has to be told to the engineer.",
-            "Written by Zo\u00eb \u0141ukasik, \u0394p = 0.6 kPa, \u221a2, 5 \u2265 3, \ud83c\udf2c wind, \u0627\u0644\u0631\u064a\u0627\u062d.",
+            "Written by Zo\u00eb \u0141ukasik, \u0394p = 0.6 kPa, \u221a2, 5 \u2265 3, \ud83c\udf2c wind, "
+                + "\u0627\u0644\u0631\u064a\u0627\u062d.",
             "See https://example.org/a/very/long/address/that/has/no/space/in/it/and/goes/on/and/on/until/it/is/wider/"
                 + "than/the/paper?with=parameters&and=more")));
         blocks.add(new Heading(2, "What was not checked", "unchecked"));
@@ -115,10 +117,12 @@ final class Samples {
                 "I_v = k_I / (c_o ln(z / z_0))", "k_I = 1.00, c_o = 1.00, z = 5.25 m, z_0 = 0.05 m", "0.2149", "", "",
                 "EN 1991-1-4, 4.4 (4.7)", "read"));
             lines.add(new StepLine(i + 2, "peak pressure", "q_p", "peak velocity pressure at the middle of the board",
-                "q_p = (1 + 7 I_v) \u00bd \u03c1 v_m\u00b2", "I_v = 0.2149, \u03c1 = 1.25 kg/m\u00b3, v_m = 21.23 m/s", "0.7055",
+                "q_p = (1 + 7 I_v) \u00bd \u03c1 v_m\u00b2",
+                "I_v = 0.2149, \u03c1 = 1.25 kg/m\u00b3, v_m = 21.23 m/s", "0.7055",
                 "kPa", "14.74 psf", "EN 1991-1-4, 4.5 (4.8)", "read"));
-            lines.add(new StepLine(i + 3, "force", "F_{w,net}", "force on the board, square on", "F_{w,net} = c_{p,net} q_p A",
-                "c_{p,net} = 1.80, q_p = 0.7055 kPa, A = 12.50 m\u00b2", "15.87", "kN", "3.569 kip", "EN 1991-1-4, 7.4.3",
+            lines.add(new StepLine(i + 3, "force", "F_{w,net}", "force on the board, square on",
+                "F_{w,net} = c_{p,net} q_p A", "c_{p,net} = 1.80, q_p = 0.7055 kPa, A = 12.50 m\u00b2", "15.87", "kN",
+                "3.569 kip", "EN 1991-1-4, 7.4.3",
                 "second-hand"));
         }
         return new Steps(lines.subList(0, count));

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
 import java.util.Random;
+import org.assertj.core.data.Offset;
 import org.junit.jupiter.api.Test;
 
 class WordsTest {
@@ -58,7 +59,7 @@ class WordsTest {
             StringBuilder joined = new StringBuilder();
             for (Words.Line line : words.lines(10, width)) {
                 assertThat(line.width()).isLessThanOrEqualTo(width);
-                assertThat(words(text(line)).wholeWidth(10)).isCloseTo(line.width(), org.assertj.core.data.Offset.offset(1e-6));
+                assertThat(words(text(line)).wholeWidth(10)).isCloseTo(line.width(), Offset.offset(1e-6));
                 joined.append(text(line));
             }
             StringBuilder whole = new StringBuilder();
@@ -76,13 +77,15 @@ class WordsTest {
 
     @Test
     void cutsWithThreeDots() {
-        assertThat(text(words("a title that is too long for its place").fitted(9, 80))).endsWith("...").startsWith("a title");
+        assertThat(text(words("a title that is too long for its place").fitted(9, 80))).endsWith("...")
+            .startsWith("a title");
         assertThat(words("a title that is too long for its place").fitted(9, 80).width()).isLessThanOrEqualTo(80);
     }
 
     @Test
     void replacesWhatTheFontsLack() {
-        assertThat(lines("a\ud83d\ude00b\u0001c\ud800d\ue000e\u200bf\u2011g", 500)).containsExactly("a\u25a1b\u25a1c\u25a1d\u25a1ef-g");
+        assertThat(lines("a\ud83d\ude00b\u0001c\ud800d\ue000e\u200bf\u2011g", 500))
+            .containsExactly("a\u25a1b\u25a1c\u25a1d\u25a1ef-g");
         assertThat(lines("e\u0301", 500)).containsExactly("\u00e9");
     }
 
