@@ -1,0 +1,94 @@
+package broadside.sheet;
+
+import broadside.assess.ItemResult;
+import broadside.assess.Loads;
+import broadside.quantity.Rounding;
+import broadside.quantity.Show;
+import broadside.quantity.Shown;
+import broadside.sheet.Block.Column;
+import broadside.sheet.Block.Heading;
+import broadside.sheet.Block.Paragraph;
+import broadside.sheet.Block.Row;
+import broadside.sheet.Block.StepLine;
+import broadside.sheet.Block.Steps;
+import broadside.sheet.Block.Table;
+import broadside.sheet.Block.Tone;
+import broadside.trace.Step;
+import broadside.trace.Trace;
+import java.util.ArrayList;
+import java.util.List;
+
+/** The calculation of one item: what was given, one line to redo by hand, the balance, and every recorded step. */
+final class CalculationBlocks {
+
+    static List<Block> of(ItemResult item, Format format, String anchor, boolean many) {
+        List<Block> blocks = new ArrayList<>();
+        blocks.add(new Block.NewPage());
+        blocks.add(new Heading(2, "Calculation" + (many ? ", item " + item.item().mark() : ""), anchor + "calculation"));
+        item.loads().ifPresent(loads -> {
+            blocks.add(new Heading(3, "To redo by hand", anchor + "hand"));
+            blocks.add(new Paragraph(handCheck(item.sheet(), loads, format), Tone.PLAIN));
+            loads.balance().forEach(b -> blocks.add(new Paragraph(balance(b), Tone.PLAIN)));
+        });
+        blocks.add(new Heading(3, "Given", anchor + "given"));
+        blocks.add(given(item.sheet(), format));
+        blocks.add(new Heading(3, "Steps", anchor + "steps"));
+        blocks.add(new Paragraph("Values are in SI with four figures; what was calculated was not rounded. The status says how well the source is known.",
+            Tone.SMALL));
+        blocks.add(steps(item.sheet(), format));
+        return blocks;
+    }
+
+    /** The governing moment, written out. */
+    private static String handCheck(Trace sheet, Loads loads, Format format) {
+        String name = loads.governing().get("base-moment");
+        Step moment = sheet.find("base-moment/" + name).orElseThrow();
+        double force = loads.governs("base-moment").force();
+        double height = loads.governs("base-moment").height();
+        return "Moment at the ground line, case " + name + ": force times height = " + value(force, "N") + " x " + value(height, "m") + " = "
+            + value(moment.value(), "N m") + ". " + "Pressure times area gives the force: see the step force/" + name + ".";
+    }
+
+    private static String balance(Loads.Balance balance) {
+        return "Equilibrium, " + balance.what() + ": sum of loads " + value(balance.loads(), balance.unit()) + " = sum of reactions "
+            + value(balance.reactions(), balance.unit()) + ".";
+    }
+
+    private static Table given(Trace sheet, Format format) {
+        List<Row> rows = sheet.givens().stream().map(g -> new Row(List.of(g.meaning(), plainSymbol(g.symbol()), g.typed().isEmpty() ? "-" : g.typed(),
+            value(g.value(), g.unit())), false)).toList();
+        return new Table("What the calculation starts from", List.of(new Column("Meaning", false, 6), new Column("Symbol", false, 2),
+            new Column("As typed", false, 3), new Column("In SI", true, 3)), rows);
+    }
+
+    /** A symbol in running text, its subscript on the line. */
+    private static String plainSymbol(String symbol) {
+        return symbol.replace("_", "").replace("{", "").replace("}", "");
+    }
+
+    private static Steps steps(Trace sheet, Format format) {
+        List<StepLine> lines = new ArrayList<>();
+        int number = 0;
+        for (Step step : sheet.steps()) {
+            StringBuilder numbers = new StringBuilder();
+            for (Step.Input input : step.inputs()) {
+                numbers.append(numbers.isEmpty() ? "" : ", ").append(input.symbol()).append(" = ").append(value(input.value(), input.unit()));
+            }
+            step.replaced().ifPresent(r -> numbers.append("calculated: ").append(value(r.calculated(), step.unit())));
+            Shown shown = shown(step.value(), step.unit());
+            lines.add(new StepLine(++number, step.name(), step.symbol(), step.meaning(), step.formula(), numbers.toString(), shown.number(), shown.unit(),
+                format.other(step.value(), step.unit()), step.place(), step.status().shown()));
+        }
+        return new Steps(lines);
+    }
+
+    private static String value(double si, String unit) {
+        return shown(si, unit).text();
+    }
+
+    private static Shown shown(double si, String unit) {
+        return unit.equals("1") ? new Shown(Show.number(si, 4, Rounding.NEAREST), "") : Show.step(si, unit, 4);
+    }
+
+    private CalculationBlocks() { }
+}

@@ -1,0 +1,129 @@
+package broadside.sheet;
+
+import broadside.action.CaseAction;
+import broadside.action.CaseAction.PanelZones;
+import broadside.action.PostAction;
+import broadside.assess.Loads;
+import broadside.codes.LoadCase.Windward;
+import broadside.codes.ZonePressure;
+import broadside.panel.Item;
+import broadside.panel.Panel;
+import broadside.quantity.Dimension;
+import broadside.sheet.Block.Column;
+import broadside.sheet.Block.Paragraph;
+import broadside.sheet.Block.Row;
+import broadside.sheet.Block.Table;
+import broadside.sheet.Block.Tone;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+
+/** The tables of an item: cases at both levels, pressures by zone, posts, wind along the face. */
+final class CaseTables {
+
+    /** More posts than this are shown by the worst of each zone only. */
+    private static final int MOST_POSTS = 60;
+
+    static List<Block> of(Item item, Loads loads, Format format) {
+        List<Block> blocks = new ArrayList<>();
+        blocks.add(cases(loads, format, 1, loads.level().name()));
+        blocks.add(cases(loads, format, loads.level().factor(), loads.level().companion() + ", " + loads.level().rule()));
+        blocks.add(new Paragraph("Forces are magnitudes. The wind was taken on the front and on the back and from both ends; the worse end is shown. "
+            + "Torsion is positive when it turns the right side backwards, seen from the front. Loads are rounded up, at display only.", Tone.SMALL));
+        blocks.add(zones(item, loads, format));
+        if (!loads.posts().isEmpty()) {
+            blocks.add(posts(item, loads, format));
+        }
+        blocks.add(new Paragraph("Wind along the face (own rule, of no code: pressure on the edge and friction on both faces): force "
+            + format.both(loads.edgeOn().force(), Dimension.FORCE) + ", moment at the ground " + format.both(loads.edgeOn().moment(), Dimension.MOMENT) + ", "
+            + loads.level().name() + ".", Tone.PLAIN));
+        if (loads.selfWeight() > 0) {
+            blocks.add(new Paragraph("Weight of the boards: " + format.both(loads.selfWeight(), Dimension.FORCE) + ".", Tone.PLAIN));
+        }
+        return blocks;
+    }
+
+    private static Table cases(Loads loads, Format format, double factor, String level) {
+        List<Row> rows = new ArrayList<>();
+        for (CaseAction c : loads.cases()) {
+            List<String> governs = new ArrayList<>();
+            if (loads.governing().get("base-moment").equals(c.name())) {
+                governs.add("moment");
+            }
+            if (loads.governing().get("torsion").equals(c.name()) && c.torsion() != 0) {
+                governs.add("torsion");
+            }
+            boolean marked = !governs.isEmpty() && c.direction().equals("front");
+            rows.add(new Row(List.of(c.name(), c.direction() + end(c), format.force(factor * c.force()), format.length(c.height()),
+                format.moment(factor * c.baseMoment()), torsion(c, factor, format), marked ? String.join(", ", governs) : "-"), marked));
+        }
+        return new Table("Loads at the ground line, " + level, List.of(new Column("Case", false, 3), new Column("Wind on", false, 4),
+            new Column("Force = base shear", true, 3), new Column("Height of force", true, 3), new Column("Base moment", true, 3),
+            new Column("Torsion", true, 3), new Column("Governs", false, 3)), rows);
+    }
+
+    private static String end(CaseAction c) {
+        return c.windward() == Windward.NONE ? "" : c.windward() == Windward.LEFT ? ", from the left" : ", from the right";
+    }
+
+    private static String torsion(CaseAction c, double factor, Format format) {
+        return c.torsion() < 0 ? "-" + format.moment(-factor * c.torsion()) : format.moment(factor * c.torsion());
+    }
+
+    private static Table zones(Item item, Loads loads, Format format) {
+        double f = loads.level().factor();
+        boolean parts = item.panels().size() > 1;
+        List<Row> rows = new ArrayList<>();
+        for (CaseAction c : loads.cases()) {
+            if (!c.direction().equals("front")) {
+                continue;
+            }
+            for (int i = 0; i < c.zones().size(); i++) {
+                PanelZones panel = c.zones().get(i);
+                Panel of = item.panels().get(i);
+                for (ZonePressure z : panel.zones()) {
+                    String where = (parts ? panel.part() + ", " : "") + (z.zone().equals("all") ? "whole board" : HoardingDrawing.shortName(z.zone()));
+                    double arm = of.clearance() + of.height() / 2;
+                    rows.add(new Row(List.of(c.name(), where, format.length(z.from()) + " to " + format.length(z.to()), format.plain(z.coefficient()),
+                        format.pressure(z.pressure()), format.pressure(f * z.pressure()), perMetre(z.pressure() * of.height() * arm, format)), false));
+                }
+            }
+        }
+        return new Table("Net pressures by zone, both faces together; places are measured from the left edge of the panel",
+            List.of(new Column("Case", false, 3), new Column("Zone", false, 4), new Column("From, to", false, 4), new Column("Coefficient", true, 3),
+                new Column(loads.level().name(), true, 3), new Column(loads.level().companion(), true, 3),
+                new Column("Moment for each " + (format.units() == broadside.quantity.Units.US ? "foot" : "metre"), true, 3)), rows);
+    }
+
+    private static String perMetre(double newtonMetresPerMetre, Format format) {
+        return format.moment(format.units() == broadside.quantity.Units.US ? newtonMetresPerMetre * 0.3048 : newtonMetresPerMetre);
+    }
+
+    private static Table posts(Item item, Loads loads, Format format) {
+        boolean sign = item.choose(s -> true, h -> false);
+        List<PostAction> shown = loads.posts().size() <= MOST_POSTS ? loads.posts() : worstOfEachZone(loads.posts());
+        double most = loads.posts().stream().mapToDouble(PostAction::moment).max().orElse(0);
+        List<Row> rows = new ArrayList<>();
+        for (PostAction p : shown) {
+            boolean worst = p.moment() >= most * (1 - 1e-9);
+            String carries = p.share().map(s -> format.length(s) + (p.gate() > 0 ? " and " + format.length(p.gate()) + " of gate" : "")).orElse("by statics");
+            rows.add(new Row(List.of(Integer.toString(p.post()), format.length(p.position()), p.zone().isEmpty() ? p.named()
+                : HoardingDrawing.shortName(p.zone()), carries, format.force(p.shear()), format.moment(p.moment()),
+                format.moment(loads.level().factor() * p.moment()), worst ? "worst" : "-"), worst));
+        }
+        String more = shown.size() < loads.posts().size() ? ", the worst of each zone of " + loads.posts().size() + " posts" : "";
+        return new Table("What reaches the foot of each post, the worst of all cases" + more, List.of(new Column("Post", true, 2),
+            new Column(sign ? "From the middle" : "From the left end", true, 3), new Column(sign ? "Case" : "Zone", false, 3), new Column("Carries", false, 5),
+            new Column("Shear", true, 3), new Column("Moment, " + loads.level().name(), true, 4), new Column("Moment, " + loads.level().companion(), true, 4),
+            new Column("Remark", false, 2)), rows);
+    }
+
+    private static List<PostAction> worstOfEachZone(List<PostAction> posts) {
+        Map<String, PostAction> worst = new LinkedHashMap<>();
+        posts.forEach(p -> worst.merge(p.zone(), p, (a, b) -> b.moment() > a.moment() ? b : a));
+        return List.copyOf(worst.values());
+    }
+
+    private CaseTables() { }
+}

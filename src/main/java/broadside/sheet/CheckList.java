@@ -1,0 +1,237 @@
+package broadside.sheet;
+
+import broadside.assess.Assessment;
+import broadside.assess.ItemResult;
+import broadside.assess.Job;
+import broadside.assess.Note;
+import broadside.panel.Hoarding;
+import broadside.panel.Item;
+import broadside.panel.PostSign;
+import broadside.sheet.Block.Fact;
+import broadside.sheet.Block.Facts;
+import broadside.sheet.Block.Heading;
+import broadside.site.Site;
+import broadside.trace.Step;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/** The twelve groups of fields that a load summary is checked by. A field without a value says "not given". */
+final class CheckList {
+
+    private static final String NOT_GIVEN = "not given";
+    private static final String NOT_HERE = "not worked out in this version";
+
+    private final Assessment assessment;
+    private final Job job;
+    private final Format format;
+    private final List<Fact> facts = new ArrayList<>();
+    private final List<Block> blocks = new ArrayList<>();
+
+    private CheckList(Assessment assessment, Format format) {
+        this.assessment = assessment;
+        this.job = assessment.job();
+        this.format = format;
+    }
+
+    static List<Block> of(Assessment assessment, Format format, String date) {
+        CheckList list = new CheckList(assessment, format);
+        list.blocks.add(new Heading(2, "Check list of the load summary", "check-list"));
+        list.identity(date);
+        list.status();
+        assessment.items().forEach(item -> list.sign(item.item(), assessment.items().size() > 1));
+        list.site(job(assessment).site());
+        assessment.items().forEach(list::coefficients);
+        list.results();
+        list.foundation();
+        list.limits();
+        list.assumptions();
+        list.exclusions();
+        list.handCheck();
+        list.maintenance();
+        return list.blocks;
+    }
+
+    private static Job job(Assessment assessment) {
+        return assessment.job();
+    }
+
+    private void group(String caption) {
+        blocks.add(new Facts(caption, facts));
+        facts.clear();
+    }
+
+    private void fact(String label, String value) {
+        facts.add(Fact.of(label, value.isBlank() ? NOT_GIVEN : value));
+    }
+
+    private void head(String label, String name) {
+        fact(label, job.head(name).orElse(""));
+    }
+
+    private void identity(String date) {
+        head("Project", "title");
+        head("Reference", "reference");
+        fact("Site", join(job.site().name(), job.head("address").orElse("")));
+        head("Coordinates", "coordinates");
+        head("Client", "client");
+        head("Applicant", "applicant");
+        head("Drawing number", "drawing-number");
+        head("Revision", "revision");
+        fact("Date", date);
+        head("Prepared by", "prepared-by");
+        head("Checked by", "checked-by");
+        fact("Engineer, licence, seal", job.head("engineer").orElse(NOT_GIVEN + " (space for the seal is left to the engineer)"));
+        fact("Tool and version", "Broadside " + assessment.about().version());
+        fact("Tables", assessment.about().tables());
+        group("1 Identity");
+    }
+
+    private void status() {
+        fact("Status", SheetMaker.PRELIMINARY);
+        fact("Scope", "wind loads on flat panels and at the foot of their posts, by the code named here");
+        fact("Not checked", "see \"What was not checked\" and group 10");
+        group("2 Status");
+    }
+
+    private void sign(Item item, boolean many) {
+        fact("Type", item.kind());
+        item.<Runnable>choose(sign -> () -> sign(sign), hoarding -> () -> hoarding(hoarding)).run();
+        fact("Solidity, and who says so", solidity(item));
+        fact("Lighting and openings", job.remark(item.mark(), "lighting").orElse(""));
+        fact("Fixed to", job.remark(item.mark(), "fixed-to").orElse(""));
+        for (Item.Carrying carrying : item.carrying()) {
+            fact("As typed, not checked: " + carrying.name(), carrying.typed());
+        }
+        group("3 Sign" + (many ? " " + item.mark() : ""));
+    }
+
+    private void sign(PostSign sign) {
+        fact("Faces", Integer.toString(sign.faces()));
+        for (int i = 0; i < sign.boards().size(); i++) {
+            var b = sign.boards().get(i);
+            String which = sign.boards().size() == 1 ? "" : " " + sign.part(i);
+            fact("Board" + which, b.shape().word() + ", width " + b.width().typed() + ", height " + b.height().typed() + ", depth "
+                + (b.depth().metres() > 0 ? b.depth().typed() : NOT_GIVEN));
+            fact("Clear height below" + which, b.clearance().typed());
+            fact("Overall height" + which, format.length(b.clearance().metres() + b.height().metres()));
+            fact("Mass" + which, b.mass().map(m -> m.typed()).orElse(""));
+            fact("Middle of board from middle of posts" + which, b.offset().typed());
+        }
+        fact("Posts", sign.posts().count() + sign.posts().spacing().map(s -> " at " + s.typed()).orElse(""));
+    }
+
+    private void hoarding(Hoarding hoarding) {
+        fact("Length and height", hoarding.length().typed() + " by " + hoarding.height().typed());
+        fact("Gap below", hoarding.clearance().typed());
+        fact("Overall height", format.length(hoarding.clearance().metres() + hoarding.height().metres()));
+        fact("Returns", "left " + hoarding.returnLeft().typed() + ", right " + hoarding.returnRight().typed());
+        fact("Gates", hoarding.gates().isEmpty() ? "none" : String.join("; ", hoarding.gates().stream()
+            .map(g -> g.width().typed() + " wide from " + g.from().typed()).toList()));
+        fact("Posts", hoarding.spacing().map(s -> "at " + s.typed()).orElse(""));
+    }
+
+    private String solidity(Item item) {
+        double least = item.panels().stream().mapToDouble(p -> p.solidity()).min().orElse(1);
+        return format.plain(least) + (least < 1 ? ", by " + job.remark(item.mark(), "solidity-by").orElse("an unnamed source") : ", closed");
+    }
+
+    private void site(Site site) {
+        fact("Code and edition", assessment.code().edition().property("title"));
+        fact("Overlay", job.basis().overlay().orElse("none"));
+        fact("Basic wind speed", site.basicSpeed().typed() + " (" + format.speed(site.basicSpeed().metresPerSecond()) + "), " + site.averaging().words()
+            + ", for loads at " + assessment.code().level().name() + " level");
+        fact("Return period", site.returnPeriod().map(p -> p.typed()).orElse("as the code's basic speed"));
+        fact("Risk category", site.options().word("risk-category").orElse(""));
+        fact("Terrain or exposure", site.ground().terrain() + " in every direction" + assessment.code().terms().terrains().stream()
+            .filter(t -> t.name().equals(site.ground().terrain()) && !t.meaning().isEmpty()).map(t -> ": " + t.meaning()).findFirst().orElse(""));
+        fact("Reason for it", job.head("terrain-reason").orElse(""));
+        fact("Topography", site.ground().topography().map(g -> g.feature().word() + ", height " + g.height().typed() + ", upwind slope "
+            + g.upwindLength().typed() + " long, site " + g.distanceFromCrest().typed() + " from the crest").orElse("none given, taken as flat"));
+        fact("Altitude", site.ground().altitude().map(a -> a.typed()).orElse(""));
+        fact("Air density", site.options().quantities().containsKey("air-density") ? site.options().quantities().get("air-density").typed() : "by the code");
+        fact("Directionality", "by the code; see the calculation");
+        fact("Shelter", "none counted");
+        fact("Season or duration", site.options().number("season-factor").map(f -> "season factor " + format.plain(f)).orElse("none: the whole year"));
+        fact("Authority's least pressure", site.authorityMinimum().map(m -> m.pressure().typed()).orElse(""));
+        group("4 Site and code");
+    }
+
+    private void coefficients(ItemResult item) {
+        for (Step step : item.sheet().steps()) {
+            if (step.name().startsWith("coefficient/") || step.name().equals("gust-factor") || step.name().startsWith("topography-factor")) {
+                facts.add(Fact.of(step.name(), format.plain(step.value()), step.place() + "; " + step.formula()));
+            }
+        }
+        fact("Internal pressure", "none: a free-standing panel");
+        fact("Load cases", item.loads().map(l -> String.join(", ", l.cases().stream().map(c -> c.name()).distinct().toList())).orElse("none"));
+        fact("Wind directions", "front and back, and from both ends");
+        group("5 Coefficients, " + item.item().mark());
+    }
+
+    private void results() {
+        for (ItemResult item : assessment.items()) {
+            String mark = item.item().mark();
+            item.loads().ifPresent(l -> fact("Governing case, " + mark, String.join(", ", l.governing().entrySet().stream()
+                .sorted(java.util.Map.Entry.comparingByKey()).map(e -> e.getKey() + ": " + e.getValue()).toList())));
+            item.loads().ifPresent(l -> fact("Weight of the boards, " + mark, l.selfWeight() > 0 ? format.force(l.selfWeight()) : ""));
+            item.loads().ifPresent(l -> fact("Wind along the face, " + mark, format.force(l.edgeOn().force()) + ", own rule"));
+            item.refusal().ifPresent(r -> fact("Outcome, " + mark, "not covered: " + r.code() + ", " + r.clause()));
+        }
+        fact("Pressures, forces, moments", "at both levels, each labelled, under \"Loads by case\"");
+        group("6 Results");
+    }
+
+    private void foundation() {
+        for (String label : List.of("Soil and its source", "Footing, concrete, reinforcement, base plate, anchors", "Factors against overturning and sliding",
+            "Friction", "Water table and uplift")) {
+            fact(label, NOT_HERE);
+        }
+        facts.add(new Fact("Buried services", "services not located", "", true));
+        group("7 Foundation or ballast");
+    }
+
+    private void limits() {
+        for (String label : List.of("Greatest gust and equal mean", "Action levels")) {
+            fact(label, NOT_HERE);
+        }
+        fact("Who measures, and at which height", NOT_GIVEN);
+        group("8 Limiting wind");
+    }
+
+    private void assumptions() {
+        List<String> all = assessment.items().stream().flatMap(i -> i.notes().stream())
+            .filter(n -> n.kind() == Note.Kind.ASSUMPTION || n.kind() == Note.Kind.OVERRIDE).map(Note::text).distinct().toList();
+        for (int i = 0; i < all.size(); i++) {
+            fact("Assumption " + (i + 1), all.get(i));
+        }
+        group("9 Assumptions and unknowns");
+    }
+
+    private void exclusions() {
+        for (String each : List.of("Ice and snow", "Earthquake", "Fatigue and vortex shedding", "Impact", "Crowd load", "Electrical parts",
+            "Anchors in masonry", "Existing structure", "Flutter")) {
+            fact(each, "not covered");
+        }
+        group("10 Exclusions");
+    }
+
+    private void handCheck() {
+        fact("One line to redo, and the balance of loads and reactions", "under \"To redo by hand\" in the calculation");
+        group("11 Hand check");
+    }
+
+    private void maintenance() {
+        for (ItemResult item : assessment.items()) {
+            String mark = item.item().mark();
+            fact("Design life, " + mark, job.remark(mark, "design-life").orElse(""));
+            fact("Inspection interval, " + mark, job.remark(mark, "inspection-interval").orElse(""));
+        }
+        fact("Storm action", NOT_GIVEN);
+        group("12 Inspection and maintenance");
+    }
+
+    private static String join(String a, String b) {
+        return Optional.of(a).filter(s -> !s.isBlank()).map(s -> b.isBlank() ? s : s + "; " + b).orElse(b);
+    }
+}

@@ -1,0 +1,109 @@
+package broadside.sheet;
+
+import broadside.action.PostAction;
+import broadside.assess.Assessment;
+import broadside.assess.ItemResult;
+import broadside.assess.Loads;
+import broadside.assess.Note;
+import broadside.quantity.Dimension;
+import broadside.sheet.Block.Answer;
+import broadside.sheet.Block.Fact;
+import broadside.sheet.Block.Heading;
+import broadside.sheet.Block.Notes;
+import broadside.sheet.Block.Paragraph;
+import broadside.sheet.Block.Picture;
+import broadside.sheet.Block.Tone;
+import broadside.trace.Status;
+import broadside.trace.Step;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+
+/** The blocks of one item: answer, drawing, cases, posts, what was assumed, what was not checked. */
+final class ItemBlocks {
+
+    static List<Block> of(Assessment assessment, ItemResult item, Format format, String anchor, int level) {
+        List<Block> blocks = new ArrayList<>();
+        if (item.loads().isEmpty()) {
+            blocks.addAll(refusal(item, anchor, level));
+        } else {
+            Loads loads = item.loads().get();
+            blocks.add(new Heading(level, "The answer", anchor + "answer"));
+            blocks.add(answer(assessment, item, loads, format));
+            overrides(item).forEach(blocks::add);
+        }
+        blocks.add(new Heading(level, "Drawing", anchor + "drawing"));
+        blocks.add(new Picture(ItemDrawing.of(item.item(), item.loads(), format.units()), caption(item),
+            ItemDrawing.words(item.item(), item.loads(), format.units())));
+        item.loads().ifPresent(loads -> {
+            blocks.add(new Heading(level, "Loads by case", anchor + "cases"));
+            blocks.addAll(CaseTables.of(item.item(), loads, format));
+        });
+        blocks.add(new Heading(level, "What was assumed", anchor + "assumed"));
+        blocks.add(notes(item, Note.Kind.ASSUMPTION, Note.Kind.CAUTION));
+        blocks.add(new Heading(level, "What was not checked", anchor + "not-checked"));
+        blocks.add(notes(item, Note.Kind.NOT_CHECKED));
+        return blocks;
+    }
+
+    private static Answer answer(Assessment assessment, ItemResult item, Loads loads, Format format) {
+        List<Fact> lines = new ArrayList<>();
+        String companion = loads.level().companion();
+        double f = loads.level().factor();
+        var governing = loads.governs("base-moment");
+        lines.add(Fact.of("What governs", governing.label(), assessment.code().edition().property("title")));
+        lines.add(Fact.of("Wind force", format.both(loads.governs("base-shear").force(), Dimension.FORCE) + ", " + loads.level().name(),
+            format.force(f * loads.governs("base-shear").force()) + " " + companion));
+        lines.add(moment(loads, format, f, companion));
+        double torsion = Math.abs(loads.governs("torsion").torsion());
+        if (item.item().choose(sign -> true, hoarding -> false) && torsion > 0) {
+            lines.add(Fact.of("Torsion about the middle of the posts", format.both(torsion, Dimension.MOMENT) + ", " + loads.level().name(),
+                format.moment(f * torsion) + " " + companion + ", case " + loads.governing().get("torsion")));
+        }
+        lines.add(Fact.of("How sure", sure(item), "loads only: no post, footing or ground was checked"));
+        return new Answer(lines);
+    }
+
+    private static Fact moment(Loads loads, Format format, double f, String companion) {
+        return loads.posts().stream().max(Comparator.comparingDouble(PostAction::moment))
+            .map(p -> Fact.of("Moment at the foot of the worst post", format.both(p.moment(), Dimension.MOMENT) + ", " + loads.level().name(),
+                format.moment(f * p.moment()) + " " + companion + ", post " + p.post() + ", case " + p.named()))
+            .orElseGet(() -> Fact.of("Moment at the ground, whole length", format.both(loads.governs("base-moment").baseMoment(), Dimension.MOMENT) + ", "
+                + loads.level().name(), format.moment(f * loads.governs("base-moment").baseMoment()) + " " + companion));
+    }
+
+    /** How well the sources of the calculation are known. */
+    private static String sure(ItemResult item) {
+        List<Step> steps = item.sheet().steps();
+        long recalled = steps.stream().filter(s -> s.status() == Status.RECALLED).count();
+        long quoted = steps.stream().filter(s -> s.status() == Status.SECOND_HAND).count();
+        if (recalled == 0 && quoted == 0) {
+            return "all figures were read in print";
+        }
+        return recalled + " of " + steps.size() + " steps rest on figures not yet checked against print" + (quoted > 0 ? ", " + quoted + " on quoted ones" : "");
+    }
+
+    private static List<Paragraph> overrides(ItemResult item) {
+        return item.notes().stream().filter(n -> n.kind() == Note.Kind.OVERRIDE).map(n -> new Paragraph("User's own value: " + n.text(), Tone.CAUTION)).toList();
+    }
+
+    private static List<Block> refusal(ItemResult item, String anchor, int level) {
+        ItemResult.Refusal refusal = item.refusal().orElseThrow();
+        return List.of(new Heading(level, "Not covered by this code", anchor + "answer"),
+            new Answer(List.of(Fact.of("Outcome", item.outcome().word().replace('-', ' '), "no load is given"),
+                Fact.of("Clause", refusal.code() + ", " + refusal.clause()), Fact.of("Reason", refusal.reason()),
+                Fact.of("What can be done", refusal.instead()))));
+    }
+
+    private static String caption(ItemResult item) {
+        return item.loads().isEmpty() ? "Drawn to scale, dimensions as typed." : "Drawn to scale, dimensions as typed. Hatched the denser the higher the "
+            + "pressure; F is where the force of the governing case acts, seen from the front in the worst torsion case.";
+    }
+
+    private static Notes notes(ItemResult item, Note.Kind... kinds) {
+        List<Note.Kind> wanted = List.of(kinds);
+        return new Notes(item.notes().stream().filter(n -> wanted.contains(n.kind())).map(Note::text).toList());
+    }
+
+    private ItemBlocks() { }
+}
