@@ -25,8 +25,8 @@ final class Balances {
     private static List<Loads.Balance> sign(PostSign sign, FootActions.Result actions, String governing) {
         FootActions.Combined worst = actions.combinations().stream().filter(c -> c.name().equals(governing)).findFirst().orElseThrow();
         double[] sums = SignPosts.sums(worst, sign.posts().positions());
-        return List.of(new Loads.Balance("shear at the ground, case " + worst.name(), worst.force(), sums[0], "N"),
-            new Loads.Balance("moment at the ground, case " + worst.name(), worst.moment(), sums[1], "N m"));
+        return List.of(new Loads.Balance("shear at the ground, case " + worst.name().replace("case-", ""), worst.force(), sums[0], "N"),
+            new Loads.Balance("moment at the ground, case " + worst.name().replace("case-", ""), worst.moment(), sums[1], "N m"));
     }
 
     private static List<Loads.Balance> hoarding(Hoarding hoarding, List<PanelCases> panels) {

@@ -42,8 +42,7 @@ final class StepParts {
         Tag body = item.child("LBody");
         Band.Cell work = new Band.Cell(NUMBER, left);
         add(work, value(step), Type.TABLE, body);
-        add(work, words().addFormula(step.formula(), false), Type.TABLE, body);
-        add(work, words().addFormula(step.numbers(), false), Type.TABLE, body);
+        add(work, words().addFormula(step.found(), false), Type.TABLE, body);
         Band.Cell source = new Band.Cell(NUMBER + left + GUTTER, text - left - GUTTER);
         add(source, words().add(step.meaning(), false), Type.TABLE, body);
         add(source, source(step), Type.QUIET, body);
@@ -63,7 +62,11 @@ final class StepParts {
 
     private Words value(StepLine step) {
         String symbol = step.symbol().isBlank() ? step.name() : step.symbol();
-        Words words = words().addFormula(symbol, true).add(" = " + step.value() + " " + step.unit(), true);
+        Words words = words().addFormula(symbol, true);
+        if (step.relation()) {
+            words.addFormula(" " + step.formula(), false);
+        }
+        words.add(" = " + step.value() + " " + step.unit(), true);
         return step.other().isBlank() ? words : words.add(" (" + step.other() + ")", false);
     }
 

@@ -68,12 +68,24 @@ public sealed interface Block {
      * One line of the calculation. {@code symbol}, {@code formula} and {@code numbers} may hold subscripts,
      * written {@code q_p} or {@code c_{p,net}}; see {@link Runs}.
      *
+     * @param formula  a relation, which then begins with an equals sign, or how a table was read
      * @param numbers  the formula's inputs with the numbers put in, such as "I_v = 0.161, v_m = 34.8 m/s"
      * @param other    the value in the other system of units; may be empty
      * @param status   how well the source is known: read, second-hand, recalled, derived
      */
     record StepLine(int number, String name, String symbol, String meaning, String formula, String numbers,
-                    String value, String unit, String other, String place, String status) { }
+                    String value, String unit, String other, String place, String status) {
+
+        /** Whether the formula can be put between the symbol and the value. */
+        public boolean relation() {
+            return formula.startsWith("=");
+        }
+
+        /** How it was found, for a line below the value: the reading and the numbers, or the numbers alone. */
+        public String found() {
+            return relation() || formula.isBlank() ? numbers : numbers.isBlank() ? formula : formula + "; " + numbers;
+        }
+    }
 
     /** A list of sentences. */
     record Notes(List<String> items) implements Block {

@@ -31,7 +31,7 @@ final class CalculationBlocks {
             loads.balance().forEach(b -> blocks.add(new Paragraph(balance(b), Tone.PLAIN)));
         });
         blocks.add(new Heading(3, "Given", anchor + "given"));
-        blocks.add(given(item.sheet(), format));
+        blocks.add(given(item.sheet()));
         blocks.add(new Heading(3, "Steps", anchor + "steps"));
         blocks.add(new Paragraph("Values are in SI with four figures; what was calculated was not rounded. The status says how well the source is known.",
             Tone.SMALL));
@@ -45,7 +45,7 @@ final class CalculationBlocks {
         Step moment = sheet.find("base-moment/" + name).orElseThrow();
         double force = loads.governs("base-moment").force();
         double height = loads.governs("base-moment").height();
-        return "Moment at the ground line, case " + name + ": force times height = " + value(force, "N") + " x " + value(height, "m") + " = "
+        return "Moment at the ground line, " + Format.caseWords(name) + ": force times height = " + value(force, "N") + " x " + value(height, "m") + " = "
             + value(moment.value(), "N m") + ". " + "Pressure times area gives the force: see the step force/" + name + ".";
     }
 
@@ -54,7 +54,7 @@ final class CalculationBlocks {
             + value(balance.reactions(), balance.unit()) + ".";
     }
 
-    private static Table given(Trace sheet, Format format) {
+    private static Table given(Trace sheet) {
         List<Row> rows = sheet.givens().stream().map(g -> new Row(List.of(g.meaning(), plainSymbol(g.symbol()), g.typed().isEmpty() ? "-" : g.typed(),
             value(g.value(), g.unit())), false)).toList();
         return new Table("What the calculation starts from", List.of(new Column("Meaning", false, 6), new Column("Symbol", false, 2),
@@ -70,16 +70,25 @@ final class CalculationBlocks {
         List<StepLine> lines = new ArrayList<>();
         int number = 0;
         for (Step step : sheet.steps()) {
-            StringBuilder numbers = new StringBuilder();
-            for (Step.Input input : step.inputs()) {
-                numbers.append(numbers.isEmpty() ? "" : ", ").append(input.symbol()).append(" = ").append(value(input.value(), input.unit()));
-            }
-            step.replaced().ifPresent(r -> numbers.append("calculated: ").append(value(r.calculated(), step.unit())));
             Shown shown = shown(step.value(), step.unit());
-            lines.add(new StepLine(++number, step.name(), step.symbol(), step.meaning(), step.formula(), numbers.toString(), shown.number(), shown.unit(),
+            String formula = step.way() == Step.Way.RELATION ? "= " + step.formula() : step.formula();
+            lines.add(new StepLine(++number, step.name(), step.symbol(), step.meaning(), formula, numbers(step), shown.number(), shown.unit(),
                 format.other(step.value(), step.unit()), step.place(), step.status().shown()));
         }
         return new Steps(lines);
+    }
+
+    /** The values put in; a step that only takes over one value needs no line for it. */
+    private static String numbers(Step step) {
+        if (step.inputs().size() == 1 && step.formula().equals(step.inputs().get(0).symbol())) {
+            return "";
+        }
+        StringBuilder numbers = new StringBuilder();
+        for (Step.Input input : step.inputs()) {
+            numbers.append(numbers.isEmpty() ? "" : ", ").append(input.symbol()).append(" = ").append(value(input.value(), input.unit()));
+        }
+        step.replaced().ifPresent(r -> numbers.append("calculated: ").append(value(r.calculated(), step.unit())));
+        return numbers.toString();
     }
 
     private static String value(double si, String unit) {

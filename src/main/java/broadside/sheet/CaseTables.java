@@ -55,7 +55,7 @@ final class CaseTables {
                 governs.add("torsion");
             }
             boolean marked = !governs.isEmpty() && c.direction().equals("front");
-            rows.add(new Row(List.of(c.name(), c.direction() + end(c), format.force(factor * c.force()), format.length(c.height()),
+            rows.add(new Row(List.of(Format.caseName(c.name()), c.direction() + end(c), format.force(factor * c.force()), format.length(c.height()),
                 format.moment(factor * c.baseMoment()), torsion(c, factor, format), marked ? String.join(", ", governs) : "-"), marked));
         }
         return new Table("Loads at the ground line, " + level, List.of(new Column("Case", false, 3), new Column("Wind on", false, 4),
@@ -83,9 +83,9 @@ final class CaseTables {
                 PanelZones panel = c.zones().get(i);
                 Panel of = item.panels().get(i);
                 for (ZonePressure z : panel.zones()) {
-                    String where = (parts ? panel.part() + ", " : "") + (z.zone().equals("all") ? "whole board" : HoardingDrawing.shortName(z.zone()));
+                    String where = (parts ? panel.part() + ", " : "") + (panel.zones().size() == 1 && !of.kind().equals(Panel.Kind.WALL) ? "whole board" : HoardingDrawing.shortName(z.zone()));
                     double arm = of.clearance() + of.height() / 2;
-                    rows.add(new Row(List.of(c.name(), where, format.length(z.from()) + " to " + format.length(z.to()), format.plain(z.coefficient()),
+                    rows.add(new Row(List.of(Format.caseName(c.name()), where, format.length(z.from()) + " to " + format.length(z.to()), format.plain(z.coefficient()),
                         format.pressure(z.pressure()), format.pressure(f * z.pressure()), perMetre(z.pressure() * of.height() * arm, format)), false));
                 }
             }
@@ -108,7 +108,7 @@ final class CaseTables {
         for (PostAction p : shown) {
             boolean worst = p.moment() >= most * (1 - 1e-9);
             String carries = p.share().map(s -> format.length(s) + (p.gate() > 0 ? " and " + format.length(p.gate()) + " of gate" : "")).orElse("by statics");
-            rows.add(new Row(List.of(Integer.toString(p.post()), format.length(p.position()), p.zone().isEmpty() ? p.named()
+            rows.add(new Row(List.of(Integer.toString(p.post()), format.length(p.position()), p.zone().isEmpty() ? Format.caseName(p.named())
                 : HoardingDrawing.shortName(p.zone()), carries, format.force(p.shear()), format.moment(p.moment()),
                 format.moment(loads.level().factor() * p.moment()), worst ? "worst" : "-"), worst));
         }

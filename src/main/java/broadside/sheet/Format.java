@@ -25,6 +25,16 @@ final class Format {
         });
     }
 
+    /** A case in words: "case A" for case-a, "case centred" for centred. */
+    static String caseWords(String name) {
+        return "case " + caseName(name);
+    }
+
+    /** A case in a column headed so: "A" for case-a. */
+    static String caseName(String name) {
+        return name.startsWith("case-") && name.length() == 6 ? name.substring(5).toUpperCase(Locale.ROOT) : name;
+    }
+
     Units units() {
         return units;
     }

@@ -16,7 +16,7 @@ import java.util.Optional;
 final class HoardingDrawing {
 
     private static final double MARGIN = 40;
-    private static final double SIDE = 110;
+    private static final double SIDE = 84;
 
     private final Hoarding hoarding;
     private final Optional<Loads> loads;
@@ -34,7 +34,7 @@ final class HoardingDrawing {
 
     Drawing make() {
         double scale = Math.min((ItemDrawing.WIDTH - 2 * MARGIN) / length, 120 / top);
-        double ground = 62 + top * scale;
+        double ground = 58 + top * scale;
         Canvas front = new Canvas(MARGIN + ((ItemDrawing.WIDTH - 2 * MARGIN) - length * scale) / 2, ground, scale);
         front.text(ItemDrawing.WIDTH / 2, 12, "elevation, seen from the front", Anchor.MIDDLE, Ink.BLACK);
         front.ground(front.x(0) - 20, front.x(length) + 20);
@@ -85,9 +85,9 @@ final class HoardingDrawing {
             .filter(c -> c.zones().stream().anyMatch(p -> p.zones().size() > 1)).findFirst().orElse(loads.governs("base-moment"));
     }
 
-    /** "case-c/s-2s" becomes "s-2s" on the drawing. */
+    /** "case-c/s-2s" becomes "s-2s", "case-a" becomes "all": the words on the drawing and in tables. */
     static String shortName(String zone) {
-        return zone.substring(zone.indexOf('/') + 1);
+        return zone.matches("case-[ab]") ? "all" : zone.substring(zone.indexOf('/') + 1);
     }
 
     private void posts(Canvas front) {

@@ -58,7 +58,7 @@ final class ItemBlocks {
         double torsion = Math.abs(loads.governs("torsion").torsion());
         if (item.item().choose(sign -> true, hoarding -> false) && torsion > 0) {
             lines.add(Fact.of("Torsion about the middle of the posts", format.both(torsion, Dimension.MOMENT) + ", " + loads.level().name(),
-                format.moment(f * torsion) + " " + companion + ", case " + loads.governing().get("torsion")));
+                format.moment(f * torsion) + " " + companion + ", " + Format.caseWords(loads.governing().get("torsion"))));
         }
         lines.add(Fact.of("How sure", sure(item), "loads only: no post, footing or ground was checked"));
         return new Answer(lines);
@@ -67,7 +67,7 @@ final class ItemBlocks {
     private static Fact moment(Loads loads, Format format, double f, String companion) {
         return loads.posts().stream().max(Comparator.comparingDouble(PostAction::moment))
             .map(p -> Fact.of("Moment at the foot of the worst post", format.both(p.moment(), Dimension.MOMENT) + ", " + loads.level().name(),
-                format.moment(f * p.moment()) + " " + companion + ", post " + p.post() + ", case " + p.named()))
+                format.moment(f * p.moment()) + " " + companion + ", post " + p.post() + ", " + Format.caseWords(p.named())))
             .orElseGet(() -> Fact.of("Moment at the ground, whole length", format.both(loads.governs("base-moment").baseMoment(), Dimension.MOMENT) + ", "
                 + loads.level().name(), format.moment(f * loads.governs("base-moment").baseMoment()) + " " + companion));
     }

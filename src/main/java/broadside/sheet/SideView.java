@@ -30,8 +30,8 @@ final class SideView {
         }
         double tip = view.x(-post) - Math.max(3, panels[0][2] * view.scale());
         double y = view.y(force);
-        view.arrow(tip - 46, y, tip - 1, y, 2);
-        view.boldText(tip - 46, y - 5, label, Anchor.START, Ink.ACCENT);
+        view.arrow(tip - 40, y, tip - 1, y, 2);
+        view.boldText(tip - 6, y - 6, label, Anchor.END, Ink.ACCENT);
         double dim = view.x(post) + 26;
         view.help(view.x(post), y, dim + 4, y);
         view.line(dim, y, dim, view.y(0), Canvas.THIN, Ink.BLACK, false);

@@ -16,7 +16,7 @@ import java.util.Optional;
 /** Elevation and side view of a sign on posts. */
 final class SignDrawing {
 
-    private static final double TALLEST = 210;
+    private static final double TALLEST = 145;
     private static final double ROOM = 250;
 
     private final PostSign sign;
@@ -93,8 +93,10 @@ final class SignDrawing {
                 if (panel.zones().size() > 1) {
                     front.line(front.x(panel.left() + zone.from()), front.y(board.clearance().metres()), front.x(panel.left() + zone.from()),
                         front.y(board.clearance().metres() + board.height().metres()), Canvas.THIN, Ink.BLACK, true);
-                    front.boldText(front.x(panel.left() + (zone.from() + zone.to()) / 2), front.y(board.clearance().metres()) - 4,
-                        HoardingDrawing.shortName(zone.zone()), Anchor.MIDDLE, Ink.BLACK);
+                    String name = HoardingDrawing.shortName(zone.zone());
+                    boolean narrow = zone.width() * front.scale() < 5.2 * name.length();
+                    front.boldText(front.x(panel.left() + (zone.from() + zone.to()) / 2), front.y(board.clearance().metres()) + (narrow ? 11 : -4),
+                        name, Anchor.MIDDLE, Ink.BLACK);
                 }
             }
         }

@@ -114,14 +114,14 @@ final class Samples {
         List<StepLine> lines = new ArrayList<>();
         for (int i = 0; i < count; i += 3) {
             lines.add(new StepLine(i + 1, "turbulence", "I_v", "turbulence at the middle of the board",
-                "I_v = k_I / (c_o ln(z / z_0))", "k_I = 1.00, c_o = 1.00, z = 5.25 m, z_0 = 0.05 m", "0.2149", "", "",
+                "= k_I / (c_o ln(z / z_0))", "k_I = 1.00, c_o = 1.00, z = 5.25 m, z_0 = 0.05 m", "0.2149", "", "",
                 "EN 1991-1-4, 4.4 (4.7)", "read"));
             lines.add(new StepLine(i + 2, "peak pressure", "q_p", "peak velocity pressure at the middle of the board",
-                "q_p = (1 + 7 I_v) \u00bd \u03c1 v_m\u00b2",
+                "= (1 + 7 I_v) \u00bd \u03c1 v_m\u00b2",
                 "I_v = 0.2149, \u03c1 = 1.25 kg/m\u00b3, v_m = 21.23 m/s", "0.7055",
                 "kPa", "14.74 psf", "EN 1991-1-4, 4.5 (4.8)", "read"));
             lines.add(new StepLine(i + 3, "force", "F_{w,net}", "force on the board, square on",
-                "F_{w,net} = c_{p,net} q_p A", "c_{p,net} = 1.80, q_p = 0.7055 kPa, A = 12.50 m\u00b2", "15.87", "kN",
+                "= c_{p,net} q_p A", "c_{p,net} = 1.80, q_p = 0.7055 kPa, A = 12.50 m\u00b2", "15.87", "kN",
                 "3.569 kip", "EN 1991-1-4, 7.4.3",
                 "second-hand"));
         }

@@ -1,0 +1,50 @@
+package broadside.cli;
+
+import broadside.assess.Assessment;
+import broadside.assess.BadJob;
+import broadside.job.JobText;
+import broadside.job.ResultText;
+import java.io.PrintStream;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+import picocli.CommandLine.ParentCommand;
+
+/** Assesses a job file: a table, or the result as JSON. */
+@Command(name = "check", mixinStandardHelpOptions = true, description = "Assesses a job file or a Broadside PDF and prints the loads.")
+final class CheckCommand implements Callable<Integer> {
+
+    @ParentCommand
+    private Commands parent;
+
+    @Parameters(paramLabel = "JOB", description = "job file or Broadside PDF")
+    private Path job;
+
+    @Option(names = "--json", description = "print the result as JSON")
+    private boolean json;
+
+    @Override
+    public Integer call() {
+        Tool tool = parent.tool();
+        Assessment assessment = assess(tool, JobFiles.open(job, tool.reader()), job);
+        PrintStream out = new PrintStream(System.out, true, StandardCharsets.UTF_8);
+        if (json) {
+            out.writeBytes(JobText.write(ResultText.of(assessment)));
+        } else {
+            TextTable.print(assessment, out);
+        }
+        out.flush();
+        return assessment.allAssessed() ? 0 : 1;
+    }
+
+    static Assessment assess(Tool tool, JobFiles.Opened opened, Path file) {
+        try {
+            return tool.assessor().assess(opened.job());
+        } catch (BadJob e) {
+            throw new Refused(e.problems().stream().map(p -> file + ": " + p.line()).toList());
+        }
+    }
+}

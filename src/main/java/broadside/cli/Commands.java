@@ -1,0 +1,57 @@
+package broadside.cli;
+
+import broadside.table.TableFormat;
+import java.io.PrintWriter;
+import java.nio.file.Path;
+import java.util.Optional;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+
+/** The commands of the tool. Errors go to standard error, one line each; no stack trace. */
+@Command(name = "broadside", mixinStandardHelpOptions = true, versionProvider = VersionText.class,
+    description = "What the wind does to a flat thing that faces it: preliminary load summaries.",
+    subcommands = {ServeCommand.class, CheckCommand.class, SummaryCommand.class, VerifyCommand.class, TablesCommand.class})
+public final class Commands implements Runnable {
+
+    @Option(names = "--code-tables", scope = CommandLine.ScopeType.INHERIT, paramLabel = "DIR",
+        description = "a folder with more editions and overlays, such as a firm's own values")
+    private Path ownTables;
+
+    /** Runs a command line; returns the exit status. */
+    public static int run(String... args) {
+        return run(new PrintWriter(System.err, true), args);
+    }
+
+    static int run(PrintWriter errors, String... args) {
+        CommandLine line = new CommandLine(new Commands());
+        line.setErr(errors);
+        line.setParameterExceptionHandler((e, given) -> {
+            errors.println(e.getMessage().lines().findFirst().orElse("this command line does not fit"));
+            return 2;
+        });
+        line.setExecutionExceptionHandler((e, command, parsed) -> failed(e, errors));
+        return line.execute(args);
+    }
+
+    private static int failed(Exception e, PrintWriter errors) {
+        if (e instanceof Refused refused) {
+            refused.lines().forEach(errors::println);
+        } else if (e instanceof TableFormat) {
+            errors.println(e.getMessage());
+        } else {
+            errors.println("the tool failed: " + e.getClass().getSimpleName() + (e.getMessage() == null ? "" : ", " + e.getMessage().lines().findFirst().orElse("")));
+        }
+        return 2;
+    }
+
+    Tool tool() {
+        return Tool.of(Optional.ofNullable(ownTables));
+    }
+
+    /** Without a command the tool serves. */
+    @Override
+    public void run() {
+        new ServeCommand().serve(tool());
+    }
+}

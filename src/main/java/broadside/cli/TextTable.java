@@ -1,0 +1,64 @@
+package broadside.cli;
+
+import broadside.assess.Assessment;
+import broadside.sheet.Block;
+import broadside.sheet.Sheet;
+import broadside.sheet.SheetMaker;
+import java.io.PrintStream;
+import java.util.List;
+
+/** The first part of a sheet as plain text: answers, tables and notes, without the drawing and the calculation. */
+final class TextTable {
+
+    static void print(Assessment assessment, PrintStream out) {
+        Sheet sheet = SheetMaker.of(assessment, "");
+        out.println(sheet.caution());
+        for (Block block : sheet.blocks()) {
+            if (block instanceof Block.NewPage || block instanceof Block.Heading h && h.anchor().equals("check-list")) {
+                break;
+            }
+            print(block, out);
+        }
+        out.println();
+        out.println(sheet.made());
+    }
+
+    private static void print(Block block, PrintStream out) {
+        if (block instanceof Block.Heading heading && !heading.text().equals("Drawing")) {
+            out.println();
+            out.println(heading.text());
+        } else if (block instanceof Block.Answer answer) {
+            answer.lines().forEach(f -> out.println("  " + f.label() + ": " + f.value() + (f.remark().isEmpty() ? "" : "; " + f.remark())));
+        } else if (block instanceof Block.Table table) {
+            table(table, out);
+        } else if (block instanceof Block.Notes notes) {
+            notes.items().forEach(n -> out.println("  - " + n));
+        } else if (block instanceof Block.Paragraph paragraph) {
+            out.println("  " + paragraph.text());
+        }
+    }
+
+    private static void table(Block.Table table, PrintStream out) {
+        int[] widths = new int[table.columns().size()];
+        for (int i = 0; i < widths.length; i++) {
+            int column = i;
+            widths[i] = Math.max(table.columns().get(i).heading().length(),
+                table.rows().stream().mapToInt(r -> r.cells().get(column).length()).max().orElse(0));
+        }
+        out.println();
+        out.println("  " + table.caption());
+        out.println("  " + row(table, table.columns().stream().map(Block.Column::heading).toList(), widths));
+        table.rows().forEach(r -> out.println("  " + row(table, r.cells(), widths)));
+    }
+
+    private static String row(Block.Table table, List<String> cells, int[] widths) {
+        StringBuilder line = new StringBuilder();
+        for (int i = 0; i < widths.length; i++) {
+            String pad = " ".repeat(widths[i] - cells.get(i).length());
+            line.append(i == 0 ? "" : "  ").append(table.columns().get(i).number() ? pad + cells.get(i) : cells.get(i) + pad);
+        }
+        return line.toString().stripTrailing();
+    }
+
+    private TextTable() { }
+}
