@@ -1,5 +1,7 @@
 package broadside.action;
 
+import broadside.codes.PanelSymbols;
+import broadside.panel.Panel;
 import broadside.table.Coefficient;
 import broadside.table.Rows;
 import broadside.trace.Status;
@@ -15,17 +17,24 @@ import broadside.trace.Trace;
 public record EdgeOn(double force, double moment) {
 
     /** Works out one panel; depth in metres, zero where it is not known. */
-    public static EdgeOn of(Rows rule, double width, double height, double middle, double depth, double q, Trace trace) {
+    public static EdgeOn of(Rows rule, Panel panel, double depth, double q, PanelSymbols symbols, Trace trace) {
         Coefficient edge = rule.number("edge-coefficient", "value");
         Coefficient friction = rule.number("friction-coefficient", "value");
         double ce = edge.into(trace.line("edge-coefficient", "c_e", "drag coefficient of the edge"));
         double cf = friction.into(trace.line("friction-coefficient", "c_{fr}", "friction coefficient of a face, the roughest printed"));
         Status status = edge.source().status().weaker(friction.source().status());
-        double force = trace.line("force/edge-on", "F_e", "force of wind along the face: own rule, of no code").in("q", q, "Pa").in("c_e", ce)
-            .in("d", depth, "m").in("h", height, "m").in("c_{fr}", cf).in("b", width, "m").from("own rule: edge-on case", status)
-            .gives("q (c_e d h + 2 c_{fr} b h)", q * (ce * depth * height + 2 * cf * width * height), "N");
+        double pressure = trace.line("pressure/edge-on", "q", "pressure of the wind along the face").from("own rule: edge-on case", status)
+            .reads("the velocity pressure of the panel", q, "Pa");
+        double d = trace.given("d", "thickness of the panel, zero where it is not given", depth, "m", "");
+        String b = symbols.width();
+        String h = symbols.height();
+        double force = trace.line("force/edge-on", "F_e", "force of wind along the face: own rule, of no code").in("q", pressure, "Pa").in("c_e", ce)
+            .in("d", d, "m").in(h, panel.height(), "m").in("c_{fr}", cf).in(b, panel.width(), "m").from("own rule: edge-on case", status)
+            .gives("q (c_e d " + h + " + 2 c_{fr} " + b + " " + h + ")", pressure * (ce * d * panel.height() + 2 * cf * panel.width() * panel.height()), "N");
+        double middle = trace.line("lever-arm/edge-on", "z_e", "height of the middle of the panel").in("z_g", panel.clearance(), "m")
+            .in(h, panel.height(), "m").from("statics", Status.DERIVED).gives("z_g + " + h + " / 2", panel.clearance() + panel.height() / 2, "m");
         double moment = trace.line("base-moment/edge-on", "M_e", "moment at the ground line, wind along the face").in("F_e", force, "N")
-            .in("z", middle, "m").from("own rule: edge-on case", status).gives("F_e z", force * middle, "N m");
+            .in("z_e", middle, "m").from("own rule: edge-on case", status).gives("F_e z_e", force * middle, "N m");
         return new EdgeOn(force, moment);
     }
 

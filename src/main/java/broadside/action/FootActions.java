@@ -1,7 +1,7 @@
 package broadside.action;
 
 import broadside.action.CaseAction.PanelZones;
-import broadside.codes.LoadCase.Windward;
+import broadside.codes.PanelSymbols;
 import broadside.codes.ZonePressure;
 import broadside.panel.Panel;
 import broadside.trace.Status;
@@ -46,83 +46,90 @@ public final class FootActions {
     }
 
     /** Works out and records each case; of two ends the worse one is recorded. */
-    public static Result of(List<PanelCases> panels, Trace trace) {
+    public static Result of(List<PanelCases> panels, PanelSymbols symbols, Trace trace) {
         List<Combination> all = Combination.all(panels);
         List<CaseAction> cases = new ArrayList<>();
         for (String name : all.stream().map(Combination::name).distinct().toList()) {
             Combination worst = all.stream().filter(c -> c.name().equals(name)).reduce(Combination::worse).orElseThrow();
-            CaseAction front = record(worst, trace);
+            CaseAction front = record(worst, symbols, trace);
             cases.add(front);
             cases.add(front.fromBehind());
         }
         return new Result(cases, all.stream().map(Combined::new).toList());
     }
 
-    private static CaseAction record(Combination combination, Trace trace) {
+    private static CaseAction record(Combination combination, PanelSymbols symbols, Trace trace) {
         String name = combination.name();
         boolean one = combination.panels().size() == 1;
         List<double[]> found = new ArrayList<>();
         for (PanelForce panel : combination.panels()) {
-            found.add(panel(panel, name, combination.windward(), trace.part(panel.panel().part())));
+            Names names = new Names(name, symbols, one ? "" : "_" + (found.size() + 1));
+            found.add(panel(panel, names, trace.part(panel.panel().part())));
         }
-        double force = one ? found.get(0)[0] : sum(found, name, trace);
+        double force = one ? found.get(0)[0] : total("force/" + name, "F", "wind force on all panels", found, 0, trace);
         double shear = trace.line("base-shear/" + name, "V", "shear at the ground line").in("F", force, "N").from(STATICS, Status.DERIVED)
             .gives("F", force, "N");
         double moment = one ? found.get(0)[1] : total("base-moment/" + name, "M", "moment at the ground line", found, 1, trace);
         double torsion = one ? found.get(0)[2] : total("torsion/" + name, "T", "torsion about the middle of the posts", found, 2, trace);
         if (!one) {
-            trace.line("lever-arm/" + name, "z_F", "height of the resultant").in("M", moment, "N m").in("F", force, "N")
+            trace.line("lever-arm/" + name, "z", "height of the resultant").in("M", moment, "N m").in("F", force, "N")
                 .from(STATICS, Status.DERIVED).gives("M / F", moment / force, "m");
         }
         return new CaseAction(name, combination.label(), "front", combination.windward(), zones(combination), force, moment / force,
             torsion / force, shear, moment, torsion);
     }
 
-    /** Force, moment and torsion of one panel. */
-    private static double[] panel(PanelForce panel, String name, Windward windward, Trace trace) {
-        double force = force(panel, name, trace);
-        Panel p = panel.panel();
-        double rise = panel.load().rise();
-        Trace.Line arm = trace.line("lever-arm/" + name, "z_F", "height of the force above the ground").in("z_g", p.clearance(), "m")
-            .in("h", p.height(), "m").from(STATICS, Status.DERIVED);
-        double z = rise == 0 ? arm.gives("z_g + h / 2", panel.height(), "m") : arm.in("Δ", rise, "m").gives("z_g + h / 2 + Δ", panel.height(), "m");
-        double moment = trace.line("base-moment/" + name, "M", "moment at the ground line").in("F", force, "N").in("z_F", z, "m")
-            .from(STATICS, Status.DERIVED).gives("F z_F", force * z, "N m");
-        double sign = windward == Windward.LEFT ? -1 : 1;
-        double e = Math.abs(panel.eccentricity());
-        double towards = panel.eccentricity() < 0 ? -1 : 1;
-        Trace.Line about = trace.line("torsion/" + name, "T", "torsion about the middle of the posts").in("F", force, "N").in("x_b", p.middle(), "m")
-            .from(STATICS, Status.DERIVED);
-        if (e == 0) {
-            return new double[] {force, moment, about.gives("F x_b", force * p.middle(), "N m")};
+    /** The case, the code's symbols of a panel, and the index that tells one panel's symbols from another's. */
+    private record Names(String load, PanelSymbols panel, String index) {
+        String of(String symbol) {
+            return symbol + index;
         }
-        double shift = trace.line("eccentricity/" + name, "e", "distance of the force from the middle of the panel, towards the "
-            + (sign < 0 ? "left" : "right")).in("b", p.width(), "m").from(STATICS, Status.DERIVED)
-            .reads(panel.load().shift() != 0 ? "by the rule of this case" : "centre of the zone pressures", e, "m");
-        return new double[] {force, moment, about.in("σ", towards).in("e", shift, "m")
-            .gives("F (x_b + σ e)", force * (p.middle() + towards * shift), "N m")};
     }
 
-    private static double force(PanelForce panel, String name, Trace trace) {
+    /** Force, moment and torsion of one panel. */
+    private static double[] panel(PanelForce panel, Names names, Trace trace) {
+        double force = force(panel, names, trace);
+        Panel p = panel.panel();
+        double rise = panel.load().rise();
+        String h = names.panel().height();
+        Trace.Line arm = line(trace, "lever-arm", names, "z", "height of the force above the ground").in("z_g", p.clearance(), "m")
+            .in(h, p.height(), "m");
+        double z = rise == 0 ? arm.gives("z_g + " + h + " / 2", panel.height(), "m")
+            : arm.in("Δ", rise, "m").gives("z_g + " + h + " / 2 + Δ", panel.height(), "m");
+        double moment = line(trace, "base-moment", names, "M", "moment at the ground line").in(names.of("F"), force, "N").in(names.of("z"), z, "m")
+            .gives(names.of("F") + " " + names.of("z"), force * z, "N m");
+        double e = panel.eccentricity();
+        double x = p.middle();
+        double shift = e == 0 ? 0 : line(trace, "eccentricity", names, "e", "distance of the force from the middle of the panel, towards the "
+            + (e < 0 ? "left" : "right")).in(names.panel().width(), p.width(), "m")
+            .reads(panel.load().shift() != 0 ? "by the rule of this case" : "centre of the zone pressures", Math.abs(e), "m");
+        Trace.Line about = line(trace, "torsion", names, "T", "torsion about the middle of the posts").in(names.of("F"), force, "N").in("x_b", x, "m");
+        double torsion = e == 0 ? about.gives(names.of("F") + " x_b", force * x, "N m")
+            : about.in(names.of("e"), shift, "m").gives(names.of("F") + " (x_b " + (e < 0 ? "- " : "+ ") + names.of("e") + ")",
+                force * (x + Math.signum(e) * shift), "N m");
+        return new double[] {force, moment, torsion};
+    }
+
+    private static Trace.Line line(Trace trace, String step, Names names, String symbol, String meaning) {
+        return trace.line(step + "/" + names.load(), names.of(symbol), meaning).from(STATICS, Status.DERIVED);
+    }
+
+    private static double force(PanelForce panel, Names names, Trace trace) {
         List<ZonePressure> zones = panel.load().zones();
-        double h = panel.panel().height();
-        Trace.Line line = trace.line("force/" + name, "F", "wind force on the panel").from(STATICS, Status.DERIVED);
+        String h = names.panel().height();
+        Trace.Line line = line(trace, "force", names, "F", "wind force on the panel");
         StringBuilder formula = new StringBuilder();
         for (ZonePressure zone : zones) {
-            String width = zones.size() == 1 ? "b" : "l_{" + zone.symbol().replaceAll("^._\\{?|}$", "") + "}";
+            String width = zones.size() == 1 ? names.panel().width() : "l_{" + zone.symbol().replaceAll("^._\\{?|}$", "") + "}";
             line.in(zone.symbol(), zone.pressure(), "Pa").in(width, zone.width(), "m");
             formula.append(formula.isEmpty() ? "" : " + ").append(zone.symbol()).append(' ').append(width);
         }
-        line.in("h", h, "m");
-        String sum = zones.size() == 1 ? formula + " h" : "(" + formula + ") h";
+        line.in(h, panel.panel().height(), "m");
+        String sum = zones.size() == 1 ? formula + " " + h : "(" + formula + ") " + h;
         if (panel.load().least() > 0) {
             return line.in("F_{min}", panel.load().least(), "N").gives("max(" + sum + "; F_{min})", panel.force(), "N");
         }
         return line.gives(sum, panel.force(), "N");
-    }
-
-    private static double sum(List<double[]> found, String name, Trace trace) {
-        return total("force/" + name, "F", "wind force on all panels", found, 0, trace);
     }
 
     private static double total(String step, String symbol, String meaning, List<double[]> found, int which, Trace trace) {

@@ -4,6 +4,7 @@ import broadside.aero.LineLoad;
 import broadside.aero.Strip;
 import broadside.codes.LoadCase;
 import broadside.codes.LoadCase.Windward;
+import broadside.codes.PanelSymbols;
 import broadside.codes.ZonePressure;
 import broadside.panel.Hoarding;
 import broadside.panel.Panel;
@@ -50,7 +51,8 @@ public final class HoardingPosts {
      *
      * @param shut  the cases of the whole wall while its gates are shut; empty without gates
      */
-    public static List<PostAction> of(Hoarding hoarding, double spacing, List<PanelCases> open, Optional<PanelCases> shut, Trace trace) {
+    public static List<PostAction> of(Hoarding hoarding, double spacing, List<PanelCases> open, Optional<PanelCases> shut, PanelSymbols symbols,
+                                       Trace trace) {
         List<PostAction> posts = new ArrayList<>();
         List<Share> worst = new ArrayList<>();
         for (Bay bay : bays(hoarding, spacing)) {
@@ -59,7 +61,7 @@ public final class HoardingPosts {
             posts.add(new PostAction(posts.size() + 1, bay.at(), most.zone(), most.placed().shut() ? bay.leaf() : 0,
                 Optional.of(bay.to() - bay.from()), most.named(), most.force(), most.moment()));
         }
-        record(posts, worst, trace);
+        record(posts, worst, symbols, trace);
         return posts;
     }
 
@@ -151,18 +153,22 @@ public final class HoardingPosts {
         return zones.get(0).zone();
     }
 
-    private static void record(List<PostAction> posts, List<Share> worst, Trace trace) {
+    private static void record(List<PostAction> posts, List<Share> worst, PanelSymbols symbols, Trace trace) {
         Map<String, Integer> byZone = new LinkedHashMap<>();
         int most = 0;
         for (int i = 0; i < worst.size(); i++) {
             byZone.merge(worst.get(i).zone(), i, (a, b) -> worst.get(b).moment() > worst.get(a).moment() ? b : a);
             most = worst.get(i).moment() > worst.get(most).moment() ? i : most;
         }
-        byZone.forEach((zone, i) -> recordOne(posts.get(i), worst.get(i), "/" + zone, trace));
-        recordOne(posts.get(most), worst.get(most), "", trace);
+        byZone.forEach((zone, i) -> recordOne(posts.get(i), worst.get(i), "/" + zone, symbols, trace));
+        recordOne(posts.get(most), worst.get(most), "", symbols, trace);
     }
 
-    private static void recordOne(PostAction post, Share share, String zone, Trace trace) {
+    private static String shortName(String zone) {
+        return zone.substring(zone.indexOf('/') + 1);
+    }
+
+    private static void recordOne(PostAction post, Share share, String zone, PanelSymbols symbols, Trace trace) {
         PanelForce panel = share.placed().panel();
         String which = post.post() + ", case " + share.named() + (share.placed().shut() ? ", gates shut" : "");
         Trace.Line line = trace.line("post-shear" + zone, "V_p", "shear at the foot of post " + which).from(STATICS, Status.DERIVED);
@@ -170,19 +176,23 @@ public final class HoardingPosts {
         for (ZonePressure z : panel.load().zones()) {
             double t = Strip.overlap(share.from() - share.placed().left(), share.to() - share.placed().left(), z.from(), z.to());
             if (t > 1e-9) {
-                String width = "t_{" + z.zone() + "}";
+                String width = "t_{" + HoardingPosts.shortName(z.zone()) + "}";
+                trace.line("post-width" + zone + "/" + z.zone(), width, "boards of zone " + z.zone() + " that post " + post.post() + " carries")
+                    .from(STATICS, Status.DERIVED).reads("half-way to the neighbouring posts", t, "m");
                 line.in(z.symbol(), z.pressure(), "Pa").in(width, t, "m");
                 formula.append(formula.isEmpty() ? "" : " + ").append(z.symbol()).append(' ').append(width);
             }
         }
-        line.in("h", panel.panel().height(), "m");
+        String h = symbols.height();
+        line.in(h, panel.panel().height(), "m");
         boolean plain = panel.load().shift() == 0 && !panel.raised();
-        double shear = plain ? line.gives("(" + formula + ") h", share.force(), "N")
+        double shear = plain ? line.gives("(" + formula + ") " + h, share.force(), "N")
             : line.reads("the pressures over the boards that the post carries, "
                 + (panel.raised() ? "raised to the least force of the case" : "spread in a straight line to the resultant of the case"), share.force(), "N");
-        double z = panel.height();
-        trace.line("post-moment" + zone, "M_p", "moment at the foot of post " + which).in("V_p", shear, "N").in("z_F", z, "m")
-            .from(STATICS, Status.DERIVED).gives("V_p z_F", shear * z, "N m");
+        double z = trace.line("post-lever-arm" + zone, "z_p", "height of the force on the post").from(STATICS, Status.DERIVED)
+            .reads("height of the resultant of the case", panel.height(), "m");
+        trace.line("post-moment" + zone, "M_p", "moment at the foot of post " + which).in("V_p", shear, "N").in("z_p", z, "m")
+            .from(STATICS, Status.DERIVED).gives("V_p z_p", shear * z, "N m");
     }
 
     /** Force on the boards in the first zoned or square case, gates open, N, and the sum of what its posts carry. */

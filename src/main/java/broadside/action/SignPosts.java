@@ -19,6 +19,11 @@ public final class SignPosts {
         List<Combination> all = combinations.stream().map(FootActions.Combined::combination).toList();
         double spread = positions.stream().mapToDouble(x -> x * x).sum();
         List<PostAction> posts = new ArrayList<>();
+        if (positions.size() > 1) {
+            trace.given("n", "number of posts", positions.size(), "1", "");
+            trace.line("post-spread", "S", "sum of the squares of the posts' distances from their middle").from(STATICS, Status.DERIVED)
+                .reads("from the positions of the posts", spread, "m²");
+        }
         for (int i = 0; i < positions.size(); i++) {
             double x = positions.get(i);
             Combination worst = all.stream().max(Comparator.comparingDouble(c -> moment(c, x, positions.size(), spread))).orElseThrow();
@@ -39,8 +44,8 @@ public final class SignPosts {
 
     private static PostAction record(int post, double x, int count, double spread, Combination worst, Trace trace) {
         String part = Integer.toString(post);
-        double force = worst.force();
-        double moment = worst.moment();
+        double force = trace.find("force/" + worst.name()).orElseThrow().value();
+        double moment = trace.find("base-moment/" + worst.name()).orElseThrow().value();
         if (count == 1) {
             double v = trace.line("post-shear/1", "V_{1}", "shear at the foot of the post").in("F", force, "N").from(STATICS, Status.DERIVED)
                 .gives("F", force, "N");
@@ -48,14 +53,15 @@ public final class SignPosts {
                 .gives("M", moment, "N m");
             return new PostAction(1, x, "", 0, java.util.Optional.empty(), worst.name(), v, m);
         }
+        trace.given("x_{" + part + "}", "post " + part + " from the middle of the posts, to the right", x, "m", "");
         double t = couple("T", "torsion of case " + worst.name() + ", wind meeting the " + end(worst), worst.torsion(), "post-couple/torsion/" + part, trace);
         double j = couple("J", "sum of force, height and side distance in the same case", worst.couple(), "post-couple/moment/" + part, trace);
         double v = trace.line("post-shear/" + part, "V_{" + part + "}", "shear at the foot of post " + part).in("F", force, "N").in("n", count)
-            .in("T", t, "N m").in("x", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
-            .gives("F / n + T x / S", force / count + t * x / spread, "N");
+            .in("T", t, "N m").in("x_{" + part + "}", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
+            .gives("F / n + T x_{" + part + "} / S", force / count + t * x / spread, "N");
         double m = trace.line("post-moment/" + part, "M_{" + part + "}", "moment at the foot of post " + part).in("M", moment, "N m").in("n", count)
-            .in("J", j, "N m²").in("x", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
-            .gives("M / n + J x / S", moment / count + j * x / spread, "N m");
+            .in("J", j, "N m²").in("x_{" + part + "}", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
+            .gives("M / n + J x_{" + part + "} / S", moment / count + j * x / spread, "N m");
         return new PostAction(post, x, "", 0, java.util.Optional.empty(), worst.name(), v, m);
     }
 

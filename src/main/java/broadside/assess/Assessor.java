@@ -11,6 +11,7 @@ import broadside.assess.ItemResult.Outcome;
 import broadside.assess.ItemResult.Refusal;
 import broadside.codes.CodeLibrary;
 import broadside.codes.NotCovered;
+import broadside.codes.PanelSymbols;
 import broadside.codes.WindCode;
 import broadside.panel.Hoarding;
 import broadside.panel.Item;
@@ -109,13 +110,13 @@ public final class Assessor {
     private Loads loads(Job job, Item item, WindCode code, Trace sheet) {
         List<PanelCases> panels = new ArrayList<>();
         for (Panel panel : item.panels()) {
-            giveDimensions(item, panel, sheet);
+            giveDimensions(item, panel, code.symbols(), sheet);
             panels.add(new PanelCases(panel, code.netPressures(panel, job.site(), sheet.part(panel.part()))));
         }
-        FootActions.Result actions = FootActions.of(panels, sheet);
+        FootActions.Result actions = FootActions.of(panels, code.symbols(), sheet);
         List<PostAction> posts = posts(job, item, code, panels, actions, sheet);
         Map<String, String> governing = governing(actions.cases(), posts);
-        EdgeOn edgeOn = edgeOn(item, sheet);
+        EdgeOn edgeOn = edgeOn(item, code, sheet);
         double weight = selfWeight(item, sheet);
         Loads loads = new Loads(velocity(item, sheet), actions.cases(), governing, posts, edgeOn, code.level(), weight,
             Balances.of(item, panels, actions, posts, governing));
@@ -123,21 +124,20 @@ public final class Assessor {
         return loads;
     }
 
-    private static void giveDimensions(Item item, Panel panel, Trace sheet) {
+    private static void giveDimensions(Item item, Panel panel, PanelSymbols symbols, Trace sheet) {
         String of = panel.part().isEmpty() ? item.mark() : panel.part();
-        sheet.given("b", "width of " + of, panel.width(), "m", "");
-        sheet.given("h", "height of " + of, panel.height(), "m", "");
+        sheet.given(symbols.width(), "width of " + of, panel.width(), "m", "");
+        sheet.given(symbols.height(), "height of " + of, panel.height(), "m", "");
         sheet.given("z_g", "gap below " + of, panel.clearance(), "m", "");
-        if (panel.middle() != 0) {
-            sheet.given("x_b", "middle of " + of + " from the middle of the item, to the right", panel.middle(), "m", "");
-        }
+        sheet.given("x_b", "middle of " + of + " from the middle of the " + item.choose(sign -> "posts", hoarding -> "hoarding") + ", to the right",
+            panel.middle(), "m", "");
     }
 
     private static List<PostAction> posts(Job job, Item item, WindCode code, List<PanelCases> panels, FootActions.Result actions, Trace sheet) {
         return item.choose(
             sign -> SignPosts.of(sign.posts().positions(), actions.combinations(), sheet),
             hoarding -> hoarding.spacing().map(spacing -> HoardingPosts.of(hoarding, spacing.metres(), panels,
-                shut(job, hoarding, code, sheet), sheet)).orElse(List.of()));
+                shut(job, hoarding, code, sheet), code.symbols(), sheet)).orElse(List.of()));
     }
 
     /** The whole wall while its gates are shut. */
@@ -146,6 +146,7 @@ public final class Assessor {
             return Optional.empty();
         }
         Panel whole = hoarding.shut();
+        giveDimensions(hoarding, whole, code.symbols(), sheet);
         return Optional.of(new PanelCases(whole, code.netPressures(whole, job.site(), sheet.part(whole.part()))));
     }
 
@@ -169,7 +170,7 @@ public final class Assessor {
         return best.name();
     }
 
-    private EdgeOn edgeOn(Item item, Trace sheet) {
+    private EdgeOn edgeOn(Item item, WindCode code, Trace sheet) {
         EdgeOn sum = new EdgeOn(0, 0);
         List<Panel> panels = item.panels();
         for (int i = 0; i < panels.size(); i++) {
@@ -177,8 +178,7 @@ public final class Assessor {
             double depth = item instanceof PostSign sign ? sign.boards().get(i).depth().metres() : 0;
             String suffix = panel.part().isEmpty() ? "" : "/" + panel.part();
             double q = sheet.find("velocity-pressure" + suffix).orElseThrow().value();
-            sum = sum.plus(EdgeOn.of(edgeOnRule, panel.width(), panel.height(), panel.clearance() + panel.height() / 2, depth, q,
-                sheet.part(panel.part())));
+            sum = sum.plus(EdgeOn.of(edgeOnRule, panel, depth, q, code.symbols(), sheet.part(panel.part())));
         }
         return sum;
     }
@@ -189,9 +189,12 @@ public final class Assessor {
         }
         double mass = sign.boards().stream().mapToDouble(b -> b.mass().map(m -> m.kilograms()).orElse(0.0)).sum();
         double aside = sign.boards().stream().mapToDouble(b -> b.mass().map(m -> m.kilograms()).orElse(0.0) * b.offset().metres()).sum();
+        sheet.given("m", "mass of the boards", mass, "kg", "");
+        sheet.given("g", "standard acceleration of free fall", G, "m/s²", "");
         double weight = sheet.line("self-weight", "G", "weight of the boards").in("m", mass, "kg").in("g", G, "m/s²")
             .from("standard acceleration of free fall", Status.RECALLED).gives("m g", mass * G, "N");
-        double arm = mass == 0 ? 0 : aside / mass;
+        double arm = sheet.line("self-weight-arm", "x_G", "centre of mass from the middle of the posts, to the right").from("statics", Status.DERIVED)
+            .reads("from the masses and offsets of the boards", mass == 0 ? 0 : aside / mass, "m");
         sheet.line("self-weight-moment", "M_G", "moment of the weight in the plane of the boards, about the middle of the posts")
             .in("G", weight, "N").in("x_G", arm, "m").from("statics", Status.DERIVED).gives("G x_G", weight * arm, "N m");
         return weight;

@@ -55,6 +55,11 @@ final class Asce716 implements WindCode {
     }
 
     @Override
+    public PanelSymbols symbols() {
+        return new PanelSymbols("B", "s");
+    }
+
+    @Override
     public double velocityPressure(Site site, double height, Trace trace) {
         return velocity.pressure(site, height, trace);
     }

@@ -52,7 +52,7 @@ final class Asce7Signs {
     }
 
     private double porosity(Panel panel, Trace trace) {
-        double solidity = panel.solidity();
+        double solidity = trace.given("ε", "solidity", panel.solidity(), "1", "");
         Source place = constants.source("openness-limit");
         if (solidity < constants.number("openness-limit")) {
             throw new NotCovered(place.publicationAndEdition(), place.place(), "the solidity " + Numbers.plain(solidity)
@@ -71,7 +71,7 @@ final class Asce7Signs {
         Panel panel = sheet.panel();
         Coefficient printed = squareOn.at(sheet.clearness(), sheet.aspect());
         double c = reduced(sheet, "case-a", "C_f", "force coefficient of cases A and B", printed);
-        double least = constants.pascals("minimum-pressure");
+        double least = leastPressure(sheet.trace());
         double p = pressure(sheet, "case-a", "p_{case-a}", c, "C_f", least);
         sheet.trace().line("coefficient/case-b", "C_f", "force coefficient of case B: as in case A").in("C_f", c)
             .from(constants.source("case-b-offset").citation(), constants.source("case-b-offset").status()).gives("C_f", c, "1");
@@ -81,10 +81,16 @@ final class Asce7Signs {
         double b = panel.width();
         double shift = constants.number("case-b-offset") * b;
         LoadCase a = new LoadCase("case-a", "case A, wind square on", Windward.NONE,
-            List.of(new ZonePressure("case-a", "p_{case-a}", 0, b, c, p)), 0, rise, 0);
+            List.of(new ZonePressure("case-a", "p_{case-a}", 0, b, b, c, p)), 0, rise, 0);
         LoadCase right = new LoadCase("case-b", "case B, force a fifth of the width towards the windward edge", Windward.RIGHT,
-            List.of(new ZonePressure("case-b", "p_{case-b}", 0, b, c, p)), shift, rise, 0);
+            List.of(new ZonePressure("case-b", "p_{case-b}", 0, b, b, c, p)), shift, rise, 0);
         return List.of(a, right, right.mirrored(b));
+    }
+
+    private double leastPressure(Trace trace) {
+        Source place = constants.source("minimum-pressure");
+        return line(trace, place, "minimum-pressure", "p_{16}", "least pressure on the whole panel")
+            .reads(constants.text("minimum-pressure") + " psf", constants.pascals("minimum-pressure"), "Pa");
     }
 
     /** A panel that touches the ground has its resultant a little above the middle. */
@@ -116,9 +122,12 @@ final class Asce7Signs {
                 .reads("measured from the windward edge", strip.width(), "m");
             double c = regionCoefficient(sheet, strip.name(), strip.name().equals("0-s") ? corner : 1, ground, end);
             double p = pressure(sheet, zone + end, "p_{" + strip.name() + "}", c, "C_{" + strip.name() + "}", 0);
-            pressures.add(new ZonePressure(zone, "p_{" + strip.name() + "}", strip.from(), strip.to(), c, p));
+            pressures.add(new ZonePressure(zone, "p_{" + strip.name() + "}", strip.from(), strip.to(), strip.width(), c, p));
         }
-        double least = constants.pascals("minimum-pressure") * sheet.panel().area();
+        double p16 = constants.pascals("minimum-pressure");
+        double least = line(sheet.trace(), constants.source("minimum-pressure"), "minimum-force/case-c" + end, "F_{min}", "least force of case C")
+            .in("p_{16}", p16, "Pa").in("B", sheet.panel().width(), "m").in("s", s, "m")
+            .gives("p_{16} B s", p16 * sheet.panel().width() * s, "N");
         double rise = sheet.panel().clearance() > 0 ? 0 : constants.number("ground-rise") * s;
         return new LoadCase("case-c", "case C, wind from one side, by regions from the windward edge", Windward.LEFT, pressures, 0, rise, least);
     }
@@ -129,6 +138,7 @@ final class Asce7Signs {
         if (!starred || length / s < returnCorners.first()) {
             return 1;
         }
+        sheet.trace().given("L_r", "length of the return corner at the windward end", length, "m", "");
         return returnCorners.at("factor", length / s).into(sheet.trace().line("return-corner-factor" + end, "k_r",
             "reduction of the first region by the return corner").in("L_r", length, "m").in("s", s, "m"));
     }

@@ -70,10 +70,11 @@ final class Asce7Topography {
         double typed = hill.ground().distanceFromCrest().metres();
         double x = trace.given("x", "distance from the crest to the site, positive downwind", typed, "m",
             hill.ground().distanceFromCrest().typed());
-        double mu = shapes.number(shape, x > 0 ? "mu-downwind" : "mu-upwind").value();
+        double mu = shapes.number(shape, x > 0 ? "mu-downwind" : "mu-upwind")
+            .into(trace.line("topography-mu", "μ", "horizontal attenuation, site " + (x > 0 ? "downwind" : "upwind") + " of the crest"));
         double k2 = line(hill, trace, "topography-k2", "K_2", "fall with the distance from the crest").in("x", x, "m").in("μ", mu)
             .in("L", length, "m").gives("max(0; 1 - abs(x) / (μ L))", Math.max(0, 1 - Math.abs(x) / (mu * length)), "1");
-        double gamma = shapes.number(shape, "gamma").value();
+        double gamma = shapes.number(shape, "gamma").into(trace.line("topography-gamma", "γ", "height attenuation"));
         double k3 = line(hill, trace, "topography-k3", "K_3", "fall with the height above the ground").in("γ", gamma)
             .in("h", hill.z(), "m").in("L", length, "m").gives("exp(-γ h / L)", Math.exp(-gamma * hill.z() / length), "1");
         return line(hill, trace, "topography-factor", "K_{zt}", "topographic factor").in("K_1", k1).in("K_2", k2).in("K_3", k3)

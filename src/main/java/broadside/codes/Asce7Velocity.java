@@ -57,7 +57,8 @@ final class Asce7Velocity {
         double zg = trace.line("gradient-height", "z_g", "height of the profile in exposure " + exposure)
             .from(alpha.source().citation(), alpha.source().status())
             .reads("read at " + exposure, exposures.number(exposure, "zg").value() * foot(), "m");
-        double least = constants.metres("kz-least-height");
+        double least = trace.line("least-height", "z_{min}", "least height of the profile").from(place.citation(), place.status())
+            .reads(constants.text("kz-least-height") + " ft", constants.metres("kz-least-height"), "m");
         double z = trace.line("profile-height", "z", "height in the profile: at least 15 ft").in("h", height, "m").in("z_{min}", least, "m")
             .from(place.citation(), place.status()).gives("max(h; z_{min})", Math.max(height, least), "m");
         double factor = constants.number("kz-factor");
@@ -106,17 +107,21 @@ final class Asce7Velocity {
     private double computedGustFactor(String exposure, double width, double height, Trace trace) {
         Source place = constants.source("gust-constant");
         double foot = foot();
-        double least = exposures.number(exposure, "zmin").value() * foot;
+        Source table = exposures.number(exposure, "zmin").source();
+        double least = line(trace, table, "gust-least-height", "z_{min}", "least equivalent height").reads("read at " + exposure,
+            exposures.number(exposure, "zmin").value() * foot, "m");
         double share = constants.number("gust-height-share");
         double z = line(trace, place, "gust-height", "z̄", "equivalent height").in("h", height, "m").in("z_{min}", least, "m")
             .gives("max(" + Numbers.plain(share) + " h; z_{min})", Math.max(share * height, least), "m");
-        double reference = constants.metres("reference-height");
-        double c = exposures.number(exposure, "c").value();
+        double reference = line(trace, place, "gust-reference-height", "z_r", "reference height").reads(constants.text("reference-height") + " ft",
+            constants.metres("reference-height"), "m");
+        double c = exposures.number(exposure, "c").into(trace.line("turbulence-constant", "c", "turbulence at the reference height"));
         double n = constants.number("turbulence-exponent-denominator");
         double iz = line(trace, place, "turbulence-intensity", "I_z", "turbulence intensity at the equivalent height").in("c", c)
             .in("z_r", reference, "m").in("z̄", z, "m")
             .gives("c (z_r / z̄)^(1 / " + Numbers.plain(n) + ")", c * Math.pow(reference / z, 1 / n), "1");
-        double l = exposures.number(exposure, "l").value() * foot;
+        double l = line(trace, table, "length-constant", "l", "length scale at the reference height").reads("read at " + exposure,
+            exposures.number(exposure, "l").value() * foot, "m");
         double e = exposures.number(exposure, "epsilon-denominator").value();
         double lz = line(trace, place, "length-scale", "L_z", "length scale of turbulence").in("l", l, "m").in("z̄", z, "m")
             .in("z_r", reference, "m").gives("l (z̄ / z_r)^(1 / " + Numbers.plain(e) + ")", l * Math.pow(z / reference, 1 / e), "m");
@@ -128,8 +133,8 @@ final class Asce7Velocity {
         double a = constants.number("gust-constant");
         double slope = constants.number("gust-slope");
         double g = constants.number("gust-peak");
-        return line(trace, place, "gust-factor", "G", "gust-effect factor of a rigid structure").in("g", g).in("I_z", iz).in("Q", q)
-            .gives(Numbers.plain(a) + " (1 + " + Numbers.plain(slope) + " g I_z Q) / (1 + " + Numbers.plain(slope) + " g I_z)",
+        return line(trace, place, "gust-factor", "G", "gust-effect factor of a rigid structure").in("I_z", iz).in("Q", q)
+            .gives(Numbers.plain(a) + " (1 + " + Numbers.plain(slope * g) + " I_z Q) / (1 + " + Numbers.plain(slope * g) + " I_z)",
                 a * (1 + slope * g * iz * q) / (1 + slope * g * iz), "1");
     }
 

@@ -61,6 +61,11 @@ final class En1991 implements WindCode {
     }
 
     @Override
+    public PanelSymbols symbols() {
+        return new PanelSymbols("b", "h");
+    }
+
+    @Override
     public double velocityPressure(Site site, double height, Trace trace) {
         return wind.peakPressure(site, height, trace);
     }
@@ -105,7 +110,7 @@ final class En1991 implements WindCode {
                 .from(place.publicationAndEdition() + ", 5.3(2)", place.status()), "q_p c_f", qp * cf);
         double b = panel.width();
         double e = constants.number("signboard-eccentricity") * b;
-        List<ZonePressure> all = List.of(new ZonePressure("all", "w", 0, b, cf, w));
+        List<ZonePressure> all = List.of(new ZonePressure("all", "w", 0, b, b, cf, w));
         LoadCase centred = new LoadCase("centred", "signboard, wind square on", LoadCase.Windward.NONE, all, 0, 0, 0);
         LoadCase right = new LoadCase("eccentric", "signboard, force a quarter of the width off the middle",
             LoadCase.Windward.RIGHT, all, e, 0, 0);

@@ -38,9 +38,11 @@ final class En1991Walls {
             .from(place.publicationAndEdition() + ", 7.4.1(2)", constants.source("wall-solidity-limit").status())
             .gives("z_g + h", panel.top(), "m");
         double qp = code.velocityPressure(site, ze, trace);
+        double length = trace.line("wall-length", "l", "length of the wall between its ends").in("b", panel.width(), "m")
+            .from(place.citation(), place.status()).gives("b", panel.width(), "m");
         double slenderness = trace.line("length-to-height", "l/h", "length of the wall over its height")
-            .in("l", panel.width(), "m").in("h", panel.height(), "m").from(place.citation(), place.status())
-            .gives("l / h", panel.width() / panel.height(), "1");
+            .in("l", length, "m").in("h", panel.height(), "m").from(place.citation(), place.status())
+            .gives("l / h", length / panel.height(), "1");
         LoadCase left = fromLeft(new Sheet(panel, site, code, qp, slenderness, panel.returnLeft(), trace, ""));
         LoadCase right = (panel.endsAlike() ? left
             : fromLeft(new Sheet(panel, site, code, qp, slenderness, panel.returnRight(), trace, "/right-end")))
@@ -70,7 +72,7 @@ final class En1991Walls {
                 (name, symbol) -> sheet.trace().line(name, symbol, "net pressure in zone " + zone).in("q_p", sheet.qp(), "Pa")
                     .in("c_" + zone, c).from(place.publicationAndEdition() + ", 5.2, 7.4.1", place.status()),
                 "q_p c_" + zone, sheet.qp() * c);
-            pressures.add(new ZonePressure(zone, "w_" + zone, strip.from(), strip.from() + width, c, w));
+            pressures.add(new ZonePressure(zone, "w_" + zone, strip.from(), strip.to(), width, c, w));
         }
         return new LoadCase("wall", "free-standing wall, zones from the windward end", Windward.LEFT, pressures, 0, 0, 0);
     }
@@ -85,6 +87,8 @@ final class En1991Walls {
         String symbol = "c_" + zone;
         String meaning = "net pressure coefficient of zone " + zone;
         boolean corner = sheet.returnLength() > 0;
+        trace.given("l_r", "length of the return corner at the windward end", sheet.returnLength(), "m", "");
+        trace.given("φ", "solidity", sheet.panel().solidity(), "1", "");
         boolean holes = sheet.panel().solidity() < 1;
         Coefficient printed = free.at(zone, sheet.slenderness());
         if (!corner && !holes) {
@@ -110,9 +114,11 @@ final class En1991Walls {
             return line.in("l_r", sheet.returnLength(), "m").in("h", sheet.panel().height(), "m")
                 .reads("read in the row with return corners, as the return is not shorter than the height", full.value(), "1");
         }
-        return line.in("c_" + zone + "'", freeEnd).in("c_r", full.value()).in("l_r", sheet.returnLength(), "m")
+        String row = "c_{" + zone + ",r}";
+        full.into(sheet.trace().line("return-coefficient/" + zone + sheet.end(), row, "coefficient of zone " + zone + " with a return as long as the height"));
+        return line.in("c_" + zone + "'", freeEnd).in(row, full.value()).in("l_r", sheet.returnLength(), "m")
             .in("h", sheet.panel().height(), "m")
-            .gives("c_" + zone + "' + (c_r - c_" + zone + "') l_r / h", freeEnd + (full.value() - freeEnd) * share, "1");
+            .gives("c_" + zone + "' + (" + row + " - c_" + zone + "') l_r / h", freeEnd + (full.value() - freeEnd) * share, "1");
     }
 
     private double withHoles(Sheet sheet, String zone, double closed, String closedSymbol, String symbol) {
@@ -120,9 +126,11 @@ final class En1991Walls {
         double limit = Double.parseDouble(key);
         Coefficient atLimit = open.number(key, zone);
         double phi = sheet.panel().solidity();
+        String row = "c_{" + zone + "," + key + "}";
+        atLimit.into(sheet.trace().line("open-coefficient/" + zone + sheet.end(), row, "coefficient of zone " + zone + " at solidity " + key));
         double c = atLimit.value() + (closed - atLimit.value()) * (phi - limit) / (1 - limit);
         return sheet.trace().line("coefficient/" + zone + sheet.end(), symbol, "net pressure coefficient of zone " + zone + ", with openings")
-            .in("φ", phi).in(closedSymbol, closed).in("c_o", atLimit.value()).from(atLimit.source().citation(), atLimit.source().status())
-            .gives("c_o + (" + closedSymbol + " - c_o) (φ - " + key + ") / (1 - " + key + ")", c, "1");
+            .in("φ", phi).in(closedSymbol, closed).in(row, atLimit.value()).from(atLimit.source().citation(), atLimit.source().status())
+            .gives(row + " + (" + closedSymbol + " - " + row + ") (φ - " + key + ") / (1 - " + key + ")", c, "1");
     }
 }

@@ -67,8 +67,9 @@ final class En1991Wind {
         double reference = constants.number("probability-reference");
         double ratio = (1 - k * Math.log(-Math.log(1 - 1 / t))) / (1 - k * Math.log(-Math.log(1 - reference)));
         return line(trace, "probability-factor", "c_{prob}", "probability factor", "probability-k", "4.2(2) note 4, (4.2)")
-            .in("T", t, "years").in("K", k).in("n", n)
-            .gives("((1 - K ln(-ln(1 - 1 / T))) / (1 - K ln(-ln(1 - " + Numbers.plain(reference) + "))))^n", Math.pow(ratio, n), "1");
+            .in("T", t, "years")
+            .gives("((1 - " + constants.text("probability-k") + " ln(-ln(1 - 1 / T))) / (1 - " + constants.text("probability-k") + " ln(-ln(1 - "
+                + Numbers.plain(reference) + "))))^" + constants.text("probability-n"), Math.pow(ratio, n), "1");
     }
 
     private double factor(Site site, Trace trace, String key, String symbol, String meaning) {
@@ -93,7 +94,8 @@ final class En1991Wind {
         Source printed = terrain.number(category, "z0").source();
         double z0 = trace.line("roughness-length", "z_0", "roughness length of terrain category " + category)
             .from(printed.citation(), printed.status()).reads("read at category " + category, terrain.number(category, "z0").value(), "m");
-        double least = terrain.number(category, "zmin").value();
+        double least = trace.line("least-height", "z_{min}", "least height of the profile in category " + category)
+            .from(printed.citation(), printed.status()).reads("read at category " + category, terrain.number(category, "zmin").value(), "m");
         double z = trace.line("profile-height", "z", "height in the profile: at least the least height of the category")
             .in("z_e", height, "m").in("z_{min}", least, "m").from(printed.citation(), printed.status())
             .gives("max(z_e; z_{min})", Math.max(height, least), "m");
@@ -107,7 +109,7 @@ final class En1991Wind {
         double co = orographyFactor(site, height, trace);
         double vm = line(trace, "mean-speed", "v_m", "mean wind velocity", "terrain-factor-constant", "4.3.1(1), (4.3)")
             .in("c_r", cr).in("c_o", co).in("v_b", vb, "m/s").gives("c_r c_o v_b", cr * co * vb, "m/s");
-        double ki = constants.number("turbulence-factor");
+        double ki = constants.entry("turbulence-factor").into(trace.line("turbulence-factor", "k_I", "turbulence factor"));
         double iv = line(trace, "turbulence-intensity", "I_v", "turbulence intensity", "turbulence-factor", null)
             .in("k_I", ki).in("c_o", co).in("z", z, "m").in("z_0", z0, "m")
             .gives("k_I / (c_o ln(z / z_0))", ki / (co * Math.log(z / z0)), "1");

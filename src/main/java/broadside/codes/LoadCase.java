@@ -34,7 +34,7 @@ public record LoadCase(String name, String label, Windward windward, List<ZonePr
         List<ZonePressure> other = new java.util.ArrayList<>();
         for (int i = zones.size() - 1; i >= 0; i--) {
             ZonePressure z = zones.get(i);
-            other.add(new ZonePressure(z.zone(), z.symbol(), width - z.to(), width - z.from(), z.coefficient(), z.pressure()));
+            other.add(new ZonePressure(z.zone(), z.symbol(), width - z.to(), width - z.from(), z.width(), z.coefficient(), z.pressure()));
         }
         return new LoadCase(name, label, windward.mirrored(), other, -shift, rise, least);
     }

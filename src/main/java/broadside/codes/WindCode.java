@@ -21,6 +21,9 @@ public interface WindCode {
     /** The level of its loads and the companion. */
     Level level();
 
+    /** How it writes the width and height of a panel. */
+    PanelSymbols symbols();
+
     /**
      * Velocity pressure at a height above the ground, Pa; recorded as "velocity-pressure".
      *

@@ -7,12 +7,8 @@ package broadside.codes;
  * @param symbol       symbol of the pressure in the calculation
  * @param from         where it begins, m from the left edge of the panel seen from the front
  * @param to           where it ends
+ * @param width        its width as it was recorded, m
  * @param coefficient  net coefficient, all reductions in
  * @param pressure     net pressure, Pa
  */
-public record ZonePressure(String zone, String symbol, double from, double to, double coefficient, double pressure) {
-
-    public double width() {
-        return to - from;
-    }
-}
+public record ZonePressure(String zone, String symbol, double from, double to, double width, double coefficient, double pressure) { }

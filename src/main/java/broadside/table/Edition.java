@@ -35,7 +35,7 @@ public final class Edition {
         return basis.flatMap(b -> b.find(name, Rows.class)).map(own::over).orElse(own);
     }
 
-    /** Such as "en-1991-1-4/2005". */
+    /** Code and edition with a slash between them. */
     public String key() {
         return key;
     }
