@@ -10,6 +10,9 @@ public record Strip(String name, double from, double to) {
         return to - from;
     }
 
+    /** Narrower strips come from binary rounding only, m. */
+    private static final double NARROWEST = 1e-9;
+
     /** Length that two stretches have in common, zero when they do not meet. */
     public static double overlap(double fromA, double toA, double fromB, double toB) {
         return Math.max(0, Math.min(toA, toB) - Math.max(fromA, fromB));
@@ -22,8 +25,8 @@ public record Strip(String name, double from, double to) {
     public static List<Strip> cut(double width, List<String> names, List<Double> limits) {
         List<Strip> strips = new ArrayList<>();
         double from = 0;
-        for (int i = 0; i < names.size() && from < width; i++) {
-            double to = Math.min(limits.get(i), width);
+        for (int i = 0; i < names.size() && from < width - NARROWEST; i++) {
+            double to = limits.get(i) > width - NARROWEST ? width : limits.get(i);
             if (to > from) {
                 strips.add(new Strip(names.get(i), from, to));
             }

@@ -42,7 +42,7 @@ final class Asce7Signs {
             .in("B", panel.width(), "m").in("s", panel.height(), "m").gives("B / s", panel.width() / panel.height(), "1");
         Sheet sheet = new Sheet(panel, site, code, q, gust, clearness, aspect, porosity(panel, trace), trace);
         List<LoadCase> cases = new ArrayList<>(squareAndOffset(sheet));
-        if (aspect >= constants.number("case-c-least-aspect")) {
+        if (Numbers.atLeast(aspect, constants.number("case-c-least-aspect"))) {
             LoadCase left = byRegions(sheet, panel.returnLeft(), "");
             LoadCase right = panel.endsAlike() ? left : byRegions(sheet, panel.returnRight(), "/right-end");
             cases.add(left);
@@ -106,7 +106,7 @@ final class Asce7Signs {
 
     private LoadCase byRegions(Sheet sheet, double returnLength, String end) {
         double s = sheet.panel().height();
-        boolean isLong = sheet.aspect() > regions.last();
+        boolean isLong = Numbers.above(sheet.aspect(), regions.last());
         List<String> names = isLong ? List.of("0-s", "s-2s", "2s-3s", "3s-4s", "4s-5s", "5s-10s", "over-10s")
             : List.of("0-s", "s-2s", "2s-3s", "3s-10s");
         List<Double> limits = isLong ? List.of(s, 2 * s, 3 * s, 4 * s, 5 * s, 10 * s, Double.POSITIVE_INFINITY)
@@ -134,17 +134,17 @@ final class Asce7Signs {
 
     private double returnFactor(Sheet sheet, double length, String end) {
         double s = sheet.panel().height();
-        boolean starred = sheet.aspect() >= constants.number("case-c-return-from");
-        if (!starred || length / s < returnCorners.first()) {
+        boolean starred = Numbers.atLeast(sheet.aspect(), constants.number("case-c-return-from"));
+        if (!starred || !Numbers.atLeast(length / s, returnCorners.first())) {
             return 1;
         }
         sheet.trace().given("L_r", "length of the return corner at the windward end", length, "m", "");
-        return returnCorners.at("factor", length / s).into(sheet.trace().line("return-corner-factor" + end, "k_r",
+        return returnCorners.at("factor", Math.max(length / s, returnCorners.first())).into(sheet.trace().line("return-corner-factor" + end, "k_r",
             "reduction of the first region by the return corner").in("L_r", length, "m").in("s", s, "m"));
     }
 
     private double groundFactor(Sheet sheet, String end) {
-        if (sheet.clearness() <= constants.number("ground-factor-from")) {
+        if (!Numbers.above(sheet.clearness(), constants.number("ground-factor-from"))) {
             return 1;
         }
         if (!end.isEmpty()) {
@@ -183,12 +183,11 @@ final class Asce7Signs {
 
     /** Between the two printed lists of regions the larger coefficient counts, as the figure gives no rule. */
     private Coefficient printed(String region, double aspect) {
-        boolean first = aspect <= regions.last();
-        if (first) {
-            return regions.at(region, Math.max(aspect, regions.firstPrinted(region)));
+        if (!Numbers.above(aspect, regions.last())) {
+            return regions.at(region, Math.min(Math.max(aspect, regions.firstPrinted(region)), regions.last()));
         }
-        if (aspect >= longRegions.first()) {
-            return longRegions.at(region, aspect);
+        if (Numbers.atLeast(aspect, longRegions.first())) {
+            return longRegions.at(region, Math.max(aspect, longRegions.first()));
         }
         Coefficient below = regions.at(regionBelow(region), regions.last());
         Coefficient above = longRegions.at(region, longRegions.first());

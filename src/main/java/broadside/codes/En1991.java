@@ -85,16 +85,18 @@ final class En1991 implements WindCode {
 
     /** 7.4.3: a board near the ground that is wider than it is high is a free-standing wall. */
     private boolean isWall(Panel panel) {
-        boolean near = panel.clearance() < constants.number("signboard-clearance") * panel.height();
-        boolean wide = panel.width() > constants.number("signboard-aspect") * panel.height();
-        return near && (wide || panel.kind() == Panel.Kind.WALL);
+        boolean wide = Numbers.above(panel.width() / panel.height(), constants.number("signboard-aspect"));
+        return !clear(panel) && (wide || panel.kind() == Panel.Kind.WALL);
+    }
+
+    private boolean clear(Panel panel) {
+        return Numbers.atLeast(panel.clearance() / panel.height(), constants.number("signboard-clearance"));
     }
 
     private List<LoadCase> signboard(Panel panel, Site site, Trace trace) {
         Source place = constants.source("signboard-cf");
         double zg = panel.clearance();
         double h = panel.height();
-        boolean clear = zg >= constants.number("signboard-clearance") * h;
         trace.line("signboard-rule", "b/h", "width over height of the board").in("b", panel.width(), "m").in("h", h, "m")
             .from(place.publicationAndEdition() + ", " + constants.source("signboard-clearance").place(), place.status())
             .gives("b / h", panel.width() / h, "1");
@@ -103,7 +105,7 @@ final class En1991 implements WindCode {
         double qp = velocityPressure(site, ze, trace);
         double cf = trace.line("coefficient/all", "c_f", "force coefficient of a signboard").in("z_g", zg, "m").in("h", h, "m")
             .in("b/h", panel.width() / h).from(place.citation(), place.status())
-            .reads(clear ? "signboard, as z_g is not less than h/4" : "signboard, as z_g is less than h/4 but b/h is not above 1",
+            .reads(clear(panel) ? "signboard, as z_g is not less than h/4" : "signboard, as z_g is less than h/4 but b/h is not above 1",
                 constants.number("signboard-cf"), "1");
         double w = NetPressure.record(site, level, trace, "all", "w", (name, symbol) ->
             trace.line(name, symbol, "net pressure on the board").in("q_p", qp, "Pa").in("c_f", cf)
