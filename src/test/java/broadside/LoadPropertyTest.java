@@ -248,7 +248,7 @@ class LoadPropertyTest {
         for (int i = 0; i < TRIES; i++) {
             boolean en = i % 2 == 0;
             Wall w = random.wall(en);
-            double less = random.between(en ? 0.8 : 0.7, 1);
+            double less = random.between(en ? 0.8 : 0.701, 1);
             double more = random.between(less, 1);
             String terrain = random.terrain(en);
             double open = loads(job(en, 40, terrain, "", hoarding(with(w, less)))).cases().get(0).force();

@@ -37,13 +37,13 @@ final class RandomJobs {
 
     Board board(boolean en) {
         return new Board(between(0.3, 12), between(0.3, 4), chance() ? 0 : between(0, 6), between(-2, 2), between(0, 0.4),
-            chance() ? 1 : between(en ? 0.8 : 0.7, 1));
+            chance() ? 1 : between(en ? 0.8 : 0.701, 1));
     }
 
     Wall wall(boolean en) {
         double height = between(1, 4);
         double length = between(1.5, 80);
-        return new Wall(length, height, chance() ? 0 : between(0, 0.2), chance() ? 1 : between(en ? 0.8 : 0.7, 1),
+        return new Wall(length, height, chance() ? 0 : between(0, 0.2), chance() ? 1 : between(en ? 0.8 : 0.701, 1),
             chance() ? 0 : between(0, Math.min(length, 2 * height)), chance() ? 0 : between(0, Math.min(length, 2 * height)), between(1, 3.5));
     }
 

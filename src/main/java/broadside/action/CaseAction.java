@@ -24,6 +24,12 @@ public record CaseAction(String name, String label, String direction, Windward w
     /** The zones of one panel; {@code part} is empty when the item has one panel only. */
     public record PanelZones(String part, double left, List<ZonePressure> zones) { }
 
+    /** The same case met from the other end, where that only mirrors it. */
+    CaseAction fromOtherEnd(List<PanelZones> otherZones) {
+        return new CaseAction(name, label, direction, windward.mirrored(), otherZones, force, height, -side, baseShear, baseMoment,
+            torsion == 0 ? 0 : -torsion);
+    }
+
     /** The same case with the wind on the back: equal force, torsion the other way. */
     CaseAction fromBehind() {
         return new CaseAction(name, label, "back", windward, zones, force, height, side, baseShear, baseMoment, torsion == 0 ? 0 : -torsion);

@@ -43,6 +43,21 @@ record Combination(String name, String label, Windward windward, List<PanelForce
         return new Combination(name, label, windward, forces);
     }
 
+    /** Whether the pressure differs from place to place. */
+    boolean zoned() {
+        return panels.stream().anyMatch(p -> p.load().zones().size() > 1);
+    }
+
+    /** Whether this is the mirror image of the same case met from the other end. */
+    boolean mirrors(Combination other) {
+        return near(force(), other.force()) && near(moment(), other.moment()) && near(torsion(), -other.torsion())
+            && panels.stream().allMatch(p -> p.panel().endsAlike());
+    }
+
+    private static boolean near(double a, double b) {
+        return Math.abs(a - b) <= 1e-9 * Math.max(Math.abs(a), Math.abs(b));
+    }
+
     double force() {
         return panels.stream().mapToDouble(PanelForce::force).sum();
     }

@@ -20,7 +20,7 @@ public record EdgeOn(double force, double moment) {
     public static EdgeOn of(Rows rule, Panel panel, double depth, double q, PanelSymbols symbols, Trace trace) {
         Coefficient edge = rule.number("edge-coefficient", "value");
         Coefficient friction = rule.number("friction-coefficient", "value");
-        double ce = edge.into(trace.line("edge-coefficient", "c_e", "drag coefficient of the edge"));
+        double ce = edge.into(trace.line("edge-coefficient", "c_d", "drag coefficient of the edge"));
         double cf = friction.into(trace.line("friction-coefficient", "c_{fr}", "friction coefficient of a face, the roughest printed"));
         Status status = edge.source().status().weaker(friction.source().status());
         double pressure = trace.line("pressure/edge-on", "q", "pressure of the wind along the face").from("own rule: edge-on case", status)
@@ -28,13 +28,13 @@ public record EdgeOn(double force, double moment) {
         double d = trace.given("d", "thickness of the panel, zero where it is not given", depth, "m", "");
         String b = symbols.width();
         String h = symbols.height();
-        double force = trace.line("force/edge-on", "F_e", "force of wind along the face: own rule, of no code").in("q", pressure, "Pa").in("c_e", ce)
+        double force = trace.line("force/edge-on", "F_e", "force of wind along the face: own rule, of no code").in("q", pressure, "Pa").in("c_d", ce)
             .in("d", d, "m").in(h, panel.height(), "m").in("c_{fr}", cf).in(b, panel.width(), "m").from("own rule: edge-on case", status)
-            .gives("q (c_e d " + h + " + 2 c_{fr} " + b + " " + h + ")", pressure * (ce * d * panel.height() + 2 * cf * panel.width() * panel.height()), "N");
-        double middle = trace.line("lever-arm/edge-on", "z_e", "height of the middle of the panel").in("z_g", panel.clearance(), "m")
-            .in(h, panel.height(), "m").from("statics", Status.DERIVED).gives("z_g + " + h + " / 2", panel.clearance() + panel.height() / 2, "m");
+            .gives("q (c_d d " + h + " + 2 c_{fr} " + b + " " + h + ")", pressure * (ce * d * panel.height() + 2 * cf * panel.width() * panel.height()), "N");
+        double middle = trace.line("lever-arm/edge-on", "z_m", "height of the middle of the panel").in(symbols.gap(), panel.clearance(), "m")
+            .in(h, panel.height(), "m").from("statics", Status.DERIVED).gives(symbols.gap() + " + " + h + " / 2", panel.clearance() + panel.height() / 2, "m");
         double moment = trace.line("base-moment/edge-on", "M_e", "moment at the ground line, wind along the face").in("F_e", force, "N")
-            .in("z_e", middle, "m").from("own rule: edge-on case", status).gives("F_e z_e", force * middle, "N m");
+            .in("z_m", middle, "m").from("own rule: edge-on case", status).gives("F_e z_m", force * middle, "N m");
         return new EdgeOn(force, moment);
     }
 

@@ -1,7 +1,9 @@
 package broadside.action;
 
 import broadside.action.CaseAction.PanelZones;
+import broadside.codes.LoadCase.Windward;
 import broadside.codes.PanelSymbols;
+import broadside.codes.ShiftRule;
 import broadside.codes.ZonePressure;
 import broadside.panel.Panel;
 import broadside.trace.Status;
@@ -45,32 +47,43 @@ public final class FootActions {
         }
     }
 
-    /** Works out and records each case; of two ends the worse one is recorded. */
+    /**
+     * Works out and records each case. Of two ends the worse one comes first. The other end comes too where the case has
+     * zones, since they then lie elsewhere; where it only mirrors the first it is not worked out again.
+     */
     public static Result of(List<PanelCases> panels, PanelSymbols symbols, Trace trace) {
         List<Combination> all = Combination.all(panels);
         List<CaseAction> cases = new ArrayList<>();
         for (String name : all.stream().map(Combination::name).distinct().toList()) {
-            Combination worst = all.stream().filter(c -> c.name().equals(name)).reduce(Combination::worse).orElseThrow();
-            CaseAction front = record(worst, symbols, trace);
-            cases.add(front);
-            cases.add(front.fromBehind());
+            List<Combination> ends = all.stream().filter(c -> c.name().equals(name)).toList();
+            Combination worst = ends.stream().reduce(Combination::worse).orElseThrow();
+            CaseAction front = record(worst, "", symbols, trace);
+            add(cases, front);
+            ends.stream().filter(c -> c != worst && c.zoned()).forEach(c -> add(cases, c.mirrors(worst) ? front.fromOtherEnd(zones(c))
+                : record(c, c.windward() == Windward.LEFT ? "from-left" : "from-right", symbols, trace)));
         }
         return new Result(cases, all.stream().map(Combined::new).toList());
     }
 
-    private static CaseAction record(Combination combination, PanelSymbols symbols, Trace trace) {
+    private static void add(List<CaseAction> cases, CaseAction front) {
+        cases.add(front);
+        cases.add(front.fromBehind());
+    }
+
+    private static CaseAction record(Combination combination, String end, PanelSymbols symbols, Trace whole) {
+        Trace trace = whole.part(end);
         String name = combination.name();
         boolean one = combination.panels().size() == 1;
         List<double[]> found = new ArrayList<>();
         for (PanelForce panel : combination.panels()) {
-            Names names = new Names(name, symbols, one ? "" : "_" + (found.size() + 1));
+            Names names = new Names(name, symbols, one ? 0 : found.size() + 1);
             found.add(panel(panel, names, trace.part(panel.panel().part())));
         }
         double force = one ? found.get(0)[0] : total("force/" + name, "F", "wind force on all panels", found, 0, trace);
-        double shear = trace.line("base-shear/" + name, "V", "shear at the ground line").in("F", force, "N").from(STATICS, Status.DERIVED)
+        double shear = trace.line("base-shear/" + name, "F_b", "shear at the ground line").in("F", force, "N").from(STATICS, Status.DERIVED)
             .gives("F", force, "N");
         double moment = one ? found.get(0)[1] : total("base-moment/" + name, "M", "moment at the ground line", found, 1, trace);
-        double torsion = one ? found.get(0)[2] : total("torsion/" + name, "T", "torsion about the middle of the posts", found, 2, trace);
+        double torsion = one ? found.get(0)[2] : total("torsion/" + name, "M_T", "torsion about the middle", found, 2, trace);
         if (!one) {
             trace.line("lever-arm/" + name, "z", "height of the resultant").in("M", moment, "N m").in("F", force, "N")
                 .from(STATICS, Status.DERIVED).gives("M / F", moment / force, "m");
@@ -80,10 +93,16 @@ public final class FootActions {
     }
 
     /** The case, the code's symbols of a panel, and the index that tells one panel's symbols from another's. */
-    private record Names(String load, PanelSymbols panel, String index) {
+    private record Names(String load, PanelSymbols panel, int index) {
         String of(String symbol) {
-            return symbol + index;
+            return index == 0 ? symbol : indexed(symbol, index);
         }
+    }
+
+    /** F becomes F_1, M_T becomes M_{T,1}. */
+    private static String indexed(String symbol, int index) {
+        int low = symbol.indexOf('_');
+        return low < 0 ? symbol + "_" + index : symbol.substring(0, low) + "_{" + symbol.substring(low + 1) + "," + index + "}";
     }
 
     /** Force, moment and torsion of one panel. */
@@ -92,22 +111,32 @@ public final class FootActions {
         Panel p = panel.panel();
         double rise = panel.load().rise();
         String h = names.panel().height();
-        Trace.Line arm = line(trace, "lever-arm", names, "z", "height of the force above the ground").in("z_g", p.clearance(), "m")
+        Trace.Line arm = line(trace, "lever-arm", names, "z", "height of the force above the ground").in(names.panel().gap(), p.clearance(), "m")
             .in(h, p.height(), "m");
-        double z = rise == 0 ? arm.gives("z_g + " + h + " / 2", panel.height(), "m")
-            : arm.in("Δ", rise, "m").gives("z_g + " + h + " / 2 + Δ", panel.height(), "m");
+        double z = rise == 0 ? arm.gives(names.panel().gap() + " + " + h + " / 2", panel.height(), "m")
+            : arm.in("Δ", rise, "m").gives(names.panel().gap() + " + " + h + " / 2 + Δ", panel.height(), "m");
         double moment = line(trace, "base-moment", names, "M", "moment at the ground line").in(names.of("F"), force, "N").in(names.of("z"), z, "m")
             .gives(names.of("F") + " " + names.of("z"), force * z, "N m");
         double e = panel.eccentricity();
         double x = p.middle();
-        double shift = e == 0 ? 0 : line(trace, "eccentricity", names, "e", "distance of the force from the middle of the panel, towards the "
-            + (e < 0 ? "left" : "right")).in(names.panel().width(), p.width(), "m")
-            .reads(panel.load().shift() != 0 ? "by the rule of this case" : "centre of the zone pressures", Math.abs(e), "m");
-        Trace.Line about = line(trace, "torsion", names, "T", "torsion about the middle of the posts").in(names.of("F"), force, "N").in("x_b", x, "m");
+        double shift = e == 0 ? 0 : eccentricity(panel, names, trace);
+        Trace.Line about = line(trace, "torsion", names, "M_T", "torsion about the middle of the item").in(names.of("F"), force, "N").in("x_b", x, "m");
         double torsion = e == 0 ? about.gives(names.of("F") + " x_b", force * x, "N m")
             : about.in(names.of("e"), shift, "m").gives(names.of("F") + " (x_b " + (e < 0 ? "- " : "+ ") + names.of("e") + ")",
                 force * (x + Math.signum(e) * shift), "N m");
         return new double[] {force, moment, torsion};
+    }
+
+    /** Distance of the force from the middle of the panel, m, without sign: by the rule of the case, or the centre of its zones. */
+    private static double eccentricity(PanelForce panel, Names names, Trace trace) {
+        double width = panel.panel().width();
+        Trace.Line line = line(trace, "eccentricity", names, "e", "distance of the force from the middle of the panel, towards the "
+            + (panel.eccentricity() < 0 ? "left" : "right")).in(names.panel().width(), width, "m");
+        if (panel.load().rule().isEmpty()) {
+            return line.reads("centre of the zone pressures", Math.abs(panel.eccentricity()), "m");
+        }
+        ShiftRule rule = panel.load().rule().get();
+        return line.from(rule.source().citation(), rule.source().status()).gives(rule.factor() + " " + names.panel().width(), rule.factor() * width, "m");
     }
 
     private static Trace.Line line(Trace trace, String step, Names names, String symbol, String meaning) {
@@ -127,7 +156,12 @@ public final class FootActions {
         line.in(h, panel.panel().height(), "m");
         String sum = zones.size() == 1 ? formula + " " + h : "(" + formula + ") " + h;
         if (panel.load().least() > 0) {
-            return line.in("F_{min}", panel.load().least(), "N").gives("max(" + sum + "; F_{min})", panel.force(), "N");
+            double force = line.in("F_{min}", panel.load().least(), "N").gives("max(" + sum + "; F_{min})", panel.force(), "N");
+            if (panel.raised()) {
+                line(trace, "least-force-factor", names, "k_F", "factor that raises all pressures of the case to its least force")
+                    .in(names.of("F"), force, "N").reads("F over the sum of pressure times area", panel.raise(), "1");
+            }
+            return force;
         }
         return line.gives(sum, panel.force(), "N");
     }
@@ -138,7 +172,7 @@ public final class FootActions {
         StringBuilder formula = new StringBuilder();
         double sum = 0;
         for (int i = 0; i < found.size(); i++) {
-            String each = symbol + "_" + (i + 1);
+            String each = indexed(symbol, i + 1);
             line.in(each, found.get(i)[which], unit);
             formula.append(i == 0 ? "" : " + ").append(each);
             sum += found.get(i)[which];

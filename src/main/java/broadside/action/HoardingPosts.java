@@ -171,7 +171,7 @@ public final class HoardingPosts {
     private static void recordOne(PostAction post, Share share, String zone, PanelSymbols symbols, Trace trace) {
         PanelForce panel = share.placed().panel();
         String which = post.post() + ", case " + share.named() + (share.placed().shut() ? ", gates shut" : "");
-        Trace.Line line = trace.line("post-shear" + zone, "V_p", "shear at the foot of post " + which).from(STATICS, Status.DERIVED);
+        Trace.Line line = trace.line("post-shear" + zone, "F_p", "shear at the foot of post " + which).from(STATICS, Status.DERIVED);
         StringBuilder formula = new StringBuilder();
         for (ZonePressure z : panel.load().zones()) {
             double t = Strip.overlap(share.from() - share.placed().left(), share.to() - share.placed().left(), z.from(), z.to());
@@ -185,14 +185,19 @@ public final class HoardingPosts {
         }
         String h = symbols.height();
         line.in(h, panel.panel().height(), "m");
-        boolean plain = panel.load().shift() == 0 && !panel.raised();
-        double shear = plain ? line.gives("(" + formula + ") " + h, share.force(), "N")
-            : line.reads("the pressures over the boards that the post carries, "
-                + (panel.raised() ? "raised to the least force of the case" : "spread in a straight line to the resultant of the case"), share.force(), "N");
+        String sum = "(" + formula + ") " + h;
+        double shear = panel.load().shift() != 0
+            ? line.reads("the pressures over the boards that the post carries, spread in a straight line to the resultant of the case", share.force(), "N")
+            : panel.raised() ? line.in("k_F", panel.raise()).gives("k_F " + sum, share.force(), "N") : line.gives(sum, share.force(), "N");
         double z = trace.line("post-lever-arm" + zone, "z_p", "height of the force on the post").from(STATICS, Status.DERIVED)
             .reads("height of the resultant of the case", panel.height(), "m");
-        trace.line("post-moment" + zone, "M_p", "moment at the foot of post " + which).in("V_p", shear, "N").in("z_p", z, "m")
-            .from(STATICS, Status.DERIVED).gives("V_p z_p", shear * z, "N m");
+        trace.line("post-moment" + zone, "M_p", "moment at the foot of post " + which).in("F_p", shear, "N").in("z_p", z, "m")
+            .from(STATICS, Status.DERIVED).gives("F_p z_p", shear * z, "N m");
+    }
+
+    /** Which case the balance is drawn up for. */
+    public static String balanceCase(List<PanelCases> open) {
+        return spread(open.get(0)).get(0).name().replace("case-", "") + (spread(open.get(0)).get(0).windward() == Windward.NONE ? "" : ", wind from the left");
     }
 
     /** Force on the boards in the first zoned or square case, gates open, N, and the sum of what its posts carry. */

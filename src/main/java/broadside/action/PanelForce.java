@@ -37,11 +37,15 @@ record PanelForce(Panel panel, LoadCase load, double force, double height, doubl
         return load.least() > 0 && force == load.least();
     }
 
+    /** What all pressures are multiplied by to reach the least force of the case; 1 where the zones count. */
+    double raise() {
+        return force / load.zones().stream().mapToDouble(z -> z.pressure() * z.width() * panel.height()).sum();
+    }
+
     /** Force per metre along the panel; a least force of the code raises all zones alike. */
     LineLoad line() {
         List<ZonePressure> zones = load.zones();
-        double sum = zones.stream().mapToDouble(z -> z.pressure() * z.width() * panel.height()).sum();
-        double raise = force / sum;
+        double raise = raise();
         return new LineLoad(zones.stream().mapToDouble(ZonePressure::from).toArray(), zones.stream().mapToDouble(ZonePressure::to).toArray(),
             zones.stream().mapToDouble(z -> z.pressure() * panel.height() * raise).toArray(), panel.width(), load.shift());
     }

@@ -26,15 +26,16 @@ public final class SignPosts {
         }
         for (int i = 0; i < positions.size(); i++) {
             double x = positions.get(i);
-            Combination worst = all.stream().max(Comparator.comparingDouble(c -> moment(c, x, positions.size(), spread))).orElseThrow();
+            Combination worst = all.stream()
+                .max(Comparator.comparingDouble(c -> Math.abs(moment(c, x, positions.size(), spread)))).orElseThrow();
             posts.add(record(i + 1, x, positions.size(), spread, worst, trace));
         }
         PostAction most = posts.stream().max(Comparator.comparingDouble(PostAction::moment)).orElseThrow();
-        trace.line("post-shear", "V_p", "greatest shear at the foot of a post: post " + most.post()).in("V_{" + most.post() + "}", most.shear(), "N")
-            .from(STATICS, Status.DERIVED).gives("V_{" + most.post() + "}", most.shear(), "N");
+        trace.line("post-shear", "F_p", "greatest shear at the foot of a post: post " + most.post()).in("F_{p" + most.post() + "}", most.shear(), "N")
+            .from(STATICS, Status.DERIVED).gives("F_{p" + most.post() + "}", most.shear(), "N");
         trace.line("post-moment", "M_p", "greatest moment at the foot of a post: post " + most.post())
-            .in("M_{" + most.post() + "}", most.moment(), "N m").from(STATICS, Status.DERIVED)
-            .gives("M_{" + most.post() + "}", most.moment(), "N m");
+            .in("M_{p" + most.post() + "}", most.moment(), "N m").from(STATICS, Status.DERIVED)
+            .gives("M_{p" + most.post() + "}", most.moment(), "N m");
         return posts;
     }
 
@@ -47,21 +48,21 @@ public final class SignPosts {
         double force = trace.find("force/" + worst.name()).orElseThrow().value();
         double moment = trace.find("base-moment/" + worst.name()).orElseThrow().value();
         if (count == 1) {
-            double v = trace.line("post-shear/1", "V_{1}", "shear at the foot of the post").in("F", force, "N").from(STATICS, Status.DERIVED)
+            double v = trace.line("post-shear/1", "F_{p1}", "shear at the foot of the post").in("F", force, "N").from(STATICS, Status.DERIVED)
                 .gives("F", force, "N");
-            double m = trace.line("post-moment/1", "M_{1}", "moment at the foot of the post").in("M", moment, "N m").from(STATICS, Status.DERIVED)
+            double m = trace.line("post-moment/1", "M_{p1}", "moment at the foot of the post").in("M", moment, "N m").from(STATICS, Status.DERIVED)
                 .gives("M", moment, "N m");
             return new PostAction(1, x, "", 0, java.util.Optional.empty(), worst.name(), v, m);
         }
         trace.given("x_{" + part + "}", "post " + part + " from the middle of the posts, to the right", x, "m", "");
-        double t = couple("T", "torsion of case " + worst.name() + ", wind meeting the " + end(worst), worst.torsion(), "post-couple/torsion/" + part, trace);
+        double t = couple("M_T", "torsion of case " + worst.name() + ", wind meeting the " + end(worst), worst.torsion(), "post-couple/torsion/" + part, trace);
         double j = couple("J", "sum of force, height and side distance in the same case", worst.couple(), "post-couple/moment/" + part, trace);
-        double v = trace.line("post-shear/" + part, "V_{" + part + "}", "shear at the foot of post " + part).in("F", force, "N").in("n", count)
-            .in("T", t, "N m").in("x_{" + part + "}", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
-            .gives("F / n + T x_{" + part + "} / S", force / count + t * x / spread, "N");
-        double m = trace.line("post-moment/" + part, "M_{" + part + "}", "moment at the foot of post " + part).in("M", moment, "N m").in("n", count)
+        double v = trace.line("post-shear/" + part, "F_{p" + part + "}", "shear at the foot of post " + part).in("F", force, "N").in("n", count)
+            .in("M_T", t, "N m").in("x_{" + part + "}", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
+            .gives("abs(F / n + M_T x_{" + part + "} / S)", Math.abs(force / count + t * x / spread), "N");
+        double m = trace.line("post-moment/" + part, "M_{p" + part + "}", "moment at the foot of post " + part).in("M", moment, "N m").in("n", count)
             .in("J", j, "N m²").in("x_{" + part + "}", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
-            .gives("M / n + J x_{" + part + "} / S", moment / count + j * x / spread, "N m");
+            .gives("abs(M / n + J x_{" + part + "} / S)", Math.abs(moment / count + j * x / spread), "N m");
         return new PostAction(post, x, "", 0, java.util.Optional.empty(), worst.name(), v, m);
     }
 

@@ -24,9 +24,7 @@ import broadside.trace.OwnValue;
 import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.HashSet;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -115,22 +113,22 @@ public final class Assessor {
         }
         FootActions.Result actions = FootActions.of(panels, code.symbols(), sheet);
         List<PostAction> posts = posts(job, item, code, panels, actions, sheet);
-        Map<String, String> governing = governing(actions.cases(), posts);
+        Map<String, CaseAction> governing = governing(actions.cases());
         EdgeOn edgeOn = edgeOn(item, code, sheet);
         double weight = selfWeight(item, sheet);
         Loads loads = new Loads(velocity(item, sheet), actions.cases(), governing, posts, edgeOn, code.level(), weight,
-            Balances.of(item, panels, actions, posts, governing));
+            Balances.of(item, panels, actions, posts));
         Companions.record(loads, sheet);
         return loads;
     }
 
     private static void giveDimensions(Item item, Panel panel, PanelSymbols symbols, Trace sheet) {
         String of = panel.part().isEmpty() ? item.mark() : panel.part();
-        sheet.given(symbols.width(), "width of " + of, panel.width(), "m", "");
-        sheet.given(symbols.height(), "height of " + of, panel.height(), "m", "");
-        sheet.given("z_g", "gap below " + of, panel.clearance(), "m", "");
+        sheet.given(symbols.width(), "width of " + of, panel.width(), "m", panel.typed().width());
+        sheet.given(symbols.height(), "height of " + of, panel.height(), "m", panel.typed().height());
+        sheet.given(symbols.gap(), "gap below " + of, panel.clearance(), "m", panel.typed().clearance());
         sheet.given("x_b", "middle of " + of + " from the middle of the " + item.choose(sign -> "posts", hoarding -> "hoarding") + ", to the right",
-            panel.middle(), "m", "");
+            panel.middle(), "m", panel.typed().middle());
     }
 
     private static List<PostAction> posts(Job job, Item item, WindCode code, List<PanelCases> panels, FootActions.Result actions, Trace sheet) {
@@ -150,24 +148,20 @@ public final class Assessor {
         return Optional.of(new PanelCases(whole, code.netPressures(whole, job.site(), sheet.part(whole.part()))));
     }
 
-    private static Map<String, String> governing(List<CaseAction> cases, List<PostAction> posts) {
-        Map<String, String> governing = new LinkedHashMap<>();
-        governing.put("base-shear", most(cases, CaseAction::baseShear));
-        governing.put("base-moment", most(cases, CaseAction::baseMoment));
-        governing.put("torsion", most(cases, c -> Math.abs(c.torsion())));
-        posts.stream().max(Comparator.comparingDouble(PostAction::moment)).ifPresent(p -> governing.put("post-moment", p.named()));
-        return governing;
+    private static Map<String, CaseAction> governing(List<CaseAction> cases) {
+        return Map.of("base-shear", most(cases, CaseAction::baseShear), "base-moment", most(cases, CaseAction::baseMoment),
+            "torsion", most(cases, c -> Math.abs(c.torsion())));
     }
 
-    /** The first of the cases that is not less than any other, within rounding. */
-    private static String most(List<CaseAction> cases, ToDoubleFunction<CaseAction> by) {
+    /** The first of the cases, wind on the front, that is not less than any other, within rounding. */
+    private static CaseAction most(List<CaseAction> cases, ToDoubleFunction<CaseAction> by) {
         CaseAction best = cases.get(0);
         for (CaseAction each : cases) {
-            if (by.applyAsDouble(each) > by.applyAsDouble(best) * (1 + 1e-9)) {
+            if (each.direction().equals("front") && by.applyAsDouble(each) > by.applyAsDouble(best) * (1 + 1e-9)) {
                 best = each;
             }
         }
-        return best.name();
+        return best;
     }
 
     private EdgeOn edgeOn(Item item, WindCode code, Trace sheet) {
@@ -190,13 +184,13 @@ public final class Assessor {
         double mass = sign.boards().stream().mapToDouble(b -> b.mass().map(m -> m.kilograms()).orElse(0.0)).sum();
         double aside = sign.boards().stream().mapToDouble(b -> b.mass().map(m -> m.kilograms()).orElse(0.0) * b.offset().metres()).sum();
         sheet.given("m", "mass of the boards", mass, "kg", "");
-        sheet.given("g", "standard acceleration of free fall", G, "m/s²", "");
-        double weight = sheet.line("self-weight", "G", "weight of the boards").in("m", mass, "kg").in("g", G, "m/s²")
-            .from("standard acceleration of free fall", Status.RECALLED).gives("m g", mass * G, "N");
-        double arm = sheet.line("self-weight-arm", "x_G", "centre of mass from the middle of the posts, to the right").from("statics", Status.DERIVED)
+        sheet.given("g_n", "standard acceleration of free fall", G, "m/s²", "");
+        double weight = sheet.line("self-weight", "W", "weight of the boards").in("m", mass, "kg").in("g_n", G, "m/s²")
+            .from("standard acceleration of free fall", Status.RECALLED).gives("m g_n", mass * G, "N");
+        double arm = sheet.line("self-weight-arm", "x_W", "centre of mass from the middle of the posts, to the right").from("statics", Status.DERIVED)
             .reads("from the masses and offsets of the boards", mass == 0 ? 0 : aside / mass, "m");
-        sheet.line("self-weight-moment", "M_G", "moment of the weight in the plane of the boards, about the middle of the posts")
-            .in("G", weight, "N").in("x_G", arm, "m").from("statics", Status.DERIVED).gives("G x_G", weight * arm, "N m");
+        sheet.line("self-weight-moment", "M_W", "moment of the weight in the plane of the boards, about the middle of the posts")
+            .in("W", weight, "N").in("x_W", arm, "m").from("statics", Status.DERIVED).gives("W x_W", weight * arm, "N m");
         return weight;
     }
 

@@ -8,21 +8,21 @@ import broadside.action.SignPosts;
 import broadside.panel.Hoarding;
 import broadside.panel.Item;
 import broadside.panel.PostSign;
+import java.util.Comparator;
 import java.util.List;
-import java.util.Map;
 
 /** The equilibrium lines: what acts on the item, and the sum of what its posts answer, in one and the same case. */
 final class Balances {
 
-    static List<Loads.Balance> of(Item item, List<PanelCases> panels, FootActions.Result actions, List<PostAction> posts,
-                                  Map<String, String> governing) {
+    static List<Loads.Balance> of(Item item, List<PanelCases> panels, FootActions.Result actions, List<PostAction> posts) {
         if (posts.isEmpty()) {
             return List.of();
         }
-        return item.choose(sign -> sign(sign, actions, governing.get("post-moment")), hoarding -> hoarding(hoarding, panels));
+        return item.choose(sign -> sign(sign, actions, posts), hoarding -> hoarding(hoarding, panels));
     }
 
-    private static List<Loads.Balance> sign(PostSign sign, FootActions.Result actions, String governing) {
+    private static List<Loads.Balance> sign(PostSign sign, FootActions.Result actions, List<PostAction> posts) {
+        String governing = posts.stream().max(Comparator.comparingDouble(PostAction::moment)).orElseThrow().named();
         FootActions.Combined worst = actions.combinations().stream().filter(c -> c.name().equals(governing)).findFirst().orElseThrow();
         double[] sums = SignPosts.sums(worst, sign.posts().positions());
         return List.of(new Loads.Balance("shear at the ground, case " + worst.name().replace("case-", ""), worst.force(), sums[0], "N"),
@@ -31,7 +31,8 @@ final class Balances {
 
     private static List<Loads.Balance> hoarding(Hoarding hoarding, List<PanelCases> panels) {
         double[] sums = HoardingPosts.balance(hoarding, hoarding.spacing().orElseThrow().metres(), panels);
-        return List.of(new Loads.Balance("force on the boards and shears of all posts, one case, gates open", sums[0], sums[1], "N"));
+        return List.of(new Loads.Balance("force on the boards and shears of all posts, case " + HoardingPosts.balanceCase(panels)
+            + (hoarding.gates().isEmpty() ? "" : ", gates open"), sums[0], sums[1], "N"));
     }
 
     private Balances() { }

@@ -1,9 +1,7 @@
 package broadside.assess;
 
-import broadside.action.PostAction;
 import broadside.codes.Level;
 import broadside.trace.Trace;
-import java.util.Comparator;
 
 /** The governing loads at the other level: factored beside characteristic, service beside strength. */
 final class Companions {
@@ -12,10 +10,10 @@ final class Companions {
         Level level = loads.level();
         double f = sheet.line("companion-factor", "f", "from " + level.name() + " to " + level.companion() + " loads: " + level.rule())
             .from(level.place(), level.status()).reads("read in the table of combinations", level.factor(), "1");
-        one("companion-base-shear", "V", loads.governs("base-shear").baseShear(), "N", f, level, sheet);
+        one("companion-base-shear", "F_b", loads.governs("base-shear").baseShear(), "N", f, level, sheet);
         one("companion-base-moment", "M", loads.governs("base-moment").baseMoment(), "N m", f, level, sheet);
-        one("companion-torsion", "T", loads.governs("torsion").torsion(), "N m", f, level, sheet);
-        loads.posts().stream().max(Comparator.comparingDouble(PostAction::moment)).ifPresent(post ->
+        one("companion-torsion", "M_T", loads.governs("torsion").torsion(), "N m", f, level, sheet);
+        loads.worstPost().ifPresent(post ->
             one("companion-post-moment", "M_p", post.moment(), "N m", f, level, sheet));
     }
 

@@ -4,22 +4,25 @@ import broadside.action.CaseAction;
 import broadside.action.EdgeOn;
 import broadside.action.PostAction;
 import broadside.codes.Level;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.TreeMap;
 
 /**
  * The loads on one item and at its foot.
  *
  * @param velocity   the greatest velocity pressure of its panels, with its height
  * @param cases      every case of the code, wind on the front and on the back
- * @param governing  which case governs what: base-shear, base-moment, torsion, post-moment
+ * @param governing  the case that governs base-shear, base-moment and torsion, wind on the front
  * @param posts      what reaches the foot of each post; empty where the posts are not known
  * @param edgeOn     wind along the face, by the tool's own rule
  * @param level      level of these loads and the companion
  * @param selfWeight weight of the boards where their mass was given, N; zero otherwise
  * @param balance    sum of loads and sum of reactions
  */
-public record Loads(Velocity velocity, List<CaseAction> cases, Map<String, String> governing, List<PostAction> posts,
+public record Loads(Velocity velocity, List<CaseAction> cases, Map<String, CaseAction> governing, List<PostAction> posts,
                     EdgeOn edgeOn, Level level, double selfWeight, List<Balance> balance) {
 
     /** Velocity pressure, Pa, at a height above the ground, m. */
@@ -35,9 +38,21 @@ public record Loads(Velocity velocity, List<CaseAction> cases, Map<String, Strin
         balance = List.copyOf(balance);
     }
 
-    /** The case that governs a quantity, wind on the front. */
+    /** The case that governs base-shear, base-moment or torsion, wind on the front. */
     public CaseAction governs(String quantity) {
-        String name = governing.get(quantity);
-        return cases.stream().filter(c -> c.name().equals(name) && c.direction().equals("front")).findFirst().orElseThrow();
+        return governing.get(quantity);
+    }
+
+    /** The names of the governing cases, post-moment among them where there are posts. */
+    public Map<String, String> governingNames() {
+        Map<String, String> names = new TreeMap<>();
+        governing.forEach((quantity, action) -> names.put(quantity, action.name()));
+        worstPost().ifPresent(p -> names.put("post-moment", p.named()));
+        return names;
+    }
+
+    /** The post with the greatest moment at its foot. */
+    public Optional<PostAction> worstPost() {
+        return posts.stream().max(Comparator.comparingDouble(PostAction::moment));
     }
 }

@@ -27,7 +27,7 @@ final class Notes {
         notes.overrides(sheet);
         notes.site(job.site(), code);
         item.<Runnable>choose(sign -> () -> notes.sign(sign), hoarding -> () -> notes.hoarding(hoarding)).run();
-        notes.solidity(job, item);
+        notes.solidity(job, item, sheet);
         notes.carrying(item);
         notes.statuses(sheet);
         notes.always();
@@ -51,8 +51,9 @@ final class Notes {
                 + "by more than 10 m, the load can be much larger.");
         }
         site.ground().topography().ifPresent(ground -> topography(ground, code));
-        site.authorityMinimum().ifPresent(minimum -> add(Note.Kind.ASSUMPTION, minimum.service() || code.level().name().equals("characteristic")
-            ? "The authority's least pressure of " + minimum.pressure().typed() + " is taken at service level."
+        site.authorityMinimum().ifPresent(minimum -> add(Note.Kind.ASSUMPTION, code.level().name().equals("characteristic")
+            ? "The authority's least pressure of " + minimum.pressure().typed() + " is taken as a characteristic pressure."
+            : minimum.service() ? "The authority's least pressure of " + minimum.pressure().typed() + " is taken at allowable stress and brought to strength level."
             : "The authority's least pressure of " + minimum.pressure().typed() + " is taken at strength level, as the code's loads are. "
                 + "If the authority means it at allowable stress, say so: the loads are then larger."));
         if (site.basicSpeed().metresPerSecond() > 90 || site.basicSpeed().metresPerSecond() < 10) {
@@ -65,6 +66,8 @@ final class Notes {
     }
 
     private void topography(Topography ground, WindCode code) {
+        add(Note.Kind.ASSUMPTION, "The hill is counted wherever the code's formulas give a factor, also where a condition on the ground around it might excuse "
+            + "the site.");
         boolean half = ground.halfLength().isPresent();
         if (code.terms().options().contains("topographic-factor") && !half) {
             add(Note.Kind.ASSUMPTION, "Half the height of the slope is taken to lie half-way along it, as for an even slope.");
@@ -109,8 +112,11 @@ final class Notes {
         add(Note.Kind.ASSUMPTION, "The thickness of the hoarding is not known: wind along it counts friction on both faces only.");
     }
 
-    private void solidity(Job job, Item item) {
+    private void solidity(Job job, Item item, Trace sheet) {
         if (item.panels().stream().anyMatch(p -> p.solidity() < 1)) {
+            if (sheet.steps().stream().anyMatch(s -> s.name().startsWith("coefficient/all"))) {
+                add(Note.Kind.ASSUMPTION, "The code's rule for signboards has no reduction for openings: the board is counted as closed.");
+            }
             add(Note.Kind.CAUTION, "The solidity was given by " + job.remark(item.mark(), "solidity-by").orElse("an unnamed source")
                 + ". A printer's figure for a mesh is not an aerodynamic one.");
         }

@@ -33,7 +33,7 @@ final class Asce716 implements WindCode {
         this.signs = new Asce7Signs(edition);
         this.constants = new Constants(edition);
         Coefficient service = edition.rows("load-combinations").number("allowable-full-dead", "w");
-        this.level = new Level("strength", "service", service.value(), Numbers.plain(service.value()) + " W, allowable stress design",
+        this.level = new Level("strength", "service (ASD)", service.value(), Numbers.plain(service.value()) + " W, allowable stress design",
             service.source().citation(), service.source().status());
         this.terms = new SiteTerms(Averaging.of(edition.property("averaging")).orElseThrow(), edition.rows("exposure").keys().stream()
             .map(k -> new SiteTerms.Terrain(k, MEANINGS.getOrDefault(k, ""))).toList(), OPTIONS);
@@ -56,7 +56,7 @@ final class Asce716 implements WindCode {
 
     @Override
     public PanelSymbols symbols() {
-        return new PanelSymbols("B", "s");
+        return new PanelSymbols("B", "s", "g");
     }
 
     @Override
@@ -66,9 +66,9 @@ final class Asce716 implements WindCode {
 
     @Override
     public List<LoadCase> netPressures(Panel panel, Site site, Trace trace) {
-        double h = trace.line("reference-height", "h", "height of the top").in("z_g", panel.clearance(), "m").in("s", panel.height(), "m")
+        double h = trace.line("reference-height", "h", "height of the top").in("g", panel.clearance(), "m").in("s", panel.height(), "m")
             .from(constants.source("openness-limit").publicationAndEdition() + ", 29.3", constants.source("openness-limit").status())
-            .gives("z_g + s", panel.top(), "m");
+            .gives("g + s", panel.top(), "m");
         double q = velocityPressure(site, h, trace);
         double gust = velocity.gustFactor(site, panel.width(), h, trace);
         return signs.cases(panel, site, this, q, gust, trace);

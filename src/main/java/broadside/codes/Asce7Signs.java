@@ -12,6 +12,7 @@ import broadside.table.Source;
 import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** Solid free-standing signs and walls of ASCE 7, figure 29.3-1: cases A, B and C. */
 final class Asce7Signs {
@@ -54,9 +55,9 @@ final class Asce7Signs {
     private double porosity(Panel panel, Trace trace) {
         double solidity = trace.given("ε", "solidity", panel.solidity(), "1", "");
         Source place = constants.source("openness-limit");
-        if (solidity < constants.number("openness-limit")) {
+        if (!Numbers.above(solidity, constants.number("openness-limit"))) {
             throw new NotCovered(place.publicationAndEdition(), place.place(), "the solidity " + Numbers.plain(solidity)
-                + " means openings of more than 30 %; such a panel is an open sign (29.4), which is not worked out here.",
+                + " means openings of 30 % or more; such a panel is an open sign (29.4), which is not worked out here.",
                 "Take the panel as closed, which is safe, or ask an engineer for the open sign.");
         }
         if (solidity == 1) {
@@ -79,11 +80,11 @@ final class Asce7Signs {
             .from(constants.source("case-b-offset").citation(), constants.source("case-b-offset").status()).gives("p_{case-a}", p, "Pa");
         double rise = rise(sheet);
         double b = panel.width();
-        double shift = constants.number("case-b-offset") * b;
+        ShiftRule rule = new ShiftRule(constants.number("case-b-offset"), constants.source("case-b-offset"));
         LoadCase a = new LoadCase("case-a", "case A, wind square on", Windward.NONE,
-            List.of(new ZonePressure("case-a", "p_{case-a}", 0, b, b, c, p)), 0, rise, 0);
+            List.of(new ZonePressure("case-a", "p_{case-a}", 0, b, b, c, p)), 0, Optional.empty(), rise, 0);
         LoadCase right = new LoadCase("case-b", "case B, force a fifth of the width towards the windward edge", Windward.RIGHT,
-            List.of(new ZonePressure("case-b", "p_{case-b}", 0, b, b, c, p)), shift, rise, 0);
+            List.of(new ZonePressure("case-b", "p_{case-b}", 0, b, b, c, p)), rule.factor() * b, Optional.of(rule), rise, 0);
         return List.of(a, right, right.mirrored(b));
     }
 
@@ -129,7 +130,7 @@ final class Asce7Signs {
             .in("p_{16}", p16, "Pa").in("B", sheet.panel().width(), "m").in("s", s, "m")
             .gives("p_{16} B s", p16 * sheet.panel().width() * s, "N");
         double rise = sheet.panel().clearance() > 0 ? 0 : constants.number("ground-rise") * s;
-        return new LoadCase("case-c", "case C, wind from one side, by regions from the windward edge", Windward.LEFT, pressures, 0, rise, least);
+        return new LoadCase("case-c", "case C, wind from one side, by regions from the windward edge", Windward.LEFT, pressures, 0, Optional.empty(), rise, least);
     }
 
     private double returnFactor(Sheet sheet, double length, String end) {
@@ -189,8 +190,11 @@ final class Asce7Signs {
         if (Numbers.atLeast(aspect, longRegions.first())) {
             return longRegions.at(region, Math.max(aspect, longRegions.first()));
         }
-        Coefficient below = regions.at(regionBelow(region), regions.last());
         Coefficient above = longRegions.at(region, longRegions.first());
+        if (region.equals("over-10s")) {
+            return above;
+        }
+        Coefficient below = regions.at(regionBelow(region), regions.last());
         Coefficient larger = below.value() > above.value() ? below : above;
         return new Coefficient(larger.value(), "1", larger.source(), "the larger of the printed columns B/s = "
             + Numbers.plain(regions.last()) + " (" + below.value() + ") and " + Numbers.plain(longRegions.first()) + " (" + above.value()

@@ -33,10 +33,11 @@ final class Asce7Topography {
         boolean rough = exposure.equals("B");
         double leastHeight = constants.metres(rough ? "topography-least-height-b" : "topography-least-height-cd");
         Source conditions = constants.source("topography-least-slope");
-        if (slope < constants.number("topography-least-slope") || h < leastHeight) {
+        boolean low = !Numbers.atLeast(h, leastHeight);
+        if (low || !Numbers.atLeast(slope, constants.number("topography-least-slope"))) {
             return trace.line("topography-factor", "K_{zt}", "topographic factor").in("H", h, "m").in("H/L_h", slope)
                 .from(conditions.citation(), conditions.status())
-                .reads(h < leastHeight ? "1, as H is below the least height for this exposure"
+                .reads(low ? "1, as H is below the least height for this exposure"
                     : "1, as H/L_h is below " + constants.text("topography-least-slope"), 1, "1");
         }
         return multipliers(new Hill(ground, exposure, z, h, half, slope, place), trace);
@@ -58,7 +59,7 @@ final class Asce7Topography {
     private double multipliers(Hill hill, Trace trace) {
         String shape = hill.ground().feature().word();
         double steepest = constants.number("topography-steep");
-        boolean steep = hill.slope() > steepest;
+        boolean steep = Numbers.above(hill.slope(), steepest);
         double perSlope = shapes.number(shape, "k1-" + hill.exposure().toLowerCase(Locale.ROOT)).value();
         double k1 = line(hill, trace, "topography-k1", "K_1", "shape of the ground and its greatest speed-up").in("H/L_h", hill.slope())
             .reads(Numbers.plain(perSlope) + " times H/L_h" + (steep ? ", with H/L_h held at " + Numbers.plain(steepest) : ""),

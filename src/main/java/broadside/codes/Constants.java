@@ -39,7 +39,8 @@ final class Constants {
 
     /** The number with its source, to be recorded. */
     Coefficient entry(String key) {
-        return rows.number(key, "value");
+        Coefficient found = rows.number(key, "value");
+        return new Coefficient(found.value(), found.unit(), found.source(), "as printed");
     }
 
     Source source(String key) {

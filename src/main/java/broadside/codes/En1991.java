@@ -8,6 +8,7 @@ import broadside.table.Rows;
 import broadside.table.Source;
 import broadside.trace.Trace;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 
 /** EN 1991-1-4: signboards (7.4.3) and free-standing walls (7.4.1) on the peak velocity pressure of chapter 4. */
@@ -62,7 +63,7 @@ final class En1991 implements WindCode {
 
     @Override
     public PanelSymbols symbols() {
-        return new PanelSymbols("b", "h");
+        return new PanelSymbols("b", "h", "z_g");
     }
 
     @Override
@@ -75,7 +76,7 @@ final class En1991 implements WindCode {
         double limit = constants.number("wall-solidity-limit");
         Source solidity = constants.source("wall-solidity-limit");
         if (panel.solidity() < limit) {
-            throw new NotCovered(solidity.publicationAndEdition(), solidity.place(), "the solidity "
+            throw new NotCovered(solidity.publicationAndEdition(), isWall(panel) ? solidity.place() : "7.4.3(1)", "the solidity "
                 + Numbers.plain(panel.solidity()) + " is below " + Numbers.plain(limit)
                 + "; such a panel counts as a plane lattice (7.11), which is not worked out here.",
                 "Take the panel as closed, which is safe, or ask an engineer for the lattice.");
@@ -83,10 +84,10 @@ final class En1991 implements WindCode {
         return isWall(panel) ? walls.cases(panel, site, this, trace) : signboard(panel, site, trace);
     }
 
-    /** 7.4.3: a board near the ground that is wider than it is high is a free-standing wall. */
+    /** 7.4.3: a board near the ground that is wider than it is high is a free-standing wall; so is a hoarding on the ground. */
     private boolean isWall(Panel panel) {
         boolean wide = Numbers.above(panel.width() / panel.height(), constants.number("signboard-aspect"));
-        return !clear(panel) && (wide || panel.kind() == Panel.Kind.WALL);
+        return !clear(panel) && (wide || panel.kind() == Panel.Kind.WALL && panel.clearance() == 0);
     }
 
     private boolean clear(Panel panel) {
@@ -111,11 +112,11 @@ final class En1991 implements WindCode {
             trace.line(name, symbol, "net pressure on the board").in("q_p", qp, "Pa").in("c_f", cf)
                 .from(place.publicationAndEdition() + ", 5.3(2)", place.status()), "q_p c_f", qp * cf);
         double b = panel.width();
-        double e = constants.number("signboard-eccentricity") * b;
+        ShiftRule rule = new ShiftRule(constants.number("signboard-eccentricity"), constants.source("signboard-eccentricity"));
         List<ZonePressure> all = List.of(new ZonePressure("all", "w", 0, b, b, cf, w));
-        LoadCase centred = new LoadCase("centred", "signboard, wind square on", LoadCase.Windward.NONE, all, 0, 0, 0);
+        LoadCase centred = new LoadCase("centred", "signboard, wind square on", LoadCase.Windward.NONE, all, 0, Optional.empty(), 0, 0);
         LoadCase right = new LoadCase("eccentric", "signboard, force a quarter of the width off the middle",
-            LoadCase.Windward.RIGHT, all, e, 0, 0);
+            LoadCase.Windward.RIGHT, all, rule.factor() * b, Optional.of(rule), 0, 0);
         return List.of(centred, right, right.mirrored(b));
     }
 }

@@ -7,6 +7,7 @@ import broadside.table.Edition;
 import broadside.table.Rows;
 import broadside.table.Source;
 import broadside.trace.Trace;
+import java.util.Locale;
 
 /**
  * Orography factor of EN 1991-1-4 annex A.3: hills, ridges, cliffs and escarpments. Logarithms are to base 10.
@@ -34,16 +35,14 @@ final class En1991Orography {
         double lu = trace.given("L_u", "length of the upwind slope", ground.upwindLength().metres(), "m", ground.upwindLength().typed());
         double slope = trace.line("slope", "Φ", "upwind slope").in("H", h, "m").in("L_u", lu, "m")
             .from(place.citation(), place.status()).gives("H / L_u", h / lu, "1");
-        if (slope < constants.number("orography-flat")) {
+        if (!Numbers.atLeast(slope, constants.number("orography-flat"))) {
             return trace.line("topography-factor", "c_o", "orography factor").in("Φ", slope)
                 .from(place.citation(), place.status())
                 .reads("1, as Φ is below " + constants.text("orography-flat"), 1, "1");
         }
-        boolean steep = slope > constants.number("orography-steep");
+        boolean steep = Numbers.above(slope, constants.number("orography-steep"));
         double le = effectiveLength(h, lu, steep, trace);
-        double s = Math.max(0, location(ground, height, lu, le, trace));
-        s = trace.line("orography-location-factor", "s", "orographic location factor").in("z_e", height, "m").in("L_e", le, "m")
-            .from(place.citation(), place.status()).reads(where(ground), s, "1");
+        double s = location(ground, height, lu, le, trace);
         double coefficient = constants.number(steep ? "orography-steep-factor" : "orography-shallow-factor");
         Trace.Line line = trace.line("topography-factor", "c_o", "orography factor").in("s", s).from(place.citation(), place.status());
         return steep ? line.gives("1 + " + Numbers.plain(coefficient) + " s", 1 + coefficient * s, "1")
@@ -56,22 +55,36 @@ final class En1991Orography {
         return steep ? line.in("H", h, "m").gives("H / " + Numbers.plain(limit), h / limit, "m") : line.in("L_u", lu, "m").gives("L_u", lu, "m");
     }
 
-    private double location(Topography ground, double z, double lu, double le, Trace trace) {
+    private double location(Topography ground, double height, double lu, double le, Trace trace) {
         double x = trace.given("x", "distance from the crest to the site, positive downwind", ground.distanceFromCrest().metres(), "m",
             ground.distanceFromCrest().typed());
-        double up = z / le;
-        if (up > constants.number("orography-height-reach")) {
-            return 0;
+        double up = line(trace, "orography-height", "ζ", "height over effective length").in("z_e", height, "m").in("L_e", le, "m")
+            .gives("z_e / L_e", height / le, "1");
+        boolean cliff = ground.feature() == Feature.ESCARPMENT;
+        double reach = constants.number("orography-height-reach");
+        if (Numbers.above(up, reach)) {
+            return location(trace).reads("0, as z/L_e is above " + Numbers.plain(reach), 0, "1");
         }
         if (x <= 0) {
-            return x / lu < -constants.number("orography-upwind-reach") ? 0
-                : polynomial(upwind, "A", up) * Math.exp(polynomial(upwind, "B", up) * x / lu);
+            return upwindOrHill(upwind, x, "L_u", lu, constants.number("orography-upwind-reach"), up, trace);
         }
-        if (ground.feature() == Feature.ESCARPMENT) {
-            return cliff(x / le, up);
+        return cliff ? cliff(x, le, up, trace)
+            : upwindOrHill(hill, x, "L_d", downwindLength(ground, trace), constants.number("hill-reach"), up, trace);
+    }
+
+    private Trace.Line location(Trace trace) {
+        return line(trace, "orography-location-factor", "s", "orographic location factor");
+    }
+
+    private double upwindOrHill(Rows rows, double x, String symbol, double length, double reach, double up, Trace trace) {
+        if (Numbers.above(Math.abs(x) / length, reach)) {
+            return location(trace).in("x", x, "m").in(symbol, length, "m")
+                .reads("0, as the site lies farther than " + Numbers.plain(reach) + " times " + symbol + " from the crest", 0, "1");
         }
-        double ld = downwindLength(ground, trace);
-        return x / ld > constants.number("hill-reach") ? 0 : polynomial(hill, "A", up) * Math.exp(polynomial(hill, "B", up) * x / ld);
+        double a = polynomial(rows, "A", "ζ", up, trace);
+        double b = polynomial(rows, "B", "ζ", up, trace);
+        return location(trace).in("A", a).in("B", b).in("x", x, "m").in(symbol, length, "m")
+            .gives("max(0; A exp(B x / " + symbol + "))", Math.max(0, a * Math.exp(b * x / length)), "1");
     }
 
     /** Where the downwind slope is not given it is taken as long as the upwind one; the assessment says so. */
@@ -80,40 +93,49 @@ final class En1991Orography {
         return trace.given("L_d", "length of the downwind slope", ld.metres(), "m", ld.typed());
     }
 
-    private double cliff(double along, double up) {
-        if (along > constants.number("cliff-reach")) {
-            return 0;
+    /** From the crest to a tenth of the effective length a straight line joins the two formulas. */
+    private double cliff(double x, double le, double up, Trace trace) {
+        double along = line(trace, "orography-distance", "ξ", "distance over effective length").in("x", x, "m").in("L_e", le, "m")
+            .gives("x / L_e", x / le, "1");
+        if (Numbers.above(along, constants.number("cliff-reach"))) {
+            return location(trace).in("ξ", along).reads("0, as x/L_e is above " + constants.text("cliff-reach"), 0, "1");
         }
         double least = constants.number("cliff-least");
-        double atLeast = cliffFormula(Math.max(along, least), Math.max(up, constants.number("cliff-least-height")));
-        if (along >= least) {
-            return atLeast;
+        double lowest = constants.number("cliff-least-height");
+        double logX = line(trace, "orography-log-distance", "X", "base 10 logarithm of x/L_e, at least " + Numbers.plain(least)).in("ξ", along)
+            .gives("ln(max(ξ; " + Numbers.plain(least) + ")) / ln(10)", Math.log(Math.max(along, least)) / Math.log(10), "1");
+        double logZ = line(trace, "orography-log-height", "Z", "base 10 logarithm of z/L_e, at least " + Numbers.plain(lowest)).in("ζ", up)
+            .gives("ln(max(ζ; " + Numbers.plain(lowest) + ")) / ln(10)", Math.log(Math.max(up, lowest)) / Math.log(10), "1");
+        double a = polynomial(cliff, "A", "Z", logZ, trace);
+        double b = polynomial(cliff, "B", "Z", logZ, trace);
+        double c = polynomial(cliff, "C", "Z", logZ, trace);
+        double formula = a * logX * logX + b * logX + c;
+        if (Numbers.atLeast(along, least)) {
+            return location(trace).in("A", a).in("X", logX).in("B", b).in("C", c).gives("max(0; A X² + B X + C)", Math.max(0, formula), "1");
         }
-        double crest = polynomial(upwind, "A", up);
-        return crest + along / least * (atLeast - crest);
+        double there = line(trace, "orography-location-factor-at-0.1", "s_{0.1}", "location factor at x/L_e = " + Numbers.plain(least)).in("A", a)
+            .in("X", logX).in("B", b).in("C", c).gives("A X² + B X + C", formula, "1");
+        double crest = polynomial(upwind, "A", "ζ", up, trace);
+        return location(trace).in("A", crest).in("s_{0.1}", there).in("ξ", along)
+            .gives("max(0; A + (s_{0.1} - A) ξ / " + Numbers.plain(least) + ")", Math.max(0, crest + along / least * (there - crest)), "1");
     }
 
-    private double cliffFormula(double along, double up) {
-        double x = Math.log10(along);
-        double z = Math.log10(up);
-        return polynomial(cliff, "A", z) * x * x + polynomial(cliff, "B", z) * x + polynomial(cliff, "C", z);
-    }
-
-    private static double polynomial(Rows rows, String name, double x) {
+    private double polynomial(Rows rows, String name, String variable, double x, Trace trace) {
         double sum = 0;
+        StringBuilder text = new StringBuilder();
         for (int power = 4; power >= 0; power--) {
-            sum = sum * x + rows.number(name, "p" + power).value();
+            double p = rows.number(name, "p" + power).value();
+            sum = sum * x + p;
+            if (p != 0) {
+                text.append(text.isEmpty() ? (p < 0 ? "-" : "") : p < 0 ? " - " : " + ").append(Numbers.plain(Math.abs(p)))
+                    .append(power == 0 ? "" : power == 1 ? " " + variable : " " + variable + "^" + power);
+            }
         }
-        return sum;
+        return line(trace, "orography-polynomial-" + name.toLowerCase(Locale.ROOT), name, "polynomial " + name + " of this side of the crest")
+            .in(variable, x).gives(text.toString(), sum, "1");
     }
 
-    private static String where(Topography ground) {
-        if (ground.distanceFromCrest().metres() <= 0) {
-            return "upwind of the crest: A exp(B x/L_u) with the polynomials A, B of z/L_e";
-        }
-        return ground.feature() == Feature.ESCARPMENT
-            ? "downwind of an escarpment: A X² + B X + C with X = log10(x/L_e) and the polynomials A, B, C of log10(z/L_e);"
-                + " a straight line from the crest to x/L_e = 0.1"
-            : "downwind of a hill or ridge: A exp(B x/L_d) with the polynomials A, B of z/L_e";
+    private Trace.Line line(Trace trace, String step, String symbol, String meaning) {
+        return trace.line(step, symbol, meaning).from(place.citation(), place.status());
     }
 }

@@ -12,6 +12,7 @@ import broadside.table.Source;
 import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** Free-standing walls of EN 1991-1-4, 7.4.1: zones A to D from the windward end, table 7.9. */
 final class En1991Walls {
@@ -74,7 +75,7 @@ final class En1991Walls {
                 "q_p c_" + zone, sheet.qp() * c);
             pressures.add(new ZonePressure(zone, "w_" + zone, strip.from(), strip.to(), width, c, w));
         }
-        return new LoadCase("wall", "free-standing wall, zones from the windward end", Windward.LEFT, pressures, 0, 0, 0);
+        return new LoadCase("wall", "free-standing wall, zones from the windward end", Windward.LEFT, pressures, 0, Optional.empty(), 0, 0);
     }
 
     private static double round(double metres) {

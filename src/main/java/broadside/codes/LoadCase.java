@@ -1,6 +1,8 @@
 package broadside.codes;
 
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * One load case of a code on one panel.
@@ -10,11 +12,12 @@ import java.util.List;
  * @param windward  the end of the panel from which zones or the eccentricity are measured
  * @param zones     net pressures, from the left edge to the right
  * @param shift     distance that the code moves the resultant off that of the zones, m, positive to the right
+ * @param rule      the rule that moves it, where one does
  * @param rise      distance that the code moves the resultant above mid-height, m
  * @param least     least resultant force that the code asks for in this case, N
  */
-public record LoadCase(String name, String label, Windward windward, List<ZonePressure> zones, double shift, double rise,
-                       double least) {
+public record LoadCase(String name, String label, Windward windward, List<ZonePressure> zones, double shift,
+                       Optional<ShiftRule> rule, double rise, double least) {
 
     /** End that the wind meets first; NONE where the case is the same from either side. */
     public enum Windward {
@@ -31,11 +34,11 @@ public record LoadCase(String name, String label, Windward windward, List<ZonePr
 
     /** The same case met from the other end of a panel whose ends are alike. */
     public LoadCase mirrored(double width) {
-        List<ZonePressure> other = new java.util.ArrayList<>();
+        List<ZonePressure> other = new ArrayList<>();
         for (int i = zones.size() - 1; i >= 0; i--) {
             ZonePressure z = zones.get(i);
             other.add(new ZonePressure(z.zone(), z.symbol(), width - z.to(), width - z.from(), z.width(), z.coefficient(), z.pressure()));
         }
-        return new LoadCase(name, label, windward.mirrored(), other, -shift, rise, least);
+        return new LoadCase(name, label, windward.mirrored(), other, -shift, rule, rise, least);
     }
 }

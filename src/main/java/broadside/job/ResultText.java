@@ -55,7 +55,7 @@ public final class ResultText {
         ArrayNode cases = node.putArray("cases");
         loads.cases().forEach(c -> caseOf(cases.addObject(), c, level));
         ObjectNode governing = node.putObject("governing");
-        loads.governing().entrySet().stream().sorted(java.util.Map.Entry.comparingByKey()).forEach(e -> governing.put(e.getKey(), e.getValue()));
+        loads.governingNames().forEach(governing::put);
         node.putObject("companion").put("level", level.companion()).put("factor", level.factor()).put("rule", level.rule());
         ArrayNode posts = node.putArray("posts");
         loads.posts().forEach(p -> post(posts.addObject(), p, level));

@@ -71,6 +71,7 @@ public record Hoarding(String mark, Length length, Length height, Length clearan
         double left = from == 0 ? returnLeft.metres() : 0;
         double right = to == length.metres() ? returnRight.metres() : 0;
         return new Panel(part, Panel.Kind.WALL, to - from, height.metres(), clearance.metres(),
-            (from + to) / 2 - length.metres() / 2, solidity, left, right);
+            (from + to) / 2 - length.metres() / 2, solidity, left, right,
+            new Panel.AsTyped(from == 0 && to == length.metres() ? length.typed() : "", height.typed(), clearance.typed(), ""));
     }
 }

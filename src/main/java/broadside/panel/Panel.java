@@ -13,9 +13,13 @@ package broadside.panel;
  * @param solidity    solid area over gross area, 1 for a closed panel
  * @param returnLeft  length of the return corner at the left end, 0 for a free end
  * @param returnRight length of the return corner at the right end
+ * @param typed       the sizes as typed
  */
 public record Panel(String part, Kind kind, double width, double height, double clearance, double middle, double solidity,
-                    double returnLeft, double returnRight) {
+                    double returnLeft, double returnRight, AsTyped typed) {
+
+    /** The sizes as they were typed; a size that follows from others is empty. */
+    public record AsTyped(String width, String height, String clearance, String middle) { }
 
     /** What the panel is in the words of the codes. */
     public enum Kind { BOARD, WALL }

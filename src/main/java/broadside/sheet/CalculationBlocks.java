@@ -1,5 +1,6 @@
 package broadside.sheet;
 
+import broadside.action.CaseAction;
 import broadside.assess.ItemResult;
 import broadside.assess.Loads;
 import broadside.quantity.Rounding;
@@ -27,7 +28,7 @@ final class CalculationBlocks {
         blocks.add(new Heading(2, "Calculation" + (many ? ", item " + item.item().mark() : ""), anchor + "calculation"));
         item.loads().ifPresent(loads -> {
             blocks.add(new Heading(3, "To redo by hand", anchor + "hand"));
-            blocks.add(new Paragraph(handCheck(item.sheet(), loads, format), Tone.PLAIN));
+            blocks.add(new Paragraph(handCheck(loads), Tone.PLAIN));
             loads.balance().forEach(b -> blocks.add(new Paragraph(balance(b), Tone.PLAIN)));
         });
         blocks.add(new Heading(3, "Given", anchor + "given"));
@@ -40,13 +41,10 @@ final class CalculationBlocks {
     }
 
     /** The governing moment, written out. */
-    private static String handCheck(Trace sheet, Loads loads, Format format) {
-        String name = loads.governing().get("base-moment");
-        Step moment = sheet.find("base-moment/" + name).orElseThrow();
-        double force = loads.governs("base-moment").force();
-        double height = loads.governs("base-moment").height();
-        return "Moment at the ground line, " + Format.caseWords(name) + ": force times height = " + value(force, "N") + " x " + value(height, "m") + " = "
-            + value(moment.value(), "N m") + ". " + "Pressure times area gives the force: see the step force/" + name + ".";
+    private static String handCheck(Loads loads) {
+        CaseAction c = loads.governs("base-moment");
+        return "Moment at the ground line, " + Format.caseWords(c.name()) + Format.end(c.windward()) + ": force times height = " + value(c.force(), "N") + " x "
+            + value(c.height(), "m") + " = " + value(c.baseMoment(), "N m") + ". Pressure times area gives the force: see the step of the force of this case.";
     }
 
     private static String balance(Loads.Balance balance) {

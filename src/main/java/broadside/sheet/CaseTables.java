@@ -4,11 +4,11 @@ import broadside.action.CaseAction;
 import broadside.action.CaseAction.PanelZones;
 import broadside.action.PostAction;
 import broadside.assess.Loads;
-import broadside.codes.LoadCase.Windward;
 import broadside.codes.ZonePressure;
 import broadside.panel.Item;
 import broadside.panel.Panel;
 import broadside.quantity.Dimension;
+import broadside.quantity.Units;
 import broadside.sheet.Block.Column;
 import broadside.sheet.Block.Paragraph;
 import broadside.sheet.Block.Row;
@@ -27,10 +27,13 @@ final class CaseTables {
 
     static List<Block> of(Item item, Loads loads, Format format) {
         List<Block> blocks = new ArrayList<>();
-        blocks.add(cases(loads, format, 1, loads.level().name()));
-        blocks.add(cases(loads, format, loads.level().factor(), loads.level().companion() + ", " + loads.level().rule()));
-        blocks.add(new Paragraph("Forces are magnitudes. The wind was taken on the front and on the back and from both ends; the worse end is shown. "
-            + "Torsion is positive when it turns the right side backwards, seen from the front. Loads are rounded up, at display only.", Tone.SMALL));
+        boolean sign = item.choose(s -> true, h -> false);
+        blocks.add(cases(loads, sign, format, 1, loads.level().name()));
+        blocks.add(cases(loads, sign, format, loads.level().factor(), loads.level().companion() + ", " + loads.level().rule()));
+        blocks.add(new Paragraph("Forces are magnitudes. The wind was taken on the front and on the back and from both ends; where a case is not shown for an end, "
+            + "the end shown is the worse. Torsion is about the middle" + (sign ? " of the posts" : "; the posts are not worked out from it")
+            + "; it is positive when it turns the right side backwards, seen from the front. Loads are rounded up from unrounded values, at display only.",
+            Tone.SMALL));
         blocks.add(zones(item, loads, format));
         if (!loads.posts().isEmpty()) {
             blocks.add(posts(item, loads, format));
@@ -39,32 +42,28 @@ final class CaseTables {
             + format.both(loads.edgeOn().force(), Dimension.FORCE) + ", moment at the ground " + format.both(loads.edgeOn().moment(), Dimension.MOMENT) + ", "
             + loads.level().name() + ".", Tone.PLAIN));
         if (loads.selfWeight() > 0) {
-            blocks.add(new Paragraph("Weight of the boards: " + format.both(loads.selfWeight(), Dimension.FORCE) + ".", Tone.PLAIN));
+            blocks.add(new Paragraph("Weight of the boards: " + format.both(loads.selfWeight(), Dimension.FORCE) + ", unfactored, without posts.", Tone.PLAIN));
         }
         return blocks;
     }
 
-    private static Table cases(Loads loads, Format format, double factor, String level) {
+    private static Table cases(Loads loads, boolean sign, Format format, double factor, String level) {
         List<Row> rows = new ArrayList<>();
         for (CaseAction c : loads.cases()) {
             List<String> governs = new ArrayList<>();
-            if (loads.governing().get("base-moment").equals(c.name())) {
+            if (loads.governs("base-moment") == c) {
                 governs.add("moment");
             }
-            if (loads.governing().get("torsion").equals(c.name()) && c.torsion() != 0) {
+            if (sign && loads.governs("torsion") == c && c.torsion() != 0) {
                 governs.add("torsion");
             }
-            boolean marked = !governs.isEmpty() && c.direction().equals("front");
-            rows.add(new Row(List.of(Format.caseName(c.name()), c.direction() + end(c), format.force(factor * c.force()), format.length(c.height()),
+            boolean marked = !governs.isEmpty();
+            rows.add(new Row(List.of(Format.caseName(c.name()), c.direction() + Format.end(c.windward()), format.force(factor * c.force()), format.length(c.height()),
                 format.moment(factor * c.baseMoment()), torsion(c, factor, format), marked ? String.join(", ", governs) : "-"), marked));
         }
         return new Table("Loads at the ground line, " + level, List.of(new Column("Case", false, 3), new Column("Wind on", false, 4),
             new Column("Force = base shear", true, 3), new Column("Height of force", true, 3), new Column("Base moment", true, 3),
             new Column("Torsion", true, 3), new Column("Governs", false, 3)), rows);
-    }
-
-    private static String end(CaseAction c) {
-        return c.windward() == Windward.NONE ? "" : c.windward() == Windward.LEFT ? ", from the left" : ", from the right";
     }
 
     private static String torsion(CaseAction c, double factor, Format format) {
@@ -74,30 +73,32 @@ final class CaseTables {
     private static Table zones(Item item, Loads loads, Format format) {
         double f = loads.level().factor();
         boolean parts = item.panels().size() > 1;
+        double origin = item.choose(sign -> 0.0, hoarding -> hoarding.length().metres() / 2);
         List<Row> rows = new ArrayList<>();
         for (CaseAction c : loads.cases()) {
-            if (!c.direction().equals("front")) {
-                continue;
-            }
-            for (int i = 0; i < c.zones().size(); i++) {
+            for (int i = 0; i < c.zones().size() && c.direction().equals("front"); i++) {
                 PanelZones panel = c.zones().get(i);
                 Panel of = item.panels().get(i);
+                double start = of.kind() == Panel.Kind.WALL ? panel.left() + origin : 0;
                 for (ZonePressure z : panel.zones()) {
-                    String where = (parts ? panel.part() + ", " : "") + (panel.zones().size() == 1 && !of.kind().equals(Panel.Kind.WALL) ? "whole board" : HoardingDrawing.shortName(z.zone()));
+                    String where = (parts ? panel.part() + ", " : "") + (panel.zones().size() == 1 && of.kind() == Panel.Kind.BOARD ? "whole board"
+                        : HoardingDrawing.shortName(z.zone()));
                     double arm = of.clearance() + of.height() / 2;
-                    rows.add(new Row(List.of(Format.caseName(c.name()), where, format.length(z.from()) + " to " + format.length(z.to()), format.plain(z.coefficient()),
-                        format.pressure(z.pressure()), format.pressure(f * z.pressure()), perMetre(z.pressure() * of.height() * arm, format)), false));
+                    rows.add(new Row(List.of(Format.caseName(c.name()) + Format.end(c.windward()), where, format.length(start + z.from()) + " to "
+                        + format.length(start + z.to()), format.plain(z.coefficient()), format.pressure(z.pressure()), format.pressure(f * z.pressure()),
+                        perMetre(z.pressure() * of.height() * arm, format)), false));
                 }
             }
         }
-        return new Table("Net pressures by zone, both faces together; places are measured from the left edge of the panel",
-            List.of(new Column("Case", false, 3), new Column("Zone", false, 4), new Column("From, to", false, 4), new Column("Coefficient", true, 3),
-                new Column(loads.level().name(), true, 3), new Column(loads.level().companion(), true, 3),
-                new Column("Moment for each " + (format.units() == broadside.quantity.Units.US ? "foot" : "metre"), true, 3)), rows);
+        String per = format.units() == Units.US ? "foot" : "metre";
+        return new Table("Net pressures by zone, both faces together; places are measured from the left end, seen from the front",
+            List.of(new Column("Case", false, 4), new Column("Zone", false, 4), new Column("From, to", false, 4), new Column("Coefficient", true, 3),
+                new Column("Pressure, " + loads.level().name(), true, 3), new Column("Pressure, " + loads.level().companion(), true, 3),
+                new Column("Base moment per " + per + ", " + loads.level().name(), true, 4)), rows);
     }
 
     private static String perMetre(double newtonMetresPerMetre, Format format) {
-        return format.moment(format.units() == broadside.quantity.Units.US ? newtonMetresPerMetre * 0.3048 : newtonMetresPerMetre);
+        return format.moment(format.units() == Units.US ? newtonMetresPerMetre * 0.3048 : newtonMetresPerMetre);
     }
 
     private static Table posts(Item item, Loads loads, Format format) {
@@ -110,13 +111,24 @@ final class CaseTables {
             String carries = p.share().map(s -> format.length(s) + (p.gate() > 0 ? " and " + format.length(p.gate()) + " of gate" : "")).orElse("by statics");
             rows.add(new Row(List.of(Integer.toString(p.post()), format.length(p.position()), p.zone().isEmpty() ? Format.caseName(p.named())
                 : HoardingDrawing.shortName(p.zone()), carries, format.force(p.shear()), format.moment(p.moment()),
-                format.moment(loads.level().factor() * p.moment()), worst ? "worst" : "-"), worst));
+                format.moment(loads.level().factor() * p.moment()), String.join(", ", remarks(p, worst))), worst));
         }
         String more = shown.size() < loads.posts().size() ? ", the worst of each zone of " + loads.posts().size() + " posts" : "";
         return new Table("What reaches the foot of each post, the worst of all cases" + more, List.of(new Column("Post", true, 2),
             new Column(sign ? "From the middle" : "From the left end", true, 3), new Column(sign ? "Case" : "Zone", false, 3), new Column("Carries", false, 5),
             new Column("Shear", true, 3), new Column("Moment, " + loads.level().name(), true, 4), new Column("Moment, " + loads.level().companion(), true, 4),
             new Column("Remark", false, 2)), rows);
+    }
+
+    private static List<String> remarks(PostAction post, boolean worst) {
+        List<String> remarks = new ArrayList<>();
+        if (worst) {
+            remarks.add("worst");
+        }
+        if (post.gate() > 0) {
+            remarks.add("gates shut");
+        }
+        return remarks.isEmpty() ? List.of("-") : remarks;
     }
 
     private static List<PostAction> worstOfEachZone(List<PostAction> posts) {

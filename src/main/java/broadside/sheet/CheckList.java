@@ -139,7 +139,7 @@ final class CheckList {
     private void site(Site site) {
         fact("Code and edition", assessment.code().edition().property("title"));
         fact("Overlay", job.basis().overlay().orElse("none"));
-        fact("Basic wind speed", site.basicSpeed().typed() + " (" + format.speed(site.basicSpeed().metresPerSecond()) + "), " + site.averaging().words()
+        fact("Basic wind speed", Format.speed(site.basicSpeed()) + ", " + site.averaging().words()
             + ", for loads at " + assessment.code().level().name() + " level");
         fact("Return period", site.returnPeriod().map(p -> p.typed()).orElse("as the code's basic speed"));
         fact("Risk category", site.options().word("risk-category").orElse(""));
@@ -164,7 +164,7 @@ final class CheckList {
             }
         }
         fact("Internal pressure", "none: a free-standing panel");
-        fact("Load cases", item.loads().map(l -> String.join(", ", l.cases().stream().map(c -> c.name()).distinct().toList())).orElse("none"));
+        fact("Load cases", item.loads().map(l -> String.join(", ", l.cases().stream().map(c -> Format.caseName(c.name())).distinct().toList())).orElse("none"));
         fact("Wind directions", "front and back, and from both ends");
         group("5 Coefficients, " + item.item().mark());
     }
@@ -172,8 +172,8 @@ final class CheckList {
     private void results() {
         for (ItemResult item : assessment.items()) {
             String mark = item.item().mark();
-            item.loads().ifPresent(l -> fact("Governing case, " + mark, String.join(", ", l.governing().entrySet().stream()
-                .sorted(java.util.Map.Entry.comparingByKey()).map(e -> e.getKey() + ": " + e.getValue()).toList())));
+            item.loads().ifPresent(l -> fact("Governing case, " + mark, String.join(", ", l.governingNames().entrySet().stream()
+                .map(e -> e.getKey().replace('-', ' ') + ": " + Format.caseName(e.getValue())).toList())));
             item.loads().ifPresent(l -> fact("Weight of the boards, " + mark, l.selfWeight() > 0 ? format.force(l.selfWeight()) : ""));
             item.loads().ifPresent(l -> fact("Wind along the face, " + mark, format.force(l.edgeOn().force()) + ", own rule"));
             item.refusal().ifPresent(r -> fact("Outcome, " + mark, "not covered: " + r.code() + ", " + r.clause()));

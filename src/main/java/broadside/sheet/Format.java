@@ -1,10 +1,12 @@
 package broadside.sheet;
 
 import broadside.assess.Job;
+import broadside.codes.LoadCase.Windward;
 import broadside.quantity.Dimension;
 import broadside.quantity.Rounding;
 import broadside.quantity.Show;
 import broadside.quantity.Shown;
+import broadside.quantity.Speed;
 import broadside.quantity.Units;
 import java.util.Locale;
 
@@ -35,6 +37,15 @@ final class Format {
         return name.startsWith("case-") && name.length() == 6 ? name.substring(5).toUpperCase(Locale.ROOT) : name;
     }
 
+    /** The end that the wind meets, as it follows the name of a case. */
+    static String end(Windward windward) {
+        return switch (windward) {
+            case NONE -> "";
+            case LEFT -> ", from the left";
+            case RIGHT -> ", from the right";
+        };
+    }
+
     Units units() {
         return units;
     }
@@ -51,8 +62,11 @@ final class Format {
         return load(pascals, Dimension.PRESSURE);
     }
 
-    String speed(double metresPerSecond) {
-        return Show.of(metresPerSecond, Dimension.SPEED, units, 3, Rounding.NEAREST).text();
+    /** A speed as typed, with the other system in brackets. */
+    static String speed(Speed speed) {
+        String typed = speed.typed().toLowerCase(Locale.ROOT);
+        Units other = typed.contains("mph") || typed.contains("ft/s") ? Units.METRIC : Units.US;
+        return speed.typed() + " (" + Show.of(speed.metresPerSecond(), Dimension.SPEED, other, 3, Rounding.NEAREST).text() + ")";
     }
 
     String length(double metres) {

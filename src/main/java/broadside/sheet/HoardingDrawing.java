@@ -61,7 +61,8 @@ final class HoardingDrawing {
         if (loads.isEmpty()) {
             return;
         }
-        CaseAction governing = zoned(loads.get());
+        CaseAction governing = loads.get().governs("base-moment").zones().stream().anyMatch(p -> p.zones().size() > 1)
+            ? loads.get().governs("base-moment") : zoned(loads.get());
         double most = governing.zones().stream().flatMap(p -> p.zones().stream()).mapToDouble(ZonePressure::pressure).max().orElseThrow();
         double bottom = hoarding.clearance().metres();
         for (PanelZones panel : governing.zones()) {

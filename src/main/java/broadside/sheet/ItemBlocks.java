@@ -1,6 +1,5 @@
 package broadside.sheet;
 
-import broadside.action.PostAction;
 import broadside.assess.Assessment;
 import broadside.assess.ItemResult;
 import broadside.assess.Loads;
@@ -13,10 +12,10 @@ import broadside.sheet.Block.Notes;
 import broadside.sheet.Block.Paragraph;
 import broadside.sheet.Block.Picture;
 import broadside.sheet.Block.Tone;
+import broadside.site.Site;
 import broadside.trace.Status;
 import broadside.trace.Step;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 
 /** The blocks of one item: answer, drawing, cases, posts, what was assumed, what was not checked. */
@@ -29,6 +28,7 @@ final class ItemBlocks {
         } else {
             Loads loads = item.loads().get();
             blocks.add(new Heading(level, "The answer", anchor + "answer"));
+            blocks.add(new Paragraph(wind(assessment, loads, format), Tone.PLAIN));
             blocks.add(answer(assessment, item, loads, format));
             overrides(item).forEach(blocks::add);
         }
@@ -50,22 +50,42 @@ final class ItemBlocks {
         List<Fact> lines = new ArrayList<>();
         String companion = loads.level().companion();
         double f = loads.level().factor();
-        var governing = loads.governs("base-moment");
-        lines.add(Fact.of("What governs", governing.label(), assessment.code().edition().property("title")));
+        lines.add(Fact.of("What governs", governs(item, loads), loads.governs("base-moment").label()));
         lines.add(Fact.of("Wind force", format.both(loads.governs("base-shear").force(), Dimension.FORCE) + ", " + loads.level().name(),
             format.force(f * loads.governs("base-shear").force()) + " " + companion));
         lines.add(moment(loads, format, f, companion));
         double torsion = Math.abs(loads.governs("torsion").torsion());
         if (item.item().choose(sign -> true, hoarding -> false) && torsion > 0) {
             lines.add(Fact.of("Torsion about the middle of the posts", format.both(torsion, Dimension.MOMENT) + ", " + loads.level().name(),
-                format.moment(f * torsion) + " " + companion + ", " + Format.caseWords(loads.governing().get("torsion"))));
+                format.moment(f * torsion) + " " + companion + ", " + Format.caseWords(loads.governs("torsion").name())));
         }
         lines.add(Fact.of("How sure", sure(item), "loads only: no post, footing or ground was checked"));
         return new Answer(lines);
     }
 
+    /** The wind on one line: speed with its averaging time, terrain, and what it comes to. */
+    private static String wind(Assessment assessment, Loads loads, Format format) {
+        Site site = assessment.job().site();
+        return "Wind: " + Format.speed(site.basicSpeed()) + ", " + site.averaging().words() + site.returnPeriod().map(p -> ", " + p.typed()).orElse("")
+            + "; terrain " + site.ground().terrain() + "; velocity pressure " + format.both(loads.velocity().pressure(), Dimension.PRESSURE) + " at "
+            + format.length(loads.velocity().height()) + ", " + loads.level().name() + ".";
+    }
+
+    /** Which case governs what; one name when one case governs all. */
+    private static String governs(ItemResult item, Loads loads) {
+        boolean sign = item.item().choose(s -> true, h -> false);
+        String base = Format.caseName(loads.governs("base-moment").name());
+        String post = loads.worstPost().map(p -> Format.caseName(p.named())).orElse(base);
+        String torsion = sign && loads.governs("torsion").torsion() != 0 ? Format.caseName(loads.governs("torsion").name()) : base;
+        if (post.equals(base) && torsion.equals(base)) {
+            return "case " + base;
+        }
+        String rest = post.equals(torsion) ? "posts and torsion: " + post : "posts: " + post + "; torsion: " + torsion;
+        return "base moment: case " + base + "; " + (sign ? rest : "posts: " + post);
+    }
+
     private static Fact moment(Loads loads, Format format, double f, String companion) {
-        return loads.posts().stream().max(Comparator.comparingDouble(PostAction::moment))
+        return loads.worstPost()
             .map(p -> Fact.of("Moment at the foot of the worst post", format.both(p.moment(), Dimension.MOMENT) + ", " + loads.level().name(),
                 format.moment(f * p.moment()) + " " + companion + ", post " + p.post() + ", " + Format.caseWords(p.named())))
             .orElseGet(() -> Fact.of("Moment at the ground, whole length", format.both(loads.governs("base-moment").baseMoment(), Dimension.MOMENT) + ", "
@@ -96,8 +116,10 @@ final class ItemBlocks {
     }
 
     private static String caption(ItemResult item) {
-        return item.loads().isEmpty() ? "Drawn to scale, dimensions as typed." : "Drawn to scale, dimensions as typed. Hatched the denser the higher the "
-            + "pressure; F is where the force of the governing case acts, seen from the front in the worst torsion case.";
+        return "Drawn to scale, dimensions as typed." + item.loads().map(l -> " Hatched the denser the higher the pressure, zones as in "
+            + Format.caseWords(l.governs("base-moment").name()) + Format.end(l.governs("base-moment").windward())
+            + item.item().choose(sign -> "; the circle is where the force acts in " + Format.caseWords(l.governs("torsion").name())
+                + Format.end(l.governs("torsion").windward()), hoarding -> "") + ".").orElse("");
     }
 
     private static Notes notes(ItemResult item, Note.Kind... kinds) {

@@ -45,7 +45,9 @@ public final class ItemDrawing {
 
     /** Its text. */
     static String barText(double metres, Format format) {
-        return format.units() == Units.US ? Math.round(metres / 0.3048 * 10) / 10.0 + " ft" : format.length(metres);
+        double feet = Math.round(metres / 0.3048 * 10) / 10.0;
+        return "scale, " + (format.units() == Units.US ? (feet == Math.rint(feet) ? Long.toString((long) feet) : Double.toString(feet)) + " ft"
+            : format.length(metres));
     }
 
     private ItemDrawing() { }

@@ -17,7 +17,7 @@ import java.util.Optional;
 final class SignDrawing {
 
     private static final double TALLEST = 145;
-    private static final double ROOM = 250;
+    private static final double ROOM = 220;
 
     private final PostSign sign;
     private final Optional<Loads> loads;
@@ -42,7 +42,7 @@ final class SignDrawing {
         double scale = Math.min(TALLEST / top, ROOM / (right - left));
         double tall = top * scale;
         double ground = 46 + tall;
-        double margin = 78;
+        double margin = sign.boards().size() == 1 ? 78 : 110;
         Canvas front = new Canvas(margin - left * scale, ground, scale);
         front.ground(margin - 30, margin + (right - left) * scale + 30);
         posts(front);
@@ -125,11 +125,17 @@ final class SignDrawing {
             double w = board.width().metres();
             double at = boards.size() == 1 ? front.y(y + h) - 8 : front.y(y + h) + 11;
             double middle = board.offset().metres();
+            String aside = middle == 0 ? "" : middle > 0 ? ", " + board.offset().typed() + " to the right" : ", " + board.offset().typed().replace("-", "")
+                + " to the left";
             if (boards.size() == 1) {
-                front.across(middle - w / 2, middle + w / 2, at, board.width().typed());
+                front.across(middle - w / 2, middle + w / 2, at, board.width().typed() + aside);
             } else {
-                front.text(front.x(middle + w / 2) + 5, front.y(y + h / 2) + 3, board.width().typed() + " wide", Anchor.START, Ink.BLACK);
+                front.text(front.x(middle + w / 2) + 5, front.y(y + h / 2) + 3, board.width().typed() + " wide" + aside, Anchor.START, Ink.BLACK);
             }
+        }
+        if (boards.size() > 1) {
+            front.help(dim - 42, front.y(top), dim, front.y(top));
+            front.upward(0, top, dim - 38, format.length(top));
         }
         List<Double> posts = sign.posts().positions();
         if (posts.size() > 1) {

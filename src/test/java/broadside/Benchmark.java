@@ -1,0 +1,125 @@
+package broadside;
+
+import broadside.assess.Job;
+import broadside.report.Attachment;
+import broadside.report.Paper;
+import broadside.report.PdfWriter;
+import broadside.sheet.Sheet;
+import broadside.sheet.SheetMaker;
+import com.sun.management.ThreadMXBean;
+import java.io.ByteArrayOutputStream;
+import java.io.IOException;
+import java.lang.management.ManagementFactory;
+import java.net.URI;
+import java.net.http.HttpClient;
+import java.net.http.HttpRequest;
+import java.net.http.HttpResponse;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Locale;
+import java.util.concurrent.Callable;
+
+/** Measures what the tool must reach and prints a table. Run by the command in DEVELOPERS.md, never by the tests. */
+public final class Benchmark {
+
+    private static final Path JAR = Path.of("target", "broadside.jar");
+
+    public static void main(String[] args) throws Exception {
+        System.out.printf(Locale.ROOT, "%-52s %12s %12s%n", "what", "measured", "at most");
+        Job job = AllJobs.demo("entrance-sign.json");
+        warm("assessment of one post sign, full trace, warm", 0.2, 20_000, () -> AllJobs.assess(job));
+        pdf(job);
+        if (!Files.exists(JAR)) {
+            System.out.println("no " + JAR + ": run mvn -q -DskipTests package for the rows of whole processes");
+            return;
+        }
+        row("check of one job, whole process", median(5, Benchmark::checkProcess), 700, "ms");
+        row("first page after start, plain JVM", median(5, Benchmark::firstPage), 2000, "ms");
+    }
+
+    private static void pdf(Job job) throws Exception {
+        PdfWriter writer = new PdfWriter();
+        Attachment attachment = new Attachment("job.json", "the job", AllJobs.files().get("entrance-sign.json"));
+        Callable<Integer> task = () -> {
+            ByteArrayOutputStream out = new ByteArrayOutputStream(200_000);
+            Sheet sheet = SheetMaker.of(AllJobs.assess(job), "2026-12-01");
+            writer.write(sheet, Paper.A4, attachment, out);
+            return out.size();
+        };
+        warm("PDF of that job, assessment and sheet included, warm", 10, 300, task);
+        ThreadMXBean threads = (ThreadMXBean) ManagementFactory.getThreadMXBean();
+        long before = threads.getCurrentThreadAllocatedBytes();
+        for (int i = 0; i < 20; i++) {
+            task.call();
+        }
+        row("  allocated for it", (threads.getCurrentThreadAllocatedBytes() - before) / 20.0 / 1e6, 10, "MB");
+    }
+
+    private static void warm(String what, double most, int times, Callable<?> task) throws Exception {
+        for (int i = 0; i < times; i++) {
+            task.call();
+        }
+        double[] millis = new double[times];
+        for (int i = 0; i < times; i++) {
+            long start = System.nanoTime();
+            task.call();
+            millis[i] = (System.nanoTime() - start) / 1e6;
+        }
+        Arrays.sort(millis);
+        row(what + ", median", millis[times / 2], most, "ms");
+    }
+
+    private static double checkProcess() throws IOException, InterruptedException {
+        long start = System.nanoTime();
+        Process process = java("check", "examples/entrance-sign.json").redirectOutput(ProcessBuilder.Redirect.DISCARD).start();
+        process.waitFor();
+        return (System.nanoTime() - start) / 1e6;
+    }
+
+    private static double firstPage() throws IOException, InterruptedException {
+        int port = 20_000 + (int) (System.nanoTime() % 20_000);
+        long start = System.nanoTime();
+        Process process = java("serve", "--port", Integer.toString(port)).redirectOutput(ProcessBuilder.Redirect.DISCARD).start();
+        HttpClient client = HttpClient.newHttpClient();
+        try {
+            while (true) {
+                try {
+                    client.send(HttpRequest.newBuilder(URI.create("http://127.0.0.1:" + port + "/")).build(), HttpResponse.BodyHandlers.ofString());
+                    return (System.nanoTime() - start) / 1e6;
+                } catch (IOException notYet) {
+                    Thread.sleep(5);
+                }
+            }
+        } finally {
+            process.destroy();
+            process.waitFor();
+        }
+    }
+
+    private static ProcessBuilder java(String... command) {
+        List<String> line = new java.util.ArrayList<>(List.of(Path.of(System.getProperty("java.home"), "bin", "java").toString(), "-jar", JAR.toString()));
+        line.addAll(List.of(command));
+        return new ProcessBuilder(line).redirectError(ProcessBuilder.Redirect.DISCARD);
+    }
+
+    private interface Timed {
+        double run() throws IOException, InterruptedException;
+    }
+
+    private static double median(int times, Timed task) throws IOException, InterruptedException {
+        double[] millis = new double[times];
+        for (int i = 0; i < times; i++) {
+            millis[i] = task.run();
+        }
+        Arrays.sort(millis);
+        return millis[times / 2];
+    }
+
+    private static void row(String what, double measured, double most, String unit) {
+        System.out.printf(Locale.ROOT, "%-52s %9.3f %s %9.1f %s%n", what, measured, unit, most, unit);
+    }
+
+    private Benchmark() { }
+}
