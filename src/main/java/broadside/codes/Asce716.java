@@ -5,6 +5,7 @@ import broadside.site.Averaging;
 import broadside.site.Site;
 import broadside.table.Coefficient;
 import broadside.table.Edition;
+import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.List;
 import java.util.Map;
@@ -61,7 +62,9 @@ final class Asce716 implements WindCode {
 
     @Override
     public double velocityPressure(Site site, double height, Trace trace) {
-        return velocity.pressure(site, height, trace);
+        return trace.once("velocity pressure at " + height + " m", () -> velocity.pressure(site, height, trace), known ->
+            trace.line("velocity-pressure", "q_h", "velocity pressure at the same height as above").in("q_h", known, "Pa")
+                .from("as above", Status.DERIVED).gives("q_h", known, "Pa"));
     }
 
     @Override

@@ -6,6 +6,7 @@ import broadside.site.Site;
 import broadside.table.Edition;
 import broadside.table.Rows;
 import broadside.table.Source;
+import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.List;
 import java.util.Optional;
@@ -68,7 +69,9 @@ final class En1991 implements WindCode {
 
     @Override
     public double velocityPressure(Site site, double height, Trace trace) {
-        return wind.peakPressure(site, height, trace);
+        return trace.once("velocity pressure at " + height + " m", () -> wind.peakPressure(site, height, trace), known ->
+            trace.line("velocity-pressure", "q_p", "velocity pressure at the same height as above").in("q_p", known, "Pa")
+                .from("as above", Status.DERIVED).gives("q_p", known, "Pa"));
     }
 
     @Override

@@ -92,9 +92,9 @@ final class CaseTables {
         }
         String per = format.units() == Units.US ? "foot" : "metre";
         return new Table("Net pressures by zone, both faces together; places are measured from the left end, seen from the front",
-            List.of(new Column("Case", false, 4), new Column("Zone", false, 4), new Column("From, to", false, 4), new Column("Coefficient", true, 3),
+            List.of(new Column("Case", false, 6), new Column("Zone", false, 4), new Column("From, to", false, 6), new Column("Coefficient", true, 3),
                 new Column("Pressure, " + loads.level().name(), true, 3), new Column("Pressure, " + loads.level().companion(), true, 3),
-                new Column("Base moment per " + per + ", " + loads.level().name(), true, 4)), rows);
+                new Column("Moment per " + per + ", " + loads.level().name(), true, 4)), rows);
     }
 
     private static String perMetre(double newtonMetresPerMetre, Format format) {

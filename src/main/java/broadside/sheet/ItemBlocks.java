@@ -80,8 +80,11 @@ final class ItemBlocks {
         if (post.equals(base) && torsion.equals(base)) {
             return "case " + base;
         }
-        String rest = post.equals(torsion) ? "posts and torsion: " + post : "posts: " + post + "; torsion: " + torsion;
-        return "base moment: case " + base + "; " + (sign ? rest : "posts: " + post);
+        if (post.equals(base)) {
+            return "case " + base + "; torsion: case " + torsion;
+        }
+        return "case " + base + "; " + (post.equals(torsion) ? "posts and torsion: case " + post
+            : "posts: case " + post + (torsion.equals(base) ? "" : "; torsion: case " + torsion));
     }
 
     private static Fact moment(Loads loads, Format format, double f, String companion) {

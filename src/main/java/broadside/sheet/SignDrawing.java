@@ -16,7 +16,7 @@ import java.util.Optional;
 /** Elevation and side view of a sign on posts. */
 final class SignDrawing {
 
-    private static final double TALLEST = 145;
+    private static final double TALLEST = 138;
     private static final double ROOM = 220;
 
     private final PostSign sign;

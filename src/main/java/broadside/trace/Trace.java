@@ -1,10 +1,14 @@
 package broadside.trace;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.DoubleSupplier;
+import java.util.function.DoubleUnaryOperator;
 
 /**
  * The calculation sheet of one item. Recording a step hands its value back, so the sheet is the calculation:
@@ -19,6 +23,7 @@ public final class Trace {
     private final List<Step> steps;
     private final List<OwnValue> overrides;
     private final Set<String> used;
+    private final Map<String, Double> found;
     private final String suffix;
 
     public Trace() {
@@ -26,20 +31,37 @@ public final class Trace {
     }
 
     public Trace(List<OwnValue> overrides) {
-        this(new ArrayList<>(), new ArrayList<>(), List.copyOf(overrides), new HashSet<>(), "");
+        this(new ArrayList<>(), new ArrayList<>(), List.copyOf(overrides), new HashSet<>(), new HashMap<>(), "");
     }
 
-    private Trace(List<Given> givens, List<Step> steps, List<OwnValue> overrides, Set<String> used, String suffix) {
+    private Trace(List<Given> givens, List<Step> steps, List<OwnValue> overrides, Set<String> used, Map<String, Double> found, String suffix) {
         this.givens = givens;
         this.steps = steps;
         this.overrides = overrides;
         this.used = used;
+        this.found = found;
         this.suffix = suffix;
     }
 
     /** The same sheet, with {@code part} behind a slash in the name of each step that is recorded through it. */
     public Trace part(String part) {
-        return part.isEmpty() ? this : new Trace(givens, steps, overrides, used, suffix + "/" + part);
+        return part.isEmpty() ? this : new Trace(givens, steps, overrides, used, found, suffix + "/" + part);
+    }
+
+    /**
+     * Works a value out the first time and takes it over later, so that parts which share it do not repeat its steps.
+     *
+     * @param key    what the value depends on
+     * @param first  works it out and records it
+     * @param again  records that it is taken over
+     */
+    public double once(String key, DoubleSupplier first, DoubleUnaryOperator again) {
+        if (found.containsKey(key)) {
+            return again.applyAsDouble(found.get(key));
+        }
+        double value = first.getAsDouble();
+        found.put(key, value);
+        return value;
     }
 
     /** Notes a value that the user gave and hands it back. */
