@@ -19,13 +19,17 @@ public final class FootActions {
     /** The actions of every case, front and back, and the combinations that posts are worked out from. */
     public record Result(List<CaseAction> cases, List<Combined> combinations) { }
 
-    /** A combination in the hands of other packages: opaque, but named. */
+    /** A combination in the hands of other packages, with the force and moment that were recorded for it. */
     public static final class Combined {
 
         private final Combination combination;
+        private final double force;
+        private final double moment;
 
-        Combined(Combination combination) {
+        Combined(Combination combination, CaseAction recorded) {
             this.combination = combination;
+            this.force = recorded.force();
+            this.moment = recorded.baseMoment();
         }
 
         Combination combination() {
@@ -38,12 +42,12 @@ public final class FootActions {
 
         /** Force on all panels, N. */
         public double force() {
-            return combination.force();
+            return force;
         }
 
         /** Moment at the ground line, N m. */
         public double moment() {
-            return combination.moment();
+            return moment;
         }
     }
 
@@ -54,15 +58,23 @@ public final class FootActions {
     public static Result of(List<PanelCases> panels, PanelSymbols symbols, Trace trace) {
         List<Combination> all = Combination.all(panels);
         List<CaseAction> cases = new ArrayList<>();
+        List<Combined> combinations = new ArrayList<>();
         for (String name : all.stream().map(Combination::name).distinct().toList()) {
             List<Combination> ends = all.stream().filter(c -> c.name().equals(name)).toList();
             Combination worst = ends.stream().reduce(Combination::worse).orElseThrow();
             CaseAction front = record(worst, "", symbols, trace);
             add(cases, front);
-            ends.stream().filter(c -> c != worst && c.zoned()).forEach(c -> add(cases, c.mirrors(worst) ? front.fromOtherEnd(zones(c))
-                : record(c, c.windward() == Windward.LEFT ? "from-left" : "from-right", symbols, trace)));
+            for (Combination end : ends) {
+                boolean unlike = end != worst && end.zoned();
+                CaseAction action = !unlike ? front : end.mirrors(worst) ? front.fromOtherEnd(zones(end))
+                    : record(end, end.windward() == Windward.LEFT ? "from-left" : "from-right", symbols, trace);
+                if (unlike) {
+                    add(cases, action);
+                }
+                combinations.add(new Combined(end, action));
+            }
         }
-        return new Result(cases, all.stream().map(Combined::new).toList());
+        return new Result(cases, combinations);
     }
 
     private static void add(List<CaseAction> cases, CaseAction front) {

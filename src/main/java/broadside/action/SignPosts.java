@@ -16,7 +16,6 @@ public final class SignPosts {
 
     /** Works out and records each post in the combination that is worst for its moment. */
     public static List<PostAction> of(List<Double> positions, List<FootActions.Combined> combinations, Trace trace) {
-        List<Combination> all = combinations.stream().map(FootActions.Combined::combination).toList();
         double spread = positions.stream().mapToDouble(x -> x * x).sum();
         List<PostAction> posts = new ArrayList<>();
         if (positions.size() > 1) {
@@ -26,7 +25,7 @@ public final class SignPosts {
         }
         for (int i = 0; i < positions.size(); i++) {
             double x = positions.get(i);
-            Combination worst = all.stream()
+            FootActions.Combined worst = combinations.stream()
                 .max(Comparator.comparingDouble(c -> Math.abs(moment(c, x, positions.size(), spread)))).orElseThrow();
             posts.add(record(i + 1, x, positions.size(), spread, worst, trace));
         }
@@ -39,14 +38,14 @@ public final class SignPosts {
         return posts;
     }
 
-    private static double moment(Combination c, double x, int count, double spread) {
-        return c.moment() / count + (spread == 0 ? 0 : c.couple() * x / spread);
+    private static double moment(FootActions.Combined c, double x, int count, double spread) {
+        return c.moment() / count + (spread == 0 ? 0 : c.combination().couple() * x / spread);
     }
 
-    private static PostAction record(int post, double x, int count, double spread, Combination worst, Trace trace) {
+    private static PostAction record(int post, double x, int count, double spread, FootActions.Combined worst, Trace trace) {
         String part = Integer.toString(post);
-        double force = trace.find("force/" + worst.name()).orElseThrow().value();
-        double moment = trace.find("base-moment/" + worst.name()).orElseThrow().value();
+        double force = worst.force();
+        double moment = worst.moment();
         if (count == 1) {
             double v = trace.line("post-shear/1", "F_{p1}", "shear at the foot of the post").in("F", force, "N").from(STATICS, Status.DERIVED)
                 .gives("F", force, "N");
@@ -55,8 +54,8 @@ public final class SignPosts {
             return new PostAction(1, x, "", 0, java.util.Optional.empty(), worst.name(), v, m);
         }
         trace.given("x_{" + part + "}", "post " + part + " from the middle of the posts, to the right", x, "m", "");
-        double t = couple("M_T", "torsion of case " + worst.name() + ", wind meeting the " + end(worst), worst.torsion(), "post-couple/torsion/" + part, trace);
-        double j = couple("J", "sum of force, height and side distance in the same case", worst.couple(), "post-couple/moment/" + part, trace);
+        double t = couple("M_T", "torsion of case " + worst.name() + ", wind meeting the " + end(worst), worst.combination().torsion(), "post-couple/torsion/" + part, trace);
+        double j = couple("J", "sum of force, height and side distance in the same case", worst.combination().couple(), "post-couple/moment/" + part, trace);
         double v = trace.line("post-shear/" + part, "F_{p" + part + "}", "shear at the foot of post " + part).in("F", force, "N").in("n", count)
             .in("M_T", t, "N m").in("x_{" + part + "}", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
             .gives("abs(F / n + M_T x_{" + part + "} / S)", Math.abs(force / count + t * x / spread), "N");
@@ -66,8 +65,8 @@ public final class SignPosts {
         return new PostAction(post, x, "", 0, java.util.Optional.empty(), worst.name(), v, m);
     }
 
-    private static String end(Combination worst) {
-        return switch (worst.windward()) {
+    private static String end(FootActions.Combined worst) {
+        return switch (worst.combination().windward()) {
             case LEFT -> "left end";
             case RIGHT -> "right end";
             case NONE -> "face square on";
@@ -82,14 +81,13 @@ public final class SignPosts {
 
     /** Sums of the posts' shears, N, and moments, N m, in one combination, each post worked out by itself. */
     public static double[] sums(FootActions.Combined combined, List<Double> positions) {
-        Combination c = combined.combination();
         int count = positions.size();
         double spread = positions.stream().mapToDouble(x -> x * x).sum();
         double shear = 0;
         double moment = 0;
         for (double x : positions) {
-            shear += c.force() / count + (spread == 0 ? 0 : c.torsion() * x / spread);
-            moment += moment(c, x, count, spread);
+            shear += combined.force() / count + (spread == 0 ? 0 : combined.combination().torsion() * x / spread);
+            moment += moment(combined, x, count, spread);
         }
         return new double[] {shear, moment};
     }

@@ -63,7 +63,14 @@ public final class Assessor {
     public Assessment assess(Job job) {
         WindCode code = codes.code(job.basis().key()).orElseThrow(() -> new BadJob(List.of(new Problem("basis.code",
             "\"" + job.basis().key() + "\" is not among the codes: " + String.join(", ", codes.editions())))));
-        List<ItemResult> results = job.items().stream().map(item -> assess(job, item, code)).toList();
+        List<ItemResult> results = new ArrayList<>();
+        for (int i = 0; i < job.items().size(); i++) {
+            try {
+                results.add(assess(job, job.items().get(i), code));
+            } catch (ArithmeticException e) {
+                throw new BadJob(List.of(new Problem("items[" + i + "]", "the values given lead to no result: " + e.getMessage())));
+            }
+        }
         checkOverrides(job, results);
         return new Assessment(job, code, results, about);
     }
@@ -71,11 +78,11 @@ public final class Assessor {
     private static void checkOverrides(Job job, List<ItemResult> results) {
         Set<OwnValue> used = new HashSet<>();
         results.forEach(r -> used.addAll(r.sheet().overridesUsed()));
-        boolean complete = results.stream().allMatch(r -> r.outcome() == Outcome.ASSESSED);
+        boolean any = results.stream().anyMatch(r -> r.outcome() == Outcome.ASSESSED);
         List<Problem> problems = new ArrayList<>();
         for (int i = 0; i < job.overrides().size(); i++) {
             OwnValue own = job.overrides().get(i);
-            if (complete && !used.contains(own)) {
+            if (any && !used.contains(own)) {
                 Set<String> names = new java.util.TreeSet<>();
                 results.forEach(r -> r.sheet().steps().stream().filter(s -> s.unit().equals(own.unit())).forEach(s -> names.add(s.name())));
                 problems.add(new Problem("overrides[" + i + "].name", "\"" + own.name() + "\" is not a step of this calculation with the unit "

@@ -24,6 +24,10 @@ public final class JobReader {
     /** Most items in one job file; a longer list is a schedule. */
     static final int MOST_ITEMS = 200;
 
+    /** Values set in place of calculated ones lie between these, in SI. */
+    private static final double LEAST_OVERRIDE = 1e-6;
+    private static final double MOST_OVERRIDE = 1e9;
+
     private final CodeLibrary codes;
     private final SpeedConversion conversion;
 
@@ -56,7 +60,7 @@ public final class JobReader {
         Optional<Job.Basis> basis = values.object("basis").flatMap(v -> basis(v, problems));
         Optional<Site> site = values.object("site").flatMap(v -> new SiteReader(codes, conversion, problems).read(v, basis));
         List<Item> items = items(values, problems);
-        List<OwnValue> overrides = values.list("overrides").stream().flatMap(v -> override(v).stream()).toList();
+        List<OwnValue> overrides = overrides(values.list("overrides"), problems);
         if (!problems.isEmpty()) {
             return new Result(Optional.empty(), List.copyOf(problems));
         }
@@ -100,6 +104,20 @@ public final class JobReader {
             reader.read(item).ifPresent(items::add);
         }
         return items;
+    }
+
+    private static List<OwnValue> overrides(List<Values> list, List<Problem> problems) {
+        List<OwnValue> overrides = new ArrayList<>();
+        Set<String> names = new HashSet<>();
+        for (Values each : list) {
+            Optional<OwnValue> own = override(each);
+            own.filter(o -> !names.add(o.name())).ifPresent(o -> problems.add(new Problem(each.at("name"), "\"" + StructureReader.clean(o.name())
+                + "\" stands twice; a value is replaced once")));
+            own.filter(o -> !(o.value() >= LEAST_OVERRIDE && o.value() <= MOST_OVERRIDE)).ifPresent(o -> problems.add(new Problem(each.at("value"),
+                "must be above 0 and of a usual size; " + o.value() + " " + o.unit().replace("1", "") + " is not")));
+            own.ifPresent(overrides::add);
+        }
+        return overrides;
     }
 
     /** An older word for the topographic factor is kept. */

@@ -58,12 +58,20 @@ public final class JobText {
         return MAPPER;
     }
 
+    /** The parser's message without the names of its own parts. */
     private static String plain(String message) {
-        String first = message.lines().findFirst().orElse("this is not JSON").strip();
+        String first = message.lines().findFirst().orElse("").strip();
         if (first.startsWith("Duplicate")) {
             return first.replace("Duplicate Object property", "the key") + " stands twice";
         }
-        return "this is not JSON: " + (first.length() > 160 ? first.substring(0, 160) : first);
+        if (first.contains("nesting depth")) {
+            return "objects are nested too deep for a job file";
+        }
+        if (first.contains("exceeds the maximum")) {
+            return "a text or number is too long for a job file";
+        }
+        String cut = first.replaceAll("\\s*[(\\[].*$", "").replaceAll(": (expected|was expecting|maybe).*$", "");
+        return "this is not JSON" + (cut.isBlank() ? "" : ": " + StructureReader.clean(cut));
     }
 
     private JobText() { }

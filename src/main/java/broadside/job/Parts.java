@@ -31,8 +31,8 @@ final class Parts {
 
     private Trace convertSpeed(JsonNode given) {
         Reading reading = Typed.read(PublishedChecks.text(given, "speed"), Dimension.SPEED);
-        if (!(reading instanceof Reading.Value value)) {
-            throw PublishedChecks.bad("speed: a speed is typed with its unit, like \"80 mph\"");
+        if (!(reading instanceof Reading.Value value) || !(value.si() > 0)) {
+            throw PublishedChecks.bad("speed: a speed above zero is typed with its unit, like \"80 mph\"");
         }
         String terrain = PublishedChecks.text(given, "terrain");
         if (!terrain.isEmpty() && !terrain.equals("open")) {

@@ -38,7 +38,7 @@ record Printed(double si, Optional<Unit> unit, String text) {
 
     /** The tolerance in SI: an amount in the same form, or a percentage of the printed value. */
     double tolerance(JsonNode node) {
-        if (node.isNumber() && Double.isFinite(node.doubleValue())) {
+        if (node.isNumber() && node.doubleValue() >= 0 && Double.isFinite(node.doubleValue())) {
             return node.doubleValue() * factor();
         }
         String typed = node.isString() ? node.stringValue().strip() : "";
@@ -49,10 +49,10 @@ record Printed(double si, Optional<Unit> unit, String text) {
             }
             return Math.abs(si) * Double.parseDouble(number) / 100;
         }
-        if (unit.isPresent() && Typed.read(typed, unit.get().dimension()) instanceof Reading.Value value) {
+        if (unit.isPresent() && Typed.read(typed, unit.get().dimension()) instanceof Reading.Value value && value.si() >= 0) {
             return value.si();
         }
-        throw PublishedChecks.bad("within \"" + StructureReader.clean(typed) + "\" must be an amount in the form of the value, or a percentage");
+        throw PublishedChecks.bad("within \"" + StructureReader.clean(typed) + "\" must be an amount not below zero in the form of the value, or a percentage");
     }
 
     /** A value in SI, shown in the printed unit. */

@@ -58,12 +58,15 @@ public final class PublishedChecks {
     private PublishedCheck run(String name, JsonNode file) {
         String title = text(file, "title");
         JsonNode source = file.path("source");
-        Optional<Status> status = Status.of(text(source, "status"));
+        Optional<Status> status = Status.of(text(source, "status")).filter(s -> s != Status.GIVEN);
         JsonNode expected = file.path("expected");
         if (title.isEmpty() || status.isEmpty() || !expected.isArray() || expected.isEmpty() || !file.path("given").isObject()) {
             return broken(name, "a published check has title, source with a status, given and a list of expected values");
         }
         PublishedCheck.Source printed = new PublishedCheck.Source(text(source, "publication"), text(source, "edition"), text(source, "place"), status.get());
+        if (file.has("trap") && !file.get("trap").isBoolean()) {
+            return broken(name, "trap must be true or false, without quotation marks");
+        }
         boolean trap = file.path("trap").isBoolean() && file.path("trap").booleanValue();
         List<PublishedCheck.Line> lines = new ArrayList<>();
         Sheets sheets = sheets(file.get("given"));
@@ -92,6 +95,8 @@ public final class PublishedChecks {
             return new Sheets(sheets, failures);
         } catch (BadJob e) {
             return new Sheets(Map.of(), Map.of("", e.problems().get(0).line()));
+        } catch (ArithmeticException e) {
+            return new Sheets(Map.of(), Map.of("", "the calculation has no result: " + e.getMessage()));
         }
     }
 

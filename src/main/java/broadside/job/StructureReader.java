@@ -111,7 +111,11 @@ final class StructureReader {
         }
         Reading reading = Typed.read(node.stringValue(), dimension);
         if (reading instanceof Reading.Value read) {
-            values.put(field.name(), Typed.quantity(dimension, read.si(), read.typed().strip()));
+            if (read.warnings().isEmpty()) {
+                values.put(field.name(), Typed.quantity(dimension, read.si(), read.typed().strip()));
+            } else {
+                problem(path, read.warnings().get(0) + "; type it so that there is one reading only");
+            }
         } else if (reading instanceof Reading.Ambiguous open) {
             problems.add(new Problem(path, open.problem(), open.options()));
         } else {
@@ -124,7 +128,7 @@ final class StructureReader {
             number(values, field, node, path);
             return;
         }
-        for (Dimension dimension : List.of(Dimension.PRESSURE, Dimension.SPEED, Dimension.LENGTH, Dimension.DENSITY)) {
+        for (Dimension dimension : List.of(Dimension.PRESSURE, Dimension.FORCE, Dimension.MOMENT, Dimension.SPEED, Dimension.LENGTH, Dimension.DENSITY)) {
             if (node.isString() && Typed.read(node.stringValue(), dimension) instanceof Reading.Value read) {
                 Quantity quantity = Typed.quantity(dimension, read.si(), read.typed());
                 values.put(field.name(), quantity);

@@ -19,6 +19,9 @@ import java.util.function.Function;
 public record Hoarding(String mark, Length length, Length height, Length clearance, double solidity, Length returnLeft,
                        Length returnRight, List<Gate> gates, Optional<Length> spacing, List<Carrying> carrying) implements Item {
 
+    /** A stretch narrower than this comes from binary rounding or is no hoarding, m. */
+    private static final double NARROWEST = 0.005;
+
     /** An opening; {@code from} is measured from the left end. */
     public record Gate(Length from, Length width) {
         public double end() {
@@ -47,12 +50,12 @@ public record Hoarding(String mark, Length length, Length height, Length clearan
         List<double[]> stretches = new ArrayList<>();
         double start = 0;
         for (Gate gate : gates) {
-            if (gate.from().metres() > start) {
+            if (gate.from().metres() > start + NARROWEST) {
                 stretches.add(new double[] {start, gate.from().metres()});
             }
             start = gate.end();
         }
-        if (start < length.metres()) {
+        if (start < length.metres() - NARROWEST) {
             stretches.add(new double[] {start, length.metres()});
         }
         List<Panel> panels = new ArrayList<>();
@@ -69,7 +72,7 @@ public record Hoarding(String mark, Length length, Length height, Length clearan
 
     private Panel panel(String part, double from, double to) {
         double left = from == 0 ? returnLeft.metres() : 0;
-        double right = to == length.metres() ? returnRight.metres() : 0;
+        double right = Math.abs(to - length.metres()) < NARROWEST ? returnRight.metres() : 0;
         return new Panel(part, Panel.Kind.WALL, to - from, height.metres(), clearance.metres(),
             (from + to) / 2 - length.metres() / 2, solidity, left, right,
             new Panel.AsTyped(from == 0 && to == length.metres() ? length.typed() : "", height.typed(), clearance.typed(), ""));

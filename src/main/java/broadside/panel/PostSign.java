@@ -39,9 +39,11 @@ public record PostSign(String mark, List<Board> boards, int faces, Posts posts, 
         return panels;
     }
 
-    /** Name of a board in steps and tables; empty when it is the only one. */
+    /** Name of a board in steps and tables: its mark where no other board has it, else its number; empty when it is the only one. */
     public String part(int index) {
         String own = boards.get(index).mark();
-        return boards.size() == 1 ? "" : own.isEmpty() ? Integer.toString(index + 1) : own;
+        boolean alone = boards.stream().filter(b -> b.mark().equals(own)).count() == 1;
+        return boards.size() == 1 ? "" : own.isEmpty() ? Integer.toString(index + 1)
+            : alone && !own.matches("\\d+") ? own : (index + 1) + " " + own;
     }
 }

@@ -2,6 +2,8 @@ package broadside.table;
 
 import java.util.HashMap;
 import java.util.Map;
+import java.util.Set;
+import java.util.TreeSet;
 
 /** What holds beyond the printed ends of each axis: refused, unless the table itself prints its last value as going on. */
 record Ends(Map<String, String> lastValueBelow, Map<String, String> lastValueAbove) {
@@ -32,6 +34,13 @@ record Ends(Map<String, String> lastValueBelow, Map<String, String> lastValueAbo
             }
         }
         return new Ends(Map.copyOf(below), Map.copyOf(above));
+    }
+
+    /** The axes for which an end is open. */
+    Set<String> axes() {
+        Set<String> axes = new TreeSet<>(lastValueBelow.keySet());
+        axes.addAll(lastValueAbove.keySet());
+        return axes;
     }
 
     /** Moves a value beyond an open end back to that end; refuses it at a closed end. NaN is refused. */

@@ -44,8 +44,11 @@ public final class Rows {
             return basis.orElseThrow().number(key, column);
         }
         String cell = cell(row, column);
-        if (!TableFile.isNumber(cell)) {
+        if (cell.equals("-")) {
             throw new OutsideTable(row.source(), "prints no " + column + " for " + key);
+        }
+        if (!TableFile.isNumber(cell)) {
+            throw new TableFormat(file.name(), row.line(), "\"" + cell + "\" is not a number as printed");
         }
         return new Coefficient(Double.parseDouble(cell), "1", row.source(), "read at " + key);
     }

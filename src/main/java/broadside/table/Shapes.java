@@ -27,6 +27,10 @@ final class Shapes {
             }
         }
         requireRising(file, at, headings.get(0));
+        if (file.between() == Between.LOGARITHMIC && at[0] <= 0) {
+            throw new TableFormat(file.name(), line(file, 0), "a logarithmic axis begins above zero");
+        }
+        requireEnds(file, List.of(headings.get(0)));
         return new Curve(file, headings.get(0), at, columns);
     }
 
@@ -52,6 +56,7 @@ final class Shapes {
         }
         requireRising(file, down, "the rows");
         requireRising(file, across, "the columns");
+        requireEnds(file, List.of(axisName(file, 0), axisName(file, 1)));
         return new Grid(file, axisName(file, 0), axisName(file, 1), down, across, value);
     }
 
@@ -76,6 +81,13 @@ final class Shapes {
 
     private static String axisName(TableFile file, int index) {
         return file.axes().get(index).split(",")[0].strip();
+    }
+
+    /** The axes for which the heading says what holds beyond their ends must be there. */
+    private static void requireEnds(TableFile file, List<String> axes) {
+        file.ends().axes().stream().filter(a -> !axes.contains(a)).findFirst().ifPresent(a -> {
+            throw new TableFormat(file.name(), 1, "beyond: \"" + a + "\" is not an axis of this table; it has " + String.join(", ", axes));
+        });
     }
 
     private static void require(TableFile file, String form) {

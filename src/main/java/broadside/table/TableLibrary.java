@@ -18,6 +18,7 @@ import java.util.TreeMap;
 public final class TableLibrary {
 
     private static final String PROPERTIES = "edition.properties";
+    private static final String BIBLIOGRAPHY = "publications.csv";
 
     private final Map<String, Edition> editions;
     private final Map<String, Publication> publications;
@@ -45,18 +46,25 @@ public final class TableLibrary {
     public static TableLibrary of(Map<String, byte[]> shipped, Map<String, byte[]> own) {
         Map<String, byte[]> files = new TreeMap<>(shipped);
         own.forEach((name, bytes) -> {
-            if (!name.equals("publications.csv") && files.putIfAbsent(name, bytes) != null) {
+            if (!name.equals(BIBLIOGRAPHY) && files.putIfAbsent(name, bytes) != null) {
                 throw new TableFormat(name, 1, "a table of this name ships with the tool; use a folder of your own");
             }
         });
-        Map<String, Publication> publications = Bibliography.read("publications.csv", shipped.get("publications.csv"));
-        if (own.containsKey("publications.csv")) {
-            publications.putAll(Bibliography.read("publications.csv", own.get("publications.csv")));
+        Map<String, Publication> publications = Bibliography.read(BIBLIOGRAPHY, shipped.get(BIBLIOGRAPHY));
+        if (own.containsKey(BIBLIOGRAPHY)) {
+            Bibliography.read(BIBLIOGRAPHY, own.get(BIBLIOGRAPHY)).forEach((key, row) -> {
+                if (publications.putIfAbsent(key, row) != null) {
+                    throw new TableFormat(BIBLIOGRAPHY, 1, "the key " + key + " ships with the tool; use a key of your own");
+                }
+            });
         }
         Map<String, Map<String, byte[]>> folders = folders(files);
         Map<String, Edition> editions = new LinkedHashMap<>();
         for (String key : folders.keySet()) {
             read(key, folders, editions, publications, new ArrayList<>());
+        }
+        if (own.containsKey(BIBLIOGRAPHY)) {
+            files.put("own " + BIBLIOGRAPHY, own.get(BIBLIOGRAPHY));
         }
         return new TableLibrary(editions, publications, digest(files));
     }
@@ -67,7 +75,7 @@ public final class TableLibrary {
             int slash = name.lastIndexOf('/');
             if (slash >= 0) {
                 folders.computeIfAbsent(name.substring(0, slash), k -> new TreeMap<>()).put(name.substring(slash + 1), bytes);
-            } else if (!name.equals("publications.csv")) {
+            } else if (!name.equals(BIBLIOGRAPHY)) {
                 throw new TableFormat(name, 1, "a file outside a folder of an edition");
             }
         });
@@ -127,6 +135,8 @@ public final class TableLibrary {
             MessageDigest sum = MessageDigest.getInstance("SHA-256");
             files.forEach((name, bytes) -> {
                 sum.update(name.getBytes(StandardCharsets.UTF_8));
+                sum.update((byte) 0);
+                sum.update(Integer.toString(bytes.length).getBytes(StandardCharsets.UTF_8));
                 sum.update((byte) 0);
                 sum.update(bytes);
             });

@@ -88,6 +88,9 @@ public final class TableReader {
         String statusText = heading.get("status");
         boolean byRow = statusText.equals("by row");
         List<String> headings = List.of(records.get(0).values());
+        if (Set.copyOf(headings).size() < headings.size()) {
+            throw new TableFormat(name, start, "two columns have the same heading");
+        }
         int columns = byRow ? headings.size() - 1 : headings.size();
         if (byRow && !headings.get(columns).equals("status")) {
             throw new TableFormat(name, start, "\"status: by row\" needs a last column named status");

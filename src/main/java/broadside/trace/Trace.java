@@ -22,7 +22,7 @@ public final class Trace {
     private final List<Given> givens;
     private final List<Step> steps;
     private final List<OwnValue> overrides;
-    private final Set<String> used;
+    private final Set<OwnValue> used;
     private final Map<String, Double> found;
     private final String suffix;
 
@@ -34,7 +34,7 @@ public final class Trace {
         this(new ArrayList<>(), new ArrayList<>(), List.copyOf(overrides), new HashSet<>(), new HashMap<>(), "");
     }
 
-    private Trace(List<Given> givens, List<Step> steps, List<OwnValue> overrides, Set<String> used, Map<String, Double> found, String suffix) {
+    private Trace(List<Given> givens, List<Step> steps, List<OwnValue> overrides, Set<OwnValue> used, Map<String, Double> found, String suffix) {
         this.givens = givens;
         this.steps = steps;
         this.overrides = overrides;
@@ -98,7 +98,7 @@ public final class Trace {
 
     /** The overrides that replaced a value. */
     public List<OwnValue> overridesUsed() {
-        return overrides.stream().filter(o -> used.contains(o.name())).toList();
+        return overrides.stream().filter(used::contains).toList();
     }
 
     /** A step in the making. */
@@ -151,7 +151,7 @@ public final class Trace {
                 steps.add(new Step(name, symbol, meaning, way, formula, inputs, value, unit, place, status, Optional.empty()));
                 return value;
             }
-            used.add(own.get().name());
+            used.add(own.get());
             steps.add(new Step(name, symbol, meaning, Step.Way.READING, "set by the user: " + own.get().reason(), List.of(),
                 own.get().value(), unit, "user's own value", Status.GIVEN,
                 Optional.of(new Step.Replaced(value, own.get().reason()))));

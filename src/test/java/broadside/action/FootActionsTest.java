@@ -9,6 +9,7 @@ import broadside.codes.LoadCase;
 import broadside.panel.Panel;
 import broadside.trace.Trace;
 import java.util.List;
+import java.util.Optional;
 import org.junit.jupiter.api.Test;
 
 class FootActionsTest {
@@ -16,7 +17,7 @@ class FootActionsTest {
     private static final Panel BOARD = board("", 3, 2, 2.5, 0.4);
 
     private static FootActions.Result of(PanelCases... panels) {
-        return FootActions.of(List.of(panels), new Trace());
+        return FootActions.of(List.of(panels), Cases.SYMBOLS, new Trace());
     }
 
     private static CaseAction find(FootActions.Result result, String name, String direction) {
@@ -70,11 +71,11 @@ class FootActionsTest {
 
     @Test
     void aLeastForceCountsWhereTheZonesGiveLess() {
-        LoadCase least = new LoadCase("case-a", "a", LoadCase.Windward.NONE, even("a", BOARD, 100, 0).zones(), 0, 0.1, 900);
+        LoadCase least = new LoadCase("case-a", "a", LoadCase.Windward.NONE, even("a", BOARD, 100, 0).zones(), 0, Optional.empty(), 0.1, 900);
         CaseAction action = find(of(new PanelCases(BOARD, List.of(least))), "case-a", "front");
         assertThat(action.force()).isCloseTo(900, within(1e-9));
         assertThat(action.height()).as("mid-height and the rise of the case").isCloseTo(3.6, within(1e-12));
-        LoadCase more = new LoadCase("case-a", "a", LoadCase.Windward.NONE, even("a", BOARD, 200, 0).zones(), 0, 0, 900);
+        LoadCase more = new LoadCase("case-a", "a", LoadCase.Windward.NONE, even("a", BOARD, 200, 0).zones(), 0, Optional.empty(), 0, 900);
         assertThat(find(of(new PanelCases(BOARD, List.of(more))), "case-a", "front").force()).isCloseTo(1200, within(1e-9));
     }
 

@@ -26,13 +26,13 @@ class PostsTest {
     private static final Panel BOARD = board("", 3, 2, 2.5, 0);
 
     private static List<FootActions.Combined> combinations(LoadCase... cases) {
-        return FootActions.of(List.of(new PanelCases(BOARD, List.of(cases))), new Trace()).combinations();
+        return FootActions.of(List.of(new PanelCases(BOARD, List.of(cases))), Cases.SYMBOLS, new Trace()).combinations();
     }
 
     private static List<PostAction> posts(Hoarding hoarding, double spacing) {
         Optional<PanelCases> shut = hoarding.gates().isEmpty() ? Optional.empty()
             : Optional.of(new PanelCases(hoarding.shut(), Cases.wall(hoarding.shut())));
-        return HoardingPosts.of(hoarding, spacing, open(hoarding), shut, new Trace());
+        return HoardingPosts.of(hoarding, spacing, open(hoarding), shut, Cases.SYMBOLS, new Trace());
     }
 
     @Test
@@ -142,7 +142,7 @@ class PostsTest {
     void theWorstPostOfEachZoneIsOnTheSheet() {
         Trace trace = new Trace();
         Hoarding hoarding = hoarding(20);
-        List<PostAction> posts = HoardingPosts.of(hoarding, 2, open(hoarding), Optional.empty(), trace);
+        List<PostAction> posts = HoardingPosts.of(hoarding, 2, open(hoarding), Optional.empty(), Cases.SYMBOLS, trace);
         double most = posts.stream().mapToDouble(PostAction::moment).max().orElseThrow();
         assertThat(trace.find("post-moment").orElseThrow().value()).isCloseTo(most, within(1e-9));
         assertThat(trace.find("post-moment/A").orElseThrow().value()).isCloseTo(most, within(1e-9));

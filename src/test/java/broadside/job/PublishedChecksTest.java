@@ -89,9 +89,10 @@ class PublishedChecksTest {
             Arguments.of("\"360\"", "1", "\"360\" has no unit"),
             Arguments.of("true", "1", "the printed value must be a number or text with its unit"),
             Arguments.of("null", "1", "the printed value must be a number or text with its unit"),
-            Arguments.of("\"360 Pa\"", "\"1 kg\"", "within \"1 kg\" must be an amount in the form of the value, or a percentage"),
-            Arguments.of("\"360 Pa\"", "\"\"", "within \"\" must be an amount in the form of the value, or a percentage"),
+            Arguments.of("\"360 Pa\"", "\"1 kg\"", "within \"1 kg\" must be an amount not below zero in the form of the value, or a percentage"),
+            Arguments.of("\"360 Pa\"", "\"\"", "within \"\" must be an amount not below zero in the form of the value, or a percentage"),
             Arguments.of("\"360 Pa\"", "\"much\"", "within \"much\" must be an amount"),
+            Arguments.of("\"360 Pa\"", "-1", "must be an amount not below zero"),
             Arguments.of("\"360 Pa\"", "\"x %\"", "within \"x %\" is not a percentage like \"0.5 %\""),
             Arguments.of("\"360 Pa\"", "\"-1 %\"", "within \"-1 %\" is not a percentage like \"0.5 %\""));
     }
@@ -142,7 +143,7 @@ class PublishedChecksTest {
     }
 
     @ParameterizedTest
-    @CsvSource(delimiter = ';', value = {"\"title\": \"Speed\", ;''", "\"status\": \"read\";\"status\": \"seen\"", ", \"status\": \"read\";''", "\"given\";\"gegeben\"",
+    @CsvSource(delimiter = ';', value = {"\"title\": \"Speed\", ;''", "\"status\": \"read\";\"status\": \"seen\"", "\"status\": \"read\";\"status\": \"given\"", ", \"status\": \"read\";''", "\"given\";\"gegeben\"",
         "\"expected\": [{;\"expected\": [], \"more\": [{"})
     void aCheckHasAllItsParts(String old, String other) {
         assertThat(SPEED).contains(old);
@@ -152,7 +153,7 @@ class PublishedChecksTest {
     }
 
     @ParameterizedTest
-    @CsvSource(delimiter = ';', value = {"\"80 mph\";\"80 kg\";a speed is typed with its unit", "\"80 mph\";80;a speed is typed with its unit",
+    @CsvSource(delimiter = ';', value = {"\"80 mph\";\"80 kg\";a speed above zero is typed with its unit", "\"80 mph\";\"0 mph\";a speed above zero", "\"80 mph\";80;a speed above zero is typed with its unit",
         "\"open\";\"suburban\";the conversion holds for \"open\" only", "\"3 s gust\";\"3 sec\";is none of fastest mile, 0.2 s gust",
         "\"fastest mile\";\"gust\";from \"gust\" is none of", "\"3 s gust\";\"0.2 s gust\";covers t from 1 to 3600; this case has 0.2",
         "convert-speed;convert;it knows convert-speed"})

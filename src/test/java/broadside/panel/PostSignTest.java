@@ -25,7 +25,8 @@ class PostSignTest {
 
     @Test
     void oneBoardNeedsNoName() {
-        assertThat(sign(board("face", 0.5)).panels()).containsExactly(new Panel("", Panel.Kind.BOARD, 3, 2, 2.5, 0.5, 0.9, 0, 0));
+        assertThat(sign(board("face", 0.5)).panels()).containsExactly(new Panel("", Panel.Kind.BOARD, 3, 2, 2.5, 0.5, 0.9, 0, 0,
+            new Panel.AsTyped("3 m", "2 m", "2.5 m", "0.5 m")));
         assertThat(sign(board("face", 0.5)).part(0)).isEmpty();
         assertThat(sign(board("", 0)).panels().get(0).top()).isEqualTo(4.5);
     }

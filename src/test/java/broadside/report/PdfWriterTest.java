@@ -101,8 +101,8 @@ class PdfWriterTest {
             "Front view, to scale", "Basic wind velocity", "to be confirmed", "Load cases with characteristic values",
             "Moment at", "2 Wind at an angle",
             "0.625", "24.7", "governs", "Gust 49", "1.472", "What was assumed",
-            "Zo\u00eb \u0141ukasik", "\u221a2", "The calculation", "Iv = 0.2149", "qp = 0.7055 kPa", "(14.74 psf)",
-            "vm = 21.23 m/s", "peak velocity pressure", "EN 1991-1-4, 4.5 (4.8) (read)", "Fw,net = 15.87 kN");
+            "Zo\u00eb \u0141ukasik", "\u221a2", "The calculation", "Iv = kI / (co ln(z / z0)) = 0.2149", "= 0.7055 kPa", "(14.74 psf)",
+            "vm = 21.23 m/s", "peak velocity pressure", "EN 1991-1-4, 4.5 (4.8) (read)", "Fw,net = cp,net qp A = 15.87 kN");
     }
 
     @Test

@@ -35,7 +35,7 @@ class RowsTest {
         assertThat(rows(ROWS).isPrinted("alpha", "value")).isTrue();
         assertThatThrownBy(() -> rows(ROWS).number("beta", "value")).isInstanceOf(OutsideTable.class)
             .hasMessage("PUB:2020, 3.2 prints no value for beta");
-        assertThatThrownBy(() -> rows(ROWS).number("alpha", "unit")).isInstanceOf(OutsideTable.class);
+        assertThatThrownBy(() -> rows(ROWS).number("alpha", "unit")).isInstanceOf(TableFormat.class);
     }
 
     @Test
