@@ -133,7 +133,8 @@ public final class Shapes {
         Field.text("engineer", "name and licence of the engineer"),
         Field.choice("units", "system of units that leads on page and paper", List.of("metric", "us")));
 
-    static final Shape JOB = job();
+    /** The whole job file; the shape of an item follows from its kind. */
+    public static final Shape JOB = job();
 
     private static Shape item(String kind, List<Field> own) {
         List<Field> fields = new java.util.ArrayList<>();

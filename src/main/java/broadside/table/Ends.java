@@ -43,6 +43,14 @@ record Ends(Map<String, String> lastValueBelow, Map<String, String> lastValueAbo
         return axes;
     }
 
+    /** The rule in words. */
+    String words() {
+        java.util.List<String> held = new java.util.ArrayList<>();
+        new java.util.TreeMap<>(lastValueBelow).forEach((axis, reason) -> held.add(axis + " below: the last value holds (" + reason + ")"));
+        new java.util.TreeMap<>(lastValueAbove).forEach((axis, reason) -> held.add(axis + " above: the last value holds (" + reason + ")"));
+        return held.isEmpty() ? "refused" : String.join("; ", held) + "; elsewhere refused";
+    }
+
     /** Moves a value beyond an open end back to that end; refuses it at a closed end. NaN is refused. */
     double held(String axis, double x, double first, double last, Source source) {
         if (x >= first && x <= last) {

@@ -40,6 +40,11 @@ public record TableFile(String name, String title, Source source, String form, L
         return between.name().toLowerCase(java.util.Locale.ROOT).replace('_', ' ');
     }
 
+    /** What holds beyond the printed ends, for the page of tables. */
+    public String beyondWords() {
+        return ends.words();
+    }
+
     static boolean isNumber(String cell) {
         return cell.matches("-?\\d+(\\.\\d+)?");
     }

@@ -1,0 +1,35 @@
+package broadside.web;
+
+import broadside.assess.Assessment;
+import broadside.assess.Job;
+import broadside.assess.Loads;
+import broadside.panel.Item;
+import broadside.sheet.Drawing;
+import broadside.sheet.Sheet;
+import java.util.Optional;
+
+/** The makers of documents that the pages hand out: the one place where this package meets them. */
+public interface Documents {
+
+    /** The document of an assessed job. */
+    Sheet sheet(Assessment assessment);
+
+    /** The drawing of one item, with its loads when they are known. */
+    Drawing drawing(Job job, Item item, Optional<Loads> loads);
+
+    /**
+     * The document as a PDF that holds its job file.
+     *
+     * @param paper  "a4" or "letter"
+     */
+    byte[] pdf(Sheet sheet, String paper, byte[] jobJson);
+
+    /** A drawing as SVG text without styles or scripts, with a title and a description for those who cannot see it. */
+    String svg(Drawing drawing, String title, String description);
+
+    /** The job file inside a PDF that this tool wrote, or nothing when there is none. */
+    Optional<byte[]> jobInPdf(byte[] pdf);
+
+    /** The JSON Schema of the job file. */
+    byte[] schema();
+}

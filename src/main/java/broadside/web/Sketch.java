@@ -1,0 +1,137 @@
+package broadside.web;
+
+import broadside.assess.Assessor;
+import broadside.assess.BadJob;
+import broadside.assess.ItemResult;
+import broadside.assess.Job;
+import broadside.assess.Loads;
+import broadside.codes.WindCode;
+import broadside.job.JobReader;
+import broadside.panel.Board;
+import broadside.panel.Hoarding;
+import broadside.panel.Item;
+import broadside.panel.PostSign;
+import broadside.quantity.Dimension;
+import broadside.quantity.Rounding;
+import broadside.quantity.Show;
+import broadside.quantity.Units;
+import broadside.web.FormView.Picture;
+import java.util.List;
+import java.util.Optional;
+import tools.jackson.databind.JsonNode;
+import tools.jackson.databind.node.JsonNodeFactory;
+import tools.jackson.databind.node.ObjectNode;
+
+/** The drawing beside the form while it is filled in: as soon as the sizes can be read, and with forces when all can. */
+final class Sketch {
+
+    private final Assessor assessor;
+    private final JobReader reader;
+
+    Sketch(Assessor assessor, JobReader reader) {
+        this.assessor = assessor;
+        this.reader = reader;
+    }
+
+    /** Where the drawing of the item on a form is, and what it shows in words. */
+    Picture picture(Draft draft, JsonNode job) {
+        ObjectNode one = alone(job, draft.index());
+        Optional<Job> whole = reader.read(one).job();
+        ObjectNode source = whole.isPresent() ? one : standIn(one);
+        Optional<Job> drawn = whole.isPresent() ? whole : reader.read(source).job();
+        if (drawn.isEmpty() || !Token.fits(source)) {
+            return new Picture("", "The drawing appears here when width, height and the gap below can be read.");
+        }
+        return new Picture("/drawing.svg?item=0" + (whole.isPresent() ? "" : "&loads=no") + "&j=" + Token.of(source), words(drawn.get().items().get(0)));
+    }
+
+    /** The same for the script of the page, with how each quantity is read. */
+    byte[] json(Draft draft, JsonNode job) {
+        Picture picture = picture(draft, job);
+        ObjectNode answer = JsonNodeFactory.instance.objectNode();
+        answer.put("source", picture.source()).put("words", picture.words()).put("status", status(draft, job, picture));
+        ObjectNode readings = answer.putObject("readings");
+        draft.quantities(leaf -> readings.put(leaf.path(), Questions.reading(draft.answers().get(leaf.path()), leaf.field().dimension().orElseThrow(),
+            leaf.unit(FormReader.units(draft.answers())))));
+        return answer.toString().getBytes(java.nio.charset.StandardCharsets.UTF_8);
+    }
+
+    private String status(Draft draft, JsonNode job, Picture picture) {
+        Optional<Job> whole = reader.read(alone(job, draft.index())).job();
+        if (picture.source().isEmpty()) {
+            return picture.words();
+        }
+        if (whole.isEmpty()) {
+            return "The drawing shows the sizes typed so far.";
+        }
+        try {
+            return assessor.assess(whole.get()).items().get(0).loads().map(l -> status(l, FormReader.units(draft.answers())))
+                .orElse("The drawing is up to date. The code has no loads for this item.");
+        } catch (BadJob e) {
+            return "The drawing is up to date.";
+        }
+    }
+
+    private static String status(Loads loads, Units units) {
+        return "Preliminary: " + loads.level().name() + " wind force "
+            + Show.of(loads.governs("base-shear").baseShear(), Dimension.FORCE, units, 3, Rounding.UP).text() + ", moment at the ground "
+            + Show.of(loads.governs("base-moment").baseMoment(), Dimension.MOMENT, units, 3, Rounding.UP).text() + ".";
+    }
+
+    /** What a drawing of an item shows, in words. */
+    static String words(Item item) {
+        return item.mark() + ": " + item.choose(Sketch::words, Sketch::words);
+    }
+
+    private static String words(PostSign sign) {
+        List<String> boards = sign.boards().stream().map(Sketch::words).toList();
+        int posts = sign.posts().count();
+        return String.join("; ", boards) + ", on " + (posts == 1 ? "one post" : posts + " posts"
+            + sign.posts().spacing().map(s -> " " + s.typed() + " apart").orElse(""));
+    }
+
+    private static String words(Board board) {
+        return (board.shape() == Board.Shape.RECTANGLE ? "board" : board.shape().word()) + " " + board.width().typed() + " wide, " + board.height().typed()
+            + " high, its lower edge " + board.clearance().typed() + " above the ground";
+    }
+
+    private static String words(Hoarding hoarding) {
+        return "hoarding " + hoarding.length().typed() + " long, " + hoarding.height().typed() + " high"
+            + (hoarding.clearance().metres() == 0 ? "" : ", " + hoarding.clearance().typed() + " above the ground")
+            + (hoarding.gates().isEmpty() ? "" : hoarding.gates().size() == 1 ? ", with a gate" : ", with " + hoarding.gates().size() + " gates")
+            + hoarding.spacing().map(s -> ", posts " + s.typed() + " apart").orElse("");
+    }
+
+    /** The loads of the first item of a job, when the code has them. */
+    Optional<Loads> loads(Job job, int item) {
+        try {
+            ItemResult result = assessor.assess(job).items().get(item);
+            return result.loads();
+        } catch (BadJob e) {
+            return Optional.empty();
+        }
+    }
+
+    private static ObjectNode alone(JsonNode job, int index) {
+        ObjectNode one = ((ObjectNode) job).deepCopy();
+        JsonNode item = job.path("items").path(index);
+        one.putArray("items").add(item);
+        return one;
+    }
+
+    /** A job around the item of a form whose other answers cannot be read yet; only its sizes are drawn from it. */
+    private ObjectNode standIn(ObjectNode one) {
+        ObjectNode job = JsonNodeFactory.instance.objectNode();
+        WindCode code = assessor.codes().code(assessor.codes().editions().get(0)).orElseThrow();
+        String key = code.edition().key();
+        job.put("broadside", 1);
+        if (one.path("units").isString()) {
+            job.set("units", one.get("units"));
+        }
+        job.putObject("basis").put("code", key.substring(0, key.indexOf('/'))).put("edition", key.substring(key.indexOf('/') + 1));
+        job.putObject("site").put("basic-speed", "20 m/s").put("averaging", code.terms().averaging().words())
+            .put("terrain", code.terms().terrains().get(0).name());
+        job.set("items", one.get("items"));
+        return job;
+    }
+}
