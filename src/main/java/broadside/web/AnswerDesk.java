@@ -4,11 +4,12 @@ import broadside.assess.Assessment;
 import broadside.assess.Assessor;
 import broadside.assess.BadJob;
 import broadside.assess.Job;
+import broadside.assess.Loads;
 import broadside.job.JobReader;
 import broadside.job.JobText;
 import broadside.panel.Item;
+import broadside.quantity.Units;
 import broadside.sheet.Block;
-import broadside.sheet.Drawing;
 import broadside.sheet.Sheet;
 import broadside.web.SheetView.Change;
 import broadside.web.SheetView.Download;
@@ -41,7 +42,7 @@ final class AnswerDesk {
         this.reader = reader;
         this.documents = documents;
         this.forms = forms;
-        this.sketch = new Sketch(assessor, reader);
+        this.sketch = new Sketch(assessor, reader, documents);
     }
 
     /** The answer page; a job with something that does not fit gets its form. */
@@ -126,8 +127,9 @@ final class AnswerDesk {
             throw Refused.notFound();
         }
         Item item = job.items().get(wanted);
-        Drawing drawing = documents.drawing(job, item, withLoads ? sketch.loads(job, wanted) : Optional.empty());
-        return documents.svg(drawing, "Drawing of " + item.mark(), Sketch.words(item));
+        Optional<Loads> loads = withLoads ? sketch.loads(job, wanted) : Optional.empty();
+        Units units = "us".equals(job.head("units").orElse("")) ? Units.US : Units.METRIC;
+        return documents.svg(documents.drawing(item, loads, units), "Drawing of " + item.mark(), documents.words(item, loads, units));
     }
 
     private static int number(String text) {

@@ -1,9 +1,9 @@
 package broadside.web;
 
 import broadside.assess.Assessment;
-import broadside.assess.Job;
 import broadside.assess.Loads;
 import broadside.panel.Item;
+import broadside.quantity.Units;
 import broadside.sheet.Drawing;
 import broadside.sheet.Sheet;
 import java.util.Optional;
@@ -15,7 +15,10 @@ public interface Documents {
     Sheet sheet(Assessment assessment);
 
     /** The drawing of one item, with its loads when they are known. */
-    Drawing drawing(Job job, Item item, Optional<Loads> loads);
+    Drawing drawing(Item item, Optional<Loads> loads, Units units);
+
+    /** What that drawing shows, in words. */
+    String words(Item item, Optional<Loads> loads, Units units);
 
     /**
      * The document as a PDF that holds its job file.

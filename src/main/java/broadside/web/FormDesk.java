@@ -2,7 +2,6 @@ package broadside.web;
 
 import broadside.assess.Assessor;
 import broadside.assess.BadJob;
-import broadside.assess.Job;
 import broadside.assess.Problem;
 import broadside.job.JobReader;
 import broadside.job.Shapes;
@@ -33,12 +32,12 @@ final class FormDesk {
     private final FormReader forms;
     private final Sketch sketch;
 
-    FormDesk(Pages pages, Assessor assessor, JobReader reader) {
+    FormDesk(Pages pages, Assessor assessor, JobReader reader, Documents documents) {
         this.pages = pages;
         this.assessor = assessor;
         this.reader = reader;
         this.forms = new FormReader(assessor.codes());
-        this.sketch = new Sketch(assessor, reader);
+        this.sketch = new Sketch(assessor, reader, documents);
     }
 
     /** A blank sheet, or the sheet of the job in a link. */

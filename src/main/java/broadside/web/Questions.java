@@ -90,7 +90,8 @@ final class Questions {
     private Input input(Shape shape, Field field, String path) {
         Wording words = Wording.of(shape.name(), field);
         if (shape.name().equals("site") && field.name().equals("terrain")) {
-            return made("radio", path, words.label(), "", words.hint(), null, terrains(path), "", "");
+            return made("radio", path, words.label(), "", code.isPresent() ? words.hint()
+                : "Each code has its own classes: choose the code above, then show its questions", null, terrains(path), "", "");
         }
         if (shape.name().equals("topography") && field.name().equals("feature")) {
             return made("radio", path, words.label(), "", words.hint(), null, features(path), "", "");

@@ -7,16 +7,11 @@ import broadside.assess.Job;
 import broadside.assess.Loads;
 import broadside.codes.WindCode;
 import broadside.job.JobReader;
-import broadside.panel.Board;
-import broadside.panel.Hoarding;
-import broadside.panel.Item;
-import broadside.panel.PostSign;
 import broadside.quantity.Dimension;
 import broadside.quantity.Rounding;
 import broadside.quantity.Show;
 import broadside.quantity.Units;
 import broadside.web.FormView.Picture;
-import java.util.List;
 import java.util.Optional;
 import tools.jackson.databind.JsonNode;
 import tools.jackson.databind.node.JsonNodeFactory;
@@ -27,10 +22,12 @@ final class Sketch {
 
     private final Assessor assessor;
     private final JobReader reader;
+    private final Documents documents;
 
-    Sketch(Assessor assessor, JobReader reader) {
+    Sketch(Assessor assessor, JobReader reader, Documents documents) {
         this.assessor = assessor;
         this.reader = reader;
+        this.documents = documents;
     }
 
     /** Where the drawing of the item on a form is, and what it shows in words. */
@@ -42,7 +39,8 @@ final class Sketch {
         if (drawn.isEmpty() || !Token.fits(source)) {
             return new Picture("", "The drawing appears here when width, height and the gap below can be read.");
         }
-        return new Picture("/drawing.svg?item=0" + (whole.isPresent() ? "" : "&loads=no") + "&j=" + Token.of(source), words(drawn.get().items().get(0)));
+        return new Picture("/drawing.svg?item=0" + (whole.isPresent() ? "" : "&loads=no") + "&j=" + Token.of(source),
+            documents.words(drawn.get().items().get(0), whole.flatMap(j -> loads(j, 0)), FormReader.units(draft.answers())));
     }
 
     /** The same for the script of the page, with how each quantity is read. */
@@ -78,31 +76,7 @@ final class Sketch {
             + Show.of(loads.governs("base-moment").baseMoment(), Dimension.MOMENT, units, 3, Rounding.UP).text() + ".";
     }
 
-    /** What a drawing of an item shows, in words. */
-    static String words(Item item) {
-        return item.mark() + ": " + item.choose(Sketch::words, Sketch::words);
-    }
-
-    private static String words(PostSign sign) {
-        List<String> boards = sign.boards().stream().map(Sketch::words).toList();
-        int posts = sign.posts().count();
-        return String.join("; ", boards) + ", on " + (posts == 1 ? "one post" : posts + " posts"
-            + sign.posts().spacing().map(s -> " " + s.typed() + " apart").orElse(""));
-    }
-
-    private static String words(Board board) {
-        return (board.shape() == Board.Shape.RECTANGLE ? "board" : board.shape().word()) + " " + board.width().typed() + " wide, " + board.height().typed()
-            + " high, its lower edge " + board.clearance().typed() + " above the ground";
-    }
-
-    private static String words(Hoarding hoarding) {
-        return "hoarding " + hoarding.length().typed() + " long, " + hoarding.height().typed() + " high"
-            + (hoarding.clearance().metres() == 0 ? "" : ", " + hoarding.clearance().typed() + " above the ground")
-            + (hoarding.gates().isEmpty() ? "" : hoarding.gates().size() == 1 ? ", with a gate" : ", with " + hoarding.gates().size() + " gates")
-            + hoarding.spacing().map(s -> ", posts " + s.typed() + " apart").orElse("");
-    }
-
-    /** The loads of the first item of a job, when the code has them. */
+    /** The loads of an item of a job, when the code has them. */
     Optional<Loads> loads(Job job, int item) {
         try {
             ItemResult result = assessor.assess(job).items().get(item);

@@ -76,9 +76,6 @@ final class StartDesk {
                 choices.add(new Choice("code-" + choices.size(), overlay, codes.code(overlay).orElseThrow().edition().property("title"), "", false));
             }
         }
-        int first = Math.max(0, choices.stream().map(Choice::value).toList().indexOf("en-1991-1-4/2005"));
-        Choice chosen = choices.get(first);
-        choices.set(first, new Choice(chosen.id(), chosen.value(), chosen.words(), "", true));
         return choices;
     }
 

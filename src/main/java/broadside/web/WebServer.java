@@ -36,7 +36,7 @@ public final class WebServer {
 
     public WebServer(Assessor assessor, JobReader reader, PublishedChecks checks, TableLibrary tables, Documents documents) {
         Pages pages = new Pages(assessor.about());
-        FormDesk forms = new FormDesk(pages, assessor, reader);
+        FormDesk forms = new FormDesk(pages, assessor, reader, documents);
         AnswerDesk answers = new AnswerDesk(pages, assessor, reader, documents, forms);
         StartDesk start = new StartDesk(pages, assessor.codes(), reader, documents, forms);
         Shelf shelf = new Shelf(pages, tables, checks);
