@@ -9,17 +9,13 @@
 
     const show = function (answer) {
       const section = document.querySelector(".drawing");
-      let image = section.querySelector("[data-drawing]");
-      const nothing = section.querySelector("[data-nothing]");
+      const sketch = section.querySelector("[data-sketch]");
+      let image = sketch.querySelector("[data-drawing]");
       if (answer.source !== "") {
         if (!image) {
           image = document.createElement("img");
           image.setAttribute("data-drawing", "");
-          if (nothing) {
-            nothing.replaceWith(image);
-          } else {
-            section.insertBefore(image, section.querySelector("[data-status]"));
-          }
+          sketch.replaceChildren(image);
         }
         if (image.getAttribute("src") !== answer.source) {
           image.src = answer.source;

@@ -53,8 +53,10 @@ final class AnswerDesk {
             String token = Token.of(job);
             Sheet sheet = documents.sheet(assessment);
             List<Change> changes = changes(assessment.job(), token);
-            pages.show(ctx, 200, "answer", sheet.title().isBlank() ? "Wind loads" : sheet.title(), new SheetView.Page(sheet, SheetView.titled(sheet),
-                SheetView.contents(sheet), changes, downloads(token), SheetView.pieces(sheet, token, changes)));
+            String title = sheet.title().isBlank() ? "Wind loads" : sheet.title();
+            Pages.Frame frame = pages.frame(title);
+            pages.show(ctx, 200, "answer", SheetView.cautioned(sheet) ? new Pages.Frame(title, "", frame.made()) : frame,
+                SheetView.of(sheet, token, changes, downloads(token)));
         } catch (BadJob e) {
             forms.mend(ctx, job, e.problems());
         }

@@ -50,7 +50,7 @@ final class FormProblems {
             String label = labels.get(path);
             String place = label == null ? place(path, anchors) : "";
             String target = label == null ? anchors.getOrDefault(root(path, anchors), "") : path;
-            String entry = entry(path);
+            String entry = path.contains(".boards[0]") && labels.keySet().stream().noneMatch(l -> l.contains(".boards[1]")) ? "" : entry(path);
             String text = label != null ? joined(label, problem.text()) : place.isEmpty() ? problem.line() : joined(place, problem.text());
             lines.add(new Line(target, entry.isEmpty() ? text : entry + ": " + text));
         }

@@ -12,7 +12,7 @@ import org.thymeleaf.templateresolver.ClassLoaderTemplateResolver;
 final class Pages {
 
     /** The line that stands on every page. */
-    static final String CAUTION = "PRELIMINARY - not for construction - for review by a licensed engineer";
+    static final String CAUTION = broadside.sheet.SheetMaker.PRELIMINARY;
 
     private final TemplateEngine engine;
     private final About about;
@@ -28,7 +28,7 @@ final class Pages {
         this.about = about;
     }
 
-    /** What the frame around every page shows. */
+    /** What the frame around every page shows; {@code caution} is empty where the page itself begins with it. */
     public record Frame(String title, String caution, String made) { }
 
     Frame frame(String title) {
@@ -41,6 +41,10 @@ final class Pages {
     }
 
     void show(Context ctx, int status, String template, String title, Object view) {
-        ctx.status(status).contentType("text/html; charset=utf-8").result(text(template, frame(title), view));
+        show(ctx, status, template, frame(title), view);
+    }
+
+    void show(Context ctx, int status, String template, Frame frame, Object view) {
+        ctx.status(status).contentType("text/html; charset=utf-8").result(text(template, frame, view));
     }
 }

@@ -133,8 +133,7 @@ final class Questions {
     }
 
     private String hint(Field field, Wording words) {
-        return field.name().equals("averaging") ? code.map(c -> c.edition().property("title") + " takes a " + c.terms().averaging().words()
-            + "; the sheet says what another speed comes to").orElse(words.hint()) : words.hint();
+        return field.name().equals("averaging") ? code.map(c -> c.edition().property("title") + " defines it as a " + c.terms().averaging().words()).orElse(words.hint()) : words.hint();
     }
 
     private List<Choice> terrains(String path) {
@@ -153,7 +152,7 @@ final class Questions {
 
     private List<Choice> choices(Field field, String path) {
         List<Choice> choices = new ArrayList<>();
-        choices.add(new Choice("", "", field.required() ? "Choose" : "Not said", "", answers.blank(path)));
+        choices.add(new Choice("", "", field.required() ? "Choose" : field.name().equals("shape") ? "Not said: a rectangle" : "Not said", "", answers.blank(path)));
         for (String value : field.choices()) {
             choices.add(new Choice("", value, words(value), "", answers.get(path).equals(value)));
         }

@@ -5,12 +5,21 @@ import broadside.sheet.Runs;
 import broadside.sheet.Sheet;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.regex.Pattern;
 
 /** A document on the screen: the blocks of its sheet, each under the name of the fragment that shows it. */
 public final class SheetView {
 
+    private static final Pattern ANCHOR = Pattern.compile("(?:item-(\\d{1,3})-)?([a-z-]+)");
+
+    /** Which questions stand behind which part of a sheet. */
+    private static final Map<String, String> QUESTIONS = Map.of("drawing", "#item", "cases", "#support", "assumed", "#place", "check-list", "#paper",
+        "calculation", "#code");
+
     /** The answer page. */
-    public record Page(Sheet sheet, boolean titled, List<Jump> contents, List<Change> changes, List<Download> downloads, List<Piece> pieces) { }
+    public record Page(Sheet sheet, boolean titled, List<Jump> contents, List<Change> changes, List<Download> downloads, List<Piece> head,
+                       List<Piece> rest) { }
 
     /** A line of the contents. */
     public record Jump(String anchor, String text) { }
@@ -25,10 +34,26 @@ public final class SheetView {
     public record Piece(String kind, Block block, int level, String source, List<Step> steps, List<Change> changes) { }
 
     /** A line of the calculation with its subscripts split off. */
-    public record Step(Block.StepLine line, List<Runs.Run> symbol, List<Runs.Run> formula, List<Runs.Run> numbers) { }
+    public record Step(Block.StepLine line, List<Runs.Run> symbol, List<Runs.Run> formula, List<Runs.Run> found) { }
+
+    /** The page of a sheet: what stands before its first part, the contents, and the parts. */
+    static Page of(Sheet sheet, String token, List<Change> changes, List<Download> downloads) {
+        List<Piece> pieces = pieces(sheet, token, changes);
+        int first = 0;
+        while (first < pieces.size() && pieces.get(first).level() < 2) {
+            first++;
+        }
+        return new Page(sheet, titled(sheet), contents(sheet), changes, downloads, pieces.subList(0, first), pieces.subList(first, pieces.size()));
+    }
+
+    /** Whether the sheet itself says that it is preliminary. */
+    static boolean cautioned(Sheet sheet) {
+        return sheet.blocks().stream().anyMatch(b -> b instanceof Block.Paragraph text && text.tone() == Block.Tone.CAUTION
+            && text.text().startsWith(sheet.caution()));
+    }
 
     /** Turns the blocks of a sheet into the pieces of a page. */
-    static List<Piece> pieces(Sheet sheet, String token, List<Change> changes) {
+    private static List<Piece> pieces(Sheet sheet, String token, List<Change> changes) {
         List<Piece> pieces = new ArrayList<>();
         int pictures = 0;
         for (Block block : sheet.blocks()) {
@@ -40,27 +65,29 @@ public final class SheetView {
         return pieces;
     }
 
-    static List<Jump> contents(Sheet sheet) {
+    private static List<Jump> contents(Sheet sheet) {
         return sheet.blocks().stream().filter(b -> b instanceof Block.Heading heading && heading.level() == 2)
             .map(b -> new Jump(((Block.Heading) b).anchor(), ((Block.Heading) b).text())).toList();
     }
 
-    static boolean titled(Sheet sheet) {
+    private static boolean titled(Sheet sheet) {
         return sheet.blocks().stream().anyMatch(b -> b instanceof Block.Heading heading && heading.level() == 1);
     }
 
     private static List<Step> steps(Block.Steps steps) {
-        return steps.lines().stream().map(l -> new Step(l, Runs.of(l.symbol()), Runs.of(l.formula()), Runs.of(l.numbers()))).toList();
+        return steps.lines().stream().map(l -> new Step(l, Runs.of(l.symbol()), Runs.of(l.formula()), Runs.of(l.found()))).toList();
     }
 
-    /** The questions behind a part, by the words of its heading. */
+    /** The questions behind a part, by the anchor of its heading; a part of a later item leads to that item. */
     private static List<Change> fitting(Block.Heading heading, List<Change> changes) {
-        String text = (heading.text() + " " + heading.anchor()).toLowerCase(java.util.Locale.ROOT);
-        String part = text.contains("site") || text.contains("where") || text.contains("wind") ? "#place"
-            : text.contains("code") || text.contains("basis") ? "#code"
-            : text.contains("post") || text.contains("support") || text.contains("carr") ? "#support"
-            : text.contains("drawing") || text.contains("panel") || text.contains("board") || text.contains("item") ? "#item" : "#none";
-        return changes.stream().filter(c -> c.href().endsWith(part)).limit(1).toList();
+        var found = ANCHOR.matcher(heading.anchor());
+        String questions = found.matches() ? QUESTIONS.get(found.group(2)) : null;
+        if (questions == null) {
+            return List.of();
+        }
+        boolean ofItem = found.group(1) != null && (questions.equals("#item") || questions.equals("#support"));
+        String item = "&item=" + (ofItem ? Integer.parseInt(found.group(1)) - 1 : 0);
+        return changes.stream().filter(c -> c.href().endsWith(item + questions)).limit(1).toList();
     }
 
     private static String kind(Block block) {

@@ -37,7 +37,7 @@ final class Sketch {
         ObjectNode source = whole.isPresent() ? one : standIn(one);
         Optional<Job> drawn = whole.isPresent() ? whole : reader.read(source).job();
         if (drawn.isEmpty() || !Token.fits(source)) {
-            return new Picture("", "The drawing appears here when width, height and the gap below can be read.");
+            return new Picture("", "The drawing appears here as soon as the sizes can be read.");
         }
         return new Picture("/drawing.svg?item=0" + (whole.isPresent() ? "" : "&loads=no") + "&j=" + Token.of(source),
             documents.words(drawn.get().items().get(0), whole.flatMap(j -> loads(j, 0)), FormReader.units(draft.answers())));

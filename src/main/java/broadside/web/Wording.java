@@ -34,7 +34,7 @@ record Wording(String label, String hint, String metric, String us) {
         basis.stability|Rule for overturning|
         site.name|Name of the place|
         site.basic-speed|Basic wind speed|From the wind map or the national annex for this place
-        site.averaging|This speed is a|A gust and a mean of the same wind differ by half
+        site.averaging|Kind of speed|A gust and a mean of the same wind differ by half
         site.return-period|Once in how many years|The basic speed of most codes is passed once in 50 years
         site.terrain|What the ground is like on the windward side|If you are not sure between two, take the smoother one: it gives the larger load
         site.terrain-reason|Why this one|A line for the reviewer, such as what is seen to the west
