@@ -108,7 +108,7 @@ final class Pool {
 
     /** The text that a browser would show for escaped text. */
     static String plain(String html) {
-        return html.replace("&lt;", "<").replace("&gt;", ">").replace("&quot;", "\"").replace("&#39;", "'").replace("&amp;", "&");
+        return html.replace("&lt;", "<").replace("&gt;", ">").replace("&quot;", "\"").replace("&#39;", "'").replace("&#0;", "\u0000").replace("&amp;", "&");
     }
 
     private Pool() { }
