@@ -8,6 +8,9 @@ import io.javalin.http.HttpResponseException;
 import java.util.HexFormat;
 import java.util.List;
 import java.util.concurrent.ThreadLocalRandom;
+import java.util.concurrent.TimeoutException;
+import org.eclipse.jetty.http.HttpException;
+import org.eclipse.jetty.io.EofException;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 
@@ -57,12 +60,27 @@ final class Failures {
             show(ctx, plain.status(), new Message(plain.title(), plain.getMessage(), List.of(), ""));
             return;
         }
+        if (cause(e, EofException.class) || cause(e, TimeoutException.class) || cause(e, HttpException.class)) {
+            LOG.info("A sender broke off or was too slow");
+            ctx.header("Connection", "close");
+            show(ctx, 408, new Message("The form did not arrive", "The sending broke off or was too slow. Send it again.", List.of(), ""));
+            return;
+        }
         byte[] number = new byte[4];
         ThreadLocalRandom.current().nextBytes(number);
         String reference = HexFormat.of().formatHex(number);
         LOG.error("{} {} failed, reference {}", ctx.req().getMethod(), ctx.path().replaceAll("[^\\x20-\\x7e]", "?"), reference, e);
         show(ctx, 500, new Message("Something went wrong here", "The fault is on this side, and no result is shown. The log of this tool "
             + "holds the details under the reference below.", List.of(), reference));
+    }
+
+    private static boolean cause(Throwable e, Class<?> kind) {
+        for (Throwable each = e; each != null; each = each.getCause()) {
+            if (kind.isInstance(each)) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private static boolean tooLargeUpload(Throwable e) {

@@ -81,7 +81,7 @@ final class FormDesk {
         String with = words.length > 1 ? words[1] : "";
         switch (words[0]) {
             case "assess" -> assess(ctx, draft);
-            case "item", "add-item", "drop-item" -> show(ctx, 200, otherItem(draft, words[0], with), List.of(), "");
+            case "item", "add-item", "drop-item" -> showOther(ctx, draft, words[0], with);
             case "set" -> {
                 int equals = with.indexOf('=');
                 draft.answers().set(with.substring(0, Math.max(0, equals)), with.substring(equals + 1));
@@ -112,8 +112,16 @@ final class FormDesk {
         }
     }
 
-    private Draft otherItem(Draft draft, String todo, String with) {
+    private void showOther(Context ctx, Draft draft, String todo, String with) {
         ObjectNode job = forms.read(draft.answers(), draft.items(), draft.index()).job();
+        if (Token.fits(job)) {
+            show(ctx, 200, otherItem(job, draft, todo, with), List.of(), "");
+        } else {
+            show(ctx, 422, draft, List.of(new Problem("", TOO_LONG)), "");
+        }
+    }
+
+    private static Draft otherItem(ObjectNode job, Draft draft, String todo, String with) {
         ArrayNode items = (ArrayNode) job.get("items");
         int next = with.matches("\\d{1,3}") ? Math.min(Integer.parseInt(with), items.size() - 1) : 0;
         if (todo.equals("drop-item") && items.size() > 1) {

@@ -85,7 +85,7 @@ final class Shelf {
         }
         List<String> headings = new ArrayList<>(file.headings().stream().filter(h -> !h.equals("status")).toList());
         headings.add("status");
-        String status = file.statusText().equals("by row") ? "by row, at weakest " + file.source().status().shown() : file.source().status().shown();
+        String status = file.statusText().equals("by row") ? "by row, the weakest " + file.source().status().shown().replace(": ", ", ") : file.source().status().shown();
         return new TableView(file.name().replaceAll("[^a-z0-9]+", "-"), file.title(), file.name(), file.source().citation(), status,
             String.join("; ", file.axes()), file.value(), file.betweenWord(), file.beyondWords(), file.entered(), file.note(), file.digest(), headings, rows);
     }

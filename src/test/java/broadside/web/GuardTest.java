@@ -137,6 +137,25 @@ class GuardTest {
     }
 
     @Test
+    void a_sender_that_drips_is_cut_off() throws Exception {
+        try (Socket socket = new Socket("127.0.0.1", Pool.port())) {
+            socket.setSoTimeout(8000);
+            socket.getOutputStream().write(("POST /fill HTTP/1.1\r\nHost: a\r\nContent-Type: application/x-www-form-urlencoded\r\nContent-Length: 100000\r\n\r\n")
+                .getBytes(StandardCharsets.US_ASCII));
+            int sent = 0;
+            while (sent < 40 && socket.getInputStream().available() == 0) {
+                socket.getOutputStream().write('a');
+                Thread.sleep(100);
+                sent++;
+            }
+            assertThat(sent).as("tenths of a second until the answer").isLessThan(40);
+            byte[] head = new byte[12];
+            assertThat(socket.getInputStream().readNBytes(head, 0, 12)).isEqualTo(12);
+            assertThat(new String(head, StandardCharsets.US_ASCII)).isEqualTo("HTTP/1.1 408");
+        }
+    }
+
+    @Test
     void a_head_line_that_is_too_long_is_refused() throws IOException {
         assertThat(raw("GET /answer?j=" + "a".repeat(70_000) + " HTTP/1.1\r\nHost: a\r\n\r\n")).containsPattern("HTTP/1.1 4(14|31)").contains("nosniff");
     }
