@@ -42,6 +42,9 @@ record Draft(Answers answers, ArrayNode items, int index) {
         if (!job.isObject() || !job.path("items").isArray() || job.path("items").path(item).isMissingNode()) {
             throw Refused.badLink("It holds no item " + (item + 1) + " of a job.");
         }
+        if (!known(job.get("items").get(item))) {
+            throw Refused.badLink("Its item " + (item + 1) + " is of a kind that this version does not ask for.");
+        }
         Answers answers = Answers.of(job, item);
         if (!answers.blank("basis.edition")) {
             String overlay = answers.blank("basis.overlay") ? "" : "-" + answers.get("basis.overlay").strip();
@@ -55,6 +58,11 @@ record Draft(Answers answers, ArrayNode items, int index) {
         }
         draft.quantities(leaf -> draft.bare(leaf.path(), leaf.unit(FormReader.units(answers))));
         return draft;
+    }
+
+    /** Whether an item is of a kind that has a form. */
+    static boolean known(JsonNode item) {
+        return item.path("kind").isString() && Shapes.KINDS.containsKey(item.path("kind").stringValue());
     }
 
     /** The sheet that a form sent. */

@@ -61,7 +61,7 @@ final class Failures {
             return;
         }
         if (cause(e, EofException.class) || cause(e, TimeoutException.class) || cause(e, HttpException.class)) {
-            LOG.info("A sender broke off or was too slow");
+            LOG.debug("A sender broke off or was too slow");
             ctx.header("Connection", "close");
             show(ctx, 408, new Message("The form did not arrive", "The sending broke off or was too slow. Send it again.", List.of(), ""));
             return;

@@ -57,6 +57,11 @@ final class FormDesk {
 
     /** The sheet of a job that does not fit, with what does not fit. */
     void mend(Context ctx, JsonNode job, List<Problem> problems) {
+        for (JsonNode item : job.path("items")) {
+            if (!Draft.known(item)) {
+                throw new BadJob(problems);
+            }
+        }
         show(ctx, 422, Draft.of(job, item(problems, job)), problems, "");
     }
 

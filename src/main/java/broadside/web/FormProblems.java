@@ -49,7 +49,7 @@ final class FormProblems {
             String path = problem.path();
             String label = labels.get(path);
             String place = label == null ? place(path, anchors) : "";
-            String target = label == null ? anchors.getOrDefault(root(path, anchors), "") : path;
+            String target = label != null ? path : path.isEmpty() ? "" : anchors.getOrDefault(root(path, anchors), "");
             String entry = path.contains(".boards[0]") && labels.keySet().stream().noneMatch(l -> l.contains(".boards[1]")) ? "" : entry(path);
             String text = label != null ? joined(label, problem.text()) : place.isEmpty() ? problem.line() : joined(place, problem.text());
             lines.add(new Line(target, entry.isEmpty() ? text : entry + ": " + text));

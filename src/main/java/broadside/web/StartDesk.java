@@ -52,7 +52,7 @@ final class StartDesk {
         }
         if (result.job().isPresent()) {
             ctx.redirect("/answer?j=" + Token.of(job), HttpStatus.SEE_OTHER);
-        } else if (job.path("items").path(0).path("kind").isString()) {
+        } else if (job.path("items").path(0).isObject()) {
             forms.mend(ctx, job, result.problems());
         } else {
             throw new BadJob(result.problems());

@@ -98,6 +98,11 @@ class AnswerTest {
         assertThat(wrong.statusCode()).isEqualTo(422);
         assertThat(Pool.fields(wrong.body())).containsEntry("items[0].boards[0].width", "3 kg");
         assertThat(Pool.plain(wrong.body())).contains("href=\"#site.terrain\"").contains("\"X\" is not a terrain class");
+        HttpResponse<String> kind = upload(Pool.SIGN.replace("post-sign", "spinning-sign").getBytes(StandardCharsets.UTF_8));
+        assertThat(kind.statusCode()).isEqualTo(400);
+        assertThat(Pool.plain(kind.body())).contains("items[0].kind: \"spinning-sign\" is not a kind that this version assesses");
+        HttpResponse<String> key = upload(Pool.SIGN.replace("\"terrain\"", "\"soil\":\"peat\",\"terrain\"").getBytes(StandardCharsets.UTF_8));
+        assertThat(Pool.plain(key.body())).contains("href=\"#place\"").contains("site.soil: is not a key of site");
         assertThat(upload("{\"broadside\":1,".getBytes(StandardCharsets.UTF_8)).body()).contains("line 1, column");
         assertThat(upload("hello".getBytes(StandardCharsets.UTF_8)).statusCode()).isEqualTo(400);
         assertThat(upload(new byte[0]).statusCode()).isEqualTo(400);

@@ -19,10 +19,12 @@ import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.openqa.selenium.By;
+import org.openqa.selenium.Keys;
 import org.openqa.selenium.WebElement;
 import org.openqa.selenium.chrome.ChromeDriver;
 import org.openqa.selenium.chrome.ChromeDriverService;
 import org.openqa.selenium.chrome.ChromeOptions;
+import org.openqa.selenium.support.ui.ExpectedConditions;
 import org.openqa.selenium.support.ui.Select;
 import org.openqa.selenium.support.ui.WebDriverWait;
 
@@ -80,8 +82,12 @@ class BrowserTest {
         box.sendKeys(text);
     }
 
+    /** Presses a button that leads to another page, and waits for that page. */
     private static void press(ChromeDriver driver, String words) {
+        WebElement before = driver.findElement(By.tagName("html"));
         driver.findElements(By.cssSelector("button:not([aria-hidden])")).stream().filter(b -> b.getText().startsWith(words)).findFirst().orElseThrow().click();
+        new WebDriverWait(driver, Duration.ofSeconds(10)).until(ExpectedConditions.stalenessOf(before));
+        new WebDriverWait(driver, Duration.ofSeconds(10)).until(d -> !d.findElements(By.tagName("footer")).isEmpty());
     }
 
     private static void begin(ChromeDriver driver, int code, String units, String kind) {
@@ -160,6 +166,11 @@ class BrowserTest {
         new WebDriverWait(scripted, Duration.ofSeconds(5)).until(d -> image(scripted, "[data-drawing]"));
         assertThat(scripted.findElement(By.id("items[0].boards[0].width-reading")).getText()).isEqualTo("= 2.591 m (8 ft 6 in)");
         assertThat(scripted.findElement(By.cssSelector("[data-status]")).getText()).isEqualTo("The drawing shows the sizes typed so far.");
+        WebElement before = scripted.findElement(By.tagName("html"));
+        scripted.findElement(By.id("items[0].posts.count")).sendKeys(Keys.ENTER);
+        new WebDriverWait(scripted, Duration.ofSeconds(10)).until(ExpectedConditions.stalenessOf(before));
+        assertThat(scripted.getTitle()).startsWith("Error: ");
+        assertThat(scripted.findElement(By.id("items[0].boards[0].width")).getDomProperty("value")).isEqualTo("8-6");
     }
 
     /** Whether an image was loaded. */
