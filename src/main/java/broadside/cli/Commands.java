@@ -52,6 +52,6 @@ public final class Commands implements Runnable {
     /** Without a command the tool serves. */
     @Override
     public void run() {
-        new ServeCommand().serve(tool());
+        ServeCommand.serve(tool(), ServeCommand.HOST, ServeCommand.PORT);
     }
 }

@@ -28,6 +28,11 @@ public final class ShippedDocuments implements Documents {
 
     private final Clock clock;
 
+    /** Made at the first PDF, since reading its fonts takes a while, and kept. */
+    private static final class Writer {
+        private static final PdfWriter SHARED = new PdfWriter();
+    }
+
     /** The clock gives the date of a document whose job has none. */
     public ShippedDocuments(Clock clock) {
         this.clock = clock;
@@ -52,7 +57,7 @@ public final class ShippedDocuments implements Documents {
     public byte[] pdf(Sheet sheet, String paper, byte[] jobJson) {
         ByteArrayOutputStream out = new ByteArrayOutputStream(64 << 10);
         try {
-            new PdfWriter().write(sheet, paper.equals("letter") ? Paper.LETTER : Paper.A4,
+            Writer.SHARED.write(sheet, paper.equals("letter") ? Paper.LETTER : Paper.A4,
                 new Attachment("job.json", "the job that this document was made from", jobJson), out);
             return out.toByteArray();
         } catch (IOException e) {
