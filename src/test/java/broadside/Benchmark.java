@@ -48,7 +48,7 @@ public final class Benchmark {
             writer.write(sheet, Paper.A4, attachment, out);
             return out.size();
         };
-        warm("PDF of that job, assessment and sheet included, warm", 10, 300, task);
+        warm("PDF of that job, assessment and sheet included, warm", 10, 1000, task);
         ThreadMXBean threads = (ThreadMXBean) ManagementFactory.getThreadMXBean();
         long before = threads.getCurrentThreadAllocatedBytes();
         for (int i = 0; i < 20; i++) {

@@ -2,30 +2,50 @@ package broadside.job;
 
 import broadside.assess.BadJob;
 import broadside.assess.Problem;
-import java.nio.charset.StandardCharsets;
+import java.io.ByteArrayOutputStream;
 import java.util.List;
+import java.util.Map;
 import tools.jackson.core.JacksonException;
+import tools.jackson.core.JsonGenerator;
+import tools.jackson.core.JsonParser;
+import tools.jackson.core.JsonToken;
+import tools.jackson.core.ObjectReadContext;
+import tools.jackson.core.ObjectWriteContext;
+import tools.jackson.core.PrettyPrinter;
 import tools.jackson.core.StreamReadConstraints;
 import tools.jackson.core.StreamReadFeature;
 import tools.jackson.core.json.JsonFactory;
-import tools.jackson.databind.DeserializationFeature;
+import tools.jackson.core.util.DefaultPrettyPrinter;
 import tools.jackson.databind.JsonNode;
-import tools.jackson.databind.SerializationFeature;
-import tools.jackson.databind.json.JsonMapper;
+import tools.jackson.databind.node.ArrayNode;
+import tools.jackson.databind.node.JsonNodeFactory;
+import tools.jackson.databind.node.ObjectNode;
 
-/** JSON text in and out: one strict mapper for job files, results and published checks. */
+/**
+ * JSON text in and out, strict, for job files, results and published checks. The streams of the library are used without
+ * its object mapper, whose start takes longer than the assessment of a job.
+ */
 public final class JobText {
 
     /** Largest job file, in bytes. */
     public static final int LARGEST = 1 << 20;
 
-    private static final JsonMapper MAPPER = JsonMapper.builder(JsonFactory.builder()
-            .streamReadConstraints(StreamReadConstraints.builder().maxNestingDepth(30).maxNumberLength(60).maxNameLength(200)
-                .maxStringLength(20_000).build())
-            .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION).build())
-        .enable(SerializationFeature.INDENT_OUTPUT)
-        .enable(DeserializationFeature.FAIL_ON_TRAILING_TOKENS)
-        .build();
+    private static final JsonFactory FACTORY = JsonFactory.builder()
+        .streamReadConstraints(StreamReadConstraints.builder().maxNestingDepth(30).maxNumberLength(60).maxNameLength(200)
+            .maxStringLength(20_000).build())
+        .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION).build();
+
+    private static final ObjectWriteContext INDENTED = new ObjectWriteContext.Base() {
+        @Override
+        public PrettyPrinter getPrettyPrinter() {
+            return new DefaultPrettyPrinter();
+        }
+
+        @Override
+        public boolean hasPrettyPrinter() {
+            return true;
+        }
+    };
 
     /**
      * Reads JSON text.
@@ -34,28 +54,94 @@ public final class JobText {
      */
     public static JsonNode read(byte[] bytes) {
         if (bytes.length > LARGEST) {
-            throw new BadJob(List.of(new Problem("", "the file has " + bytes.length + " bytes; a job file has at most " + LARGEST)));
+            throw bad("the file has " + bytes.length + " bytes; a job file has at most " + LARGEST);
         }
-        try {
-            JsonNode node = MAPPER.readTree(bytes);
-            if (node == null || node.isMissingNode()) {
-                throw new BadJob(List.of(new Problem("", "the file is empty; a job file is JSON that begins with {")));
+        try (JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), bytes)) {
+            JsonToken first = parser.nextToken();
+            if (first == null) {
+                throw bad("the file is empty; a job file is JSON that begins with {");
+            }
+            JsonNode node = value(parser, first);
+            if (parser.nextToken() != null) {
+                throw bad("line " + parser.currentTokenLocation().getLineNr() + ", column " + parser.currentTokenLocation().getColumnNr()
+                    + ": this is not JSON: something stands after its end");
             }
             return node;
         } catch (JacksonException e) {
             String where = e.getLocation() == null || e.getLocation().getLineNr() < 1 ? ""
                 : "line " + e.getLocation().getLineNr() + ", column " + e.getLocation().getColumnNr() + ": ";
-            throw new BadJob(List.of(new Problem("", where + plain(e.getOriginalMessage()))));
+            throw bad(where + plain(e.getOriginalMessage()));
         }
+    }
+
+    private static JsonNode value(JsonParser parser, JsonToken token) {
+        JsonNodeFactory make = JsonNodeFactory.instance;
+        return switch (token) {
+            case START_OBJECT -> {
+                ObjectNode object = make.objectNode();
+                for (String name = parser.nextName(); name != null; name = parser.nextName()) {
+                    object.set(name, value(parser, parser.nextToken()));
+                }
+                yield object;
+            }
+            case START_ARRAY -> {
+                ArrayNode array = make.arrayNode();
+                for (JsonToken next = parser.nextToken(); next != JsonToken.END_ARRAY; next = parser.nextToken()) {
+                    array.add(value(parser, next));
+                }
+                yield array;
+            }
+            case VALUE_STRING -> make.stringNode(parser.getString());
+            case VALUE_NUMBER_INT -> parser.getString().length() < 10 ? make.numberNode(parser.getIntValue()) : make.numberNode(parser.getDoubleValue());
+            case VALUE_NUMBER_FLOAT -> make.numberNode(parser.getDoubleValue());
+            case VALUE_TRUE -> make.booleanNode(true);
+            case VALUE_FALSE -> make.booleanNode(false);
+            default -> make.nullNode();
+        };
     }
 
     /** JSON text, indented, UTF-8, with a line end at its end. */
     public static byte[] write(JsonNode node) {
-        return (MAPPER.writeValueAsString(node) + "\n").getBytes(StandardCharsets.UTF_8);
+        ByteArrayOutputStream out = new ByteArrayOutputStream();
+        try (JsonGenerator generator = FACTORY.createGenerator(INDENTED, out)) {
+            write(node, generator);
+        }
+        out.write('\n');
+        return out.toByteArray();
     }
 
-    static JsonMapper mapper() {
-        return MAPPER;
+    private static void write(JsonNode node, JsonGenerator generator) {
+        if (node.isObject()) {
+            generator.writeStartObject();
+            for (Map.Entry<String, JsonNode> entry : node.properties()) {
+                generator.writeName(entry.getKey());
+                write(entry.getValue(), generator);
+            }
+            generator.writeEndObject();
+        } else if (node.isArray()) {
+            generator.writeStartArray();
+            node.forEach(each -> write(each, generator));
+            generator.writeEndArray();
+        } else if (node.isString()) {
+            generator.writeString(node.stringValue());
+        } else if (node.isInt()) {
+            generator.writeNumber(node.intValue());
+        } else if (node.isNumber()) {
+            generator.writeNumber(node.doubleValue());
+        } else if (node.isBoolean()) {
+            generator.writeBoolean(node.booleanValue());
+        } else {
+            generator.writeNull();
+        }
+    }
+
+    /** An empty object. */
+    static ObjectNode object() {
+        return JsonNodeFactory.instance.objectNode();
+    }
+
+    private static BadJob bad(String problem) {
+        return new BadJob(List.of(new Problem("", problem)));
     }
 
     /** The parser's message without the names of its own parts. */

@@ -19,7 +19,7 @@ import tools.jackson.databind.node.ObjectNode;
 public final class ResultText {
 
     public static JsonNode of(Assessment assessment) {
-        ObjectNode root = JobText.mapper().createObjectNode();
+        ObjectNode root = JobText.object();
         root.put("broadside", 1);
         root.put("status", "preliminary");
         root.put("version", assessment.about().version());

@@ -11,7 +11,7 @@ import tools.jackson.databind.node.ObjectNode;
 public final class SchemaText {
 
     public static JsonNode of() {
-        ObjectNode root = JobText.mapper().createObjectNode();
+        ObjectNode root = JobText.object();
         root.put("$schema", "https://json-schema.org/draft/2020-12/schema");
         root.put("$id", "urn:broadside:job:1");
         root.put("title", "Broadside job file, version 1");

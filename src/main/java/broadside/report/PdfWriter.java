@@ -7,7 +7,6 @@ import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.OutputStream;
 import java.nio.ByteBuffer;
-import java.nio.charset.StandardCharsets;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.List;
@@ -34,11 +33,14 @@ public final class PdfWriter {
         ByteArrayOutputStream bytes = new ByteArrayOutputStream(65_536);
         try (PDDocument document = new PDDocument()) {
             document.setVersion(1.7f);
+            MessageDigest digest = digest();
             for (Flow.Leaf leaf : flow.leaves()) {
-                leaf.page().getCOSObject().setItem(COSName.CONTENTS, Envelope.stream(document,
-                    Envelope.pack(leaf.content().bytes())));
+                byte[] packed = Envelope.pack(leaf.content().bytes());
+                digest.update(packed);
+                leaf.page().getCOSObject().setItem(COSName.CONTENTS, Envelope.stream(document, packed));
                 document.addPage(leaf.page());
             }
+            document.setDocumentId(ByteBuffer.wrap(digest.digest(job.bytes())).getLong());
             typeset.embed(document, flow.resources());
             surround(document, sheet, job, new Metadata(sheet), root, headings, flow);
             document.save(bytes);
@@ -55,15 +57,12 @@ public final class PdfWriter {
         envelope.colours(profile);
         envelope.attach(job, metadata.pdfDate());
         metadata.write(document, description);
-        document.setDocumentId(identity(sheet, job));
     }
 
-    /** Returns a number that is the same for the same sheet and job, and for no others in practice. */
-    private static long identity(Sheet sheet, Attachment job) {
+    /** What identifies the document is made from its pages and its job, so that the same ones give the same bytes. */
+    private static MessageDigest digest() {
         try {
-            MessageDigest digest = MessageDigest.getInstance("SHA-256");
-            digest.update(sheet.toString().getBytes(StandardCharsets.UTF_8));
-            return ByteBuffer.wrap(digest.digest(job.bytes())).getLong();
+            return MessageDigest.getInstance("SHA-256");
         } catch (NoSuchAlgorithmException e) {
             throw new ReportException("this Java has no SHA-256, which every Java must have", e);
         }

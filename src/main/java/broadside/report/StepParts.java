@@ -56,7 +56,7 @@ final class StepParts {
     /** An empty line makes no element. */
     private static void add(Band.Cell cell, Words words, Type type, Tag body) {
         if (!words.isEmpty()) {
-            cell.add(words, type, body.child("P"));
+            cell.add(words, type, body);
         }
     }
 
