@@ -39,6 +39,9 @@ final class AllJobs {
     private static List<ItemResult> assessAll() {
         List<ItemResult> results = new ArrayList<>();
         files().forEach((name, bytes) -> {
+            if (!name.endsWith(".json")) {
+                return;
+            }
             JsonNode node = JobText.read(bytes);
             JsonNode job = node.has("given") ? node.get("given") : node;
             if (!job.has("part")) {
