@@ -5,7 +5,6 @@ import broadside.site.Averaging;
 import broadside.site.Site;
 import broadside.table.Coefficient;
 import broadside.table.Edition;
-import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.List;
 import java.util.Map;
@@ -21,50 +20,31 @@ final class Asce716 implements WindCode {
         "C", "open ground with scattered obstacles below 30 ft",
         "D", "flat ground without obstacles, and water");
 
-    private final Edition edition;
     private final Asce7Velocity velocity;
     private final Asce7Signs signs;
     private final Constants constants;
-    private final Level level;
-    private final SiteTerms terms;
+    private final CodeFacts facts;
 
     Asce716(Edition edition) {
-        this.edition = edition;
         this.velocity = new Asce7Velocity(edition);
         this.signs = new Asce7Signs(edition);
         this.constants = new Constants(edition);
         Coefficient service = edition.rows("load-combinations").number("allowable-full-dead", "w");
-        this.level = new Level("strength", "service (ASD)", service.value(), Numbers.plain(service.value()) + " W, allowable stress design",
+        Level level = new Level("strength", "service (ASD)", service.value(), Numbers.plain(service.value()) + " W, allowable stress design",
             service.source().citation(), service.source().status());
-        this.terms = new SiteTerms(Averaging.of(edition.property("averaging")).orElseThrow(), edition.rows("exposure").keys().stream()
+        SiteTerms terms = new SiteTerms(Averaging.of(edition.property("averaging")).orElseThrow(), edition.rows("exposure").keys().stream()
             .map(k -> new SiteTerms.Terrain(k, MEANINGS.getOrDefault(k, ""))).toList(), OPTIONS);
+        this.facts = new CodeFacts(edition, terms, level, new PanelSymbols("B", "s", "g"), "q_h");
     }
 
     @Override
-    public Edition edition() {
-        return edition;
+    public CodeFacts facts() {
+        return facts;
     }
 
     @Override
-    public SiteTerms terms() {
-        return terms;
-    }
-
-    @Override
-    public Level level() {
-        return level;
-    }
-
-    @Override
-    public PanelSymbols symbols() {
-        return new PanelSymbols("B", "s", "g");
-    }
-
-    @Override
-    public double velocityPressure(Site site, double height, Trace trace) {
-        return trace.once("velocity pressure at " + height + " m", () -> velocity.pressure(site, height, trace), known ->
-            trace.line("velocity-pressure", "q_h", "velocity pressure at the same height as above").in("q_h", known, "Pa")
-                .from("as above", Status.DERIVED).gives("q_h", known, "Pa"));
+    public double workOutVelocityPressure(Site site, double height, Trace trace) {
+        return velocity.pressure(site, height, trace);
     }
 
     @Override

@@ -6,9 +6,9 @@ import broadside.site.Site;
 import broadside.table.Edition;
 import broadside.table.Rows;
 import broadside.table.Source;
-import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 
@@ -17,61 +17,42 @@ final class En1991 implements WindCode {
 
     private static final Set<String> OPTIONS = Set.of("direction-factor", "season-factor", "air-density");
 
-    private final Edition edition;
-    private final Constants constants;
-    private final En1991Wind wind;
-    private final En1991Walls walls;
-    private final Level level;
-    private final SiteTerms terms;
-
-    En1991(Edition edition) {
-        this.edition = edition;
-        this.constants = new Constants(edition);
-        this.wind = new En1991Wind(edition);
-        this.walls = new En1991Walls(edition);
-        Rows factors = edition.rows("partial-factors");
-        Source place = factors.number("en-1990-str-geo-b", "gamma-Q").source();
-        double gamma = factors.number("en-1990-str-geo-b", "gamma-Q").value();
-        this.level = new Level("characteristic", "factored", gamma, "partial factor " + Numbers.plain(gamma) + " on wind",
-            place.citation(), place.status());
-        Rows terrain = edition.rows("terrain");
-        this.terms = new SiteTerms(Averaging.of(edition.property("averaging")).orElseThrow(),
-            terrain.keys().stream().map(k -> new SiteTerms.Terrain(k, MEANINGS.getOrDefault(k, ""))).toList(), OPTIONS);
-    }
-
     /** Plain words for the categories of table 4.1. */
-    private static final java.util.Map<String, String> MEANINGS = java.util.Map.of(
+    private static final Map<String, String> MEANINGS = Map.of(
         "0", "open sea, or a coast that lies open to it",
         "I", "a lake shore, or flat bare ground without obstacles",
         "II", "open fields with low plants and single trees or houses far apart",
         "III", "villages, suburbs, woodland",
         "IV", "a town centre: at least a seventh of the ground built up, houses higher than 15 m on average");
 
-    @Override
-    public Edition edition() {
-        return edition;
+    private final Constants constants;
+    private final En1991Wind wind;
+    private final En1991Walls walls;
+    private final CodeFacts facts;
+
+    En1991(Edition edition) {
+        this.constants = new Constants(edition);
+        this.wind = new En1991Wind(edition);
+        this.walls = new En1991Walls(edition);
+        Rows factors = edition.rows("partial-factors");
+        Source place = factors.number("en-1990-str-geo-b", "gamma-Q").source();
+        double gamma = factors.number("en-1990-str-geo-b", "gamma-Q").value();
+        Level level = new Level("characteristic", "factored", gamma, "partial factor " + Numbers.plain(gamma) + " on wind",
+            place.citation(), place.status());
+        Rows terrain = edition.rows("terrain");
+        SiteTerms terms = new SiteTerms(Averaging.of(edition.property("averaging")).orElseThrow(),
+            terrain.keys().stream().map(k -> new SiteTerms.Terrain(k, MEANINGS.getOrDefault(k, ""))).toList(), OPTIONS);
+        this.facts = new CodeFacts(edition, terms, level, new PanelSymbols("b", "h", "z_g"), "q_p");
     }
 
     @Override
-    public SiteTerms terms() {
-        return terms;
+    public CodeFacts facts() {
+        return facts;
     }
 
     @Override
-    public Level level() {
-        return level;
-    }
-
-    @Override
-    public PanelSymbols symbols() {
-        return new PanelSymbols("b", "h", "z_g");
-    }
-
-    @Override
-    public double velocityPressure(Site site, double height, Trace trace) {
-        return trace.once("velocity pressure at " + height + " m", () -> wind.peakPressure(site, height, trace), known ->
-            trace.line("velocity-pressure", "q_p", "velocity pressure at the same height as above").in("q_p", known, "Pa")
-                .from("as above", Status.DERIVED).gives("q_p", known, "Pa"));
+    public double workOutVelocityPressure(Site site, double height, Trace trace) {
+        return wind.peakPressure(site, height, trace);
     }
 
     @Override
@@ -111,7 +92,7 @@ final class En1991 implements WindCode {
             .in("b/h", panel.width() / h).from(place.citation(), place.status())
             .reads(clear(panel) ? "signboard, as z_g is not less than h/4" : "signboard, as z_g is less than h/4 but b/h is not above 1",
                 constants.number("signboard-cf"), "1");
-        double w = NetPressure.record(site, level, trace, "all", "w", (name, symbol) ->
+        double w = NetPressure.record(site, level(), trace, "all", "w", (name, symbol) ->
             trace.line(name, symbol, "net pressure on the board").in("q_p", qp, "Pa").in("c_f", cf)
                 .from(place.publicationAndEdition() + ", 5.3(2)", place.status()), "q_p c_f", qp * cf);
         double b = panel.width();

@@ -3,6 +3,7 @@ package broadside.codes;
 import broadside.panel.Panel;
 import broadside.site.Site;
 import broadside.table.Edition;
+import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.List;
 
@@ -12,24 +13,15 @@ import java.util.List;
  */
 public interface WindCode {
 
-    /** The edition whose tables are read. */
-    Edition edition();
-
-    /** What it wants to know of the site. */
-    SiteTerms terms();
-
-    /** The level of its loads and the companion. */
-    Level level();
-
-    /** How it writes the width and height of a panel. */
-    PanelSymbols symbols();
+    /** What is fixed about it. */
+    CodeFacts facts();
 
     /**
-     * Velocity pressure at a height above the ground, Pa; recorded as "velocity-pressure".
+     * Works out the velocity pressure at a height above the ground, Pa; recorded as "velocity-pressure".
      *
      * @throws NotCovered where the code has no rule
      */
-    double velocityPressure(Site site, double height, Trace trace);
+    double workOutVelocityPressure(Site site, double height, Trace trace);
 
     /**
      * The load cases of a panel with their zones, wind from the front. The first case is the one in which the wind
@@ -38,4 +30,28 @@ public interface WindCode {
      * @throws NotCovered where the code has no rule
      */
     List<LoadCase> netPressures(Panel panel, Site site, Trace trace);
+
+    /** Velocity pressure at a height, Pa: worked out once on a sheet and taken over where the same height comes again. */
+    default double velocityPressure(Site site, double height, Trace trace) {
+        String symbol = facts().pressure();
+        return trace.once("velocity pressure at " + height + " m", () -> workOutVelocityPressure(site, height, trace), known ->
+            trace.line("velocity-pressure", symbol, "velocity pressure at the same height as above").in(symbol, known, "Pa")
+                .from("as above", Status.DERIVED).gives(symbol, known, "Pa"));
+    }
+
+    default Edition edition() {
+        return facts().edition();
+    }
+
+    default SiteTerms terms() {
+        return facts().terms();
+    }
+
+    default Level level() {
+        return facts().level();
+    }
+
+    default PanelSymbols symbols() {
+        return facts().symbols();
+    }
 }
