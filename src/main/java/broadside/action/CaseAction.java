@@ -21,8 +21,24 @@ import java.util.List;
 public record CaseAction(String name, String label, String direction, Windward windward, List<PanelZones> zones, double force,
                          double height, double side, double baseShear, double baseMoment, double torsion) {
 
-    /** The zones of one panel; {@code part} is empty when the item has one panel only. */
-    public record PanelZones(String part, double left, List<ZonePressure> zones) { }
+    /**
+     * The zones of one panel; {@code part} is empty when the item has one panel only.
+     *
+     * @param left      left edge from the middle of the item, m
+     * @param perMetre  moment at the ground for each metre of a wall in each zone, N m/m; empty for a board
+     */
+    public record PanelZones(String part, double left, List<ZonePressure> zones, List<Double> perMetre) {
+
+        PanelZones atLevel(double factor) {
+            return new PanelZones(part, left, zones.stream().map(z -> z.atLevel(factor)).toList(), perMetre.stream().map(m -> factor * m).toList());
+        }
+    }
+
+    /** The same case at the level that a factor leads to. */
+    public CaseAction atLevel(double factor) {
+        return new CaseAction(name, label, direction, windward, zones.stream().map(z -> z.atLevel(factor)).toList(), factor * force, height, side,
+            factor * baseShear, factor * baseMoment, factor * torsion);
+    }
 
     /** The same case met from the other end, where that only mirrors it. */
     CaseAction fromOtherEnd(List<PanelZones> otherZones) {

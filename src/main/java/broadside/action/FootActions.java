@@ -109,6 +109,11 @@ public final class FootActions {
         String of(String symbol) {
             return index == 0 ? symbol : indexed(symbol, index);
         }
+
+        /** What a symbol of a pressure has below the line: A of w_A, 0-s of p_{0-s}. */
+        static String bare(String symbol) {
+            return symbol.replaceAll("^._\\{?|}$", "");
+        }
     }
 
     /** F becomes F_1, M_T becomes M_{T,1}. */
@@ -127,6 +132,9 @@ public final class FootActions {
             .in(h, p.height(), "m");
         double z = rise == 0 ? arm.gives(names.panel().gap() + " + " + h + " / 2", panel.height(), "m")
             : arm.in("Δ", rise, "m").gives(names.panel().gap() + " + " + h + " / 2 + Δ", panel.height(), "m");
+        if (p.kind() == Panel.Kind.WALL) {
+            perMetre(panel, names, trace);
+        }
         double moment = line(trace, "base-moment", names, "M", "moment at the ground line").in(names.of("F"), force, "N").in(names.of("z"), z, "m")
             .gives(names.of("F") + " " + names.of("z"), force * z, "N m");
         double e = panel.eccentricity();
@@ -161,7 +169,7 @@ public final class FootActions {
         Trace.Line line = line(trace, "force", names, "F", "wind force on the panel");
         StringBuilder formula = new StringBuilder();
         for (ZonePressure zone : zones) {
-            String width = zones.size() == 1 ? names.panel().width() : "l_{" + zone.symbol().replaceAll("^._\\{?|}$", "") + "}";
+            String width = zones.size() == 1 ? names.panel().width() : "l_{" + Names.bare(zone.symbol()) + "}";
             line.in(zone.symbol(), zone.pressure(), "Pa").in(width, zone.width(), "m");
             formula.append(formula.isEmpty() ? "" : " + ").append(zone.symbol()).append(' ').append(width);
         }
@@ -194,7 +202,19 @@ public final class FootActions {
 
     private static List<PanelZones> zones(Combination combination) {
         return combination.panels().stream().map(p -> new PanelZones(p.panel().part(), p.panel().middle() - p.panel().width() / 2,
-            p.load().zones())).toList();
+            p.load().zones(), p.panel().kind() == Panel.Kind.WALL
+                ? p.load().zones().stream().map(z -> z.pressure() * p.panel().height() * p.height()).toList() : List.of())).toList();
+    }
+
+    /** Moment at the ground for each metre of a wall, zone by zone. */
+    private static void perMetre(PanelForce panel, Names names, Trace trace) {
+        String h = names.panel().height();
+        for (ZonePressure zone : panel.load().zones()) {
+            trace.line("moment-per-metre/" + names.load() + "/" + zone.zone(), "m_{" + Names.bare(zone.symbol()) + "}",
+                "moment at the ground for each metre of wall").in(zone.symbol(), zone.pressure(), "Pa").in(h, panel.panel().height(), "m")
+                .in(names.of("z"), panel.height(), "m").from(STATICS, Status.DERIVED)
+                .gives(zone.symbol() + " " + h + " " + names.of("z"), zone.pressure() * panel.panel().height() * panel.height(), "N m/m");
+        }
     }
 
     private FootActions() { }

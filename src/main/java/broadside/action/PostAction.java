@@ -15,4 +15,10 @@ import java.util.Optional;
  * @param moment    at the ground line, N m
  */
 public record PostAction(int post, double position, String zone, double gate, Optional<Double> share, String named, double shear,
-                         double moment) { }
+                         double moment) {
+
+    /** The same post at the level that a factor leads to. */
+    public PostAction atLevel(double factor) {
+        return new PostAction(post, position, zone, gate, share, named, factor * shear, factor * moment);
+    }
+}

@@ -43,6 +43,15 @@ public record Loads(Velocity velocity, List<CaseAction> cases, Map<String, CaseA
         return governing.get(quantity);
     }
 
+    /** The same loads at the companion level. */
+    public Loads companion() {
+        double f = level.factor();
+        Map<String, CaseAction> governs = new TreeMap<>();
+        governing.forEach((quantity, action) -> governs.put(quantity, action.atLevel(f)));
+        return new Loads(velocity, cases.stream().map(c -> c.atLevel(f)).toList(), governs, posts.stream().map(p -> p.atLevel(f)).toList(), edgeOn, level,
+            selfWeight, balance);
+    }
+
     /** The names of the governing cases, post-moment among them where there are posts. */
     public Map<String, String> governingNames() {
         Map<String, String> names = new TreeMap<>();

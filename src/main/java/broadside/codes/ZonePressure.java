@@ -11,4 +11,10 @@ package broadside.codes;
  * @param coefficient  net coefficient, all reductions in
  * @param pressure     net pressure, Pa
  */
-public record ZonePressure(String zone, String symbol, double from, double to, double width, double coefficient, double pressure) { }
+public record ZonePressure(String zone, String symbol, double from, double to, double width, double coefficient, double pressure) {
+
+    /** The same zone at the level that a factor leads to. */
+    public ZonePressure atLevel(double factor) {
+        return new ZonePressure(zone, symbol, from, to, width, coefficient, factor * pressure);
+    }
+}

@@ -11,6 +11,7 @@ import broadside.codes.ZonePressure;
 import broadside.trace.OwnValue;
 import broadside.trace.Step;
 import broadside.trace.Trace;
+import java.util.List;
 import tools.jackson.databind.JsonNode;
 import tools.jackson.databind.node.ArrayNode;
 import tools.jackson.databind.node.ObjectNode;
@@ -53,7 +54,10 @@ public final class ResultText {
         node.putObject("velocity-pressure").put("height_m", loads.velocity().height()).put("value_Pa", loads.velocity().pressure())
             .put("level", level.name());
         ArrayNode cases = node.putArray("cases");
-        loads.cases().forEach(c -> caseOf(cases.addObject(), c, level));
+        List<CaseAction> companions = loads.companion().cases();
+        for (int i = 0; i < loads.cases().size(); i++) {
+            caseOf(cases.addObject(), loads.cases().get(i), companions.get(i), level);
+        }
         ObjectNode governing = node.putObject("governing");
         loads.governingNames().forEach(governing::put);
         node.putObject("companion").put("level", level.companion()).put("factor", level.factor()).put("rule", level.rule());
@@ -69,7 +73,7 @@ public final class ResultText {
             .put("unit", b.unit()));
     }
 
-    private static void caseOf(ObjectNode node, CaseAction action, Level level) {
+    private static void caseOf(ObjectNode node, CaseAction action, CaseAction companion, Level level) {
         node.put("case", action.name()).put("label", action.label()).put("direction", action.direction())
             .put("windward-end", action.windward().name().toLowerCase(java.util.Locale.ROOT)).put("level", level.name());
         ArrayNode zones = node.putArray("zones");
@@ -84,9 +88,8 @@ public final class ResultText {
         }
         node.put("force_N", action.force()).put("height_m", action.height()).put("side_m", action.side()).put("base_shear_N", action.baseShear())
             .put("base_moment_Nm", action.baseMoment()).put("torsion_Nm", action.torsion());
-        node.putObject("companion").put("level", level.companion()).put("force_N", level.factor() * action.force())
-            .put("base_shear_N", level.factor() * action.baseShear()).put("base_moment_Nm", level.factor() * action.baseMoment())
-            .put("torsion_Nm", level.factor() * action.torsion());
+        node.putObject("companion").put("level", level.companion()).put("force_N", companion.force())
+            .put("base_shear_N", companion.baseShear()).put("base_moment_Nm", companion.baseMoment()).put("torsion_Nm", companion.torsion());
     }
 
     private static void post(ObjectNode node, PostAction post, Level level) {
@@ -99,7 +102,7 @@ public final class ResultText {
             node.put("gate_leaf_m", post.gate());
         }
         node.put("case", post.named()).put("shear_N", post.shear()).put("moment_Nm", post.moment())
-            .put("companion_moment_Nm", level.factor() * post.moment());
+            .put("companion_moment_Nm", post.atLevel(level.factor()).moment());
     }
 
     private static void overrides(ObjectNode node, Trace sheet) {

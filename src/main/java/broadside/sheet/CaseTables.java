@@ -28,8 +28,8 @@ final class CaseTables {
     static List<Block> of(Item item, Loads loads, Format format) {
         List<Block> blocks = new ArrayList<>();
         boolean sign = item.choose(s -> true, h -> false);
-        blocks.add(cases(loads, sign, format, 1, loads.level().name()));
-        blocks.add(cases(loads, sign, format, loads.level().factor(), loads.level().companion() + ", " + loads.level().rule()));
+        blocks.add(cases(loads, sign, format, loads.level().name()));
+        blocks.add(cases(loads.companion(), sign, format, loads.level().companion() + ", " + loads.level().rule()));
         blocks.add(new Paragraph("Forces are magnitudes. The wind was taken on the front and on the back and from both ends; where a case is not shown for an end, "
             + "the end shown is the worse. Torsion is about the middle" + (sign ? " of the posts" : "; the posts are not worked out from it")
             + "; it is positive when it turns the right side backwards, seen from the front. Loads are rounded up from unrounded values, at display only.",
@@ -47,58 +47,69 @@ final class CaseTables {
         return blocks;
     }
 
-    private static Table cases(Loads loads, boolean sign, Format format, double factor, String level) {
+    private static Table cases(Loads loads, boolean sign, Format format, String level) {
         List<Row> rows = new ArrayList<>();
         for (CaseAction c : loads.cases()) {
             List<String> governs = new ArrayList<>();
-            if (loads.governs("base-moment") == c) {
+            if (same(loads.governs("base-moment"), c)) {
                 governs.add("moment");
             }
-            if (sign && loads.governs("torsion") == c && c.torsion() != 0) {
+            if (sign && same(loads.governs("torsion"), c) && c.torsion() != 0) {
                 governs.add("torsion");
             }
             boolean marked = !governs.isEmpty();
-            rows.add(new Row(List.of(Format.caseName(c.name()), c.direction() + Format.end(c.windward()), format.force(factor * c.force()), format.length(c.height()),
-                format.moment(factor * c.baseMoment()), torsion(c, factor, format), marked ? String.join(", ", governs) : "-"), marked));
+            rows.add(new Row(List.of(Format.caseName(c.name()), c.direction() + Format.end(c.windward()), format.force(c.force()), format.length(c.height()),
+                format.moment(c.baseMoment()), torsion(c, format), marked ? String.join(", ", governs) : "-"), marked));
         }
         return new Table("Loads at the ground line, " + level, List.of(new Column("Case", false, 3), new Column("Wind on", false, 4),
             new Column("Force = base shear", true, 3), new Column("Height of force", true, 3), new Column("Base moment", true, 3),
             new Column("Torsion", true, 3), new Column("Governs", false, 3)), rows);
     }
 
-    private static String torsion(CaseAction c, double factor, Format format) {
-        return c.torsion() < 0 ? "-" + format.moment(-factor * c.torsion()) : format.moment(factor * c.torsion());
+    private static boolean same(CaseAction a, CaseAction b) {
+        return a.name().equals(b.name()) && a.direction().equals(b.direction()) && a.windward() == b.windward();
+    }
+
+    private static String torsion(CaseAction c, Format format) {
+        return c.torsion() < 0 ? "-" + format.moment(-c.torsion()) : format.moment(c.torsion());
     }
 
     private static Table zones(Item item, Loads loads, Format format) {
-        double f = loads.level().factor();
-        boolean parts = item.panels().size() > 1;
-        double origin = item.choose(sign -> 0.0, hoarding -> hoarding.length().metres() / 2);
+        boolean wall = item.panels().stream().anyMatch(p -> p.kind() == Panel.Kind.WALL);
+        List<CaseAction> companions = loads.companion().cases();
         List<Row> rows = new ArrayList<>();
-        for (CaseAction c : loads.cases()) {
+        for (int k = 0; k < loads.cases().size(); k++) {
+            CaseAction c = loads.cases().get(k);
             for (int i = 0; i < c.zones().size() && c.direction().equals("front"); i++) {
-                PanelZones panel = c.zones().get(i);
-                Panel of = item.panels().get(i);
-                double start = of.kind() == Panel.Kind.WALL ? panel.left() + origin : 0;
-                for (ZonePressure z : panel.zones()) {
-                    String where = (parts ? panel.part() + ", " : "") + (panel.zones().size() == 1 && of.kind() == Panel.Kind.BOARD ? "whole board"
-                        : HoardingDrawing.shortName(z.zone()));
-                    double arm = of.clearance() + of.height() / 2;
-                    rows.add(new Row(List.of(Format.caseName(c.name()) + Format.end(c.windward()), where, format.length(start + z.from()) + " to "
-                        + format.length(start + z.to()), format.plain(z.coefficient()), format.pressure(z.pressure()), format.pressure(f * z.pressure()),
-                        perMetre(z.pressure() * of.height() * arm, format)), false));
-                }
+                rows.addAll(zoneRows(item, c, companions.get(k), i, format));
             }
         }
-        String per = format.units() == Units.US ? "foot" : "metre";
-        return new Table("Net pressures by zone, both faces together; places are measured from the left end, seen from the front",
-            List.of(new Column("Case", false, 6), new Column("Zone", false, 4), new Column("From, to", false, 6), new Column("Coefficient", true, 3),
-                new Column("Pressure, " + loads.level().name(), true, 3), new Column("Pressure, " + loads.level().companion(), true, 3),
-                new Column("Moment per " + per + ", " + loads.level().name(), true, 4)), rows);
+        List<Column> columns = new ArrayList<>(List.of(new Column("Case", false, 6), new Column("Zone", false, 4), new Column("From, to", false, 6),
+            new Column("Coefficient", true, 3), new Column("Pressure, " + loads.level().name(), true, 3),
+            new Column("Pressure, " + loads.level().companion(), true, 3)));
+        if (wall) {
+            columns.add(new Column("Moment per " + (format.units() == Units.US ? "foot" : "metre") + ", " + loads.level().name(), true, 4));
+        }
+        return new Table("Net pressures by zone, both faces together; places are measured from the left end, seen from the front", columns, rows);
     }
 
-    private static String perMetre(double newtonMetresPerMetre, Format format) {
-        return format.moment(format.units() == Units.US ? newtonMetresPerMetre * 0.3048 : newtonMetresPerMetre);
+    private static List<Row> zoneRows(Item item, CaseAction c, CaseAction companion, int index, Format format) {
+        PanelZones panel = c.zones().get(index);
+        boolean board = item.panels().get(index).kind() == Panel.Kind.BOARD;
+        double start = item.choose(sign -> 0.0, hoarding -> panel.left() + hoarding.length().metres() / 2);
+        List<Row> rows = new ArrayList<>();
+        for (int i = 0; i < panel.zones().size(); i++) {
+            ZonePressure z = panel.zones().get(i);
+            String zone = panel.zones().size() == 1 && board ? "whole board" : HoardingDrawing.shortName(z.zone());
+            List<String> cells = new ArrayList<>(List.of(Format.caseName(c.name()) + Format.end(c.windward()),
+                (panel.part().isEmpty() ? "" : panel.part() + ", ") + zone, format.length(start + z.from()) + " to " + format.length(start + z.to()),
+                format.plain(z.coefficient()), format.pressure(z.pressure()), format.pressure(companion.zones().get(index).zones().get(i).pressure())));
+            if (!board) {
+                cells.add(format.momentPerLength(panel.perMetre().get(i)));
+            }
+            rows.add(new Row(cells, false));
+        }
+        return rows;
     }
 
     private static Table posts(Item item, Loads loads, Format format) {
@@ -111,7 +122,7 @@ final class CaseTables {
             String carries = p.share().map(s -> format.length(s) + (p.gate() > 0 ? " and " + format.length(p.gate()) + " of gate" : "")).orElse("by statics");
             rows.add(new Row(List.of(Integer.toString(p.post()), format.length(p.position()), p.zone().isEmpty() ? Format.caseName(p.named())
                 : HoardingDrawing.shortName(p.zone()), carries, format.force(p.shear()), format.moment(p.moment()),
-                format.moment(loads.level().factor() * p.moment()), String.join(", ", remarks(p, worst))), worst));
+                format.moment(p.atLevel(loads.level().factor()).moment()), String.join(", ", remarks(p, worst))), worst));
         }
         String more = shown.size() < loads.posts().size() ? ", the worst of each zone of " + loads.posts().size() + " posts" : "";
         return new Table("What reaches the foot of each post, the worst of all cases" + more, List.of(new Column("Post", true, 2),

@@ -58,6 +58,11 @@ final class Format {
         return load(newtonMetres, Dimension.MOMENT);
     }
 
+    /** A moment for each metre, or for each foot where feet lead. */
+    String momentPerLength(double newtonMetresPerMetre) {
+        return moment(units == Units.US ? newtonMetresPerMetre * 0.3048 : newtonMetresPerMetre);
+    }
+
     String pressure(double pascals) {
         return load(pascals, Dimension.PRESSURE);
     }

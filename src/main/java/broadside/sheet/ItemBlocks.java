@@ -49,15 +49,15 @@ final class ItemBlocks {
     private static Answer answer(Assessment assessment, ItemResult item, Loads loads, Format format) {
         List<Fact> lines = new ArrayList<>();
         String companion = loads.level().companion();
-        double f = loads.level().factor();
+        Loads other = loads.companion();
         lines.add(Fact.of("What governs", governs(item, loads), loads.governs("base-moment").label()));
         lines.add(Fact.of("Wind force", format.both(loads.governs("base-shear").force(), Dimension.FORCE) + ", " + loads.level().name(),
-            format.force(f * loads.governs("base-shear").force()) + " " + companion));
-        lines.add(moment(loads, format, f, companion));
+            format.force(other.governs("base-shear").force()) + " " + companion));
+        lines.add(moment(loads, other, format));
         double torsion = Math.abs(loads.governs("torsion").torsion());
         if (item.item().choose(sign -> true, hoarding -> false) && torsion > 0) {
             lines.add(Fact.of("Torsion about the middle of the posts", format.both(torsion, Dimension.MOMENT) + ", " + loads.level().name(),
-                format.moment(f * torsion) + " " + companion + ", " + Format.caseWords(loads.governs("torsion").name())));
+                format.moment(Math.abs(other.governs("torsion").torsion())) + " " + companion + ", " + Format.caseWords(loads.governs("torsion").name())));
         }
         lines.add(Fact.of("How sure", sure(item), "loads only: no post, footing or ground was checked"));
         return new Answer(lines);
@@ -87,12 +87,13 @@ final class ItemBlocks {
             : "posts: case " + post + (torsion.equals(base) ? "" : "; torsion: case " + torsion));
     }
 
-    private static Fact moment(Loads loads, Format format, double f, String companion) {
+    private static Fact moment(Loads loads, Loads other, Format format) {
+        String companion = loads.level().companion();
         return loads.worstPost()
             .map(p -> Fact.of("Moment at the foot of the worst post", format.both(p.moment(), Dimension.MOMENT) + ", " + loads.level().name(),
-                format.moment(f * p.moment()) + " " + companion + ", post " + p.post() + ", " + Format.caseWords(p.named())))
+                format.moment(other.worstPost().orElseThrow().moment()) + " " + companion + ", post " + p.post() + ", " + Format.caseWords(p.named())))
             .orElseGet(() -> Fact.of("Moment at the ground, whole length", format.both(loads.governs("base-moment").baseMoment(), Dimension.MOMENT) + ", "
-                + loads.level().name(), format.moment(f * loads.governs("base-moment").baseMoment()) + " " + companion));
+                + loads.level().name(), format.moment(other.governs("base-moment").baseMoment()) + " " + companion));
     }
 
     /** How well the sources of the calculation are known. */
