@@ -12,7 +12,9 @@ import broadside.trace.Status;
 import broadside.trace.Step;
 import broadside.trace.Trace;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 
 /** The sentences that go with a result: what was assumed, what to mind, what was not checked. */
 final class Notes {
@@ -26,6 +28,8 @@ final class Notes {
         Notes notes = new Notes();
         notes.overrides(sheet);
         notes.site(job.site(), code);
+        notes.unused(job.site(), sheet);
+        notes.leastPressures(job.site(), sheet);
         item.<Runnable>choose(sign -> () -> notes.sign(sign), hoarding -> () -> notes.hoarding(hoarding)).run();
         notes.solidity(job, item, sheet);
         notes.carrying(item);
@@ -63,6 +67,36 @@ final class Notes {
             add(Note.Kind.CAUTION, "The gust factor given is below 0.85; a small sign gets more than 0.85 by the formula, not less.");
         }
         add(Note.Kind.ASSUMPTION, "No shelter by other structures is counted.");
+    }
+
+    /** Values that were given and that this code does not use: said, so that nobody believes they count. */
+    private void unused(Site site, Trace sheet) {
+        if (site.returnPeriod().isPresent() && sheet.find("probability-factor").isEmpty() && uses(sheet, "velocity-pressure")) {
+            add(Note.Kind.CAUTION, "The return period of " + site.returnPeriod().get().typed() + " is not used by this code: the basic wind speed must be that of "
+                + "the map for the risk category.");
+        }
+        if (site.ground().altitude().isPresent()) {
+            add(Note.Kind.ASSUMPTION, "The altitude of " + site.ground().altitude().get().typed() + " does not change these loads: this code takes the basic wind "
+                + "speed of the place as it is" + (site.options().si("ground-elevation").isPresent() ? "; the ground elevation is counted." : "."));
+        }
+    }
+
+    private static boolean uses(Trace sheet, String step) {
+        return sheet.steps().stream().anyMatch(s -> s.name().startsWith(step));
+    }
+
+    /** Which least pressures hold a zone up. */
+    private void leastPressures(Site site, Trace sheet) {
+        Map<String, Double> own = new HashMap<>();
+        sheet.steps().stream().filter(s -> s.name().startsWith("code-pressure/")).forEach(s -> own.put(s.name().substring("code-".length()), s.value()));
+        List<String> raised = own.entrySet().stream().filter(e -> sheet.find(e.getKey()).filter(s -> s.value() > e.getValue()).isPresent())
+            .map(e -> e.getKey().substring("pressure/".length())).sorted().toList();
+        if (site.authorityMinimum().isPresent() && !own.isEmpty()) {
+            add(Note.Kind.CAUTION, raised.isEmpty() ? "The authority's least pressure does not govern: the code gives more in every zone."
+                : "The authority's least pressure governs in " + (raised.size() == own.size() ? "every zone" : "the zones " + String.join(", ", raised)) + ".");
+        }
+        sheet.find("minimum-pressure").filter(least -> sheet.steps().stream().anyMatch(s -> s.name().startsWith("pressure/case-a") && s.value() == least.value()))
+            .ifPresent(least -> add(Note.Kind.CAUTION, "The code's own least pressure governs cases A and B."));
     }
 
     private void topography(Topography ground, WindCode code) {

@@ -5,6 +5,7 @@ import broadside.site.Averaging;
 import broadside.site.Site;
 import broadside.table.Coefficient;
 import broadside.table.Edition;
+import broadside.table.Rows;
 import broadside.trace.Trace;
 import java.util.List;
 import java.util.Map;
@@ -21,12 +22,14 @@ final class Asce716 implements WindCode {
         "D", "flat ground without obstacles, and water");
 
     private final Asce7Velocity velocity;
+    private final Rows risk;
     private final Asce7Signs signs;
     private final Constants constants;
     private final CodeFacts facts;
 
     Asce716(Edition edition) {
         this.velocity = new Asce7Velocity(edition);
+        this.risk = edition.rows("risk-categories");
         this.signs = new Asce7Signs(edition);
         this.constants = new Constants(edition);
         Coefficient service = edition.rows("load-combinations").number("allowable-full-dead", "w");
@@ -52,6 +55,8 @@ final class Asce716 implements WindCode {
         double h = trace.line("reference-height", "h", "height of the top").in("g", panel.clearance(), "m").in("s", panel.height(), "m")
             .from(constants.source("openness-limit").publicationAndEdition() + ", 29.3", constants.source("openness-limit").status())
             .gives("g + s", panel.top(), "m");
+        site.options().word("risk-category").ifPresent(category -> risk.number(category, "years")
+            .into(trace.line("risk-return-period", "R", "return period in years of the map for risk category " + category)));
         double q = velocityPressure(site, h, trace);
         double gust = velocity.gustFactor(site, panel.width(), h, trace);
         return signs.cases(panel, site, this, q, gust, trace);
