@@ -102,9 +102,9 @@ final class En1991Orography {
         }
         double least = constants.number("cliff-least");
         double lowest = constants.number("cliff-least-height");
-        double logX = line(trace, "orography-log-distance", "X", "base 10 logarithm of x/L_e, at least " + Numbers.plain(least)).in("ξ", along)
+        double logX = line(trace, "orography-log-distance", "X", "base 10 logarithm of the distance over the effective length, at least " + Numbers.plain(least)).in("ξ", along)
             .gives("ln(max(ξ; " + Numbers.plain(least) + ")) / ln(10)", Math.log(Math.max(along, least)) / Math.log(10), "1");
-        double logZ = line(trace, "orography-log-height", "Z", "base 10 logarithm of z/L_e, at least " + Numbers.plain(lowest)).in("ζ", up)
+        double logZ = line(trace, "orography-log-height", "Z", "base 10 logarithm of the height over the effective length, at least " + Numbers.plain(lowest)).in("ζ", up)
             .gives("ln(max(ζ; " + Numbers.plain(lowest) + ")) / ln(10)", Math.log(Math.max(up, lowest)) / Math.log(10), "1");
         double a = polynomial(cliff, "A", "Z", logZ, trace);
         double b = polynomial(cliff, "B", "Z", logZ, trace);
@@ -113,7 +113,7 @@ final class En1991Orography {
         if (Numbers.atLeast(along, least)) {
             return location(trace).in("A", a).in("X", logX).in("B", b).in("C", c).gives("max(0; A X² + B X + C)", Math.max(0, formula), "1");
         }
-        double there = line(trace, "orography-location-factor-at-0.1", "s_{0.1}", "location factor at x/L_e = " + Numbers.plain(least)).in("A", a)
+        double there = line(trace, "orography-location-factor-at-0.1", "s_{0.1}", "location factor at a distance over effective length of " + Numbers.plain(least)).in("A", a)
             .in("X", logX).in("B", b).in("C", c).gives("A X² + B X + C", formula, "1");
         double crest = polynomial(upwind, "A", "ζ", up, trace);
         return location(trace).in("A", crest).in("s_{0.1}", there).in("ξ", along)

@@ -54,7 +54,7 @@ final class CalculationBlocks {
 
     private static Table given(Trace sheet) {
         List<Row> rows = sheet.givens().stream().map(g -> new Row(List.of(g.meaning(), plainSymbol(g.symbol()), g.typed().isEmpty() ? "-" : g.typed(),
-            value(g.value(), g.unit())), false)).toList();
+            g.unit().equals("1") ? Format.count(g.value()) : value(g.value(), g.unit())), false)).toList();
         return new Table("What the calculation starts from", List.of(new Column("Meaning", false, 6), new Column("Symbol", false, 2),
             new Column("As typed", false, 3), new Column("In SI", true, 3)), rows);
     }

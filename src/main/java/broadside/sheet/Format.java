@@ -86,6 +86,11 @@ final class Format {
         return Show.number(number, 4, Rounding.NEAREST);
     }
 
+    /** A plain number that was given: 2, 0.85. */
+    static String count(double number) {
+        return number == Math.rint(number) ? Long.toString((long) number) : Double.toString(number);
+    }
+
     /** A load in both systems: the leading one first. */
     String both(double si, Dimension dimension) {
         Units other = units == Units.US ? Units.METRIC : Units.US;

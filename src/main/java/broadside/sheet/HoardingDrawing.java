@@ -61,8 +61,7 @@ final class HoardingDrawing {
         if (loads.isEmpty()) {
             return;
         }
-        CaseAction governing = loads.get().governs("base-moment").zones().stream().anyMatch(p -> p.zones().size() > 1)
-            ? loads.get().governs("base-moment") : zoned(loads.get());
+        CaseAction governing = ItemDrawing.shown(loads.get());
         double most = governing.zones().stream().flatMap(p -> p.zones().stream()).mapToDouble(ZonePressure::pressure).max().orElseThrow();
         double bottom = hoarding.clearance().metres();
         for (PanelZones panel : governing.zones()) {
@@ -78,12 +77,6 @@ final class HoardingDrawing {
                 }
             }
         }
-    }
-
-    /** The case with zones where there is one, else the one that governs the moment. */
-    private static CaseAction zoned(Loads loads) {
-        return loads.cases().stream().filter(c -> c.direction().equals("front"))
-            .filter(c -> c.zones().stream().anyMatch(p -> p.zones().size() > 1)).findFirst().orElse(loads.governs("base-moment"));
     }
 
     /** "case-c/s-2s" becomes "s-2s", "case-a" becomes "all": the words on the drawing and in tables. */

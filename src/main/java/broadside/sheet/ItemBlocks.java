@@ -50,7 +50,7 @@ final class ItemBlocks {
         List<Fact> lines = new ArrayList<>();
         String companion = loads.level().companion();
         Loads other = loads.companion();
-        lines.add(Fact.of("What governs", governs(item, loads), loads.governs("base-moment").label()));
+        lines.add(Fact.of("Governing case", governs(item, loads), loads.governs("base-moment").label()));
         lines.add(Fact.of("Wind force", format.both(loads.governs("base-shear").force(), Dimension.FORCE) + ", " + loads.level().name(),
             format.force(other.governs("base-shear").force()) + " " + companion));
         lines.add(moment(loads, other, format));
@@ -78,13 +78,12 @@ final class ItemBlocks {
         String post = loads.worstPost().map(p -> Format.caseName(p.named())).orElse(base);
         String torsion = sign && loads.governs("torsion").torsion() != 0 ? Format.caseName(loads.governs("torsion").name()) : base;
         if (post.equals(base) && torsion.equals(base)) {
-            return "case " + base;
+            return base;
         }
         if (post.equals(base)) {
-            return "case " + base + "; torsion: case " + torsion;
+            return base + "; torsion: " + torsion;
         }
-        return "case " + base + "; " + (post.equals(torsion) ? "posts and torsion: case " + post
-            : "posts: case " + post + (torsion.equals(base) ? "" : "; torsion: case " + torsion));
+        return base + "; " + (post.equals(torsion) ? "posts and torsion: " + post : "posts: " + post + (torsion.equals(base) ? "" : "; torsion: " + torsion));
     }
 
     private static Fact moment(Loads loads, Loads other, Format format) {
@@ -121,7 +120,7 @@ final class ItemBlocks {
 
     private static String caption(ItemResult item) {
         return "Drawn to scale, dimensions as typed." + item.loads().map(l -> " Hatched the denser the higher the pressure, zones as in "
-            + Format.caseWords(l.governs("base-moment").name()) + Format.end(l.governs("base-moment").windward())
+            + Format.caseWords(ItemDrawing.shown(l).name()) + Format.end(ItemDrawing.shown(l).windward())
             + item.item().choose(sign -> "; the circle is where the force acts in " + Format.caseWords(l.governs("torsion").name())
                 + Format.end(l.governs("torsion").windward()), hoarding -> "") + ".").orElse("");
     }

@@ -1,5 +1,6 @@
 package broadside.sheet;
 
+import broadside.action.CaseAction;
 import broadside.assess.Loads;
 import broadside.panel.Item;
 import broadside.quantity.Units;
@@ -28,6 +29,17 @@ public final class ItemDrawing {
                 + (hoarding.gates().isEmpty() ? "" : " with " + hoarding.gates().size() + (hoarding.gates().size() == 1 ? " gate" : " gates")));
         return what + loads.map(l -> ". The force of the governing case, " + format.force(l.governs("base-moment").force()) + ", acts "
             + format.length(l.governs("base-moment").height()) + " above the ground.").orElse(".");
+    }
+
+    /** The case whose zones are drawn: the one that governs the moment, or the first with zones where that one has none. */
+    static CaseAction shown(Loads loads) {
+        CaseAction governing = loads.governs("base-moment");
+        return zoned(governing) ? governing
+            : loads.cases().stream().filter(c -> c.direction().equals("front") && zoned(c)).findFirst().orElse(governing);
+    }
+
+    private static boolean zoned(CaseAction action) {
+        return action.zones().stream().anyMatch(p -> p.zones().size() > 1);
     }
 
     /** A round length for the scale bar, at most about a quarter of the width drawn. */

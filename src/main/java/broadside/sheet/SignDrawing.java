@@ -16,7 +16,7 @@ import java.util.Optional;
 /** Elevation and side view of a sign on posts. */
 final class SignDrawing {
 
-    private static final double TALLEST = 138;
+    private static final double TALLEST = 122;
     private static final double ROOM = 220;
 
     private final PostSign sign;
@@ -81,7 +81,7 @@ final class SignDrawing {
         if (loads.isEmpty()) {
             return;
         }
-        CaseAction governing = loads.get().governs("base-moment");
+        CaseAction governing = ItemDrawing.shown(loads.get());
         double most = governing.zones().stream().flatMap(p -> p.zones().stream()).mapToDouble(ZonePressure::pressure).max().orElseThrow();
         for (int i = 0; i < governing.zones().size(); i++) {
             PanelZones panel = governing.zones().get(i);
