@@ -48,10 +48,15 @@ record Combination(String name, String label, Windward windward, List<PanelForce
         return panels.stream().anyMatch(p -> p.load().zones().size() > 1);
     }
 
+    /** Whether a panel has a return at one end that the other end has not. */
+    boolean unlikeEnds() {
+        return panels.stream().anyMatch(p -> !p.panel().endsAlike());
+    }
+
     /** Whether this is the mirror image of the same case met from the other end. */
     boolean mirrors(Combination other) {
         return near(force(), other.force()) && near(moment(), other.moment()) && near(torsion(), -other.torsion())
-            && panels.stream().allMatch(p -> p.panel().endsAlike());
+            && !unlikeEnds();
     }
 
     private static boolean near(double a, double b) {

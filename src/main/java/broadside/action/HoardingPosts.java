@@ -59,7 +59,7 @@ public final class HoardingPosts {
             Share most = shares(hoarding, bay, open, shut).stream().max(Comparator.comparingDouble(Share::moment)).orElseThrow();
             worst.add(most);
             posts.add(new PostAction(posts.size() + 1, bay.at(), most.zone(), most.placed().shut() ? bay.leaf() : 0,
-                Optional.of(bay.to() - bay.from()), most.named(), most.force(), most.moment()));
+                Optional.of(bay.to() - bay.from()), most.named(), most.force(), most.named(), most.moment()));
         }
         record(posts, worst, symbols, trace);
         return posts;
@@ -128,14 +128,12 @@ public final class HoardingPosts {
         return at;
     }
 
-    /** Half of the leaf of a gate that begins or ends at an edge. A gate at the end of the hoarding hangs on one post. */
+    /** Half of the leaves in an opening that begins or ends at an edge; in an opening at an end all of them hang on one post. */
     private static double leaf(Hoarding hoarding, double edge) {
-        for (Hoarding.Gate gate : hoarding.gates()) {
-            boolean begins = Math.abs(gate.from().metres() - edge) < 1e-9;
-            boolean ends = Math.abs(gate.end() - edge) < 1e-9;
-            boolean atAnEnd = gate.from().metres() == 0 || Math.abs(gate.end() - hoarding.length().metres()) < 1e-9;
-            if (begins || ends) {
-                return atAnEnd ? gate.width().metres() : gate.width().metres() / 2;
+        for (Hoarding.Opening opening : hoarding.openings()) {
+            double width = opening.to() - opening.from();
+            if (Math.abs(opening.from() - edge) < 1e-9 || Math.abs(opening.to() - edge) < 1e-9) {
+                return opening.from() == 0 || opening.to() == hoarding.length().metres() ? width : width / 2;
             }
         }
         return 0;

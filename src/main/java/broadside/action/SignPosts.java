@@ -5,6 +5,7 @@ import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Shares of a sign's posts: the board is stiff, so that force is shared alike and torsion goes into the posts as a
@@ -14,7 +15,7 @@ public final class SignPosts {
 
     private static final String STATICS = "statics: stiff board, equal posts";
 
-    /** Works out and records each post in the combination that is worst for its moment. */
+    /** Works out and records each post: its greatest shear and its greatest moment, each in the case that gives it. */
     public static List<PostAction> of(List<Double> positions, List<FootActions.Combined> combinations, Trace trace) {
         double spread = positions.stream().mapToDouble(x -> x * x).sum();
         List<PostAction> posts = new ArrayList<>();
@@ -24,45 +25,60 @@ public final class SignPosts {
                 .reads("from the positions of the posts", spread, "m²");
         }
         for (int i = 0; i < positions.size(); i++) {
-            double x = positions.get(i);
-            FootActions.Combined worst = combinations.stream()
-                .max(Comparator.comparingDouble(c -> Math.abs(moment(c, x, positions.size(), spread)))).orElseThrow();
-            posts.add(record(i + 1, x, positions.size(), spread, worst, trace));
+            posts.add(post(i + 1, new Row(positions.get(i), positions.size(), spread), combinations, trace));
         }
+        PostAction hardest = posts.stream().max(Comparator.comparingDouble(PostAction::shear)).orElseThrow();
         PostAction most = posts.stream().max(Comparator.comparingDouble(PostAction::moment)).orElseThrow();
-        trace.line("post-shear", "F_p", "greatest shear at the foot of a post: post " + most.post()).in("F_{p" + most.post() + "}", most.shear(), "N")
-            .from(STATICS, Status.DERIVED).gives("F_{p" + most.post() + "}", most.shear(), "N");
-        trace.line("post-moment", "M_p", "greatest moment at the foot of a post: post " + most.post())
-            .in("M_{p" + most.post() + "}", most.moment(), "N m").from(STATICS, Status.DERIVED)
-            .gives("M_{p" + most.post() + "}", most.moment(), "N m");
+        greatest("post-shear", "F_p", "greatest shear at the foot of a post: post " + hardest.post(), "F_{p" + hardest.post() + "}", hardest.shear(), "N", trace);
+        greatest("post-moment", "M_p", "greatest moment at the foot of a post: post " + most.post(), "M_{p" + most.post() + "}", most.moment(), "N m", trace);
         return posts;
     }
 
-    private static double moment(FootActions.Combined c, double x, int count, double spread) {
-        return c.moment() / count + (spread == 0 ? 0 : c.combination().couple() * x / spread);
+    private static void greatest(String step, String symbol, String meaning, String of, double value, String unit, Trace trace) {
+        trace.line(step, symbol, meaning).in(of, value, unit).from(STATICS, Status.DERIVED).gives(of, value, unit);
     }
 
-    private static PostAction record(int post, double x, int count, double spread, FootActions.Combined worst, Trace trace) {
-        String part = Integer.toString(post);
-        double force = worst.force();
-        double moment = worst.moment();
-        if (count == 1) {
-            double v = trace.line("post-shear/1", "F_{p1}", "shear at the foot of the post").in("F", force, "N").from(STATICS, Status.DERIVED)
-                .gives("F", force, "N");
-            double m = trace.line("post-moment/1", "M_{p1}", "moment at the foot of the post").in("M", moment, "N m").from(STATICS, Status.DERIVED)
-                .gives("M", moment, "N m");
-            return new PostAction(1, x, "", 0, java.util.Optional.empty(), worst.name(), v, m);
+    /** One post in its row: its distance from the middle, how many there are, and the sum of the squares of their distances. */
+    private record Row(double x, int count, double spread) {
+
+        double shear(FootActions.Combined c) {
+            return Math.abs(c.force() / count + (spread == 0 ? 0 : c.combination().torsion() * x / spread));
         }
-        trace.given("x_{" + part + "}", "post " + part + " from the middle of the posts, to the right", x, "m", "");
-        double t = couple("M_T", "torsion of case " + worst.name() + ", wind meeting the " + end(worst), worst.combination().torsion(), "post-couple/torsion/" + part, trace);
-        double j = couple("J", "sum of force, height and side distance in the same case", worst.combination().couple(), "post-couple/moment/" + part, trace);
-        double v = trace.line("post-shear/" + part, "F_{p" + part + "}", "shear at the foot of post " + part).in("F", force, "N").in("n", count)
-            .in("M_T", t, "N m").in("x_{" + part + "}", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
-            .gives("abs(F / n + M_T x_{" + part + "} / S)", Math.abs(force / count + t * x / spread), "N");
-        double m = trace.line("post-moment/" + part, "M_{p" + part + "}", "moment at the foot of post " + part).in("M", moment, "N m").in("n", count)
-            .in("J", j, "N m²").in("x_{" + part + "}", x, "m").in("S", spread, "m²").from(STATICS, Status.DERIVED)
-            .gives("abs(M / n + J x_{" + part + "} / S)", Math.abs(moment / count + j * x / spread), "N m");
-        return new PostAction(post, x, "", 0, java.util.Optional.empty(), worst.name(), v, m);
+
+        double moment(FootActions.Combined c) {
+            return Math.abs(signedMoment(c));
+        }
+
+        double signedMoment(FootActions.Combined c) {
+            return c.moment() / count + (spread == 0 ? 0 : c.combination().couple() * x / spread);
+        }
+    }
+
+    private static PostAction post(int number, Row row, List<FootActions.Combined> combinations, Trace trace) {
+        FootActions.Combined forShear = combinations.stream().max(Comparator.comparingDouble(row::shear)).orElseThrow();
+        FootActions.Combined forMoment = combinations.stream().max(Comparator.comparingDouble(row::moment)).orElseThrow();
+        String part = Integer.toString(number);
+        if (row.count() == 1) {
+            double v = trace.line("post-shear/1", "F_{p1}", "shear at the foot of the post").in("F", forShear.force(), "N").from(STATICS, Status.DERIVED)
+                .gives("F", forShear.force(), "N");
+            double m = trace.line("post-moment/1", "M_{p1}", "moment at the foot of the post").in("M", forMoment.moment(), "N m")
+                .from(STATICS, Status.DERIVED).gives("M", forMoment.moment(), "N m");
+            return new PostAction(1, row.x(), "", 0, Optional.empty(), forMoment.name(), v, forShear.name(), m);
+        }
+        String x = "x_{" + part + "}";
+        trace.given(x, "post " + part + " from the middle of the posts, to the right", row.x(), "m", "");
+        double t = couple("M_T", "torsion of case " + forShear.name() + ", wind meeting the " + end(forShear), forShear.combination().torsion(),
+            "post-couple/torsion/" + part, trace);
+        double v = trace.line("post-shear/" + part, "F_{p" + part + "}", "shear at the foot of post " + part + ", case " + forShear.name())
+            .in("F", forShear.force(), "N").in("n", row.count()).in("M_T", t, "N m").in(x, row.x(), "m").in("S", row.spread(), "m²")
+            .from(STATICS, Status.DERIVED).gives("abs(F / n + M_T " + x + " / S)", Math.abs(forShear.force() / row.count() + t * row.x() / row.spread()), "N");
+        double j = couple("J", "sum of force, height and side distance, case " + forMoment.name() + ", wind meeting the " + end(forMoment),
+            forMoment.combination().couple(), "post-couple/moment/" + part, trace);
+        double m = trace.line("post-moment/" + part, "M_{p" + part + "}", "moment at the foot of post " + part + ", case " + forMoment.name())
+            .in("M", forMoment.moment(), "N m").in("n", row.count()).in("J", j, "N m²").in(x, row.x(), "m").in("S", row.spread(), "m²")
+            .from(STATICS, Status.DERIVED).gives("abs(M / n + J " + x + " / S)",
+                Math.abs(forMoment.moment() / row.count() + j * row.x() / row.spread()), "N m");
+        return new PostAction(number, row.x(), "", 0, Optional.empty(), forMoment.name(), v, forShear.name(), m);
     }
 
     private static String end(FootActions.Combined worst) {
@@ -81,13 +97,12 @@ public final class SignPosts {
 
     /** Sums of the posts' shears, N, and moments, N m, in one combination, each post worked out by itself. */
     public static double[] sums(FootActions.Combined combined, List<Double> positions) {
-        int count = positions.size();
         double spread = positions.stream().mapToDouble(x -> x * x).sum();
         double shear = 0;
         double moment = 0;
         for (double x : positions) {
-            shear += combined.force() / count + (spread == 0 ? 0 : combined.combination().torsion() * x / spread);
-            moment += moment(combined, x, count, spread);
+            shear += combined.force() / positions.size() + (spread == 0 ? 0 : combined.combination().torsion() * x / spread);
+            moment += new Row(x, positions.size(), spread).signedMoment(combined);
         }
         return new double[] {shear, moment};
     }

@@ -5,7 +5,6 @@ import broadside.assess.BadJob;
 import broadside.job.JobText;
 import broadside.job.ResultText;
 import java.io.PrintStream;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -30,13 +29,13 @@ final class CheckCommand implements Callable<Integer> {
     public Integer call() {
         Tool tool = parent.tool();
         Assessment assessment = assess(tool, JobFiles.open(job, tool.reader()), job);
-        PrintStream out = new PrintStream(System.out, true, StandardCharsets.UTF_8);
+        PrintStream out = Terminal.out();
         if (json) {
             out.writeBytes(JobText.write(ResultText.of(assessment)));
         } else {
             TextTable.print(assessment, out);
         }
-        out.flush();
+        Terminal.finish(out);
         return assessment.allAssessed() ? 0 : 1;
     }
 

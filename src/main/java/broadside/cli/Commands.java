@@ -18,6 +18,9 @@ public final class Commands implements Runnable {
         description = "a folder with more editions and overlays, such as a firm's own values")
     private Path ownTables;
 
+    /** Most lines of problems that are printed. */
+    private static final int MOST_LINES = 50;
+
     /** Runs a command line; returns the exit status. */
     public static int run(String... args) {
         return run(new PrintWriter(System.err, true), args);
@@ -27,7 +30,7 @@ public final class Commands implements Runnable {
         CommandLine line = new CommandLine(new Commands());
         line.setErr(errors);
         line.setParameterExceptionHandler((e, given) -> {
-            errors.println(e.getMessage().lines().findFirst().orElse("this command line does not fit"));
+            errors.println(Terminal.plain(e.getMessage().lines().findFirst().orElse("this command line does not fit")));
             return 2;
         });
         line.setExecutionExceptionHandler((e, command, parsed) -> failed(e, errors));
@@ -36,9 +39,12 @@ public final class Commands implements Runnable {
 
     private static int failed(Exception e, PrintWriter errors) {
         if (e instanceof Refused refused) {
-            refused.lines().forEach(errors::println);
+            refused.lines().stream().limit(MOST_LINES).forEach(line -> errors.println(Terminal.plain(line)));
+            if (refused.lines().size() > MOST_LINES) {
+                errors.println("and " + (refused.lines().size() - MOST_LINES) + " more");
+            }
         } else if (e instanceof TableFormat) {
-            errors.println(e.getMessage());
+            errors.println(Terminal.plain(e.getMessage()));
         } else {
             errors.println("the tool failed: " + e.getClass().getSimpleName() + (e.getMessage() == null ? "" : ", " + e.getMessage().lines().findFirst().orElse("")));
         }

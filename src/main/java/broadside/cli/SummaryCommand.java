@@ -40,8 +40,14 @@ final class SummaryCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        if (Files.isDirectory(output) || output.toAbsolutePath().getParent() != null && !Files.isWritable(output.toAbsolutePath().getParent())) {
+            throw new Refused(output + ": the file cannot be written");
+        }
         Tool tool = parent.tool();
         JobFiles.Opened opened = JobFiles.open(job, tool.reader());
+        if (same(job, output)) {
+            throw new Refused(output + ": is the job itself; give the PDF another name");
+        }
         Assessment assessment = CheckCommand.assess(tool, opened, job);
         Sheet sheet = SheetMaker.of(assessment, date());
         ByteArrayOutputStream pdf = new ByteArrayOutputStream();
@@ -52,6 +58,14 @@ final class SummaryCommand implements Callable<Integer> {
             throw new Refused(output + ": the file cannot be written");
         }
         return assessment.allAssessed() ? 0 : 1;
+    }
+
+    private static boolean same(Path one, Path other) {
+        try {
+            return Files.exists(other) && Files.isSameFile(one, other);
+        } catch (IOException e) {
+            return false;
+        }
     }
 
     private Paper paper() {

@@ -3,7 +3,6 @@ package broadside.cli;
 import broadside.table.Edition;
 import broadside.table.TableFile;
 import java.io.PrintStream;
-import java.nio.charset.StandardCharsets;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.ParentCommand;
@@ -18,7 +17,7 @@ final class TablesCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         Tool tool = parent.tool();
-        PrintStream out = new PrintStream(System.out, false, StandardCharsets.UTF_8);
+        PrintStream out = Terminal.out();
         for (Edition edition : tool.tables().editions()) {
             out.println(edition.key() + ": " + edition.property("title") + (edition.isOverlay() ? " (overlay of " + edition.basis().orElseThrow().key() + ")" : "")
                 + "; " + edition.property("status"));
@@ -29,7 +28,7 @@ final class TablesCommand implements Callable<Integer> {
             }
         }
         out.println(tool.tables().digest());
-        out.flush();
+        Terminal.finish(out);
         return 0;
     }
 }

@@ -10,7 +10,8 @@ import java.util.List;
 /** The first part of a sheet as plain text: answers, tables and notes, without the drawing and the calculation. */
 final class TextTable {
 
-    static void print(Assessment assessment, PrintStream out) {
+    static void print(Assessment assessment, PrintStream stream) {
+        Lines out = text -> stream.println(Terminal.plain(text));
         Sheet sheet = SheetMaker.of(assessment, "");
         out.println(sheet.caution());
         for (Block block : sheet.blocks()) {
@@ -19,13 +20,13 @@ final class TextTable {
             }
             print(block, out);
         }
-        out.println();
+        out.println("");
         out.println(sheet.made());
     }
 
-    private static void print(Block block, PrintStream out) {
+    private static void print(Block block, Lines out) {
         if (block instanceof Block.Heading heading && !heading.text().equals("Drawing")) {
-            out.println();
+            out.println("");
             out.println(heading.text());
         } else if (block instanceof Block.Answer answer) {
             answer.lines().forEach(f -> out.println("  " + f.label() + ": " + f.value() + (f.remark().isEmpty() ? "" : "; " + f.remark())));
@@ -38,14 +39,14 @@ final class TextTable {
         }
     }
 
-    private static void table(Block.Table table, PrintStream out) {
+    private static void table(Block.Table table, Lines out) {
         int[] widths = new int[table.columns().size()];
         for (int i = 0; i < widths.length; i++) {
             int column = i;
             widths[i] = Math.max(table.columns().get(i).heading().length(),
                 table.rows().stream().mapToInt(r -> r.cells().get(column).length()).max().orElse(0));
         }
-        out.println();
+        out.println("");
         out.println("  " + table.caption());
         out.println("  " + row(table, table.columns().stream().map(Block.Column::heading).toList(), widths));
         table.rows().forEach(r -> out.println("  " + row(table, r.cells(), widths)));
@@ -58,6 +59,11 @@ final class TextTable {
             line.append(i == 0 ? "" : "  ").append(table.columns().get(i).number() ? pad + cells.get(i) : cells.get(i) + pad);
         }
         return line.toString().stripTrailing();
+    }
+
+    /** Takes one line at a time. */
+    private interface Lines {
+        void println(String text);
     }
 
     private TextTable() { }

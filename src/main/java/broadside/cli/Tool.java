@@ -8,6 +8,7 @@ import broadside.table.TableFiles;
 import broadside.table.TableFormat;
 import broadside.table.TableLibrary;
 import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Map;
 import java.util.Optional;
@@ -37,10 +38,13 @@ public record Tool(TableLibrary tables, Assessor assessor, JobReader reader, Pub
     }
 
     private static Map<String, byte[]> own(Path folder) {
+        if (!Files.isDirectory(folder)) {
+            throw new Refused(folder + ": " + (Files.exists(folder) ? "is not a folder" : "there is no such folder"));
+        }
         try {
             return TableFiles.below(folder);
         } catch (IOException e) {
-            throw new TableFormat(folder.toString(), 1, "this folder cannot be read");
+            throw new Refused(folder + ": this folder cannot be read");
         }
     }
 }

@@ -4,7 +4,6 @@ import broadside.job.PublishedCheck;
 import broadside.table.TableFiles;
 import java.io.IOException;
 import java.io.PrintStream;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -27,18 +26,21 @@ final class VerifyCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         List<PublishedCheck> checks = folder == null ? parent.tool().checks().shipped() : parent.tool().checks().run(files());
-        PrintStream out = new PrintStream(System.out, false, StandardCharsets.UTF_8);
+        PrintStream out = Terminal.out();
         int failed = 0;
         for (PublishedCheck check : checks) {
             failed += check.passed() ? 0 : 1;
             print(check, out);
         }
         out.println((checks.size() - failed) + " passed, " + failed + " failed");
-        out.flush();
+        Terminal.finish(out);
         return failed == 0 && !checks.isEmpty() ? 0 : 1;
     }
 
     private Map<String, byte[]> files() {
+        if (!Files.isDirectory(folder)) {
+            throw new Refused(folder + ": " + (Files.exists(folder) ? "is not a folder" : "there is no such folder"));
+        }
         try {
             Map<String, byte[]> files = TableFiles.below(folder);
             if (files.keySet().stream().noneMatch(n -> n.endsWith(".json"))) {
@@ -46,7 +48,7 @@ final class VerifyCommand implements Callable<Integer> {
             }
             return files;
         } catch (IOException e) {
-            throw new Refused(folder + ": " + (Files.exists(folder) ? "the folder cannot be read" : "there is no such folder"));
+            throw new Refused(folder + ": the folder cannot be read");
         }
     }
 

@@ -20,7 +20,7 @@ final class NetPressure {
             return line.begin("pressure/" + zone, symbol).gives(formula, value, "Pa");
         }
         double own = line.begin("code-pressure/" + zone, symbol + "'").gives(formula, value, "Pa");
-        double least = least(site.authorityMinimum().get(), level, trace);
+        double least = trace.once("authority minimum", () -> least(site.authorityMinimum().get(), level, trace), known -> known);
         return trace.line("pressure/" + zone, symbol, "net pressure: the larger of the code's and the authority's least")
             .in(symbol + "'", own, "Pa").in("p_{min}", least, "Pa").from("authority's least pressure", Status.GIVEN)
             .gives("max(" + symbol + "'; p_{min})", Math.max(own, least), "Pa");

@@ -98,8 +98,13 @@ final class ItemReader {
         if (length.isEmpty() || height.isEmpty() || values.text("mark").isEmpty()) {
             return Optional.empty();
         }
-        return Optional.of(new Hoarding(values.text("mark").get(), length.get(), height.get(), clearance, solidity, left, right, gates, spacing,
-            carrying(values)));
+        Hoarding hoarding = new Hoarding(values.text("mark").get(), length.get(), height.get(), clearance, solidity, left, right, gates, spacing,
+            carrying(values));
+        if (hoarding.panels().isEmpty()) {
+            problem(values, gates.isEmpty() ? "length" : "gates", "leaves no hoarding to assess");
+            return Optional.empty();
+        }
+        return Optional.of(hoarding);
     }
 
     private Optional<Length> returnLength(Values values, String end, Optional<Length> length) {
@@ -124,15 +129,10 @@ final class ItemReader {
             }
         }
         gates.sort(Comparator.comparing(Hoarding.Gate::from));
-        double open = 0;
         for (int i = 0; i < gates.size(); i++) {
-            open += gates.get(i).width().metres();
             if (i > 0 && gates.get(i).from().metres() < gates.get(i - 1).end() - 1e-9) {
                 problem(values, "gates", "two gates overlap at " + gates.get(i).from().typed());
             }
-        }
-        if (length.isPresent() && !gates.isEmpty() && open >= length.get().metres() - 1e-9) {
-            problem(values, "gates", "leave no hoarding between them");
         }
         return gates;
     }

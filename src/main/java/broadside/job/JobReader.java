@@ -21,9 +21,6 @@ import tools.jackson.databind.JsonNode;
 /** Reads a job. All problems are gathered, each with its place, so that all can be mended at once. */
 public final class JobReader {
 
-    /** Most items in one job file; a longer list is a schedule. */
-    static final int MOST_ITEMS = 200;
-
     /** Values set in place of calculated ones lie between these, in SI. */
     private static final double LEAST_OVERRIDE = 1e-6;
     private static final double MOST_OVERRIDE = 1e9;
@@ -91,10 +88,6 @@ public final class JobReader {
 
     private static List<Item> items(Values values, List<Problem> problems) {
         List<Values> list = values.list("items");
-        if (list.size() > MOST_ITEMS) {
-            problems.add(new Problem("items", "has " + list.size() + " entries; a job file has at most " + MOST_ITEMS));
-            return List.of();
-        }
         ItemReader reader = new ItemReader(problems);
         List<Item> items = new ArrayList<>();
         Set<String> marks = new HashSet<>();

@@ -156,7 +156,7 @@ public final class JobText {
         if (first.contains("exceeds the maximum")) {
             return "a text or number is too long for a job file";
         }
-        String cut = first.replaceAll("\\s*[(\\[].*$", "").replaceAll(": (expected|was expecting|maybe).*$", "");
+        String cut = first.replaceAll("\\s*[(\\[].*$", "").replaceAll(": (expected|was expecting|maybe|enable).*$", "");
         return "this is not JSON" + (cut.isBlank() ? "" : ": " + StructureReader.clean(cut));
     }
 

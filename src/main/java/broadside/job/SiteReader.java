@@ -86,6 +86,9 @@ final class SiteReader {
                     + String.join(", ", terms.options().stream().sorted().toList())));
             }
         }
+        if (values.text("authority-minimum-level").isPresent() && values.quantity("authority-minimum-pressure", Pressure.class).isEmpty()) {
+            problems.add(new Problem(values.at("authority-minimum-level"), "stands without authority-minimum-pressure"));
+        }
         if (values.object("topography").isPresent() && values.number("topographic-factor").isPresent()) {
             problems.add(new Problem(values.at("topographic-factor"), "stands beside topography; give one of the two"));
         }

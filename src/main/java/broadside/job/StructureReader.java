@@ -14,6 +14,8 @@ import tools.jackson.databind.JsonNode;
 /** Reads a JSON object by its declared shape. Unknown and missing keys and wrong kinds of value become problems. */
 final class StructureReader {
 
+    private static final int LONGEST_LIST = 200;
+
     private final List<Problem> problems;
 
     StructureReader(List<Problem> problems) {
@@ -99,7 +101,7 @@ final class StructureReader {
         } else if (value == Math.rint(value) && Math.abs(value) < 1e6) {
             values.put(field.name(), (int) value);
         } else {
-            problem(path, "must be a whole number: " + field.meaning());
+            problem(path, "must be a whole number below 1 000 000: " + field.meaning());
         }
     }
 
@@ -143,6 +145,10 @@ final class StructureReader {
             problem(path, "must be a list in square brackets: " + field.meaning());
             return;
         }
+        if (node.size() > LONGEST_LIST) {
+            problem(path, "has " + node.size() + " entries; a list has at most " + LONGEST_LIST);
+            return;
+        }
         List<Values> entries = new ArrayList<>();
         for (int i = 0; i < node.size(); i++) {
             String at = path + "[" + i + "]";
@@ -180,7 +186,7 @@ final class StructureReader {
 
     /** Foreign text inside a message: on one line, without control characters, not too long. */
     static String clean(String text) {
-        String line = text.replaceAll("\\p{Cntrl}", " ");
+        String line = text.replaceAll("[\\p{Cc}\\p{Cf}\\u2028\\u2029]", " ");
         return line.length() > 60 ? line.substring(0, 60) + "..." : line;
     }
 }

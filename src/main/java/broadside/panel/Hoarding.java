@@ -44,16 +44,35 @@ public record Hoarding(String mark, Length length, Length height, Length clearan
         return "hoarding";
     }
 
+    /** An opening between two stretches or at an end, m from the left end; gates side by side are one opening. */
+    public record Opening(double from, double to) { }
+
+    /** The openings, from the left. What is left of hoarding beside a gate and is too narrow to stand belongs to the opening. */
+    public List<Opening> openings() {
+        List<Opening> openings = new ArrayList<>();
+        for (Gate gate : gates) {
+            double from = gate.from().metres() < NARROWEST ? 0 : gate.from().metres();
+            double to = gate.end() > length.metres() - NARROWEST ? length.metres() : gate.end();
+            int last = openings.size() - 1;
+            if (last >= 0 && from - openings.get(last).to() < NARROWEST) {
+                openings.set(last, new Opening(openings.get(last).from(), to));
+            } else {
+                openings.add(new Opening(from, to));
+            }
+        }
+        return openings;
+    }
+
     /** The stretches between the ends and the gates, from the left. A gate at an end leaves no stretch there. */
     @Override
     public List<Panel> panels() {
         List<double[]> stretches = new ArrayList<>();
         double start = 0;
-        for (Gate gate : gates) {
-            if (gate.from().metres() > start + NARROWEST) {
-                stretches.add(new double[] {start, gate.from().metres()});
+        for (Opening opening : openings()) {
+            if (opening.from() > 0) {
+                stretches.add(new double[] {start, opening.from()});
             }
-            start = gate.end();
+            start = opening.to();
         }
         if (start < length.metres() - NARROWEST) {
             stretches.add(new double[] {start, length.metres()});

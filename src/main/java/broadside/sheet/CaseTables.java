@@ -121,7 +121,8 @@ final class CaseTables {
             boolean worst = p.moment() >= most * (1 - 1e-9);
             String carries = p.share().map(s -> format.length(s) + (p.gate() > 0 ? " and " + format.length(p.gate()) + " of gate" : "")).orElse("by statics");
             rows.add(new Row(List.of(Integer.toString(p.post()), format.length(p.position()), p.zone().isEmpty() ? Format.caseName(p.named())
-                : HoardingDrawing.shortName(p.zone()), carries, format.force(p.shear()), format.moment(p.moment()),
+                : HoardingDrawing.shortName(p.zone()), carries, format.force(p.shear())
+                + (p.shearCase().equals(p.named()) ? "" : " (" + Format.caseName(p.shearCase()) + ")"), format.moment(p.moment()),
                 format.moment(p.atLevel(loads.level().factor()).moment()), String.join(", ", remarks(p, worst))), worst));
         }
         String more = shown.size() < loads.posts().size() ? ", the worst of each zone of " + loads.posts().size() + " posts" : "";

@@ -50,13 +50,14 @@ public final class Trace {
 
     /**
      * Works a value out the first time and takes it over later, so that parts which share it do not repeat its steps.
+     * Where a value of one part is replaced by the user, nothing is shared between parts.
      *
      * @param key    what the value depends on
      * @param first  works it out and records it
      * @param again  records that it is taken over
      */
     public double once(String key, DoubleSupplier first, DoubleUnaryOperator again) {
-        if (found.containsKey(key)) {
+        if (found.containsKey(key) && overrides.stream().noneMatch(o -> o.name().contains("/"))) {
             return again.applyAsDouble(found.get(key));
         }
         double value = first.getAsDouble();

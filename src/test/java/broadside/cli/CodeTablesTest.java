@@ -121,7 +121,7 @@ class CodeTablesTest {
     void aFolderThatIsNotThereIsOneLine() {
         CommandLineRun run = CommandLineRun.of("tables", "--code-tables", folder.resolve("nothing"));
         assertThat(run.status()).isEqualTo(2);
-        assertThat(run.errors()).containsExactly(folder.resolve("nothing") + ":1: this folder cannot be read");
+        assertThat(run.errors()).containsExactly(folder.resolve("nothing") + ": there is no such folder");
     }
 
     @Test

@@ -90,7 +90,7 @@ class JobReaderTest {
             Arguments.of(HOARDING, GATES, "\"gates\": [{ \"from\": \"-1 m\", \"width\": \"5 m\" }]", "items[0].gates[0].from", "does not begin before the left end"),
             Arguments.of(HOARDING, GATES, "\"gates\": [{ \"from\": \"8 m\", \"width\": \"2 m\" }, { \"from\": \"5 m\", \"width\": \"4 m\" }]", "items[0].gates",
                 "two gates overlap at 8 m"),
-            Arguments.of(HOARDING, GATES, "\"gates\": [{ \"from\": \"0 m\", \"width\": \"48 m\" }]", "items[0].gates", "leave no hoarding between them"),
+            Arguments.of(HOARDING, GATES, "\"gates\": [{ \"from\": \"0 m\", \"width\": \"48 m\" }]", "items[0].gates", "leaves no hoarding to assess"),
             Arguments.of(HOARDING, GATES, "\"gates\": { \"from\": \"5 m\" }", "items[0].gates", "must be a list in square brackets"),
             Arguments.of(HOARDING, GATES, "\"gates\": [\"5 m\"]", "items[0].gates[0]", "must be an object with the keys from, width"),
             Arguments.of(HOARDING, "\"spacing\": \"2.4 m\"", "\"spacing\": \"47 mm\"", "items[0].posts.spacing", "gives more than 1000 posts"));
@@ -130,7 +130,7 @@ class JobReaderTest {
         String item = "{ \"mark\": \"A%d\", \"kind\": \"hoarding\", \"length\": \"9 m\", \"height\": \"2 m\" }";
         assertThat(problems(head.replace("%", ""))).extracting(Problem::line).containsExactly("items: is empty: what stands in the wind");
         String many = String.join(",", IntStream.range(0, 201).mapToObj(i -> item.replace("%d", "" + i)).toList());
-        assertThat(problems(head.replace("%", many))).extracting(Problem::line).containsExactly("items: has 201 entries; a job file has at most 200");
+        assertThat(problems(head.replace("%", many))).extracting(Problem::line).containsExactly("items: has 201 entries; a list has at most 200");
         String board = "{ \"width\": \"1 m\", \"height\": \"1 m\", \"clearance\": \"2 m\" }";
         String sign = "{ \"mark\": \"S\", \"kind\": \"post-sign\", \"boards\": [" + (board + ",").repeat(20) + board + "] }";
         assertThat(problems(head.replace("%", sign))).extracting(Problem::line)

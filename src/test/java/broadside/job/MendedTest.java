@@ -82,6 +82,58 @@ class MendedTest {
         assertThat(read(sign(BOARD.replace("4 m", "4,500 ft"), "")).problems()).extracting(Problem::path).containsExactly("items[0].boards[0].width");
     }
 
+    private static String wall(String more) {
+        return sign(BOARD, "").replaceAll("\"items\":.*", "\"items\":[{\"mark\":\"H\",\"kind\":\"hoarding\",\"height\":\"2 m\"," + more + "}]}");
+    }
+
+    @Test
+    void twoGatesSideBySideAreOneOpening() {
+        String one = wall("\"length\":\"20 m\",\"posts\":{\"spacing\":\"2 m\"},\"gates\":[{\"from\":\"6 m\",\"width\":\"6 m\"}]");
+        String two = wall("\"length\":\"20 m\",\"posts\":{\"spacing\":\"2 m\"},\"gates\":[{\"from\":\"6 m\",\"width\":\"3 m\"},{\"from\":\"9 m\",\"width\":\"3 m\"}]");
+        assertThat(assess(two).loads().orElseThrow().posts()).isEqualTo(assess(one).loads().orElseThrow().posts());
+    }
+
+    @Test
+    void gatesThatLeaveNoHoardingAreRefused() {
+        assertThat(read(wall("\"length\":\"10 m\",\"gates\":[{\"from\":\"3 mm\",\"width\":\"9.994 m\"}]")).problems()).extracting(Problem::path)
+            .containsExactly("items[0].gates");
+        assertThat(read(wall("\"length\":\"5 mm\"")).problems()).extracting(Problem::path).containsExactly("items[0].length");
+    }
+
+    @Test
+    void aShortWallWithUnlikeEndsShowsBothEnds() {
+        ItemResult item = assess(wall("\"length\":\"0.6 m\",\"returns\":{\"left\":\"0.5 m\"}").replace("\"height\":\"2 m\"", "\"height\":\"4 m\""));
+        assertThat(item.loads().orElseThrow().cases()).extracting(c -> c.windward().name()).contains("LEFT", "RIGHT");
+    }
+
+    @Test
+    void anOverrideForOneBoardStaysWithThatBoard() {
+        String boards = BOARD.replace("{", "{\"mark\":\"low\",") + "," + BOARD.replace("{", "{\"mark\":\"other\",");
+        ItemResult item = assess(sign(boards, ",\"overrides\":[{\"name\":\"velocity-pressure/low\",\"value\":\"2 kPa\",\"reason\":\"r\"}]"));
+        assertThat(item.sheet().find("velocity-pressure/low").orElseThrow().value()).isEqualTo(2000);
+        assertThat(item.sheet().find("velocity-pressure/other").orElseThrow().value()).isLessThan(1000);
+    }
+
+    @Test
+    void theGreatestShearIsThatOfAllPosts() {
+        String boards = "{\"width\":\"1 m\",\"height\":\"3 m\",\"clearance\":\"0.8 m\",\"offset\":\"-3 m\"},{\"width\":\"1 m\",\"height\":\"0.4 m\",\"clearance\":\"9 m\",\"offset\":\"3 m\"}";
+        ItemResult item = assess(sign(boards, ""));
+        double most = item.loads().orElseThrow().posts().stream().mapToDouble(p -> p.shear()).max().orElseThrow();
+        assertThat(item.sheet().find("post-shear").orElseThrow().value()).isEqualTo(most);
+    }
+
+    @Test
+    void anAuthorityLevelWithoutAPressureIsRefused() {
+        String job = sign(BOARD, "").replace("\"terrain\"", "\"authority-minimum-level\":\"service\",\"terrain\"");
+        assertThat(read(job).problems()).extracting(Problem::path).containsExactly("site.authority-minimum-level");
+    }
+
+    @Test
+    void aLongListIsRefusedWithOneLine() {
+        String many = String.join(",", java.util.Collections.nCopies(5000, "{}"));
+        assertThat(read(sign(many, "")).problems()).hasSize(1);
+    }
+
     @Test
     void aPostThatIsPushedBackwardsCountsByItsMagnitude() {
         ItemResult item = assess(sign("{\"width\":\"16 m\",\"height\":\"4 m\",\"clearance\":\"8.5 m\",\"offset\":\"6.23 m\"}", ""));
