@@ -13,6 +13,7 @@ import java.util.function.Consumer;
 import tools.jackson.databind.JsonNode;
 import tools.jackson.databind.node.ArrayNode;
 import tools.jackson.databind.node.JsonNodeFactory;
+import tools.jackson.databind.node.ObjectNode;
 
 /**
  * A job while it is filled in: the answers for its head and one item, and the other items as they are.
@@ -63,6 +64,22 @@ record Draft(Answers answers, ArrayNode items, int index) {
     /** Whether an item is of a kind that has a form. */
     static boolean known(JsonNode item) {
         return item.path("kind").isString() && Shapes.KINDS.containsKey(item.path("kind").stringValue());
+    }
+
+    /** The answers as they stand, with what travels along unseen; {@link #of(JsonNode)} reads them again. */
+    JsonNode json() {
+        ObjectNode all = JsonNodeFactory.instance.objectNode();
+        answers.all().forEach(all::put);
+        all.put("item", Integer.toString(index));
+        all.put("kept", Token.of(items));
+        return all;
+    }
+
+    /** The sheet of answers that {@link #json()} wrote. */
+    static Draft of(JsonNode answers) {
+        Map<String, String> typed = new LinkedHashMap<>();
+        answers.properties().forEach(e -> typed.put(e.getKey(), e.getValue().isString() ? e.getValue().stringValue() : ""));
+        return sent(typed);
     }
 
     /** The sheet that a form sent. */

@@ -50,9 +50,28 @@ final class FormDesk {
             show(ctx, 200, Draft.of(Token.read(ctx.queryParam("j")), Integer.parseInt(item)), List.of(), "");
             return;
         }
+        if (ctx.queryParam("d") != null) {
+            showDraft(ctx, Draft.of(Token.read(ctx.queryParam("d"))), ctx.queryParam("check") != null);
+            return;
+        }
         String code = ctx.queryParam("code") == null ? "" : ctx.queryParam("code");
         String known = assessor.codes().code(code).isPresent() ? code : "";
         show(ctx, 200, Draft.blank(String.valueOf(ctx.queryParam("kind")), String.valueOf(ctx.queryParam("units")), known), List.of(), "");
+    }
+
+    private void showDraft(Context ctx, Draft draft, boolean check) {
+        List<Problem> problems = check ? problems(draft) : List.of();
+        show(ctx, problems.isEmpty() ? 200 : 422, draft, problems, check && problems.isEmpty() ? "All answers can be read now." : "");
+    }
+
+    /** Sends the browser on to an address that holds the answers as typed, so that its back button and a reload lose nothing. */
+    private void goTo(Context ctx, Draft draft, boolean check) {
+        JsonNode answers = draft.json();
+        if (Token.fits(answers)) {
+            ctx.redirect("/fill?d=" + Token.of(answers) + (check ? "&check=1" : ""), HttpStatus.SEE_OTHER);
+        } else {
+            showDraft(ctx, draft, check);
+        }
     }
 
     /** The sheet of a job that does not fit, with what does not fit. */
@@ -90,12 +109,11 @@ final class FormDesk {
             case "set" -> {
                 int equals = with.indexOf('=');
                 draft.answers().set(with.substring(0, Math.max(0, equals)), with.substring(equals + 1));
-                List<Problem> problems = problems(draft);
-                show(ctx, problems.isEmpty() ? 200 : 422, draft, problems, problems.isEmpty() ? "All answers can be read now." : "");
+                goTo(ctx, draft, true);
             }
             default -> {
                 change(draft, words[0], with);
-                show(ctx, 200, draft, List.of(), "");
+                goTo(ctx, draft, false);
             }
         }
     }
@@ -120,7 +138,7 @@ final class FormDesk {
     private void showOther(Context ctx, Draft draft, String todo, String with) {
         ObjectNode job = forms.read(draft.answers(), draft.items(), draft.index()).job();
         if (Token.fits(job)) {
-            show(ctx, 200, otherItem(job, draft, todo, with), List.of(), "");
+            goTo(ctx, otherItem(job, draft, todo, with), false);
         } else {
             show(ctx, 422, draft, List.of(new Problem("", TOO_LONG)), "");
         }
@@ -144,7 +162,7 @@ final class FormDesk {
         draft.answers().dropBlank("overrides");
         List<Problem> problems = problems(draft);
         if (!problems.isEmpty()) {
-            show(ctx, 422, draft, problems, "");
+            goTo(ctx, draft, true);
             return;
         }
         ObjectNode job = forms.read(draft.answers(), draft.items(), draft.index()).job();

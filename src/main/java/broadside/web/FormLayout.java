@@ -117,7 +117,7 @@ final class FormLayout {
         }
         bits.addAll(ask.ask(site, "site", "terrain", "terrain-reason", "altitude"));
         bits.add(Bit.fold("The ground is not flat", "site.topography", ask.open("site.topography"), rows(ask.rest(slope, "site.topography", Set.of()))));
-        bits.add(fold("It stands for another time than 50 years", site, "site", "return-period"));
+        bits.add(fold("The wind is asked for with another return period", site, "site", "return-period"));
         bits.add(fold("The authority asks for a least pressure", site, "site", "authority-minimum-pressure", "authority-minimum-level"));
         List<Bit> more = rows(ask.rest(site, "site", foreign));
         if (!more.isEmpty()) {

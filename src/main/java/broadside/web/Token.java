@@ -16,6 +16,9 @@ final class Token {
     /** Longest token that fits into a link with everything around it, in characters. */
     static final int LONGEST = 40_000;
 
+    /** Longest single text that is read back from a token. */
+    private static final int LONGEST_TEXT = 20_000;
+
     /** Largest JSON inside a token, in bytes. */
     static final int LARGEST = 256 << 10;
 
@@ -42,7 +45,8 @@ final class Token {
     /** Whether a job is short enough to travel in a link. */
     static boolean fits(JsonNode job) {
         byte[] json = job.toString().getBytes(StandardCharsets.UTF_8);
-        return json.length <= LARGEST && of(json).length() <= LONGEST;
+        return json.length <= LARGEST && job.properties().stream().allMatch(e -> !e.getValue().isString() || e.getValue().stringValue().length() <= LONGEST_TEXT)
+            && of(json).length() <= LONGEST;
     }
 
     /** The job in a token; anything else is refused with a plain page. */

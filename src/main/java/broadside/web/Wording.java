@@ -49,8 +49,8 @@ record Wording(String label, String hint, String metric, String us) {
         site.ground-elevation|Elevation of the ground|For K_e; left empty, sea level is taken, which is safe
         site.gust-factor|Gust-effect factor|G, a number, or the word computed; left empty, 0.85 is taken
         topography.feature|What the ground does near by|
-        topography.height|How high the slope is|From its foot to its crest
-        topography.upwind-length|How long the slope is|In plan, from the foot to the crest on the windward side
+        topography.height|Height of the slope|From its foot to its crest
+        topography.upwind-length|Length of the slope|In plan, from the foot to the crest on the windward side
         topography.downwind-length|How long the slope behind the crest is|In plan
         topography.half-length|From the crest to half the height|In plan, on the windward side
         topography.distance-from-crest|From the crest to the item|In plan; behind the crest as it is, in front of it with a minus

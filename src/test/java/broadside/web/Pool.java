@@ -58,7 +58,9 @@ final class Pool {
         for (int i = 0; i < headers.length; i += 2) {
             request.header(headers[i], headers[i + 1]);
         }
-        return send(request);
+        HttpResponse<String> answer = send(request);
+        String on = answer.headers().firstValue("Location").orElse("");
+        return on.contains("/fill?d=") ? get(on.substring(on.indexOf("/fill?d="))) : answer;
     }
 
     static HttpResponse<String> send(HttpRequest.Builder request) {
