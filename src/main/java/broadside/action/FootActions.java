@@ -1,6 +1,7 @@
 package broadside.action;
 
 import broadside.action.CaseAction.PanelZones;
+import broadside.codes.LoadCase;
 import broadside.codes.LoadCase.Windward;
 import broadside.codes.PanelSymbols;
 import broadside.codes.ShiftRule;
@@ -91,13 +92,13 @@ public final class FootActions {
             Names names = new Names(name, symbols, one ? 0 : found.size() + 1);
             found.add(panel(panel, names, trace.part(panel.panel().part())));
         }
-        double force = one ? found.get(0)[0] : total("force/" + name, "F", "wind force on all panels", found, 0, trace);
-        double shear = trace.line("base-shear/" + name, "F_b", "shear at the ground line").in("F", force, "N").from(STATICS, Status.DERIVED)
+        double force = one ? found.get(0)[0] : total("force/" + name, "F", "wind force on all panels, case " + LoadCase.shortName(name), found, 0, trace);
+        double shear = trace.line("base-shear/" + name, "F_b", "shear at the ground line, case " + LoadCase.shortName(name)).in("F", force, "N").from(STATICS, Status.DERIVED)
             .gives("F", force, "N");
-        double moment = one ? found.get(0)[1] : total("base-moment/" + name, "M", "moment at the ground line", found, 1, trace);
-        double torsion = one ? found.get(0)[2] : total("torsion/" + name, "M_T", "torsion about the middle", found, 2, trace);
+        double moment = one ? found.get(0)[1] : total("base-moment/" + name, "M", "moment at the ground line, case " + LoadCase.shortName(name), found, 1, trace);
+        double torsion = one ? found.get(0)[2] : total("torsion/" + name, "M_T", "torsion about the middle, case " + LoadCase.shortName(name), found, 2, trace);
         if (!one) {
-            trace.line("lever-arm/" + name, "z", "height of the resultant").in("M", moment, "N m").in("F", force, "N")
+            trace.line("lever-arm/" + name, "z", "height of the resultant, case " + LoadCase.shortName(name)).in("M", moment, "N m").in("F", force, "N")
                 .from(STATICS, Status.DERIVED).gives("M / F", moment / force, "m");
         }
         return new CaseAction(name, combination.label(), "front", combination.windward(), zones(combination), force, moment / force,
@@ -160,7 +161,7 @@ public final class FootActions {
     }
 
     private static Trace.Line line(Trace trace, String step, Names names, String symbol, String meaning) {
-        return trace.line(step + "/" + names.load(), names.of(symbol), meaning).from(STATICS, Status.DERIVED);
+        return trace.line(step + "/" + names.load(), names.of(symbol), meaning + ", case " + LoadCase.shortName(names.load())).from(STATICS, Status.DERIVED);
     }
 
     private static double force(PanelForce panel, Names names, Trace trace) {

@@ -168,7 +168,7 @@ public final class HoardingPosts {
 
     private static void recordOne(PostAction post, Share share, String zone, PanelSymbols symbols, Trace trace) {
         PanelForce panel = share.placed().panel();
-        String which = post.post() + ", case " + share.named() + (share.placed().shut() ? ", gates shut" : "");
+        String which = post.post() + ", case " + LoadCase.shortName(share.named()) + (share.placed().shut() ? ", gates shut" : "");
         Trace.Line line = trace.line("post-shear" + zone, "F_p", "shear at the foot of post " + which).from(STATICS, Status.DERIVED);
         StringBuilder formula = new StringBuilder();
         for (ZonePressure z : panel.load().zones()) {
@@ -195,7 +195,7 @@ public final class HoardingPosts {
 
     /** Which case the balance is drawn up for. */
     public static String balanceCase(List<PanelCases> open) {
-        return spread(open.get(0)).get(0).name().replace("case-", "") + (spread(open.get(0)).get(0).windward() == Windward.NONE ? "" : ", wind from the left");
+        return LoadCase.shortName(spread(open.get(0)).get(0).name()) + (spread(open.get(0)).get(0).windward() == Windward.NONE ? "" : ", wind from the left");
     }
 
     /** Force on the boards in the first zoned or square case, gates open, N, and the sum of what its posts carry. */

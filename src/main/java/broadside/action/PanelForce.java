@@ -24,7 +24,10 @@ record PanelForce(Panel panel, LoadCase load, double force, double height, doubl
             first += f * ((zone.from() + zone.to()) / 2 - panel.width() / 2);
         }
         double force = Math.max(sum, load.least());
-        return new PanelForce(panel, load, force, panel.clearance() + panel.height() / 2 + load.rise(), first / sum + load.shift());
+        double eccentricity = first / sum + load.shift();
+        // Even zones leave a remainder of binary rounding, which is no eccentricity.
+        boolean rounding = Math.abs(eccentricity) < 1e-9 * panel.width();
+        return new PanelForce(panel, load, force, panel.clearance() + panel.height() / 2 + load.rise(), rounding ? 0 : eccentricity);
     }
 
     /** Distance of the resultant from the middle of the item, m, positive to the right. */

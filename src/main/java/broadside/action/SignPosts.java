@@ -1,5 +1,6 @@
 package broadside.action;
 
+import broadside.codes.LoadCase;
 import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.ArrayList;
@@ -67,14 +68,14 @@ public final class SignPosts {
         }
         String x = "x_{" + part + "}";
         trace.given(x, "post " + part + " from the middle of the posts, to the right", row.x(), "m", "");
-        double t = couple("M_T", "torsion of case " + forShear.name() + ", wind meeting the " + end(forShear), forShear.combination().torsion(),
+        double t = couple("M_T", "torsion of case " + LoadCase.shortName(forShear.name()) + ", wind meeting the " + end(forShear), forShear.combination().torsion(),
             "post-couple/torsion/" + part, trace);
-        double v = trace.line("post-shear/" + part, "F_{p" + part + "}", "shear at the foot of post " + part + ", case " + forShear.name())
+        double v = trace.line("post-shear/" + part, "F_{p" + part + "}", "shear at the foot of post " + part + ", case " + LoadCase.shortName(forShear.name()))
             .in("F", forShear.force(), "N").in("n", row.count()).in("M_T", t, "N m").in(x, row.x(), "m").in("S", row.spread(), "m²")
             .from(STATICS, Status.DERIVED).gives("abs(F / n + M_T " + x + " / S)", Math.abs(forShear.force() / row.count() + t * row.x() / row.spread()), "N");
-        double j = couple("J", "sum of force, height and side distance, case " + forMoment.name() + ", wind meeting the " + end(forMoment),
+        double j = couple("J", "sum of force, height and side distance, case " + LoadCase.shortName(forMoment.name()) + ", wind meeting the " + end(forMoment),
             forMoment.combination().couple(), "post-couple/moment/" + part, trace);
-        double m = trace.line("post-moment/" + part, "M_{p" + part + "}", "moment at the foot of post " + part + ", case " + forMoment.name())
+        double m = trace.line("post-moment/" + part, "M_{p" + part + "}", "moment at the foot of post " + part + ", case " + LoadCase.shortName(forMoment.name()))
             .in("M", forMoment.moment(), "N m").in("n", row.count()).in("J", j, "N m²").in(x, row.x(), "m").in("S", row.spread(), "m²")
             .from(STATICS, Status.DERIVED).gives("abs(M / n + J " + x + " / S)",
                 Math.abs(forMoment.moment() / row.count() + j * row.x() / row.spread()), "N m");

@@ -85,8 +85,8 @@ public final class Assessor {
             if (any && !used.contains(own)) {
                 Set<String> names = new java.util.TreeSet<>();
                 results.forEach(r -> r.sheet().steps().stream().filter(s -> s.unit().equals(own.unit())).forEach(s -> names.add(s.name())));
-                problems.add(new Problem("overrides[" + i + "].name", "\"" + own.name() + "\" is not a step of this calculation with the unit "
-                    + own.unit() + "; there are " + String.join(", ", names.stream().limit(40).toList())));
+                problems.add(new Problem("overrides[" + i + "].name", "\"" + own.name() + "\" is not a step of this calculation "
+                    + (own.unit().equals("1") ? "without a unit" : "with the unit " + own.unit()) + "; there are " + String.join(", ", names.stream().limit(40).toList())));
             }
         }
         if (!problems.isEmpty()) {

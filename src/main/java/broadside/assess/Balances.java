@@ -5,6 +5,7 @@ import broadside.action.HoardingPosts;
 import broadside.action.PanelCases;
 import broadside.action.PostAction;
 import broadside.action.SignPosts;
+import broadside.codes.LoadCase;
 import broadside.panel.Hoarding;
 import broadside.panel.Item;
 import broadside.panel.PostSign;
@@ -25,8 +26,8 @@ final class Balances {
         String governing = posts.stream().max(Comparator.comparingDouble(PostAction::moment)).orElseThrow().named();
         FootActions.Combined worst = actions.combinations().stream().filter(c -> c.name().equals(governing)).findFirst().orElseThrow();
         double[] sums = SignPosts.sums(worst, sign.posts().positions());
-        return List.of(new Loads.Balance("shear at the ground, case " + worst.name().replace("case-", ""), worst.force(), sums[0], "N"),
-            new Loads.Balance("moment at the ground, case " + worst.name().replace("case-", ""), worst.moment(), sums[1], "N m"));
+        return List.of(new Loads.Balance("shear at the ground, case " + LoadCase.shortName(worst.name()), worst.force(), sums[0], "N"),
+            new Loads.Balance("moment at the ground, case " + LoadCase.shortName(worst.name()), worst.moment(), sums[1], "N m"));
     }
 
     private static List<Loads.Balance> hoarding(Hoarding hoarding, List<PanelCases> panels) {

@@ -8,7 +8,7 @@ final class Companions {
 
     static void record(Loads loads, Trace sheet) {
         Level level = loads.level();
-        double f = sheet.line("companion-factor", "f", "from " + level.name() + " to " + level.companion() + " loads: " + level.rule())
+        double f = sheet.line("companion-factor", "f", "from " + level.name() + " to " + level.shown() + " loads: " + level.rule())
             .from(level.place(), level.status()).reads("read in the table of combinations", level.factor(), "1");
         one("companion-base-shear", "F_b", loads.governs("base-shear").baseShear(), "N", f, level, sheet);
         one("companion-base-moment", "M", loads.governs("base-moment").baseMoment(), "N m", f, level, sheet);
@@ -18,7 +18,7 @@ final class Companions {
     }
 
     private static void one(String step, String symbol, double value, String unit, double f, Level level, Trace sheet) {
-        sheet.line(step, symbol + "*", "governing " + step.substring("companion-".length()).replace('-', ' ') + ", " + level.companion())
+        sheet.line(step, symbol + "*", "governing " + step.substring("companion-".length()).replace('-', ' ') + ", " + level.shown())
             .in("f", f).in(symbol, value, unit).from(level.place(), level.status()).gives("f " + symbol, f * value, unit);
     }
 

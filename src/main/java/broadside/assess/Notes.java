@@ -29,6 +29,7 @@ final class Notes {
         notes.overrides(sheet);
         notes.site(job.site(), code);
         notes.unused(job.site(), sheet);
+        notes.returnPeriod(job.site(), sheet);
         notes.leastPressures(job.site(), sheet);
         item.<Runnable>choose(sign -> () -> notes.sign(sign), hoarding -> () -> notes.hoarding(hoarding)).run();
         notes.solidity(job, item, sheet);
@@ -51,8 +52,8 @@ final class Notes {
 
     private void site(Site site, WindCode code) {
         if (site.ground().topography().isEmpty() && site.options().number("topographic-factor").isEmpty()) {
-            add(Note.Kind.ASSUMPTION, "The ground is taken as flat: no hill, ridge or escarpment was given. If the ground within 1 km is higher or lower "
-                + "by more than 10 m, the load can be much larger.");
+            add(Note.Kind.ASSUMPTION, "The ground is taken as flat: no hill, ridge or escarpment was given. If the ground within 1 km (3300 ft) is higher or lower "
+                + "by more than 10 m (33 ft), the load can be much larger.");
         }
         site.ground().topography().ifPresent(ground -> topography(ground, code));
         site.authorityMinimum().ifPresent(minimum -> add(Note.Kind.ASSUMPTION, code.level().name().equals("characteristic")
@@ -79,6 +80,15 @@ final class Notes {
             add(Note.Kind.ASSUMPTION, "The altitude of " + site.ground().altitude().get().typed() + " does not change these loads: this code takes the basic wind "
                 + "speed of the place as it is" + (site.options().si("ground-elevation").isPresent() ? "; the ground elevation is counted." : "."));
         }
+    }
+
+    private void returnPeriod(Site site, Trace sheet) {
+        sheet.find("probability-factor").filter(f -> Math.abs(f.value() - 1) > 1e-9).ifPresent(f -> {
+            long percent = Math.round(Math.abs(1 - f.value() * f.value()) * 100);
+            add(Note.Kind.CAUTION, "The wind of a return period of " + site.returnPeriod().orElseThrow().typed() + " is used: its pressure is " + percent + " % "
+                + (f.value() < 1 ? "lower than that of the code's basic wind. How long a thing stands does not lower the safety that people near it need; the authority "
+                    + "decides whether this is allowed." : "higher than that of the code's basic wind."));
+        });
     }
 
     private static boolean uses(Trace sheet, String step) {
@@ -120,6 +130,7 @@ final class Notes {
                     + board.shape().word() + ": the code has no rule for it, and the rectangle around it is used, which is safe.");
             }
         }
+        sizes(sign);
         if (sign.boards().size() > 1) {
             add(Note.Kind.ASSUMPTION, "Each board is assessed by itself and the forces are added; the wind between boards close to each other is not "
                 + "in any code, and the stack as one board is not compared.");
@@ -133,6 +144,36 @@ final class Notes {
         if (sign.posts().count() > 1) {
             add(Note.Kind.ASSUMPTION, "The posts share force alike and take torsion as a couple: stiff board, equal posts.");
         }
+    }
+
+    /** Sizes that are possible but rarely meant: a slip of a digit or a unit. */
+    private void sizes(PostSign sign) {
+        double left = sign.boards().stream().mapToDouble(b -> b.offset().metres() - b.width().metres() / 2).min().orElseThrow();
+        double right = sign.boards().stream().mapToDouble(b -> b.offset().metres() + b.width().metres() / 2).max().orElseThrow();
+        double first = sign.posts().positions().get(0);
+        double last = -first;
+        if (last - first > 0 && (first < left - 0.1 || last > right + 0.1)) {
+            add(Note.Kind.CAUTION, "A post stands outside the boards. Check the distance between the posts and its unit.");
+        }
+        if (left > last + 0.1 || right < first - 0.1) {
+            add(Note.Kind.CAUTION, "All boards hang beside the posts. Check the offset and its unit.");
+        }
+        if (sign.boards().stream().anyMatch(b -> Math.max(b.width().metres(), b.height().metres()) > 15 || b.clearance().metres() > 20)) {
+            add(Note.Kind.CAUTION, "A board is unusually large or high for a sign on posts. Check its sizes and their units.");
+        }
+        for (int i = 0; i < sign.boards().size(); i++) {
+            for (int k = i + 1; k < sign.boards().size(); k++) {
+                if (overlap(sign.boards().get(i), sign.boards().get(k))) {
+                    add(Note.Kind.CAUTION, "Boards " + sign.part(i) + " and " + sign.part(k) + " overlap: the area they share is counted twice.");
+                }
+            }
+        }
+    }
+
+    private static boolean overlap(Board a, Board b) {
+        boolean across = Math.abs(a.offset().metres() - b.offset().metres()) < (a.width().metres() + b.width().metres()) / 2 - 0.001;
+        double top = Math.min(a.clearance().metres() + a.height().metres(), b.clearance().metres() + b.height().metres());
+        return across && top - Math.max(a.clearance().metres(), b.clearance().metres()) > 0.001;
     }
 
     private void hoarding(Hoarding hoarding) {

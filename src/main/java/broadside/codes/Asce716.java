@@ -33,7 +33,7 @@ final class Asce716 implements WindCode {
         this.signs = new Asce7Signs(edition);
         this.constants = new Constants(edition);
         Coefficient service = edition.rows("load-combinations").number("allowable-full-dead", "w");
-        Level level = new Level("strength", "service (ASD)", service.value(), Numbers.plain(service.value()) + " W, allowable stress design",
+        Level level = new Level("strength", "service", "allowable stress (ASD)", service.value(), Numbers.plain(service.value()) + " W",
             service.source().citation(), service.source().status());
         SiteTerms terms = new SiteTerms(Averaging.of(edition.property("averaging")).orElseThrow(), edition.rows("exposure").keys().stream()
             .map(k -> new SiteTerms.Terrain(k, MEANINGS.getOrDefault(k, ""))).toList(), OPTIONS);

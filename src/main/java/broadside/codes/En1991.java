@@ -37,7 +37,7 @@ final class En1991 implements WindCode {
         Rows factors = edition.rows("partial-factors");
         Source place = factors.number("en-1990-str-geo-b", "gamma-Q").source();
         double gamma = factors.number("en-1990-str-geo-b", "gamma-Q").value();
-        Level level = new Level("characteristic", "factored", gamma, "partial factor " + Numbers.plain(gamma) + " on wind",
+        Level level = new Level("characteristic", "factored", "factored", gamma, "partial factor " + Numbers.plain(gamma) + " on wind",
             place.citation(), place.status());
         Rows terrain = edition.rows("terrain");
         SiteTerms terms = new SiteTerms(Averaging.of(edition.property("averaging")).orElseThrow(),

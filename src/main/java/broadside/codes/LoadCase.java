@@ -2,6 +2,7 @@ package broadside.codes;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 
 /**
@@ -26,6 +27,11 @@ public record LoadCase(String name, String label, Windward windward, List<ZonePr
         public Windward mirrored() {
             return this == LEFT ? RIGHT : this == RIGHT ? LEFT : NONE;
         }
+    }
+
+    /** A case as it is named in running text after the word case: A for case-a, centred for centred. */
+    public static String shortName(String name) {
+        return name.matches("case-[a-z]") ? name.substring(5).toUpperCase(Locale.ROOT) : name;
     }
 
     public LoadCase {

@@ -18,7 +18,8 @@ import java.util.Optional;
 /** Reads one item and checks what a person may have typed wrongly: sizes, ends, gates. */
 final class ItemReader {
 
-    private static final Length ZERO = new Length(0, "0 m");
+    /** A size that was not typed. */
+    private static final Length ZERO = new Length(0, "");
     private static final double LONGEST = 2000;
 
     private final List<Problem> problems;
@@ -64,7 +65,7 @@ final class ItemReader {
         }
         Board.Shape shape = Board.Shape.valueOf(values.text("shape").orElse("rectangle").toUpperCase(Locale.ROOT));
         if (shape == Board.Shape.DISC && Math.abs(width.get().metres() - height.get().metres()) > 1e-6) {
-            problem(values, "height", "of a disc must be the same as its width");
+            problem(values, "height", "must be " + width.get().typed() + " like the width, as the board is a disc");
         }
         return Optional.of(new Board(values.text("mark").orElse(""), shape, width.get(), height.get(), clearance.get(), offset.orElse(ZERO),
             depth.orElse(ZERO), solidity, mass));
@@ -77,7 +78,7 @@ final class ItemReader {
             problem(values, "count", "must lie between 1 and 20");
         }
         if (count > 1 && spacing.isEmpty()) {
-            problem(values, "spacing", "is missing: two or more posts need the distance between them, like \"2 m\"");
+            problem(values, "spacing", "is missing: two or more posts need the distance between them, like \"2 m\" or \"6 ft\"");
         }
         return count < 1 ? Optional.empty() : Optional.of(new Posts(count, spacing));
     }

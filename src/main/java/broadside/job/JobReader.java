@@ -107,7 +107,7 @@ public final class JobReader {
             own.filter(o -> !names.add(o.name())).ifPresent(o -> problems.add(new Problem(each.at("name"), "\"" + StructureReader.clean(o.name())
                 + "\" stands twice; a value is replaced once")));
             own.filter(o -> !(o.value() >= LEAST_OVERRIDE && o.value() <= MOST_OVERRIDE)).ifPresent(o -> problems.add(new Problem(each.at("value"),
-                "must be above 0 and of a usual size; " + o.value() + " " + o.unit().replace("1", "") + " is not")));
+                "must be above 0 and of a usual size; " + o.value() + (o.unit().equals("1") ? "" : " " + o.unit()) + " is not")));
             own.ifPresent(overrides::add);
         }
         return overrides;

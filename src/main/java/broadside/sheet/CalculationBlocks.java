@@ -28,7 +28,7 @@ final class CalculationBlocks {
         blocks.add(new Heading(2, "Calculation" + (many ? ", item " + item.item().mark() : ""), anchor + "calculation"));
         item.loads().ifPresent(loads -> {
             blocks.add(new Heading(3, "To redo by hand", anchor + "hand"));
-            blocks.add(new Paragraph(handCheck(loads), Tone.PLAIN));
+            blocks.add(new Paragraph(handCheck(item.sheet(), loads, format), Tone.PLAIN));
             loads.balance().forEach(b -> blocks.add(new Paragraph(balance(b), Tone.PLAIN)));
         });
         blocks.add(new Heading(3, "Given", anchor + "given"));
@@ -36,15 +36,27 @@ final class CalculationBlocks {
         blocks.add(new Heading(3, "Steps", anchor + "steps"));
         blocks.add(new Paragraph("Values are in SI with four figures; what was calculated was not rounded. The status says how well the source is known.",
             Tone.SMALL));
-        blocks.add(steps(item.sheet(), format));
+        blocks.add(steps(item, format));
         return blocks;
     }
 
     /** The governing moment, written out. */
-    private static String handCheck(Loads loads) {
+    private static String handCheck(Trace sheet, Loads loads, Format format) {
         CaseAction c = loads.governs("base-moment");
-        return "Moment at the ground line, " + Format.caseWords(c.name()) + Format.end(c.windward()) + ": force times height = " + value(c.force(), "N") + " x "
-            + value(c.height(), "m") + " = " + value(c.baseMoment(), "N m") + ". Pressure times area gives the force: see the step of the force of this case.";
+        int step = 1;
+        for (Step each : sheet.steps()) {
+            if (each.name().equals("force/" + c.name())) {
+                break;
+            }
+            step++;
+        }
+        return "Moment at the ground line, " + Format.caseWords(c.name()) + Format.end(c) + ": force times height = " + both(c.force(), "N", format) + " x "
+            + both(c.height(), "m", format) + " = " + both(c.baseMoment(), "N m", format) + ". Pressure times area gives the force: see step " + step + ".";
+    }
+
+    private static String both(double si, String unit, Format format) {
+        String other = format.other(si, unit);
+        return value(si, unit) + (other.isEmpty() ? "" : " (" + other + ")");
     }
 
     private static String balance(Loads.Balance balance) {
@@ -60,18 +72,18 @@ final class CalculationBlocks {
     }
 
     /** A symbol in running text, its subscript on the line. */
-    private static String plainSymbol(String symbol) {
+    static String plainSymbol(String symbol) {
         return symbol.replace("_", "").replace("{", "").replace("}", "");
     }
 
-    private static Steps steps(Trace sheet, Format format) {
+    private static Steps steps(ItemResult item, Format format) {
         List<StepLine> lines = new ArrayList<>();
         int number = 0;
-        for (Step step : sheet.steps()) {
+        for (Step step : item.sheet().steps()) {
             Shown shown = shown(step.value(), step.unit());
             String formula = step.way() == Step.Way.RELATION ? "= " + step.formula() : step.formula();
-            lines.add(new StepLine(++number, step.name(), step.symbol(), step.meaning(), formula, numbers(step), shown.number(), shown.unit(),
-                format.other(step.value(), step.unit()), step.place(), step.status().shown()));
+            lines.add(new StepLine(++number, step.name(), step.symbol(), step.meaning() + CheckList.part(item.item(), step), formula, numbers(step), shown.number(), shown.unit(),
+                format.other(step.value(), step.unit()), step.place(), step.status().shown() + "; " + step.name()));
         }
         return new Steps(lines);
     }

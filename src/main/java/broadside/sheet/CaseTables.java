@@ -29,7 +29,7 @@ final class CaseTables {
         List<Block> blocks = new ArrayList<>();
         boolean sign = item.choose(s -> true, h -> false);
         blocks.add(cases(loads, sign, format, loads.level().name()));
-        blocks.add(cases(loads.companion(), sign, format, loads.level().companion() + ", " + loads.level().rule()));
+        blocks.add(cases(loads.companion(), sign, format, loads.level().shown() + ", " + loads.level().rule()));
         blocks.add(new Paragraph("Forces are magnitudes. The wind was taken on the front and on the back and from both ends; where a case is not shown for an end, "
             + "the end shown is the worse. Torsion is about the middle" + (sign ? " of the posts" : "; the posts are not worked out from it")
             + "; it is positive when it turns the right side backwards, seen from the front. Loads are rounded up from unrounded values, at display only.",
@@ -58,7 +58,7 @@ final class CaseTables {
                 governs.add("torsion");
             }
             boolean marked = !governs.isEmpty();
-            rows.add(new Row(List.of(Format.caseName(c.name()), c.direction() + Format.end(c.windward()), format.force(c.force()), format.length(c.height()),
+            rows.add(new Row(List.of(Format.caseName(c.name()), c.direction() + Format.end(c), format.force(c.force()), format.length(c.height()),
                 format.moment(c.baseMoment()), torsion(c, format), marked ? String.join(", ", governs) : "-"), marked));
         }
         return new Table("Loads at the ground line, " + level, List.of(new Column("Case", false, 3), new Column("Wind on", false, 4),
@@ -86,7 +86,7 @@ final class CaseTables {
         }
         List<Column> columns = new ArrayList<>(List.of(new Column("Case", false, 6), new Column("Zone", false, 4), new Column("From, to", false, 6),
             new Column("Coefficient", true, 3), new Column("Pressure, " + loads.level().name(), true, 3),
-            new Column("Pressure, " + loads.level().companion(), true, 3)));
+            new Column("Pressure, " + loads.level().shown(), true, 3)));
         if (wall) {
             columns.add(new Column("Moment per " + (format.units() == Units.US ? "foot" : "metre") + ", " + loads.level().name(), true, 4));
         }
@@ -101,7 +101,7 @@ final class CaseTables {
         for (int i = 0; i < panel.zones().size(); i++) {
             ZonePressure z = panel.zones().get(i);
             String zone = panel.zones().size() == 1 && board ? "whole board" : HoardingDrawing.shortName(z.zone());
-            List<String> cells = new ArrayList<>(List.of(Format.caseName(c.name()) + Format.end(c.windward()),
+            List<String> cells = new ArrayList<>(List.of(Format.caseName(c.name()) + Format.end(c),
                 (panel.part().isEmpty() ? "" : panel.part() + ", ") + zone, format.length(start + z.from()) + " to " + format.length(start + z.to()),
                 format.plain(z.coefficient()), format.pressure(z.pressure()), format.pressure(companion.zones().get(index).zones().get(i).pressure())));
             if (!board) {
@@ -128,7 +128,7 @@ final class CaseTables {
         String more = shown.size() < loads.posts().size() ? ", the worst of each zone of " + loads.posts().size() + " posts" : "";
         return new Table("What reaches the foot of each post, the worst of all cases" + more, List.of(new Column("Post", true, 2),
             new Column(sign ? "From the middle" : "From the left end", true, 3), new Column(sign ? "Case" : "Zone", false, 3), new Column("Carries", false, 5),
-            new Column("Shear", true, 3), new Column("Moment, " + loads.level().name(), true, 4), new Column("Moment, " + loads.level().companion(), true, 4),
+            new Column("Shear", true, 3), new Column("Moment, " + loads.level().name(), true, 4), new Column("Moment, " + loads.level().shown(), true, 4),
             new Column("Remark", false, 2)), rows);
     }
 

@@ -7,6 +7,7 @@ import broadside.assess.Note;
 import broadside.panel.Hoarding;
 import broadside.panel.Item;
 import broadside.panel.PostSign;
+import broadside.quantity.Length;
 import broadside.sheet.Block.Fact;
 import broadside.sheet.Block.Facts;
 import broadside.sheet.Block.Heading;
@@ -116,16 +117,16 @@ final class CheckList {
             fact("Clear height below" + which, b.clearance().typed());
             fact("Overall height" + which, format.length(b.clearance().metres() + b.height().metres()));
             fact("Mass" + which, b.mass().map(m -> m.typed()).orElse(""));
-            fact("Middle of board from middle of posts" + which, b.offset().typed());
+            fact("Middle of board from middle of posts" + which, b.offset().metres() == 0 ? "in the middle" : b.offset().typed() + ", positive to the right");
         }
         fact("Posts", sign.posts().count() + sign.posts().spacing().map(s -> " at " + s.typed()).orElse(""));
     }
 
     private void hoarding(Hoarding hoarding) {
         fact("Length and height", hoarding.length().typed() + " by " + hoarding.height().typed());
-        fact("Gap below", hoarding.clearance().typed());
+        fact("Gap below", hoarding.clearance().metres() == 0 ? "none" : hoarding.clearance().typed());
         fact("Overall height", format.length(hoarding.clearance().metres() + hoarding.height().metres()));
-        fact("Returns", "left " + hoarding.returnLeft().typed() + ", right " + hoarding.returnRight().typed());
+        fact("Returns", "left " + orNone(hoarding.returnLeft()) + ", right " + orNone(hoarding.returnRight()));
         fact("Gates", hoarding.gates().isEmpty() ? "none" : String.join("; ", hoarding.gates().stream()
             .map(g -> g.width().typed() + " wide from " + g.from().typed()).toList()));
         fact("Posts", hoarding.spacing().map(s -> "at " + s.typed()).orElse(""));
@@ -160,7 +161,7 @@ final class CheckList {
     private void coefficients(ItemResult item) {
         for (Step step : item.sheet().steps()) {
             if (step.name().startsWith("coefficient/") || step.name().equals("gust-factor") || step.name().startsWith("topography-factor")) {
-                facts.add(Fact.of(step.name(), format.plain(step.value()), step.place() + "; " + step.formula()));
+                facts.add(Fact.of(step.meaning() + part(item.item(), step), format.plain(step.value()), step.place() + "; " + CalculationBlocks.plainSymbol(step.formula())));
             }
         }
         fact("Internal pressure", "none: a free-standing panel");
@@ -178,7 +179,8 @@ final class CheckList {
             item.loads().ifPresent(l -> fact("Wind along the face, " + mark, format.force(l.edgeOn().force()) + ", own rule"));
             item.refusal().ifPresent(r -> fact("Outcome, " + mark, "not covered: " + r.code() + ", " + r.clause()));
         }
-        fact("Pressures, forces, moments", "at both levels, each labelled, under \"Loads by case\"");
+        fact("Pressures, forces, moments", assessment.items().stream().anyMatch(i -> i.loads().isPresent())
+            ? "at both levels, each labelled, under \"Loads by case\"" : "none: not covered");
         group("6 Results");
     }
 
@@ -229,6 +231,16 @@ final class CheckList {
         }
         fact("Storm action", NOT_GIVEN);
         group("12 Inspection and maintenance");
+    }
+
+    private static String orNone(Length length) {
+        return length.metres() == 0 ? "none" : length.typed();
+    }
+
+    /** The panel that a step belongs to, behind a comma, where the item has several. */
+    static String part(Item item, Step step) {
+        return item.panels().stream().map(p -> p.part()).filter(p -> !p.isEmpty() && step.name().endsWith("/" + p)).findFirst()
+            .map(p -> ", " + p).orElse(step.name().endsWith("/gates-shut") ? ", gates shut" : "");
     }
 
     private static String join(String a, String b) {

@@ -1,6 +1,8 @@
 package broadside.sheet;
 
+import broadside.action.CaseAction;
 import broadside.assess.Job;
+import broadside.codes.LoadCase;
 import broadside.codes.LoadCase.Windward;
 import broadside.quantity.Dimension;
 import broadside.quantity.Rounding;
@@ -34,16 +36,16 @@ final class Format {
 
     /** A case in a column headed so: "A" for case-a. */
     static String caseName(String name) {
-        return name.startsWith("case-") && name.length() == 6 ? name.substring(5).toUpperCase(Locale.ROOT) : name;
+        return LoadCase.shortName(name);
     }
 
-    /** The end that the wind meets, as it follows the name of a case. */
-    static String end(Windward windward) {
-        return switch (windward) {
-            case NONE -> "";
-            case LEFT -> ", from the left";
-            case RIGHT -> ", from the right";
-        };
+    /** The side of a case, as it follows its name: the end from which zones run, or the side to which an even force moves. */
+    static String end(CaseAction action) {
+        String side = action.windward() == Windward.LEFT ? "left" : "right";
+        if (action.windward() == Windward.NONE) {
+            return "";
+        }
+        return action.zones().stream().anyMatch(p -> p.zones().size() > 1) ? ", from the " + side : ", force to the " + side;
     }
 
     Units units() {
@@ -91,6 +93,12 @@ final class Format {
         return number == Math.rint(number) ? Long.toString((long) number) : Double.toString(number);
     }
 
+    /** A value that is no load, to the nearest, in both systems. */
+    String nearest(double si, Dimension dimension) {
+        Units other = units == Units.US ? Units.METRIC : Units.US;
+        return Show.of(si, dimension, units, 3, Rounding.NEAREST).text() + " (" + Show.of(si, dimension, other, 3, Rounding.NEAREST).text() + ")";
+    }
+
     /** A load in both systems: the leading one first. */
     String both(double si, Dimension dimension) {
         Units other = units == Units.US ? Units.METRIC : Units.US;
@@ -98,10 +106,7 @@ final class Format {
     }
 
     private String load(double si, Dimension dimension) {
-        if (si == 0) {
-            return "0";
-        }
-        return Show.of(si, dimension, units, 3, Rounding.UP).text();
+        return Math.abs(si) < 1e-6 ? "0" : Show.of(si, dimension, units, 3, Rounding.UP).text();
     }
 
     private static String trimmed(double metres) {

@@ -1,5 +1,6 @@
 package broadside.sheet;
 
+import broadside.action.PostAction;
 import broadside.assess.Assessment;
 import broadside.assess.ItemResult;
 import broadside.assess.Loads;
@@ -28,7 +29,7 @@ final class ItemBlocks {
         } else {
             Loads loads = item.loads().get();
             blocks.add(new Heading(level, "The answer", anchor + "answer"));
-            blocks.add(new Paragraph(wind(assessment, loads, format), Tone.PLAIN));
+            blocks.add(new Paragraph(wind(assessment, item, loads, format), Tone.PLAIN));
             blocks.add(answer(assessment, item, loads, format));
             overrides(item).forEach(blocks::add);
         }
@@ -48,9 +49,9 @@ final class ItemBlocks {
 
     private static Answer answer(Assessment assessment, ItemResult item, Loads loads, Format format) {
         List<Fact> lines = new ArrayList<>();
-        String companion = loads.level().companion();
+        String companion = loads.level().shown();
         Loads other = loads.companion();
-        lines.add(Fact.of("Governing case", governs(item, loads), loads.governs("base-moment").label()));
+        lines.add(Fact.of("Governing case", governs(item, loads), loads.governs("base-moment").label() + raised(item)));
         lines.add(Fact.of("Wind force", format.both(loads.governs("base-shear").force(), Dimension.FORCE) + ", " + loads.level().name(),
             format.force(other.governs("base-shear").force()) + " " + companion));
         lines.add(moment(loads, other, format));
@@ -63,11 +64,16 @@ final class ItemBlocks {
         return new Answer(lines);
     }
 
+    /** Whether a least pressure, and not the wind, gives the loads. */
+    private static String raised(ItemResult item) {
+        return item.notes().stream().map(Note::text).filter(t -> t.contains("least pressure governs")).findFirst().map(t -> ". " + t).orElse("");
+    }
+
     /** The wind on one line: speed with its averaging time, terrain, and what it comes to. */
-    private static String wind(Assessment assessment, Loads loads, Format format) {
+    private static String wind(Assessment assessment, ItemResult item, Loads loads, Format format) {
         Site site = assessment.job().site();
-        return "Wind: " + Format.speed(site.basicSpeed()) + ", " + site.averaging().words() + site.returnPeriod().map(p -> ", " + p.typed()).orElse("")
-            + "; terrain " + site.ground().terrain() + "; velocity pressure " + format.both(loads.velocity().pressure(), Dimension.PRESSURE) + " at "
+        return "Wind: " + Format.speed(site.basicSpeed()) + ", " + site.averaging().words() + (item.sheet().find("probability-factor").isPresent() ? ", " + site.returnPeriod().orElseThrow().typed() : "")
+            + "; terrain " + site.ground().terrain() + "; velocity pressure " + format.nearest(loads.velocity().pressure(), Dimension.PRESSURE) + " at "
             + format.length(loads.velocity().height()) + ", " + loads.level().name() + ".";
     }
 
@@ -87,12 +93,19 @@ final class ItemBlocks {
     }
 
     private static Fact moment(Loads loads, Loads other, Format format) {
-        String companion = loads.level().companion();
+        String companion = loads.level().shown();
         return loads.worstPost()
             .map(p -> Fact.of("Moment at the foot of the worst post", format.both(p.moment(), Dimension.MOMENT) + ", " + loads.level().name(),
-                format.moment(other.worstPost().orElseThrow().moment()) + " " + companion + ", post " + p.post() + ", " + Format.caseWords(p.named())))
+                format.moment(other.worstPost().orElseThrow().moment()) + " " + companion + ", " + worstPosts(loads, p) + ", " + Format.caseWords(p.named())))
             .orElseGet(() -> Fact.of("Moment at the ground, whole length", format.both(loads.governs("base-moment").baseMoment(), Dimension.MOMENT) + ", "
                 + loads.level().name(), format.moment(other.governs("base-moment").baseMoment()) + " " + companion));
+    }
+
+    /** The posts that share the greatest moment. */
+    private static String worstPosts(Loads loads, PostAction most) {
+        List<String> same = loads.posts().stream().filter(p -> p.moment() >= most.moment() * (1 - 1e-9)).map(p -> Integer.toString(p.post())).toList();
+        return same.size() == 1 ? "post " + same.get(0) : same.size() > 4 ? same.size() + " posts alike"
+            : "posts " + String.join(", ", same.subList(0, same.size() - 1)) + " and " + same.get(same.size() - 1);
     }
 
     /** How well the sources of the calculation are known. */
@@ -120,9 +133,9 @@ final class ItemBlocks {
 
     private static String caption(ItemResult item) {
         return "Drawn to scale, dimensions as typed." + item.loads().map(l -> " Hatched the denser the higher the pressure, zones as in "
-            + Format.caseWords(ItemDrawing.shown(l).name()) + Format.end(ItemDrawing.shown(l).windward())
-            + item.item().choose(sign -> "; the circle is where the force acts in " + Format.caseWords(l.governs("torsion").name())
-                + Format.end(l.governs("torsion").windward()), hoarding -> "") + ".").orElse("");
+            + Format.caseWords(ItemDrawing.shown(l).name()) + Format.end(ItemDrawing.shown(l))
+            + item.item().choose(sign -> "; the circle is where the force of " + Format.caseWords(l.governs("torsion").name())
+                + Format.end(l.governs("torsion")) + " acts", hoarding -> "") + ".").orElse("");
     }
 
     private static Notes notes(ItemResult item, Note.Kind... kinds) {

@@ -101,7 +101,7 @@ final class SignDrawing {
             }
         }
         CaseAction turning = loads.get().governs("torsion");
-        front.target(turning.side(), turning.height(), "F");
+        front.target(turning.side(), turning.height(), "F of " + Format.caseName(turning.name()));
     }
 
     private void dimensions(Canvas front) {

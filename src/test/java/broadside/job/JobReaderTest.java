@@ -53,7 +53,7 @@ class JobReaderTest {
             Arguments.of(SIGN, SOLIDITY, "\"solidity\": 1e400", BOARD + "solidity", "is too large to be a number"),
             Arguments.of(SIGN, CLEARANCE, "\"clearance\": \"-1 mm\"", BOARD + "clearance", "is below zero: the lower edge would lie below the ground"),
             Arguments.of(SIGN, "\"shape\": \"rectangle\"", "\"shape\": \"oval\"", BOARD + "shape", "\"oval\" does not fit: outline, one of rectangle, disc, triangle"),
-            Arguments.of(SIGN, "\"shape\": \"rectangle\"", "\"shape\": \"disc\"", BOARD + "height", "of a disc must be the same as its width"),
+            Arguments.of(SIGN, "\"shape\": \"rectangle\"", "\"shape\": \"disc\"", BOARD + "height", "must be 3 m like the width, as the board is a disc"),
             Arguments.of(SIGN, "\"offset\": \"0 m\"", "\"offset\": \"-51 m\"", BOARD + "offset", "must lie within 50 m of the posts"),
             Arguments.of(SIGN, "\"mass\": \"60 kg\"", "\"mass\": \"-60 kg\"", BOARD + "mass", "must not be below zero"),
             Arguments.of(SIGN, "\"depth\": \"0.05 m\"", "\"depth\": \"-5 mm\"", BOARD + "depth", "is below zero: a thickness is not below zero"),
