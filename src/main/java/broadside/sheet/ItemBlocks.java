@@ -134,8 +134,8 @@ final class ItemBlocks {
     private static String caption(ItemResult item) {
         return "Drawn to scale, dimensions as typed." + item.loads().map(l -> " Hatched the denser the higher the pressure, zones as in "
             + Format.caseWords(ItemDrawing.shown(l).name()) + Format.end(ItemDrawing.shown(l))
-            + item.item().choose(sign -> "; the circle is where the force of " + Format.caseWords(l.governs("torsion").name())
-                + Format.end(l.governs("torsion")) + " acts", hoarding -> "") + ".").orElse("");
+            + item.item().choose(sign -> "; the circle marks the force of " + Format.caseWords(l.governs("torsion").name())
+                + Format.end(l.governs("torsion")).replace(", force to the", ", towards the"), hoarding -> "") + ".").orElse("");
     }
 
     private static Notes notes(ItemResult item, Note.Kind... kinds) {
