@@ -113,7 +113,8 @@ public final class FootActions {
 
         /** What a symbol of a pressure has below the line: A of w_A, 0-s of p_{0-s}. */
         static String bare(String symbol) {
-            return symbol.replaceAll("^._\\{?|}$", "");
+            String below = symbol.substring(Math.min(2, symbol.length()));
+            return below.startsWith("{") ? below.substring(1, below.length() - 1) : below;
         }
     }
 

@@ -31,7 +31,7 @@ public record LoadCase(String name, String label, Windward windward, List<ZonePr
 
     /** A case as it is named in running text after the word case: A for case-a, centred for centred. */
     public static String shortName(String name) {
-        return name.matches("case-[a-z]") ? name.substring(5).toUpperCase(Locale.ROOT) : name;
+        return name.length() == 6 && name.startsWith("case-") ? name.substring(5).toUpperCase(Locale.ROOT) : name;
     }
 
     public LoadCase {

@@ -44,6 +44,6 @@ public record PostSign(String mark, List<Board> boards, int faces, Posts posts, 
         String own = boards.get(index).mark();
         boolean alone = boards.stream().filter(b -> b.mark().equals(own)).count() == 1;
         return boards.size() == 1 ? "" : own.isEmpty() ? Integer.toString(index + 1)
-            : alone && !own.matches("\\d+") ? own : (index + 1) + " " + own;
+            : alone && !own.chars().allMatch(Character::isDigit) ? own : (index + 1) + " " + own;
     }
 }

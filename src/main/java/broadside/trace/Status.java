@@ -32,7 +32,12 @@ public enum Status {
 
     /** The words shown to a reader who has to judge the figure. */
     public String shown() {
-        return this == RECALLED ? "recalled: not yet checked against print" : word;
+        return this == RECALLED ? "not yet checked against print" : word;
+    }
+
+    /** The word, and for a recalled figure what it means. */
+    public String told() {
+        return this == RECALLED ? word + ": " + shown() : word;
     }
 
     public static Optional<Status> of(String word) {

@@ -80,12 +80,12 @@ final class Shelf {
         List<List<String>> rows = new ArrayList<>();
         for (int i = 0; i < file.body().size(); i++) {
             List<String> row = new ArrayList<>(file.body().get(i));
-            row.add(file.rowStatus().get(i).shown());
+            row.add(file.rowStatus().get(i).told());
             rows.add(row);
         }
         List<String> headings = new ArrayList<>(file.headings().stream().filter(h -> !h.equals("status")).toList());
         headings.add("status");
-        String status = file.statusText().equals("by row") ? "by row, the weakest " + file.source().status().shown().replace(": ", ", ") : file.source().status().shown();
+        String status = file.statusText().equals("by row") ? "by row, the weakest " + file.source().status().told().replace(": ", ", ") : file.source().status().told();
         return new TableView(file.name().replaceAll("[^a-z0-9]+", "-"), file.title(), file.name(), file.source().citation(), status,
             String.join("; ", file.axes()), file.value(), file.betweenWord(), file.beyondWords(), file.entered(), file.note(), file.digest(), headings, rows);
     }
@@ -115,7 +115,7 @@ final class Shelf {
 
     private static CheckView view(PublishedCheck check) {
         return new CheckView(check.title(), check.source().place(), check.source().publication() + ", " + check.source().edition(),
-            check.source().status().shown(), outcome(check.passed()), check.lines().stream().map(l -> new LineView(l.item(), l.step(), l.printed(),
+            check.source().status().told(), outcome(check.passed()), check.lines().stream().map(l -> new LineView(l.item(), l.step(), l.printed(),
                 l.computed(), l.difference(), l.within(), outcome(l.passed()))).toList());
     }
 
