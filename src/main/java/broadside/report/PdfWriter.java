@@ -12,6 +12,7 @@ import java.security.NoSuchAlgorithmException;
 import java.util.List;
 import org.apache.pdfbox.cos.COSDictionary;
 import org.apache.pdfbox.cos.COSName;
+import org.apache.pdfbox.filter.Filter;
 import org.apache.pdfbox.pdmodel.PDDocument;
 
 /**
@@ -19,6 +20,13 @@ import org.apache.pdfbox.pdmodel.PDDocument;
  * same bytes. One writer serves all threads; making it reads the fonts.
  */
 public final class PdfWriter {
+
+    static {
+        // The library packs fonts and objects itself, at the level that this names.
+        if (System.getProperty(Filter.SYSPROP_DEFLATELEVEL) == null) {
+            System.setProperty(Filter.SYSPROP_DEFLATELEVEL, Integer.toString(Envelope.LEVEL));
+        }
+    }
 
     private final Lettering lettering = new Lettering();
     private final byte[] profile = Envelope.pack(ICC_Profile.getInstance(ColorSpace.CS_sRGB).getData());

@@ -67,7 +67,9 @@ final class Words {
     }
 
     private void addOne(int c, byte mark) {
-        if (c >= 0x2080 && c <= 0x2089) {
+        if (c > 0x20 && c < 0x7F) {
+            append((char) c, mark);
+        } else if (c >= 0x2080 && c <= 0x2089) {
             append((char) ('0' + c - 0x2080), (byte) (mark | LOWERED));
         } else if (isSpace(c)) {
             if (length > 0 && characters[length - 1] != ' ') {
@@ -95,7 +97,7 @@ final class Words {
             characters = Arrays.copyOf(characters, length * 2);
             marks = Arrays.copyOf(marks, length * 2);
         }
-        rightToLeft |= RightToLeft.isIn(c);
+        rightToLeft = rightToLeft || c >= 0x590 && RightToLeft.isIn(c);
         characters[length] = c;
         marks[length++] = mark;
     }

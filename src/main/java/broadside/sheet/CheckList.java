@@ -204,17 +204,13 @@ final class CheckList {
     private void assumptions() {
         List<String> all = assessment.items().stream().flatMap(i -> i.notes().stream())
             .filter(n -> n.kind() == Note.Kind.ASSUMPTION || n.kind() == Note.Kind.OVERRIDE).map(Note::text).distinct().toList();
-        for (int i = 0; i < all.size(); i++) {
-            fact("Assumption " + (i + 1), all.get(i));
-        }
+        fact("Every default, and each answer that was not known", all.isEmpty() ? "none" : all.size() + ", each listed under \"What was assumed\"");
         group("9 Assumptions and unknowns");
     }
 
     private void exclusions() {
-        for (String each : List.of("Ice and snow", "Earthquake", "Fatigue and vortex shedding", "Impact", "Crowd load", "Electrical parts",
-            "Anchors in masonry", "Existing structure", "Flutter")) {
-            fact(each, "not covered");
-        }
+        fact("Not covered", "ice; snow; earthquake; fatigue and vortex shedding; impact; crowd load; electrical parts; anchors in masonry; existing structure; "
+            + "flutter");
         group("10 Exclusions");
     }
 

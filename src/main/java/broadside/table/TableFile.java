@@ -3,6 +3,7 @@ package broadside.table;
 import broadside.trace.Status;
 import java.util.List;
 import java.util.Optional;
+import java.util.regex.Pattern;
 
 /**
  * The heading of one table file and its checked content.
@@ -31,6 +32,8 @@ public record TableFile(String name, String title, Source source, String form, L
         rowStatus = List.copyOf(rowStatus);
     }
 
+    private static final Pattern NUMBER = Pattern.compile("-?\\d+(\\.\\d+)?");
+
     Source rowSource(int row) {
         return source.with(source.place(), rowStatus.get(row));
     }
@@ -46,7 +49,7 @@ public record TableFile(String name, String title, Source source, String form, L
     }
 
     static boolean isNumber(String cell) {
-        return cell.matches("-?\\d+(\\.\\d+)?");
+        return NUMBER.matcher(cell).matches();
     }
 
     /** A printed number, NaN for a cell that is not printed; empty when it is neither. */

@@ -2,11 +2,13 @@ package broadside.table;
 
 import broadside.trace.Status;
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.ArrayList;
 import java.util.HexFormat;
+import java.util.Iterator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -61,26 +63,35 @@ public final class TableReader {
 
     private static List<CSVRecord> body(String name, List<String> lines, int start) {
         List<String> rest = lines.subList(Math.min(start - 1, lines.size()), lines.size());
-        List<CSVRecord> records = new ArrayList<>();
         for (int i = 0; i < rest.size(); i++) {
-            String line = rest.get(i);
-            if (line.isBlank() || line.startsWith("#")) {
+            if (rest.get(i).isBlank() || rest.get(i).startsWith("#")) {
                 throw new TableFormat(name, start + i, "a blank or comment line inside the body");
             }
-            try (CSVParser parser = CSVParser.parse(line, BODY)) {
-                List<CSVRecord> one = parser.getRecords();
-                if (one.size() != 1) {
-                    throw new TableFormat(name, start + i, "this is not one row of cells");
+        }
+        List<CSVRecord> records = new ArrayList<>();
+        try (CSVParser parser = CSVParser.parse(String.join("\n", rest), BODY)) {
+            Iterator<CSVRecord> found = parser.iterator();
+            while (hasNext(found, name, start + records.size())) {
+                records.add(found.next());
+                if (parser.getCurrentLineNumber() > records.size()) {
+                    throw new TableFormat(name, start + records.size() - 1, "a cell runs over the end of the line");
                 }
-                records.add(one.get(0));
-            } catch (IOException | RuntimeException e) {
-                throw e instanceof TableFormat format ? format : new TableFormat(name, start + i, "this row cannot be read: " + e.getMessage());
             }
+        } catch (IOException e) {
+            throw new TableFormat(name, start, "the body cannot be read: " + e.getMessage());
         }
         if (records.size() < 2) {
             throw new TableFormat(name, start, "the body needs a line of column headings and at least one row");
         }
         return records;
+    }
+
+    private static boolean hasNext(Iterator<CSVRecord> records, String name, int line) {
+        try {
+            return records.hasNext();
+        } catch (IllegalStateException | UncheckedIOException e) {
+            throw new TableFormat(name, line, "this row cannot be read: " + e.getMessage());
+        }
     }
 
     private static TableFile assemble(String name, Map<String, String> heading, List<String> axes, List<CSVRecord> records,
