@@ -30,7 +30,8 @@ public final class Commands implements Runnable {
         CommandLine line = new CommandLine(new Commands());
         line.setErr(errors);
         line.setParameterExceptionHandler((e, given) -> {
-            errors.println(Terminal.plain(e.getMessage().lines().findFirst().orElse("this command line does not fit")));
+            errors.println(Terminal.plain(e.getMessage().lines().findFirst().orElse("this command line does not fit"))
+                + (e instanceof CommandLine.UnmatchedArgumentException ? "; the commands are serve, check, summary, verify and tables" : ""));
             return 2;
         });
         line.setExecutionExceptionHandler((e, command, parsed) -> failed(e, errors));

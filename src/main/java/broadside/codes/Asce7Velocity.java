@@ -132,9 +132,10 @@ final class Asce7Velocity {
                 Math.sqrt(1 / (1 + k * Math.pow((width + height) / lz, p))), "1");
         double a = constants.number("gust-constant");
         double slope = constants.number("gust-slope");
-        double g = constants.number("gust-peak");
-        return line(trace, place, "gust-factor", "G", "gust-effect factor of a rigid structure").in("I_z", iz).in("Q", q)
-            .gives(Numbers.plain(a) + " (1 + " + Numbers.plain(slope * g) + " I_z Q) / (1 + " + Numbers.plain(slope * g) + " I_z)",
+        double g = line(trace, constants.source("gust-peak"), "gust-peak", "g", "peak factor of background response and of wind, both alike")
+            .reads("as printed", constants.number("gust-peak"), "1");
+        return line(trace, place, "gust-factor", "G", "gust-effect factor of a rigid structure").in("g", g).in("I_z", iz).in("Q", q)
+            .gives(Numbers.plain(a) + " (1 + " + Numbers.plain(slope) + " g I_z Q) / (1 + " + Numbers.plain(slope) + " g I_z)",
                 a * (1 + slope * g * iz * q) / (1 + slope * g * iz), "1");
     }
 

@@ -56,6 +56,8 @@ final class Failures {
 
     private void unknown(Context ctx, Exception e) {
         if (tooLargeUpload(e)) {
+            // What is left of the body is not read, so the connection cannot serve another request.
+            ctx.header("Connection", "close");
             Refused plain = Refused.tooLarge();
             show(ctx, plain.status(), new Message(plain.title(), plain.getMessage(), List.of(), ""));
             return;
