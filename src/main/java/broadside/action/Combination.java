@@ -43,20 +43,15 @@ record Combination(String name, String label, Windward windward, List<PanelForce
         return new Combination(name, label, windward, forces);
     }
 
-    /** Whether the pressure differs from place to place. */
-    boolean zoned() {
-        return panels.stream().anyMatch(p -> p.load().zones().size() > 1);
-    }
-
-    /** Whether a panel has a return at one end that the other end has not. */
-    boolean unlikeEnds() {
-        return panels.stream().anyMatch(p -> !p.panel().endsAlike());
+    /** Whether pressures are measured from the windward end; a case that only moves an even pressure's resultant is not. */
+    boolean measuredFromTheEnd() {
+        return panels.stream().anyMatch(p -> p.load().windward() != Windward.NONE && p.load().rule().isEmpty());
     }
 
     /** Whether this is the mirror image of the same case met from the other end. */
     boolean mirrors(Combination other) {
         return near(force(), other.force()) && near(moment(), other.moment()) && near(torsion(), -other.torsion())
-            && !unlikeEnds();
+            && panels.stream().allMatch(p -> p.panel().endsAlike());
     }
 
     private static boolean near(double a, double b) {

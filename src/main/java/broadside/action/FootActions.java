@@ -53,8 +53,8 @@ public final class FootActions {
     }
 
     /**
-     * Works out and records each case. Of two ends the worse one comes first. The other end comes too where the case has
-     * zones or the ends differ, since pressures then lie elsewhere; where it only mirrors the first it is not worked out again.
+     * Works out and records each case. Of two ends the worse one comes first. The other end comes too where
+     * pressures are measured from the windward end, since they then lie elsewhere; where it only mirrors the first it is not worked out again.
      */
     public static Result of(List<PanelCases> panels, PanelSymbols symbols, Trace trace) {
         List<Combination> all = Combination.all(panels);
@@ -66,7 +66,7 @@ public final class FootActions {
             CaseAction front = record(worst, "", symbols, trace);
             add(cases, front);
             for (Combination end : ends) {
-                boolean unlike = end != worst && (end.zoned() || end.unlikeEnds());
+                boolean unlike = end != worst && end.measuredFromTheEnd();
                 CaseAction action = !unlike ? front : end.mirrors(worst) ? front.fromOtherEnd(zones(end))
                     : record(end, end.windward() == Windward.LEFT ? "from-left" : "from-right", symbols, trace);
                 if (unlike) {
