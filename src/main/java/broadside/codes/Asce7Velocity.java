@@ -80,7 +80,7 @@ final class Asce7Velocity {
     private double elevationFactor(Site site, Trace trace) {
         Source place = constants.source("elevation-exponent");
         if (site.options().si("ground-elevation").isEmpty()) {
-            return trace.line("elevation-factor", "K_e", "ground elevation factor").from(name + ", 26.9", Status.READ)
+            return trace.line("elevation-factor", "K_e", "ground elevation factor").from(name + ", 26.9", Status.SECOND_HAND)
                 .reads("1, which is permitted at any elevation", 1, "1");
         }
         double z = site.options().si("ground-elevation").get();

@@ -34,7 +34,8 @@ final class CalculationBlocks {
         blocks.add(new Heading(3, "Given", anchor + "given"));
         blocks.add(given(item.sheet()));
         blocks.add(new Heading(3, "Steps", anchor + "steps"));
-        blocks.add(new Paragraph("Values are in SI with four figures; what was calculated was not rounded. The status says how well the source is known.",
+        blocks.add(new Paragraph("Values are in SI with four figures; what was calculated was not rounded. The status says how well the source is known: read means seen in print, in the code "
+            + "or in a guide or national copy that the note of the table names; second-hand means seen quoted, or in another edition.",
             Tone.SMALL));
         blocks.add(steps(item, format));
         return blocks;

@@ -60,7 +60,7 @@ final class ItemBlocks {
             lines.add(Fact.of("Torsion about the middle of the posts", format.both(torsion, Dimension.MOMENT) + ", " + loads.level().name(),
                 format.moment(Math.abs(other.governs("torsion").torsion())) + " " + companion + ", " + Format.caseWords(loads.governs("torsion").name())));
         }
-        lines.add(Fact.of("How sure", sure(item), "loads only: no post, footing or ground was checked"));
+        lines.add(sure(item));
         return new Answer(lines);
     }
 
@@ -109,14 +109,13 @@ final class ItemBlocks {
     }
 
     /** How well the sources of the calculation are known. */
-    private static String sure(ItemResult item) {
+    private static Fact sure(ItemResult item) {
         List<Step> steps = item.sheet().steps();
         long recalled = steps.stream().filter(s -> s.status() == Status.RECALLED).count();
         long quoted = steps.stream().filter(s -> s.status() == Status.SECOND_HAND).count();
-        if (recalled == 0 && quoted == 0) {
-            return "all figures were read in print";
-        }
-        return recalled + " of " + steps.size() + " steps rest on figures not yet checked against print" + (quoted > 0 ? ", " + quoted + " on quoted ones" : "");
+        String first = recalled == 0 ? "no step rests on memory" : recalled + " of " + steps.size() + " steps rest on figures not yet checked against print";
+        return Fact.of("How sure", first, (quoted > 0 ? quoted + " more on figures seen quoted or in another edition; " : "")
+            + "loads only: no post, footing or ground was checked");
     }
 
     private static List<Paragraph> overrides(ItemResult item) {
