@@ -154,14 +154,14 @@ final class Canvas {
             y2 - uy * head - ux * 3), 0.4, Ink.ACCENT, Fill.INK));
     }
 
-    /** The point at which a force acts, seen along the wind. */
-    void target(double xMetres, double yMetres, String text) {
+    /** The point at which a force acts, seen along the wind; its label stands at a place on paper, clear of the hatching. */
+    void target(double xMetres, double yMetres, double labelX, String text) {
         double px = x(xMetres);
         double py = y(yMetres);
         shapes.add(new Drawing.Circle(px, py, 3.2, THICK, Ink.ACCENT, Fill.PAPER));
         line(px - 6, py, px + 6, py, THIN, Ink.ACCENT, false);
         line(px, py - 6, px, py + 6, THIN, Ink.ACCENT, false);
-        boldText(px + 8, py - 5, text, Anchor.START, Ink.ACCENT);
+        boldText(labelX, py - 5, text, Anchor.START, Ink.ACCENT);
     }
 
     /** A bar of a round length with that length beside it. */

@@ -101,7 +101,8 @@ final class SignDrawing {
             }
         }
         CaseAction turning = loads.get().governs("torsion");
-        front.target(turning.side(), turning.height(), "F of " + Format.caseName(turning.name()));
+        double beside = sign.boards().size() == 1 ? front.x(right) + 6 : front.x(turning.side()) + 8;
+        front.target(turning.side(), turning.height(), beside, "F of " + Format.caseName(turning.name()));
     }
 
     private void dimensions(Canvas front) {
