@@ -1,7 +1,7 @@
 package broadside.action;
 
-import broadside.codes.LoadCase;
 import broadside.codes.LoadCase.Windward;
+import broadside.codes.LoadCase;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;

@@ -1,8 +1,8 @@
 package broadside.action;
 
 import broadside.action.CaseAction.PanelZones;
-import broadside.codes.LoadCase;
 import broadside.codes.LoadCase.Windward;
+import broadside.codes.LoadCase;
 import broadside.codes.PanelSymbols;
 import broadside.codes.ShiftRule;
 import broadside.codes.ZonePressure;
@@ -20,6 +20,24 @@ public final class FootActions {
     /** The actions of every case, front and back, and the combinations that posts are worked out from. */
     public record Result(List<CaseAction> cases, List<Combined> combinations) { }
 
+    /**
+     * How the item stands.
+     *
+     * @param state  name of the arrangement, empty for the item as it is
+     * @param foot   where its loads end
+     * @param posts  wind on the posts themselves; empty where it is not known
+     */
+    public record Standing(String state, Foot foot, List<PostDrag> posts) {
+
+        double shear() {
+            return posts.stream().mapToDouble(PostDrag::force).sum();
+        }
+
+        double moment() {
+            return posts.stream().mapToDouble(PostDrag::moment).sum();
+        }
+    }
+
     /** A combination in the hands of other packages, with the force and moment that were recorded for it. */
     public static final class Combined {
 
@@ -30,7 +48,7 @@ public final class FootActions {
         Combined(Combination combination, CaseAction recorded) {
             this.combination = combination;
             this.force = recorded.force();
-            this.moment = recorded.baseMoment();
+            this.moment = recorded.force() * recorded.height();
         }
 
         Combination combination() {
@@ -46,7 +64,7 @@ public final class FootActions {
             return force;
         }
 
-        /** Moment at the ground line, N m. */
+        /** Moment of the panels at the ground line, N m. */
         public double moment() {
             return moment;
         }
@@ -56,19 +74,19 @@ public final class FootActions {
      * Works out and records each case. Of two ends the worse one comes first. The other end comes too where
      * pressures are measured from the windward end, since they then lie elsewhere; where it only mirrors the first it is not worked out again.
      */
-    public static Result of(List<PanelCases> panels, PanelSymbols symbols, Trace trace) {
+    public static Result of(List<PanelCases> panels, PanelSymbols symbols, Standing standing, Trace trace) {
         List<Combination> all = Combination.all(panels);
         List<CaseAction> cases = new ArrayList<>();
         List<Combined> combinations = new ArrayList<>();
         for (String name : all.stream().map(Combination::name).distinct().toList()) {
             List<Combination> ends = all.stream().filter(c -> c.name().equals(name)).toList();
             Combination worst = ends.stream().reduce(Combination::worse).orElseThrow();
-            CaseAction front = record(worst, "", symbols, trace);
+            CaseAction front = record(worst, "", symbols, standing, trace);
             add(cases, front);
             for (Combination end : ends) {
                 boolean unlike = end != worst && end.measuredFromTheEnd();
                 CaseAction action = !unlike ? front : end.mirrors(worst) ? front.fromOtherEnd(zones(end))
-                    : record(end, end.windward() == Windward.LEFT ? "from-left" : "from-right", symbols, trace);
+                    : record(end, end.windward() == Windward.LEFT ? "from-left" : "from-right", symbols, standing, trace);
                 if (unlike) {
                     add(cases, action);
                 }
@@ -83,30 +101,30 @@ public final class FootActions {
         cases.add(front.fromBehind());
     }
 
-    private static CaseAction record(Combination combination, String end, PanelSymbols symbols, Trace whole) {
+    private static CaseAction record(Combination combination, String end, PanelSymbols symbols, Standing standing, Trace whole) {
         Trace trace = whole.part(end);
         String name = combination.name();
         boolean one = combination.panels().size() == 1;
         List<double[]> found = new ArrayList<>();
         for (PanelForce panel : combination.panels()) {
-            Names names = new Names(name, symbols, one ? 0 : found.size() + 1);
+            Names names = new Names(name, symbols, one ? 0 : found.size() + 1, standing);
             found.add(panel(panel, names, trace.part(panel.panel().part())));
         }
         double force = one ? found.get(0)[0] : total("force/" + name, "F", "wind force on all panels, case " + LoadCase.shortName(name), found, 0, trace);
-        double shear = trace.line("base-shear/" + name, "F_b", "shear at the ground line, case " + LoadCase.shortName(name)).in("F", force, "N").from(STATICS, Status.DERIVED)
-            .gives("F", force, "N");
-        double moment = one ? found.get(0)[1] : total("base-moment/" + name, "M", "moment at the ground line, case " + LoadCase.shortName(name), found, 1, trace);
+        double shear = withPosts(trace.line("base-shear/" + name, "F_b", "shear at the foot, case " + LoadCase.shortName(name)), "F", force,
+            "F_{post}", standing.shear(), "N");
+        double moment = one ? found.get(0)[1] : totalMoment(name, found, standing, trace);
         double torsion = one ? found.get(0)[2] : total("torsion/" + name, "M_T", "torsion about the middle, case " + LoadCase.shortName(name), found, 2, trace);
         if (!one) {
-            trace.line("lever-arm/" + name, "z", "height of the resultant, case " + LoadCase.shortName(name)).in("M", moment, "N m").in("F", force, "N")
-                .from(STATICS, Status.DERIVED).gives("M / F", moment / force, "m");
+            trace.line("lever-arm/" + name, "z", "height of the resultant, case " + LoadCase.shortName(name)).in("M", combination.moment(), "N m").in("F", force, "N")
+                .from(STATICS, Status.DERIVED).reads("moment of all panels over their force", combination.moment() / force, "m");
         }
-        return new CaseAction(name, combination.label(), "front", combination.windward(), zones(combination), force, moment / force,
-            torsion / force, shear, moment, torsion);
+        return new CaseAction(standing.state(), name, combination.label(), "front", combination.windward(), zones(combination), force,
+            combination.moment() / force, combination.torsion() / force, shear, moment, torsion);
     }
 
     /** The case, the code's symbols of a panel, and the index that tells one panel's symbols from another's. */
-    private record Names(String load, PanelSymbols panel, int index) {
+    private record Names(String load, PanelSymbols panel, int index, Standing standing) {
         String of(String symbol) {
             return index == 0 ? symbol : indexed(symbol, index);
         }
@@ -137,8 +155,13 @@ public final class FootActions {
         if (p.kind() == Panel.Kind.WALL) {
             perMetre(panel, names, trace);
         }
-        double moment = line(trace, "base-moment", names, "M", "moment at the ground line").in(names.of("F"), force, "N").in(names.of("z"), z, "m")
-            .gives(names.of("F") + " " + names.of("z"), force * z, "N m");
+        if (names.standing().foot() != Foot.GROUND) {
+            return new double[] {force, aboutWall(panel, force, names, trace), 0};
+        }
+        boolean withPosts = names.index() == 0 && names.standing().moment() != 0;
+        double onPanel = line(trace, withPosts ? "panel-moment" : "base-moment", names, withPosts ? "M_{panel}" : "M", "moment at the ground line")
+            .in(names.of("F"), force, "N").in(names.of("z"), z, "m").gives(names.of("F") + " " + names.of("z"), force * z, "N m");
+        double moment = withPosts ? momentWithPosts(names.load(), onPanel, names.standing(), trace) : onPanel;
         double e = panel.eccentricity();
         double x = p.middle();
         double shift = e == 0 ? 0 : eccentricity(panel, names, trace);
@@ -147,6 +170,38 @@ public final class FootActions {
             : about.in(names.of("e"), shift, "m").gives(names.of("F") + " (x_b " + (e < 0 ? "- " : "+ ") + names.of("e") + ")",
                 force * (x + Math.signum(e) * shift), "N m");
         return new double[] {force, moment, torsion};
+    }
+
+    /** Moment about the vertical line in the wall that brackets stand on; none where the item has no such line. */
+    private static double aboutWall(PanelForce panel, double force, Names names, Trace trace) {
+        if (names.standing().foot() == Foot.NONE) {
+            return 0;
+        }
+        double e = panel.eccentricity();
+        double shift = e == 0 ? 0 : eccentricity(panel, names, trace);
+        Trace.Line line = line(trace, "base-moment", names, "M_w", "moment about the vertical line in the wall").in(names.of("F"), force, "N")
+            .in("x_b", panel.panel().middle(), "m");
+        return e == 0 ? line.gives(names.of("F") + " x_b", force * panel.panel().middle(), "N m")
+            : line.in(names.of("e"), shift, "m").gives(names.of("F") + " (x_b " + (e < 0 ? "- " : "+ ") + names.of("e") + ")",
+                force * (panel.panel().middle() + Math.signum(e) * shift), "N m");
+    }
+
+    /** Ends a step with the share of the panels alone, or with that of the posts added to it. */
+    private static double withPosts(Trace.Line line, String symbol, double value, String postSymbol, double ofPosts, String unit) {
+        line.in(symbol, value, unit).from(STATICS, Status.DERIVED);
+        return ofPosts == 0 ? line.gives(symbol, value, unit) : line.in(postSymbol, ofPosts, unit).gives(symbol + " + " + postSymbol, value + ofPosts, unit);
+    }
+
+    private static double momentWithPosts(String name, double onPanels, Standing standing, Trace trace) {
+        return withPosts(trace.line("base-moment/" + name, "M", "moment at the ground line with the wind on the posts, case " + LoadCase.shortName(name)),
+            "M_{panel}", onPanels, "M_{post}", standing.moment(), "N m");
+    }
+
+    private static double totalMoment(String name, List<double[]> found, Standing standing, Trace trace) {
+        boolean posts = standing.moment() != 0;
+        double panels = total((posts ? "panel-moment/" : "base-moment/") + name, posts ? "M_{panel}" : "M", "moment at the ground line, case "
+            + LoadCase.shortName(name), found, 1, trace);
+        return posts ? momentWithPosts(name, panels, standing, trace) : panels;
     }
 
     /** Distance of the force from the middle of the panel, m, without sign: by the rule of the case, or the centre of its zones. */
@@ -194,7 +249,7 @@ public final class FootActions {
         StringBuilder formula = new StringBuilder();
         double sum = 0;
         for (int i = 0; i < found.size(); i++) {
-            String each = indexed(symbol, i + 1);
+            String each = indexed(symbol.equals("M_{panel}") ? "M" : symbol, i + 1);
             line.in(each, found.get(i)[which], unit);
             formula.append(i == 0 ? "" : " + ").append(each);
             sum += found.get(i)[which];

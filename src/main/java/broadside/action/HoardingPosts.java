@@ -2,8 +2,8 @@ package broadside.action;
 
 import broadside.aero.LineLoad;
 import broadside.aero.Strip;
-import broadside.codes.LoadCase;
 import broadside.codes.LoadCase.Windward;
+import broadside.codes.LoadCase;
 import broadside.codes.PanelSymbols;
 import broadside.codes.ZonePressure;
 import broadside.panel.Hoarding;

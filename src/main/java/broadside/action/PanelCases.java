@@ -1,7 +1,7 @@
 package broadside.action;
 
-import broadside.codes.LoadCase;
 import broadside.codes.LoadCase.Windward;
+import broadside.codes.LoadCase;
 import broadside.panel.Panel;
 import java.util.List;
 

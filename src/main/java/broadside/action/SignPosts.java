@@ -17,7 +17,7 @@ public final class SignPosts {
     private static final String STATICS = "statics: stiff board, equal posts";
 
     /** Works out and records each post: its greatest shear and its greatest moment, each in the case that gives it. */
-    public static List<PostAction> of(List<Double> positions, List<FootActions.Combined> combinations, Trace trace) {
+    public static List<PostAction> of(List<Double> positions, List<FootActions.Combined> combinations, List<PostDrag> drag, Trace trace) {
         double spread = positions.stream().mapToDouble(x -> x * x).sum();
         List<PostAction> posts = new ArrayList<>();
         if (positions.size() > 1) {
@@ -26,7 +26,7 @@ public final class SignPosts {
                 .reads("from the positions of the posts", spread, "m²");
         }
         for (int i = 0; i < positions.size(); i++) {
-            posts.add(post(i + 1, new Row(positions.get(i), positions.size(), spread), combinations, trace));
+            posts.add(post(i + 1, new Row(positions.get(i), positions.size(), spread, drag.isEmpty() ? new PostDrag(0, 0) : drag.get(i)), combinations, trace));
         }
         PostAction hardest = posts.stream().max(Comparator.comparingDouble(PostAction::shear)).orElseThrow();
         PostAction most = posts.stream().max(Comparator.comparingDouble(PostAction::moment)).orElseThrow();
@@ -40,14 +40,14 @@ public final class SignPosts {
     }
 
     /** One post in its row: its distance from the middle, how many there are, and the sum of the squares of their distances. */
-    private record Row(double x, int count, double spread) {
+    private record Row(double x, int count, double spread, PostDrag drag) {
 
         double shear(FootActions.Combined c) {
-            return Math.abs(c.force() / count + (spread == 0 ? 0 : c.combination().torsion() * x / spread));
+            return Math.abs(c.force() / count + (spread == 0 ? 0 : c.combination().torsion() * x / spread)) + drag.force();
         }
 
         double moment(FootActions.Combined c) {
-            return Math.abs(signedMoment(c));
+            return Math.abs(signedMoment(c)) + drag.moment();
         }
 
         double signedMoment(FootActions.Combined c) {
@@ -60,26 +60,34 @@ public final class SignPosts {
         FootActions.Combined forMoment = combinations.stream().max(Comparator.comparingDouble(row::moment)).orElseThrow();
         String part = Integer.toString(number);
         if (row.count() == 1) {
-            double v = trace.line("post-shear/1", "F_{p1}", "shear at the foot of the post").in("F", forShear.force(), "N").from(STATICS, Status.DERIVED)
-                .gives("F", forShear.force(), "N");
-            double m = trace.line("post-moment/1", "M_{p1}", "moment at the foot of the post").in("M", forMoment.moment(), "N m")
-                .from(STATICS, Status.DERIVED).gives("M", forMoment.moment(), "N m");
+            double v = ends(trace.line("post-shear/1", "F_{p1}", "shear at the foot of the post").in("F", forShear.force(), "N"), "F", forShear.force(),
+                "F_{d1}", row.drag().force(), "N");
+            String panel = row.drag().moment() == 0 ? "M" : "M_{panel}";
+            double m = ends(trace.line("post-moment/1", "M_{p1}", "moment at the foot of the post").in(panel, forMoment.moment(), "N m"), panel,
+                forMoment.moment(), "M_{d1}", row.drag().moment(), "N m");
             return new PostAction(1, row.x(), "", 0, Optional.empty(), forMoment.name(), v, forShear.name(), m);
         }
         String x = "x_{" + part + "}";
         trace.given(x, "post " + part + " from the middle of the posts, to the right", row.x(), "m", "");
         double t = couple("M_T", "torsion of case " + LoadCase.shortName(forShear.name()) + ", wind meeting the " + end(forShear), forShear.combination().torsion(),
             "post-couple/torsion/" + part, trace);
-        double v = trace.line("post-shear/" + part, "F_{p" + part + "}", "shear at the foot of post " + part + ", case " + LoadCase.shortName(forShear.name()))
-            .in("F", forShear.force(), "N").in("n", row.count()).in("M_T", t, "N m").in(x, row.x(), "m").in("S", row.spread(), "m²")
-            .from(STATICS, Status.DERIVED).gives("abs(F / n + M_T " + x + " / S)", Math.abs(forShear.force() / row.count() + t * row.x() / row.spread()), "N");
+        double v = ends(trace.line("post-shear/" + part, "F_{p" + part + "}", "shear at the foot of post " + part + ", case " + LoadCase.shortName(forShear.name()))
+            .in("F", forShear.force(), "N").in("n", row.count()).in("M_T", t, "N m").in(x, row.x(), "m").in("S", row.spread(), "m²"),
+            "abs(F / n + M_T " + x + " / S)", Math.abs(forShear.force() / row.count() + t * row.x() / row.spread()), "F_{d" + part + "}", row.drag().force(), "N");
         double j = couple("J", "sum of force, height and side distance, case " + LoadCase.shortName(forMoment.name()) + ", wind meeting the " + end(forMoment),
             forMoment.combination().couple(), "post-couple/moment/" + part, trace);
-        double m = trace.line("post-moment/" + part, "M_{p" + part + "}", "moment at the foot of post " + part + ", case " + LoadCase.shortName(forMoment.name()))
-            .in("M", forMoment.moment(), "N m").in("n", row.count()).in("J", j, "N m²").in(x, row.x(), "m").in("S", row.spread(), "m²")
-            .from(STATICS, Status.DERIVED).gives("abs(M / n + J " + x + " / S)",
-                Math.abs(forMoment.moment() / row.count() + j * row.x() / row.spread()), "N m");
+        String panel = row.drag().moment() == 0 ? "M" : "M_{panel}";
+        double m = ends(trace.line("post-moment/" + part, "M_{p" + part + "}", "moment at the foot of post " + part + ", case " + LoadCase.shortName(forMoment.name()))
+            .in(panel, forMoment.moment(), "N m").in("n", row.count()).in("J", j, "N m²").in(x, row.x(), "m").in("S", row.spread(), "m²"),
+            "abs(" + panel + " / n + J " + x + " / S)", Math.abs(forMoment.moment() / row.count() + j * row.x() / row.spread()),
+            "M_{d" + part + "}", row.drag().moment(), "N m");
         return new PostAction(number, row.x(), "", 0, Optional.empty(), forMoment.name(), v, forShear.name(), m);
+    }
+
+    /** Ends a step with what the panels give, and with the wind on the post itself where it is known. */
+    private static double ends(Trace.Line line, String formula, double value, String symbol, double own, String unit) {
+        line.from(STATICS, Status.DERIVED);
+        return own == 0 ? line.gives(formula, value, unit) : line.in(symbol, own, unit).gives(formula + " + " + symbol, value + own, unit);
     }
 
     private static String end(FootActions.Combined worst) {
@@ -96,14 +104,14 @@ public final class SignPosts {
                 symbol.equals("J") ? "N m²" : "N m");
     }
 
-    /** Sums of the posts' shears, N, and moments, N m, in one combination, each post worked out by itself. */
+    /** Sums of the posts' shears, N, and moments, N m, by the wind on the panels in one combination, each post worked out by itself. */
     public static double[] sums(FootActions.Combined combined, List<Double> positions) {
         double spread = positions.stream().mapToDouble(x -> x * x).sum();
         double shear = 0;
         double moment = 0;
         for (double x : positions) {
             shear += combined.force() / positions.size() + (spread == 0 ? 0 : combined.combination().torsion() * x / spread);
-            moment += new Row(x, positions.size(), spread).signedMoment(combined);
+            moment += new Row(x, positions.size(), spread, new PostDrag(0, 0)).signedMoment(combined);
         }
         return new double[] {shear, moment};
     }

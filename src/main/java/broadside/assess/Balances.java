@@ -7,7 +7,6 @@ import broadside.action.PostAction;
 import broadside.action.SignPosts;
 import broadside.codes.LoadCase;
 import broadside.panel.Hoarding;
-import broadside.panel.Item;
 import broadside.panel.PostSign;
 import java.util.Comparator;
 import java.util.List;
@@ -15,22 +14,15 @@ import java.util.List;
 /** The equilibrium lines: what acts on the item, and the sum of what its posts answer, in one and the same case. */
 final class Balances {
 
-    static List<Loads.Balance> of(Item item, List<PanelCases> panels, FootActions.Result actions, List<PostAction> posts) {
-        if (posts.isEmpty()) {
-            return List.of();
-        }
-        return item.choose(sign -> sign(sign, actions, posts), hoarding -> hoarding(hoarding, panels));
-    }
-
-    private static List<Loads.Balance> sign(PostSign sign, FootActions.Result actions, List<PostAction> posts) {
+    static List<Loads.Balance> sign(PostSign sign, List<FootActions.Combined> combinations, List<PostAction> posts) {
         String governing = posts.stream().max(Comparator.comparingDouble(PostAction::moment)).orElseThrow().named();
-        FootActions.Combined worst = actions.combinations().stream().filter(c -> c.name().equals(governing)).findFirst().orElseThrow();
+        FootActions.Combined worst = combinations.stream().filter(c -> c.name().equals(governing)).findFirst().orElseThrow();
         double[] sums = SignPosts.sums(worst, sign.posts().positions());
-        return List.of(new Loads.Balance("shear at the ground, case " + LoadCase.shortName(worst.name()), worst.force(), sums[0], "N"),
-            new Loads.Balance("moment at the ground, case " + LoadCase.shortName(worst.name()), worst.moment(), sums[1], "N m"));
+        return List.of(new Loads.Balance("shear at the ground by the wind on the boards, case " + LoadCase.shortName(worst.name()), worst.force(), sums[0], "N"),
+            new Loads.Balance("moment at the ground by the wind on the boards, case " + LoadCase.shortName(worst.name()), worst.moment(), sums[1], "N m"));
     }
 
-    private static List<Loads.Balance> hoarding(Hoarding hoarding, List<PanelCases> panels) {
+    static List<Loads.Balance> hoarding(Hoarding hoarding, List<PanelCases> panels) {
         double[] sums = HoardingPosts.balance(hoarding, hoarding.spacing().orElseThrow().metres(), panels);
         return List.of(new Loads.Balance("force on the boards and shears of all posts, case " + HoardingPosts.balanceCase(panels)
             + (hoarding.gates().isEmpty() ? "" : ", gates open"), sums[0], sums[1], "N"));

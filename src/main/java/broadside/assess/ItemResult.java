@@ -8,8 +8,8 @@ import java.util.Optional;
 /**
  * What came out for one item.
  *
- * @param refusal  why there are no loads, when there are none
- * @param loads    the loads, when the code covers the item
+ * @param refusal  why there are no loads, or why they are loads only
+ * @param loads    the loads, when the code covers the item; outside the scope they are loads only
  * @param sheet    the calculation sheet, as far as it went
  */
 public record ItemResult(Item item, Outcome outcome, Optional<Refusal> refusal, Optional<Loads> loads, List<Note> notes, Trace sheet) {
@@ -29,8 +29,19 @@ public record ItemResult(Item item, Outcome outcome, Optional<Refusal> refusal, 
         }
     }
 
-    /** Why the code gives no loads: which code and clause, the reason, and what can be done. */
-    public record Refusal(String code, String clause, String reason, String instead) { }
+    /** The sentence that stands wherever an item is outside the scope. */
+    public static final String OUTSIDE = "Outside the scope of this tool: an engineer is needed";
+
+    /**
+     * Why the code gives no loads: which code and clause, the reason, and what can be done. Outside the scope of the tool
+     * {@code code} is empty, {@code clause} names the case, and {@code instead} says what to send to the engineer.
+     */
+    public record Refusal(String code, String clause, String reason, String instead) {
+
+        public boolean ofScope() {
+            return code.isEmpty();
+        }
+    }
 
     public ItemResult {
         notes = List.copyOf(notes);

@@ -1,10 +1,7 @@
 package broadside.assess;
 
 import broadside.codes.WindCode;
-import broadside.panel.Board;
-import broadside.panel.Hoarding;
 import broadside.panel.Item;
-import broadside.panel.PostSign;
 import broadside.site.Site;
 import broadside.site.Topography;
 import broadside.trace.OwnValue;
@@ -31,7 +28,7 @@ final class Notes {
         notes.unused(job.site(), sheet);
         notes.returnPeriod(job.site(), sheet);
         notes.leastPressures(job.site(), sheet);
-        item.<Runnable>choose(sign -> () -> notes.sign(sign), hoarding -> () -> notes.hoarding(hoarding)).run();
+        notes.notes.addAll(item.choose(new ItemNotes(job, code, sheet)));
         notes.solidity(job, item, sheet);
         notes.carrying(item);
         notes.statuses(sheet);
@@ -56,7 +53,7 @@ final class Notes {
                 + "by more than 10 m (33 ft), the load can be much larger.");
         }
         site.ground().topography().ifPresent(ground -> topography(ground, code));
-        site.authorityMinimum().ifPresent(minimum -> add(Note.Kind.ASSUMPTION, code.level().name().equals("characteristic")
+        site.authorityMinimum().ifPresent(minimum -> add(Note.Kind.ASSUMPTION, code.level(site).name().equals("characteristic")
             ? "The authority's least pressure of " + minimum.pressure().typed() + " is taken as a characteristic pressure."
             : minimum.service() ? "The authority's least pressure of " + minimum.pressure().typed() + " is taken at allowable stress and brought to strength level."
             : "The authority's least pressure of " + minimum.pressure().typed() + " is taken at strength level, as the code's loads are. "
@@ -122,71 +119,6 @@ final class Notes {
         }
     }
 
-    private void sign(PostSign sign) {
-        for (int i = 0; i < sign.boards().size(); i++) {
-            Board board = sign.boards().get(i);
-            if (board.shape() != Board.Shape.RECTANGLE) {
-                add(Note.Kind.ASSUMPTION, "Board " + (board.mark().isEmpty() ? Integer.toString(i + 1) : board.mark()) + " is a "
-                    + board.shape().word() + ": the code has no rule for it, and the rectangle around it is used, which is safe.");
-            }
-        }
-        sizes(sign);
-        if (sign.boards().size() > 1) {
-            add(Note.Kind.ASSUMPTION, "Each board is assessed by itself and the forces are added; the wind between boards close to each other is not "
-                + "in any code, and the stack as one board is not compared.");
-        }
-        if (sign.boards().stream().anyMatch(b -> b.depth().metres() == 0)) {
-            add(Note.Kind.ASSUMPTION, "The thickness of a board was not given: wind along the face counts friction on its faces only.");
-        }
-        if (sign.faces() == 2) {
-            add(Note.Kind.ASSUMPTION, "Two parallel faces back to back are taken as one board. Faces that open in a V are outside the scope.");
-        }
-        if (sign.posts().count() > 1) {
-            add(Note.Kind.ASSUMPTION, "The posts share force alike and take torsion as a couple: stiff board, equal posts.");
-        }
-    }
-
-    /** Sizes that are possible but rarely meant: a slip of a digit or a unit. */
-    private void sizes(PostSign sign) {
-        double left = sign.boards().stream().mapToDouble(b -> b.offset().metres() - b.width().metres() / 2).min().orElseThrow();
-        double right = sign.boards().stream().mapToDouble(b -> b.offset().metres() + b.width().metres() / 2).max().orElseThrow();
-        double first = sign.posts().positions().get(0);
-        double last = -first;
-        if (last - first > 0 && (first < left - 0.1 || last > right + 0.1)) {
-            add(Note.Kind.CAUTION, "A post stands outside the boards. Check the distance between the posts and its unit.");
-        }
-        if (left > last + 0.1 || right < first - 0.1) {
-            add(Note.Kind.CAUTION, "All boards hang beside the posts. Check the offset and its unit.");
-        }
-        if (sign.boards().stream().anyMatch(b -> Math.max(b.width().metres(), b.height().metres()) > 15 || b.clearance().metres() > 20)) {
-            add(Note.Kind.CAUTION, "A board is unusually large or high for a sign on posts. Check its sizes and their units.");
-        }
-        for (int i = 0; i < sign.boards().size(); i++) {
-            for (int k = i + 1; k < sign.boards().size(); k++) {
-                if (overlap(sign.boards().get(i), sign.boards().get(k))) {
-                    add(Note.Kind.CAUTION, "Boards " + sign.part(i) + " and " + sign.part(k) + " overlap: the area they share is counted twice.");
-                }
-            }
-        }
-    }
-
-    private static boolean overlap(Board a, Board b) {
-        boolean across = Math.abs(a.offset().metres() - b.offset().metres()) < (a.width().metres() + b.width().metres()) / 2 - 0.001;
-        double top = Math.min(a.clearance().metres() + a.height().metres(), b.clearance().metres() + b.height().metres());
-        return across && top - Math.max(a.clearance().metres(), b.clearance().metres()) > 0.001;
-    }
-
-    private void hoarding(Hoarding hoarding) {
-        if (hoarding.spacing().isEmpty()) {
-            add(Note.Kind.ASSUMPTION, "The spacing of the posts was not given: there is no moment for each post.");
-        }
-        if (!hoarding.gates().isEmpty()) {
-            add(Note.Kind.ASSUMPTION, "Both states of the gates count for the posts: open, where each gate makes two free ends, and shut, where the leaf hangs on the posts "
-                + "beside it. The forces on the whole hoarding are given with the gates open.");
-        }
-        add(Note.Kind.ASSUMPTION, "The thickness of the hoarding is not known: wind along it counts friction on both faces only.");
-    }
-
     private void solidity(Job job, Item item, Trace sheet) {
         if (item.panels().stream().anyMatch(p -> p.solidity() < 1)) {
             if (sheet.steps().stream().anyMatch(s -> s.name().startsWith("coefficient/all"))) {
@@ -203,10 +135,6 @@ final class Notes {
                 item.carrying().stream().map(c -> c.name() + " " + c.typed()).toList()) + ".");
         } else {
             add(Note.Kind.NOT_CHECKED, "Posts, footing and ground: loads only.");
-        }
-        add(Note.Kind.NOT_CHECKED, "The wind on the posts themselves is not in these loads.");
-        if (item instanceof PostSign) {
-            add(Note.Kind.NOT_CHECKED, "Torsion of the footing: the value is given, the check is the engineer's.");
         }
     }
 

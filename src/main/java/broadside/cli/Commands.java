@@ -4,9 +4,9 @@ import broadside.table.TableFormat;
 import java.io.PrintWriter;
 import java.nio.file.Path;
 import java.util.Optional;
-import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
+import picocli.CommandLine;
 
 /** The commands of the tool. Errors go to standard error, one line each; no stack trace. */
 @Command(name = "broadside", mixinStandardHelpOptions = true, versionProvider = VersionText.class,

@@ -1,7 +1,6 @@
 package broadside.codes;
 
 import broadside.panel.Panel;
-import broadside.site.Averaging;
 import broadside.site.Site;
 import broadside.table.Coefficient;
 import broadside.table.Edition;
@@ -35,8 +34,8 @@ final class Asce716 implements WindCode {
         Coefficient service = edition.rows("load-combinations").number("allowable-full-dead", "w");
         Level level = new Level("strength", "service", "allowable stress (ASD)", service.value(), Numbers.plain(service.value()) + " W",
             service.source().citation(), service.source().status());
-        SiteTerms terms = new SiteTerms(Averaging.of(edition.property("averaging")).orElseThrow(), edition.rows("exposure").keys().stream()
-            .map(k -> new SiteTerms.Terrain(k, MEANINGS.getOrDefault(k, ""))).toList(), OPTIONS);
+        SiteTerms terms = new SiteTerms(SiteTerms.averagings(edition), edition.rows("exposure").keys().stream()
+            .map(k -> new SiteTerms.Terrain(k, MEANINGS.getOrDefault(k, ""))).toList(), edition.property("smoothest-terrain"), OPTIONS);
         this.facts = new CodeFacts(edition, terms, level, new PanelSymbols("B", "s", "g"), "q_h");
     }
 

@@ -223,7 +223,7 @@ final class Asce7Signs {
         String q = "q_h G " + symbol;
         double value = sheet.q() * sheet.gust() * c;
         String formula = least > 0 ? "max(" + q + "; p_{16})" : q;
-        return NetPressure.record(sheet.site(), sheet.code().level(), sheet.trace(), zone, pressureSymbol, (name, own) -> {
+        return NetPressure.record(sheet.site(), sheet.code().level(sheet.site()), sheet.trace(), zone, pressureSymbol, (name, own) -> {
             Trace.Line line = sheet.trace().line(name, own, least > 0 ? "net pressure, not below 16 psf" : "net pressure")
                 .in("q_h", sheet.q(), "Pa").in("G", sheet.gust()).in(symbol, c)
                 .from(place.publicationAndEdition() + ", 29.3, (29.3-1)" + (least > 0 ? " and 29.7" : ""), place.status());

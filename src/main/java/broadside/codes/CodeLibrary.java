@@ -37,6 +37,12 @@ public final class CodeLibrary {
         return codes.entrySet().stream().filter(e -> !e.getValue().edition().isOverlay()).map(Map.Entry::getKey).toList();
     }
 
+    /** The rule for wind on posts: that of the code, or, where it has none, that of plain fluid mechanics. */
+    public Optional<MemberRule> memberRule(WindCode code) {
+        return code.memberRule().or(() -> codes.values().stream().filter(c -> c.edition().property("procedure").equals("open-flow"))
+            .findFirst().flatMap(WindCode::memberRule));
+    }
+
     /** The overlays of an edition, by their keys. */
     public List<String> overlays(String key) {
         return codes.entrySet().stream()

@@ -1,7 +1,6 @@
 package broadside.codes;
 
 import broadside.panel.Panel;
-import broadside.site.Averaging;
 import broadside.site.Site;
 import broadside.table.Edition;
 import broadside.table.Rows;
@@ -40,8 +39,8 @@ final class En1991 implements WindCode {
         Level level = new Level("characteristic", "factored", "factored", gamma, "partial factor " + Numbers.plain(gamma) + " on wind",
             place.citation(), place.status());
         Rows terrain = edition.rows("terrain");
-        SiteTerms terms = new SiteTerms(Averaging.of(edition.property("averaging")).orElseThrow(),
-            terrain.keys().stream().map(k -> new SiteTerms.Terrain(k, MEANINGS.getOrDefault(k, ""))).toList(), OPTIONS);
+        SiteTerms terms = new SiteTerms(SiteTerms.averagings(edition),
+            terrain.keys().stream().map(k -> new SiteTerms.Terrain(k, MEANINGS.getOrDefault(k, ""))).toList(), edition.property("smoothest-terrain"), OPTIONS);
         this.facts = new CodeFacts(edition, terms, level, new PanelSymbols("b", "h", "z_g"), "q_p");
     }
 
@@ -92,7 +91,7 @@ final class En1991 implements WindCode {
             .in("b/h", panel.width() / h).from(place.citation(), place.status())
             .reads(clear(panel) ? "signboard, as z_g is not less than h/4" : "signboard, as z_g is less than h/4 but b/h is not above 1",
                 constants.number("signboard-cf"), "1");
-        double w = NetPressure.record(site, level(), trace, "all", "w", (name, symbol) ->
+        double w = NetPressure.record(site, level(site), trace, "all", "w", (name, symbol) ->
             trace.line(name, symbol, "net pressure on the board").in("q_p", qp, "Pa").in("c_f", cf)
                 .from(place.publicationAndEdition() + ", 5.3(2)", place.status()), "q_p c_f", qp * cf);
         double b = panel.width();

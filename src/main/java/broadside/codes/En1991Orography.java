@@ -1,8 +1,8 @@
 package broadside.codes;
 
 import broadside.quantity.Length;
-import broadside.site.Topography;
 import broadside.site.Topography.Feature;
+import broadside.site.Topography;
 import broadside.table.Edition;
 import broadside.table.Rows;
 import broadside.table.Source;

@@ -69,7 +69,7 @@ final class En1991Walls {
                 .reads("from " + Numbers.plain(round(strip.from())) + " m to " + Numbers.plain(round(strip.to()))
                     + " m from the windward end", strip.width(), "m");
             double c = coefficient(sheet, zone);
-            double w = NetPressure.record(sheet.site(), sheet.code().level(), sheet.trace(), zone + sheet.end(), "w_" + zone,
+            double w = NetPressure.record(sheet.site(), sheet.code().level(sheet.site()), sheet.trace(), zone + sheet.end(), "w_" + zone,
                 (name, symbol) -> sheet.trace().line(name, symbol, "net pressure in zone " + zone).in("q_p", sheet.qp(), "Pa")
                     .in("c_" + zone, c).from(place.publicationAndEdition() + ", 5.2, 7.4.1", place.status()),
                 "q_p c_" + zone, sheet.qp() * c);

@@ -1,11 +1,17 @@
 package broadside.codes;
 
+import broadside.panel.FacadePanel;
 import broadside.panel.Panel;
+import broadside.quantity.Period;
+import broadside.quantity.Speed;
 import broadside.site.Site;
+import broadside.site.SiteOptions;
+import broadside.table.Coefficient;
 import broadside.table.Edition;
 import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * One published procedure: from a site and a panel to net pressures. Everything after that is the same for every code.
@@ -31,6 +37,40 @@ public interface WindCode {
      */
     List<LoadCase> netPressures(Panel panel, Site site, Trace trace);
 
+    /**
+     * Net pressures on a panel flat on the wall of a building: the cases "pushed", towards the wall, and "pulled", away
+     * from it, with negative pressures. A panel that lies in two zones has both, from its edge nearer to the corner.
+     *
+     * @throws NotCovered where the code has no rule
+     */
+    default List<LoadCase> wallPressures(FacadePanel facade, Site site, Trace trace) {
+        throw new NotCovered(edition().property("title"), "walls of buildings", "there is no rule for panels flat on the wall of a building here.",
+            "Choose a code that covers them.");
+    }
+
+    /**
+     * The pressure on which the force coefficient of a slender member or of the edge of a panel is put, Pa: the velocity
+     * pressure at the height, with the factors that this code gives to every force.
+     */
+    default double memberPressure(Site site, double height, Trace trace) {
+        return velocityPressure(site, height, trace);
+    }
+
+    /** The rule of this code for the wind on posts, where it has one. */
+    default Optional<MemberRule> memberRule() {
+        return Optional.empty();
+    }
+
+    /** Friction coefficient of a face along the wind by this code, where it prints one; the surface is smooth, rough or very rough. */
+    default Optional<Coefficient> friction(String surface) {
+        return Optional.empty();
+    }
+
+    /** The basic speed that other values of the site stand for, such as a region with a return period; mostly none. */
+    default Optional<Speed> basicSpeed(SiteOptions options, Optional<Period> returnPeriod) {
+        return Optional.empty();
+    }
+
     /** Velocity pressure at a height, Pa: worked out once on a sheet and taken over where the same height comes again. */
     default double velocityPressure(Site site, double height, Trace trace) {
         String symbol = facts().pressure();
@@ -47,7 +87,8 @@ public interface WindCode {
         return facts().terms();
     }
 
-    default Level level() {
+    /** The level of the loads at this site; only some codes let it depend on the site. */
+    default Level level(Site site) {
         return facts().level();
     }
 

@@ -4,8 +4,10 @@ import broadside.assess.Problem;
 import broadside.panel.Board;
 import broadside.panel.Hoarding;
 import broadside.panel.Item;
+import broadside.panel.PostSection;
 import broadside.panel.PostSign;
 import broadside.panel.Posts;
+import broadside.quantity.Angle;
 import broadside.quantity.Length;
 import broadside.quantity.Mass;
 import broadside.quantity.Quantity;
@@ -14,6 +16,8 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 /** Reads one item and checks what a person may have typed wrongly: sizes, ends, gates. */
 final class ItemReader {
@@ -30,12 +34,24 @@ final class ItemReader {
 
     /** The item, or nothing when something needed is missing; what does not fit is noted. */
     Optional<Item> read(Values values) {
-        return values.text("kind").flatMap(kind -> kind.equals("hoarding") ? hoarding(values) : sign(values));
+        KindReader others = new KindReader(this, problems);
+        return values.text("kind").flatMap(kind -> switch (kind) {
+            case "hoarding" -> hoarding(values);
+            case "banner-fence" -> others.bannerFence(values);
+            case "facade-panel" -> others.facadePanel(values);
+            case "projecting-sign" -> others.projectingSign(values);
+            case "spanned-banner" -> others.spannedBanner(values);
+            default -> sign(values);
+        });
     }
 
     private Optional<Item> sign(Values values) {
         List<Board> boards = values.list("boards").stream().flatMap(b -> board(b).stream()).toList();
-        values.object("replaces").ifPresent(this::board);
+        Optional<Board> replaces = values.object("replaces").flatMap(this::board);
+        double opening = values.quantity("opening-angle", Angle.class).map(Angle::radians).orElse(0.0);
+        if (opening < 0 || opening > Math.PI) {
+            problem(values, "opening-angle", "must lie between 0 and 180 degrees");
+        }
         int faces = values.whole("faces").orElse(1);
         if (faces != 1 && faces != 2) {
             problem(values, "faces", "must be 1 or 2");
@@ -43,11 +59,12 @@ final class ItemReader {
         if (values.list("boards").size() > 20) {
             problem(values, "boards", "has " + values.list("boards").size() + " entries; a sign has at most 20 boards");
         }
-        Optional<Posts> posts = values.object("posts").map(this::posts).orElse(Optional.of(new Posts(1, Optional.empty())));
+        Optional<Posts> posts = values.object("posts").map(this::posts).orElse(Optional.of(new Posts(1, Optional.empty(), Optional.empty())));
         if (boards.isEmpty() || boards.size() != values.list("boards").size() || posts.isEmpty() || values.text("mark").isEmpty()) {
             return Optional.empty();
         }
-        return Optional.of(new PostSign(values.text("mark").get(), boards, faces, posts.get(), carrying(values)));
+        return Optional.of(new PostSign(values.text("mark").get(), boards, new PostSign.Faces(faces, opening), posts.get(), replaces,
+            carrying(values)));
     }
 
     private Optional<Board> board(Values values) {
@@ -80,7 +97,23 @@ final class ItemReader {
         if (count > 1 && spacing.isEmpty()) {
             problem(values, "spacing", "is missing: two or more posts need the distance between them, like \"2 m\" or \"6 ft\"");
         }
-        return count < 1 ? Optional.empty() : Optional.of(new Posts(count, spacing));
+        return count < 1 ? Optional.empty() : Optional.of(new Posts(count, spacing, section(values)));
+    }
+
+    /** Outer sizes of a post: from its designation, or as typed. */
+    private Optional<PostSection> section(Values values) {
+        Optional<PostSection> named = values.text("section").flatMap(PostSection::of);
+        Optional<Length> width = size(values, "width");
+        Optional<Length> depth = size(values, "depth");
+        if (values.text("shape").isPresent() && width.isEmpty()) {
+            problem(values, "width", "is missing: the outline of a post needs its width, like \"114 mm\" or \"4 in\"");
+        }
+        if (named.isPresent() && width.isPresent()) {
+            problem(values, "width", "stands beside a section that tells it; give one of the two");
+        }
+        boolean round = values.text("shape").filter("round"::equals).isPresent();
+        return named.or(() -> width.map(w -> new PostSection(round ? PostSection.Shape.ROUND : PostSection.Shape.RECTANGULAR, w.metres(),
+            round ? w.metres() : depth.orElse(w).metres())));
     }
 
     private Optional<Item> hoarding(Values values) {
@@ -138,43 +171,58 @@ final class ItemReader {
         return gates;
     }
 
-    private Optional<Length> size(Values values, String name) {
+    Optional<Length> size(Values values, String name) {
         Optional<Length> found = values.quantity(name, Length.class);
         found.filter(l -> !(l.metres() >= 0.005 && l.metres() <= LONGEST)).ifPresent(l ->
             problem(values, name, "must lie between 5 mm and 2000 m; \"" + l.typed() + "\" does not"));
         return found;
     }
 
-    private Optional<Length> notBelow(Values values, String name, String why) {
+    Optional<Length> notBelow(Values values, String name, String why) {
         Optional<Length> found = values.quantity(name, Length.class);
         found.filter(l -> l.metres() < 0).ifPresent(l -> problem(values, name, "\"" + l.typed() + "\" is below zero: " + why));
         found.filter(l -> l.metres() > LONGEST).ifPresent(l -> problem(values, name, "must not be above 2000 m"));
         return found;
     }
 
-    private double solidity(Values values) {
-        double solidity = values.number("solidity").orElse(1.0);
+    double solidity(Values values) {
+        return solidity(values, "solidity");
+    }
+
+    double solidity(Values values, String name) {
+        double solidity = values.number(name).orElse(1.0);
         if (!(solidity > 0 && solidity <= 1)) {
-            problem(values, "solidity", "must be above 0 and not above 1, 1 for a closed panel");
+            problem(values, name, "must be above 0 and not above 1, 1 for a closed panel");
         }
         return solidity;
     }
 
     /** What carries the item, kept as typed. */
-    private static List<Item.Carrying> carrying(Values values) {
+    static List<Item.Carrying> carrying(Values values) {
         List<Item.Carrying> found = new ArrayList<>();
-        for (String part : List.of("posts", "footing", "ballast")) {
+        for (String part : List.of("posts", "footing", "ballast", "brace", "fixings")) {
             values.object(part).ifPresent(v -> {
                 for (String name : List.of("section", "grade", "kind", "shape", "ground")) {
                     v.text(name).ifPresent(text -> found.add(new Item.Carrying(part + " " + name, text)));
                 }
-                for (String name : List.of("width", "length", "depth", "lever", "mass")) {
+                for (String name : List.of("columns", "rows")) {
+                    v.whole(name).ifPresent(n -> found.add(new Item.Carrying(part + " " + name, n.toString())));
+                }
+                for (String name : List.of("width", "length", "depth", "lever", "mass", "horizontal-pitch", "vertical-pitch", "allowable-tension", "allowable-shear")) {
                     v.quantity(name, Quantity.class).ifPresent(q -> found.add(new Item.Carrying(part + " " + name, q.typed())));
                 }
             });
         }
-        values.object("replaces").flatMap(v -> v.quantity("width", Length.class)).ifPresent(w -> found.add(new Item.Carrying("replaces a board of width",
-            w.typed())));
+        for (Values block : values.list("blocks")) {
+            found.add(new Item.Carrying("block", Stream.of("mass", "lever").flatMap(n -> block.quantity(n, Quantity.class).stream()).map(Quantity::typed)
+                .collect(Collectors.joining(" at "))));
+        }
+        for (String name : List.of("panel-mass", "foot-mass", "foot-length", "mass-per-area")) {
+            values.quantity(name, Quantity.class).ifPresent(q -> found.add(new Item.Carrying(name.replace('-', ' '), q.typed())));
+        }
+        for (String name : List.of("ground", "stakes")) {
+            values.text(name).ifPresent(t -> found.add(new Item.Carrying(name, t)));
+        }
         return found;
     }
 

@@ -1,7 +1,7 @@
 package broadside.job;
 
-import broadside.action.CaseAction;
 import broadside.action.CaseAction.PanelZones;
+import broadside.action.CaseAction;
 import broadside.action.PostAction;
 import broadside.assess.Assessment;
 import broadside.assess.ItemResult;
@@ -36,7 +36,9 @@ public final class ResultText {
         node.put("mark", result.item().mark());
         node.put("kind", result.item().kind());
         node.put("outcome", result.outcome().word());
-        result.refusal().ifPresent(r -> node.putObject("reason").put("code", r.code()).put("clause", r.clause()).put("reason", r.reason())
+        result.refusal().filter(ItemResult.Refusal::ofScope).ifPresent(r -> node.putObject("scope").put("sentence", ItemResult.OUTSIDE).put("case", r.clause())
+            .put("reason", r.reason()).put("send", r.instead()).put("shown", result.loads().isPresent() ? "loads only" : "nothing"));
+        result.refusal().filter(r -> !r.ofScope()).ifPresent(r -> node.putObject("reason").put("code", r.code()).put("clause", r.clause()).put("reason", r.reason())
             .put("instead", r.instead()));
         result.loads().ifPresent(l -> loads(node, l));
         node.putArray("supports");
@@ -63,8 +65,13 @@ public final class ResultText {
         node.putObject("companion").put("level", level.companion()).put("factor", level.factor()).put("rule", level.rule());
         ArrayNode posts = node.putArray("posts");
         loads.posts().forEach(p -> post(posts.addObject(), p, level));
-        node.putObject("edge-on").put("label", "wind along the face: own rule, of no code").put("force_N", loads.edgeOn().force())
-            .put("base_moment_Nm", loads.edgeOn().moment());
+        loads.edgeOn().ifPresent(e -> node.putObject("edge-on").put("label", "wind along the face: own rule, of no code").put("force_N", e.force())
+            .put("base_moment_Nm", e.moment()));
+        loads.supports().drag().ifPresent(d -> node.putObject("posts-drag").put("label", "wind on the posts themselves, inside the base actions")
+            .put("force_N", d.force()).put("base_moment_Nm", d.moment()));
+        ArrayNode reactions = node.putArray("reactions");
+        loads.reactions().forEach(r -> reactions.addObject().put("step", r.step()).put("label", r.label()).put("value", r.value()).put("unit", r.unit())
+            .put("case", r.named()).put("companion", r.atLevel(level.factor()).value()));
         if (loads.selfWeight() > 0) {
             node.put("self_weight_N", loads.selfWeight());
         }
@@ -74,6 +81,9 @@ public final class ResultText {
     }
 
     private static void caseOf(ObjectNode node, CaseAction action, CaseAction companion, Level level) {
+        if (!action.state().isEmpty()) {
+            node.put("state", action.state());
+        }
         node.put("case", action.name()).put("label", action.label()).put("direction", action.direction())
             .put("windward-end", action.windward().name().toLowerCase(java.util.Locale.ROOT)).put("level", level.name());
         ArrayNode zones = node.putArray("zones");

@@ -1,7 +1,6 @@
 package broadside.job;
 
 import java.util.List;
-import java.util.Map;
 import java.util.TreeMap;
 import tools.jackson.databind.JsonNode;
 import tools.jackson.databind.node.ArrayNode;

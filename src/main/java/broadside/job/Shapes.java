@@ -30,22 +30,36 @@ public final class Shapes {
 
     static final Shape SITE = new Shape("site", List.of(
         Field.text("name", "name of the place"),
-        Field.quantity("basic-speed", SPEED, "basic wind speed as the code defines it").needed(),
-        Field.choice("averaging", "averaging time of the basic speed", Averaging.allWords()).needed(),
+        Field.quantity("basic-speed", SPEED, "basic wind speed as the code defines it; other values of the site may take its place"),
+        Field.choice("averaging", "averaging time of the basic speed", Averaging.allWords()),
         Field.quantity("return-period", PERIOD, "return period asked for"),
-        Field.text("terrain", "terrain or exposure class in the words of the code").needed(),
+        Field.text("terrain", "terrain or exposure class in the words of the code, or \"unknown\" for the one with the largest load").needed(),
+        Field.choice("ground-nearby", "whether the ground within 1 km is higher or lower by more than 10 m; \"unknown\" takes the worst value of the code",
+            List.of("flat", "hill", "unknown")),
         Field.text("terrain-reason", "why this class was chosen"),
         Field.quantity("altitude", LENGTH, "altitude above the sea"),
         Field.object("topography", TOPOGRAPHY, "hill, ridge or escarpment near by"),
         Field.quantity("authority-minimum-pressure", PRESSURE, "least pressure that the local authority asks for"),
         Field.choice("authority-minimum-level", "level at which the authority means its least pressure", List.of("code", "service")),
+        Field.quantity("stands-for", PERIOD, "how long it stands"),
+        Field.choice("duration-rule", "whether the code's rule for a short stay counts; it does only when it is asked for", List.of("none", "code")),
         Field.number("direction-factor", "direction factor c_dir (EN)"),
         Field.number("season-factor", "season factor c_season (EN)"),
         Field.quantity("air-density", DENSITY, "air density (EN)"),
         Field.choice("risk-category", "risk category (ASCE 7)", List.of("I", "II", "III", "IV")),
         Field.number("topographic-factor", "topographic factor K_zt, in place of topography (ASCE 7)"),
         Field.quantity("ground-elevation", LENGTH, "elevation of the ground above the sea, for K_e (ASCE 7)"),
-        Field.numberOrChoice("gust-factor", "gust-effect factor G, or \"computed\" for the formula (ASCE 7)", List.of("computed"))));
+        Field.numberOrChoice("gust-factor", "gust-effect factor G, or \"computed\" for the formula (ASCE 7)", List.of("computed")),
+        Field.text("season", "season in which it stands, in the words of a national overlay (EN)"),
+        Field.text("wind-zone", "wind zone of a national overlay (EN)"),
+        Field.choice("structure-class", "class of structure for k1 (IS 875)", List.of("general", "temporary", "low hazard", "important")),
+        Field.number("k4", "cyclone factor k4 (IS 875)"),
+        Field.number("directionality", "directionality factor K_d (IS 875)"),
+        Field.text("region", "wind region (AS/NZS 1170.2)"),
+        Field.quantity("regional-speed", SPEED, "regional wind speed, in place of region and return-period (AS/NZS 1170.2)"),
+        Field.number("direction-multiplier", "direction multiplier M_d (AS/NZS 1170.2)"),
+        Field.number("shielding-multiplier", "shielding multiplier M_s (AS/NZS 1170.2)"),
+        Field.number("climate-multiplier", "climate change multiplier M_c (AS/NZS 1170.2)")));
 
     static final Shape BOARD = new Shape("board", List.of(
         Field.text("mark", "mark of the board"),
@@ -58,22 +72,9 @@ public final class Shapes {
         Field.number("solidity", "solid area over gross area, 1 for a closed board"),
         Field.quantity("mass", MASS, "mass of the board")));
 
-    static final Shape POSTS = new Shape("posts", List.of(
-        Field.whole("count", "number of posts").needed(),
-        Field.quantity("spacing", LENGTH, "distance between posts"),
-        Field.text("section", "section of a post"),
-        Field.text("grade", "material grade")));
-
-    static final Shape FOOTING = new Shape("footing", List.of(
-        Field.text("kind", "planted, pier or pad"),
-        Field.text("shape", "round or square"),
-        Field.quantity("width", LENGTH, "width or diameter"),
-        Field.quantity("length", LENGTH, "length in plan"),
-        Field.quantity("depth", LENGTH, "depth below the ground"),
-        Field.text("ground", "class of the ground")));
-
     private static final List<Field> REMARKS = List.of(
-        Field.text("fixed-to", "what it is fixed to"),
+        Field.choice("held-by", "what it is fixed to", HeldBy.WORDS),
+        Field.text("fixed-to", "more about what it is fixed to"),
         Field.text("solidity-by", "who gave the solidity"),
         Field.text("lighting", "lighting and openings"),
         Field.text("design-life", "design life"),
@@ -81,36 +82,8 @@ public final class Shapes {
 
     static final List<String> REMARK_NAMES = REMARKS.stream().map(Field::name).toList();
 
-    static final Shape POST_SIGN = item("post-sign", List.of(
-        Field.list("boards", BOARD, "boards from the top").needed(),
-        Field.whole("faces", "faces that are read: 1 or 2"),
-        Field.object("posts", POSTS, "posts"),
-        Field.object("footing", FOOTING, "footing"),
-        Field.object("replaces", BOARD, "the old board on the same post")));
-
-    static final Shape HOARDING = item("hoarding", List.of(
-        Field.quantity("length", LENGTH, "over all, from end to end").needed(),
-        Field.quantity("height", LENGTH, "of the boards themselves").needed(),
-        Field.quantity("clearance", LENGTH, "gap below the boards"),
-        Field.number("solidity", "solid area over gross area, 1 for closed boards"),
-        Field.object("returns", new Shape("returns", List.of(
-            Field.quantity("left", LENGTH, "length of the return corner at the left end"),
-            Field.quantity("right", LENGTH, "length of the return corner at the right end"))), "return corners at the ends"),
-        Field.list("gates", new Shape("gate", List.of(
-            Field.quantity("from", LENGTH, "from the left end to the gate").needed(),
-            Field.quantity("width", LENGTH, "width of the gate").needed())), "gates"),
-        Field.object("posts", new Shape("hoarding-posts", List.of(
-            Field.quantity("spacing", LENGTH, "distance between posts").needed(),
-            Field.text("section", "section of a post"),
-            Field.text("grade", "material grade"))), "posts"),
-        Field.object("footing", FOOTING, "footing"),
-        Field.object("ballast", new Shape("ballast", List.of(
-            Field.quantity("mass", MASS, "mass at each brace"),
-            Field.quantity("lever", LENGTH, "from the face to the middle of the ballast"),
-            Field.text("ground", "surface that it stands on"))), "ballast on raking braces")));
-
     /** The kinds of item and their fields. */
-    public static final Map<String, Shape> KINDS = Map.of("post-sign", POST_SIGN, "hoarding", HOARDING);
+    public static final Map<String, Shape> KINDS = KindShapes.all();
 
     static final Shape OVERRIDE = new Shape("override", List.of(
         Field.text("name", "name of the step whose value is replaced").needed(),
@@ -136,7 +109,7 @@ public final class Shapes {
     /** The whole job file; the shape of an item follows from its kind. */
     public static final Shape JOB = job();
 
-    private static Shape item(String kind, List<Field> own) {
+    static Shape item(String kind, List<Field> own) {
         List<Field> fields = new java.util.ArrayList<>();
         fields.add(Field.text("mark", "mark of the item, unique in the job").needed());
         fields.add(Field.choice("kind", "kind of item", List.of(kind)).needed());

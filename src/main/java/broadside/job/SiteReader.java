@@ -20,16 +20,24 @@ import broadside.site.SpeedConversion;
 import broadside.site.Topography;
 import broadside.table.OutsideTable;
 import broadside.trace.Trace;
+import java.util.EnumSet;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 
 /** Reads the site and holds it against what the chosen code wants to know. */
 final class SiteReader {
 
-    private static final List<String> NUMBERS = List.of("direction-factor", "season-factor", "topographic-factor", "gust-factor");
+    private static final List<String> NUMBERS = List.of("direction-factor", "season-factor", "topographic-factor", "gust-factor", "k4", "directionality",
+        "direction-multiplier", "shielding-multiplier", "climate-multiplier");
+    private static final List<String> QUANTITIES = List.of("air-density", "ground-elevation", "regional-speed", "stands-for");
+    private static final List<String> WORDS = List.of("risk-category", "gust-factor", "season", "wind-zone", "structure-class", "region");
+
+    /** The word for an answer that is not known. */
+    private static final String UNKNOWN = "unknown";
 
     private final CodeLibrary codes;
     private final SpeedConversion conversion;
@@ -56,15 +64,65 @@ final class SiteReader {
             .ifPresent(p -> within(values, "authority-minimum-pressure", p.pascals(), 0, 20_000, "0 and 20 kN/m2"));
         NUMBERS.forEach(n -> values.number(n).ifPresent(v -> within(values, n, v, 0.3, 5, "0.3 and 5")));
         Optional<Averaging> averaging = values.text("averaging").flatMap(Averaging::of);
+        Optional<WindCode> code = basis.flatMap(b -> codes.code(b.key()));
+        Set<Site.Unknown> unknown = EnumSet.noneOf(Site.Unknown.class);
         Optional<String> terrain = values.text("terrain");
-        basis.flatMap(b -> codes.code(b.key())).ifPresent(code -> holdAgainst(code, values, speed, averaging, terrain));
+        if (terrain.filter(UNKNOWN::equals).isPresent()) {
+            unknown.add(Site.Unknown.TERRAIN);
+            terrain = code.map(c -> c.terms().smoothest());
+        }
+        Optional<Speed> other = code.flatMap(c -> otherSpeed(c, values));
+        Optional<Speed> used = other.or(() -> speed);
+        if (code.isPresent()) {
+            holdAgainst(code.get(), values, speed, averaging, terrain);
+            speedIsGiven(code.get(), values, speed, other, averaging);
+        }
         Optional<Topography> topography = values.object("topography").flatMap(this::topography);
-        if (speed.isEmpty() || averaging.isEmpty() || terrain.isEmpty()) {
+        nearby(values, unknown);
+        if (used.isEmpty() || terrain.isEmpty() || code.isEmpty()) {
             return Optional.empty();
         }
-        Site.Ground ground = new Site.Ground(terrain.get(), values.quantity("altitude", Length.class), topography);
-        return Optional.of(new Site(values.text("name").orElse(""), speed.get(), averaging.get(), values.quantity("return-period", Period.class),
-            ground, authority(values), options(values)));
+        Site.Ground ground = new Site.Ground(terrain.get(), values.quantity("altitude", Length.class), topography, unknown);
+        return Optional.of(new Site(values.text("name").orElse(""), used.get(), averaging.orElse(code.get().terms().averaging()),
+            values.quantity("return-period", Period.class), ground, authority(values), options(values)));
+    }
+
+    /** The basic speed that other values stand for; what does not fit in them is noted. */
+    private Optional<Speed> otherSpeed(WindCode code, Values values) {
+        try {
+            return code.basicSpeed(options(values), values.quantity("return-period", Period.class));
+        } catch (IllegalArgumentException e) {
+            problems.add(new Problem(values.path(), e.getMessage()));
+            return Optional.empty();
+        }
+    }
+
+    private void speedIsGiven(WindCode code, Values values, Optional<Speed> speed, Optional<Speed> other, Optional<Averaging> averaging) {
+        boolean typed = values.quantity("basic-speed", Speed.class).isPresent();
+        if (speed.isEmpty() && other.isEmpty()) {
+            problems.add(new Problem(values.at("basic-speed"), "is missing: basic wind speed as the code defines it, like \"25 m/s\""));
+        } else if (typed && averaging.isEmpty()) {
+            problems.add(new Problem(values.at("averaging"), "is missing: averaging time of the basic speed, one of " + String.join(", ", Averaging.allWords())));
+        }
+        if (speed.isPresent() && other.isPresent()) {
+            problems.add(new Problem(values.at("basic-speed"), "stands beside values that give the speed in " + code.edition().property("title")
+                + "; give one of the two"));
+        }
+    }
+
+    /** What is said of the ground near by must fit the slope that is given. */
+    private void nearby(Values values, Set<Site.Unknown> unknown) {
+        Optional<String> nearby = values.text("ground-nearby");
+        boolean slope = values.object("topography").isPresent();
+        if (nearby.filter(UNKNOWN::equals).isPresent()) {
+            unknown.add(Site.Unknown.SHAPE);
+        }
+        if (slope && nearby.filter(n -> !n.equals("hill")).isPresent()) {
+            problems.add(new Problem(values.at("ground-nearby"), "is \"" + nearby.get() + "\", but topography gives a slope; give one of the two"));
+        }
+        if (!slope && nearby.filter("hill"::equals).isPresent() && values.number("topographic-factor").isEmpty()) {
+            problems.add(new Problem(values.at("topography"), "is missing: the ground near by was said to be higher or lower; give its sizes, or answer \"unknown\""));
+        }
     }
 
     private static Optional<Site.AuthorityMinimum> authority(Values values) {
@@ -77,11 +135,11 @@ final class SiteReader {
         String name = code.edition().property("title");
         terrain.filter(t -> !terms.hasTerrain(t)).ifPresent(t -> problems.add(new Problem(values.at("terrain"), "\"" + StructureReader.clean(t)
             + "\" is not a terrain class of " + name + "; it has " + terms.terrainNames())));
-        averaging.filter(a -> a != terms.averaging()).ifPresent(a -> problems.add(new Problem(values.at("averaging"), name
+        averaging.filter(a -> !terms.averagings().contains(a)).ifPresent(a -> problems.add(new Problem(values.at("averaging"), name
             + " defines its basic speed as a " + terms.averaging().words() + ", and this one is a " + a.words() + ". "
             + speed.map(s -> offer(s, a, terms.averaging())).orElse(""))));
         for (String option : options(values).names()) {
-            if (!terms.options().contains(option)) {
+            if (!option.equals("stands-for") && !terms.options().contains(option)) {
                 problems.add(new Problem(values.at(option), "is not a value of " + name + "; beside the wind and the ground it takes "
                     + String.join(", ", terms.options().stream().sorted().toList())));
             }
@@ -140,9 +198,10 @@ final class SiteReader {
         Map<String, Double> numbers = new HashMap<>();
         NUMBERS.forEach(n -> values.number(n).ifPresent(v -> numbers.put(n, v)));
         Map<String, Quantity> quantities = new HashMap<>();
-        List.of("air-density", "ground-elevation").forEach(n -> values.quantity(n, Quantity.class).ifPresent(v -> quantities.put(n, v)));
+        QUANTITIES.forEach(n -> values.quantity(n, Quantity.class).ifPresent(v -> quantities.put(n, v)));
         Map<String, String> words = new HashMap<>();
-        List.of("risk-category", "gust-factor").forEach(n -> values.text(n).ifPresent(v -> words.put(n, v)));
+        WORDS.forEach(n -> values.text(n).ifPresent(v -> words.put(n, v)));
+        values.text("duration-rule").filter("code"::equals).ifPresent(v -> words.put("duration-rule", v));
         return new SiteOptions(numbers, quantities, words);
     }
 }

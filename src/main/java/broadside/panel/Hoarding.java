@@ -5,7 +5,6 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.Function;
 
 /**
  * A long wall of boards on posts, with or without return corners and gates.
@@ -35,8 +34,8 @@ public record Hoarding(String mark, Length length, Length height, Length clearan
     }
 
     @Override
-    public <R> R choose(Function<PostSign, R> postSign, Function<Hoarding, R> hoarding) {
-        return hoarding.apply(this);
+    public <R> R choose(Kinds<R> kinds) {
+        return kinds.hoarding(this);
     }
 
     @Override

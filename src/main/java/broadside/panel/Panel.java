@@ -5,7 +5,7 @@ package broadside.panel;
  * Lengths in metres.
  *
  * @param part        its name inside the item; empty when the item has one panel only
- * @param kind        board held by posts, or wall that stands as a fence
+ * @param kind        board held clear of the ground, wall that stands as a fence, or panel flat on a building
  * @param width       across the wind
  * @param height      of the panel itself
  * @param clearance   gap between the ground and its lower edge
@@ -22,7 +22,7 @@ public record Panel(String part, Kind kind, double width, double height, double 
     public record AsTyped(String width, String height, String clearance, String middle) { }
 
     /** What the panel is in the words of the codes. */
-    public enum Kind { BOARD, WALL }
+    public enum Kind { BOARD, WALL, FACADE }
 
     /** Height of the upper edge above the ground, m. */
     public double top() {

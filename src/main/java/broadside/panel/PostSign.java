@@ -2,14 +2,24 @@ package broadside.panel;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.function.Function;
+import java.util.Optional;
 
 /**
  * One or more boards on one or more posts.
  *
- * @param faces  1, or 2 for a sign that is read from both sides; parallel faces of one box are one board with depth
+ * @param faces     parallel faces of one box are one board with depth
+ * @param replaces  the old board on the same posts, where there was one
  */
-public record PostSign(String mark, List<Board> boards, int faces, Posts posts, List<Carrying> carrying) implements Item {
+public record PostSign(String mark, List<Board> boards, Faces faces, Posts posts, Optional<Board> replaces, List<Carrying> carrying) implements Item {
+
+    /** Name of the old board in steps and tables. */
+    public static final String REPLACED = "replaced-board";
+
+    /** Name of the stack of boards as one board in steps and tables. */
+    public static final String ENVELOPE = "envelope";
+
+    /** How many faces are read, and the angle between two that open in a V, rad; zero for parallel faces. */
+    public record Faces(int count, double opening) { }
 
     public PostSign {
         boards = List.copyOf(boards);
@@ -20,8 +30,8 @@ public record PostSign(String mark, List<Board> boards, int faces, Posts posts, 
     }
 
     @Override
-    public <R> R choose(Function<PostSign, R> postSign, Function<Hoarding, R> hoarding) {
-        return postSign.apply(this);
+    public <R> R choose(Kinds<R> kinds) {
+        return kinds.postSign(this);
     }
 
     @Override
@@ -37,6 +47,11 @@ public record PostSign(String mark, List<Board> boards, int faces, Posts posts, 
             panels.add(boards.get(i).panel(part(i)));
         }
         return panels;
+    }
+
+    /** The old board on the same posts. */
+    public Optional<Panel> replacedPanel() {
+        return replaces.map(b -> b.panel(REPLACED));
     }
 
     /** Name of a board in steps and tables: its mark where no other board has it, else its number; empty when it is the only one. */

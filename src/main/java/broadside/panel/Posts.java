@@ -5,8 +5,12 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
-/** The posts of a sign, evenly spaced about its middle. One post needs no spacing. */
-public record Posts(int count, Optional<Length> spacing) {
+/**
+ * The posts of a sign, evenly spaced about its middle. One post needs no spacing.
+ *
+ * @param section  outer sizes of a post, where they are known
+ */
+public record Posts(int count, Optional<Length> spacing, Optional<PostSection> section) {
 
     /** Distance of each post from the middle of the posts, m, from the left. */
     public List<Double> positions() {

@@ -13,7 +13,8 @@ public enum Dimension {
     ANGLE("angle", "rad", "15 deg", "15 deg", 0.0001, 2 * Math.PI),
     AREA("area", "m2", "2.9 m2", "31 ft2", 1e-6, 1e6),
     DENSITY("density", "kg/m3", "1.25 kg/m3", "0.078 lb/ft3", 0.5, 25000),
-    PERIOD("period", "years", "50 years", "50 years", 1.0 / 12, 1e5);
+    MASS_PER_AREA("mass per area", "kg/m2", "0.25 kg/m2", "0.05 lb/ft2", 0.01, 1000),
+    PERIOD("period", "years", "50 years", "50 years", 1.0 / 366, 1e5);
 
     private final String word;
     private final String siUnit;

@@ -47,6 +47,7 @@ final class DisplayUnits {
             case MASS -> "lb";
             case AREA -> "ft2";
             case DENSITY -> "lb/ft3";
+            case MASS_PER_AREA -> "lb/ft2";
             case ANGLE, PERIOD -> smallMetric(dimension);
         };
     }

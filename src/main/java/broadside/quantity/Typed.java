@@ -57,6 +57,7 @@ public final class Typed {
             case ANGLE -> new Angle(si, typed);
             case AREA -> new Area(si, typed);
             case DENSITY -> new Density(si, typed);
+            case MASS_PER_AREA -> new MassPerArea(si, typed);
             case PERIOD -> new Period(si, typed);
         };
     }

@@ -6,6 +6,7 @@ import static broadside.quantity.Dimension.DENSITY;
 import static broadside.quantity.Dimension.FORCE;
 import static broadside.quantity.Dimension.LENGTH;
 import static broadside.quantity.Dimension.MASS;
+import static broadside.quantity.Dimension.MASS_PER_AREA;
 import static broadside.quantity.Dimension.MOMENT;
 import static broadside.quantity.Dimension.PERIOD;
 import static broadside.quantity.Dimension.PRESSURE;
@@ -81,7 +82,12 @@ final class UnitTable {
             row(DENSITY, METRIC, "kg/m3", "1", "1", "kg/cu m"),
             row(DENSITY, US, "lb/ft3", "0.45359237", "0.028316846592", "pcf,lbs/ft3,lb/cu ft,pounds per cubic foot"),
             row(PERIOD, METRIC, "years", "1", "1", "year,yr,yrs,y"),
-            row(PERIOD, METRIC, "months", "1", "12", "month,mo"));
+            row(MASS_PER_AREA, METRIC, "kg/m2", "1", "1", "kg/sq m"),
+            row(MASS_PER_AREA, METRIC, "g/m2", "0.001", "1", "g/sq m,gsm"),
+            row(MASS_PER_AREA, US, "lb/ft2", "0.45359237", "0.09290304", "lbs/ft2,lb/sq ft"),
+            row(PERIOD, METRIC, "months", "1", "12", "month,mo"),
+            row(PERIOD, METRIC, "weeks", "7", "365.2425", "week,wk"),
+            row(PERIOD, METRIC, "days", "1", "365.2425", "day,d"));
 
     private static final Map<Dimension, Map<String, Row>> BY_SPELLING = bySpelling();
 

@@ -1,6 +1,5 @@
 package broadside.report;
 
-import broadside.sheet.Drawing;
 import broadside.sheet.Drawing.Anchor;
 import broadside.sheet.Drawing.Circle;
 import broadside.sheet.Drawing.Fill;
@@ -8,6 +7,7 @@ import broadside.sheet.Drawing.Line;
 import broadside.sheet.Drawing.Outline;
 import broadside.sheet.Drawing.Shape;
 import broadside.sheet.Drawing.Text;
+import broadside.sheet.Drawing;
 import java.util.List;
 
 /** Draws the shapes of a drawing on a page, turned upright and to the scale that fits. */

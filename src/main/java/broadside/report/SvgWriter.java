@@ -1,6 +1,5 @@
 package broadside.report;
 
-import broadside.sheet.Drawing;
 import broadside.sheet.Drawing.Anchor;
 import broadside.sheet.Drawing.Circle;
 import broadside.sheet.Drawing.Fill;
@@ -9,6 +8,7 @@ import broadside.sheet.Drawing.Line;
 import broadside.sheet.Drawing.Outline;
 import broadside.sheet.Drawing.Shape;
 import broadside.sheet.Drawing.Text;
+import broadside.sheet.Drawing;
 import java.util.List;
 
 /**

@@ -1,12 +1,18 @@
 package broadside.sheet;
 
-import broadside.action.CaseAction;
 import broadside.action.CaseAction.PanelZones;
+import broadside.action.CaseAction;
+import broadside.action.Foot;
 import broadside.action.PostAction;
+import broadside.action.Reaction;
 import broadside.assess.Loads;
 import broadside.codes.ZonePressure;
+import broadside.panel.BannerFence;
+import broadside.panel.FacadePanel;
+import broadside.panel.Hoarding;
 import broadside.panel.Item;
 import broadside.panel.Panel;
+import broadside.panel.PostSign;
 import broadside.quantity.Dimension;
 import broadside.quantity.Units;
 import broadside.sheet.Block.Column;
@@ -27,24 +33,37 @@ final class CaseTables {
 
     static List<Block> of(Item item, Loads loads, Format format) {
         List<Block> blocks = new ArrayList<>();
-        boolean sign = item.choose(s -> true, h -> false);
+        boolean sign = item instanceof PostSign;
         blocks.add(cases(loads, sign, format, loads.level().name()));
         blocks.add(cases(loads.companion(), sign, format, loads.level().shown() + ", " + loads.level().rule()));
-        blocks.add(new Paragraph("Forces are magnitudes. The wind was taken on the front and on the back and from both ends; where a case is not shown for an end, "
-            + "the end shown is the worse. Torsion is about the middle" + (sign ? " of the posts" : "; the posts are not worked out from it")
-            + "; it is positive when it turns the right side backwards, seen from the front. Loads are rounded up from unrounded values, at display only.",
-            Tone.SMALL));
+        blocks.add(new Paragraph(directions(loads, sign) + " Loads are rounded up from unrounded values, at display only.", Tone.SMALL));
         blocks.add(zones(item, loads, format));
         if (!loads.posts().isEmpty()) {
             blocks.add(posts(item, loads, format));
         }
-        blocks.add(new Paragraph("Wind along the face (own rule, of no code: pressure on the edge and friction on both faces): force "
-            + format.both(loads.edgeOn().force(), Dimension.FORCE) + ", moment at the ground " + format.both(loads.edgeOn().moment(), Dimension.MOMENT) + ", "
-            + loads.level().name() + ".", Tone.PLAIN));
+        if (!loads.reactions().isEmpty()) {
+            blocks.add(reactions(loads, format));
+        }
+        loads.supports().drag().ifPresent(drag -> blocks.add(new Paragraph("Wind on the posts themselves, inside the base shear and base moment above: force "
+            + format.both(drag.force(), Dimension.FORCE) + ", moment at the ground " + format.both(drag.moment(), Dimension.MOMENT) + ", "
+            + loads.level().name() + ".", Tone.PLAIN)));
+        loads.edgeOn().ifPresent(edge -> blocks.add(new Paragraph("Wind along the face (own rule, of no code: pressure on the edge and friction on both faces): force "
+            + format.both(edge.force(), Dimension.FORCE) + (loads.foot() == Foot.GROUND ? ", moment at the ground " + format.both(edge.moment(), Dimension.MOMENT) : "")
+            + ", " + loads.level().name() + ".", Tone.PLAIN)));
         if (loads.selfWeight() > 0) {
-            blocks.add(new Paragraph("Weight of the boards: " + format.both(loads.selfWeight(), Dimension.FORCE) + ", unfactored, without posts.", Tone.PLAIN));
+            blocks.add(new Paragraph("Weight: " + format.both(loads.selfWeight(), Dimension.FORCE) + ", unfactored" + (sign ? ", without posts." : "."), Tone.PLAIN));
         }
         return blocks;
+    }
+
+    private static String directions(Loads loads, boolean sign) {
+        if (loads.governs("base-shear").direction().endsWith("ward")) {
+            return "Forces are magnitudes; pressures that pull the panel off the wall are negative.";
+        }
+        String both = "Forces are magnitudes. The wind was taken on the front and on the back and from both ends; where a case is not shown for an end, "
+            + "the end shown is the worse.";
+        return loads.foot() != Foot.GROUND ? both : both + " Torsion is about the middle" + (sign ? " of the posts" : "; the posts are not worked out from it")
+            + "; it is positive when it turns the right side backwards, seen from the front.";
     }
 
     private static Table cases(Loads loads, boolean sign, Format format, String level) {
@@ -52,22 +71,67 @@ final class CaseTables {
         for (CaseAction c : loads.cases()) {
             List<String> governs = new ArrayList<>();
             if (same(loads.governs("base-moment"), c)) {
-                governs.add("moment");
+                governs.add(loads.foot() == Foot.NONE ? "force" : "moment");
             }
             if (sign && same(loads.governs("torsion"), c) && c.torsion() != 0) {
                 governs.add("torsion");
             }
             boolean marked = !governs.isEmpty();
-            rows.add(new Row(List.of(Format.caseName(c.name()), c.direction() + Format.end(c), format.force(c.force()), format.length(c.height()),
-                format.moment(c.baseMoment()), torsion(c, format), marked ? String.join(", ", governs) : "-"), marked));
+            List<String> cells = new ArrayList<>(List.of(name(c), c.direction() + Format.end(c), format.force(c.force()), format.length(c.height())));
+            if (loads.foot() != Foot.NONE) {
+                cells.add(format.force(c.baseShear()));
+                cells.add(format.moment(c.baseMoment()));
+            }
+            if (loads.foot() == Foot.GROUND) {
+                cells.add(torsion(c, format));
+            }
+            cells.add(marked ? String.join(", ", governs) : "-");
+            rows.add(new Row(cells, marked));
         }
-        return new Table("Loads at the ground line, " + level, List.of(new Column("Case", false, 3), new Column("Wind on", false, 4),
-            new Column("Force = base shear", true, 3), new Column("Height of force", true, 3), new Column("Base moment", true, 3),
-            new Column("Torsion", true, 3), new Column("Governs", false, 3)), rows);
+        List<Column> columns = new ArrayList<>(List.of(new Column("Case", false, 4), new Column("Wind on", false, 4), new Column("Wind force", true, 3),
+            new Column("Height of force", true, 3)));
+        if (loads.foot() != Foot.NONE) {
+            columns.add(new Column(loads.foot() == Foot.WALL ? "Shear" : "Base shear", true, 3));
+            columns.add(new Column(loads.foot() == Foot.WALL ? "Moment at the wall" : "Base moment", true, 3));
+        }
+        if (loads.foot() == Foot.GROUND) {
+            columns.add(new Column("Torsion", true, 3));
+        }
+        columns.add(new Column("Governs", false, 3));
+        String what = loads.foot() == Foot.GROUND ? "Loads at the ground line, " : loads.foot() == Foot.WALL ? "Loads at the wall, " : "Loads, ";
+        return new Table(what + level, columns, rows);
+    }
+
+    /** The case, and the arrangement of the item that it belongs to. */
+    static String name(CaseAction c) {
+        return Format.caseName(c.name()) + switch (c.state()) {
+            case PostSign.ENVELOPE -> ", as one board";
+            case BannerFence.BARE -> ", bare fence";
+            default -> "";
+        };
+    }
+
+    private static Table reactions(Loads loads, Format format) {
+        List<Row> rows = new ArrayList<>();
+        List<Reaction> companion = loads.companion().reactions();
+        for (int i = 0; i < loads.reactions().size(); i++) {
+            Reaction r = loads.reactions().get(i);
+            rows.add(new Row(List.of(r.label(), value(r, format), value(companion.get(i), format)), false));
+        }
+        return new Table("What its supports must take; weights are unfactored", List.of(new Column("What", false, 9),
+            new Column(loads.level().name(), true, 3), new Column(loads.level().shown(), true, 3)), rows);
+    }
+
+    private static String value(Reaction r, Format format) {
+        return switch (r.unit()) {
+            case "N" -> format.force(r.value());
+            case "N m" -> format.moment(r.value());
+            default -> format.plain(r.value());
+        };
     }
 
     private static boolean same(CaseAction a, CaseAction b) {
-        return a.name().equals(b.name()) && a.direction().equals(b.direction()) && a.windward() == b.windward();
+        return a.state().equals(b.state()) && a.name().equals(b.name()) && a.direction().equals(b.direction()) && a.windward() == b.windward();
     }
 
     private static String torsion(CaseAction c, Format format) {
@@ -80,7 +144,7 @@ final class CaseTables {
         List<Row> rows = new ArrayList<>();
         for (int k = 0; k < loads.cases().size(); k++) {
             CaseAction c = loads.cases().get(k);
-            for (int i = 0; i < c.zones().size() && c.direction().equals("front"); i++) {
+            for (int i = 0; i < c.zones().size() && !c.direction().equals("back"); i++) {
                 rows.addAll(zoneRows(item, c, companions.get(k), i, format));
             }
         }
@@ -90,20 +154,20 @@ final class CaseTables {
         if (wall) {
             columns.add(new Column("Moment per " + (format.units() == Units.US ? "foot" : "metre") + ", " + loads.level().name(), true, 4));
         }
-        return new Table("Net pressures by zone, both faces together; places are measured from the left end, seen from the front", columns, rows);
+        return new Table("Net pressures by zone, both faces together; places are measured from the left end, seen from the front" + (item instanceof FacadePanel ? "; for a panel on a wall from the corner" : ""), columns, rows);
     }
 
     private static List<Row> zoneRows(Item item, CaseAction c, CaseAction companion, int index, Format format) {
         PanelZones panel = c.zones().get(index);
-        boolean board = item.panels().get(index).kind() == Panel.Kind.BOARD;
-        double start = item.choose(sign -> 0.0, hoarding -> panel.left() + hoarding.length().metres() / 2);
+        boolean board = panel.perMetre().isEmpty();
+        double start = item instanceof Hoarding hoarding ? panel.left() + hoarding.length().metres() / 2 : item instanceof FacadePanel ? panel.left() : 0;
         List<Row> rows = new ArrayList<>();
         for (int i = 0; i < panel.zones().size(); i++) {
             ZonePressure z = panel.zones().get(i);
-            String zone = panel.zones().size() == 1 && board ? "whole board" : HoardingDrawing.shortName(z.zone());
-            List<String> cells = new ArrayList<>(List.of(Format.caseName(c.name()) + Format.end(c),
+            String zone = panel.zones().size() == 1 && board && c.direction().equals("front") ? "whole board" : HoardingDrawing.shortName(z.zone());
+            List<String> cells = new ArrayList<>(List.of(name(c) + Format.end(c),
                 (panel.part().isEmpty() ? "" : panel.part() + ", ") + zone, format.length(start + z.from()) + " to " + format.length(start + z.to()),
-                format.plain(z.coefficient()), format.pressure(z.pressure()), format.pressure(companion.zones().get(index).zones().get(i).pressure())));
+                format.plain(z.coefficient()), pressure(z.pressure(), format), pressure(companion.zones().get(index).zones().get(i).pressure(), format)));
             if (!board) {
                 cells.add(format.momentPerLength(panel.perMetre().get(i)));
             }
@@ -112,8 +176,12 @@ final class CaseTables {
         return rows;
     }
 
+    private static String pressure(double pascals, Format format) {
+        return pascals < 0 ? "-" + format.pressure(-pascals) : format.pressure(pascals);
+    }
+
     private static Table posts(Item item, Loads loads, Format format) {
-        boolean sign = item.choose(s -> true, h -> false);
+        boolean sign = item instanceof PostSign;
         List<PostAction> shown = loads.posts().size() <= MOST_POSTS ? loads.posts() : worstOfEachZone(loads.posts());
         double most = loads.posts().stream().mapToDouble(PostAction::moment).max().orElse(0);
         List<Row> rows = new ArrayList<>();

@@ -4,10 +4,7 @@ import broadside.assess.Assessment;
 import broadside.assess.ItemResult;
 import broadside.assess.Job;
 import broadside.assess.Note;
-import broadside.panel.Hoarding;
 import broadside.panel.Item;
-import broadside.panel.PostSign;
-import broadside.quantity.Length;
 import broadside.sheet.Block.Fact;
 import broadside.sheet.Block.Facts;
 import broadside.sheet.Block.Heading;
@@ -20,7 +17,7 @@ import java.util.Optional;
 /** The twelve groups of fields that a load summary is checked by. A field without a value says "not given". */
 final class CheckList {
 
-    private static final String NOT_GIVEN = "not given";
+    static final String NOT_GIVEN = "not given";
     private static final String NOT_HERE = "not worked out in this version";
 
     private final Assessment assessment;
@@ -97,7 +94,7 @@ final class CheckList {
 
     private void sign(Item item, boolean many) {
         fact("Type", item.kind());
-        item.<Runnable>choose(sign -> () -> sign(sign), hoarding -> () -> hoarding(hoarding)).run();
+        facts.addAll(ItemFacts.of(item, format));
         fact("Solidity, and who says so", solidity(item));
         fact("Lighting and openings", job.remark(item.mark(), "lighting").orElse(""));
         fact("Fixed to", job.remark(item.mark(), "fixed-to").orElse(""));
@@ -105,31 +102,6 @@ final class CheckList {
             fact("As typed, not checked: " + carrying.name(), carrying.typed());
         }
         group("3 Sign" + (many ? " " + item.mark() : ""));
-    }
-
-    private void sign(PostSign sign) {
-        fact("Faces", Integer.toString(sign.faces()));
-        for (int i = 0; i < sign.boards().size(); i++) {
-            var b = sign.boards().get(i);
-            String which = sign.boards().size() == 1 ? "" : " " + sign.part(i);
-            fact("Board" + which, b.shape().word() + ", width " + b.width().typed() + ", height " + b.height().typed() + ", depth "
-                + (b.depth().metres() > 0 ? b.depth().typed() : NOT_GIVEN));
-            fact("Clear height below" + which, b.clearance().typed());
-            fact("Overall height" + which, format.length(b.clearance().metres() + b.height().metres()));
-            fact("Mass" + which, b.mass().map(m -> m.typed()).orElse(""));
-            fact("Middle of board from middle of posts" + which, b.offset().metres() == 0 ? "in the middle" : b.offset().typed() + ", positive to the right");
-        }
-        fact("Posts", sign.posts().count() + sign.posts().spacing().map(s -> " at " + s.typed()).orElse(""));
-    }
-
-    private void hoarding(Hoarding hoarding) {
-        fact("Length and height", hoarding.length().typed() + " by " + hoarding.height().typed());
-        fact("Gap below", hoarding.clearance().metres() == 0 ? "none" : hoarding.clearance().typed());
-        fact("Overall height", format.length(hoarding.clearance().metres() + hoarding.height().metres()));
-        fact("Returns", "left " + orNone(hoarding.returnLeft()) + ", right " + orNone(hoarding.returnRight()));
-        fact("Gates", hoarding.gates().isEmpty() ? "none" : String.join("; ", hoarding.gates().stream()
-            .map(g -> g.width().typed() + " wide from " + g.from().typed()).toList()));
-        fact("Posts", hoarding.spacing().map(s -> "at " + s.typed()).orElse(""));
     }
 
     private String solidity(Item item) {
@@ -141,7 +113,7 @@ final class CheckList {
         fact("Code and edition", assessment.code().edition().property("title"));
         fact("Overlay", job.basis().overlay().orElse("none"));
         fact("Basic wind speed", Format.speed(site.basicSpeed()) + ", " + site.averaging().words()
-            + ", for loads at " + assessment.code().level().name() + " level");
+            + ", for loads at " + assessment.code().level(site).name() + " level");
         fact("Return period", site.returnPeriod().map(p -> p.typed()).orElse("as the code's basic speed"));
         fact("Risk category", site.options().word("risk-category").orElse(""));
         fact("Terrain or exposure", site.ground().terrain() + " in every direction" + assessment.code().terms().terrains().stream()
@@ -176,8 +148,8 @@ final class CheckList {
             item.loads().ifPresent(l -> fact("Governing case, " + mark, String.join(", ", l.governingNames().entrySet().stream()
                 .map(e -> e.getKey().replace('-', ' ') + ": " + Format.caseName(e.getValue())).toList())));
             item.loads().ifPresent(l -> fact("Weight of the boards, " + mark, l.selfWeight() > 0 ? format.force(l.selfWeight()) : ""));
-            item.loads().ifPresent(l -> fact("Wind along the face, " + mark, format.force(l.edgeOn().force()) + ", own rule"));
-            item.refusal().ifPresent(r -> fact("Outcome, " + mark, "not covered: " + r.code() + ", " + r.clause()));
+            item.loads().flatMap(l -> l.edgeOn()).ifPresent(e -> fact("Wind along the face, " + mark, format.force(e.force()) + ", own rule"));
+            item.refusal().ifPresent(r -> fact("Outcome, " + mark, r.ofScope() ? ItemResult.OUTSIDE + ": " + r.clause() : "not covered: " + r.code() + ", " + r.clause()));
         }
         fact("Pressures, forces, moments", assessment.items().stream().anyMatch(i -> i.loads().isPresent())
             ? "at both levels, each labelled, under \"Loads by case\"" : "none: not covered");
@@ -227,10 +199,6 @@ final class CheckList {
         }
         fact("Storm action", NOT_GIVEN);
         group("12 Inspection and maintenance");
-    }
-
-    private static String orNone(Length length) {
-        return length.metres() == 0 ? "none" : length.typed();
     }
 
     /** The panel that a step belongs to, behind a comma, where the item has several. */

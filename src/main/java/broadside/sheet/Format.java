@@ -2,8 +2,8 @@ package broadside.sheet;
 
 import broadside.action.CaseAction;
 import broadside.assess.Job;
-import broadside.codes.LoadCase;
 import broadside.codes.LoadCase.Windward;
+import broadside.codes.LoadCase;
 import broadside.quantity.Dimension;
 import broadside.quantity.Rounding;
 import broadside.quantity.Show;

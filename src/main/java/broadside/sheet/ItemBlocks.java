@@ -1,10 +1,12 @@
 package broadside.sheet;
 
+import broadside.action.Foot;
 import broadside.action.PostAction;
 import broadside.assess.Assessment;
 import broadside.assess.ItemResult;
 import broadside.assess.Loads;
 import broadside.assess.Note;
+import broadside.panel.PostSign;
 import broadside.quantity.Dimension;
 import broadside.sheet.Block.Answer;
 import broadside.sheet.Block.Fact;
@@ -28,6 +30,9 @@ final class ItemBlocks {
             blocks.addAll(refusal(item, anchor, level));
         } else {
             Loads loads = item.loads().get();
+            if (item.refusal().isPresent()) {
+                blocks.addAll(refusal(item, anchor + "scope-", level));
+            }
             blocks.add(new Heading(level, "The answer", anchor + "answer"));
             blocks.add(new Paragraph(wind(assessment, item, loads, format), Tone.PLAIN));
             blocks.add(answer(assessment, item, loads, format));
@@ -56,10 +61,11 @@ final class ItemBlocks {
             format.force(other.governs("base-shear").force()) + " " + companion));
         lines.add(moment(loads, other, format));
         double torsion = Math.abs(loads.governs("torsion").torsion());
-        if (item.item().choose(sign -> true, hoarding -> false) && torsion > 0) {
+        if (item.item() instanceof PostSign && torsion > 0) {
             lines.add(Fact.of("Torsion about the middle of the posts", format.both(torsion, Dimension.MOMENT) + ", " + loads.level().name(),
                 format.moment(Math.abs(other.governs("torsion").torsion())) + " " + companion + ", " + Format.caseWords(loads.governs("torsion").name())));
         }
+        lines.addAll(reactions(loads, format));
         lines.add(sure(item));
         return new Answer(lines);
     }
@@ -79,7 +85,7 @@ final class ItemBlocks {
 
     /** Which case governs what; one name when one case governs all. */
     private static String governs(ItemResult item, Loads loads) {
-        boolean sign = item.item().choose(s -> true, h -> false);
+        boolean sign = item.item() instanceof PostSign;
         String base = Format.caseName(loads.governs("base-moment").name());
         String post = loads.worstPost().map(p -> Format.caseName(p.named())).orElse(base);
         String torsion = sign && loads.governs("torsion").torsion() != 0 ? Format.caseName(loads.governs("torsion").name()) : base;
@@ -97,8 +103,18 @@ final class ItemBlocks {
         return loads.worstPost()
             .map(p -> Fact.of("Moment at the foot of the worst post", format.both(p.moment(), Dimension.MOMENT) + ", " + loads.level().name(),
                 format.moment(other.worstPost().orElseThrow().moment()) + " " + companion + ", " + worstPosts(loads, p) + ", " + Format.caseWords(p.named())))
-            .orElseGet(() -> Fact.of("Moment at the ground, whole length", format.both(loads.governs("base-moment").baseMoment(), Dimension.MOMENT) + ", "
+            .orElseGet(() -> loads.foot() == Foot.NONE ? height(loads, format) : Fact.of(loads.foot() == Foot.WALL ? "Moment at the wall" : "Moment at the ground, whole length", format.both(loads.governs("base-moment").baseMoment(), Dimension.MOMENT) + ", "
                 + loads.level().name(), format.moment(other.governs("base-moment").baseMoment()) + " " + companion));
+    }
+
+    private static Fact height(Loads loads, Format format) {
+        return Fact.of("Height of the force", format.length(loads.governs("base-shear").height()) + " above the ground");
+    }
+
+    /** What supports other than posts must take, the greatest first. */
+    private static List<Fact> reactions(Loads loads, Format format) {
+        return loads.reactions().stream().filter(r -> !r.named().isEmpty() || r.unit().equals("1")).limit(2).map(r -> Fact.of(r.label(), r.unit().equals("1")
+            ? format.plain(r.value()) + " times" : (r.unit().equals("N") ? format.force(r.value()) : format.moment(r.value())) + ", " + loads.level().name())).toList();
     }
 
     /** The posts that share the greatest moment. */
@@ -124,6 +140,11 @@ final class ItemBlocks {
 
     private static List<Block> refusal(ItemResult item, String anchor, int level) {
         ItemResult.Refusal refusal = item.refusal().orElseThrow();
+        if (refusal.ofScope()) {
+            return List.of(new Heading(level, ItemResult.OUTSIDE, anchor + "answer"), new Answer(List.of(Fact.of("Outcome", "outside scope",
+                item.loads().isPresent() ? "the loads below are loads only: what holds it is not checked" : "no load is given"),
+                Fact.of("Why", refusal.clause() + ": " + refusal.reason()), Fact.of("What to send to the engineer", refusal.instead()))));
+        }
         return List.of(new Heading(level, "Not covered by this code", anchor + "answer"),
             new Answer(List.of(Fact.of("Outcome", item.outcome().word().replace('-', ' '), "no load is given"),
                 Fact.of("Clause", refusal.code() + ", " + refusal.clause()), Fact.of("Reason", refusal.reason()),
@@ -133,8 +154,8 @@ final class ItemBlocks {
     private static String caption(ItemResult item) {
         return "Drawn to scale, dimensions as typed." + item.loads().map(l -> " Hatched the denser the higher the pressure, zones as in "
             + Format.caseWords(ItemDrawing.shown(l).name()) + Format.end(ItemDrawing.shown(l))
-            + item.item().choose(sign -> "; the circle marks the force of " + Format.caseWords(l.governs("torsion").name())
-                + Format.end(l.governs("torsion")).replace(", force to the", ", towards the"), hoarding -> "") + ".").orElse("");
+            + (item.item() instanceof PostSign ? "; the circle marks the force of " + Format.caseWords(l.governs("torsion").name())
+                + Format.end(l.governs("torsion")).replace(", force to the", ", towards the") : "") + ".").orElse("");
     }
 
     private static Notes notes(ItemResult item, Note.Kind... kinds) {

@@ -15,18 +15,13 @@ public final class ItemDrawing {
     /** Draws an item; zones and force are those of the case that governs the moment at the ground. */
     public static Drawing of(Item item, Optional<Loads> loads, Units units) {
         Format format = new Format(units);
-        return item.choose(sign -> new SignDrawing(sign, loads, format).make(), hoarding -> new HoardingDrawing(hoarding, loads, format).make());
+        return item.choose(new KindDrawing(loads, format));
     }
 
     /** The content of the drawing in words, for those who cannot see it. */
     public static String words(Item item, Optional<Loads> loads, Units units) {
         Format format = new Format(units);
-        String what = item.choose(
-            sign -> "Elevation and side view of a sign of " + (sign.boards().size() == 1 ? "one board" : sign.boards().size() + " boards") + " on "
-                + (sign.posts().count() == 1 ? "one post" : sign.posts().count() + " posts") + ": " + String.join("; ", sign.boards().stream()
-                .map(b -> b.width().typed() + " wide, " + b.height().typed() + " high, " + b.clearance().typed() + " above the ground").toList()),
-            hoarding -> "Elevation and side view of a hoarding " + hoarding.length().typed() + " long and " + hoarding.height().typed() + " high"
-                + (hoarding.gates().isEmpty() ? "" : " with " + hoarding.gates().size() + (hoarding.gates().size() == 1 ? " gate" : " gates")));
+        String what = item.choose(new KindWords());
         return what + loads.map(l -> ". The force of the governing case, " + format.force(l.governs("base-moment").force()) + ", acts "
             + format.length(l.governs("base-moment").height()) + " above the ground.").orElse(".");
     }

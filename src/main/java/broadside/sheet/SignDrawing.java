@@ -1,7 +1,7 @@
 package broadside.sheet;
 
-import broadside.action.CaseAction;
 import broadside.action.CaseAction.PanelZones;
+import broadside.action.CaseAction;
 import broadside.assess.Loads;
 import broadside.codes.ZonePressure;
 import broadside.panel.Board;

@@ -5,6 +5,7 @@ import broadside.quantity.Period;
 import broadside.quantity.Pressure;
 import broadside.quantity.Speed;
 import java.util.Optional;
+import java.util.Set;
 
 /**
  * Where the item stands and the wind it must stand.
@@ -20,8 +21,25 @@ import java.util.Optional;
 public record Site(String name, Speed basicSpeed, Averaging averaging, Optional<Period> returnPeriod, Ground ground,
                    Optional<AuthorityMinimum> authorityMinimum, SiteOptions options) {
 
-    /** Terrain class in the words of the code, altitude above the sea, and the hill near by. */
-    public record Ground(String terrain, Optional<Length> altitude, Optional<Topography> topography) { }
+    /**
+     * Terrain class in the words of the code, altitude above the sea, and the hill near by.
+     *
+     * @param unknown  what the user answered with "I don't know"
+     */
+    public record Ground(String terrain, Optional<Length> altitude, Optional<Topography> topography, Set<Unknown> unknown) {
+
+        public Ground {
+            unknown = Set.copyOf(unknown);
+        }
+
+        /** Whether the ground near by is not known, so that the worst value of the code counts. */
+        public boolean shapeUnknown() {
+            return unknown.contains(Unknown.SHAPE);
+        }
+    }
+
+    /** What a user need not know: the terrain class, and whether the ground near by is higher or lower. */
+    public enum Unknown { TERRAIN, SHAPE }
 
     /** A least pressure; {@code service} when the authority means it at allowable stress. */
     public record AuthorityMinimum(Pressure pressure, boolean service) { }

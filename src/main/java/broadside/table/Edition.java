@@ -47,6 +47,15 @@ public final class Edition {
             new TableFormat(key + "/edition.properties", 1, "the line \"" + name + " = ...\" is missing"));
     }
 
+    public boolean hasProperty(String name) {
+        return properties.getProperty(name) != null || basis.map(b -> b.hasProperty(name)).orElse(false);
+    }
+
+    /** Whether this edition or the one that it stands on has a table of that name. */
+    public boolean has(String table) {
+        return shapes.containsKey(table) || basis.map(b -> b.has(table)).orElse(false);
+    }
+
     public boolean isOverlay() {
         return basis.isPresent();
     }

@@ -136,6 +136,7 @@ record Wording(String label, String hint, String metric, String us) {
             case ANGLE -> "deg";
             case AREA -> metric ? "m2" : "ft2";
             case DENSITY -> metric ? "kg/m3" : "lb/ft3";
+            case MASS_PER_AREA -> metric ? "kg/m2" : "lb/ft2";
             case PERIOD -> "years";
         };
     }

@@ -16,6 +16,9 @@ final class Cases {
 
     static final PanelSymbols SYMBOLS = new PanelSymbols("b", "h", "z_g");
 
+    /** On the ground, the wind on posts not known. */
+    static final FootActions.Standing ALONE = new FootActions.Standing("", Foot.GROUND, List.of());
+
     static Panel board(String part, double width, double height, double clearance, double middle) {
         return new Panel(part, Panel.Kind.BOARD, width, height, clearance, middle, 1, 0, 0, new Panel.AsTyped("", "", "", ""));
     }

@@ -17,7 +17,7 @@ class FootActionsTest {
     private static final Panel BOARD = board("", 3, 2, 2.5, 0.4);
 
     private static FootActions.Result of(PanelCases... panels) {
-        return FootActions.of(List.of(panels), Cases.SYMBOLS, new Trace());
+        return FootActions.of(List.of(panels), Cases.SYMBOLS, Cases.ALONE, new Trace());
     }
 
     private static CaseAction find(FootActions.Result result, String name, String direction) {

@@ -26,7 +26,7 @@ class PostsTest {
     private static final Panel BOARD = board("", 3, 2, 2.5, 0);
 
     private static List<FootActions.Combined> combinations(LoadCase... cases) {
-        return FootActions.of(List.of(new PanelCases(BOARD, List.of(cases))), Cases.SYMBOLS, new Trace()).combinations();
+        return FootActions.of(List.of(new PanelCases(BOARD, List.of(cases))), Cases.SYMBOLS, Cases.ALONE, new Trace()).combinations();
     }
 
     private static List<PostAction> posts(Hoarding hoarding, double spacing) {
@@ -37,7 +37,7 @@ class PostsTest {
 
     @Test
     void twoPostsShareACentredForce() {
-        List<PostAction> posts = SignPosts.of(TWO, combinations(even("centred", BOARD, 1000, 0)), new Trace());
+        List<PostAction> posts = SignPosts.of(TWO, combinations(even("centred", BOARD, 1000, 0)), List.of(), new Trace());
         assertThat(posts).extracting(PostAction::position).containsExactly(-1.0, 1.0);
         assertThat(posts).allSatisfy(p -> assertThat(p.shear()).isCloseTo(3000, within(1e-9)));
         assertThat(posts).allSatisfy(p -> assertThat(p.moment()).isCloseTo(10500, within(1e-9)));
@@ -46,7 +46,7 @@ class PostsTest {
     @Test
     void anEccentricForceLoadsThePostBesideIt() {
         LoadCase right = even("eccentric", BOARD, 1000, 0.75);
-        List<PostAction> posts = SignPosts.of(TWO, combinations(even("centred", BOARD, 1000, 0), right, right.mirrored(3)), new Trace());
+        List<PostAction> posts = SignPosts.of(TWO, combinations(even("centred", BOARD, 1000, 0), right, right.mirrored(3)), List.of(), new Trace());
         assertThat(posts).allSatisfy(p -> assertThat(p.named()).isEqualTo("eccentric"));
         assertThat(posts).allSatisfy(p -> assertThat(p.shear()).as("F/2 + F e / 2 m").isCloseTo(3000 + 6000 * 0.75 / 2, within(1e-9)));
         assertThat(posts).allSatisfy(p -> assertThat(p.moment()).isCloseTo(3.5 * 5250, within(1e-9)));
@@ -56,7 +56,7 @@ class PostsTest {
     void onePostTakesAll() {
         LoadCase right = even("eccentric", BOARD, 1000, 0.75);
         Trace trace = new Trace();
-        List<PostAction> posts = SignPosts.of(List.of(0.0), combinations(even("centred", BOARD, 1000, 0), right), trace);
+        List<PostAction> posts = SignPosts.of(List.of(0.0), combinations(even("centred", BOARD, 1000, 0), right), List.of(), trace);
         assertThat(posts).hasSize(1);
         assertThat(posts.get(0).shear()).isCloseTo(6000, within(1e-9));
         assertThat(posts.get(0).moment()).isCloseTo(21000, within(1e-9));

@@ -81,10 +81,4 @@ class HoardingTest {
             assertThat(hoarding.panels().stream().skip(1).mapToDouble(Panel::returnLeft).sum()).as("only at the outer end").isZero();
         }
     }
-
-    @Test
-    void itDecidesByKind() {
-        assertThat(hoarding(20).<String>choose(s -> "sign", h -> "hoarding")).isEqualTo("hoarding");
-        assertThat(hoarding(20).kind()).isEqualTo("hoarding");
-    }
 }

@@ -20,7 +20,7 @@ class PostSignTest {
     }
 
     private static PostSign sign(Board... boards) {
-        return new PostSign("S1", List.of(boards), 1, new Posts(1, Optional.empty()), List.of());
+        return new PostSign("S1", List.of(boards), new PostSign.Faces(1, 0), new Posts(1, Optional.empty(), Optional.empty()), Optional.empty(), List.of());
     }
 
     @Test
@@ -43,21 +43,15 @@ class PostSignTest {
     void aSignNeedsABoardAndKeepsItsOwnList() {
         assertThatThrownBy(PostSignTest::sign).isInstanceOf(IllegalArgumentException.class);
         List<Board> boards = new ArrayList<>(List.of(board("", 0)));
-        PostSign sign = new PostSign("S1", boards, 1, new Posts(1, Optional.empty()), List.of());
+        PostSign sign = new PostSign("S1", boards, new PostSign.Faces(1, 0), new Posts(1, Optional.empty(), Optional.empty()), Optional.empty(), List.of());
         boards.clear();
         assertThat(sign.boards()).hasSize(1);
-    }
-
-    @Test
-    void itDecidesByKind() {
-        assertThat(sign(board("", 0)).<String>choose(s -> "sign", h -> "hoarding")).isEqualTo("sign");
-        assertThat(sign(board("", 0)).kind()).isEqualTo("post-sign");
     }
 
     @ParameterizedTest
     @ValueSource(ints = {1, 2, 3, 4, 7, 20})
     void postsStandEvenlyAboutTheMiddle(int count) {
-        List<Double> at = new Posts(count, Optional.of(Length.metres(1.7))).positions();
+        List<Double> at = new Posts(count, Optional.of(Length.metres(1.7)), Optional.empty()).positions();
         assertThat(at).hasSize(count);
         for (int i = 0; i < count; i++) {
             assertThat(at.get(i)).isEqualTo(-at.get(count - 1 - i), within(1e-12));
@@ -69,7 +63,7 @@ class PostSignTest {
 
     @Test
     void onePostNeedsNoSpacing() {
-        assertThat(new Posts(1, Optional.empty()).positions()).containsExactly(0.0);
-        assertThat(new Posts(2, Optional.of(Length.metres(2))).positions()).containsExactly(-1.0, 1.0);
+        assertThat(new Posts(1, Optional.empty(), Optional.empty()).positions()).containsExactly(0.0);
+        assertThat(new Posts(2, Optional.of(Length.metres(2)), Optional.empty()).positions()).containsExactly(-1.0, 1.0);
     }
 }

@@ -12,7 +12,9 @@ import static tech.units.indriya.unit.Units.KILOMETRE_PER_HOUR;
 import static tech.units.indriya.unit.Units.METRE;
 import static tech.units.indriya.unit.Units.METRE_PER_SECOND;
 import static tech.units.indriya.unit.Units.METRE_PER_SQUARE_SECOND;
+import static tech.units.indriya.unit.Units.DAY;
 import static tech.units.indriya.unit.Units.MONTH;
+import static tech.units.indriya.unit.Units.WEEK;
 import static tech.units.indriya.unit.Units.NEWTON;
 import static tech.units.indriya.unit.Units.PASCAL;
 import static tech.units.indriya.unit.Units.RADIAN;
@@ -94,6 +96,7 @@ class UnitReferenceTest {
         map.put(Dimension.ANGLE, RADIAN);
         map.put(Dimension.AREA, SQUARE_METRE);
         map.put(Dimension.DENSITY, KILOGRAM.divide(METRE.pow(3)));
+        map.put(Dimension.MASS_PER_AREA, KILOGRAM.divide(SQUARE_METRE));
         map.put(Dimension.PERIOD, YEAR);
         return map;
     }
@@ -119,7 +122,9 @@ class UnitReferenceTest {
                     "ft2", USCustomary.SQUARE_FOOT, "in2", SQUARE_INCH);
             case DENSITY -> Map.of("kg/m3", KILOGRAM.divide(METRE.pow(3)),
                     "lb/ft3", USCustomary.POUND.divide(foot.pow(3)));
-            case PERIOD -> Map.of("years", YEAR, "months", MONTH);
+            case MASS_PER_AREA -> Map.of("kg/m2", KILOGRAM.divide(SQUARE_METRE), "g/m2", GRAM.divide(SQUARE_METRE),
+                    "lb/ft2", USCustomary.POUND.divide(USCustomary.SQUARE_FOOT));
+            case PERIOD -> Map.of("years", YEAR, "months", MONTH, "weeks", WEEK, "days", DAY);
         };
     }
 }

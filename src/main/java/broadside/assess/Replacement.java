@@ -1,0 +1,45 @@
+package broadside.assess;
+
+import broadside.action.CaseAction;
+import broadside.action.Foot;
+import broadside.action.FootActions.Standing;
+import broadside.action.FootActions;
+import broadside.action.PanelCases;
+import broadside.action.Reaction;
+import broadside.codes.WindCode;
+import broadside.panel.Panel;
+import broadside.panel.PostSign;
+import broadside.trace.Status;
+import broadside.trace.Trace;
+import java.util.List;
+import java.util.Map;
+
+/** A new sign on an old post: how much more the post must take than before. A ratio, never a check of the post. */
+final class Replacement {
+
+    static List<Reaction> of(PostSign sign, Job job, WindCode code, Map<String, CaseAction> governing, Trace sheet) {
+        if (sign.replaces().isEmpty()) {
+            return List.of();
+        }
+        Trace part = sheet.part(PostSign.REPLACED);
+        Panel old = sign.replacedPanel().orElseThrow();
+        part.given(code.symbols().width(), "width of the old board", old.width(), "m", old.typed().width());
+        part.given(code.symbols().height(), "height of the old board", old.height(), "m", old.typed().height());
+        part.given(code.symbols().gap(), "gap below the old board", old.clearance(), "m", old.typed().clearance());
+        part.given("x_b", "middle of the old board from the middle of the posts, to the right", old.middle(), "m", old.typed().middle());
+        List<CaseAction> before = FootActions.of(List.of(new PanelCases(old, code.netPressures(old, job.site(), part))), code.symbols(),
+            new Standing(PostSign.REPLACED, Foot.GROUND, List.of()), part).cases();
+        Map<String, CaseAction> governed = ItemLoads.governing(before);
+        double area = sheet.line("replacement-ratio/area", "r_A", "area of the new boards over that of the old one")
+            .in("A_{new}", sign.panels().stream().mapToDouble(Panel::area).sum(), "m²").in("A_{old}", old.area(), "m²")
+            .from("statics", Status.DERIVED).gives("A_{new} / A_{old}", sign.panels().stream().mapToDouble(Panel::area).sum() / old.area(), "1");
+        double after = governing.get("base-moment").baseMoment();
+        double then = governed.get("base-moment").baseMoment();
+        double ratio = sheet.line("replacement-ratio/moment", "r_M", "moment at the ground with the new boards over that with the old one")
+            .in("M_{new}", after, "N m").in("M_{old}", then, "N m").from("statics", Status.DERIVED).gives("M_{new} / M_{old}", after / then, "1");
+        return List.of(new Reaction("replacement-ratio/area", "Area of the new sign over that of the old one", area, "1", ""),
+            new Reaction("replacement-ratio/moment", "Moment at the ground, new sign over old one", ratio, "1", governing.get("base-moment").name()));
+    }
+
+    private Replacement() { }
+}
