@@ -9,7 +9,7 @@ import java.util.Set;
  */
 final class Formula {
 
-    private static final Set<String> FUNCTIONS = Set.of("ln", "exp", "max", "abs");
+    private static final Set<String> FUNCTIONS = Set.of("ln", "exp", "max", "min", "abs");
 
     private final String text;
     private final Map<String, Double> values;
@@ -106,10 +106,10 @@ final class Formula {
 
     private double function(String name) {
         double value = sum();
-        if (name.equals("max")) {
+        if (name.equals("max") || name.equals("min")) {
             space();
             while (take(';')) {
-                value = Math.max(value, sum());
+                value = name.equals("max") ? Math.max(value, sum()) : Math.min(value, sum());
                 space();
             }
         }
