@@ -6,6 +6,7 @@ import broadside.codes.CodeLibrary;
 import broadside.codes.NotCovered;
 import broadside.codes.WindCode;
 import broadside.panel.Item;
+import broadside.site.SpeedConversion;
 import broadside.table.Edition;
 import broadside.table.OutsideTable;
 import broadside.table.Rows;
@@ -26,6 +27,7 @@ public final class Assessor {
     private final Rows stackRule;
     private final Scope scope;
     private final About about;
+    private final SideBySide sideBySide;
 
     public Assessor(TableLibrary tables) {
         this.codes = new CodeLibrary(tables);
@@ -34,6 +36,7 @@ public final class Assessor {
         this.stackRule = own.rows("stacks");
         this.scope = new Scope(own.rows("scope"), own.rows("size-limits"));
         this.about = About.of(tables.digest());
+        this.sideBySide = new SideBySide(this, new SpeedConversion(tables.edition("gust-factors/1").orElseThrow().curve("durst")), own.rows("terrain-match"));
     }
 
     public CodeLibrary codes() {
@@ -62,6 +65,11 @@ public final class Assessor {
         }
         checkOverrides(job, results);
         return new Assessment(job, code, results, about);
+    }
+
+    /** One item of a job by every code. */
+    public Comparison sideBySide(Job job, Item item) {
+        return sideBySide.of(job, item);
     }
 
     private static void checkOverrides(Job job, List<ItemResult> results) {

@@ -1,6 +1,7 @@
 package broadside.assess;
 
 import broadside.panel.Item;
+import broadside.quantity.Speed;
 import broadside.site.Site;
 import broadside.trace.OwnValue;
 import java.util.List;
@@ -13,9 +14,13 @@ import java.util.Optional;
  * @param header     texts of the head of the job by their names in the job file: title, reference, client and so on
  * @param remarks    texts of single items by mark and name: what it is fixed to, who gave the solidity
  * @param overrides  values that the user sets in place of calculated ones
+ * @param compared   speeds and terrains typed for single codes of the comparison side by side
  */
 public record Job(Map<String, String> header, Basis basis, Site site, List<Item> items, Map<String, String> remarks,
-                  List<OwnValue> overrides) {
+                  List<OwnValue> overrides, List<Compared> compared) {
+
+    /** What was typed for one code of the comparison; {@code key} is that of its edition. */
+    public record Compared(String key, Optional<Speed> speed, Optional<String> terrain) { }
 
     /** The code by which loads are found; {@code stability} names the rule for overturning, where one is chosen. */
     public record Basis(String code, String edition, Optional<String> overlay, Optional<String> stability) {
@@ -31,6 +36,7 @@ public record Job(Map<String, String> header, Basis basis, Site site, List<Item>
         items = List.copyOf(items);
         remarks = Map.copyOf(remarks);
         overrides = List.copyOf(overrides);
+        compared = List.copyOf(compared);
     }
 
     public Optional<String> head(String name) {
@@ -42,6 +48,6 @@ public record Job(Map<String, String> header, Basis basis, Site site, List<Item>
     }
 
     public Job withSite(Site other) {
-        return new Job(header, basis, other, items, remarks, overrides);
+        return new Job(header, basis, other, items, remarks, overrides, compared);
     }
 }

@@ -4,6 +4,8 @@ import broadside.assess.Assessment;
 import broadside.assess.BadJob;
 import broadside.job.JobText;
 import broadside.job.ResultText;
+import broadside.sheet.ComparisonBlocks;
+import broadside.sheet.SheetMaker;
 import java.io.PrintStream;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
@@ -25,15 +27,20 @@ final class CheckCommand implements Callable<Integer> {
     @Option(names = "--json", description = "print the result as JSON")
     private boolean json;
 
+    @Option(names = "--side-by-side", description = "print what every code says, side by side")
+    private boolean sideBySide;
+
     @Override
     public Integer call() {
         Tool tool = parent.tool();
         Assessment assessment = assess(tool, JobFiles.open(job, tool.reader()), job);
         PrintStream out = Terminal.out();
-        if (json) {
+        if (sideBySide) {
+            assessment.job().items().forEach(item -> TextTable.print(ComparisonBlocks.sheet(tool.assessor(), assessment, item, ""), out));
+        } else if (json) {
             out.writeBytes(JobText.write(ResultText.of(assessment)));
         } else {
-            TextTable.print(assessment, out);
+            TextTable.print(SheetMaker.of(assessment, ""), out);
         }
         Terminal.finish(out);
         return assessment.allAssessed() ? 0 : 1;

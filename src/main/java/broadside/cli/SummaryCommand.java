@@ -5,6 +5,7 @@ import broadside.job.JobText;
 import broadside.report.Attachment;
 import broadside.report.Paper;
 import broadside.report.PdfWriter;
+import broadside.sheet.ComparisonBlocks;
 import broadside.sheet.Sheet;
 import broadside.sheet.SheetMaker;
 import java.io.ByteArrayOutputStream;
@@ -38,6 +39,9 @@ final class SummaryCommand implements Callable<Integer> {
     @Option(names = "--date", paramLabel = "YYYY-MM-DD", description = "date of the document; the job's own date comes first, else today")
     private String date;
 
+    @Option(names = "--side-by-side", description = "add a page that holds each item against every code")
+    private boolean sideBySide;
+
     @Override
     public Integer call() {
         if (Files.isDirectory(output) || output.toAbsolutePath().getParent() != null && !Files.isWritable(output.toAbsolutePath().getParent())) {
@@ -49,7 +53,8 @@ final class SummaryCommand implements Callable<Integer> {
             throw new Refused(output + ": is the job itself; give the PDF another name");
         }
         Assessment assessment = CheckCommand.assess(tool, opened, job);
-        Sheet sheet = SheetMaker.of(assessment, date());
+        Sheet own = SheetMaker.of(assessment, date());
+        Sheet sheet = sideBySide ? ComparisonBlocks.behind(own, tool.assessor(), assessment) : own;
         ByteArrayOutputStream pdf = new ByteArrayOutputStream();
         try {
             new PdfWriter().write(sheet, paper(), new Attachment("job.json", "the job that this document was made from", JobText.write(opened.json())), pdf);

@@ -1,21 +1,18 @@
 package broadside.cli;
 
-import broadside.assess.Assessment;
 import broadside.sheet.Block;
 import broadside.sheet.Sheet;
-import broadside.sheet.SheetMaker;
 import java.io.PrintStream;
 import java.util.List;
 
 /** The first part of a sheet as plain text: answers, tables and notes, without the drawing and the calculation. */
 final class TextTable {
 
-    static void print(Assessment assessment, PrintStream stream) {
+    static void print(Sheet sheet, PrintStream stream) {
         Lines out = text -> stream.println(Terminal.plain(text));
-        Sheet sheet = SheetMaker.of(assessment, "");
         out.println(sheet.caution());
         for (Block block : sheet.blocks()) {
-            if (block instanceof Block.NewPage || block instanceof Block.Heading h && h.anchor().equals("check-list")) {
+            if (block instanceof Block.NewPage || block instanceof Block.Heading h && (h.anchor().equals("check-list") || h.anchor().endsWith("-speed-0"))) {
                 break;
             }
             print(block, out);

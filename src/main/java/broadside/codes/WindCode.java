@@ -71,6 +71,15 @@ public interface WindCode {
         return Optional.empty();
     }
 
+    /**
+     * The speed of the wind that is passed once in 50 years over the basic speed of this site, by the code's own law of
+     * return periods; 1 where the basic speed is that wind already. Recorded as "fifty-year-ratio".
+     */
+    default double fiftyYearRatio(Site site, Trace trace) {
+        return trace.line("fifty-year-ratio", "k_{50}", "the wind passed once in 50 years over the basic speed").from(edition().property("title"), Status.DERIVED)
+            .reads("1: the basic speed is that wind", 1, "1");
+    }
+
     /** Velocity pressure at a height, Pa: worked out once on a sheet and taken over where the same height comes again. */
     default double velocityPressure(Site site, double height, Trace trace) {
         String symbol = facts().pressure();

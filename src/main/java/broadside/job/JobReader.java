@@ -4,8 +4,10 @@ import broadside.assess.BadJob;
 import broadside.assess.Job;
 import broadside.assess.Problem;
 import broadside.codes.CodeLibrary;
+import broadside.codes.WindCode;
 import broadside.panel.Item;
 import broadside.quantity.Quantity;
+import broadside.quantity.Speed;
 import broadside.site.Site;
 import broadside.site.SpeedConversion;
 import broadside.trace.OwnValue;
@@ -58,10 +60,12 @@ public final class JobReader {
         Optional<Site> site = values.object("site").flatMap(v -> new SiteReader(codes, conversion, problems).read(v, basis));
         List<Item> items = items(values, problems);
         List<OwnValue> overrides = overrides(values.list("overrides"), problems);
+        List<Job.Compared> compared = compared(values.list("comparison"), problems);
         if (!problems.isEmpty()) {
             return new Result(Optional.empty(), List.copyOf(problems));
         }
-        return new Result(Optional.of(new Job(header(values), basis.orElseThrow(), site.orElseThrow(), items, remarks(values), overrides)), List.of());
+        return new Result(Optional.of(new Job(header(values), basis.orElseThrow(), site.orElseThrow(), items, remarks(values), overrides,
+            compared)), List.of());
     }
 
     private Optional<Job.Basis> basis(Values values, List<Problem> problems) {
@@ -111,6 +115,26 @@ public final class JobReader {
             own.ifPresent(overrides::add);
         }
         return overrides;
+    }
+
+    /** Speeds and terrains typed for single codes of the comparison. */
+    private List<Job.Compared> compared(List<Values> list, List<Problem> problems) {
+        List<Job.Compared> compared = new ArrayList<>();
+        for (Values each : list) {
+            String key = each.text("code").orElse("") + "/" + each.text("edition").orElse("");
+            Optional<WindCode> code = codes.code(key);
+            if (code.isEmpty() && each.text("code").isPresent() && each.text("edition").isPresent()) {
+                problems.add(new Problem(each.at("code"), "\"" + StructureReader.clean(key) + "\" is not among the codes: " + String.join(", ", codes.editions())));
+            }
+            Optional<String> terrain = each.text("terrain");
+            code.filter(c -> terrain.isPresent() && !c.terms().hasTerrain(terrain.get())).ifPresent(c -> problems.add(new Problem(each.at("terrain"), "\""
+                + StructureReader.clean(terrain.get()) + "\" is not a terrain class of " + c.edition().property("title") + "; it has " + c.terms().terrainNames())));
+            Optional<Speed> speed = each.quantity("basic-speed", Speed.class);
+            speed.filter(s -> !(s.metresPerSecond() >= 1 && s.metresPerSecond() <= 150)).ifPresent(s ->
+                problems.add(new Problem(each.at("basic-speed"), "must lie between 1 m/s and 150 m/s")));
+            compared.add(new Job.Compared(key, speed, terrain));
+        }
+        return compared;
     }
 
     /** An older word for the topographic factor is kept. */

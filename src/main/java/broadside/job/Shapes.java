@@ -90,6 +90,12 @@ public final class Shapes {
         Field.numberOrQuantity("value", "a plain number, or text with its unit").needed(),
         Field.text("reason", "why").needed()));
 
+    static final Shape COMPARED = new Shape("compared", List.of(
+        Field.text("code", "key of a wind code").needed(),
+        Field.text("edition", "edition of the code").needed(),
+        Field.quantity("basic-speed", SPEED, "basic wind speed of this place as that code defines it"),
+        Field.text("terrain", "terrain class of that code")));
+
     /** Texts of the head of a job. */
     public static final List<Field> HEADER = List.of(
         Field.text("title", "name of the job"),
@@ -126,6 +132,7 @@ public final class Shapes {
         fields.add(Field.object("site", SITE, "where it stands").needed());
         fields.add(Field.list("items", new Shape("item", List.of()), "what stands in the wind").needed());
         fields.add(Field.list("overrides", OVERRIDE, "values set in place of calculated ones"));
+        fields.add(Field.list("comparison", COMPARED, "speeds and terrains for single codes of the comparison side by side"));
         return new Shape("job", fields);
     }
 

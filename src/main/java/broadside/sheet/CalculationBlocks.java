@@ -18,6 +18,8 @@ import broadside.trace.Step;
 import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.function.Function;
 
 /** The calculation of one item: what was given, one line to redo by hand, the balance, and every recorded step. */
 final class CalculationBlocks {
@@ -37,22 +39,30 @@ final class CalculationBlocks {
         blocks.add(new Paragraph("Values are in SI with four figures; what was calculated was not rounded. The status says how well the source is known: read means seen in print, in the code "
             + "or in a guide or national copy that the note of the table names; second-hand means seen quoted, or in another edition.",
             Tone.SMALL));
-        blocks.add(steps(item, format));
+        steps(item.sheet(), format, step -> CheckList.part(item.item(), step)).ifPresent(blocks::add);
         return blocks;
     }
 
-    /** The governing moment, written out. */
+    /** The governing load, written out. */
     private static String handCheck(Trace sheet, Loads loads, Format format) {
         CaseAction c = loads.governs("base-moment");
+        String suffix = c.name() + (c.state().isEmpty() ? "" : "/" + c.state());
         int step = 1;
         for (Step each : sheet.steps()) {
-            if (each.name().equals("force/" + c.name())) {
+            if (each.name().equals("force/" + suffix)) {
                 break;
             }
             step++;
         }
-        return "Moment at the ground line, " + Format.caseWords(c.name()) + Format.end(c) + ": force times height = " + both(c.force(), "N", format) + " x "
-            + both(c.height(), "m", format) + " = " + both(c.baseMoment(), "N m", format) + ". Pressure times area gives the force: see step " + step + ".";
+        String pressure = "Pressure times area gives the force: see step " + step + ".";
+        return switch (loads.foot()) {
+            case NONE -> "Force of " + CaseTables.name(c) + ": " + both(c.force(), "N", format) + ". " + pressure;
+            case WALL -> "Moment at the wall, " + CaseTables.name(c) + Format.end(c) + ": force times its distance from the wall = " + both(c.force(), "N", format)
+                + " x " + both(c.side(), "m", format) + " = " + both(c.baseMoment(), "N m", format) + ". " + pressure;
+            case GROUND -> "Moment at the ground line, " + CaseTables.name(c) + Format.end(c) + ": force times height = " + both(c.force(), "N", format) + " x "
+                + both(c.height(), "m", format) + " = " + sheet.find("panel-moment/" + suffix).map(s -> both(s.value(), "N m", format) + ", and with the wind on the posts "
+                    + both(c.baseMoment(), "N m", format)).orElseGet(() -> both(c.baseMoment(), "N m", format)) + ". " + pressure;
+        };
     }
 
     private static String both(double si, String unit, Format format) {
@@ -77,16 +87,17 @@ final class CalculationBlocks {
         return symbol.replace("_", "").replace("{", "").replace("}", "");
     }
 
-    private static Steps steps(ItemResult item, Format format) {
+    /** Every recorded step; {@code part} says what it belongs to. Nothing when there are none. */
+    static Optional<Steps> steps(Trace sheet, Format format, Function<Step, String> part) {
         List<StepLine> lines = new ArrayList<>();
         int number = 0;
-        for (Step step : item.sheet().steps()) {
+        for (Step step : sheet.steps()) {
             Shown shown = shown(step.value(), step.unit());
             String formula = step.way() == Step.Way.RELATION ? "= " + step.formula() : step.formula();
-            lines.add(new StepLine(++number, step.name(), step.symbol(), step.meaning() + CheckList.part(item.item(), step), formula, numbers(step), shown.number(), shown.unit(),
+            lines.add(new StepLine(++number, step.name(), step.symbol(), step.meaning() + part.apply(step), formula, numbers(step), shown.number(), shown.unit(),
                 format.other(step.value(), step.unit()), step.place(), step.status().shown() + "; " + step.name()));
         }
-        return new Steps(lines);
+        return lines.isEmpty() ? Optional.empty() : Optional.of(new Steps(lines));
     }
 
     /** The values put in; a step that only takes over one value needs no line for it. */

@@ -4,7 +4,11 @@ import broadside.assess.Assessment;
 import broadside.assess.ItemResult;
 import broadside.assess.Job;
 import broadside.assess.Note;
+import broadside.panel.BannerFence;
+import broadside.panel.FacadePanel;
 import broadside.panel.Item;
+import broadside.panel.Panel;
+import broadside.panel.PostSign;
 import broadside.sheet.Block.Fact;
 import broadside.sheet.Block.Facts;
 import broadside.sheet.Block.Heading;
@@ -116,16 +120,18 @@ final class CheckList {
             + ", for loads at " + assessment.code().level(site).name() + " level");
         fact("Return period", site.returnPeriod().map(p -> p.typed()).orElse("as the code's basic speed"));
         fact("Risk category", site.options().word("risk-category").orElse(""));
-        fact("Terrain or exposure", site.ground().terrain() + " in every direction" + assessment.code().terms().terrains().stream()
+        fact("Terrain or exposure", (site.ground().unknown().contains(Site.Unknown.TERRAIN) ? "not known, so the smoothest was taken: " : "") + site.ground().terrain() + " in every direction" + assessment.code().terms().terrains().stream()
             .filter(t -> t.name().equals(site.ground().terrain()) && !t.meaning().isEmpty()).map(t -> ": " + t.meaning()).findFirst().orElse(""));
         fact("Reason for it", job.head("terrain-reason").orElse(""));
-        fact("Topography", site.ground().topography().map(g -> g.feature().word() + ", height " + g.height().typed() + ", upwind slope "
+        fact("Topography", site.ground().shapeUnknown() ? "not known: the worst value of the code was taken" : site.ground().topography().map(g -> g.feature().word() + ", height " + g.height().typed() + ", upwind slope "
             + g.upwindLength().typed() + " long, site " + g.distanceFromCrest().typed() + " from the crest").orElse("none given, taken as flat"));
         fact("Altitude", site.ground().altitude().map(a -> a.typed()).orElse(""));
         fact("Air density", site.options().quantities().containsKey("air-density") ? site.options().quantities().get("air-density").typed() : "by the code");
         fact("Directionality", "by the code; see the calculation");
         fact("Shelter", "none counted");
-        fact("Season or duration", site.options().number("season-factor").map(f -> "season factor " + format.plain(f)).orElse("none: the whole year"));
+        fact("Season or duration", site.options().number("season-factor").map(f -> "season factor " + format.plain(f)).orElse(site.options().word("season").orElse("none: the whole year")));
+        fact("How long it stands", Optional.ofNullable(site.options().quantities().get("stands-for")).map(q -> q.typed()).orElse("")
+            + (site.options().word("duration-rule").isPresent() ? ", by the code's rule for a short stay" : ""));
         fact("Authority's least pressure", site.authorityMinimum().map(m -> m.pressure().typed()).orElse(""));
         group("4 Site and code");
     }
@@ -136,7 +142,7 @@ final class CheckList {
                 facts.add(Fact.of(step.meaning() + part(item.item(), step), format.plain(step.value()), step.place() + "; " + CalculationBlocks.plainSymbol(step.formula())));
             }
         }
-        fact("Internal pressure", "none: a free-standing panel");
+        fact("Internal pressure", item.item() instanceof FacadePanel facade && facade.backing() == FacadePanel.Backing.SKIN ? "counted; see the calculation" : "none");
         fact("Load cases", item.loads().map(l -> String.join(", ", l.cases().stream().map(c -> Format.caseName(c.name())).distinct().toList())).orElse("none"));
         fact("Wind directions", "front and back, and from both ends");
         group("5 Coefficients, " + item.item().mark());
@@ -201,10 +207,16 @@ final class CheckList {
         group("12 Inspection and maintenance");
     }
 
-    /** The panel that a step belongs to, behind a comma, where the item has several. */
+    /** The panel or arrangement that a step belongs to, behind a comma, where the item has several. */
     static String part(Item item, Step step) {
-        return item.panels().stream().map(p -> p.part()).filter(p -> !p.isEmpty() && step.name().endsWith("/" + p)).findFirst()
-            .map(p -> ", " + p).orElse(step.name().endsWith("/gates-shut") ? ", gates shut" : "");
+        String name = step.name();
+        for (Panel panel : item.panels()) {
+            if (!panel.part().isEmpty() && name.endsWith("/" + panel.part())) {
+                return ", " + panel.part();
+            }
+        }
+        return name.endsWith("/gates-shut") ? ", gates shut" : name.contains("/" + PostSign.ENVELOPE) ? ", boards as one" : name.endsWith("/" + BannerFence.BARE) ? ", bare fence"
+            : name.endsWith("/" + PostSign.REPLACED) ? ", old board" : "";
     }
 
     private static String join(String a, String b) {

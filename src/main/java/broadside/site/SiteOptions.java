@@ -1,6 +1,7 @@
 package broadside.site;
 
 import broadside.quantity.Quantity;
+import java.util.HashMap;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
@@ -28,6 +29,19 @@ public record SiteOptions(Map<String, Double> numbers, Map<String, Quantity> qua
 
     public Optional<String> word(String name) {
         return Optional.ofNullable(words.get(name));
+    }
+
+    /** The same values but for some names. */
+    public SiteOptions without(String... names) {
+        Map<String, Double> n = new HashMap<>(numbers);
+        Map<String, Quantity> q = new HashMap<>(quantities);
+        Map<String, String> w = new HashMap<>(words);
+        for (String name : names) {
+            n.remove(name);
+            q.remove(name);
+            w.remove(name);
+        }
+        return new SiteOptions(n, q, w);
     }
 
     /** The names of all values given. */

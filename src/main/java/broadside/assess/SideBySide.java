@@ -1,0 +1,146 @@
+package broadside.assess;
+
+import broadside.action.CaseAction;
+import broadside.codes.CodeLibrary;
+import broadside.codes.WindCode;
+import broadside.panel.Item;
+import broadside.panel.Panel;
+import broadside.quantity.Speed;
+import broadside.site.Averaging;
+import broadside.site.Site;
+import broadside.site.SiteOptions;
+import broadside.site.SpeedConversion;
+import broadside.table.Rows;
+import broadside.trace.Status;
+import broadside.trace.Trace;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * Works out one item by every code. The basic speed of the job is brought to the wind of 50 years by the law of its own
+ * code and to the averaging time of the other code by the ratios after Durst; a speed typed for a code comes first.
+ */
+final class SideBySide {
+
+    private final Assessor assessor;
+    private final CodeLibrary codes;
+    private final SpeedConversion conversion;
+    private final Rows terrains;
+
+    SideBySide(Assessor assessor, SpeedConversion conversion, Rows terrains) {
+        this.assessor = assessor;
+        this.codes = assessor.codes();
+        this.conversion = conversion;
+        this.terrains = terrains;
+    }
+
+    Comparison of(Job job, Item item) {
+        List<String> keys = new ArrayList<>(List.of(job.basis().key()));
+        codes.editions().stream().filter(k -> !keys.contains(k)).forEach(keys::add);
+        WindCode own = codes.code(job.basis().key()).orElseThrow();
+        List<Comparison.Line> lines = new ArrayList<>();
+        for (String key : keys) {
+            lines.add(line(job, item, own, key));
+        }
+        return new Comparison(item, lines);
+    }
+
+    private Comparison.Line line(Job job, Item item, WindCode own, String key) {
+        WindCode code = codes.code(key).orElseThrow();
+        boolean chosen = key.equals(job.basis().key());
+        Optional<Job.Compared> typed = job.compared().stream().filter(c -> c.key().equals(key)).findFirst();
+        Trace steps = new Trace();
+        double speed = chosen ? fifty(job.site(), own, steps) : typed.flatMap(Job.Compared::speed)
+            .map(s -> fifty(bare(job.site(), s, code, "", SiteOptions.NONE), code, steps)).orElseGet(() -> converted(job.site(), own, code, steps));
+        String terrain = chosen ? job.site().ground().terrain() : typed.flatMap(Job.Compared::terrain).orElseGet(() -> match(job.site(), own, code));
+        SiteOptions options = chosen ? job.site().options() : SiteOptions.NONE;
+        Speed used = new Speed(speed, String.format(Locale.ROOT, "%.4g m/s", speed));
+        Site site = bare(job.site(), used, code, terrain, options.without("risk-category", "regional-speed", "region", "wind-zone"));
+        Job.Basis basis = chosen ? job.basis() : new Job.Basis(key.substring(0, key.indexOf('/')), key.substring(key.indexOf('/') + 1), Optional.empty(), Optional.empty());
+        Job other = new Job(Map.of(), basis, site, List.of(item), job.remarks(), List.of(), List.of());
+        ItemResult result = assessor.assess(other).items().get(0);
+        String how = how(chosen, typed, own, code);
+        return new Comparison.Line(key, code.edition().property("title"), chosen, code.edition().hasProperty("no-code"), speed, terrain, how,
+            result.loads().map(l -> found(item, l, result.sheet())), result.refusal(), code.edition().hasProperty("differs") ? code.edition().property("differs") : "",
+            steps);
+    }
+
+    /** The basic speed of a site brought to the wind of 50 years, m/s. */
+    private static double fifty(Site site, WindCode code, Trace steps) {
+        double v = steps.given("V_1", "basic wind speed, " + site.averaging().words(), site.basicSpeed().metresPerSecond(), "m/s", site.basicSpeed().typed());
+        double k = code.fiftyYearRatio(site, steps);
+        return steps.line("fifty-year-speed", "V_{50}", "wind passed once in 50 years, " + site.averaging().words()).in("k_{50}", k).in("V_1", v, "m/s")
+            .from("as above", Status.DERIVED).gives("k_{50} V_1", k * v, "m/s");
+    }
+
+    private double converted(Site site, WindCode own, WindCode code, Trace steps) {
+        double v50 = fifty(site, own, steps);
+        Averaging from = site.averaging();
+        Averaging to = code.terms().averaging();
+        if (same(from, to)) {
+            return v50;
+        }
+        return conversion.convert(new Speed(v50, ""), from == Averaging.GUST_0_2_S ? Averaging.GUST_3_S : from, to == Averaging.GUST_0_2_S ? Averaging.GUST_3_S : to, steps);
+    }
+
+    /** The gust that one code calls 0.2 s is the number that was called a 3 s gust before: it is not converted. */
+    private static boolean same(Averaging a, Averaging b) {
+        return a == b || a.seconds() <= 3 && b.seconds() <= 3 && a.seconds() != 1 && b.seconds() != 1;
+    }
+
+    private static Site bare(Site site, Speed speed, WindCode code, String terrain, SiteOptions options) {
+        Site.Ground ground = new Site.Ground(terrain, site.ground().altitude(), site.ground().topography(), site.ground().unknown());
+        return new Site(site.name(), speed, code.terms().averaging(), Optional.empty(), ground, Optional.empty(), options);
+    }
+
+    /** The class of the other code that stands for about the same ground. */
+    private String match(Site site, WindCode own, WindCode code) {
+        String column = family(own);
+        String terrain = site.ground().terrain();
+        String best = terrains.keys().get(0);
+        for (String ground : terrains.keys()) {
+            String there = terrains.text(ground, column);
+            if (there.equals(terrain) || number(there) >= 0 && number(there) <= number(terrain)) {
+                best = ground;
+                if (there.equals(terrain)) {
+                    break;
+                }
+            }
+        }
+        return terrains.text(best, family(code));
+    }
+
+    private static String family(WindCode code) {
+        return code.edition().key().substring(0, code.edition().key().indexOf('/'));
+    }
+
+    /** A class that is a number or a length, so that a class between two printed ones finds the smoother; -1 for a letter. */
+    private static double number(String terrain) {
+        String digits = terrain.replace(" m", "");
+        return digits.chars().allMatch(c -> Character.isDigit(c) || c == '.') && !digits.isEmpty() ? Double.parseDouble(digits) : -1;
+    }
+
+    private static String how(boolean chosen, Optional<Job.Compared> typed, WindCode own, WindCode code) {
+        if (chosen) {
+            return "the speed of this job, brought to 50 years";
+        }
+        if (typed.flatMap(Job.Compared::speed).isPresent()) {
+            return "a speed typed for this code, brought to 50 years";
+        }
+        return same(own.terms().averaging(), code.terms().averaging()) ? "the same 50-year wind" : "the same 50-year wind, from a " + own.terms().averaging().words()
+            + " to a " + code.terms().averaging().words() + " after Durst";
+    }
+
+    private static Comparison.Found found(Item item, Loads loads, Trace sheet) {
+        CaseAction governing = loads.cases().stream().filter(c -> c.state().isEmpty()).max(java.util.Comparator.comparingDouble(CaseAction::force)).orElseThrow();
+        double area = item.panels().stream().mapToDouble(Panel::area).sum();
+        double greatest = loads.cases().stream().filter(c -> c.state().isEmpty()).flatMap(c -> c.zones().stream()).flatMap(z -> z.zones().stream())
+            .mapToDouble(z -> Math.abs(z.pressure())).max().orElse(0);
+        long recalled = sheet.steps().stream().filter(s -> s.status() == Status.RECALLED).count();
+        return new Comparison.Found(loads.velocity().pressure(), governing.force() / area, greatest, governing.force(),
+            loads.governs("base-moment").baseMoment(), (double) recalled / sheet.steps().size());
+    }
+}

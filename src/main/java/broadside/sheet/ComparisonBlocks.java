@@ -1,0 +1,180 @@
+package broadside.sheet;
+
+import broadside.assess.Assessment;
+import broadside.assess.Assessor;
+import broadside.assess.Comparison.Found;
+import broadside.assess.Comparison.Line;
+import broadside.assess.Comparison;
+import broadside.assess.ItemResult;
+import broadside.assess.Job;
+import broadside.panel.Item;
+import broadside.quantity.Dimension;
+import broadside.quantity.Rounding;
+import broadside.quantity.Show;
+import broadside.sheet.Block.Answer;
+import broadside.sheet.Block.Column;
+import broadside.sheet.Block.Fact;
+import broadside.sheet.Block.Heading;
+import broadside.sheet.Block.Notes;
+import broadside.sheet.Block.Paragraph;
+import broadside.sheet.Block.Picture;
+import broadside.sheet.Block.Row;
+import broadside.sheet.Block.Steps;
+import broadside.sheet.Block.Table;
+import broadside.sheet.Block.Tone;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+
+/** The document "side by side": one item by every code, with the spread and why the codes differ. */
+public final class ComparisonBlocks {
+
+    private static final String METHOD = "Every code is given the wind that is passed once in 50 years, so that all loads stand at one level: characteristic, before any partial or load "
+        + "factor. From a 10 minute mean to a gust the speed is converted by the ratios after Durst for open country; other sources give 1.43 to 1.66 for the ratio of the 3 s gust to the 10 "
+        + "minute mean, against 1.46 here, so a converted pressure is uncertain by about 25 % either way. A speed of the place as each code defines it is better: it can be typed for each code.";
+
+    private final Format format;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private ComparisonBlocks(Format format) {
+        this.format = format;
+    }
+
+    /** The document of one item. */
+    public static Sheet sheet(Assessor assessor, Assessment assessment, Item item, String date) {
+        Job job = assessment.job();
+        Format format = new Format(Format.unitsOf(job));
+        String title = job.head("title").map(t -> t + ", side by side").orElse("Side by side");
+        List<Block> blocks = new ArrayList<>();
+        blocks.add(new Heading(1, title, "top"));
+        blocks.add(new Paragraph(SheetMaker.PRELIMINARY + ". The local building code, the authority and the engineer of record decide. Wind can kill: a sign, fence or "
+            + "panel that comes loose is dangerous far below design speed.", Tone.CAUTION));
+        blocks.addAll(of(assessor.sideBySide(job, item), format, job.items().size() > 1, "side-"));
+        return new Sheet(title, job.head("reference").orElse("not given"), job.head("revision").orElse("not given"), job.head("date").orElse(date),
+            SheetMaker.PRELIMINARY, assessment.about().line(), blocks);
+    }
+
+    /** A document with the comparison of every item behind it, each on a new page. */
+    public static Sheet behind(Sheet sheet, Assessor assessor, Assessment assessment) {
+        Format format = new Format(Format.unitsOf(assessment.job()));
+        List<Block> blocks = new ArrayList<>(sheet.blocks());
+        List<Item> items = assessment.job().items();
+        for (int i = 0; i < items.size(); i++) {
+            blocks.add(new Block.NewPage());
+            blocks.addAll(of(assessor.sideBySide(assessment.job(), items.get(i)), format, items.size() > 1, "side-" + (i + 1) + "-"));
+        }
+        return new Sheet(sheet.title(), sheet.reference(), sheet.revision(), sheet.date(), sheet.caution(), sheet.made(), blocks);
+    }
+
+    /** The blocks of one comparison. */
+    static List<Block> of(Comparison comparison, Format format, boolean many, String anchor) {
+        ComparisonBlocks made = new ComparisonBlocks(format);
+        made.answer(comparison, many, anchor);
+        made.table(comparison, anchor);
+        made.why(comparison, anchor);
+        made.conversion(comparison, anchor);
+        return made.blocks;
+    }
+
+    private void answer(Comparison comparison, boolean many, String anchor) {
+        blocks.add(new Heading(2, many ? "What the codes say, " + comparison.item().mark() : "What the codes say", anchor + "answer"));
+        List<Line> codes = comparison.codes();
+        if (codes.isEmpty()) {
+            blocks.add(new Answer(List.of(Fact.of("Codes", "no code covers this item", "see the reasons below"))));
+            return;
+        }
+        Line most = codes.stream().max(Comparator.comparingDouble(ComparisonBlocks::pressure)).orElseThrow();
+        Line least = codes.stream().min(Comparator.comparingDouble(ComparisonBlocks::pressure)).orElseThrow();
+        List<Fact> facts = new ArrayList<>();
+        facts.add(Fact.of("Wind pressure, mean over the panel", codes.size() == 1 ? nearest(most) : nearest(least) + " to " + nearest(most),
+            codes.size() == 1 ? most.title() : "smallest " + least.title() + ", largest " + most.title()));
+        comparison.spread().ifPresent(s -> facts.add(Fact.of("How far apart", "the largest is " + Show.number(s, 3, Rounding.NEAREST) + " times the smallest",
+            codes.size() + " editions cover this item")));
+        comparison.lines().stream().filter(l -> l.chosen() && l.found().isPresent()).findFirst().ifPresent(l -> facts.add(Fact.of("The code of this job", nearest(l), l.title())));
+        comparison.plain().ifPresent(l -> facts.add(Fact.of("Plain fluid mechanics", nearest(l), "no code: the independent check")));
+        blocks.add(new Answer(facts));
+        blocks.add(new Picture(ComparisonDrawing.of(comparison, format), "Mean wind pressure on the panel, 50-year wind, characteristic. A full dot is a code, the ring is plain fluid "
+            + "mechanics; the larger dot is the code of this job.", "Pressures: " + String.join("; ", comparison.lines().stream().filter(l -> l.found().isPresent())
+            .map(l -> l.title() + " " + nearest(l)).toList()) + "."));
+    }
+
+    private static double pressure(Line line) {
+        return line.found().orElseThrow().pressure();
+    }
+
+    private String nearest(Line line) {
+        return format.nearest(pressure(line), Dimension.PRESSURE);
+    }
+
+    private void table(Comparison comparison, String anchor) {
+        blocks.add(new Heading(2, "Line by line", anchor + "lines"));
+        List<Row> rows = new ArrayList<>();
+        for (Line line : comparison.lines()) {
+            rows.add(line.found().map(f -> row(line, f)).orElseGet(() -> new Row(List.of(line.title(), line.terrain(), speed(line), "-", "-", "not covered", "-", "-"), false)));
+        }
+        blocks.add(new Table("Loads by each code, 50-year wind, characteristic", List.of(new Column("Code", false, 6), new Column("Terrain", false, 3),
+            new Column("Basic speed", true, 3), new Column("Velocity pressure", true, 3), new Column("All factors together", true, 3),
+            new Column("Mean pressure", true, 3), new Column("Greatest of any zone", true, 3), new Column("Force", true, 3)), rows));
+        List<String> refused = comparison.lines().stream().filter(l -> l.found().isEmpty()).map(l -> l.title() + ": " + l.refusal().map(ComparisonBlocks::reason)
+            .orElse("no result")).toList();
+        if (!refused.isEmpty()) {
+            blocks.add(new Notes(refused));
+        }
+    }
+
+    private static String reason(ItemResult.Refusal refusal) {
+        return refusal.ofScope() ? ItemResult.OUTSIDE + ": " + refusal.reason() : refusal.clause() + ": " + refusal.reason();
+    }
+
+    private Row row(Line line, Found found) {
+        return new Row(List.of(line.title() + (line.chosen() ? " (this job)" : ""), line.terrain(), speed(line), format.pressure(found.velocity()),
+            format.plain(found.coefficient()), format.pressure(found.pressure()), format.pressure(found.greatest()), format.force(found.force())), line.chosen());
+    }
+
+    private String speed(Line line) {
+        return Show.of(line.speed(), Dimension.SPEED, format.units(), 3, Rounding.NEAREST).text();
+    }
+
+    private void why(Comparison comparison, String anchor) {
+        if (comparison.codes().isEmpty()) {
+            return;
+        }
+        blocks.add(new Heading(2, "Why they differ", anchor + "why"));
+        double velocity = median(comparison.codes().stream().map(l -> l.found().orElseThrow().velocity()).toList());
+        double factor = median(comparison.codes().stream().map(l -> l.found().orElseThrow().coefficient()).toList());
+        List<String> sentences = new ArrayList<>();
+        for (Line line : comparison.lines()) {
+            line.found().ifPresent(f -> sentences.add(line.title() + ": velocity pressure " + off(f.velocity(), velocity) + ", everything else together "
+                + off(f.coefficient(), factor) + " the middle of the codes." + (line.why().isEmpty() ? "" : " " + line.why())
+                + (f.recalled() > 0 ? " " + Math.round(f.recalled() * 100) + " % of its steps rest on figures not yet checked against print." : "")));
+        }
+        blocks.add(new Notes(sentences));
+    }
+
+    private static String off(double value, double middle) {
+        long percent = Math.round((value / middle - 1) * 100);
+        return percent == 0 ? "at" : Math.abs(percent) + " % " + (percent > 0 ? "above" : "below");
+    }
+
+    private static double median(List<Double> values) {
+        List<Double> sorted = values.stream().sorted().toList();
+        int n = sorted.size();
+        return n % 2 == 1 ? sorted.get(n / 2) : (sorted.get(n / 2 - 1) + sorted.get(n / 2)) / 2;
+    }
+
+    private void conversion(Comparison comparison, String anchor) {
+        blocks.add(new Heading(2, "How the speeds were converted", anchor + "speeds"));
+        blocks.add(new Paragraph(METHOD, Tone.PLAIN));
+        blocks.add(new Notes(comparison.lines().stream().map(l -> l.title() + ": " + l.how() + "; " + speed(l) + ", terrain " + l.terrain() + ".").toList()));
+        blocks.add(new Paragraph("Left out of the comparison: the user's own factors, an authority's least pressure, season and duration, risk categories. The classes of terrain were matched "
+            + "by their roughness; hills are counted by each code's own rule.", Tone.SMALL));
+        for (Line line : comparison.lines()) {
+            Optional<Steps> steps = CalculationBlocks.steps(line.steps(), format, step -> "");
+            steps.ifPresent(s -> {
+                blocks.add(new Heading(3, "Speed for " + line.title(), anchor + "speed-" + comparison.lines().indexOf(line)));
+                blocks.add(s);
+            });
+        }
+    }
+}
