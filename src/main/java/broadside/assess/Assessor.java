@@ -36,7 +36,8 @@ public final class Assessor {
         this.stackRule = own.rows("stacks");
         this.scope = new Scope(own.rows("scope"), own.rows("size-limits"));
         this.about = About.of(tables.digest());
-        this.sideBySide = new SideBySide(this, new SpeedConversion(tables.edition("gust-factors/1").orElseThrow().curve("durst")), own.rows("terrain-match"));
+        Edition gusts = tables.edition("gust-factors/1").orElseThrow();
+        this.sideBySide = new SideBySide(this, new SpeedConversion(gusts.curve("durst")), own.rows("terrain-match"), gusts.rows("gust-over-ten-minutes"));
     }
 
     public CodeLibrary codes() {
@@ -113,8 +114,10 @@ public final class Assessor {
         }
     }
 
-    private static ItemResult result(Job job, Item item, WindCode code, Trace sheet, Outcome outcome, Optional<Refusal> refusal, Optional<Loads> loads) {
+    private ItemResult result(Job job, Item item, WindCode code, Trace sheet, Outcome outcome, Optional<Refusal> refusal, Optional<Loads> loads) {
         Outcome told = refusal.filter(Refusal::ofScope).isPresent() ? Outcome.OUTSIDE_SCOPE : outcome;
-        return new ItemResult(item, told, refusal, loads, Notes.of(job, item, code, sheet), sheet);
+        List<Note> notes = new ArrayList<>(scope.size(item).stream().toList());
+        notes.addAll(Notes.of(job, item, code, sheet));
+        return new ItemResult(item, told, refusal, loads, notes, sheet);
     }
 }

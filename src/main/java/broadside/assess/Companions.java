@@ -1,5 +1,6 @@
 package broadside.assess;
 
+import broadside.action.Foot;
 import broadside.codes.Level;
 import broadside.trace.Trace;
 
@@ -11,8 +12,12 @@ final class Companions {
         double f = sheet.line("companion-factor", "f", "from " + level.name() + " to " + level.shown() + " loads: " + level.rule())
             .from(level.place(), level.status()).reads("read in the table of combinations", level.factor(), "1");
         one("companion-base-shear", "F_b", loads.governs("base-shear").baseShear(), "N", f, level, sheet);
-        one("companion-base-moment", "M", loads.governs("base-moment").baseMoment(), "N m", f, level, sheet);
-        one("companion-torsion", "M_T", loads.governs("torsion").torsion(), "N m", f, level, sheet);
+        if (loads.foot() != Foot.NONE) {
+            one("companion-base-moment", loads.foot() == Foot.WALL ? "M_w" : "M", loads.governs("base-moment").baseMoment(), "N m", f, level, sheet);
+        }
+        if (loads.foot() == Foot.GROUND) {
+            one("companion-torsion", "M_T", loads.governs("torsion").torsion(), "N m", f, level, sheet);
+        }
         loads.worstPost().ifPresent(post ->
             one("companion-post-moment", "M_p", post.moment(), "N m", f, level, sheet));
     }

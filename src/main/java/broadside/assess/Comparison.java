@@ -9,8 +9,12 @@ import java.util.Optional;
  * One item by every code, all in the wind that is passed once in 50 years, at characteristic level.
  *
  * @param lines  one for each edition, the chosen one first
+ * @param gust   how the sources differ over the ratio of a gust to a mean
  */
-public record Comparison(Item item, List<Line> lines) {
+public record Comparison(Item item, List<Line> lines, Gust gust) {
+
+    /** Ratio of the 3 s gust to the 10 minute mean: the one used, and the smallest and the largest of other sources. */
+    public record Gust(double used, double smallest, double largest) { }
 
     /**
      * The item by one code.

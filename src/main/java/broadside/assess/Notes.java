@@ -27,9 +27,12 @@ final class Notes {
         notes.site(job.site(), code);
         notes.unused(job.site(), sheet);
         notes.returnPeriod(job.site(), sheet);
+        notes.stay(job.site());
+        notes.leastHeight(job.site(), sheet);
         notes.leastPressures(job.site(), sheet);
         notes.notes.addAll(item.choose(new ItemNotes(job, code, sheet)));
         notes.solidity(job, item, sheet);
+        notes.heldBy(job, item);
         notes.carrying(item);
         notes.statuses(sheet);
         notes.always();
@@ -48,7 +51,14 @@ final class Notes {
     }
 
     private void site(Site site, WindCode code) {
-        if (site.ground().topography().isEmpty() && site.options().number("topographic-factor").isEmpty()) {
+        if (site.ground().unknown().contains(Site.Unknown.TERRAIN)) {
+            add(Note.Kind.ASSUMPTION, "The terrain was not known: class " + site.ground().terrain() + ", the smoothest of the code, is taken, which gives the largest load. "
+                + "Anyone who looks at the place can say which class it is.");
+        }
+        if (site.ground().shapeUnknown()) {
+            add(Note.Kind.CAUTION, "Whether the ground near by is higher or lower was not known: the worst value that the code can give is taken. Height, length and distance of the slope "
+                + "would lower it, or show that there is none.");
+        } else if (site.ground().topography().isEmpty() && site.options().number("topographic-factor").isEmpty()) {
             add(Note.Kind.ASSUMPTION, "The ground is taken as flat: no hill, ridge or escarpment was given. If the ground within 1 km (3300 ft) is higher or lower "
                 + "by more than 10 m (33 ft), the load can be much larger.");
         }
@@ -86,6 +96,33 @@ final class Notes {
                 + (f.value() < 1 ? "lower than that of the code's basic wind. How long a thing stands does not lower the safety that people near it need; the authority "
                     + "decides whether this is allowed." : "higher than that of the code's basic wind."));
         });
+    }
+
+    /** How long it stands, and that a short stay lowers no safety. */
+    private void stay(Site site) {
+        String safety = "How long a thing stands does not lower the safety that people near it need; the authority decides whether this is allowed.";
+        String stay = site.options().quantities().containsKey("stands-for") ? site.options().quantities().get("stands-for").typed() : "";
+        if (site.options().word("duration-rule").isPresent()) {
+            add(Note.Kind.CAUTION, "The code's rule for a short stay" + (stay.isEmpty() ? "" : " of " + stay) + " lowers the wind. " + safety);
+        } else if (!stay.isEmpty()) {
+            add(Note.Kind.ASSUMPTION, "It stands for " + stay + ": this does not lower the loads, which are those of something that stays.");
+        }
+        if (site.options().word("structure-class").filter("temporary"::equals).isPresent()) {
+            add(Note.Kind.CAUTION, "The class for temporary structures lowers the wind. " + safety);
+        }
+        if (site.options().word("season").isPresent() || site.options().number("season-factor").filter(f -> f < 1).isPresent()) {
+            add(Note.Kind.CAUTION, "A season lowers the wind: it holds for those months only. What is moved and used again through the year gets none. " + safety);
+        }
+    }
+
+    /** A class of terrain that lifts the item to the least height of its profile, so that the choice of class decides. */
+    private void leastHeight(Site site, Trace sheet) {
+        boolean below = sheet.steps().stream().filter(s -> s.name().startsWith("profile-height")).anyMatch(s -> s.inputs().size() == 2
+            && s.value() > s.inputs().get(0).value() * (1 + 1e-9));
+        if (below) {
+            add(Note.Kind.CAUTION, "In terrain " + site.ground().terrain() + " the item stands below the least height of the wind profile: the choice of class sets everything. If there is open "
+                + "ground near by on the windward side, take the smoother class.");
+        }
     }
 
     private static boolean uses(Trace sheet, String step) {
@@ -126,6 +163,13 @@ final class Notes {
             }
             add(Note.Kind.CAUTION, "The solidity was given by " + job.remark(item.mark(), "solidity-by").orElse("an unnamed source")
                 + ". A printer's figure for a mesh is not an aerodynamic one.");
+        }
+    }
+
+    private void heldBy(Job job, Item item) {
+        if (job.remark(item.mark(), "held-by").isEmpty()) {
+            add(Note.Kind.ASSUMPTION, "What it is fixed to was not said: it is taken to stand by itself, on supports made for it. Anything fixed to an old post, a wall, a fence, a parapet, a "
+                + "lamp column, a scaffold, a tree or a roof is outside the scope of this tool.");
         }
     }
 

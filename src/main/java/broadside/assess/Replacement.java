@@ -30,15 +30,22 @@ final class Replacement {
         List<CaseAction> before = FootActions.of(List.of(new PanelCases(old, code.netPressures(old, job.site(), part))), code.symbols(),
             new Standing(PostSign.REPLACED, Foot.GROUND, List.of()), part).cases();
         Map<String, CaseAction> governed = ItemLoads.governing(before);
-        double area = sheet.line("replacement-ratio/area", "r_A", "area of the new boards over that of the old one")
-            .in("A_{new}", sign.panels().stream().mapToDouble(Panel::area).sum(), "m²").in("A_{old}", old.area(), "m²")
-            .from("statics", Status.DERIVED).gives("A_{new} / A_{old}", sign.panels().stream().mapToDouble(Panel::area).sum() / old.area(), "1");
-        double after = governing.get("base-moment").baseMoment();
-        double then = governed.get("base-moment").baseMoment();
-        double ratio = sheet.line("replacement-ratio/moment", "r_M", "moment at the ground with the new boards over that with the old one")
-            .in("M_{new}", after, "N m").in("M_{old}", then, "N m").from("statics", Status.DERIVED).gives("M_{new} / M_{old}", after / then, "1");
+        double newArea = sheet.given("A_{new}", "area of the new boards", sign.panels().stream().mapToDouble(Panel::area).sum(), "m²", "");
+        double oldArea = sheet.given("A_{old}", "area of the old board", old.area(), "m²", "");
+        double area = line(sheet, "area", "r_A", "area of the new boards over that of the old one").in("A_{new}", newArea, "m²").in("A_{old}", oldArea, "m²")
+            .gives("A_{new} / A_{old}", newArea / oldArea, "1");
+        double after = line(sheet, "new", "M_{new}", "governing moment at the ground with the new boards").in("M", governing.get("base-moment").baseMoment(), "N m")
+            .gives("M", governing.get("base-moment").baseMoment(), "N m");
+        double then = line(sheet, "old", "M_{old}", "governing moment at the ground with the old board").in("M", governed.get("base-moment").baseMoment(), "N m")
+            .gives("M", governed.get("base-moment").baseMoment(), "N m");
+        double ratio = line(sheet, "moment", "r_M", "moment at the ground with the new boards over that with the old one").in("M_{new}", after, "N m")
+            .in("M_{old}", then, "N m").gives("M_{new} / M_{old}", after / then, "1");
         return List.of(new Reaction("replacement-ratio/area", "Area of the new sign over that of the old one", area, "1", ""),
             new Reaction("replacement-ratio/moment", "Moment at the ground, new sign over old one", ratio, "1", governing.get("base-moment").name()));
+    }
+
+    private static Trace.Line line(Trace sheet, String what, String symbol, String meaning) {
+        return sheet.line("replacement-ratio/" + what, symbol, meaning).from("statics", Status.DERIVED);
     }
 
     private Replacement() { }

@@ -29,12 +29,15 @@ final class SideBySide {
     private final CodeLibrary codes;
     private final SpeedConversion conversion;
     private final Rows terrains;
+    private final Comparison.Gust gust;
 
-    SideBySide(Assessor assessor, SpeedConversion conversion, Rows terrains) {
+    SideBySide(Assessor assessor, SpeedConversion conversion, Rows terrains, Rows gusts) {
         this.assessor = assessor;
         this.codes = assessor.codes();
         this.conversion = conversion;
         this.terrains = terrains;
+        double used = conversion.convert(Speed.metresPerSecond(1), Averaging.MEAN_10_MIN, Averaging.GUST_3_S, new Trace());
+        this.gust = new Comparison.Gust(used, gusts.number("smallest", "ratio").value(), gusts.number("largest", "ratio").value());
     }
 
     Comparison of(Job job, Item item) {
@@ -45,7 +48,7 @@ final class SideBySide {
         for (String key : keys) {
             lines.add(line(job, item, own, key));
         }
-        return new Comparison(item, lines);
+        return new Comparison(item, lines, gust);
     }
 
     private Comparison.Line line(Job job, Item item, WindCode own, String key) {

@@ -50,10 +50,12 @@ public interface WindCode {
 
     /**
      * The pressure on which the force coefficient of a slender member or of the edge of a panel is put, Pa: the velocity
-     * pressure at the height, with the factors that this code gives to every force.
+     * pressure at the height, with the factors that this code gives to every force. Recorded as "member-pressure", symbol q_m.
      */
     default double memberPressure(Site site, double height, Trace trace) {
-        return velocityPressure(site, height, trace);
+        double q = velocityPressure(site, height, trace);
+        return trace.line("member-pressure", "q_m", "pressure on a slender member: the velocity pressure").in(facts().pressure(), q, "Pa")
+            .from("as above", Status.DERIVED).gives(facts().pressure(), q, "Pa");
     }
 
     /** The rule of this code for the wind on posts, where it has one. */

@@ -2,6 +2,7 @@ package broadside.job;
 
 import broadside.action.CaseAction.PanelZones;
 import broadside.action.CaseAction;
+import broadside.action.Foot;
 import broadside.action.PostAction;
 import broadside.assess.Assessment;
 import broadside.assess.ItemResult;
@@ -12,6 +13,7 @@ import broadside.trace.OwnValue;
 import broadside.trace.Step;
 import broadside.trace.Trace;
 import java.util.List;
+import java.util.Locale;
 import tools.jackson.databind.JsonNode;
 import tools.jackson.databind.node.ArrayNode;
 import tools.jackson.databind.node.ObjectNode;
@@ -58,10 +60,15 @@ public final class ResultText {
         ArrayNode cases = node.putArray("cases");
         List<CaseAction> companions = loads.companion().cases();
         for (int i = 0; i < loads.cases().size(); i++) {
-            caseOf(cases.addObject(), loads.cases().get(i), companions.get(i), level);
+            caseOf(cases.addObject(), loads.cases().get(i), companions.get(i), loads);
         }
         ObjectNode governing = node.putObject("governing");
         loads.governingNames().forEach(governing::put);
+        loads.governing().forEach((quantity, action) -> {
+            if (!action.state().isEmpty()) {
+                governing.put(quantity + "-state", action.state());
+            }
+        });
         node.putObject("companion").put("level", level.companion()).put("factor", level.factor()).put("rule", level.rule());
         ArrayNode posts = node.putArray("posts");
         loads.posts().forEach(p -> post(posts.addObject(), p, level));
@@ -80,12 +87,13 @@ public final class ResultText {
             .put("unit", b.unit()));
     }
 
-    private static void caseOf(ObjectNode node, CaseAction action, CaseAction companion, Level level) {
+    private static void caseOf(ObjectNode node, CaseAction action, CaseAction companion, Loads loads) {
+        Level level = loads.level();
         if (!action.state().isEmpty()) {
             node.put("state", action.state());
         }
         node.put("case", action.name()).put("label", action.label()).put("direction", action.direction())
-            .put("windward-end", action.windward().name().toLowerCase(java.util.Locale.ROOT)).put("level", level.name());
+            .put("windward-end", action.windward().name().toLowerCase(Locale.ROOT)).put("level", level.name());
         ArrayNode zones = node.putArray("zones");
         for (PanelZones panel : action.zones()) {
             for (ZonePressure zone : panel.zones()) {
@@ -96,10 +104,20 @@ public final class ResultText {
                 each.put("from_m", zone.from()).put("to_m", zone.to()).put("coefficient", zone.coefficient()).put("pressure_Pa", zone.pressure());
             }
         }
-        node.put("force_N", action.force()).put("height_m", action.height()).put("side_m", action.side()).put("base_shear_N", action.baseShear())
-            .put("base_moment_Nm", action.baseMoment()).put("torsion_Nm", action.torsion());
-        node.putObject("companion").put("level", level.companion()).put("force_N", companion.force())
-            .put("base_shear_N", companion.baseShear()).put("base_moment_Nm", companion.baseMoment()).put("torsion_Nm", companion.torsion());
+        node.put("force_N", action.force()).put("height_m", action.height()).put("side_m", action.side());
+        foot(node, action, loads.foot());
+        foot(node.putObject("companion").put("level", level.companion()).put("force_N", companion.force()), companion, loads.foot());
+    }
+
+    /** What the foot takes; an item without a foot has no moment, and one on brackets no torsion. */
+    private static void foot(ObjectNode node, CaseAction action, Foot foot) {
+        node.put("base_shear_N", action.baseShear());
+        if (foot != Foot.NONE) {
+            node.put("base_moment_Nm", action.baseMoment());
+        }
+        if (foot == Foot.GROUND) {
+            node.put("torsion_Nm", action.torsion());
+        }
     }
 
     private static void post(ObjectNode node, PostAction post, Level level) {

@@ -110,6 +110,7 @@ public final class Shapes {
         Field.text("drawing-number", "drawing number"),
         Field.text("date", "date of the job, such as 2026-12-01"),
         Field.text("engineer", "name and licence of the engineer"),
+        Field.text("remarks", "remarks of the person who prepared it"),
         Field.choice("units", "system of units that leads on page and paper", List.of("metric", "us")));
 
     /** The whole job file; the shape of an item follows from its kind. */

@@ -38,16 +38,16 @@ public record BannerFence(String mark, Length panelLength, Length panelHeight, i
     /** The line with its cover. */
     @Override
     public List<Panel> panels() {
-        return List.of(panel("", coverSolidity));
+        return List.of(panel(coverSolidity));
     }
 
     /** The line once the cover is taken down. */
     public Panel bare() {
-        return panel(BARE, fenceSolidity);
+        return panel(fenceSolidity);
     }
 
-    private Panel panel(String part, double solidity) {
-        return new Panel(part, Panel.Kind.WALL, length(), panelHeight.metres(), 0, 0, solidity, 0, 0,
+    private Panel panel(double solidity) {
+        return new Panel("", Panel.Kind.WALL, length(), panelHeight.metres(), 0, 0, solidity, 0, 0,
             new Panel.AsTyped("", panelHeight.typed(), "", ""));
     }
 }

@@ -51,7 +51,7 @@ public record PostSign(String mark, List<Board> boards, Faces faces, Posts posts
 
     /** The old board on the same posts. */
     public Optional<Panel> replacedPanel() {
-        return replaces.map(b -> b.panel(REPLACED));
+        return replaces.map(b -> b.panel(""));
     }
 
     /** Name of a board in steps and tables: its mark where no other board has it, else its number; empty when it is the only one. */

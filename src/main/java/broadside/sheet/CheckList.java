@@ -83,6 +83,7 @@ final class CheckList {
         fact("Date", date);
         head("Prepared by", "prepared-by");
         head("Checked by", "checked-by");
+        head("Remarks", "remarks");
         fact("Engineer, licence, seal", job.head("engineer").orElse(NOT_GIVEN + " (space for the seal is left to the engineer)"));
         fact("Tool and version", "Broadside " + assessment.about().version());
         fact("Tables", assessment.about().tables());

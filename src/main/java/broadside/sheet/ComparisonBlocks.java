@@ -30,10 +30,6 @@ import java.util.Optional;
 /** The document "side by side": one item by every code, with the spread and why the codes differ. */
 public final class ComparisonBlocks {
 
-    private static final String METHOD = "Every code is given the wind that is passed once in 50 years, so that all loads stand at one level: characteristic, before any partial or load "
-        + "factor. From a 10 minute mean to a gust the speed is converted by the ratios after Durst for open country; other sources give 1.43 to 1.66 for the ratio of the 3 s gust to the 10 "
-        + "minute mean, against 1.46 here, so a converted pressure is uncertain by about 25 % either way. A speed of the place as each code defines it is better: it can be typed for each code.";
-
     private final Format format;
     private final List<Block> blocks = new ArrayList<>();
 
@@ -163,9 +159,18 @@ public final class ComparisonBlocks {
         return n % 2 == 1 ? sorted.get(n / 2) : (sorted.get(n / 2 - 1) + sorted.get(n / 2)) / 2;
     }
 
+    private static String method(Comparison.Gust gust) {
+        double more = Math.pow(gust.largest() / gust.used(), 2) - 1;
+        double less = 1 - Math.pow(gust.smallest() / gust.used(), 2);
+        return "Every code is given the wind that is passed once in 50 years, so that all loads stand at one level: characteristic, before any partial or load factor. From a mean to a gust "
+            + "the speed is converted by the ratios after Durst for open country, which give " + Show.number(gust.used(), 3, Rounding.NEAREST) + " for the 3 s gust over the 10 minute mean. Other "
+            + "sources give " + Format.count(gust.smallest()) + " to " + Format.count(gust.largest()) + ": a pressure from a converted speed may be up to " + Math.round(more * 100)
+            + " % larger or " + Math.round(less * 100) + " % smaller than shown. A speed of the place as each code defines it is better: it can be typed for each code.";
+    }
+
     private void conversion(Comparison comparison, String anchor) {
         blocks.add(new Heading(2, "How the speeds were converted", anchor + "speeds"));
-        blocks.add(new Paragraph(METHOD, Tone.PLAIN));
+        blocks.add(new Paragraph(method(comparison.gust()), Tone.PLAIN));
         blocks.add(new Notes(comparison.lines().stream().map(l -> l.title() + ": " + l.how() + "; " + speed(l) + ", terrain " + l.terrain() + ".").toList()));
         blocks.add(new Paragraph("Left out of the comparison: the user's own factors, an authority's least pressure, season and duration, risk categories. The classes of terrain were matched "
             + "by their roughness; hills are counted by each code's own rule.", Tone.SMALL));

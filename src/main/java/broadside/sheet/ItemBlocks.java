@@ -86,9 +86,9 @@ final class ItemBlocks {
     /** Which case governs what; one name when one case governs all. */
     private static String governs(ItemResult item, Loads loads) {
         boolean sign = item.item() instanceof PostSign;
-        String base = Format.caseName(loads.governs("base-moment").name());
+        String base = CaseTables.name(loads.governs("base-moment"));
         String post = loads.worstPost().map(p -> Format.caseName(p.named())).orElse(base);
-        String torsion = sign && loads.governs("torsion").torsion() != 0 ? Format.caseName(loads.governs("torsion").name()) : base;
+        String torsion = sign && loads.governs("torsion").torsion() != 0 ? CaseTables.name(loads.governs("torsion")) : base;
         if (post.equals(base) && torsion.equals(base)) {
             return base;
         }
