@@ -32,7 +32,14 @@ public record Comparison(Item item, List<Line> lines, Gust gust) {
      * @param steps     conversion of the speed
      */
     public record Line(String key, String title, boolean chosen, boolean plain, double speed, String terrain, String how, Optional<Found> found,
-                       Optional<ItemResult.Refusal> refusal, String why, Trace steps) { }
+                       Optional<ItemResult.Refusal> refusal, String why, Trace steps) {
+
+        /** The title up to its first comma. */
+        public String name() {
+            int comma = title.indexOf(',');
+            return comma < 0 ? title : title.substring(0, comma);
+        }
+    }
 
     /**
      * What one code gives.

@@ -84,15 +84,15 @@ public final class ComparisonBlocks {
         Line least = codes.stream().min(Comparator.comparingDouble(ComparisonBlocks::pressure)).orElseThrow();
         List<Fact> facts = new ArrayList<>();
         facts.add(Fact.of("Wind pressure, mean over the panel", codes.size() == 1 ? nearest(most) : nearest(least) + " to " + nearest(most),
-            codes.size() == 1 ? most.title() : "smallest " + least.title() + ", largest " + most.title()));
+            codes.size() == 1 ? most.name() : "smallest " + least.name() + ", largest " + most.name()));
         comparison.spread().ifPresent(s -> facts.add(Fact.of("How far apart", "the largest is " + Show.number(s, 3, Rounding.NEAREST) + " times the smallest",
             codes.size() + " editions cover this item")));
-        comparison.lines().stream().filter(l -> l.chosen() && l.found().isPresent()).findFirst().ifPresent(l -> facts.add(Fact.of("The code of this job", nearest(l), l.title())));
+        comparison.lines().stream().filter(l -> l.chosen() && l.found().isPresent()).findFirst().ifPresent(l -> facts.add(Fact.of("The code of this job", nearest(l), l.name())));
         comparison.plain().ifPresent(l -> facts.add(Fact.of("Plain fluid mechanics", nearest(l), "no code: the independent check")));
         blocks.add(new Answer(facts));
         blocks.add(new Picture(ComparisonDrawing.of(comparison, format), "Mean wind pressure on the panel, 50-year wind, characteristic. A full dot is a code, the ring is plain fluid "
             + "mechanics; the larger dot is the code of this job.", "Pressures: " + String.join("; ", comparison.lines().stream().filter(l -> l.found().isPresent())
-            .map(l -> l.title() + " " + nearest(l)).toList()) + "."));
+            .map(l -> l.name() + " " + nearest(l)).toList()) + "."));
     }
 
     private static double pressure(Line line) {
@@ -107,12 +107,12 @@ public final class ComparisonBlocks {
         blocks.add(new Heading(2, "Line by line", anchor + "lines"));
         List<Row> rows = new ArrayList<>();
         for (Line line : comparison.lines()) {
-            rows.add(line.found().map(f -> row(line, f)).orElseGet(() -> new Row(List.of(line.title(), line.terrain(), speed(line), "-", "-", "not covered", "-", "-"), false)));
+            rows.add(line.found().map(f -> row(line, f)).orElseGet(() -> new Row(List.of(line.name(), line.terrain(), speed(line), "-", "-", "not covered", "-", "-"), false)));
         }
         blocks.add(new Table("Loads by each code, 50-year wind, characteristic", List.of(new Column("Code", false, 6), new Column("Terrain", false, 3),
             new Column("Basic speed", true, 3), new Column("Velocity pressure", true, 3), new Column("All factors together", true, 3),
             new Column("Mean pressure", true, 3), new Column("Greatest of any zone", true, 3), new Column("Force", true, 3)), rows));
-        List<String> refused = comparison.lines().stream().filter(l -> l.found().isEmpty()).map(l -> l.title() + ": " + l.refusal().map(ComparisonBlocks::reason)
+        List<String> refused = comparison.lines().stream().filter(l -> l.found().isEmpty()).map(l -> l.name() + ": " + l.refusal().map(ComparisonBlocks::reason)
             .orElse("no result")).toList();
         if (!refused.isEmpty()) {
             blocks.add(new Notes(refused));
@@ -124,12 +124,18 @@ public final class ComparisonBlocks {
     }
 
     private Row row(Line line, Found found) {
-        return new Row(List.of(line.title() + (line.chosen() ? " (this job)" : ""), line.terrain(), speed(line), format.pressure(found.velocity()),
-            format.plain(found.coefficient()), format.pressure(found.pressure()), format.pressure(found.greatest()), format.force(found.force())), line.chosen());
+        return new Row(List.of(line.name() + (line.chosen() ? " (this job)" : ""), line.terrain(), speed(line), shown(found.velocity(), Dimension.PRESSURE, format),
+            format.plain(found.coefficient()), shown(found.pressure(), Dimension.PRESSURE, format), shown(found.greatest(), Dimension.PRESSURE, format),
+            shown(found.force(), Dimension.FORCE, format)), line.chosen());
+    }
+
+    /** To the nearest: what is compared is no load to design with. */
+    static String shown(double si, Dimension dimension, Format format) {
+        return Show.of(si, dimension, format.units(), 3, Rounding.NEAREST).text();
     }
 
     private String speed(Line line) {
-        return Show.of(line.speed(), Dimension.SPEED, format.units(), 3, Rounding.NEAREST).text();
+        return shown(line.speed(), Dimension.SPEED, format);
     }
 
     private void why(Comparison comparison, String anchor) {
@@ -141,7 +147,7 @@ public final class ComparisonBlocks {
         double factor = median(comparison.codes().stream().map(l -> l.found().orElseThrow().coefficient()).toList());
         List<String> sentences = new ArrayList<>();
         for (Line line : comparison.lines()) {
-            line.found().ifPresent(f -> sentences.add(line.title() + ": velocity pressure " + off(f.velocity(), velocity) + ", everything else together "
+            line.found().ifPresent(f -> sentences.add(line.name() + ": velocity pressure " + off(f.velocity(), velocity) + ", everything else together "
                 + off(f.coefficient(), factor) + " the middle of the codes." + (line.why().isEmpty() ? "" : " " + line.why())
                 + (f.recalled() > 0 ? " " + Math.round(f.recalled() * 100) + " % of its steps rest on figures not yet checked against print." : "")));
         }
@@ -171,13 +177,13 @@ public final class ComparisonBlocks {
     private void conversion(Comparison comparison, String anchor) {
         blocks.add(new Heading(2, "How the speeds were converted", anchor + "speeds"));
         blocks.add(new Paragraph(method(comparison.gust()), Tone.PLAIN));
-        blocks.add(new Notes(comparison.lines().stream().map(l -> l.title() + ": " + l.how() + "; " + speed(l) + ", terrain " + l.terrain() + ".").toList()));
+        blocks.add(new Notes(comparison.lines().stream().map(l -> l.name() + ": " + l.how() + "; " + speed(l) + ", terrain " + l.terrain() + ".").toList()));
         blocks.add(new Paragraph("Left out of the comparison: the user's own factors, an authority's least pressure, season and duration, risk categories. The classes of terrain were matched "
             + "by their roughness; hills are counted by each code's own rule.", Tone.SMALL));
         for (Line line : comparison.lines()) {
             Optional<Steps> steps = CalculationBlocks.steps(line.steps(), format, step -> "");
             steps.ifPresent(s -> {
-                blocks.add(new Heading(3, "Speed for " + line.title(), anchor + "speed-" + comparison.lines().indexOf(line)));
+                blocks.add(new Heading(3, "Speed for " + line.name(), anchor + "speed-" + comparison.lines().indexOf(line)));
                 blocks.add(s);
             });
         }

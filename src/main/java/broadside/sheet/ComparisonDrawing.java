@@ -32,9 +32,10 @@ final class ComparisonDrawing {
         double bottom = ROW * lines.size() + 10;
         for (int i = 0; i <= Math.round(end / step); i++) {
             double x = LEFT + width * i * step / end;
-            shapes.add(new Drawing.Line(x, 4, x, bottom, Canvas.THIN, Ink.GREY, i > 0));
+            shapes.add(new Drawing.Line(x, i == 0 ? 4 : bottom - 4, x, bottom, Canvas.THIN, Ink.BLACK, false));
             shapes.add(text(x, bottom + 12, Format.count(Math.round(i * step * 1000) / 1000.0), Anchor.MIDDLE, false));
         }
+        shapes.add(new Drawing.Line(LEFT, bottom, LEFT + width, bottom, Canvas.THIN, Ink.BLACK, false));
         shapes.add(text(LEFT + width / 2, bottom + 26, "mean wind pressure on the panel, " + (us ? "psf" : "kPa"), Anchor.MIDDLE, false));
         for (int i = 0; i < lines.size(); i++) {
             row(lines.get(i), ROW * i + 14, new Axis(LEFT, width / (end * unit)), format, shapes);
@@ -48,16 +49,10 @@ final class ComparisonDrawing {
     private static void row(Line line, double y, Axis axis, Format format, List<Shape> shapes) {
         double pressure = line.found().orElseThrow().pressure();
         double x = axis.start() + pressure * axis.scale();
-        shapes.add(text(axis.start() - 8, y + 3, name(line), Anchor.END, line.chosen()));
+        shapes.add(text(axis.start() - 8, y + 3, line.name(), Anchor.END, line.chosen()));
         shapes.add(new Drawing.Line(axis.start(), y, x, y, Canvas.THIN, Ink.BLACK, true));
         shapes.add(new Drawing.Circle(x, y, line.chosen() ? 5 : 3.6, Canvas.THICK, line.plain() ? Ink.ACCENT : Ink.BLACK, line.plain() ? Fill.PAPER : Fill.INK));
-        shapes.add(text(x + 9, y + 3, format.pressure(pressure), Anchor.START, line.chosen()));
-    }
-
-    /** The title up to its first comma. */
-    private static String name(Line line) {
-        int comma = line.title().indexOf(',');
-        return comma < 0 ? line.title() : line.title().substring(0, comma);
+        shapes.add(text(x + 9, y + 3, ComparisonBlocks.shown(pressure, Dimension.PRESSURE, format), Anchor.START, line.chosen()));
     }
 
     private static Shape text(double x, double y, String text, Anchor anchor, boolean bold) {

@@ -33,10 +33,12 @@ final class AnswerDesk {
     private final JobReader reader;
     private final Documents documents;
     private final FormDesk forms;
+    private final CompareDesk compare;
     private final Sketch sketch;
     private final Semaphore writers = new Semaphore(PDFS_AT_ONCE);
 
-    AnswerDesk(Pages pages, Assessor assessor, JobReader reader, Documents documents, FormDesk forms) {
+    AnswerDesk(Pages pages, Assessor assessor, JobReader reader, Documents documents, FormDesk forms, CompareDesk compare) {
+        this.compare = compare;
         this.pages = pages;
         this.assessor = assessor;
         this.reader = reader;
@@ -56,7 +58,7 @@ final class AnswerDesk {
             String title = sheet.title().isBlank() ? "Wind loads" : sheet.title();
             Pages.Frame frame = pages.frame(title);
             pages.show(ctx, 200, "answer", SheetView.cautioned(sheet) ? new Pages.Frame(title, "", frame.made()) : frame,
-                SheetView.of(sheet, token, changes, downloads(token)));
+                SheetView.of(sheet, "/drawing.svg?j=" + token, changes, downloads(token)));
         } catch (BadJob e) {
             forms.mend(ctx, job, e.problems());
         }
@@ -80,22 +82,31 @@ final class AnswerDesk {
     private static List<Download> downloads(String token) {
         return List.of(new Download("/summary.pdf?paper=a4&j=" + token, "PDF on A4 paper"),
             new Download("/summary.pdf?paper=letter&j=" + token, "PDF on Letter paper"),
-            new Download("/job.json?j=" + token, "Job file, to open again"));
+            new Download("/job.json?j=" + token, "Job file, to open again"),
+            new Download("/side-by-side?j=" + token, "Every code side by side"));
     }
 
     void pdf(Context ctx) throws InterruptedException {
+        JsonNode node = Token.read(ctx.queryParam("j"));
+        pdf(ctx, node, documents.sheet(assessor.assess(reader.read(node).orThrow())), "");
+    }
+
+    /** The page "side by side" as a PDF. */
+    void comparison(Context ctx) throws InterruptedException {
+        JsonNode node = Token.read(ctx.queryParam("j"));
+        pdf(ctx, node, compare.sheet(ctx, node), "-side-by-side");
+    }
+
+    private void pdf(Context ctx, JsonNode node, Sheet sheet, String suffix) throws InterruptedException {
         String paper = ctx.queryParam("paper") == null ? "a4" : ctx.queryParam("paper");
         if (!paper.equals("a4") && !paper.equals("letter")) {
             throw new Refused(400, "This paper is not known", "The PDF comes on a4 or letter paper.");
         }
-        JsonNode node = Token.read(ctx.queryParam("j"));
-        Job job = reader.read(node).orThrow();
-        Sheet sheet = documents.sheet(assessor.assess(job));
         if (!writers.tryAcquire(20, TimeUnit.SECONDS)) {
             throw new Refused(503, "Too many PDFs at once", "Several PDFs are being written. Wait a moment and open the link again.");
         }
         try {
-            download(ctx, "application/pdf", name(job) + ".pdf", documents.pdf(sheet, paper, JobText.write(node)));
+            download(ctx, "application/pdf", name(reader.read(node).orThrow()) + suffix + ".pdf", documents.pdf(sheet, paper, JobText.write(node)));
         } finally {
             writers.release();
         }

@@ -1,6 +1,7 @@
 package broadside.web;
 
 import broadside.assess.Assessment;
+import broadside.assess.Assessor;
 import broadside.assess.Loads;
 import broadside.panel.Item;
 import broadside.quantity.Units;
@@ -13,6 +14,9 @@ public interface Documents {
 
     /** The document of an assessed job. */
     Sheet sheet(Assessment assessment);
+
+    /** The document that holds one item against every code. */
+    Sheet sideBySide(Assessor assessor, Assessment assessment, Item item);
 
     /** The drawing of one item, with its loads when they are known. */
     Drawing drawing(Item item, Optional<Loads> loads, Units units);

@@ -36,9 +36,9 @@ public final class SheetView {
     /** A line of the calculation with its subscripts split off. */
     public record Step(Block.StepLine line, List<Runs.Run> symbol, List<Runs.Run> formula, List<Runs.Run> found) { }
 
-    /** The page of a sheet: what stands before its first part, the contents, and the parts. */
-    static Page of(Sheet sheet, String token, List<Change> changes, List<Download> downloads) {
-        List<Piece> pieces = pieces(sheet, token, changes);
+    /** The page of a sheet, its pictures at an address to which their number is added: what stands before its first part, the contents, and the parts. */
+    static Page of(Sheet sheet, String pictures, List<Change> changes, List<Download> downloads) {
+        List<Piece> pieces = pieces(sheet, pictures, changes);
         int first = 0;
         while (first < pieces.size() && pieces.get(first).level() < 2) {
             first++;
@@ -53,11 +53,11 @@ public final class SheetView {
     }
 
     /** Turns the blocks of a sheet into the pieces of a page. */
-    private static List<Piece> pieces(Sheet sheet, String token, List<Change> changes) {
+    private static List<Piece> pieces(Sheet sheet, String address, List<Change> changes) {
         List<Piece> pieces = new ArrayList<>();
         int pictures = 0;
         for (Block block : sheet.blocks()) {
-            String source = block instanceof Block.Picture ? "/drawing.svg?picture=" + pictures++ + "&j=" + token : "";
+            String source = block instanceof Block.Picture ? address + "&picture=" + pictures++ : "";
             int level = block instanceof Block.Heading heading ? Math.max(1, Math.min(heading.level(), 4)) : 0;
             List<Change> own = block instanceof Block.Heading heading && level > 1 ? fitting(heading, changes) : List.of();
             pieces.add(new Piece(kind(block), block, level, source, block instanceof Block.Steps steps ? steps(steps) : List.of(), own));

@@ -1,6 +1,7 @@
 package broadside.web;
 
 import broadside.assess.Assessment;
+import broadside.assess.Assessor;
 import broadside.assess.Loads;
 import broadside.job.JobText;
 import broadside.job.SchemaText;
@@ -12,6 +13,7 @@ import broadside.report.PdfReader;
 import broadside.report.PdfWriter;
 import broadside.report.ReportException;
 import broadside.report.SvgWriter;
+import broadside.sheet.ComparisonBlocks;
 import broadside.sheet.Drawing;
 import broadside.sheet.ItemDrawing;
 import broadside.sheet.Sheet;
@@ -41,6 +43,11 @@ public final class ShippedDocuments implements Documents {
     @Override
     public Sheet sheet(Assessment assessment) {
         return SheetMaker.of(assessment, LocalDate.now(clock).toString());
+    }
+
+    @Override
+    public Sheet sideBySide(Assessor assessor, Assessment assessment, Item item) {
+        return ComparisonBlocks.sheet(assessor, assessment, item, LocalDate.now(clock).toString());
     }
 
     @Override

@@ -36,7 +36,8 @@ public final class WebServer {
     public WebServer(Assessor assessor, JobReader reader, PublishedChecks checks, TableLibrary tables, Documents documents) {
         Pages pages = new Pages(assessor.about());
         FormDesk forms = new FormDesk(pages, assessor, reader, documents);
-        AnswerDesk answers = new AnswerDesk(pages, assessor, reader, documents, forms);
+        CompareDesk compare = new CompareDesk(pages, assessor, reader, documents);
+        AnswerDesk answers = new AnswerDesk(pages, assessor, reader, documents, forms, compare);
         StartDesk start = new StartDesk(pages, assessor.codes(), reader, documents, forms);
         Shelf shelf = new Shelf(pages, tables, checks);
         this.javalin = Javalin.create(cfg -> {
@@ -52,6 +53,10 @@ public final class WebServer {
             cfg.routes.get("/summary.pdf", answers::pdf);
             cfg.routes.get("/job.json", answers::job);
             cfg.routes.get("/drawing.svg", answers::drawing);
+            cfg.routes.get("/side-by-side", compare::show);
+            cfg.routes.post("/side-by-side", compare::type);
+            cfg.routes.get("/side-by-side.svg", compare::picture);
+            cfg.routes.get("/side-by-side.pdf", answers::comparison);
             cfg.routes.get("/tables", shelf::tables);
             cfg.routes.get("/tables/{code}/{edition}", shelf::edition);
             cfg.routes.get("/checks", shelf::checks);
