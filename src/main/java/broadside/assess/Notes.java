@@ -71,8 +71,9 @@ final class Notes {
         if (site.basicSpeed().metresPerSecond() > 90 || site.basicSpeed().metresPerSecond() < 10) {
             add(Note.Kind.CAUTION, "A basic wind speed of " + site.basicSpeed().typed() + " is unusual. Check its unit.");
         }
-        if (site.options().number("gust-factor").filter(g -> g < 0.85).isPresent()) {
-            add(Note.Kind.CAUTION, "The gust factor given is below 0.85; a small sign gets more than 0.85 by the formula, not less.");
+        if (site.options().number("gust-factor").filter(g -> g < code.edition().rows("constants").number("gust-factor", "value").value()).isPresent()) {
+            String least = code.edition().rows("constants").text("gust-factor", "value");
+            add(Note.Kind.CAUTION, "The gust factor given is below " + least + "; a small sign gets more than " + least + " by the formula, not less.");
         }
         add(Note.Kind.ASSUMPTION, "No shelter by other structures is counted.");
     }
