@@ -19,6 +19,7 @@ import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.concurrent.Callable;
 
 /** Measures what the tool must reach and prints a table. Run by the command in DEVELOPERS.md, never by the tests. */
@@ -27,16 +28,41 @@ public final class Benchmark {
     private static final Path JAR = Path.of("target", "broadside.jar");
 
     public static void main(String[] args) throws Exception {
-        System.out.printf(Locale.ROOT, "%-52s %12s %12s%n", "what", "measured", "at most");
+        System.out.printf(Locale.ROOT, "%-78s %12s %12s%n", "what", "measured", "at most");
         Job job = AllJobs.demo("entrance-sign.json");
         warm("assessment of one post sign, full trace, warm", 0.2, 20_000, () -> AllJobs.assess(job));
+        everyCodeAndKind();
+        warm("one item by every code side by side, warm", 3, 1000, () -> AllJobs.TOOL.assessor().sideBySide(job, job.items().get(0)));
         pdf(job);
         if (!Files.exists(JAR)) {
             System.out.println("no " + JAR + ": run mvn -q -DskipTests package for the rows of whole processes");
             return;
         }
-        row("check of one job, whole process", median(5, Benchmark::checkProcess), 700, "ms");
-        row("first page after start, plain JVM", median(5, Benchmark::firstPage), 2000, "ms");
+        row("check of one job, whole process", times(5, Benchmark::checkProcess), 700, "ms");
+        row("first page after start, plain JVM", times(5, Benchmark::firstPage), 2000, "ms");
+    }
+
+    /** One row for each code: the kind that takes longest. */
+    private static void everyCodeAndKind() throws Exception {
+        Map<String, String> items = Map.of(
+            "post-sign", "'boards': [{'width': '3 m', 'height': '2 m', 'clearance': '2.5 m', 'depth': '0.05 m'}], 'posts': {'count': 2, 'spacing': '2 m', 'section': 'CHS 114.3x5'}",
+            "hoarding", "'length': '48 m', 'height': '2.4 m', 'returns': {'left': '2.4 m'}, 'posts': {'spacing': '2.4 m'}",
+            "banner-fence", "'panel-length': '3.45 m', 'panel-height': '2 m', 'panels': 40, 'cover-solidity': 0.85, 'fence-solidity': 0.25",
+            "facade-panel", "'backing': 'skin', 'width': '1.2 m', 'height': '2.5 m', 'bottom': '6 m', 'distance-from-corner': '0.3 m', "
+                + "'building': {'width': '30 m', 'depth': '20 m', 'height': '12 m'}",
+            "projecting-sign", "'projection': '0.6 m', 'height': '2.4 m', 'bottom': '3.2 m', 'depth': '0.12 m', 'mass': '34 kg', 'brackets': {'count': 2, 'spacing': '1.8 m'}",
+            "spanned-banner", "'width': '9 m', 'height': '0.9 m', 'bottom': '5.2 m', 'sag': '0.45 m'");
+        for (String[] code : JobTexts.CODES) {
+            String slowest = "";
+            double most = 0;
+            for (Map.Entry<String, String> item : items.entrySet()) {
+                Job job = JobTexts.job(code[0], code[1], "{'mark': 'X1', 'kind': '" + item.getKey() + "', " + item.getValue() + "}");
+                double median = median(3000, () -> AllJobs.assess(job));
+                slowest = median > most ? item.getKey() : slowest;
+                most = Math.max(median, most);
+            }
+            row("assessment by " + code[0] + ", slowest of six kinds, " + slowest, most, 0.3, "ms");
+        }
     }
 
     private static void pdf(Job job) throws Exception {
@@ -58,6 +84,11 @@ public final class Benchmark {
     }
 
     private static void warm(String what, double most, int times, Callable<?> task) throws Exception {
+        row(what + ", median", median(times, task), most, "ms");
+    }
+
+    /** Median of as many runs as went before to warm up, ms. */
+    private static double median(int times, Callable<?> task) throws Exception {
         for (int i = 0; i < times; i++) {
             task.call();
         }
@@ -68,7 +99,7 @@ public final class Benchmark {
             millis[i] = (System.nanoTime() - start) / 1e6;
         }
         Arrays.sort(millis);
-        row(what + ", median", millis[times / 2], most, "ms");
+        return millis[times / 2];
     }
 
     private static double checkProcess() throws IOException, InterruptedException {
@@ -108,7 +139,7 @@ public final class Benchmark {
         double run() throws IOException, InterruptedException;
     }
 
-    private static double median(int times, Timed task) throws IOException, InterruptedException {
+    private static double times(int times, Timed task) throws IOException, InterruptedException {
         double[] millis = new double[times];
         for (int i = 0; i < times; i++) {
             millis[i] = task.run();
@@ -118,7 +149,7 @@ public final class Benchmark {
     }
 
     private static void row(String what, double measured, double most, String unit) {
-        System.out.printf(Locale.ROOT, "%-52s %9.3f %s %9.1f %s%n", what, measured, unit, most, unit);
+        System.out.printf(Locale.ROOT, "%-78s %9.3f %s %9.1f %s%n", what, measured, unit, most, unit);
     }
 
     private Benchmark() { }
