@@ -7,6 +7,7 @@ import broadside.panel.PostSection;
 import broadside.panel.PostSign;
 import broadside.site.Site;
 import broadside.trace.Status;
+import broadside.trace.Step;
 import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.Comparator;
@@ -75,7 +76,9 @@ public record PostDrag(double force, double moment) {
     }
 
     private static PostDrag stretch(Stretch bare, PostSection section, WindCode code, MemberRule rule, Site site, Trace trace) {
-        double q = code.memberPressure(site, bare.to(), trace);
+        double top = trace.line("post-height", heightSymbol(trace), "height of the wind on the post").from(STATICS, Status.DERIVED)
+            .reads("top of the length that stands free", bare.to(), "m");
+        double q = code.memberPressure(site, top, trace);
         double length = trace.line("post-length", "l_p", "length of the post that stands free, from " + metres(bare.from()) + " to " + metres(bare.to()))
             .from(STATICS, Status.DERIVED).reads("between the ground and the boards", bare.to() - bare.from(), "m");
         double c = rule.coefficient(section, length, q, trace);
@@ -86,6 +89,11 @@ public record PostDrag(double force, double moment) {
         double moment = trace.line("post-drag-moment", "M_d", "its moment at the ground line").in("F_d", force, "N").in("z_d", arm, "m")
             .from(STATICS, Status.DERIVED).gives("F_d z_d", force * arm, "N m");
         return new PostDrag(force, moment);
+    }
+
+    /** The symbol by which the code writes the height of the wind: that of the boards. */
+    private static String heightSymbol(Trace trace) {
+        return trace.steps().stream().filter(s -> s.name().startsWith("reference-height")).findFirst().map(Step::symbol).orElse("z");
     }
 
     private static String metres(double value) {
