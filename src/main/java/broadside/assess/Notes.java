@@ -25,7 +25,7 @@ final class Notes {
         Notes notes = new Notes();
         notes.overrides(sheet);
         notes.site(job.site(), code);
-        notes.unused(job.site(), sheet);
+        notes.unused(job.site(), code, sheet);
         notes.returnPeriod(job.site(), sheet);
         notes.stay(job.site());
         notes.leastHeight(job.site(), sheet);
@@ -79,12 +79,12 @@ final class Notes {
     }
 
     /** Values that were given and that this code does not use: said, so that nobody believes they count. */
-    private void unused(Site site, Trace sheet) {
+    private void unused(Site site, WindCode code, Trace sheet) {
         if (site.returnPeriod().isPresent() && sheet.find("probability-factor").isEmpty() && uses(sheet, "velocity-pressure")) {
-            add(Note.Kind.CAUTION, "The return period of " + site.returnPeriod().get().typed() + " is not used by this code: the basic wind speed must be that of "
-                + "the map for the risk category.");
+            add(Note.Kind.CAUTION, "The return period of " + site.returnPeriod().get().typed() + " is not used by this code: the basic wind speed "
+                + (code.terms().options().contains("risk-category") ? "must be that of the map for the risk category." : "counts as it was given."));
         }
-        if (site.ground().altitude().isPresent()) {
+        if (site.ground().altitude().isPresent() && !uses(sheet, "air-temperature")) {
             add(Note.Kind.ASSUMPTION, "The altitude of " + site.ground().altitude().get().typed() + " does not change these loads: this code takes the basic wind "
                 + "speed of the place as it is" + (site.options().si("ground-elevation").isPresent() ? "; the ground elevation is counted." : "."));
         }
@@ -159,7 +159,7 @@ final class Notes {
 
     private void solidity(Job job, Item item, Trace sheet) {
         if (item.panels().stream().anyMatch(p -> p.solidity() < 1)) {
-            if (sheet.steps().stream().anyMatch(s -> s.name().startsWith("coefficient/all"))) {
+            if (uses(sheet, "coefficient/all") && !uses(sheet, "porosity-factor")) {
                 add(Note.Kind.ASSUMPTION, "The code's rule for signboards has no reduction for openings: the board is counted as closed.");
             }
             add(Note.Kind.CAUTION, "The solidity was given by " + job.remark(item.mark(), "solidity-by").orElse("an unnamed source")
