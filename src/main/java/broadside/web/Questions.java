@@ -89,7 +89,12 @@ final class Questions {
 
     private Input input(Shape shape, Field field, String path) {
         Wording words = Wording.of(shape.name(), field);
-        if (shape.name().equals("site") && field.name().equals("terrain")) {
+        boolean terrain = shape.name().equals("site") && field.name().equals("terrain");
+        if (terrain && code.filter(c -> c.terms().byRoughness()).isPresent()) {
+            return made("text", path, words.label(), "", "Here it is " + code.orElseThrow().terms().terrainNames() + ". If you are not sure, take the smaller one", null,
+                List.of(), null, "short");
+        }
+        if (terrain) {
             return made("radio", path, words.label(), "", code.isPresent() ? words.hint()
                 : "Each code has its own classes: choose the code above, then show its questions", null, terrains(path), "", "");
         }
