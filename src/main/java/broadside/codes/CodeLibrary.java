@@ -14,7 +14,8 @@ public final class CodeLibrary {
     /** One entry for each procedure: the name in edition.properties and its class. */
     private static final Map<String, Function<Edition, WindCode>> PROCEDURES = Map.of(
         "en-1991-1-4", En1991::new,
-        "asce-7-16", Asce716::new);
+        "asce-7-16", Asce716::new,
+        "open-flow", OpenFlow::new);
 
     private final Map<String, WindCode> codes = new LinkedHashMap<>();
 
