@@ -1,5 +1,8 @@
 package broadside.job;
 
+import broadside.codes.CodeLibrary;
+import broadside.codes.NotCovered;
+import broadside.codes.OpenFlowPlates;
 import broadside.quantity.Dimension;
 import broadside.quantity.Reading;
 import broadside.quantity.Speed;
@@ -7,26 +10,79 @@ import broadside.quantity.Typed;
 import broadside.site.Averaging;
 import broadside.site.SpeedConversion;
 import broadside.table.OutsideTable;
+import broadside.trace.Status;
 import broadside.trace.Trace;
 import tools.jackson.databind.JsonNode;
 
-/** Published checks of one part of the calculation, without a job. */
+/** Published checks of one part of the calculation, without a job: a speed, a plate in the wind. */
 final class Parts {
 
     private static final String FASTEST_MILE = "fastest mile";
+    private static final String OPEN_FLOW = "open-flow/1";
 
     private final SpeedConversion conversion;
+    private final CodeLibrary codes;
 
-    Parts(SpeedConversion conversion) {
+    Parts(SpeedConversion conversion, CodeLibrary codes) {
         this.conversion = conversion;
+        this.codes = codes;
     }
 
     Trace run(JsonNode given) {
         String part = PublishedChecks.text(given, "part");
-        if (!part.equals("convert-speed")) {
-            throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed");
+        return switch (part) {
+            case "convert-speed" -> convertSpeed(given);
+            case "plate-drag" -> plateDrag(given);
+            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed "
+                + "and plate-drag");
+        };
+    }
+
+    /** Force on a flat plate in an even wind at the speed given, without any change with height. */
+    private Trace plateDrag(JsonNode given) {
+        Trace trace = new Trace();
+        double b = length(given, "width", "b", trace);
+        double h = length(given, "height", "h", trace);
+        double v = positive(given, "speed", Dimension.SPEED, "20 m/s");
+        double density = positive(given, "air-density", Dimension.DENSITY, "1.225 kg/m3");
+        JsonNode ground = given.path("on-ground");
+        if (!ground.isMissingNode() && !ground.isBoolean()) {
+            throw PublishedChecks.bad("on-ground must be true or false, without quotation marks");
         }
-        return convertSpeed(given);
+        JsonNode solid = given.path("solidity");
+        double solidity = solid.isMissingNode() ? 1 : solid.isNumber() ? solid.doubleValue() : 0;
+        if (!(solidity > 0 && solidity <= 1)) {
+            throw PublishedChecks.bad("solidity must be a number above 0 and not above 1");
+        }
+        trace.given("v", "wind speed", v, "m/s", PublishedChecks.text(given, "speed"));
+        trace.given("ρ", "air density", density, "kg/m³", PublishedChecks.text(given, "air-density"));
+        OpenFlowPlates.Plate plate = new OpenFlowPlates.Plate(b, h, ground.asBoolean(false), solidity);
+        OpenFlowPlates plates = codes.code(OPEN_FLOW).map(c -> new OpenFlowPlates(c.edition())).orElseThrow(() ->
+            PublishedChecks.bad("the tables of " + OPEN_FLOW + " are not there"));
+        try {
+            plates.reynolds(plate, v, density, trace);
+            double c = plates.coefficient(plate, "coefficient", trace);
+            double q = trace.line("velocity-pressure", "q", "dynamic pressure").in("ρ", density, "kg/m³").in("v", v, "m/s")
+                .from("definition of dynamic pressure", Status.DERIVED).gives("½ ρ v²", 0.5 * density * v * v, "Pa");
+            trace.line("force", "F", "force on the plate").in("q", q, "Pa").in("C_D", c).in("b", b, "m").in("h", h, "m")
+                .from("definition of the drag coefficient", Status.DERIVED).gives("q C_D b h", q * c * b * h, "N");
+        } catch (NotCovered e) {
+            throw PublishedChecks.bad(e.getMessage());
+        }
+        return trace;
+    }
+
+    private static double length(JsonNode given, String name, String symbol, Trace trace) {
+        double value = positive(given, name, Dimension.LENGTH, "2 m");
+        return trace.given(symbol, name + " of the plate", value, "m", PublishedChecks.text(given, name));
+    }
+
+    private static double positive(JsonNode given, String name, Dimension dimension, String example) {
+        Reading reading = Typed.read(PublishedChecks.text(given, name), dimension);
+        if (!(reading instanceof Reading.Value value) || !(value.si() > 0)) {
+            throw PublishedChecks.bad(name + ": a " + dimension.word() + " above zero is typed with its unit, like \"" + example + "\"");
+        }
+        return value.si();
     }
 
     private Trace convertSpeed(JsonNode given) {
