@@ -13,7 +13,7 @@ final class NetPressure {
      * @param line     makes the step of the code's own rule, under the name it is given
      * @param formula  the code's relation
      * @param value    what it gives, Pa
-     * @return the net pressure that counts, Pa
+     * @return the net pressure that counts, Pa; the least counts for suction as it does for pressure
      */
     static double record(Site site, Level level, Trace trace, String zone, String symbol, Maker line, String formula, double value) {
         if (site.authorityMinimum().isEmpty()) {
@@ -21,9 +21,10 @@ final class NetPressure {
         }
         double own = line.begin("code-pressure/" + zone, symbol + "'").gives(formula, value, "Pa");
         double least = trace.once("authority minimum", () -> least(site.authorityMinimum().get(), level, trace), known -> known);
-        return trace.line("pressure/" + zone, symbol, "net pressure: the larger of the code's and the authority's least")
-            .in(symbol + "'", own, "Pa").in("p_{min}", least, "Pa").from("authority's least pressure", Status.GIVEN)
-            .gives("max(" + symbol + "'; p_{min})", Math.max(own, least), "Pa");
+        Trace.Line larger = trace.line("pressure/" + zone, symbol, "net pressure: the larger of the code's and the authority's least")
+            .in(symbol + "'", own, "Pa").in("p_{min}", least, "Pa").from("authority's least pressure", Status.GIVEN);
+        return own < 0 ? larger.gives("min(" + symbol + "'; -p_{min})", Math.min(own, -least), "Pa")
+            : larger.gives("max(" + symbol + "'; p_{min})", Math.max(own, least), "Pa");
     }
 
     /** Begins the step of the code's own rule. */
