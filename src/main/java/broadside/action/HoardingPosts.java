@@ -162,8 +162,11 @@ public final class HoardingPosts {
         recordOne(posts.get(most), worst.get(most), "", symbols, trace);
     }
 
-    private static String shortName(String zone) {
-        return zone.substring(zone.indexOf('/') + 1);
+    /** Symbol of the width of a zone that a post carries: t_A beside w_A, t_{B,s} beside w_{B,s}. */
+    private static String widthSymbol(ZonePressure zone) {
+        int low = zone.symbol().indexOf('_');
+        String below = low < 0 ? zone.zone() : zone.symbol().substring(low + 1);
+        return "t_" + (below.startsWith("{") ? below : "{" + below + "}");
     }
 
     private static void recordOne(PostAction post, Share share, String zone, PanelSymbols symbols, Trace trace) {
@@ -174,7 +177,7 @@ public final class HoardingPosts {
         for (ZonePressure z : panel.load().zones()) {
             double t = Strip.overlap(share.from() - share.placed().left(), share.to() - share.placed().left(), z.from(), z.to());
             if (t > 1e-9) {
-                String width = "t_{" + HoardingPosts.shortName(z.zone()) + "}";
+                String width = widthSymbol(z);
                 trace.line("post-width" + zone + "/" + z.zone(), width, "boards of zone " + z.zone() + " that post " + post.post() + " carries")
                     .from(STATICS, Status.DERIVED).reads("half-way to the neighbouring posts", t, "m");
                 line.in(z.symbol(), z.pressure(), "Pa").in(width, t, "m");

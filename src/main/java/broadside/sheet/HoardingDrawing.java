@@ -79,9 +79,9 @@ final class HoardingDrawing {
         }
     }
 
-    /** "case-c/s-2s" becomes "s-2s", "case-a" becomes "all": the words on the drawing and in tables. */
+    /** "case-c/s-2s" becomes "s-2s", "case-a" becomes "all", a part of a lettered zone stays "B/sheltered": the words on the drawing and in tables. */
     static String shortName(String zone) {
-        return zone.equals("case-a") || zone.equals("case-b") ? "all" : zone.substring(zone.indexOf('/') + 1);
+        return zone.equals("case-a") || zone.equals("case-b") ? "all" : zone.indexOf('/') == 1 ? zone : zone.substring(zone.indexOf('/') + 1);
     }
 
     private void posts(Canvas front) {
