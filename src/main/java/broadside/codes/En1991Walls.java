@@ -1,6 +1,7 @@
 package broadside.codes;
 
 import broadside.aero.Strip;
+import broadside.codes.En1991Shelter.Part;
 import broadside.codes.LoadCase.Windward;
 import broadside.panel.Panel;
 import broadside.site.Site;
@@ -11,10 +12,12 @@ import broadside.table.Rows;
 import broadside.table.Source;
 import broadside.trace.Trace;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
-/** Free-standing walls of EN 1991-1-4, 7.4.1: zones A to D from the windward end, table 7.9. */
+/** Free-standing walls of EN 1991-1-4, 7.4.1: zones A to D from the windward end, table 7.9, with the shelter of 7.4.2. */
 final class En1991Walls {
 
     private final Constants constants;
@@ -22,6 +25,7 @@ final class En1991Walls {
     private final Rows withReturns;
     private final Rows open;
     private final Rows zones;
+    private final En1991Shelter shelter;
 
     En1991Walls(Edition edition) {
         this.constants = new Constants(edition);
@@ -29,6 +33,7 @@ final class En1991Walls {
         this.withReturns = edition.rows("free-standing-walls-with-returns");
         this.open = edition.rows("free-standing-walls-open");
         this.zones = edition.rows("wall-zones");
+        this.shelter = new En1991Shelter(constants);
     }
 
     /** The case "wall", once for each end as the windward one. Ends that are alike are worked out once. */
@@ -44,16 +49,17 @@ final class En1991Walls {
         double slenderness = trace.line("length-to-height", "l/h", "length of the wall over its height")
             .in("l", length, "m").in("h", panel.height(), "m").from(place.citation(), place.status())
             .gives("l / h", length / panel.height(), "1");
-        LoadCase left = fromLeft(new Sheet(panel, site, code, qp, slenderness, panel.returnLeft(), trace, ""));
+        double factor = shelter.factor(panel, trace);
+        LoadCase left = fromLeft(new Sheet(panel, site, code, qp, slenderness, factor, panel.returnLeft(), trace, ""));
         LoadCase right = (panel.endsAlike() ? left
-            : fromLeft(new Sheet(panel, site, code, qp, slenderness, panel.returnRight(), trace, "/right-end")))
+            : fromLeft(new Sheet(panel, site, code, qp, slenderness, factor, panel.returnRight(), trace, "/right-end")))
             .mirrored(panel.width());
         return List.of(left, right);
     }
 
     /** What the zones of one windward end are worked out from. */
-    private record Sheet(Panel panel, Site site, WindCode code, double qp, double slenderness, double returnLength, Trace trace,
-                         String end) { }
+    private record Sheet(Panel panel, Site site, WindCode code, double qp, double slenderness, double shelter, double returnLength,
+                         Trace trace, String end) { }
 
     private LoadCase fromLeft(Sheet sheet) {
         List<String> names = zones.keys();
@@ -61,21 +67,29 @@ final class En1991Walls {
         List<Double> limits = names.stream()
             .map(z -> zones.isPrinted(z, "to") ? zones.number(z, "to").value() * h : Double.POSITIVE_INFINITY).toList();
         List<ZonePressure> pressures = new ArrayList<>();
-        for (Strip strip : Strip.cut(sheet.panel().width(), names, limits)) {
-            String zone = strip.name();
-            Source place = zones.number(zone, "from").source();
-            double width = sheet.trace().line("zone-width/" + zone + sheet.end(), "l_" + zone, "width of zone " + zone)
-                .in("h", h, "m").in("l", sheet.panel().width(), "m").from(place.citation(), place.status())
-                .reads("from " + Numbers.plain(round(strip.from())) + " m to " + Numbers.plain(round(strip.to()))
-                    + " m from the windward end", strip.width(), "m");
-            double c = coefficient(sheet, zone);
-            double w = NetPressure.record(sheet.site(), sheet.code().level(sheet.site()), sheet.trace(), zone + sheet.end(), "w_" + zone,
-                (name, symbol) -> sheet.trace().line(name, symbol, "net pressure in zone " + zone).in("q_p", sheet.qp(), "Pa")
-                    .in("c_" + zone, c).from(place.publicationAndEdition() + ", 5.2, 7.4.1", place.status()),
-                "q_p c_" + zone, sheet.qp() * c);
-            pressures.add(new ZonePressure(zone, "w_" + zone, strip.from(), strip.to(), width, c, w));
+        Map<String, Double> coefficients = new HashMap<>();
+        for (Part part : shelter.cut(sheet.panel(), Strip.cut(sheet.panel().width(), names, limits))) {
+            pressures.add(pressure(sheet, part, coefficients));
         }
         return new LoadCase("wall", "free-standing wall, zones from the windward end", Windward.LEFT, pressures, 0, Optional.empty(), 0, 0);
+    }
+
+    /** Width, coefficient and net pressure of one stretch of a zone; the coefficient of the zone itself is found once. */
+    private ZonePressure pressure(Sheet sheet, Part part, Map<String, Double> coefficients) {
+        Trace trace = sheet.trace();
+        Panel panel = sheet.panel();
+        Strip strip = part.strip();
+        Source place = zones.number(strip.name(), "from").source();
+        double width = trace.line("zone-width/" + part.name() + sheet.end(), part.symbol("l"), "width of zone " + part.words())
+            .in("h", panel.height(), "m").in("l", panel.width(), "m").from(place.citation(), place.status())
+            .reads("from " + Numbers.plain(round(strip.from())) + " m to " + Numbers.plain(round(strip.to())) + " m from the windward end", strip.width(), "m");
+        double ofZone = coefficients.computeIfAbsent(strip.name(), zone -> coefficient(sheet, zone));
+        double c = part.sheltered() ? shelter.coefficient(part, ofZone, sheet.shelter(), sheet.end(), trace) : ofZone;
+        String symbol = part.sheltered() ? part.symbol("c") : "c_" + strip.name();
+        double w = NetPressure.record(sheet.site(), sheet.code().level(sheet.site()), trace, part.name() + sheet.end(), part.symbol("w"),
+            (name, of) -> trace.line(name, of, "net pressure in zone " + part.words()).in("q_p", sheet.qp(), "Pa").in(symbol, c)
+                .from(place.publicationAndEdition() + ", 5.2, 7.4.1", place.status()), "q_p " + symbol, sheet.qp() * c);
+        return new ZonePressure(part.name(), part.symbol("w"), strip.from(), strip.to(), width, c, w);
     }
 
     private static double round(double metres) {

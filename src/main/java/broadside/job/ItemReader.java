@@ -1,6 +1,7 @@
 package broadside.job;
 
 import broadside.assess.Problem;
+import broadside.codes.WindCode;
 import broadside.panel.Board;
 import broadside.panel.Hoarding;
 import broadside.panel.Item;
@@ -25,11 +26,16 @@ final class ItemReader {
     /** A size that was not typed. */
     private static final Length ZERO = new Length(0, "");
     private static final double LONGEST = 2000;
+    private static final String SHELTER = "shelter-factor";
+    private static final double LEAST_SHELTER = 0.3;
 
     private final List<Problem> problems;
+    private final Optional<WindCode> code;
 
-    ItemReader(List<Problem> problems) {
+    /** Reads items that are to be worked out by a code, where the code is known. */
+    ItemReader(List<Problem> problems, Optional<WindCode> code) {
         this.problems = problems;
+        this.code = code;
     }
 
     /** The item, or nothing when something needed is missing; what does not fit is noted. */
@@ -132,8 +138,8 @@ final class ItemReader {
         if (length.isEmpty() || height.isEmpty() || values.text("mark").isEmpty()) {
             return Optional.empty();
         }
-        Hoarding hoarding = new Hoarding(values.text("mark").get(), length.get(), height.get(), clearance, solidity, left, right, gates, spacing,
-            carrying(values));
+        Hoarding hoarding = new Hoarding(values.text("mark").get(), length.get(), height.get(), clearance, solidity, left, right, shelter(values), gates,
+            spacing, carrying(values));
         if (hoarding.panels().isEmpty()) {
             problem(values, gates.isEmpty() ? "length" : "gates", "leaves no hoarding to assess");
             return Optional.empty();
@@ -195,6 +201,15 @@ final class ItemReader {
             problem(values, name, "must be above 0 and not above 1, 1 for a closed panel");
         }
         return solidity;
+    }
+
+    /** The factor for a wall or fence in front, 1 where none is typed; only some codes have a rule for it. */
+    double shelter(Values values) {
+        Optional<Double> typed = values.number(SHELTER);
+        typed.filter(s -> !(s >= LEAST_SHELTER && s <= 1)).ifPresent(s -> problem(values, SHELTER, "must lie between " + LEAST_SHELTER + " and 1, 1 for no shelter"));
+        code.filter(c -> typed.isPresent() && !c.terms().options().contains(SHELTER)).ifPresent(c ->
+            problem(values, SHELTER, "is not a value of " + c.edition().property("title") + ": it has no rule for shelter by a wall in front"));
+        return typed.orElse(1.0);
     }
 
     /** What carries the item, kept as typed. */

@@ -58,7 +58,7 @@ public final class JobReader {
         }
         Optional<Job.Basis> basis = values.object("basis").flatMap(v -> basis(v, problems));
         Optional<Site> site = values.object("site").flatMap(v -> new SiteReader(codes, conversion, problems).read(v, basis));
-        List<Item> items = items(values, problems);
+        List<Item> items = items(values, basis.flatMap(b -> codes.code(b.key())), problems);
         List<OwnValue> overrides = overrides(values.list("overrides"), problems);
         List<Job.Compared> compared = compared(values.list("comparison"), problems);
         if (!problems.isEmpty()) {
@@ -90,9 +90,9 @@ public final class JobReader {
         return Optional.of(basis);
     }
 
-    private static List<Item> items(Values values, List<Problem> problems) {
+    private static List<Item> items(Values values, Optional<WindCode> code, List<Problem> problems) {
         List<Values> list = values.list("items");
-        ItemReader reader = new ItemReader(problems);
+        ItemReader reader = new ItemReader(problems, code);
         List<Item> items = new ArrayList<>();
         Set<String> marks = new HashSet<>();
         for (Values item : list) {

@@ -9,9 +9,10 @@ import java.util.List;
  * @param count           number of panels in the line
  * @param coverSolidity   solid area over gross area of the fabric
  * @param fenceSolidity   the same of the bare fence
+ * @param shelter         factor on the wind by a wall or fence in front that stays there, 1 for none
  */
 public record BannerFence(String mark, Length panelLength, Length panelHeight, int count, double coverSolidity, double fenceSolidity,
-                          List<Carrying> carrying) implements Item {
+                          double shelter, List<Carrying> carrying) implements Item {
 
     /** Name of the bare line in steps and tables. */
     public static final String BARE = "bare-fence";
@@ -47,7 +48,7 @@ public record BannerFence(String mark, Length panelLength, Length panelHeight, i
     }
 
     private Panel panel(double solidity) {
-        return new Panel("", Panel.Kind.WALL, length(), panelHeight.metres(), 0, 0, solidity, 0, 0,
+        return new Panel("", Panel.Kind.WALL, length(), panelHeight.metres(), 0, 0, solidity, 0, 0, shelter,
             new Panel.AsTyped("", panelHeight.typed(), "", ""));
     }
 }

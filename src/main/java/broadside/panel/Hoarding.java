@@ -12,11 +12,12 @@ import java.util.Optional;
  * @param clearance   gap below the boards
  * @param solidity    solid area over gross area
  * @param returnLeft  length of the return at the left end, zero for a free end
+ * @param shelter     factor on the wind by a wall or fence in front that stays there, 1 for none
  * @param gates       openings; an open gate makes two new free ends
  * @param spacing     distance of the posts, where it is known
  */
 public record Hoarding(String mark, Length length, Length height, Length clearance, double solidity, Length returnLeft,
-                       Length returnRight, List<Gate> gates, Optional<Length> spacing, List<Carrying> carrying) implements Item {
+                       Length returnRight, double shelter, List<Gate> gates, Optional<Length> spacing, List<Carrying> carrying) implements Item {
 
     /** A stretch narrower than this comes from binary rounding or is no hoarding, m. */
     private static final double NARROWEST = 0.005;
@@ -92,7 +93,7 @@ public record Hoarding(String mark, Length length, Length height, Length clearan
         double left = from == 0 ? returnLeft.metres() : 0;
         double right = Math.abs(to - length.metres()) < NARROWEST ? returnRight.metres() : 0;
         return new Panel(part, Panel.Kind.WALL, to - from, height.metres(), clearance.metres(),
-            (from + to) / 2 - length.metres() / 2, solidity, left, right,
+            (from + to) / 2 - length.metres() / 2, solidity, left, right, shelter,
             new Panel.AsTyped(from == 0 && to == length.metres() ? length.typed() : "", height.typed(), clearance.typed(), ""));
     }
 }

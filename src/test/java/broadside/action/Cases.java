@@ -47,7 +47,7 @@ final class Cases {
         for (int i = 0; i < gates.length; i += 2) {
             list.add(new Hoarding.Gate(Length.metres(gates[i]), Length.metres(gates[i + 1])));
         }
-        return new Hoarding("H1", Length.metres(length), Length.metres(2), Length.metres(0), 1, Length.metres(0), Length.metres(0), list, Optional.empty(),
+        return new Hoarding("H1", Length.metres(length), Length.metres(2), Length.metres(0), 1, Length.metres(0), Length.metres(0), 1, list, Optional.empty(),
             List.of());
     }
 
