@@ -49,6 +49,15 @@ final class En1991Orography {
             : line.in("Φ", slope).gives("1 + " + Numbers.plain(coefficient) + " s Φ", 1 + coefficient * s * slope, "1");
     }
 
+    /** The largest factor that the formulas give: a steep slope, at its crest, at the ground. For ground that is not known. */
+    double worst(Trace trace) {
+        double factor = constants.number("orography-steep-factor");
+        double crest = upwind.number("A", "p0").value();
+        return trace.line("topography-factor", "c_o", "orography factor").from(place.citation(), place.status())
+            .reads("worst value of annex A.3, 1 + " + Numbers.plain(factor) + " s with s = " + Numbers.plain(crest)
+                + " at the crest of a steep slope, as the ground near by is not known", 1 + factor * crest, "1");
+    }
+
     private double effectiveLength(double h, double lu, boolean steep, Trace trace) {
         Trace.Line line = trace.line("effective-length", "L_e", "effective length of the upwind slope").from(place.citation(), place.status());
         double limit = constants.number("orography-steep");

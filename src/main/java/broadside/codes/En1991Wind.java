@@ -1,11 +1,15 @@
 package broadside.codes;
 
+import broadside.quantity.Period;
+import broadside.quantity.Speed;
 import broadside.site.Site;
+import broadside.site.SiteOptions;
 import broadside.table.Edition;
 import broadside.table.Rows;
 import broadside.table.Source;
 import broadside.trace.Status;
 import broadside.trace.Trace;
+import java.util.Optional;
 
 /** Mean wind, turbulence and peak velocity pressure of EN 1991-1-4, chapter 4. */
 final class En1991Wind {
@@ -13,13 +17,23 @@ final class En1991Wind {
     private final Constants constants;
     private final Rows terrain;
     private final En1991Orography orography;
+    private final En1991WindZones zones;
+    private final En1991Speed speed;
     private final String name;
 
     En1991Wind(Edition edition) {
         this.constants = new Constants(edition);
         this.terrain = edition.rows("terrain");
         this.orography = new En1991Orography(edition);
+        this.zones = new En1991WindZones(edition);
+        this.speed = new En1991Speed(edition, zones);
         this.name = constants.source("peak-constant").publicationAndEdition();
+    }
+
+    /** The basic speed of a wind zone; values of the site that do not fit the tables are refused. */
+    Optional<Speed> basicSpeed(SiteOptions options, Optional<Period> returnPeriod) {
+        speed.check(options);
+        return zones.speed(options, returnPeriod);
     }
 
     /** Peak velocity pressure q_p at a height above the ground, Pa. */
@@ -28,7 +42,10 @@ final class En1991Wind {
             throw new NotCovered(name, constants.source("height-limit").place(), "the mean wind profile ends at "
                 + constants.text("height-limit") + " m.", "Ask an engineer for the wind at that height.");
         }
-        double vb = basicSpeed(site, trace);
+        if (zones.isSimplified(site)) {
+            return zones.pressure(site, height, trace);
+        }
+        double vb = speed.basic(site, height, trace);
         double rho = density(site, trace);
         Profile profile = profile(site, height, vb, trace);
         double vm = profile.meanSpeed();
@@ -44,46 +61,12 @@ final class En1991Wind {
         return qp;
     }
 
-    private double basicSpeed(Site site, Trace trace) {
-        double vb0 = trace.given("v_{b,0}", "fundamental basic wind velocity, 10 min mean", site.basicSpeed().metresPerSecond(), "m/s",
-            site.basicSpeed().typed());
-        double dir = factor(site, trace, "direction-factor", "c_{dir}", "direction factor");
-        double season = factor(site, trace, "season-factor", "c_{season}", "season factor");
-        if (site.returnPeriod().isEmpty()) {
-            return line(trace, "basic-speed", "v_b", "basic wind velocity", "peak-constant", "4.2(2), (4.1)")
-                .in("c_{dir}", dir).in("c_{season}", season).in("v_{b,0}", vb0, "m/s")
-                .gives("c_{dir} c_{season} v_{b,0}", dir * season * vb0, "m/s");
-        }
-        double prob = probability(site.returnPeriod().get().years(), site.returnPeriod().get().typed(), trace);
-        return line(trace, "basic-speed", "v_b", "basic wind velocity", "peak-constant", "4.2(2), (4.1) and (4.2)")
-            .in("c_{dir}", dir).in("c_{season}", season).in("c_{prob}", prob).in("v_{b,0}", vb0, "m/s")
-            .gives("c_{dir} c_{season} c_{prob} v_{b,0}", dir * season * prob * vb0, "m/s");
-    }
-
-    private double probability(double years, String typed, Trace trace) {
-        double t = trace.given("T", "return period", years, "years", typed);
-        double k = constants.number("probability-k");
-        double n = constants.number("probability-n");
-        double reference = constants.number("probability-reference");
-        double ratio = (1 - k * Math.log(-Math.log(1 - 1 / t))) / (1 - k * Math.log(-Math.log(1 - reference)));
-        return line(trace, "probability-factor", "c_{prob}", "probability factor", "probability-k", "4.2(2) note 4, (4.2)")
-            .in("T", t, "years")
-            .gives("((1 - " + constants.text("probability-k") + " ln(-ln(1 - 1 / T))) / (1 - " + constants.text("probability-k") + " ln(-ln(1 - "
-                + Numbers.plain(reference) + "))))^" + constants.text("probability-n"), Math.pow(ratio, n), "1");
-    }
-
-    private double factor(Site site, Trace trace, String key, String symbol, String meaning) {
-        return site.options().number(key)
-            .map(typed -> trace.line(key, symbol, meaning).from("given", Status.GIVEN).reads("as given", typed, "1"))
-            .orElseGet(() -> constants.entry(key).into(trace.line(key, symbol, meaning + ", recommended value")));
-    }
-
     private double density(Site site, Trace trace) {
         Trace.Line line = trace.line("air-density", "ρ", "air density");
         return site.options().si("air-density")
             .map(typed -> line.from("given", Status.GIVEN).reads("as given", typed, "kg/m³"))
             .orElseGet(() -> line.from(constants.source("air-density").citation(), constants.source("air-density").status())
-                .reads("recommended value", constants.number("air-density"), "kg/m³"));
+                .reads(constants.source("air-density").citation().startsWith(name) ? "recommended value" : "national value", constants.number("air-density"), "kg/m³"));
     }
 
     /** Mean speed, m/s, and turbulence intensity at a height. */
@@ -117,6 +100,9 @@ final class En1991Wind {
     }
 
     private double orographyFactor(Site site, double height, Trace trace) {
+        if (site.ground().shapeUnknown()) {
+            return orography.worst(trace);
+        }
         return site.ground().topography().map(ground -> orography.factor(ground, height, trace))
             .orElseGet(() -> trace.line("topography-factor", "c_o", "orography factor").from(name + ", 4.3.3", Status.RECALLED)
                 .reads("1: no hill, ridge or escarpment given", 1, "1"));
