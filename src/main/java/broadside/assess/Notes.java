@@ -2,6 +2,7 @@ package broadside.assess;
 
 import broadside.codes.WindCode;
 import broadside.panel.Item;
+import broadside.quantity.Period;
 import broadside.site.Site;
 import broadside.site.Topography;
 import broadside.trace.OwnValue;
@@ -24,7 +25,7 @@ final class Notes {
     static List<Note> of(Job job, Item item, WindCode code, Trace sheet) {
         Notes notes = new Notes();
         notes.overrides(sheet);
-        notes.site(job.site(), code);
+        notes.site(job.site(), code, sheet);
         notes.unused(job.site(), code, sheet);
         notes.returnPeriod(job.site(), sheet);
         notes.stay(job.site());
@@ -50,7 +51,7 @@ final class Notes {
         }
     }
 
-    private void site(Site site, WindCode code) {
+    private void site(Site site, WindCode code, Trace sheet) {
         if (site.ground().unknown().contains(Site.Unknown.TERRAIN)) {
             add(Note.Kind.ASSUMPTION, "The terrain was not known: class " + site.ground().terrain() + ", the smoothest of the code, is taken, which gives the largest load. "
                 + "Anyone who looks at the place can say which class it is.");
@@ -75,7 +76,9 @@ final class Notes {
             String least = code.edition().rows("constants").text("gust-factor", "value");
             add(Note.Kind.CAUTION, "The gust factor given is below " + least + "; a small sign gets more than " + least + " by the formula, not less.");
         }
-        add(Note.Kind.ASSUMPTION, "No shelter by other structures is counted.");
+        add(Note.Kind.ASSUMPTION, uses(sheet, "shelter-factor")
+            ? "The shelter of a wall or fence in front is counted by the factor given: it must stay as long as this stands, be at least as high and not more open than the code asks."
+            : "No shelter by other structures is counted.");
     }
 
     /** Values that were given and that this code does not use: said, so that nobody believes they count. */
@@ -84,7 +87,7 @@ final class Notes {
             add(Note.Kind.CAUTION, "The return period of " + site.returnPeriod().get().typed() + " is not used by this code: the basic wind speed "
                 + (code.terms().options().contains("risk-category") ? "must be that of the map for the risk category." : "counts as it was given."));
         }
-        if (site.ground().altitude().isPresent() && !uses(sheet, "air-temperature")) {
+        if (site.ground().altitude().isPresent() && !uses(sheet, "air-temperature") && !uses(sheet, "altitude-factor")) {
             add(Note.Kind.ASSUMPTION, "The altitude of " + site.ground().altitude().get().typed() + " does not change these loads: this code takes the basic wind "
                 + "speed of the place as it is" + (site.options().si("ground-elevation").isPresent() ? "; the ground elevation is counted." : "."));
         }
@@ -93,7 +96,8 @@ final class Notes {
     private void returnPeriod(Site site, Trace sheet) {
         sheet.find("probability-factor").filter(f -> Math.abs(f.value() - 1) > 1e-9).ifPresent(f -> {
             long percent = Math.round(Math.abs(1 - f.value() * f.value()) * 100);
-            add(Note.Kind.CAUTION, "The wind of a return period of " + site.returnPeriod().orElseThrow().typed() + " is used: its pressure is " + percent + " % "
+            add(Note.Kind.CAUTION, "The wind of a return period of " + site.returnPeriod().map(Period::typed)
+                .orElseGet(() -> number(sheet.find("return-period").orElseThrow().value()) + " years") + " is used: its pressure is " + percent + " % "
                 + (f.value() < 1 ? "lower than that of the code's basic wind. How long a thing stands does not lower the safety that people near it need; the authority "
                     + "decides whether this is allowed." : "higher than that of the code's basic wind."));
         });
@@ -134,7 +138,7 @@ final class Notes {
     private void leastPressures(Site site, Trace sheet) {
         Map<String, Double> own = new HashMap<>();
         sheet.steps().stream().filter(s -> s.name().startsWith("code-pressure/")).forEach(s -> own.put(s.name().substring("code-".length()), s.value()));
-        List<String> raised = own.entrySet().stream().filter(e -> sheet.find(e.getKey()).filter(s -> s.value() > e.getValue()).isPresent())
+        List<String> raised = own.entrySet().stream().filter(e -> sheet.find(e.getKey()).filter(s -> Math.abs(s.value()) > Math.abs(e.getValue())).isPresent())
             .map(e -> e.getKey().substring("pressure/".length())).sorted().toList();
         if (site.authorityMinimum().isPresent() && !own.isEmpty()) {
             add(Note.Kind.CAUTION, raised.isEmpty() ? "The authority's least pressure does not govern: the code gives more in every zone."
@@ -159,7 +163,7 @@ final class Notes {
 
     private void solidity(Job job, Item item, Trace sheet) {
         if (item.panels().stream().anyMatch(p -> p.solidity() < 1)) {
-            if (uses(sheet, "coefficient/all") && !uses(sheet, "porosity-factor")) {
+            if (uses(sheet, "signboard-rule")) {
                 add(Note.Kind.ASSUMPTION, "The code's rule for signboards has no reduction for openings: the board is counted as closed.");
             }
             add(Note.Kind.CAUTION, "The solidity was given by " + job.remark(item.mark(), "solidity-by").orElse("an unnamed source")
