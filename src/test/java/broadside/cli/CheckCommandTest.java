@@ -51,11 +51,11 @@ class CheckCommandTest {
 
     @Test
     void anItemThatIsNotCoveredGivesOne() {
-        Path job = job(folder, SIGN, "\"solidity\": 1.0", "\"solidity\": 0.5");
+        Path job = job(folder, SIGN, "\"clearance\": \"2.5 m\"", "\"clearance\": \"250 m\"");
         CommandLineRun text = CommandLineRun.of("check", job);
         assertThat(text.status()).isEqualTo(1);
         assertThat(text.errors()).isEmpty();
-        assertThat(text.out()).containsIgnoringCase("not covered").contains("solidity 0.5");
+        assertThat(text.out()).containsIgnoringCase("not covered").contains("the mean wind profile ends at 200 m");
         CommandLineRun json = CommandLineRun.of("check", job, "--json");
         assertThat(json.status()).isEqualTo(1);
         assertThat(json.out()).contains("\"outcome\" : \"not-covered\"");

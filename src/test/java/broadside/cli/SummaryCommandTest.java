@@ -73,7 +73,7 @@ class SummaryCommandTest {
 
     @Test
     void anItemThatIsNotCoveredIsStillWrittenAndGivesOne() throws IOException {
-        Path job = job(folder, SIGN, "\"solidity\": 1.0", "\"solidity\": 0.5");
+        Path job = job(folder, SIGN, "\"clearance\": \"2.5 m\"", "\"clearance\": \"250 m\"");
         CommandLineRun run = CommandLineRun.of("summary", job, "-o", pdf("out.pdf"));
         assertThat(run.status()).isEqualTo(1);
         assertThat(run.errors()).isEmpty();

@@ -69,7 +69,7 @@ class JobReaderTest {
             Arguments.of(SIGN, "\"title\":", "\"units\": \"imperial\", \"title\":", "units", "\"imperial\" does not fit"),
             Arguments.of(SIGN, "en-1991-1-4", "en-1992", "basis.code", "\"en-1992/2005\" is not among the codes: asce-7/16, en-1991-1-4/2005"),
             Arguments.of(SIGN, "\"edition\": \"2005\"", "\"edition\": \"2010\"", "basis.code", "\"en-1991-1-4/2010\" is not among the codes"),
-            Arguments.of(SIGN, OVERLAY, "\"overlay\": \"uk\"", "basis.overlay", "\"uk\" is not an overlay of en-1991-1-4/2005"),
+            Arguments.of(SIGN, OVERLAY, "\"overlay\": \"xx\"", "basis.overlay", "\"xx\" is not an overlay of en-1991-1-4/2005; there are de, pt, uk"),
             Arguments.of(SIGN, "\"terrain\": \"II\"", "\"terrain\": \"C\"", "site.terrain", "\"C\" is not a terrain class of EN 1991-1-4:2005"),
             Arguments.of(SIGN, "\"basic-speed\": \"26 m/s\"", "\"basic-speed\": \"0.5 m/s\"", "site.basic-speed", "must lie between 1 m/s and 150 m/s"),
             Arguments.of(SIGN, "\"basic-speed\": \"26 m/s\"", "\"basic-speed\": \"0.7 kPa\"", "site.basic-speed", "\"0.7 kPa\" is a pressure"),

@@ -56,7 +56,7 @@ class MendedTest {
 
     @Test
     void anOverrideThatNamesNoStepIsRefusedAlsoBesideAnItemThatIsNotCovered() {
-        String open = "{\"width\":\"4 m\",\"height\":\"2 m\",\"clearance\":\"2.5 m\",\"solidity\":0.5}";
+        String open = "{\"width\":\"4 m\",\"height\":\"2 m\",\"clearance\":\"250 m\"}";
         String job = sign(BOARD, ",\"overrides\":[{\"name\":\"orografy\",\"value\":1.1,\"reason\":\"r\"}]").replace("}],\"overrides\"",
             "},{\"mark\":\"O\",\"kind\":\"post-sign\",\"boards\":[" + open + "]}],\"overrides\"");
         assertThatThrownBy(() -> assess(job)).isInstanceOf(BadJob.class).hasMessageContaining("orografy");

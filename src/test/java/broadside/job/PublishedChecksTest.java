@@ -128,8 +128,8 @@ class PublishedChecksTest {
 
     @Test
     void anItemThatIsNotCoveredFailsWithTheReason() {
-        String text = job(expected("H1", "base-moment/wall", "\"360 kN m\"", "\"1 kN m\""), "").replace("\"solidity\": 1.0", "\"solidity\": 0.5");
-        assertThat(run(text).lines().get(0).computed()).startsWith("the solidity 0.5 is below 0.8");
+        String text = job(expected("H1", "base-moment/wall", "\"360 kN m\"", "\"1 kN m\""), "").replace("\"height\": \"2.4 m\"", "\"height\": \"250 m\"");
+        assertThat(run(text).lines().get(0).computed()).startsWith("the mean wind profile ends at 200 m");
     }
 
     @ParameterizedTest

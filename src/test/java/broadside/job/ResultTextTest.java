@@ -60,8 +60,8 @@ class ResultTextTest {
         assertThat(node.propertyNames()).contains("case", "label", "direction", "zones", "force_N", "height_m", "base_shear_N", "base_moment_Nm", "torsion_Nm");
         assertThat(node.get("direction").stringValue()).isIn("front", "back");
         assertThat(node.get("force_N").doubleValue()).as("a magnitude").isPositive();
-        assertThat(node.get("base_moment_Nm").doubleValue())
-            .isCloseTo(node.get("force_N").doubleValue() * node.get("height_m").doubleValue(), within(1e-6 * node.get("base_moment_Nm").doubleValue()));
+        assertThat(node.get("base_moment_Nm").doubleValue()).as("with the wind on the posts, where their size is known")
+            .isGreaterThanOrEqualTo(node.get("force_N").doubleValue() * node.get("height_m").doubleValue() * (1 - 1e-6));
         for (JsonNode zone : node.get("zones")) {
             assertThat(zone.propertyNames()).contains("zone", "from_m", "to_m", "coefficient", "pressure_Pa");
             assertThat(zone.get("to_m").doubleValue()).isGreaterThan(zone.get("from_m").doubleValue());
@@ -139,7 +139,7 @@ class ResultTextTest {
 
     @Test
     void anItemThatTheCodeDoesNotCoverSaysWhy() {
-        JsonNode item = Jobs.result(Jobs.changed(Jobs.HOARDING, "\"solidity\": 1.0", "\"solidity\": 0.5")).get("items").get(0);
+        JsonNode item = Jobs.result(Jobs.changed(Jobs.HOARDING, "\"height\": \"2.4 m\"", "\"height\": \"250 m\"")).get("items").get(0);
         assertThat(item.get("outcome").stringValue()).isEqualTo("not-covered");
         assertThat(item.get("reason").propertyNames()).containsExactly("code", "clause", "reason", "instead");
         item.get("reason").forEach(r -> assertThat(r.stringValue()).isNotBlank());

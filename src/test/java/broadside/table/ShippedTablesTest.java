@@ -108,7 +108,7 @@ class ShippedTablesTest {
                 }
             }
         }
-        assertThat(rows.keys()).hasSameSizeAs(file.body());
+        assertThat(rows.keys()).startsWith(file.body().stream().map(cells -> cells.get(0)).toArray(String[]::new));
         return points;
     }
 
