@@ -4,7 +4,7 @@ import broadside.site.Site;
 import broadside.trace.Status;
 import broadside.trace.Trace;
 
-/** The last step to a net pressure, the same for every code: the authority's least pressure, where one is given. */
+/** The last step to a net pressure, the same for every code: the authority's least pressure, where one is given; it holds for suction too. */
 final class NetPressure {
 
     /**
