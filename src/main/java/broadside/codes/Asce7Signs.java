@@ -9,6 +9,7 @@ import broadside.table.Curve;
 import broadside.table.Edition;
 import broadside.table.Grid;
 import broadside.table.Source;
+import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.List;
@@ -22,6 +23,7 @@ final class Asce7Signs {
     private final Curve regions;
     private final Curve longRegions;
     private final Curve returnCorners;
+    private final Status equations;
 
     Asce7Signs(Edition edition) {
         this.constants = new Constants(edition);
@@ -29,13 +31,14 @@ final class Asce7Signs {
         this.regions = edition.curve("solid-signs-case-c");
         this.longRegions = edition.curve("solid-signs-case-c-long");
         this.returnCorners = edition.curve("return-corners");
+        this.equations = Asce7.equations(edition);
     }
 
-    /** What the cases of one panel are worked out from; {@code load} is q_h G without the force coefficient, Pa. */
-    record Sheet(Panel panel, Site site, WindCode code, double q, double gust, double clearness, double aspect, double porosity,
+    /** What the cases of one panel are worked out from. */
+    record Sheet(Panel panel, Site site, WindCode code, Asce7Pressure q, double gust, double clearness, double aspect, double porosity,
                  Trace trace) { }
 
-    List<LoadCase> cases(Panel panel, Site site, WindCode code, double q, double gust, Trace trace) {
+    List<LoadCase> cases(Panel panel, Site site, WindCode code, Asce7Pressure q, double gust, Trace trace) {
         Source place = constants.source("case-b-offset");
         double clearness = line(trace, place, "height-ratio", "s/h", "height of the panel over the height of its top")
             .in("s", panel.height(), "m").in("h", panel.top(), "m").gives("s / h", panel.height() / panel.top(), "1");
@@ -55,11 +58,6 @@ final class Asce7Signs {
     private double porosity(Panel panel, Trace trace) {
         double solidity = trace.given("ε", "solidity", panel.solidity(), "1", "");
         Source place = constants.source("openness-limit");
-        if (!Numbers.above(solidity, constants.number("openness-limit"))) {
-            throw new NotCovered(place.publicationAndEdition(), place.place(), "the solidity " + Numbers.plain(solidity)
-                + " means openings of 30 % or more; such a panel is an open sign (29.4), which is not worked out here.",
-                "Take the panel as closed, which is safe, or ask an engineer for the open sign.");
-        }
         if (solidity == 1) {
             return 1;
         }
@@ -219,14 +217,13 @@ final class Asce7Signs {
     }
 
     private double pressure(Sheet sheet, String zone, String pressureSymbol, double c, String symbol, double least) {
-        Source place = constants.source("openness-limit");
-        String q = "q_h G " + symbol;
-        double value = sheet.q() * sheet.gust() * c;
+        String q = sheet.q().text() + " G " + symbol;
+        double value = sheet.q().value() * sheet.gust() * c;
         String formula = least > 0 ? "max(" + q + "; p_{16})" : q;
         return NetPressure.record(sheet.site(), sheet.code().level(sheet.site()), sheet.trace(), zone, pressureSymbol, (name, own) -> {
-            Trace.Line line = sheet.trace().line(name, own, least > 0 ? "net pressure, not below 16 psf" : "net pressure")
-                .in("q_h", sheet.q(), "Pa").in("G", sheet.gust()).in(symbol, c)
-                .from(place.publicationAndEdition() + ", 29.3, (29.3-1)" + (least > 0 ? " and 29.7" : ""), place.status());
+            Trace.Line line = sheet.q().into(sheet.trace().line(name, own, least > 0 ? "net pressure, not below 16 psf" : "net pressure"))
+                .in("G", sheet.gust()).in(symbol, c)
+                .from(constants.source("openness-limit").publicationAndEdition() + ", 29.3, (29.3-1)" + (least > 0 ? " and 29.7" : ""), equations);
             return least > 0 ? line.in("p_{16}", least, "Pa") : line;
         }, formula, Math.max(value, least));
     }

@@ -9,35 +9,67 @@ import broadside.table.Rows;
 import broadside.table.Source;
 import broadside.trace.Status;
 import broadside.trace.Trace;
+import java.util.OptionalDouble;
 
-/** Velocity pressure of ASCE 7-16, chapter 26, and the gust-effect factor of a rigid structure. */
+/** Velocity pressure of ASCE 7, chapter 26. */
 final class Asce7Velocity {
 
+    /** Where the directionality factor K_d stands. */
+    enum Directionality { IN_VELOCITY_PRESSURE, IN_LOAD_EQUATIONS }
+
+    private final Directionality placed;
     private final Constants constants;
+    private final Rows numbers;
     private final Rows exposures;
     private final Rows directionality;
     private final Asce7Topography topography;
+    private final Asce7Stay stay;
     private final String name;
 
-    Asce7Velocity(Edition edition) {
+    Asce7Velocity(Edition edition, Directionality placed) {
+        this.placed = placed;
         this.constants = new Constants(edition);
+        this.numbers = edition.rows("constants");
         this.exposures = edition.rows("exposure");
         this.directionality = edition.rows("directionality");
         this.topography = new Asce7Topography(edition);
+        this.stay = new Asce7Stay(edition);
         this.name = constants.source("kz-factor").publicationAndEdition();
     }
 
-    /** Velocity pressure q_h at the height h of the top, Pa. */
-    double pressure(Site site, double height, Trace trace) {
-        if (height > constants.metres("z-limit")) {
-            throw new NotCovered(name, constants.source("z-limit").place(), "the table of K_z ends at "
-                + constants.text("z-limit") + " ft.", "Ask an engineer for the wind at that height.");
+    /** A height above the ground, m, and what is worked out there. */
+    record Point(Site site, double height, Asce7Use use) { }
+
+    /** The velocity pressure at a point as it stands in the load equations. */
+    Asce7Pressure inLoads(Point point, Trace trace) {
+        return inLoads(point.use(), velocity(point, trace), trace);
+    }
+
+    /** A velocity pressure that was worked out before, as it stands in the load equations. */
+    Asce7Pressure inLoads(Asce7Use use, double q, Trace trace) {
+        if (placed == Directionality.IN_VELOCITY_PRESSURE) {
+            return new Asce7Pressure(use.pressure(), q, OptionalDouble.empty());
         }
-        double v = trace.given("V", "basic wind speed, 3 s gust", site.basicSpeed().metresPerSecond(), "m/s", site.basicSpeed().typed());
-        double kh = exposureFactor(site.ground().terrain(), height, trace);
-        double kzt = topographyFactor(site, height, trace);
-        Coefficient solid = directionality.number("solid signs", "value");
-        double kd = solid.into(trace.line("directionality-factor", "K_d", "directionality factor, solid signs and walls"));
+        return new Asce7Pressure(use.pressure(), q, OptionalDouble.of(trace.once("K_d of " + use.structure(), () -> directionality(use, trace), known -> known)));
+    }
+
+    private double directionality(Asce7Use use, Trace trace) {
+        return directionality.number(use.structure(), "value").into(trace.line("directionality-factor", "K_d", "directionality factor, " + use.words()));
+    }
+
+    /** Velocity pressure at a point, Pa, K_d in it where the edition puts it there. */
+    double velocity(Point point, Trace trace) {
+        if (point.height() > constants.metres("z-limit")) {
+            throw new NotCovered(name, constants.source("z-limit").place(), "K_z ends at " + constants.text("z-limit") + " ft.",
+                "Ask an engineer for the wind at that height.");
+        }
+        Site site = point.site();
+        Asce7Use use = point.use();
+        Asce7Stay.Speed v = stay.speed(site, trace);
+        double k = exposureFactor(point, trace);
+        double kzt = topographyFactor(point, trace);
+        boolean inside = placed == Directionality.IN_VELOCITY_PRESSURE;
+        double kd = inside ? directionality(use, trace) : 1;
         double ke = elevationFactor(site, trace);
         Source place = constants.source("velocity-constant");
         double constant = constants.number("velocity-constant") * Unit.of(Dimension.PRESSURE, "psf").orElseThrow().toSi()
@@ -45,12 +77,30 @@ final class Asce7Velocity {
         double c = trace.line("velocity-constant", "c_q", "constant of the velocity pressure").from(place.citation(), place.status())
             .reads(constants.text("velocity-constant") + " psf/mph² in SI; the SI form prints " + constants.text("velocity-constant-si")
                 + ", which is 0.06 % less", constant, "kg/m³");
-        return trace.line("velocity-pressure", "q_h", "velocity pressure at the top").in("c_q", c, "kg/m³").in("K_h", kh)
-            .in("K_{zt}", kzt).in("K_d", kd).in("K_e", ke).in("V", v, "m/s").from(place.citation(), place.status())
-            .gives("c_q K_h K_{zt} K_d K_e V²", c * kh * kzt * kd * ke * v * v, "Pa");
+        Trace.Line line = trace.line("velocity-pressure", use.pressure(), "velocity pressure " + use.where()).in("c_q", c, "kg/m³").in(use.exposure(), k)
+            .in("K_{zt}", kzt).in("K_e", ke).in(v.symbol(), v.value(), "m/s").from(place.citation(), place.status());
+        if (inside) {
+            line.in("K_d", kd);
+        }
+        return line.gives("c_q " + use.exposure() + " K_{zt} " + (inside ? "K_d " : "") + "K_e " + v.symbol() + "²", c * k * kzt * kd * ke * v.value() * v.value(), "Pa");
     }
 
-    private double exposureFactor(String exposure, double height, Trace trace) {
+    private double exposureFactor(Point point, Trace trace) {
+        Asce7Use use = point.use();
+        boolean floor = use.cladding() && point.site().ground().terrain().equals("B");
+        if (!floor) {
+            return byProfile(point, "exposure-factor", use.exposure(), trace);
+        }
+        double k = byProfile(point, "profile-exposure-factor", use.exposure() + "'", trace);
+        double least = constants.entry("cladding-least-kz").into(trace.line("least-exposure-factor", "K_{min}", "least coefficient for components and cladding in exposure B"));
+        Source place = constants.source("cladding-least-kz");
+        return trace.line("exposure-factor", use.exposure(), "velocity pressure exposure coefficient " + use.where()).in(use.exposure() + "'", k).in("K_{min}", least)
+            .from(place.citation(), place.status()).gives("max(" + use.exposure() + "'; K_{min})", Math.max(k, least), "1");
+    }
+
+    private double byProfile(Point point, String step, String symbol, Trace trace) {
+        String exposure = point.site().ground().terrain();
+        Asce7Use use = point.use();
         Source place = constants.source("kz-factor");
         Coefficient alpha = exposures.number(exposure, "alpha");
         double a = alpha.into(trace.line("profile-exponent", "α", "exponent of the profile in exposure " + exposure));
@@ -59,29 +109,40 @@ final class Asce7Velocity {
             .reads("read at " + exposure, exposures.number(exposure, "zg").value() * foot(), "m");
         double least = trace.line("least-height", "z_{min}", "least height of the profile").from(place.citation(), place.status())
             .reads(constants.text("kz-least-height") + " ft", constants.metres("kz-least-height"), "m");
-        double z = trace.line("profile-height", "z", "height in the profile: at least 15 ft").in("h", height, "m").in("z_{min}", least, "m")
-            .from(place.citation(), place.status()).gives("max(h; z_{min})", Math.max(height, least), "m");
+        double z = trace.line("profile-height", "z_p", "height in the profile: at least 15 ft").in(use.height(), point.height(), "m").in("z_{min}", least, "m")
+            .from(place.citation(), place.status()).gives("max(" + use.height() + "; z_{min})", Math.max(point.height(), least), "m");
         double factor = constants.number("kz-factor");
-        return trace.line("exposure-factor", "K_h", "velocity pressure exposure coefficient at the top").in("z", z, "m").in("z_g", zg, "m")
-            .in("α", a).from(place.citation(), place.status())
-            .gives(Numbers.plain(factor) + " (z / z_g)^(2 / α)", factor * Math.pow(z / zg, 2 / a), "1");
+        Trace.Line line = trace.line(step, symbol, "velocity pressure exposure coefficient " + use.where() + againstTable()).in("z_p", z, "m").in("z_g", zg, "m").in("α", a)
+            .from(place.citation(), place.status());
+        return z > zg ? line.reads(constants.text("kz-factor") + ", the same from z_g upward", factor, "1")
+            : line.gives(constants.text("kz-factor") + " (z_p / z_g)^(2 / α)", factor * Math.pow(z / zg, 2 / a), "1");
     }
 
-    private double topographyFactor(Site site, double height, Trace trace) {
+    /** Where the cells of the printed table are not what the printed formula gives, by how much. */
+    private String againstTable() {
+        return numbers.has("kz-table-difference") ? ", by the formula; the printed table lies within " + constants.text("kz-table-difference") + " % of it" : "";
+    }
+
+    private double topographyFactor(Point point, Trace trace) {
+        Site site = point.site();
+        String exposure = site.ground().terrain();
         if (site.options().number("topographic-factor").isPresent()) {
             return trace.line("topography-factor", "K_{zt}", "topographic factor").from("given", Status.GIVEN)
                 .reads("as given", site.options().number("topographic-factor").get(), "1");
         }
-        return site.ground().topography().map(ground -> topography.factor(ground, site.ground().terrain(), height, trace))
-            .orElseGet(() -> trace.line("topography-factor", "K_{zt}", "topographic factor").from(name + ", 26.8.2", Status.RECALLED)
-                .reads("1: no hill, ridge or escarpment given", 1, "1"));
+        if (site.ground().topography().isPresent()) {
+            return topography.factor(site.ground().topography().get(), exposure, new Asce7Topography.Height(point.use().height(), point.height()), trace);
+        }
+        return site.ground().shapeUnknown() ? topography.worst(exposure, trace) : trace.line("topography-factor", "K_{zt}", "topographic factor")
+            .from(name + ", 26.8.2", constants.source("topography-least-slope").status()).reads("1: no hill, ridge or escarpment given", 1, "1");
     }
 
     private double elevationFactor(Site site, Trace trace) {
         Source place = constants.source("elevation-exponent");
         if (site.options().si("ground-elevation").isEmpty()) {
-            return trace.line("elevation-factor", "K_e", "ground elevation factor").from(name + ", 26.9", Status.SECOND_HAND)
-                .reads("1, which is permitted at any elevation", 1, "1");
+            Source free = constants.source("elevation-default");
+            return trace.line("elevation-factor", "K_e", "ground elevation factor").from(free.citation(), free.status())
+                .reads("1, which is permitted at any elevation", constants.number("elevation-default"), "1");
         }
         double z = site.options().si("ground-elevation").get();
         trace.given("z_e", "elevation of the ground above the sea", z, "m", site.options().quantities().get("ground-elevation").typed());
@@ -92,58 +153,7 @@ final class Asce7Velocity {
             .from(place.citation(), place.status()).gives("exp(-k_e z_e)", Math.exp(-perMetre * z), "1");
     }
 
-    /** Gust-effect factor G of a rigid structure: 0.85, a value given, or the formula. */
-    double gustFactor(Site site, double width, double height, Trace trace) {
-        if (site.options().word("gust-factor").isPresent()) {
-            return computedGustFactor(site.ground().terrain(), width, height, trace);
-        }
-        if (site.options().number("gust-factor").isPresent()) {
-            return trace.line("gust-factor", "G", "gust-effect factor").from("given", Status.GIVEN)
-                .reads("as given", site.options().number("gust-factor").get(), "1");
-        }
-        return constants.entry("gust-factor").into(trace.line("gust-factor", "G", "gust-effect factor of a rigid structure"));
-    }
-
-    private double computedGustFactor(String exposure, double width, double height, Trace trace) {
-        Source place = constants.source("gust-constant");
-        double foot = foot();
-        Source table = exposures.number(exposure, "zmin").source();
-        double least = line(trace, table, "gust-least-height", "z_{min}", "least equivalent height").reads("read at " + exposure,
-            exposures.number(exposure, "zmin").value() * foot, "m");
-        double share = constants.number("gust-height-share");
-        double z = line(trace, place, "gust-height", "z̄", "equivalent height").in("h", height, "m").in("z_{min}", least, "m")
-            .gives("max(" + Numbers.plain(share) + " h; z_{min})", Math.max(share * height, least), "m");
-        double reference = line(trace, place, "gust-reference-height", "z_r", "reference height").reads(constants.text("reference-height") + " ft",
-            constants.metres("reference-height"), "m");
-        double c = exposures.number(exposure, "c").into(trace.line("turbulence-constant", "c", "turbulence at the reference height"));
-        double n = constants.number("turbulence-exponent-denominator");
-        double iz = line(trace, place, "turbulence-intensity", "I_z", "turbulence intensity at the equivalent height").in("c", c)
-            .in("z_r", reference, "m").in("z̄", z, "m")
-            .gives("c (z_r / z̄)^(1 / " + Numbers.plain(n) + ")", c * Math.pow(reference / z, 1 / n), "1");
-        double l = line(trace, table, "length-constant", "l", "length scale at the reference height").reads("read at " + exposure,
-            exposures.number(exposure, "l").value() * foot, "m");
-        double e = exposures.number(exposure, "epsilon-denominator").value();
-        double lz = line(trace, place, "length-scale", "L_z", "length scale of turbulence").in("l", l, "m").in("z̄", z, "m")
-            .in("z_r", reference, "m").gives("l (z̄ / z_r)^(1 / " + Numbers.plain(e) + ")", l * Math.pow(z / reference, 1 / e), "m");
-        double k = constants.number("gust-background");
-        double p = constants.number("gust-exponent");
-        double q = line(trace, place, "background-response", "Q", "background response").in("B", width, "m").in("h", height, "m")
-            .in("L_z", lz, "m").gives("(1 / (1 + " + Numbers.plain(k) + " ((B + h) / L_z)^" + Numbers.plain(p) + "))^0.5",
-                Math.sqrt(1 / (1 + k * Math.pow((width + height) / lz, p))), "1");
-        double a = constants.number("gust-constant");
-        double slope = constants.number("gust-slope");
-        double g = line(trace, constants.source("gust-peak"), "gust-peak", "g", "peak factor of background response and of wind, both alike")
-            .reads("as printed", constants.number("gust-peak"), "1");
-        return line(trace, place, "gust-factor", "G", "gust-effect factor of a rigid structure").in("g", g).in("I_z", iz).in("Q", q)
-            .gives(Numbers.plain(a) + " (1 + " + Numbers.plain(slope) + " g I_z Q) / (1 + " + Numbers.plain(slope) + " g I_z)",
-                a * (1 + slope * g * iz * q) / (1 + slope * g * iz), "1");
-    }
-
-    private static Trace.Line line(Trace trace, Source place, String step, String symbol, String meaning) {
-        return trace.line(step, symbol, meaning).from(place.citation(), place.status());
-    }
-
-    private static double foot() {
+    static double foot() {
         return Unit.of(Dimension.LENGTH, "ft").orElseThrow().toSi();
     }
 }

@@ -15,6 +15,7 @@ public final class CodeLibrary {
     private static final Map<String, Function<Edition, WindCode>> PROCEDURES = Map.of(
         "en-1991-1-4", En1991::new,
         "asce-7-16", Asce716::new,
+        "asce-7-22", Asce722::new,
         "open-flow", OpenFlow::new);
 
     private final Map<String, WindCode> codes = new LinkedHashMap<>();

@@ -1,0 +1,215 @@
+package broadside.codes;
+
+import broadside.aero.Strip;
+import broadside.codes.LoadCase.Windward;
+import broadside.panel.FacadePanel;
+import broadside.panel.FacadePanel.Backing;
+import broadside.quantity.Dimension;
+import broadside.quantity.Unit;
+import broadside.site.Site;
+import broadside.table.Coefficient;
+import broadside.table.Edition;
+import broadside.table.Rows;
+import broadside.table.Source;
+import broadside.trace.Status;
+import broadside.trace.Trace;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * Components and cladding on the walls of buildings, ASCE 7 chapter 30: zone 5 along both vertical edges, zone 4 between
+ * them. A sign on a solid wall takes them without internal pressure (29.3.2). The values for low buildings that are
+ * allowed up to 90 ft for some shapes are not used.
+ */
+final class Asce7Cladding {
+
+    private final Constants constants;
+    private final Rows external;
+    private final Rows internal;
+    private final Asce7Velocity velocity;
+    private final Asce7WallZones zones;
+    private final Status equations;
+    private final String chapter;
+
+    Asce7Cladding(Edition edition, Asce7Velocity velocity) {
+        this.constants = new Constants(edition);
+        this.external = edition.rows("wall-cladding");
+        this.internal = edition.rows("internal-pressure");
+        this.velocity = velocity;
+        this.zones = new Asce7WallZones(edition);
+        this.equations = Asce7.equations(edition);
+        this.chapter = constants.source("cladding-low-height").citation();
+    }
+
+    /** Effective wind area with the two areas between which GC_p changes, m2. */
+    private record Area(double effective, double small, double large) { }
+
+    /** What the zones of one panel are worked out from; pressures on the windward face and on the others. */
+    private record Sheet(Site site, WindCode code, boolean low, Asce7Pressure pushed, Asce7Pressure pulled, double flatRoof, double internal, double least,
+                         List<Strip> strips, Trace trace) { }
+
+    List<LoadCase> cases(FacadePanel facade, Site site, WindCode code, Trace trace) {
+        if (facade.backing() == Backing.WALL) {
+            attached(facade, trace);
+        }
+        double h = height(facade, trace);
+        boolean low = !Numbers.above(h, constants.metres("cladding-low-height"));
+        Asce7Pressure top = velocity.inLoads(new Asce7Velocity.Point(site, h, Asce7Use.CLADDING_TOP), trace);
+        Asce7Pressure windward = low ? top : atPanel(facade, site, trace);
+        double a = zones.edge(facade, h, low, trace);
+        Sheet sheet = new Sheet(site, code, low, windward, top, flatRoof(facade, low, trace), internal(facade, trace), least(trace), zones.strips(facade, a, trace), trace);
+        Area area = area(facade, low, trace);
+        return List.of(one(sheet, area, "pushed", "pushed towards the wall"), one(sheet, area, "pulled", "pulled off the wall"));
+    }
+
+    /** A sign on a wall: near to it and, unless it touches, well inside its free edges. The wall stands on the ground. */
+    private void attached(FacadePanel facade, Trace trace) {
+        if (facade.gap().isEmpty() || facade.gap().get().metres() == 0) {
+            return;
+        }
+        Source place = constants.source("attached-gap");
+        double gap = trace.given("g_w", "gap between the wall and the panel", facade.gap().get().metres(), "m", facade.gap().get().typed());
+        String instead = "Enter it as a free-standing sign, with its real height above the ground.";
+        if (Numbers.above(gap, constants.metres("attached-gap"))) {
+            throw new NotCovered(place.publicationAndEdition(), place.place(), "the gap of " + facade.gap().get().typed() + " to the wall is wider than "
+                + constants.text("attached-gap") + " ft; such a sign is no attached sign.", instead);
+        }
+        double above = facade.building().height().metres() - facade.bottom().metres() - facade.height().metres();
+        double nearest = Math.min(above, Math.min(facade.fromCorner().metres(), facade.fromFarCorner()));
+        if (!Numbers.atLeast(nearest, constants.metres("attached-edge"))) {
+            throw new NotCovered(place.publicationAndEdition(), constants.source("attached-edge").place(), "the panel stands off the wall and comes nearer than "
+                + constants.text("attached-edge") + " ft to its side or top edge; such a sign is no attached sign.", instead);
+        }
+    }
+
+    private double height(FacadePanel facade, Trace trace) {
+        double given = trace.given("h_b", "height of the building", facade.building().height().metres(), "m", facade.building().height().typed());
+        return line(trace, chapter, equations, "reference-height", "h", "mean height of the roof, taken as the height of the building").in("h_b", given, "m")
+            .gives("h_b", given, "m");
+    }
+
+    /** High building: the windward face has the velocity pressure at its own height; that of the top of the panel is the largest on it. */
+    private Asce7Pressure atPanel(FacadePanel facade, Site site, Trace trace) {
+        Trace part = trace.part("pushed");
+        double z = line(part, chapter, equations, "reference-height", "z", "height of the top of the panel").in("g", facade.bottom().metres(), "m")
+            .in("s", facade.height().metres(), "m").gives("g + s", facade.bottom().metres() + facade.height().metres(), "m");
+        return velocity.inLoads(new Asce7Velocity.Point(site, z, Asce7Use.CLADDING), part);
+    }
+
+    private double flatRoof(FacadePanel facade, boolean low, Trace trace) {
+        double limit = constants.number("flat-roof-slope");
+        boolean flat = low && facade.building().roofSlope().filter(slope -> !Numbers.above(Math.toDegrees(slope.radians()), limit)).isPresent();
+        if (!flat) {
+            return 1;
+        }
+        Source place = constants.source("flat-roof-factor");
+        return line(trace, place.citation(), place.status(), "flat-roof-factor", "k_r", "reduction for a roof that is nearly flat")
+            .reads(constants.text("flat-roof-factor") + ", as the slope of the roof, " + facade.building().roofSlope().get().typed() + ", is not above "
+                + constants.text("flat-roof-slope") + " degrees", constants.number("flat-roof-factor"), "1");
+    }
+
+    private double internal(FacadePanel facade, Trace trace) {
+        if (facade.backing() == Backing.WALL) {
+            return constants.entry("attached-internal").into(trace.line("internal-coefficient", "C_{pi}", "internal pressure coefficient GC_pi: none for a sign on a solid wall"));
+        }
+        return internal.number(facade.building().enclosure().word(), "value")
+            .into(trace.line("internal-coefficient", "C_{pi}", "internal pressure coefficient GC_pi of either sign, " + facade.building().enclosure().word() + " building"));
+    }
+
+    private double least(Trace trace) {
+        Source place = constants.source("cladding-minimum-pressure");
+        return line(trace, place.citation(), place.status(), "minimum-pressure", "p_{16}", "least pressure on cladding, either way")
+            .reads(constants.text("cladding-minimum-pressure") + " psf", constants.pascals("cladding-minimum-pressure"), "Pa");
+    }
+
+    private Area area(FacadePanel facade, boolean low, Trace trace) {
+        double b = facade.width().metres();
+        double s = facade.height().metres();
+        double parts = constants.number("effective-width-divisor");
+        Source place = constants.source("effective-width-divisor");
+        double effective = line(trace, place.citation(), place.status(), "effective-area", "A", "effective wind area: the span, by the width or a third of the span if that is more")
+            .in("B", b, "m").in("s", s, "m").gives("max(B; s) max(min(B; s); max(B; s) / " + Numbers.plain(parts) + ")",
+                Math.max(b, s) * Math.max(Math.min(b, s), Math.max(b, s) / parts), "m²");
+        String row = (low ? "low" : "high") + "/pushed/4";
+        return new Area(effective, limit(row, "small", "A_1", trace), limit(row, "large", "A_2", trace));
+    }
+
+    private double limit(String row, String end, String symbol, Trace trace) {
+        Coefficient printed = external.number(row, end + "-area");
+        return line(trace, printed.source().citation(), printed.source().status(), "area-limit/" + end, symbol, "area at which GC_p is printed, the " + end + " one")
+            .reads(Numbers.plain(printed.value()) + " ft²", printed.value() * Unit.of(Dimension.AREA, "ft2").orElseThrow().toSi(), "m²");
+    }
+
+    private LoadCase one(Sheet sheet, Area area, String load, String label) {
+        List<ZonePressure> found = new ArrayList<>();
+        for (Strip strip : sheet.strips()) {
+            String zone = strip.name();
+            Optional<ZonePressure> before = found.stream().filter(z -> z.zone().equals(zone)).findFirst();
+            double c = before.isPresent() ? before.get().coefficient() : coefficient(sheet, area, load, zone);
+            double p = before.isPresent() ? before.get().pressure() : pressure(sheet, load, zone, c);
+            found.add(new ZonePressure(zone, "p_" + lowered(load, zone), strip.from(), strip.to(), strip.width(), c, p));
+        }
+        return new LoadCase(load, label, Windward.NONE, found, 0, Optional.empty(), 0, 0);
+    }
+
+    /** Below the line: 4+ for pressure in zone 4, 4- for suction. */
+    private static String lowered(String load, String zone) {
+        return "{" + zone + (load.equals("pushed") ? "+" : "-") + "}";
+    }
+
+    /** External and internal pressure together, on the velocity pressure of the face. */
+    private double coefficient(Sheet sheet, Area area, String load, String zone) {
+        String symbol = "C_" + lowered(load, zone);
+        boolean pushed = load.equals("pushed");
+        String row = (sheet.low() ? "low/" : "high/") + load + "/" + zone;
+        Status status = external.number(row, "small").source().status();
+        double gcp = external(row, area, sheet.trace().line("external-coefficient/" + load + "/" + zone, symbol + "'", "external pressure coefficient GC_p of zone " + zone));
+        boolean unlike = pushed && !sheet.low();
+        double ratio = unlike ? sheet.pulled().q() / sheet.pushed().q() : 1;
+        Trace.Line line = line(sheet.trace(), chapter, status, "coefficient/" + load + "/" + zone, symbol, "net pressure coefficient of zone " + zone + ", " + load)
+            .in(symbol + "'", gcp).in("C_{pi}", sheet.internal());
+        if (sheet.flatRoof() != 1) {
+            line.in("k_r", sheet.flatRoof());
+        }
+        if (unlike) {
+            line.in("q_h", sheet.pulled().q(), "Pa").in("q_z", sheet.pushed().q(), "Pa");
+        }
+        return line.gives((sheet.flatRoof() == 1 ? "" : "k_r ") + symbol + "' " + (pushed ? "+" : "-") + " C_{pi}" + (unlike ? " q_h / q_z" : ""),
+            gcp * sheet.flatRoof() + (pushed ? 1 : -1) * sheet.internal() * ratio, "1");
+    }
+
+    /** GC_p runs straight over the logarithm of the area between the two printed areas and is constant beyond them. */
+    private double external(String row, Area area, Trace.Line line) {
+        Coefficient small = external.number(row, "small");
+        Coefficient large = external.number(row, "large");
+        if (!Numbers.above(area.effective(), area.small())) {
+            return new Coefficient(small.value(), "1", small.source(), "printed for " + external.text(row, "small-area") + " ft² and less").into(line);
+        }
+        if (Numbers.atLeast(area.effective(), area.large())) {
+            return new Coefficient(large.value(), "1", large.source(), "printed for " + external.text(row, "large-area") + " ft² and more").into(line);
+        }
+        Status straight = Status.of(external.text(row, "straight")).orElseThrow();
+        String first = Numbers.plain(Math.abs(small.value()));
+        String formula = first + " + (" + Numbers.plain(Math.abs(large.value())) + " - " + first + ") ln(A / A_1) / ln(A_2 / A_1)";
+        double value = small.value() + (large.value() - small.value()) * Math.log(area.effective() / area.small()) / Math.log(area.large() / area.small());
+        return line.in("A", area.effective(), "m²").in("A_1", area.small(), "m²").in("A_2", area.large(), "m²")
+            .from(small.source().citation(), small.source().status().weaker(straight)).gives(small.value() < 0 ? "-(" + formula + ")" : formula, value, "1");
+    }
+
+    private double pressure(Sheet sheet, String load, String zone, double c) {
+        boolean pushed = load.equals("pushed");
+        String symbol = "C_" + lowered(load, zone);
+        Asce7Pressure q = pushed ? sheet.pushed() : sheet.pulled();
+        String text = q.text() + " " + symbol;
+        double value = q.value() * c;
+        return NetPressure.record(sheet.site(), sheet.code().level(sheet.site()), sheet.trace(), load + "/" + zone, "p_" + lowered(load, zone), (name, own) ->
+            q.into(line(sheet.trace(), chapter, equations, name, own, "net pressure in zone " + zone + ", " + load + ", not below 16 psf either way")).in(symbol, c)
+                .in("p_{16}", sheet.least(), "Pa"),
+            pushed ? "max(" + text + "; p_{16})" : "min(" + text + "; -p_{16})", pushed ? Math.max(value, sheet.least()) : Math.min(value, -sheet.least()));
+    }
+
+    private static Trace.Line line(Trace trace, String place, Status status, String step, String symbol, String meaning) {
+        return trace.line(step, symbol, meaning).from(place, status);
+    }
+}
