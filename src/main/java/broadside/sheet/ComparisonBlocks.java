@@ -147,8 +147,8 @@ public final class ComparisonBlocks {
         double factor = median(comparison.codes().stream().map(l -> l.found().orElseThrow().coefficient()).toList());
         List<String> sentences = new ArrayList<>();
         for (Line line : comparison.lines()) {
-            line.found().ifPresent(f -> sentences.add(line.name() + ": velocity pressure " + off(f.velocity(), velocity) + ", everything else together "
-                + off(f.coefficient(), factor) + " the middle of the codes." + (line.why().isEmpty() ? "" : " " + line.why())
+            line.found().ifPresent(f -> sentences.add(line.name() + ": velocity pressure " + off(f.velocity(), velocity) + " the middle of the codes, everything else together "
+                + off(f.coefficient(), factor) + " it." + (line.why().isEmpty() ? "" : " " + line.why())
                 + (f.recalled() > 0 ? " " + Math.round(f.recalled() * 100) + " % of its steps rest on figures not yet checked against print." : "")));
         }
         blocks.add(new Notes(sentences));
