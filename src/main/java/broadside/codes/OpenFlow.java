@@ -26,7 +26,7 @@ final class OpenFlow implements WindCode {
         this.aside = new OpenFlowAside(edition);
         this.members = new OpenFlowMembers(edition);
         String name = edition.property("edition");
-        Level level = new Level("characteristic", "characteristic", "unfactored", 1, "no code, so no partial factor", name, Status.DERIVED);
+        Level level = new Level("characteristic", "characteristic", "unfactored", 1, "no code and no partial factor", name, Status.DERIVED);
         SiteTerms terms = new SiteTerms(SiteTerms.averagings(edition), List.of(), edition.property("smoothest-terrain"), OPTIONS);
         this.facts = new CodeFacts(edition, terms, level, new PanelSymbols("b", "h", "z_g"), "q");
     }

@@ -104,7 +104,8 @@ final class OpenFlowWind {
         if (Numbers.above(least, typed) || Numbers.above(typed, greatest)) {
             Source ends = constants.source(typed < least ? "least-roughness" : "greatest-roughness");
             throw new NotCovered(ends.publicationAndEdition(), ends.place(), "roughness lengths are printed from " + Numbers.plain(least) + " m for the sea to "
-                + Numbers.plain(greatest) + " m for the middle of a large city; this one is " + Numbers.plain(typed) + " m.", "Give one of those.");
+                + Numbers.plain(greatest) + " m for suburbs and forest; this one is " + Numbers.plain(typed) + " m.",
+                "Give the nearest one of those; up to 10 m above the ground the smaller one gives the larger load.");
         }
         return trace.line("roughness-length", "z_0", "roughness length of the ground").from("given", Status.GIVEN)
             .reads("as given: " + site.ground().terrain(), typed, "m");
