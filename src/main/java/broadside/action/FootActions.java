@@ -260,17 +260,22 @@ public final class FootActions {
     private static List<PanelZones> zones(Combination combination) {
         return combination.panels().stream().map(p -> new PanelZones(p.panel().part(), p.panel().middle() - p.panel().width() / 2,
             p.load().zones(), p.panel().kind() == Panel.Kind.WALL
-                ? p.load().zones().stream().map(z -> z.pressure() * p.panel().height() * p.height()).toList() : List.of())).toList();
+                ? p.load().zones().stream().map(z -> p.peak() * z.pressure() * p.panel().height() * p.height()).toList() : List.of())).toList();
     }
 
     /** Moment at the ground for each metre of a wall, zone by zone. */
     private static void perMetre(PanelForce panel, Names names, Trace trace) {
         String h = names.panel().height();
         for (ZonePressure zone : panel.load().zones()) {
-            trace.line("moment-per-metre/" + names.load() + "/" + zone.zone(), "m_{" + Names.bare(zone.symbol()) + "}",
-                "moment at the ground for each metre of wall").in(zone.symbol(), zone.pressure(), "Pa").in(h, panel.panel().height(), "m")
-                .in(names.of("z"), panel.height(), "m").from(STATICS, Status.DERIVED)
-                .gives(zone.symbol() + " " + h + " " + names.of("z"), zone.pressure() * panel.panel().height() * panel.height(), "N m/m");
+            Trace.Line line = trace.line("moment-per-metre/" + names.load() + "/" + zone.zone(), "m_{" + Names.bare(zone.symbol()) + "}",
+                "moment at the ground for each metre of wall" + (panel.peak() == 1 ? "" : ", at the windward edge")).in(zone.symbol(), zone.pressure(), "Pa")
+                .in(h, panel.panel().height(), "m").in(names.of("z"), panel.height(), "m").from(STATICS, Status.DERIVED);
+            double mean = zone.pressure() * panel.panel().height() * panel.height();
+            if (panel.peak() == 1) {
+                line.gives(zone.symbol() + " " + h + " " + names.of("z"), mean, "N m/m");
+            } else {
+                line.reads("the mean, raised to the greatest pressure of the straight line along the wall", panel.peak() * mean, "N m/m");
+            }
         }
     }
 

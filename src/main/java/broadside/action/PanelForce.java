@@ -45,6 +45,14 @@ record PanelForce(Panel panel, LoadCase load, double force, double height, doubl
         return force / load.zones().stream().mapToDouble(z -> z.pressure() * z.width() * panel.height()).sum();
     }
 
+    /**
+     * The greatest pressure of the panel over that of its zone. It is 1, except in a case that moves its resultant
+     * without a rule of its own for that: there the pressure falls in a straight line, as in {@link LineLoad}.
+     */
+    double peak() {
+        return load.rule().isPresent() ? 1 : 1 + 6 * Math.abs(load.shift()) / panel.width();
+    }
+
     /** Force per metre along the panel; a least force of the code raises all zones alike. */
     LineLoad line() {
         List<ZonePressure> zones = load.zones();

@@ -99,4 +99,17 @@ class FootActionsTest {
         assertThat(find(result, "centred", "front").force()).isCloseTo(6000 + 1400, within(1e-9));
         assertThat(find(result, "eccentric", "front").force()).isCloseTo(6000 + 1000, within(1e-9));
     }
+
+    /** 1 kPa on average, resultant a tenth of the width off the middle: the straight line has 1 + 6 x 0.1 = 1.6 kPa at that edge; times 2 m, times an arm of 1 m. */
+    @Test
+    void pressureThatFallsInAStraightLineHasItsGreatestMomentPerMetreAtTheEdge() {
+        Panel wall = new Panel("", Panel.Kind.WALL, 10, 2, 0, 0, 1, 0, 0, new Panel.AsTyped("", "", "", ""));
+        Trace trace = new Trace();
+        LoadCase line = even("oblique", wall, 1000, 1);
+        CaseAction action = FootActions.of(List.of(new PanelCases(wall, List.of(even("normal", wall, 1000, 0), line, line.mirrored(10)))), Cases.SYMBOLS, Cases.ALONE,
+            trace).cases().stream().filter(c -> c.name().equals("oblique")).findFirst().orElseThrow();
+        assertThat(trace.find("moment-per-metre/oblique/all").orElseThrow().value()).isCloseTo(1600 * 2 * 1, within(1e-9));
+        assertThat(action.zones().get(0).perMetre()).hasSize(1).allSatisfy(m -> assertThat(m).isCloseTo(3200, within(1e-9)));
+        assertThat(trace.find("moment-per-metre/normal/all").orElseThrow().value()).isCloseTo(2000, within(1e-9));
+    }
 }
