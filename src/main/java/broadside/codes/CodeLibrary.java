@@ -16,6 +16,7 @@ public final class CodeLibrary {
         "en-1991-1-4", En1991::new,
         "asce-7-16", Asce716::new,
         "asce-7-22", Asce722::new,
+        "is-875-3", Is875::new,
         "open-flow", OpenFlow::new);
 
     private final Map<String, WindCode> codes = new LinkedHashMap<>();
