@@ -42,7 +42,7 @@ abstract class Asce7 implements WindCode {
         this.risk = edition.rows("risk-categories");
         this.signs = new Asce7Signs(edition);
         this.openSigns = new Asce7OpenSigns(edition);
-        this.cladding = new Asce7Cladding(edition, velocity);
+        this.cladding = new Asce7Cladding(edition, velocity, new Asce7Attached(edition, velocity, gust, signs));
         this.constants = new Constants(edition);
         this.equations = equations(edition);
         Coefficient service = edition.rows("load-combinations").number("allowable-full-dead", "w");

@@ -16,6 +16,7 @@ import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /**
  * Components and cladding on the walls of buildings, ASCE 7 chapter 30: zone 5 along both vertical edges, zone 4 between
@@ -28,15 +29,17 @@ final class Asce7Cladding {
     private final Rows external;
     private final Rows internal;
     private final Asce7Velocity velocity;
+    private final Asce7Attached attached;
     private final Asce7WallZones zones;
     private final Status equations;
     private final String chapter;
 
-    Asce7Cladding(Edition edition, Asce7Velocity velocity) {
+    Asce7Cladding(Edition edition, Asce7Velocity velocity, Asce7Attached attached) {
         this.constants = new Constants(edition);
         this.external = edition.rows("wall-cladding");
         this.internal = edition.rows("internal-pressure");
         this.velocity = velocity;
+        this.attached = attached;
         this.zones = new Asce7WallZones(edition);
         this.equations = Asce7.equations(edition);
         this.chapter = constants.source("cladding-low-height").citation();
@@ -45,42 +48,24 @@ final class Asce7Cladding {
     /** Effective wind area with the two areas between which GC_p changes, m2. */
     private record Area(double effective, double small, double large) { }
 
-    /** What the zones of one panel are worked out from; pressures on the windward face and on the others. */
-    private record Sheet(Site site, WindCode code, boolean low, Asce7Pressure pushed, Asce7Pressure pulled, double flatRoof, double internal, double least,
+    /** Velocity pressures on the windward face of the wall and on the others. */
+    private record Faces(Asce7Pressure windward, Asce7Pressure other) { }
+
+    /** What the zones of one panel are worked out from; the least pressures come from chapter 30 and from the panel as a free-standing sign. */
+    private record Sheet(Site site, WindCode code, boolean low, Faces faces, double flatRoof, double internal, double least, OptionalDouble free,
                          List<Strip> strips, Trace trace) { }
 
     List<LoadCase> cases(FacadePanel facade, Site site, WindCode code, Trace trace) {
-        if (facade.backing() == Backing.WALL) {
-            attached(facade, trace);
-        }
         double h = height(facade, trace);
         boolean low = !Numbers.above(h, constants.metres("cladding-low-height"));
         Asce7Pressure top = velocity.inLoads(new Asce7Velocity.Point(site, h, Asce7Use.CLADDING_TOP), trace);
         Asce7Pressure windward = low ? top : atPanel(facade, site, trace);
         double a = zones.edge(facade, h, low, trace);
-        Sheet sheet = new Sheet(site, code, low, windward, top, flatRoof(facade, low, trace), internal(facade, trace), least(trace), zones.strips(facade, a, trace), trace);
+        List<Strip> strips = zones.strips(facade, a, trace);
+        OptionalDouble free = attached.freeStanding(facade, site, code, trace);
+        Sheet sheet = new Sheet(site, code, low, new Faces(windward, top), flatRoof(facade, low, trace), internal(facade, trace), least(trace), free, strips, trace);
         Area area = area(facade, low, trace);
         return List.of(one(sheet, area, "pushed", "pushed towards the wall"), one(sheet, area, "pulled", "pulled off the wall"));
-    }
-
-    /** A sign on a wall: near to it and, unless it touches, well inside its free edges. The wall stands on the ground. */
-    private void attached(FacadePanel facade, Trace trace) {
-        if (facade.gap().isEmpty() || facade.gap().get().metres() == 0) {
-            return;
-        }
-        Source place = constants.source("attached-gap");
-        double gap = trace.given("g_w", "gap between the wall and the panel", facade.gap().get().metres(), "m", facade.gap().get().typed());
-        String instead = "Enter it as a free-standing sign, with its real height above the ground.";
-        if (Numbers.above(gap, constants.metres("attached-gap"))) {
-            throw new NotCovered(place.publicationAndEdition(), place.place(), "the gap of " + facade.gap().get().typed() + " to the wall is wider than "
-                + constants.text("attached-gap") + " ft; such a sign is no attached sign.", instead);
-        }
-        double above = facade.building().height().metres() - facade.bottom().metres() - facade.height().metres();
-        double nearest = Math.min(above, Math.min(facade.fromCorner().metres(), facade.fromFarCorner()));
-        if (!Numbers.atLeast(nearest, constants.metres("attached-edge"))) {
-            throw new NotCovered(place.publicationAndEdition(), constants.source("attached-edge").place(), "the panel stands off the wall and comes nearer than "
-                + constants.text("attached-edge") + " ft to its side or top edge; such a sign is no attached sign.", instead);
-        }
     }
 
     private double height(FacadePanel facade, Trace trace) {
@@ -166,14 +151,14 @@ final class Asce7Cladding {
         Status status = external.number(row, "small").source().status();
         double gcp = external(row, area, sheet.trace().line("external-coefficient/" + load + "/" + zone, symbol + "'", "external pressure coefficient GC_p of zone " + zone));
         boolean unlike = pushed && !sheet.low();
-        double ratio = unlike ? sheet.pulled().q() / sheet.pushed().q() : 1;
+        double ratio = unlike ? sheet.faces().other().q() / sheet.faces().windward().q() : 1;
         Trace.Line line = line(sheet.trace(), chapter, status, "coefficient/" + load + "/" + zone, symbol, "net pressure coefficient of zone " + zone + ", " + load)
             .in(symbol + "'", gcp).in("C_{pi}", sheet.internal());
         if (sheet.flatRoof() != 1) {
             line.in("k_r", sheet.flatRoof());
         }
         if (unlike) {
-            line.in("q_h", sheet.pulled().q(), "Pa").in("q_z", sheet.pushed().q(), "Pa");
+            line.in("q_h", sheet.faces().other().q(), "Pa").in("q_z", sheet.faces().windward().q(), "Pa");
         }
         return line.gives((sheet.flatRoof() == 1 ? "" : "k_r ") + symbol + "' " + (pushed ? "+" : "-") + " C_{pi}" + (unlike ? " q_h / q_z" : ""),
             gcp * sheet.flatRoof() + (pushed ? 1 : -1) * sheet.internal() * ratio, "1");
@@ -200,13 +185,16 @@ final class Asce7Cladding {
     private double pressure(Sheet sheet, String load, String zone, double c) {
         boolean pushed = load.equals("pushed");
         String symbol = "C_" + lowered(load, zone);
-        Asce7Pressure q = pushed ? sheet.pushed() : sheet.pulled();
-        String text = q.text() + " " + symbol;
-        double value = q.value() * c;
-        return NetPressure.record(sheet.site(), sheet.code().level(sheet.site()), sheet.trace(), load + "/" + zone, "p_" + lowered(load, zone), (name, own) ->
-            q.into(line(sheet.trace(), chapter, equations, name, own, "net pressure in zone " + zone + ", " + load + ", not below 16 psf either way")).in(symbol, c)
-                .in("p_{16}", sheet.least(), "Pa"),
-            pushed ? "max(" + text + "; p_{16})" : "min(" + text + "; -p_{16})", pushed ? Math.max(value, sheet.least()) : Math.min(value, -sheet.least()));
+        Asce7Pressure q = pushed ? sheet.faces().windward() : sheet.faces().other();
+        double least = Math.max(sheet.least(), sheet.free().orElse(0));
+        double value = pushed ? Math.max(q.value() * c, least) : Math.min(q.value() * c, -least);
+        String sign = pushed ? "" : "-";
+        String formula = (pushed ? "max(" : "min(") + q.text() + " " + symbol + "; " + sign + "p_{16}" + (sheet.free().isPresent() ? "; " + sign + "p_f)" : ")");
+        return NetPressure.record(sheet.site(), sheet.code().level(sheet.site()), sheet.trace(), load + "/" + zone, "p_" + lowered(load, zone), (name, own) -> {
+            Trace.Line line = q.into(line(sheet.trace(), chapter, equations, name, own, "net pressure in zone " + zone + ", " + load + ", not below 16 psf either way"))
+                .in(symbol, c).in("p_{16}", sheet.least(), "Pa");
+            return sheet.free().isPresent() ? line.in("p_f", sheet.free().getAsDouble(), "Pa") : line;
+        }, formula, value);
     }
 
     private static Trace.Line line(Trace trace, String place, Status status, String step, String symbol, String meaning) {
