@@ -159,6 +159,7 @@ final class En1991Facade {
 
     /** By straight lines in h/d, and between 1 m2 and 10 m2 by the logarithm of the area. */
     private double coefficient(String zone, double ratio, Sheet sheet) {
+        double held = Numbers.above(ratio, table.last()) ? ratio : Math.min(ratio, table.last());
         double small = constants.number("cpe-small-area");
         double large = constants.number("cpe-large-area");
         String meaning = "external pressure coefficient of zone " + zone;
@@ -166,11 +167,11 @@ final class En1991Facade {
         double area = sheet.area();
         boolean least = !Numbers.above(area, small);
         if (least || Numbers.atLeast(area, large)) {
-            return table.at(zone + (least ? "-1" : "-10"), ratio).into(trace.line("coefficient/" + zone, "c_" + zone, meaning + (least
+            return table.at(zone + (least ? "-1" : "-10"), held).into(trace.line("coefficient/" + zone, "c_" + zone, meaning + (least
                 ? ", area not above " : ", area not below ") + Numbers.plain(least ? small : large) + " m²").in("h/d", ratio).in("A_p", area, "m²"));
         }
-        Coefficient one = table.at(zone + "-1", ratio);
-        Coefficient ten = table.at(zone + "-10", ratio);
+        Coefficient one = table.at(zone + "-1", held);
+        Coefficient ten = table.at(zone + "-10", held);
         String ofOne = "c_{" + zone + ",1}";
         String ofTen = "c_{" + zone + ",10}";
         double c1 = one.into(trace.line("coefficient-1/" + zone, ofOne, meaning + " for 1 m²").in("h/d", ratio));

@@ -12,6 +12,9 @@ import java.util.List;
 /** The zones A, B and C of a wall along the wind, EN 1991-1-4, figure 7.5, and those that a panel lies in. */
 final class En1991FacadeZones {
 
+    /** Shorter stretches come from binary rounding only, m. */
+    private static final double ROUNDING = 1e-9;
+
     private final Rows zones;
 
     En1991FacadeZones(Edition edition) {
@@ -40,7 +43,7 @@ final class En1991FacadeZones {
     static List<Strip> ofPanel(List<Strip> wall, double fromCorner, double width) {
         List<Strip> parts = new ArrayList<>();
         for (Strip zone : wall) {
-            if (Strip.overlap(zone.from(), zone.to(), fromCorner, fromCorner + width) > 1e-9) {
+            if (Strip.overlap(zone.from(), zone.to(), fromCorner, fromCorner + width) > ROUNDING) {
                 parts.add(new Strip(zone.name(), Math.max(zone.from(), fromCorner) - fromCorner, Math.min(zone.to(), fromCorner + width) - fromCorner));
             }
         }
@@ -49,9 +52,14 @@ final class En1991FacadeZones {
 
     /** The same parts told from the other edge of the panel. */
     static List<Strip> turned(List<Strip> parts, double width) {
-        List<Strip> turned = new ArrayList<>(parts.stream().map(p -> new Strip(p.name(), width - p.to(), width - p.from())).toList());
+        List<Strip> turned = new ArrayList<>(parts.stream().map(p -> new Strip(p.name(), exact(width - p.to()), width - p.from())).toList());
         Collections.reverse(turned);
         return turned;
+    }
+
+    /** An edge that misses the edge of the panel by binary rounding only lies on it. */
+    private static double exact(double from) {
+        return Math.abs(from) < ROUNDING ? 0 : from;
     }
 
     private static String rounded(double metres) {

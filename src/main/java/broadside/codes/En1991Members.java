@@ -38,7 +38,7 @@ final class En1991Members implements MemberRule {
         double d = trace.given("d_p", "depth of a post along the wind", section.depth(), "m", "");
         double ratio = trace.line("section-ratio", "d/b", "depth of the post over its width").in("d_p", d, "m").in("b_p", section.width(), "m")
             .from(place.citation(), place.status()).gives("d_p / b_p", d / section.width(), "1");
-        double cf0 = rectangular.at("c_f0", ratio).into(trace.line("member-coefficient", "c_{f,0}", "force coefficient of a rectangular section").in("d/b", ratio));
+        double cf0 = rectangular.at("c_f0", Numbers.atLeast(ratio, rectangular.first()) ? Math.max(ratio, rectangular.first()) : ratio).into(trace.line("member-coefficient", "c_{f,0}", "force coefficient of a rectangular section").in("d/b", ratio));
         double corner = constants.entry("corner-factor").into(trace.line("corner-factor", "ψ_r", "corner factor, sharp corners"));
         double end = end(trace);
         return trace.line("coefficient/post", "c_p", "force coefficient of the post").in("c_{f,0}", cf0).in("ψ_r", corner).in("ψ_λ", end)
