@@ -99,15 +99,20 @@ final class SiteReader {
 
     private void speedIsGiven(WindCode code, Values values, Optional<Speed> speed, Optional<Speed> other, Optional<Averaging> averaging) {
         boolean typed = values.quantity("basic-speed", Speed.class).isPresent();
-        if (speed.isEmpty() && other.isEmpty()) {
+        if (speed.isEmpty() && other.isEmpty() && !told(values.at("basic-speed"))) {
             problems.add(new Problem(values.at("basic-speed"), "is missing: basic wind speed as the code defines it, like \"25 m/s\""));
-        } else if (typed && averaging.isEmpty()) {
+        } else if (typed && averaging.isEmpty() && !told(values.at("averaging"))) {
             problems.add(new Problem(values.at("averaging"), "is missing: averaging time of the basic speed, one of " + String.join(", ", Averaging.allWords())));
         }
         if (speed.isPresent() && other.isPresent()) {
             problems.add(new Problem(values.at("basic-speed"), "stands beside values that give the speed in " + code.edition().property("title")
                 + "; give one of the two"));
         }
+    }
+
+    /** Whether a problem at this place was noted already. */
+    private boolean told(String path) {
+        return problems.stream().anyMatch(p -> p.path().equals(path));
     }
 
     /** What is said of the ground near by must fit the slope that is given. */

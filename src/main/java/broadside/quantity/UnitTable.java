@@ -87,7 +87,7 @@ final class UnitTable {
             row(MASS_PER_AREA, US, "lb/ft2", "0.45359237", "0.09290304", "lbs/ft2,lb/sq ft"),
             row(PERIOD, METRIC, "months", "1", "12", "month,mo"),
             row(PERIOD, METRIC, "weeks", "7", "365.2425", "week,wk"),
-            row(PERIOD, METRIC, "days", "1", "365.2425", "day,d"));
+            row(PERIOD, METRIC, "days", "1", "365.2425", "day"));
 
     private static final Map<Dimension, Map<String, Row>> BY_SPELLING = bySpelling();
 

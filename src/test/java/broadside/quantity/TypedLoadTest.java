@@ -90,7 +90,7 @@ class TypedLoadTest {
             1,500 psf | ? 1500 psf; 1.5 psf
             30 mPa | ! small m and capital M
             30 mpa | ! small m and capital M
-            50 kg/m2 | ! no unit that is known
+            50 kg/m2 | ! is a mass per area
             800 | ! no unit: a pressure
             800 N | ! is a force
             8 bar | ! no unit that is known

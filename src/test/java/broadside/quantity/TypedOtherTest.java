@@ -121,7 +121,9 @@ class TypedOtherTest {
             1,000 years | ? 1000 years; 1 years
             1 000 years | 1000.0
             50 | ! no unit: a period
-            50 days | ! no unit that is known
+            73.0485 days | 0.2
+            52.1775 weeks | 1.0
+            50 hours | ! no unit that is known
             """)
     void period(String typed, String expected) {
         Expected.check(Typed.read(typed, Dimension.PERIOD), expected);
