@@ -118,24 +118,67 @@ final class Canvas {
         }
     }
 
+    /** A wall that is cut, on paper: a line upward with short strokes on its left. */
+    void wall(double atX, double fromY, double toY) {
+        line(atX, fromY, atX, toY, THICK, Ink.BLACK, false);
+        for (double at = Math.max(fromY, toY) - 2; at > Math.min(fromY, toY) + 4; at -= 7) {
+            line(atX - 1, at - 4, atX - 6, at, THIN, Ink.GREY, false);
+        }
+    }
+
     /** A dimension across, at a height on paper, with end ticks and its text in the middle above the line. */
     void across(double from, double to, double atY, String text) {
-        double x1 = x(from);
-        double x2 = x(to);
+        acrossPaper(x(from), x(to), atY);
+        text((x(from) + x(to)) / 2, atY - 3, text, Anchor.MIDDLE, Ink.BLACK);
+    }
+
+    /** The same with its text behind the line, where the line is too short to hold it. */
+    void acrossBeside(double from, double to, double atY, String text) {
+        if (x(to) - x(from) > width(text) + 8) {
+            across(from, to, atY, text);
+        } else {
+            acrossPaper(x(from), x(to), atY);
+            text(x(to) + 6, atY + 3, text, Anchor.START, Ink.BLACK);
+        }
+    }
+
+    /** A line with end ticks between two places on paper. */
+    void acrossPaper(double x1, double x2, double atY) {
         line(x1, atY, x2, atY, THIN, Ink.BLACK, false);
         tick(x1, atY);
         tick(x2, atY);
-        text((x1 + x2) / 2, atY - 3, text, Anchor.MIDDLE, Ink.BLACK);
     }
 
-    /** A dimension upward, at a place on paper; its text stands beside it, or turned when there is room. */
+    /** A dimension upward, at a place on paper; its text stands to the left of it. */
     void upward(double from, double to, double atX, String text) {
-        double y1 = y(from);
-        double y2 = y(to);
+        upwardPaper(y(from), y(to), atX);
+        text(atX - 4, (y(from) + y(to)) / 2 + 3, text, Anchor.END, Ink.BLACK);
+    }
+
+    /** The same with its text to the right. */
+    void upwardRight(double from, double to, double atX, String text) {
+        upwardPaper(y(from), y(to), atX);
+        text(atX + 4, (y(from) + y(to)) / 2 + 3, text, Anchor.START, Ink.BLACK);
+    }
+
+    /** A line upward with end ticks between two heights on paper. */
+    void upwardPaper(double y1, double y2, double atX) {
         line(atX, y1, atX, y2, THIN, Ink.BLACK, false);
         tick(atX, y1);
         tick(atX, y2);
-        text(atX - 4, (y1 + y2) / 2 + 3, text, Anchor.END, Ink.BLACK);
+    }
+
+    /** The sign that a line upward is cut short here: the line is covered and a zigzag drawn in its place. */
+    void cut(double atX, double atY) {
+        shapes.add(new Drawing.Outline(List.of(atX - 4, atY - 5, atX + 4, atY - 5, atX + 4, atY + 5, atX - 4, atY + 5), 0, Ink.BLACK, Fill.PAPER));
+        line(atX, atY + 5, atX - 3.5, atY + 1.5, THIN, Ink.BLACK, false);
+        line(atX - 3.5, atY + 1.5, atX + 3.5, atY - 1.5, THIN, Ink.BLACK, false);
+        line(atX + 3.5, atY - 1.5, atX, atY - 5, THIN, Ink.BLACK, false);
+    }
+
+    /** About how wide a line of text is on paper. */
+    static double width(String text) {
+        return 5.4 * text.length();
     }
 
     /** A help line from the object out to a dimension. */
@@ -156,12 +199,16 @@ final class Canvas {
 
     /** The point at which a force acts, seen along the wind; its label stands at a place on paper, clear of the hatching. */
     void target(double xMetres, double yMetres, double labelX, String text) {
+        target(xMetres, yMetres, labelX, y(yMetres) - 5, text);
+    }
+
+    void target(double xMetres, double yMetres, double labelX, double labelY, String text) {
         double px = x(xMetres);
         double py = y(yMetres);
         shapes.add(new Drawing.Circle(px, py, 3.2, THICK, Ink.ACCENT, Fill.PAPER));
         line(px - 6, py, px + 6, py, THIN, Ink.ACCENT, false);
         line(px, py - 6, px, py + 6, THIN, Ink.ACCENT, false);
-        boldText(labelX, py - 5, text, Anchor.START, Ink.ACCENT);
+        boldText(labelX, labelY, text, Anchor.START, Ink.ACCENT);
     }
 
     /** A bar of a round length with that length beside it. */

@@ -1,10 +1,8 @@
 package broadside.sheet;
 
 import broadside.action.CaseAction.PanelZones;
-import broadside.action.CaseAction;
 import broadside.action.PostAction;
 import broadside.assess.Loads;
-import broadside.codes.ZonePressure;
 import broadside.panel.Hoarding;
 import broadside.panel.Panel;
 import broadside.sheet.Drawing.Anchor;
@@ -61,21 +59,9 @@ final class HoardingDrawing {
         if (loads.isEmpty()) {
             return;
         }
-        CaseAction governing = ItemDrawing.shown(loads.get());
-        double most = governing.zones().stream().flatMap(p -> p.zones().stream()).mapToDouble(ZonePressure::pressure).max().orElseThrow();
-        double bottom = hoarding.clearance().metres();
-        for (PanelZones panel : governing.zones()) {
-            double before = -20;
-            for (ZonePressure zone : panel.zones()) {
-                double from = panel.left() + length / 2 + zone.from();
-                front.hatch(from, bottom, zone.width(), hoarding.height().metres(), 4 * most / zone.pressure());
-                front.line(front.x(from), front.y(bottom), front.x(from), front.y(top), Canvas.THIN, Ink.BLACK, false);
-                double middle = front.x(from + zone.width() / 2);
-                if (panel.zones().size() > 1 && middle - before > 9) {
-                    front.boldText(middle, front.y(top) - 4, shortName(zone.zone()), Anchor.MIDDLE, Ink.BLACK);
-                    before = middle + (shortName(zone.zone()).length() > 2 ? 14 : 0);
-                }
-            }
+        ZoneDrawing zones = ZoneDrawing.of(ItemDrawing.shown(loads.get()), hoarding.clearance().metres(), hoarding.height().metres());
+        for (PanelZones panel : zones.panels()) {
+            zones.draw(front, panel, panel.left() + length / 2, 0, length);
         }
     }
 
@@ -118,10 +104,10 @@ final class HoardingDrawing {
         double ground = startY + 26 + SIDE;
         Canvas side = front.view(ItemDrawing.WIDTH / 2, ground, scale);
         double[][] panels = {{hoarding.clearance().metres(), hoarding.height().metres(), 0}};
-        double height = loads.map(l -> l.governs("base-moment").height()).orElse(-1.0);
-        String label = loads.map(l -> "F " + format.force(l.governs("base-moment").force()) + " in all").orElse("");
-        SideView.draw(side, ItemDrawing.WIDTH / 2 - 110, ItemDrawing.WIDTH / 2 + 110, panels, top, height, label,
-            loads.isPresent() ? format.length(height) : "");
+        SideView view = new SideView(side, ItemDrawing.WIDTH / 2 - 110, ItemDrawing.WIDTH / 2 + 110, top, 0);
+        view.draw(panels);
+        loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(0, c.height(), "F " + format.force(c.force()) + " in all",
+            format.length(c.height())));
         double dim = ItemDrawing.WIDTH / 2 + 80;
         side.help(side.x(0.06), side.y(top), dim + 4, side.y(top));
         side.line(dim, side.y(hoarding.clearance().metres()), dim, side.y(top), Canvas.THIN, Ink.BLACK, false);

@@ -33,21 +33,21 @@ final class KindDrawing implements Item.Kinds<Drawing> {
 
     @Override
     public Drawing bannerFence(BannerFence fence) {
-        throw new UnsupportedOperationException("drawing of " + fence.kind());
+        return new FenceDrawing(fence, loads, format).make();
     }
 
     @Override
     public Drawing facadePanel(FacadePanel facade) {
-        throw new UnsupportedOperationException("drawing of " + facade.kind());
+        return new FacadeDrawing(facade, loads, format).make();
     }
 
     @Override
     public Drawing projectingSign(ProjectingSign sign) {
-        throw new UnsupportedOperationException("drawing of " + sign.kind());
+        return new BladeDrawing(sign, loads, format).make();
     }
 
     @Override
     public Drawing spannedBanner(SpannedBanner banner) {
-        throw new UnsupportedOperationException("drawing of " + banner.kind());
+        return new BannerDrawing(banner, loads, format).make();
     }
 }

@@ -102,7 +102,20 @@ final class SignDrawing {
         }
         CaseAction turning = loads.get().governs("torsion");
         double beside = sign.boards().size() == 1 ? front.x(right) + 6 : front.x(turning.side()) + 8;
-        front.target(turning.side(), turning.height(), beside, "F of " + Format.caseName(turning.name()));
+        front.target(turning.side(), turning.height(), beside, clear(front, front.y(turning.height()) - 5), "F of " + Format.caseName(turning.name()));
+    }
+
+    /** The height on paper nearest to the one wanted at which a label does not stand on the width of one of several boards. */
+    private double clear(Canvas front, double wanted) {
+        List<Double> taken = sign.boards().size() == 1 ? List.of()
+            : sign.boards().stream().map(b -> front.y(b.clearance().metres() + b.height().metres() / 2) + 3).toList();
+        for (int i = 0; i < 60; i++) {
+            double y = wanted + (i % 2 == 0 ? -i : i) / 2.0;
+            if (taken.stream().allMatch(t -> Math.abs(t - y) >= 10)) {
+                return y;
+            }
+        }
+        return wanted;
     }
 
     private void dimensions(Canvas front) {
@@ -147,8 +160,9 @@ final class SignDrawing {
     private void side(Canvas side) {
         double[][] panels = sign.boards().stream().map(b -> new double[] {b.clearance().metres(), b.height().metres(), b.depth().metres()})
             .toArray(double[][]::new);
-        double height = loads.map(l -> l.governs("base-moment").height()).orElse(-1.0);
-        String label = loads.map(l -> "F " + format.force(l.governs("base-moment").force())).orElse("");
-        SideView.draw(side, ItemDrawing.WIDTH - 150, ItemDrawing.WIDTH - 8, panels, top, height, label, loads.isPresent() ? format.length(height) : "");
+        SideView view = new SideView(side, ItemDrawing.WIDTH - 150, ItemDrawing.WIDTH - 8, top, 0);
+        view.draw(panels);
+        loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(panels[0][2], c.height(), "F " + format.force(c.force()),
+            format.length(c.height())));
     }
 }
