@@ -48,6 +48,15 @@
     });
   }
 
+  // An answer that has sizes of its own opens their fold; the others shut it.
+  document.addEventListener("change", function (event) {
+    const unfolds = event.target.getAttribute("data-unfolds");
+    const fold = unfolds ? document.getElementById(unfolds.replace(/^-/, "")) : null;
+    if (fold) {
+      fold.open = !unfolds.startsWith("-");
+    }
+  });
+
   // A link to a question inside a fold opens the fold.
   const unfold = function () {
     let target = window.location.hash.length > 1 ? document.getElementById(decodeURIComponent(window.location.hash.slice(1))) : null;

@@ -22,6 +22,8 @@ import tools.jackson.databind.node.ObjectNode;
  */
 record Draft(Answers answers, ArrayNode items, int index) {
 
+    private static final String AS_A = " as a ";
+
     /** A question of the job file with its path. */
     record Leaf(String path, Shape shape, Field field) {
 
@@ -33,8 +35,9 @@ record Draft(Answers answers, ArrayNode items, int index) {
     /** An empty sheet for one item of a kind. */
     static Draft blank(String kind, String units, String code) {
         Answers answers = new Answers(Map.of("units", units.equals("us") ? "us" : "metric", "basis.code", code));
-        answers.set("items[0].kind", Shapes.KINDS.containsKey(kind) ? kind : "post-sign");
-        answers.set("items[0].mark", kind.equals("hoarding") ? "H1" : "S1");
+        Kind known = Kind.of(kind).orElse(Kind.POST_SIGN);
+        answers.set("items[0].kind", known.key());
+        answers.set("items[0].mark", known.mark(1));
         return new Draft(answers, JsonNodeFactory.instance.arrayNode(), 0);
     }
 
@@ -53,6 +56,7 @@ record Draft(Answers answers, ArrayNode items, int index) {
             answers.remove("basis.edition");
             answers.remove("basis.overlay");
         }
+        older(answers);
         Draft draft = new Draft(answers, (ArrayNode) job.get("items"), item);
         if (answers.blank("units")) {
             answers.set("units", typedInUs(answers) ? "us" : "metric");
@@ -92,7 +96,20 @@ record Draft(Answers answers, ArrayNode items, int index) {
         if (!index.matches("\\d{1,3}") || !items.isArray() || Integer.parseInt(index) > items.size()) {
             throw new Refused(400, "The form cannot be read", "The fields that say which item it is about do not fit. Begin at the start page.");
         }
-        return new Draft(new Answers(typed), (ArrayNode) items, Integer.parseInt(index));
+        Answers answers = new Answers(typed);
+        older(answers);
+        return new Draft(answers, (ArrayNode) items, Integer.parseInt(index));
+    }
+
+    /** Before it was asked whether the ground near by is flat, the shape of the slope held that answer. */
+    private static void older(Answers answers) {
+        boolean flat = answers.get("site.topography.feature").equals("flat");
+        if (flat) {
+            answers.remove("site.topography.feature");
+        }
+        if (answers.blank("site.ground-nearby") && (flat || answers.any("site.topography"))) {
+            answers.set("site.ground-nearby", flat ? "flat" : "hill");
+        }
     }
 
     String path() {
@@ -116,8 +133,18 @@ record Draft(Answers answers, ArrayNode items, int index) {
         answers.remove("drawn-for");
         if (!before.isEmpty() && !before.equals(now)) {
             answers.set("site.terrain@" + before, answers.get("site.terrain"));
-            answers.set("site.terrain", answers.get("site.terrain@" + now));
+            boolean unknown = answers.get("site.terrain").equals(FormReader.UNKNOWN) && answers.blank("site.terrain@" + now);
+            answers.set("site.terrain", unknown ? FormReader.UNKNOWN : answers.get("site.terrain@" + now));
         }
+    }
+
+    /** Takes an answer that was offered. A speed "as a" mean or gust of another kind brings its kind along. */
+    void take(String path, String answer) {
+        int as = path.equals("site.averaging") ? answer.indexOf(AS_A) : -1;
+        if (as > 0) {
+            answers.set("site.basic-speed", answer.substring(0, as));
+        }
+        answers.set(path, as > 0 ? answer.substring(as + AS_A.length()) : answer);
     }
 
     /** Every quantity among the questions of this sheet. */

@@ -6,6 +6,7 @@ import broadside.assess.Problem;
 import broadside.job.JobReader;
 import broadside.job.Shapes;
 import broadside.quantity.Units;
+import broadside.table.Rows;
 import broadside.web.FormView.Button;
 import broadside.web.FormView.Hidden;
 import broadside.web.FormView.ItemLink;
@@ -13,6 +14,7 @@ import broadside.web.FormView.Page;
 import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -31,8 +33,11 @@ final class FormDesk {
     private final JobReader reader;
     private final FormReader forms;
     private final Sketch sketch;
+    private final Rows scope;
 
-    FormDesk(Pages pages, Assessor assessor, JobReader reader, Documents documents) {
+    /** The rows of {@code scope} are the answers to "what is it fixed to?" that are outside the scope. */
+    FormDesk(Pages pages, Assessor assessor, JobReader reader, Documents documents, Rows scope) {
+        this.scope = scope;
         this.pages = pages;
         this.assessor = assessor;
         this.reader = reader;
@@ -108,7 +113,7 @@ final class FormDesk {
             case "item", "add-item", "drop-item" -> showOther(ctx, draft, words[0], with);
             case "set" -> {
                 int equals = with.indexOf('=');
-                draft.answers().set(with.substring(0, Math.max(0, equals)), with.substring(equals + 1));
+                draft.take(with.substring(0, Math.max(0, equals)), with.substring(equals + 1));
                 goTo(ctx, draft, true);
             }
             default -> {
@@ -123,12 +128,15 @@ final class FormDesk {
         int index = with.matches("\\d{1,3}") ? Integer.parseInt(with) : 999;
         String boards = draft.path() + ".boards";
         String gates = draft.path() + ".gates";
+        String blocks = draft.path() + ".blocks";
         switch (todo) {
             case "units" -> draft.changeUnits(with);
             case "add-board" -> answers.set(boards + "[" + Math.max(1, answers.size(boards)) + "].width", "");
             case "drop-board" -> answers.drop(boards, index);
             case "add-gate" -> answers.set(gates + "[" + answers.size(gates) + "].from", "");
             case "drop-gate" -> answers.drop(gates, index);
+            case "add-block" -> answers.set(blocks + "[" + answers.size(blocks) + "].mass", "");
+            case "drop-block" -> answers.drop(blocks, index);
             case "add-factor" -> answers.set("overrides[" + answers.size("overrides") + "].name", "");
             case "drop-factor" -> answers.drop("overrides", index);
             default -> { }
@@ -152,13 +160,14 @@ final class FormDesk {
             next = Math.max(0, draft.index() - 1);
         } else if (todo.equals("add-item") && Shapes.KINDS.containsKey(with)) {
             next = items.size();
-            items.addObject().put("kind", with).put("mark", (with.equals("hoarding") ? "H" : "S") + (next + 1));
+            items.addObject().put("kind", with).put("mark", Kind.of(with).orElseThrow().mark(next + 1));
         }
         return Draft.of(job, next);
     }
 
     private void assess(Context ctx, Draft draft) {
         draft.answers().dropBlank(draft.path() + ".gates");
+        draft.answers().dropBlank(draft.path() + ".blocks");
         draft.answers().dropBlank("overrides");
         List<Problem> problems = problems(draft);
         if (!problems.isEmpty()) {
@@ -198,15 +207,14 @@ final class FormDesk {
 
     private void show(Context ctx, int status, Draft draft, List<Problem> problems, String note) {
         FormProblems listed = new FormProblems(problems);
-        FormLayout layout = new FormLayout(draft.answers(), assessor.codes(), listed, draft.index());
+        FormLayout layout = new FormLayout(draft.answers(), assessor.codes(), scope, listed, draft.index());
         List<FormView.Part> parts = layout.parts();
         JsonNode job = forms.read(draft.answers(), draft.items(), draft.index()).job();
         String mark = draft.answers().get(draft.path() + ".mark");
-        String heading = (draft.answers().get(draft.path() + ".kind").equals("hoarding") ? "A site hoarding" : "A sign on posts")
-            + (mark.isBlank() ? "" : ", " + mark);
-        Page page = new Page(heading, listed.lines(layout.labels(), layout.anchors()), parts, sketch.picture(draft, job), units(draft),
-            items(job, draft.index()), List.of(new Button("add-item:post-sign", "Add a sign to this job", ""),
-                new Button("add-item:hoarding", "Add a site hoarding to this job", "")), hidden(draft, layout.asked()), note);
+        String heading = Kind.of(draft.answers().get(draft.path() + ".kind")).orElse(Kind.POST_SIGN).words() + (mark.isBlank() ? "" : ", " + mark);
+        Page page = new Page(heading, listed.lines(layout.labels(), layout.anchors(), draft.path()), parts, sketch.picture(draft, job), units(draft),
+            items(job, draft.index()), Arrays.stream(Kind.values()).map(k -> new Button("add-item:" + k.key(), k.add(), "")).toList(),
+            hidden(draft, layout.asked()), note);
         pages.show(ctx, status, "form", (listed.isEmpty() ? "" : "Error: ") + heading, page);
     }
 

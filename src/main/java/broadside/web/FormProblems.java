@@ -4,6 +4,7 @@ import broadside.assess.Problem;
 import broadside.web.FormView.Line;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 
 /** The problems of a form, by the question they belong to. */
@@ -11,17 +12,29 @@ final class FormProblems {
 
     private static final String VERBS = "(is|are|must|has|have|stands|of|gives|leave|leaves|names) .*";
 
+    /** What is said where "What is it fixed to?" was not answered. */
+    static final String HELD_BY = "choose what it is fixed to";
+
     private final List<Problem> all;
 
     FormProblems(List<Problem> problems) {
         List<Problem> own = new ArrayList<>();
         for (Problem each : problems) {
-            Problem moved = each.path().matches("basis\\.(edition|overlay)") ? new Problem("basis.code", each.text(), each.options()) : each;
+            Problem moved = told(each);
             if (own.stream().noneMatch(p -> p.path().equals(moved.path()))) {
                 own.add(moved);
             }
         }
         this.all = List.copyOf(own);
+    }
+
+    /** A problem in the words of the form. */
+    private static Problem told(Problem problem) {
+        if (problem.path().matches("basis\\.(edition|overlay)")) {
+            return new Problem("basis.code", problem.text(), problem.options());
+        }
+        boolean open = problem.path().endsWith(".held-by") && problem.text().startsWith("\"\" does not fit");
+        return open ? new Problem(problem.path(), HELD_BY) : problem;
     }
 
     boolean isEmpty() {
@@ -43,10 +56,15 @@ final class FormProblems {
     }
 
     /** The list on top of the page, each line with the question that it leads to. */
-    List<Line> lines(Map<String, String> labels, Map<String, String> anchors) {
+    List<Line> lines(Map<String, String> labels, Map<String, String> anchors, String item) {
         List<Line> lines = new ArrayList<>();
         for (Problem problem : all) {
             String path = problem.path();
+            if (path.startsWith("items[") && !path.startsWith(item)) {
+                lines.add(new Line("items", "Item " + (Integer.parseInt(path.substring(6, path.indexOf(']'))) + 1) + ": "
+                    + new Problem(path.substring(path.indexOf(']') + 1).replaceFirst("^\\.", ""), problem.text()).line()));
+                continue;
+            }
             String label = labels.get(path);
             String place = label == null ? place(path, anchors) : "";
             String target = label != null ? path : path.isEmpty() ? "" : anchors.getOrDefault(root(path, anchors), "");
@@ -58,7 +76,11 @@ final class FormProblems {
     }
 
     private static String joined(String label, String text) {
-        return text.matches("(?s)" + VERBS) ? label + " " + text : label + ": " + text;
+        boolean verb = text.matches("(?s)" + VERBS);
+        if (label.endsWith("?")) {
+            return verb ? "The answer to \"" + label + "\" " + text : text.substring(0, 1).toUpperCase(Locale.ROOT) + text.substring(1);
+        }
+        return verb ? label + " " + text : label + ": " + text;
     }
 
     /** The longest known place that a path lies in. */
@@ -72,10 +94,10 @@ final class FormProblems {
 
     /** "Board 2" for a path inside the second of several boards. */
     private static String entry(String path) {
-        java.util.regex.Matcher found = java.util.regex.Pattern.compile("\\.(board|gate)s\\[(\\d{1,3})\\]").matcher(path);
+        java.util.regex.Matcher found = java.util.regex.Pattern.compile("\\.(board|gate|block)s\\[(\\d{1,3})\\]").matcher(path);
         java.util.regex.Matcher own = java.util.regex.Pattern.compile("^overrides\\[(\\d{1,3})\\]").matcher(path);
         if (found.find()) {
-            return (found.group(1).equals("board") ? "Board " : "Gate ") + (Integer.parseInt(found.group(2)) + 1);
+            return found.group(1).substring(0, 1).toUpperCase(Locale.ROOT) + found.group(1).substring(1) + " " + (Integer.parseInt(found.group(2)) + 1);
         }
         return own.find() ? "Own factor " + (Integer.parseInt(own.group(1)) + 1) : "";
     }

@@ -6,6 +6,7 @@ import broadside.codes.WindCode;
 import broadside.job.Field;
 import broadside.job.Shape;
 import broadside.job.Shapes;
+import broadside.quantity.Dimension;
 import broadside.quantity.Reading;
 import broadside.quantity.Typed;
 import broadside.quantity.Unit;
@@ -15,7 +16,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import java.util.TreeSet;
 import tools.jackson.databind.node.ArrayNode;
 import tools.jackson.databind.node.JsonNodeFactory;
 import tools.jackson.databind.node.ObjectNode;
@@ -26,8 +26,11 @@ import tools.jackson.databind.node.ObjectNode;
  */
 final class FormReader {
 
-    /** The answer that the ground is flat, or that nothing is known of it. */
-    static final String FLAT = "flat";
+    /** The answer "I don't know". */
+    static final String UNKNOWN = "unknown";
+
+    /** Unit of a roughness length that is typed as a bare number, in both systems. */
+    static final Unit ROUGHNESS = Unit.of(Dimension.LENGTH, "m").orElseThrow();
 
     private static final String PLAIN = "[+-]?\\d{1,12}([.,]\\d{1,12})?";
     private static final String TWO_READINGS = "[+-]?[1-9]\\d{0,2},\\d{3}";
@@ -55,28 +58,20 @@ final class FormReader {
         return new Pass(answers).job(items, index);
     }
 
-    /** Names of the values of the site that some code asks for and this one does not. */
-    Set<String> foreign(Optional<WindCode> code) {
-        Set<String> names = new TreeSet<>();
-        for (String key : codes.editions()) {
-            codes.code(key).ifPresent(c -> names.addAll(c.terms().options()));
-        }
-        code.ifPresent(c -> names.removeAll(c.terms().options()));
-        return names;
-    }
-
     /** One reading of one form. */
     private final class Pass {
 
         private final Answers answers;
         private final Units units;
+        private final Optional<WindCode> code;
         private final Set<String> foreign;
         private final List<Problem> problems = new ArrayList<>();
 
         Pass(Answers answers) {
             this.answers = answers;
             this.units = units(answers);
-            this.foreign = foreign(codes.code(answers.get("basis.code")));
+            this.code = codes.code(answers.get("basis.code"));
+            this.foreign = SiteFields.foreign(code);
         }
 
         Made job(ArrayNode items, int index) {
@@ -98,13 +93,24 @@ final class FormReader {
             all.addAll(items);
             String path = "items[" + index + "]";
             ObjectNode own = JsonNodeFactory.instance.objectNode();
-            Optional.ofNullable(Shapes.KINDS.get(answers.get(path + ".kind"))).ifPresent(shape -> fill(own, shape, path));
+            Optional.ofNullable(Shapes.KINDS.get(answers.get(path + ".kind"))).ifPresent(shape -> {
+                fill(own, shape, path);
+                heldBy(own, path + ".held-by");
+            });
             if (index < all.size()) {
                 all.set(index, own);
             } else {
                 all.add(own);
             }
             return all;
+        }
+
+        /** A job file may leave it out; a form may not. The empty word keeps the question open while another item is filled in. */
+        private void heldBy(ObjectNode own, String path) {
+            if (answers.blank(path)) {
+                own.put("held-by", "");
+                missing(path, FormProblems.HELD_BY);
+            }
         }
 
         /** Code, edition and overlay are one answer on the form: the key of the tables. */
@@ -136,6 +142,21 @@ final class FormReader {
                     value(to, shape, field, path + "." + field.name());
                 }
             }
+            if (shape.name().equals("site")) {
+                speed();
+            }
+        }
+
+        /** The speed and its kind are asked for, unless the code takes something else in their place and that was given. */
+        private void speed() {
+            boolean other = SiteFields.IN_PLACE_OF_SPEED.stream().anyMatch(name -> !foreign.contains(name) && !answers.blank("site." + name));
+            boolean blank = answers.blank("site.basic-speed");
+            if (blank && !other) {
+                missing("site.basic-speed", "is missing: type it like " + Dimension.SPEED.example(units));
+            }
+            if (answers.blank("site.averaging") && !(blank && other)) {
+                missing("site.averaging", "is missing: choose one of those below");
+            }
         }
 
         private void value(ObjectNode to, Shape shape, Field field, String path) {
@@ -154,12 +175,26 @@ final class FormReader {
 
         private void object(ObjectNode to, Field field, String path) {
             Shape shape = field.shape().orElseThrow();
-            boolean asked = field.required() || answers.any(path) || shape.name().equals("posts");
-            if (asked && !answers.get(path + ".feature").equals(FLAT)) {
+            boolean asked = switch (shape.name()) {
+                case "posts", "brackets" -> true;
+                case "topography" -> slope(path);
+                default -> field.required() || answers.any(path);
+            };
+            if (asked) {
                 ObjectNode object = JsonNodeFactory.instance.objectNode();
                 fill(object, shape, path);
                 to.set(field.name(), object);
             }
+        }
+
+        /** The sizes of a slope count when the ground was said to be higher or lower; a factor set by the user stands for them. */
+        private boolean slope(String path) {
+            boolean factor = !foreign.contains("topographic-factor") && !answers.blank("site.topographic-factor");
+            return switch (answers.get("site.ground-nearby")) {
+                case "hill" -> answers.any(path) || !factor;
+                case "" -> answers.any(path);
+                default -> false;
+            };
         }
 
         private void list(ObjectNode to, Field field, String path) {
@@ -185,8 +220,14 @@ final class FormReader {
                         to.put(field.name(), text);
                     }
                 }
-                default -> to.put(field.name(), text);
+                default -> to.put(field.name(), shape.name().equals("site") && field.name().equals("terrain") ? terrain(text) : text);
             }
+        }
+
+        /** A class as it is; a roughness length with its unit. */
+        private String terrain(String text) {
+            boolean roughness = code.filter(c -> c.terms().byRoughness()).isPresent();
+            return text.equalsIgnoreCase(UNKNOWN) ? UNKNOWN : roughness ? withUnit(text, ROUGHNESS) : text;
         }
 
         private String quantity(Shape shape, Field field, String path, String text) {
@@ -222,7 +263,11 @@ final class FormReader {
         private String missing(Field field) {
             return "is missing: " + field.dimension().map(d -> "type it like " + d.example(units))
                 .orElse(field.holds() == Field.Holds.WHOLE ? "type a whole number like 2"
-                    : field.choices().isEmpty() && !field.name().equals("terrain") ? "type it here" : "choose one of those below");
+                    : field.choices().isEmpty() && !terrainClass(field) ? "type it here" : "choose one of those below");
+        }
+
+        private boolean terrainClass(Field field) {
+            return field.name().equals("terrain") && code.filter(c -> c.terms().byRoughness()).isEmpty();
         }
 
         private void missing(String path, String text) {

@@ -1,5 +1,6 @@
 package broadside.web;
 
+import java.util.ArrayList;
 import java.util.List;
 
 /** What the template of the form shows. Every text is finished; the template decides nothing. */
@@ -37,6 +38,39 @@ public final class FormView {
         static Bit buttons(List<Button> buttons) {
             return new Bit("buttons", null, "", "", false, List.of(), buttons);
         }
+
+        /** A sentence between questions. */
+        static Bit words(String sentence) {
+            return new Bit("words", null, sentence, "", false, List.of(), List.of());
+        }
+
+        /** Short questions stand side by side where there is room. */
+        static List<Bit> rows(List<Bit> bits) {
+            List<Bit> rows = new ArrayList<>();
+            List<Bit> row = new ArrayList<>();
+            for (Bit bit : bits) {
+                if (bit.kind().equals("radio")) {
+                    flush(rows, row);
+                    rows.add(bit);
+                } else {
+                    row.add(bit);
+                }
+            }
+            flush(rows, row);
+            return rows;
+        }
+
+        private static void flush(List<Bit> rows, List<Bit> row) {
+            if (!row.isEmpty()) {
+                rows.add(row(List.copyOf(row)));
+                row.clear();
+            }
+        }
+
+        /** Whether something was typed in it, or something in it is wrong. */
+        boolean typed() {
+            return input != null && (!input.typed().isBlank() || input.wrong()) || bits.stream().anyMatch(Bit::typed);
+        }
     }
 
     /** One question. {@code label} holds the unit in words; null stands for an attribute that is left out. */
@@ -54,8 +88,17 @@ public final class FormView {
         }
     }
 
-    /** One answer to choose. {@code words} are the user's, {@code code} are those of the code. */
-    public record Choice(String id, String value, String words, String code, boolean chosen) { }
+    /**
+     * One answer to choose. {@code words} are the user's, {@code code} are those of the code.
+     *
+     * @param unfolds  id of the fold that opens when it is chosen and shuts when another is; empty for most
+     */
+    public record Choice(String id, String value, String words, String code, boolean chosen, String unfolds) {
+
+        Choice(String id, String value, String words, String code, boolean chosen) {
+            this(id, value, words, code, chosen, "");
+        }
+    }
 
     /** A button that sends the form; {@code target} is where the page opens again. */
     public record Button(String value, String text, String target) { }

@@ -9,7 +9,6 @@ import broadside.quantity.Show;
 import broadside.quantity.Typed;
 import broadside.quantity.Unit;
 import broadside.quantity.Units;
-import broadside.site.Averaging;
 import broadside.web.FormView.Bit;
 import broadside.web.FormView.Button;
 import broadside.web.FormView.Choice;
@@ -28,16 +27,25 @@ final class Questions {
     /** Lengths that may be below zero: no keypad without a minus. */
     private static final Set<String> SIGNED = Set.of("offset", "distance-from-crest", "altitude", "ground-elevation");
 
+    /** Questions whose few answers are written out one below the other. */
+    private static final Set<String> RADIOS = Set.of("held-by", "ground-nearby", "feature", "backing", "duration-rule");
+
+    private static final String ROUGHNESS_LABEL = "Roughness length of the ground on the windward side";
+    private static final String ROUGHNESS_HINT = "Sea 0.0002, smooth 0.005, open 0.03, roughly open 0.1, rough 0.25, very rough 0.5 (classes of Davenport and Wieringa). "
+        + "A smoother ground gives a larger load. Type unknown if you don't know: the smoothest counts";
+
     private final Answers answers;
     private final Optional<WindCode> code;
+    private final HeldByChoices heldBy;
     private final FormProblems problems;
     private final Units units;
     private final Set<String> asked = new TreeSet<>();
     private final Map<String, String> labels = new LinkedHashMap<>();
 
-    Questions(Answers answers, Optional<WindCode> code, FormProblems problems) {
+    Questions(Answers answers, Optional<WindCode> code, HeldByChoices heldBy, FormProblems problems) {
         this.answers = answers;
         this.code = code;
+        this.heldBy = heldBy;
         this.problems = problems;
         this.units = FormReader.units(answers);
     }
@@ -61,6 +69,21 @@ final class Questions {
             }
         }
         return bits;
+    }
+
+    /** Some questions folded under a plain sentence. */
+    Bit fold(String sentence, Shape shape, String path, String... names) {
+        return Bit.fold(sentence, path + "." + names[0] + "-fold", open(path, names), ask(shape, path, names));
+    }
+
+    /** Whether the code takes a value that only some codes take. */
+    boolean takes(String option) {
+        return code.filter(c -> c.terms().options().contains(option)).isPresent();
+    }
+
+    /** The shape of an object or of the entries of a list. */
+    Shape shape(Shape shape, String field) {
+        return shape.field(field).flatMap(Field::shape).orElseThrow();
     }
 
     /** A question whose answers are written out one below the other. */
@@ -89,17 +112,11 @@ final class Questions {
 
     private Input input(Shape shape, Field field, String path) {
         Wording words = Wording.of(shape.name(), field);
-        boolean terrain = shape.name().equals("site") && field.name().equals("terrain");
-        if (terrain && code.filter(c -> c.terms().byRoughness()).isPresent()) {
-            return made("text", path, words.label(), "", "Here it is " + code.orElseThrow().terms().terrainNames() + ". If you are not sure, take the smaller one", null,
-                List.of(), null, "short");
+        if (path.equals("site.terrain")) {
+            return terrain(path, words);
         }
-        if (terrain) {
-            return made("radio", path, words.label(), "", code.isPresent() ? words.hint()
-                : "Each code has its own classes: choose the code above, then show its questions", null, terrains(path), "", "");
-        }
-        if (shape.name().equals("topography") && field.name().equals("feature")) {
-            return made("radio", path, words.label(), "", words.hint(), null, features(path), "", "");
+        if (RADIOS.contains(field.name())) {
+            return made("radio", path, words.label(), "", words.hint(), null, written(field, path), "", field.name().equals("held-by") ? "many" : "");
         }
         return switch (field.holds()) {
             case QUANTITY -> quantity(field, words, path);
@@ -109,6 +126,18 @@ final class Questions {
             case NUMBER_OR_CHOICE, NUMBER_OR_QUANTITY -> made("text", path, words.label(), "", words.hint(), null, List.of(), null, "short");
             default -> made("text", path, words.label(), "", words.hint(), null, List.of(), null, "wide");
         };
+    }
+
+    /** Classes of the code to choose from, or a box for a roughness length where the code has no classes. */
+    private Input terrain(String path, Wording words) {
+        if (code.filter(c -> c.terms().byRoughness()).isPresent()) {
+            Unit unit = FormReader.ROUGHNESS;
+            return made("text", path, ROUGHNESS_LABEL + ", in " + unit.symbol(), unit.symbol(),
+                "Here it is " + code.orElseThrow().terms().terrainNames() + ". " + ROUGHNESS_HINT, reading(answers.get(path), Dimension.LENGTH, unit),
+                List.of(), null, "short");
+        }
+        return made("radio", path, words.label(), "", code.isPresent() ? words.hint()
+            : "Each code has its own classes: choose the code above, then show its questions", null, terrains(path), "", "");
     }
 
     private Input quantity(Field field, Wording words, String path) {
@@ -142,38 +171,37 @@ final class Questions {
     }
 
     private List<Choice> terrains(String path) {
-        return code.stream().flatMap(c -> c.terms().terrains().stream()).map(t -> new Choice(path + "-" + t.name(), t.name(),
-            t.meaning().isEmpty() ? t.name() : capital(t.meaning()), "class " + t.name(), answers.get(path).equals(t.name()))).toList();
+        List<Choice> choices = new ArrayList<>();
+        code.ifPresent(c -> {
+            c.terms().terrains().forEach(t -> choices.add(new Choice(path + "-" + t.name(), t.name(), t.meaning().isEmpty() ? t.name() : capital(t.meaning()),
+                "class " + t.name(), answers.get(path).equals(t.name()))));
+            choices.add(choice("terrain", path, FormReader.UNKNOWN));
+        });
+        return choices;
     }
 
-    private List<Choice> features(String path) {
-        String now = answers.get(path);
-        return List.of(
-            new Choice(path + "-flat", FormReader.FLAT, "Flat, or I don't know", "taken as flat, and the sheet says so", now.equals(FormReader.FLAT)),
-            new Choice(path + "-hill", "hill", "A single hill", "hill", now.equals("hill")),
-            new Choice(path + "-ridge", "ridge", "A long hill that falls on both sides", "ridge", now.equals("ridge")),
-            new Choice(path + "-escarpment", "escarpment", "A slope up to high ground that stays high", "escarpment", now.equals("escarpment")));
+    /** The answers of a question that are written out, in plain words. */
+    private List<Choice> written(Field field, String path) {
+        return field.name().equals("held-by") ? heldBy.of(field, path) : field.choices().stream().map(value -> choice(field.name(), path, value)).toList();
+    }
+
+    private Choice choice(String field, String path, String value) {
+        ChoiceWords words = ChoiceWords.of(field, value);
+        String unfolds = field.equals("ground-nearby") ? value.equals("hill") ? "site.topography" : "-site.topography" : "";
+        return new Choice(path + "-" + value.replace(' ', '-'), value, words.words(), words.small(), answers.get(path).equals(value), unfolds);
     }
 
     private List<Choice> choices(Field field, String path) {
         List<Choice> choices = new ArrayList<>();
-        choices.add(new Choice("", "", field.required() ? "Choose" : field.name().equals("shape") ? "Not said: a rectangle" : "Not said", "", answers.blank(path)));
+        choices.add(new Choice("", "", field.required() || field.name().equals("averaging") ? "Choose" : path.contains("boards[") ? "Not said: a rectangle" : "Not said", "", answers.blank(path)));
         for (String value : field.choices()) {
-            choices.add(new Choice("", value, words(value), "", answers.get(path).equals(value)));
+            choices.add(new Choice("", value, ChoiceWords.of(field.name(), value).words(), "", answers.get(path).equals(value)));
         }
         boolean known = answers.blank(path) || field.choices().contains(answers.get(path));
         if (!known) {
             choices.add(new Choice("", answers.get(path), answers.get(path), "", true));
         }
         return choices;
-    }
-
-    private static String words(String value) {
-        return switch (value) {
-            case "code" -> "at the level of the code's own loads";
-            case "service" -> "at service level (allowable stress)";
-            default -> Averaging.of(value).isPresent() || value.length() <= 3 ? value : capital(value);
-        };
     }
 
     private static String capital(String text) {

@@ -1,5 +1,6 @@
 package broadside.web;
 
+import broadside.action.Foot;
 import broadside.assess.Assessor;
 import broadside.assess.BadJob;
 import broadside.assess.ItemResult;
@@ -63,17 +64,18 @@ final class Sketch {
             return "The drawing shows the sizes typed so far.";
         }
         try {
-            return assessor.assess(whole.get()).items().get(0).loads().map(l -> status(l, FormReader.units(draft.answers())))
-                .orElse("The drawing is up to date. The code has no loads for this item.");
+            return status(assessor.assess(whole.get()).items().get(0), FormReader.units(draft.answers()));
         } catch (BadJob e) {
             return "The drawing is up to date.";
         }
     }
 
-    private static String status(Loads loads, Units units) {
-        return "Preliminary: " + loads.level().name() + " wind force "
-            + Show.of(loads.governs("base-shear").baseShear(), Dimension.FORCE, units, 3, Rounding.UP).text() + ", moment at the ground "
-            + Show.of(loads.governs("base-moment").baseMoment(), Dimension.MOMENT, units, 3, Rounding.UP).text() + ".";
+    private static String status(ItemResult result, Units units) {
+        String outside = result.outcome() == ItemResult.Outcome.OUTSIDE_SCOPE ? ItemResult.OUTSIDE + ". " : "";
+        return outside + result.loads().map(l -> "Preliminary: " + l.level().name() + " wind force "
+            + Show.of(l.governs("base-shear").baseShear(), Dimension.FORCE, units, 3, Rounding.UP).text() + (l.foot() == Foot.NONE ? "" : ", " + l.foot().moment() + " "
+            + Show.of(l.governs("base-moment").baseMoment(), Dimension.MOMENT, units, 3, Rounding.UP).text()) + ".")
+            .orElse(outside.isEmpty() ? "The drawing is up to date. The code has no loads for this item." : "No loads are given for it.");
     }
 
     /** The loads of an item of a job, when the code has them. */
@@ -89,7 +91,7 @@ final class Sketch {
     private static ObjectNode alone(JsonNode job, int index) {
         ObjectNode one = ((ObjectNode) job).deepCopy();
         JsonNode item = job.path("items").path(index);
-        one.putArray("items").add(item);
+        one.putArray("items").add(item.isObject() && item.path("held-by").asString("").isEmpty() ? ((ObjectNode) item.deepCopy()).without("held-by") : item);
         return one;
     }
 
@@ -104,7 +106,7 @@ final class Sketch {
         }
         job.putObject("basis").put("code", key.substring(0, key.indexOf('/'))).put("edition", key.substring(key.indexOf('/') + 1));
         job.putObject("site").put("basic-speed", "20 m/s").put("averaging", code.terms().averaging().words())
-            .put("terrain", code.terms().terrains().get(0).name());
+            .put("terrain", FormReader.UNKNOWN);
         job.set("items", one.get("items"));
         return job;
     }

@@ -24,7 +24,7 @@ final class StartDesk {
     private final Start start;
 
     /** What the start page shows. */
-    public record Start(List<Choice> codes, List<Example> examples) { }
+    public record Start(List<Choice> codes, List<Kind> kinds, List<Example> examples) { }
 
     /** A demo job that ships with the tool. */
     public record Example(String href, String title, String what) { }
@@ -34,7 +34,7 @@ final class StartDesk {
         this.reader = reader;
         this.documents = documents;
         this.forms = forms;
-        this.start = new Start(codes(codes), examples(codes));
+        this.start = new Start(codes(codes), List.of(Kind.values()), examples(codes));
     }
 
     void show(Context ctx) {
@@ -85,7 +85,7 @@ final class StartDesk {
             if (name.endsWith(".json") && !name.contains("/")) {
                 JsonNode job = JobText.read(bytes);
                 String key = job.path("basis").path("code").asString("") + "/" + job.path("basis").path("edition").asString("");
-                String what = job.path("items").path(0).path("kind").asString("").equals("hoarding") ? "site hoarding" : "sign on posts";
+                String what = Kind.of(job.path("items").path(0).path("kind").asString("")).map(Kind::plain).orElse("");
                 examples.add(new Example("/answer?j=" + Token.of(job), job.path("title").asString(name),
                     what + ", " + codes.code(key).map(c -> c.edition().property("title")).orElse(key)));
             }

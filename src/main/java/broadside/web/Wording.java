@@ -31,13 +31,21 @@ record Wording(String label, String hint, String metric, String us) {
         job.drawing-number|Drawing number|
         job.date|Date of the job|Like 2026-12-01
         job.engineer|Engineer, with licence|The person who will review it
+        job.remarks|Remarks|
         basis.stability|Rule for overturning|
         site.name|Name of the place|
         site.basic-speed|Basic wind speed|From the wind map or the national annex for this place
         site.averaging|Kind of speed|A gust and a mean of the same wind differ by half
+        site.region|Wind region|As on the code's map; it stands in place of the speed
+        site.regional-speed|Regional wind speed|In place of the region and the basic speed
+        site.wind-zone|Wind zone|As on the national map; it stands in place of the speed
+        site.season|Season in which it stands|In the words of the national annex
         site.return-period|Once in how many years|The basic speed of most codes is passed once in 50 years
+        site.stands-for|How long it stands||months|months
+        site.duration-rule|Is the load lowered for the short stay?|
         site.terrain|What the ground is like on the windward side|If you are not sure between two, take the smoother one: it gives the larger load
         site.terrain-reason|Why this one|A line for the reviewer, such as what is seen to the west
+        site.ground-nearby|Is the ground within 1 km (3300 ft) higher or lower by more than 10 m (33 ft)?|The wind is stronger on a hill and above a slope
         site.altitude|Height above the sea|
         site.authority-minimum-pressure|Least pressure asked for|
         site.authority-minimum-level|The authority means it|
@@ -48,15 +56,28 @@ record Wording(String label, String hint, String metric, String us) {
         site.topographic-factor|Topographic factor|K_zt, in place of the sizes of the slope
         site.ground-elevation|Elevation of the ground|For K_e; left empty, sea level is taken, which is safe
         site.gust-factor|Gust-effect factor|G, a number, or the word computed; left empty, 0.85 is taken
+        site.structure-class|Class of structure|For k1
+        site.k4|Importance factor for cyclones|k4
+        site.directionality|Directionality factor|K_d
+        site.direction-multiplier|Direction multiplier|M_d, 1 where nothing else is known
+        site.shielding-multiplier|Shielding multiplier|M_s, 1 where nothing stands around that will stay
+        site.climate-multiplier|Climate change multiplier|M_c
         topography.feature|What the ground does near by|
         topography.height|Height of the slope|From its foot to its crest
         topography.upwind-length|Length of the slope|In plan, from the foot to the crest on the windward side
         topography.downwind-length|How long the slope behind the crest is|In plan
         topography.half-length|From the crest to half the height|In plan, on the windward side
         topography.distance-from-crest|From the crest to the item|In plan; behind the crest as it is, in front of it with a minus
-        post-sign.mark|Mark|The short name on drawings, such as S1
-        hoarding.mark|Mark|The short name on drawings, such as H1
+        item.mark|Mark|Its short name on drawings and in tables
+        item.held-by|What is it fixed to?|What was not made to hold it cannot be checked here
+        item.fixed-to|More about what it is fixed to|Its material, thickness, age, owner: whatever the engineer should know
+        item.solidity-by|Who gave the closed part|A printer's figure for a mesh is not one of wind
+        item.lighting|Lighting and openings|
+        item.design-life|Design life|
+        item.inspection-interval|Inspection interval|
+        item.shelter-factor|Shelter factor|By the code's rule for walls and fences in front
         post-sign.faces|Faces that are read|2 when it is read from both sides
+        post-sign.opening-angle|Angle between two faces that open in a V|Leave empty where they are parallel
         board.mark|Mark of this board|
         board.width|Width|Across the wind
         board.height|Height|Of the board itself
@@ -66,28 +87,62 @@ record Wording(String label, String hint, String metric, String us) {
         board.depth|Thickness|Of the board or box|mm|in
         board.solidity|Closed part|1 for a closed board, 0.8 when a fifth of it is open
         board.mass|Mass|
-        post-sign.fixed-to|What it is fixed to|
-        post-sign.solidity-by|Who gave the closed part|
-        post-sign.lighting|Lighting and openings|
-        post-sign.design-life|Design life|
-        post-sign.inspection-interval|Inspection interval|
         hoarding.length|Length|Over all, from end to end
         hoarding.height|Height|Of the boards themselves
         hoarding.clearance|Gap below|From the ground to the lower edge; 0 where it stands on the ground
         hoarding.solidity|Closed part|1 for closed boards, 0.8 when a fifth of it is open
-        hoarding.fixed-to|What it is fixed to|
-        hoarding.solidity-by|Who gave the closed part|
-        hoarding.lighting|Lighting and openings|
-        hoarding.design-life|Design life|
-        hoarding.inspection-interval|Inspection interval|
         returns.left|Return at the left end|Length of the part that turns back; empty for a free end
         returns.right|Return at the right end|Length of the part that turns back; empty for a free end
         gate.from|From the left end to the gate|
         gate.width|Width of the gate|
+        banner-fence.panel-length|Length of one panel|From joint to joint
+        banner-fence.panel-height|Height of one panel|From the ground to its upper edge
+        banner-fence.panels|Number of panels in the line|
+        banner-fence.cover-solidity|Closed part of the cover|1 for closed fabric, 0.8 when a fifth of it is open; left empty, closed
+        banner-fence.fence-solidity|Closed part of the bare fence|Bars and mesh over the whole area; left empty, 0.25
+        banner-fence.panel-mass|Mass of one panel|With its cover
+        banner-fence.foot-mass|Mass of one foot|
+        banner-fence.foot-length|Length of a foot|Across the line of the fence
+        banner-fence.ground|What it stands on|Such as grass, asphalt or gravel, and whether it can be wet
+        banner-fence.stakes|Stakes|Where the ground takes them
+        block.mass|Mass of the block|
+        block.lever|From the line of the fence to the middle of the block|
+        brace.lever|From the line of the fence to the foot of the brace|
+        brace.mass|Mass on the foot of the brace|
+        facade-panel.backing|What is behind it?|
+        facade-panel.width|Width|Of the panel, along the wall
+        facade-panel.height|Height|Of the panel
+        facade-panel.bottom|Height of its lower edge|Above the ground
+        facade-panel.distance-from-corner|From the corner of the building to the panel|Along the wall, from the nearer corner
+        facade-panel.gap|Gap between wall and panel||mm|in
+        facade-panel.depth|Thickness|Of the panel|mm|in
+        facade-panel.mass|Mass|Of the panel
+        building.width|Width of this wall|From corner to corner
+        building.depth|Depth of the building|At right angles to this wall
+        building.height|Height of this wall|From the ground to its top
+        building.roof-slope|Slope of the roof|0 for a flat roof
+        building.enclosure|Large openings in the walls|They let the wind in, and the pressure inside rises
+        projecting-sign.projection|How far the board stands out|From its inner to its outer edge
+        projecting-sign.height|Height|Of the board
+        projecting-sign.bottom|Height of its lower edge|Above the ground
+        projecting-sign.gap|Gap to the wall|From the wall to the inner edge; 0 where it touches|mm|in
+        projecting-sign.depth|Thickness|Of the board or box|mm|in
+        projecting-sign.mass|Mass|Of the sign with its brackets
+        brackets.count|Number of brackets|One above the other
+        brackets.spacing|Distance between brackets|From middle to middle
+        spanned-banner.width|Length of the banner|From one end to the other
+        spanned-banner.height|Height|Of the fabric
+        spanned-banner.bottom|Height of its lower edge|Above the ground
+        spanned-banner.sag|How far its middle bows out|In the wind, seen from above: half the sag means twice the pull
+        spanned-banner.solidity|Closed part|1 for closed fabric, 0.8 when a fifth of it is open; slits do not count
+        spanned-banner.mass-per-area|Mass of the fabric||g/m2|lb/ft2
         posts.count|Number of posts|
         posts.spacing|Distance between posts|From middle to middle
         posts.section|Section of a post|Such as CHS 114.3x5
         posts.grade|Grade of the posts|Such as S355
+        posts.shape|Outline of a post|
+        posts.width|Width of a post|Across the wind, or its diameter|mm|in
+        posts.depth|Depth of a post|Along the wind|mm|in
         hoarding-posts.spacing|Distance between posts|From middle to middle
         hoarding-posts.section|Section of a post|Such as SHS 100x5
         hoarding-posts.grade|Grade of the posts|Such as S355
@@ -100,6 +155,12 @@ record Wording(String label, String hint, String metric, String us) {
         ballast.mass|Mass at each brace|
         ballast.lever|From the face to the middle of the ballast|
         ballast.ground|Surface that it stands on|
+        fixings.columns|Columns of fixings|Side by side
+        fixings.rows|Rows of fixings|One above the other
+        fixings.horizontal-pitch|Distance between columns||mm|in
+        fixings.vertical-pitch|Distance between rows||mm|in
+        fixings.allowable-tension|Pull that one fixing may take|By its maker, for this wall
+        fixings.allowable-shear|Shear that one fixing may take|By its maker, for this wall
         override.name|Name of the value|As it stands in the calculation, such as topography-factor
         override.value|Your value|A plain number, or a number with its unit
         override.reason|Why|Stands on every output
@@ -107,8 +168,13 @@ record Wording(String label, String hint, String metric, String us) {
 
     private static final Map<String, Wording> KNOWN = known();
 
+    /** The words of a shape, of the shape it is like, or those that all kinds of item share. */
     static Wording of(String shape, Field field) {
-        Wording known = KNOWN.get(shape + "." + field.name());
+        String own = (shape.equals("replaces") ? "board" : shape) + "." + field.name();
+        return of(KNOWN.getOrDefault(own, KNOWN.get("item." + field.name())), field);
+    }
+
+    private static Wording of(Wording known, Field field) {
         String label = known == null ? sentence(field.meaning()) : known.label();
         String hint = known == null ? "" : known.hint();
         if (field.dimension().isEmpty()) {

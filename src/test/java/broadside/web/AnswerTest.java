@@ -74,7 +74,7 @@ class AnswerTest {
         String token = Token.of(json(Pool.SIGN));
         String page = Pool.get("/answer?j=" + token).body();
         assertThat(page).contains("<h1 id=\"top\">Test sign</h1>").contains("class=\"answer\"").contains("<sub>p</sub>").contains("scope=\"col\"")
-            .contains("src=\"/drawing.svg?picture=0&amp;j=" + token).contains("PRELIMINARY").contains("/fill?j=" + token + "&amp;item=0#place")
+            .contains("src=\"/drawing.svg?j=" + token + "&amp;picture=0\"").contains("PRELIMINARY").contains("/fill?j=" + token + "&amp;item=0#place")
             .contains("/summary.pdf?paper=letter&amp;j=" + token).contains("/job.json?j=" + token);
     }
 

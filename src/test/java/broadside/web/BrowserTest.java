@@ -1,12 +1,15 @@
 package broadside.web;
 
+import static broadside.web.Browsers.begin;
+import static broadside.web.Browsers.checkPdf;
+import static broadside.web.Browsers.gone;
+import static broadside.web.Browsers.image;
+import static broadside.web.Browsers.press;
+import static broadside.web.Browsers.type;
+import static broadside.web.Browsers.violations;
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assumptions.assumeThat;
 
-import java.io.File;
 import java.io.IOException;
-import java.io.InputStream;
-import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -20,97 +23,28 @@ import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.openqa.selenium.By;
 import org.openqa.selenium.Keys;
-import org.openqa.selenium.WebDriverException;
 import org.openqa.selenium.WebElement;
 import org.openqa.selenium.chrome.ChromeDriver;
-import org.openqa.selenium.chrome.ChromeDriverService;
-import org.openqa.selenium.chrome.ChromeOptions;
 import org.openqa.selenium.support.ui.Select;
 import org.openqa.selenium.support.ui.WebDriverWait;
 
 /** A real browser does what a user does, with scripts and without. */
 class BrowserTest {
 
-    private static final File BROWSER = new File("/usr/bin/chromium");
-    private static final File DRIVER = new File("/usr/bin/chromedriver");
-
-    /** Long pages whose structure is the same at every width: scanned once. */
-    private static final List<String> LONG = List.of("checks", "edition", "publication", "sign full");
-    private static final String SCANNER = scanner();
-
+    /** Long pages, or pages like others, whose structure is the same at every width: scanned once. */
+    private static final List<String> LONG = List.of("checks", "edition", "publication", "sign full", "blade", "banner", "side by side");
     private static ChromeDriver scripted;
     private static ChromeDriver plain;
 
     @BeforeAll
     static void start() throws IOException {
-        boolean there = BROWSER.canExecute() && DRIVER.canExecute();
-        if (!there) {
-            System.out.println("The browser tests are left out: " + BROWSER + " or " + DRIVER + " is not installed.");
-        }
-        assertThat(there || !"true".equals(System.getenv("CI"))).as("a browser where every change is tested").isTrue();
-        assumeThat(there).isTrue();
-        scripted = browser(true);
-        plain = browser(false);
-    }
-
-    private static ChromeDriver browser(boolean scripts) throws IOException {
-        ChromeOptions options = new ChromeOptions();
-        options.setBinary(BROWSER);
-        options.addArguments("--headless=new", "--no-sandbox", "--disable-gpu", "--disable-quic", "--no-first-run", "--disable-background-networking",
-            "--disable-component-update", "--disable-sync", "--user-data-dir=" + Files.createTempDirectory("browser"));
-        if (!scripts) {
-            options.setExperimentalOption("prefs", Map.of("profile.managed_default_content_settings.javascript", 2));
-        }
-        ChromeDriver driver = new ChromeDriver(new ChromeDriverService.Builder().usingDriverExecutable(DRIVER).build(), options);
-        driver.manage().timeouts().pageLoadTimeout(Duration.ofSeconds(20));
-        return driver;
+        scripted = Browsers.start(true);
+        plain = Browsers.start(false);
     }
 
     @AfterAll
     static void stop() {
-        if (scripted != null) {
-            scripted.quit();
-        }
-        if (plain != null) {
-            plain.quit();
-        }
-    }
-
-    private static void type(ChromeDriver driver, String id, String text) {
-        WebElement box = driver.findElement(By.id(id));
-        box.clear();
-        box.sendKeys(text);
-    }
-
-    /** Presses a button that leads to another page, and waits for that page. */
-    private static void press(ChromeDriver driver, String words) {
-        WebElement before = driver.findElement(By.tagName("html"));
-        driver.findElements(By.cssSelector("button:not([aria-hidden])")).stream().filter(b -> b.getText().startsWith(words)).findFirst().orElseThrow().click();
-        new WebDriverWait(driver, Duration.ofSeconds(10)).until(d -> gone(before));
-        new WebDriverWait(driver, Duration.ofSeconds(10)).until(d -> !d.findElements(By.tagName("footer")).isEmpty());
-    }
-
-    /** Whether an element belongs to a page that was left; the driver has more than one way to say so. */
-    private static boolean gone(WebElement element) {
-        try {
-            element.isEnabled();
-            return false;
-        } catch (WebDriverException left) {
-            return true;
-        }
-    }
-
-    private static void begin(ChromeDriver driver, int code, String units, String kind) {
-        driver.get(Pool.base() + "/");
-        driver.findElement(By.id("code-" + code)).click();
-        driver.findElement(By.id("units-" + units)).click();
-        press(driver, kind);
-    }
-
-    private static void checkPdf(ChromeDriver driver, String words) {
-        String link = driver.findElement(By.linkText(words)).getDomAttribute("href");
-        byte[] pdf = Pool.bytes(link).body();
-        assertThat(new String(pdf, 0, 5, StandardCharsets.US_ASCII)).isEqualTo("%PDF-");
+        Browsers.stop(scripted, plain);
     }
 
     @Test
@@ -123,6 +57,7 @@ class BrowserTest {
         type(scripted, "items[0].boards[0].height", "2");
         type(scripted, "items[0].boards[0].clearance", "2,5");
         type(scripted, "items[0].posts.count", "1");
+        scripted.findElement(By.id("items[0].held-by-own-posts")).click();
         press(scripted, "Work out");
         assertThat(scripted.getTitle()).startsWith("Error: ");
         assertThat(scripted.switchTo().activeElement().getDomAttribute("class")).isEqualTo("problems");
@@ -149,6 +84,7 @@ class BrowserTest {
         type(scripted, "items[0].boards[0].width", "3.2");
         type(scripted, "items[0].boards[0].clearance", "2");
         type(scripted, "items[0].posts.count", "1");
+        scripted.findElement(By.id("items[0].held-by-own-posts")).click();
         press(scripted, "Work out");
         assertThat(scripted.getTitle()).startsWith("Error: ");
         type(scripted, "items[0].boards[0].height", "1.4");
@@ -183,6 +119,7 @@ class BrowserTest {
         press(plain, "Add a gate");
         type(plain, "items[0].gates[0].from", "40");
         type(plain, "items[0].gates[0].width", "16 ft");
+        plain.findElement(By.id("items[0].held-by-own-posts")).click();
         press(plain, "Work out");
         assertThat(plain.findElement(By.cssSelector(".answer")).getText()).contains("kip ft");
         checkPdf(plain, "PDF on Letter paper");
@@ -204,11 +141,6 @@ class BrowserTest {
         new WebDriverWait(scripted, Duration.ofSeconds(10)).until(d -> gone(before));
         assertThat(scripted.getTitle()).startsWith("Error: ");
         assertThat(scripted.findElement(By.id("items[0].boards[0].width")).getDomProperty("value")).isEqualTo("8-6");
-    }
-
-    /** Whether an image was loaded. */
-    private static boolean image(ChromeDriver driver, String css) {
-        return Boolean.TRUE.equals(driver.executeScript("const i = document.querySelector(arguments[0]); return !!i && i.complete && i.naturalWidth > 0;", css));
     }
 
     @Test
@@ -246,23 +178,6 @@ class BrowserTest {
         assertThat(found).isEmpty();
     }
 
-    /** What the scanner finds wrong with the page, by its rule and the first place. */
-    @SuppressWarnings("unchecked")
-    private static List<String> violations(ChromeDriver driver) {
-        driver.executeScript(SCANNER);
-        Object answer = driver.executeAsyncScript("const done = arguments[arguments.length - 1];"
-            + "axe.run(document, {resultTypes: ['violations']}).then(r => done(r.violations.map(v => v.id + ' ' + v.nodes[0].html)), e => done([String(e)]));");
-        return (List<String>) answer;
-    }
-
-    private static String scanner() {
-        try (InputStream in = BrowserTest.class.getResourceAsStream("/axe.min.js")) {
-            return new String(in.readAllBytes(), StandardCharsets.UTF_8);
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
-    }
-
     private static Map<String, String> pages() {
         Map<String, String> pages = new LinkedHashMap<>();
         String token = Token.of(broadside.job.JobText.read(Pool.SIGN.getBytes(StandardCharsets.UTF_8)));
@@ -272,6 +187,11 @@ class BrowserTest {
         pages.put("sign full", "/fill?j=" + token);
         pages.put("sign wrong", "/fill?kind=post-sign&code=en-1991-1-4/2005");
         pages.put("hoarding wrong", "/fill?kind=hoarding&units=us");
+        pages.put("fence wrong", "/fill?kind=banner-fence&code=en-1991-1-4/2005");
+        pages.put("facade wrong", "/fill?kind=facade-panel&units=us&code=asce-7/16");
+        pages.put("blade", "/fill?kind=projecting-sign&code=en-1991-1-4/2005");
+        pages.put("banner", "/fill?kind=spanned-banner&units=us&code=asce-7/16");
+        pages.put("side by side", "/side-by-side?j=" + token);
         pages.put("answer", "/answer?j=" + token);
         pages.put("answer uncovered", "/answer?j=" + uncovered);
         pages.put("tables", "/tables");

@@ -14,6 +14,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import tools.jackson.databind.JsonNode;
+import tools.jackson.databind.node.ObjectNode;
 
 class FormTest {
 
@@ -25,6 +26,7 @@ class FormTest {
         Map<String, String> form = blank("post-sign", "metric");
         form.putAll(Map.of("site.basic-speed", "26", "site.averaging", "10 min mean", "site.terrain", "II", "items[0].boards[0].width", "3",
             "items[0].boards[0].height", "2,0", "items[0].boards[0].clearance", "2500 mm", "items[0].posts.count", "2", "items[0].posts.spacing", "2"));
+        form.put("items[0].held-by", "own posts");
         return form;
     }
 
@@ -60,7 +62,7 @@ class FormTest {
         assertThat(answer.statusCode()).isEqualTo(422);
         assertThat(page).contains("<title>Error: A sign on posts, S1 - Broadside</title>").contains("role=\"alert\"");
         for (String path : List.of("site.basic-speed", "site.averaging", "site.terrain", "items[0].boards[0].width", "items[0].boards[0].height",
-            "items[0].boards[0].clearance", "items[0].posts.count")) {
+            "items[0].boards[0].clearance", "items[0].posts.count", "items[0].held-by")) {
             assertThat(page).contains("href=\"#" + path + "\"").contains("id=\"" + path + "\"").contains("id=\"" + path + "-problem\"");
         }
         assertThat(page).contains("Width is missing: type it like 2.4 m");
@@ -70,7 +72,7 @@ class FormTest {
     @Test
     void what_was_typed_stands_there_again_also_inside_folds() {
         Map<String, String> form = sign();
-        form.putAll(Map.of("site.basic-speed", "fast", "site.topography.height", "about 30", "site.direction-factor", "one", "items[0].footing.ground",
+        form.putAll(Map.of("site.basic-speed", "fast", "site.ground-nearby", "hill", "site.topography.height", "about 30", "site.direction-factor", "one", "items[0].footing.ground",
             " stiff clay ", "title", "Ferry & \"Street\" <sign>", "items[0].boards[0].solidity", "0,8", "items[0].posts.section", "CHS 114.3x5"));
         HttpResponse<String> answer = send(form, "assess");
         assertThat(answer.statusCode()).isEqualTo(422);
@@ -161,10 +163,16 @@ class FormTest {
     @Test
     void flat_ground_leaves_the_sizes_of_the_slope_out_of_the_job() {
         Map<String, String> form = sign();
-        form.putAll(Map.of("site.topography.feature", "flat", "site.topography.height", "30 m"));
-        assertThat(job(send(form, "assess")).path("site").has("topography")).isFalse();
-        form.remove("site.topography.feature");
-        assertThat(Pool.plain(send(form, "assess").body())).contains("href=\"#site.topography.feature\"");
+        form.putAll(Map.of("site.ground-nearby", "flat", "site.topography.height", "30 m"));
+        JsonNode flat = job(send(form, "assess"));
+        assertThat(flat.path("site").has("topography")).isFalse();
+        assertThat(flat.path("site").path("ground-nearby").stringValue()).isEqualTo("flat");
+        form.put("site.ground-nearby", "hill");
+        assertThat(Pool.plain(send(form, "assess").body())).contains("href=\"#site.topography.feature\"").containsPattern("id=\"site.topography\" open");
+        form.put("site.ground-nearby", "unknown");
+        JsonNode unknown = job(send(form, "assess"));
+        assertThat(unknown.path("site").has("topography")).isFalse();
+        assertThat(unknown.path("site").path("ground-nearby").stringValue()).isEqualTo("unknown");
     }
 
     @Test
@@ -173,6 +181,7 @@ class FormTest {
             + "\"returns\":{\"left\":\"2.4 m\"},\"lighting\":\"none\"},").getBytes(StandardCharsets.UTF_8));
         Map<String, String> form = new LinkedHashMap<>(Pool.fields(Pool.get("/fill?item=1&j=" + Token.of(two)).body()));
         form.put("items[1].boards[0].width", "3.5");
+        form.put("items[1].held-by", "own posts");
         JsonNode job = job(send(form, "assess"));
         assertThat(job.path("items").path(0)).isEqualTo(two.path("items").path(0));
         assertThat(job.path("items").path(1).path("boards").path(0).path("width").stringValue()).isEqualTo("3.5 m");
@@ -186,7 +195,7 @@ class FormTest {
     void items_are_added_and_taken_out() {
         Map<String, String> added = Pool.fields(send(sign(), "add-item:hoarding").body());
         assertThat(added).containsEntry("items[1].kind", "hoarding").containsEntry("item", "1");
-        added.putAll(Map.of("items[1].length", "20", "items[1].height", "2.4"));
+        added.putAll(Map.of("items[1].length", "20", "items[1].height", "2.4", "items[1].held-by", "its own feet"));
         assertThat(job(send(added, "assess")).path("items").size()).isEqualTo(2);
         assertThat(job(send(Pool.fields(send(added, "drop-item").body()), "assess")).path("items").size()).isEqualTo(1);
     }
@@ -197,18 +206,26 @@ class FormTest {
         int seen = 0;
         while (links.find()) {
             JsonNode before = Token.read(links.group(1));
-            JsonNode after = job(send(Pool.fields(Pool.get("/fill?j=" + links.group(1)).body()), "assess"));
-            tools.jackson.databind.node.ObjectNode expected = ((tools.jackson.databind.node.ObjectNode) before).deepCopy();
-            if (expected.path("basis").path("overlay").isNull()) {
-                ((tools.jackson.databind.node.ObjectNode) expected.get("basis")).remove("overlay");
+            Map<String, String> form = Pool.fields(Pool.get("/fill?j=" + links.group(1)).body());
+            ObjectNode expected = ((ObjectNode) before).deepCopy();
+            if (!form.containsKey("items[0].held-by")) {
+                form.put("items[0].held-by", "own posts");
+                ((ObjectNode) expected.get("items").get(0)).put("held-by", "own posts");
             }
-            tools.jackson.databind.node.ObjectNode made = ((tools.jackson.databind.node.ObjectNode) after).deepCopy();
+            if (before.path("site").has("topography")) {
+                ((ObjectNode) expected.get("site")).put("ground-nearby", "hill");
+            }
+            JsonNode after = job(send(form, "assess"));
+            if (expected.path("basis").path("overlay").isNull()) {
+                ((ObjectNode) expected.get("basis")).remove("overlay");
+            }
+            ObjectNode made = ((ObjectNode) after).deepCopy();
             made.remove("units");
             expected.remove("units");
             assertThat(json(made)).as(before.path("title").toString()).isEqualTo(json(expected));
             seen++;
         }
-        assertThat(seen).isGreaterThanOrEqualTo(8);
+        assertThat(seen).isGreaterThanOrEqualTo(14);
     }
 
     /** The same job whether a plain number is written 1 or 1.0. */
@@ -220,9 +237,10 @@ class FormTest {
     @ValueSource(strings = {"<script>alert(1)</script>", "${7*7}", "__${7*7}__::.x", "[[${7*7}]]", "\"><img src=x onerror=alert(1)>", "'; drop", "*{7*7}",
         "#{x}", "~{frame :: page}", "\u202eabc\u0000def", "\ud83d\ude00"})
     void hostile_texts_are_shown_as_text_through_every_field(String text) {
-        for (String kind : List.of("post-sign", "hoarding")) {
-            Map<String, String> form = Pool.fields(send(Pool.fields(send(blank(kind, "metric"), kind.equals("hoarding") ? "add-gate" : "add-board").body()),
-                "add-factor").body());
+        for (Kind of : Kind.values()) {
+            String kind = of.key();
+            String add = kind.equals("hoarding") ? "add-gate" : kind.equals("banner-fence") ? "add-block" : "add-board";
+            Map<String, String> form = Pool.fields(send(Pool.fields(send(blank(kind, "metric"), add).body()), "add-factor").body());
             Map<String, String> hostile = new LinkedHashMap<>();
             form.forEach((name, value) -> hostile.put(name, List.of("kept", "item", "items[0].kind").contains(name) ? value : "q" + text + "p"));
             HttpResponse<String> answer = send(hostile, "assess");

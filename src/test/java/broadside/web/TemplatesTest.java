@@ -77,9 +77,10 @@ class TemplatesTest {
         pages.put("start", Pool.get("/").body());
         pages.put("form blank", Pool.get("/fill?kind=post-sign").body());
         pages.put("form full", Pool.get("/fill?j=" + token).body());
-        for (String kind : List.of("post-sign", "hoarding")) {
+        for (Kind of : Kind.values()) {
+            String kind = of.key();
             Map<String, String> form = Pool.fields(Pool.get("/fill?units=us&kind=" + kind + "&code=asce-7/16").body());
-            for (String todo : List.of("add-board", "add-gate", "add-factor")) {
+            for (String todo : List.of("add-board", "add-gate", "add-block", "add-factor")) {
                 form.put("do", todo);
                 form = Pool.fields(Pool.post("/fill", form).body());
             }
@@ -89,6 +90,7 @@ class TemplatesTest {
         pages.put("answer full", Pool.get("/answer?j=" + token).body());
         pages.put("answer uncovered", Pool.get("/answer?j=" + uncovered).body());
         pages.put("answer example", Pool.get("/answer?j=" + example()).body());
+        pages.put("compare full", Pool.get("/side-by-side?j=" + token).body());
         pages.put("tables", Pool.get("/tables").body());
         pages.put("edition", Pool.get("/tables/asce-7/16").body());
         pages.put("checks", Pool.get("/checks").body());
