@@ -1,7 +1,9 @@
 package broadside.assess;
 
 import broadside.codes.WindCode;
+import broadside.panel.Hoarding;
 import broadside.panel.Item;
+import broadside.panel.PostSign;
 import broadside.quantity.Period;
 import broadside.site.Site;
 import broadside.site.Topography;
@@ -182,7 +184,7 @@ final class Notes {
         if (!item.carrying().isEmpty()) {
             add(Note.Kind.NOT_CHECKED, "What carries it is kept as typed and not checked: " + String.join("; ",
                 item.carrying().stream().map(c -> c.name() + " " + c.typed()).toList()) + ".");
-        } else {
+        } else if (item instanceof PostSign || item instanceof Hoarding) {
             add(Note.Kind.NOT_CHECKED, "Posts, footing and ground: loads only.");
         }
     }

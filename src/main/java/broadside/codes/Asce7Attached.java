@@ -1,7 +1,7 @@
 package broadside.codes;
 
-import broadside.panel.FacadePanel;
 import broadside.panel.FacadePanel.Backing;
+import broadside.panel.FacadePanel;
 import broadside.panel.Panel;
 import broadside.site.Site;
 import broadside.table.Edition;

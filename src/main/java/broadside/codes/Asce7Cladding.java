@@ -2,8 +2,8 @@ package broadside.codes;
 
 import broadside.aero.Strip;
 import broadside.codes.LoadCase.Windward;
-import broadside.panel.FacadePanel;
 import broadside.panel.FacadePanel.Backing;
+import broadside.panel.FacadePanel;
 import broadside.quantity.Dimension;
 import broadside.quantity.Unit;
 import broadside.site.Site;
