@@ -50,19 +50,17 @@ final class Is875Hoardings {
             .from(place.citation(), place.status()).gives("h' / h", panel.clearance() / panel.height(), "1");
         boolean clear = Numbers.atLeast(gap, constants.number("hoarding-clearance"));
         // A board with a small gap that is too narrow for the column on the ground may still be read as above ground.
-        boolean narrow = gap > 0 && !Numbers.atLeast(aspect, onGround.first());
-        boolean ground = !clear && !narrow;
-        Coefficient found = printed(ground ? onGround : above, aspect);
-        boolean ownReading = found.how().startsWith("between") && Numbers.above(aspect, constants.number(ground ? "on-ground-line-to" : "above-ground-line-to"));
+        boolean ground = !clear && (gap == 0 || Numbers.atLeast(aspect, onGround.first()));
+        Curve column = ground ? onGround : above;
+        boolean turned = !Numbers.atLeast(aspect, column.first());
+        Coefficient found = turned ? above.at("C_f", (ground ? onGround.first() / above.first() : 1) / aspect) : column.at("C_f", Math.max(aspect, column.first()));
+        boolean ownLine = !turned && found.how().startsWith("between") && Numbers.above(aspect, constants.number(ground ? "on-ground-line-to" : "above-ground-line-to"));
         String how = found.how() + (clear ? ", above ground" : ground ? ", on the ground, as h' is less than " + constants.text("hoarding-clearance") + " h"
-            : ", above ground, as the clause allows for a small gap") + (ownReading ? "; the straight line between these rows is a reading of this tool" : "")
-            + (panel.solidity() < 1 ? "; openings bring no reduction" : "");
+            : ", above ground, as the clause allows for a small gap") + (ownLine ? "; the straight line between these rows is a reading of this tool" : "")
+            + (turned ? "; the table begins at b/h " + Numbers.plain(column.first()) + ": the same plate turned on its side" + (ground ? ", its image in the ground with it," : "")
+                + " is a reading of this tool" : "") + (panel.solidity() < 1 ? "; openings bring no reduction" : "");
         return trace.line("coefficient/normal", "C_f", "force coefficient of a wall or hoarding").in("b/h", aspect).in("h'/h", gap)
-            .from(found.source().citation(), ownReading ? Status.DERIVED : found.source().status()).reads(how, found.value(), "1");
-    }
-
-    private static Coefficient printed(Curve curve, double aspect) {
-        return curve.at("C_f", Numbers.atLeast(aspect, curve.first()) ? Math.max(aspect, curve.first()) : aspect);
+            .from(found.source().citation(), ownLine || turned ? Status.DERIVED : found.source().status()).reads(how, found.value(), "1");
     }
 
     /** One even zone of the mean pressure, its resultant where the straight line puts it; shares of posts follow the line itself. */

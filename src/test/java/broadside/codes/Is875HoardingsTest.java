@@ -69,12 +69,14 @@ class Is875HoardingsTest {
         assertThat(step(board(26, 1, 0), "coefficient/normal").status()).isEqualTo(Status.DERIVED);
     }
 
+    /** A plate is the same when it is turned: b/h 1/8 above ground is 8 (1.25). On the ground it is half of one twice as high: b/h 1/2 is 4 (1.2), 1/4 is 8 (1.25). */
     @ParameterizedTest
-    @CsvSource({"0.49, 1, 1, 0.5", "0.99, 1, 0, 1", "0.4, 1, 0.1, 0.5"})
-    void narrower_than_the_table_is_refused(double width, double height, double gap, String first) {
+    @CsvSource({"0.49, 1, 1, 1.2", "0.125, 1, 1, 1.25", "0.6, 2.4, 3.2, 1.2", "0.99, 1, 0, 1.2", "0.5, 1, 0, 1.2", "0.25, 1, 0, 1.25", "0.125, 1, 0.1, 1.25"})
+    void narrower_than_the_table_is_the_same_plate_turned_and_the_step_says_so(double width, double height, double gap, double coefficient) {
         ItemResult item = board(width, height, gap);
-        assertThat(item.outcome()).isEqualTo(ItemResult.Outcome.NOT_COVERED);
-        assertThat(item.refusal().orElseThrow().reason()).contains("covers b/h from " + first);
+        assertThat(cf(item)).isCloseTo(coefficient, within(1e-12));
+        assertThat(step(item, "coefficient/normal").status()).isEqualTo(Status.DERIVED);
+        assertThat(step(item, "coefficient/normal").formula()).contains("the same plate turned on its side").contains("a reading of this tool");
     }
 
     /** The clause lets a board with a small gap be read as above ground; that column begins at 0.5. */
