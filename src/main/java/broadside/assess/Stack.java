@@ -53,13 +53,14 @@ final class Stack {
     private static Panel around(List<Panel> group, String part) {
         if (group.size() == 1) {
             Panel p = group.get(0);
-            return new Panel(part, p.kind(), p.width(), p.height(), p.clearance(), p.middle(), p.solidity(), 0, 0, p.typed());
+            return new Panel(part, p.kind(), p.width(), p.height(), p.clearance(), p.middle(), p.solidity(), 0, 0, 1, p.sharers(), p.typed());
         }
         double left = group.stream().mapToDouble(p -> p.middle() - p.width() / 2).min().orElseThrow();
         double right = group.stream().mapToDouble(p -> p.middle() + p.width() / 2).max().orElseThrow();
         double bottom = group.stream().mapToDouble(Panel::clearance).min().orElseThrow();
         double top = group.stream().mapToDouble(Panel::top).max().orElseThrow();
-        return new Panel(part, Panel.Kind.BOARD, right - left, top - bottom, bottom, (left + right) / 2, 1, 0, 0, new Panel.AsTyped("", "", "", ""));
+        return new Panel(part, Panel.Kind.BOARD, right - left, top - bottom, bottom, (left + right) / 2, 1, 0, 0, 1,
+            group.get(0).sharers(), new Panel.AsTyped("", "", "", ""));
     }
 
     private Stack() { }

@@ -67,8 +67,8 @@ final class Is875Pressure {
     }
 
     private double ofBoard(Panel panel, Trace trace) {
-        double a = trace.line("tributary-area", "A", "tributary area: the whole board, as it reaches its supports").in("b", panel.width(), "m")
-            .in("h", panel.height(), "m").from(place.publicationAndEdition() + ", 7.2.2.1", Status.DERIVED).gives("b h", panel.area(), "m²");
+        double a = trace.line("tributary-area", "A", "tributary area: the board, or what one of its posts carries of it").in("b", panel.width(), "m")
+            .in("h", panel.height(), "m").in("n", trace.given("n", "number of supports that share the board", panel.sharers(), "1", "")).from(place.publicationAndEdition() + ", 7.2.2.1", Status.DERIVED).gives("b h / n", panel.area() / panel.sharers(), "m²");
         return area.at("K_a", a).into(trace.line("area-factor", "K_a", "area averaging factor").in("A", a, "m²"));
     }
 

@@ -48,7 +48,7 @@ public record BannerFence(String mark, Length panelLength, Length panelHeight, i
     }
 
     private Panel panel(double solidity) {
-        return new Panel("", Panel.Kind.WALL, length(), panelHeight.metres(), 0, 0, solidity, 0, 0, shelter,
+        return new Panel("", Panel.Kind.WALL, length(), panelHeight.metres(), 0, 0, solidity, 0, 0, shelter, 1,
             new Panel.AsTyped("", panelHeight.typed(), "", ""));
     }
 }

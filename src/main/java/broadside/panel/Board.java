@@ -31,8 +31,8 @@ public record Board(String mark, Shape shape, Length width, Length height, Lengt
         }
     }
 
-    Panel panel(String part) {
-        return new Panel(part, Panel.Kind.BOARD, width.metres(), height.metres(), clearance.metres(), offset.metres(), solidity, 0, 0,
+    Panel panel(String part, int posts) {
+        return new Panel(part, Panel.Kind.BOARD, width.metres(), height.metres(), clearance.metres(), offset.metres(), solidity, 0, 0, 1, posts,
             new Panel.AsTyped(width.typed(), height.typed(), clearance.typed(), offset.typed()));
     }
 }

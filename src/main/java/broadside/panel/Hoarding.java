@@ -93,7 +93,7 @@ public record Hoarding(String mark, Length length, Length height, Length clearan
         double left = from == 0 ? returnLeft.metres() : 0;
         double right = Math.abs(to - length.metres()) < NARROWEST ? returnRight.metres() : 0;
         return new Panel(part, Panel.Kind.WALL, to - from, height.metres(), clearance.metres(),
-            (from + to) / 2 - length.metres() / 2, solidity, left, right, shelter,
+            (from + to) / 2 - length.metres() / 2, solidity, left, right, shelter, 1,
             new Panel.AsTyped(from == 0 && to == length.metres() ? length.typed() : "", height.typed(), clearance.typed(), ""));
     }
 }

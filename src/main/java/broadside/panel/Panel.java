@@ -14,15 +14,16 @@ package broadside.panel;
  * @param returnLeft  length of the return corner at the left end, 0 for a free end
  * @param returnRight length of the return corner at the right end
  * @param shelter     factor on the wind by a wall or fence in front that stays there, 1 for none
+ * @param sharers     posts that share its load
  * @param typed       the sizes as typed
  */
 public record Panel(String part, Kind kind, double width, double height, double clearance, double middle, double solidity,
-                    double returnLeft, double returnRight, double shelter, AsTyped typed) {
+                    double returnLeft, double returnRight, double shelter, int sharers, AsTyped typed) {
 
-    /** A panel without shelter. */
+    /** A panel without shelter on one support. */
     public Panel(String part, Kind kind, double width, double height, double clearance, double middle, double solidity, double returnLeft, double returnRight,
                  AsTyped typed) {
-        this(part, kind, width, height, clearance, middle, solidity, returnLeft, returnRight, 1, typed);
+        this(part, kind, width, height, clearance, middle, solidity, returnLeft, returnRight, 1, 1, typed);
     }
 
     /** The sizes as they were typed; a size that follows from others is empty. */

@@ -44,14 +44,14 @@ public record PostSign(String mark, List<Board> boards, Faces faces, Posts posts
     public List<Panel> panels() {
         List<Panel> panels = new ArrayList<>();
         for (int i = 0; i < boards.size(); i++) {
-            panels.add(boards.get(i).panel(part(i)));
+            panels.add(boards.get(i).panel(part(i), posts.count()));
         }
         return panels;
     }
 
     /** The old board on the same posts. */
     public Optional<Panel> replacedPanel() {
-        return replaces.map(b -> b.panel(""));
+        return replaces.map(b -> b.panel("", posts.count()));
     }
 
     /** Name of a board in steps and tables: its mark where no other board has it, else its number; empty when it is the only one. */

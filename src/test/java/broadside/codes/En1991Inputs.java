@@ -78,7 +78,7 @@ final class En1991Inputs {
 
     /** A wall on the ground. */
     static Panel wall(double length, double height, double solidity, double returnLeft, double returnRight, double shelter) {
-        return new Panel("", Panel.Kind.WALL, length, height, 0, 0, solidity, returnLeft, returnRight, shelter, new Panel.AsTyped("", "", "", ""));
+        return new Panel("", Panel.Kind.WALL, length, height, 0, 0, solidity, returnLeft, returnRight, shelter, 1, new Panel.AsTyped("", "", "", ""));
     }
 
     static Panel board(double width, double height, double clearance, double solidity) {
