@@ -17,6 +17,7 @@ public final class CodeLibrary {
         "asce-7-16", Asce716::new,
         "asce-7-22", Asce722::new,
         "is-875-3", Is875::new,
+        "as-nzs-1170-2", AsNzs1170::new,
         "open-flow", OpenFlow::new);
 
     private final Map<String, WindCode> codes = new LinkedHashMap<>();
