@@ -52,9 +52,9 @@ final class SiteReader {
     /** The site, or nothing when something needed is missing; what does not fit is noted. */
     Optional<Site> read(Values values, Optional<Job.Basis> basis) {
         Optional<Speed> speed = values.quantity("basic-speed", Speed.class);
-        speed.ifPresent(s -> within(values, "basic-speed", s.metresPerSecond(), 1, 150, "1 m/s and 150 m/s"));
-        values.quantity("return-period", Period.class)
-            .ifPresent(p -> within(values, "return-period", p.years(), 1.05, 10_000, "1.05 years and 10 000 years"));
+        for (String name : List.of("basic-speed", "regional-speed")) {
+            values.quantity(name, Speed.class).ifPresent(s -> within(values, name, s.metresPerSecond(), 1, 150, "1 m/s and 150 m/s"));
+        }
         values.quantity("altitude", Length.class).ifPresent(a -> within(values, "altitude", a.metres(), -500, 6000, "-500 m and 6000 m"));
         values.quantity("ground-elevation", Length.class)
             .ifPresent(a -> within(values, "ground-elevation", a.metres(), -500, 6000, "-500 m and 6000 m"));
@@ -65,6 +65,9 @@ final class SiteReader {
         NUMBERS.forEach(n -> values.number(n).ifPresent(v -> within(values, n, v, 0.3, 5, "0.3 and 5")));
         Optional<Averaging> averaging = values.text("averaging").flatMap(Averaging::of);
         Optional<WindCode> code = basis.flatMap(b -> codes.code(b.key()));
+        String leastYears = code.map(WindCode::edition).filter(e -> e.hasProperty("least-return-period")).map(e -> e.property("least-return-period")).orElse("1.05");
+        values.quantity("return-period", Period.class)
+            .ifPresent(p -> within(values, "return-period", p.years(), Double.parseDouble(leastYears), 10_000, leastYears + (leastYears.equals("1") ? " year" : " years") + " and 10 000 years"));
         Set<Site.Unknown> unknown = EnumSet.noneOf(Site.Unknown.class);
         Optional<String> terrain = values.text("terrain");
         if (terrain.filter(UNKNOWN::equals).isPresent()) {
