@@ -78,11 +78,15 @@ public final class HoardingPosts {
 
     /**
      * The cases that tell how pressure is spread along the wall. A case that only moves the resultant of an even pressure
-     * is spread in a straight line, unless the code also gives zones, which then tell.
+     * is spread in a straight line, unless the code also gives zones of which one is loaded harder, which then tell.
      */
     private static List<LoadCase> spread(PanelCases panel) {
-        boolean zoned = panel.cases().stream().anyMatch(c -> c.zones().size() > 1);
-        return panel.cases().stream().filter(c -> !(zoned && c.shift() != 0)).toList();
+        double zoned = panel.cases().stream().filter(c -> c.zones().size() > 1).mapToDouble(HoardingPosts::hardest).max().orElse(0);
+        return panel.cases().stream().filter(c -> c.shift() == 0 || zoned <= hardest(c)).toList();
+    }
+
+    private static double hardest(LoadCase load) {
+        return load.zones().stream().mapToDouble(ZonePressure::coefficient).max().orElseThrow();
     }
 
     private static Placed placed(Hoarding hoarding, Panel panel, LoadCase load, boolean shut) {
