@@ -9,8 +9,8 @@ final class Companions {
 
     static void record(Loads loads, Trace sheet) {
         Level level = loads.level();
-        double f = sheet.line("companion-factor", "f", "from " + level.name() + " to " + level.shown() + " loads: " + level.rule())
-            .from(level.place(), level.status()).reads("read in the table of combinations", level.factor(), "1");
+        double f = sheet.line("companion-factor", "f", "from " + level.name() + " to " + level.shown() + " loads")
+            .from(level.place(), level.status()).reads(level.rule(), level.factor(), "1");
         one("companion-base-shear", "F_b", loads.governs("base-shear").baseShear(), "N", f, level, sheet);
         if (loads.foot() != Foot.NONE) {
             one("companion-base-moment", loads.foot() == Foot.WALL ? "M_w" : "M", loads.governs("base-moment").baseMoment(), "N m", f, level, sheet);

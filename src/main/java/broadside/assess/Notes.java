@@ -65,7 +65,7 @@ final class Notes {
             add(Note.Kind.ASSUMPTION, "The ground is taken as flat: no hill, ridge or escarpment was given. If the ground within 1 km (3300 ft) is higher or lower "
                 + "by more than 10 m (33 ft), the load can be much larger.");
         }
-        site.ground().topography().ifPresent(ground -> topography(ground, code));
+        site.ground().topography().ifPresent(ground -> topography(ground, sheet));
         site.authorityMinimum().ifPresent(minimum -> add(Note.Kind.ASSUMPTION, code.level(site).name().equals("characteristic")
             ? "The authority's least pressure of " + minimum.pressure().typed() + " is taken as a characteristic pressure."
             : minimum.service() ? "The authority's least pressure of " + minimum.pressure().typed() + " is taken at allowable stress and brought to strength level."
@@ -78,14 +78,17 @@ final class Notes {
             String least = code.edition().rows("constants").text("gust-factor", "value");
             add(Note.Kind.CAUTION, "The gust factor given is below " + least + "; a small sign gets more than " + least + " by the formula, not less.");
         }
-        add(Note.Kind.ASSUMPTION, uses(sheet, "shelter-factor")
+        boolean shielded = site.options().number("shielding-multiplier").filter(m -> m < 1).isPresent();
+        add(Note.Kind.ASSUMPTION, shielded ? "The shelter of other structures is counted by the shielding multiplier given: they must stay as long as this stands."
+            : uses(sheet, "shelter-factor")
             ? "The shelter of a wall or fence in front is counted by the factor given: it must stay as long as this stands, be at least as high and not more open than the code asks."
             : "No shelter by other structures is counted.");
     }
 
     /** Values that were given and that this code does not use: said, so that nobody believes they count. */
     private void unused(Site site, WindCode code, Trace sheet) {
-        if (site.returnPeriod().isPresent() && sheet.find("probability-factor").isEmpty() && uses(sheet, "velocity-pressure")) {
+        boolean counted = uses(sheet, "probability-factor") || uses(sheet, "regional-speed");
+        if (site.returnPeriod().isPresent() && !counted && uses(sheet, "velocity-pressure")) {
             add(Note.Kind.CAUTION, "The return period of " + site.returnPeriod().get().typed() + " is not used by this code: the basic wind speed "
                 + (code.terms().options().contains("risk-category") ? "must be that of the map for the risk category." : "counts as it was given."));
         }
@@ -150,15 +153,15 @@ final class Notes {
             .ifPresent(least -> add(Note.Kind.CAUTION, "The code's own least pressure governs cases A and B."));
     }
 
-    private void topography(Topography ground, WindCode code) {
+    private void topography(Topography ground, Trace sheet) {
         add(Note.Kind.ASSUMPTION, "The hill is counted wherever the code's formulas give a factor, also where a condition on the ground around it might excuse "
             + "the site.");
-        boolean half = ground.halfLength().isPresent();
-        if (code.terms().options().contains("topographic-factor") && !half) {
+        if (uses(sheet, "half-length")) {
             add(Note.Kind.ASSUMPTION, "Half the height of the slope is taken to lie half-way along it, as for an even slope.");
         }
         boolean behind = ground.distanceFromCrest().metres() > 0 && ground.feature() != Topography.Feature.ESCARPMENT;
-        if (behind && ground.downwindLength().isEmpty()) {
+        boolean used = sheet.givens().stream().anyMatch(g -> g.symbol().equals("L_d"));
+        if (behind && used && ground.downwindLength().isEmpty()) {
             add(Note.Kind.ASSUMPTION, "The downwind slope is taken as long as the upwind one, as it was not given.");
         }
     }

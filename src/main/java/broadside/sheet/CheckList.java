@@ -129,7 +129,7 @@ final class CheckList {
         fact("Altitude", site.ground().altitude().map(a -> a.typed()).orElse(""));
         fact("Air density", site.options().quantities().containsKey("air-density") ? site.options().quantities().get("air-density").typed() : "by the code");
         fact("Directionality", "by the code; see the calculation");
-        fact("Shelter", assessment.items().stream().flatMap(i -> i.sheet().steps().stream()).anyMatch(s -> s.name().startsWith("shelter-factor"))
+        fact("Shelter", site.options().number("shielding-multiplier").filter(m -> m < 1).isPresent() ? "by the shielding multiplier given" : assessment.items().stream().flatMap(i -> i.sheet().steps().stream()).anyMatch(s -> s.name().startsWith("shelter-factor"))
             ? "by the factor given for a wall or fence in front" : "none counted");
         fact("Season or duration", site.options().number("season-factor").map(f -> "season factor " + format.plain(f)).orElse(site.options().word("season").orElse("none: the whole year")));
         fact("How long it stands", Optional.ofNullable(site.options().quantities().get("stands-for")).map(q -> q.typed()).orElse("")
