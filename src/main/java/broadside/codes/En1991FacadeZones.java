@@ -34,7 +34,7 @@ final class En1991FacadeZones {
             Source printed = zones.number(strip.name(), "from").source();
             trace.line("zone-width/" + strip.name(), "l_" + strip.name(), "width of zone " + strip.name() + " of the whole wall").in("e", e, "m")
                 .in("B_w", building.width(), "m").from(printed.citation(), printed.status())
-                .reads("from " + rounded(strip.from()) + " m to " + rounded(strip.to()) + " m from the windward corner", strip.width(), "m");
+                .reads("from " + Numbers.plain(En1991Walls.round(strip.from())) + " m to " + Numbers.plain(En1991Walls.round(strip.to())) + " m from the windward corner", strip.width(), "m");
         }
         return strips;
     }
@@ -60,9 +60,5 @@ final class En1991FacadeZones {
     /** An edge that misses the edge of the panel by binary rounding only lies on it. */
     private static double exact(double from) {
         return Math.abs(from) < ROUNDING ? 0 : from;
-    }
-
-    private static String rounded(double metres) {
-        return Numbers.plain(Math.round(metres * 1e4) / 1e4);
     }
 }

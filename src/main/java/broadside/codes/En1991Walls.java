@@ -92,7 +92,8 @@ final class En1991Walls {
         return new ZonePressure(part.name(), part.symbol("w"), strip.from(), strip.to(), width, c, w);
     }
 
-    private static double round(double metres) {
+    /** A limit of a zone as it is told in words: to a tenth of a millimetre. */
+    static double round(double metres) {
         return Math.round(metres * 1e4) / 1e4;
     }
 
