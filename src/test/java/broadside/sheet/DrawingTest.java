@@ -71,12 +71,7 @@ class DrawingTest {
         return ASSESSOR.assess(READER.read(job.getBytes(StandardCharsets.UTF_8))).items().get(0);
     }
 
-    /** The loads of the code, or loads of the same form where the code has none. */
-    private static Optional<Loads> loads(ItemResult result) {
-        return result.loads().or(() -> result.item() instanceof FacadePanel facade ? Optional.of(onWall(facade)) : Optional.empty());
-    }
-
-    /** A panel in two zones, pulled off harder than it is pushed on. */
+    /** Loads of a panel in two zones, pulled off harder than it is pushed on. */
     private static Loads onWall(FacadePanel facade) {
         double width = facade.width().metres();
         double area = width * facade.height().metres();
@@ -99,7 +94,7 @@ class DrawingTest {
         for (String head : List.of(EN, US)) {
             ItemResult result = assessed(item, head);
             Units units = head.equals(US) ? Units.US : Units.METRIC;
-            for (Optional<Loads> loads : List.of(loads(result), Optional.<Loads>empty())) {
+            for (Optional<Loads> loads : List.of(result.loads(), zoned(result), Optional.<Loads>empty())) {
                 Drawing drawing = ItemDrawing.of(result.item(), loads, units);
                 assertThat(drawing.width()).isEqualTo(480);
                 assertThat(drawing.height()).isBetween(120.0, 420.0);
@@ -107,6 +102,10 @@ class DrawingTest {
                 assertThat(touching(drawing)).isEmpty();
             }
         }
+    }
+
+    private static Optional<Loads> zoned(ItemResult result) {
+        return result.item() instanceof FacadePanel facade ? Optional.of(onWall(facade)) : Optional.empty();
     }
 
     private static void onPaper(Drawing drawing, Shape shape) {
@@ -151,7 +150,7 @@ class DrawingTest {
 
     private static List<String> texts(String item, String head) {
         ItemResult result = assessed(item, head);
-        return ItemDrawing.of(result.item(), loads(result), Units.METRIC).shapes().stream().filter(Text.class::isInstance).map(s -> ((Text) s).text()).toList();
+        return ItemDrawing.of(result.item(), zoned(result).or(result::loads), Units.METRIC).shapes().stream().filter(Text.class::isInstance).map(s -> ((Text) s).text()).toList();
     }
 
     @Test
@@ -195,7 +194,7 @@ class DrawingTest {
         for (String item : items()) {
             ItemResult result = assessed(item, EN);
             Item of = result.item();
-            assertThat(ItemDrawing.words(of, loads(result), Units.METRIC)).contains("The force of the governing case").doesNotContain("NaN");
+            assertThat(ItemDrawing.words(of, zoned(result).or(result::loads), Units.METRIC)).contains("The force of the governing case").doesNotContain("NaN");
             assertThat(ItemDrawing.words(of, Optional.empty(), Units.METRIC)).endsWith(".").contains(" high");
         }
     }

@@ -49,7 +49,7 @@ class BrowserTest {
 
     @Test
     void a_sign_in_metres_with_a_mistake_that_is_mended() {
-        begin(scripted, 1, "metric", "A sign on posts");
+        begin(scripted, "en-1991-1-4/2005", "metric", "A sign on posts");
         type(scripted, "site.basic-speed", "26");
         new Select(scripted.findElement(By.id("site.averaging"))).selectByVisibleText("3 s gust");
         scripted.findElement(By.id("site.terrain-II")).click();
@@ -77,7 +77,7 @@ class BrowserTest {
 
     @Test
     void the_back_button_brings_the_answers_back() {
-        begin(scripted, 1, "metric", "A sign on posts");
+        begin(scripted, "en-1991-1-4/2005", "metric", "A sign on posts");
         type(scripted, "site.basic-speed", "27");
         new Select(scripted.findElement(By.id("site.averaging"))).selectByVisibleText("10 min mean");
         scripted.findElement(By.id("site.terrain-II")).click();
@@ -101,7 +101,7 @@ class BrowserTest {
 
     @Test
     void a_hoarding_in_feet_and_inches_without_scripts() {
-        begin(plain, 0, "us", "A site hoarding");
+        begin(plain, "asce-7/16", "us", "A site hoarding");
         type(plain, "site.basic-speed", "115");
         new Select(plain.findElement(By.id("site.averaging"))).selectByVisibleText("3 s gust");
         plain.findElement(By.id("site.terrain-C")).click();
@@ -127,7 +127,7 @@ class BrowserTest {
 
     @Test
     void drawing_and_readings_follow_the_typing() {
-        begin(scripted, 1, "us", "A sign on posts");
+        begin(scripted, "en-1991-1-4/2005", "us", "A sign on posts");
         assertThat(scripted.findElements(By.cssSelector("[data-drawing]"))).isEmpty();
         type(scripted, "items[0].boards[0].width", "8-6");
         type(scripted, "items[0].boards[0].height", "4");

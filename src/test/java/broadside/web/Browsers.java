@@ -84,9 +84,9 @@ final class Browsers {
         }
     }
 
-    static void begin(ChromeDriver driver, int code, String units, String kind) {
+    static void begin(ChromeDriver driver, String code, String units, String kind) {
         driver.get(Pool.base() + "/");
-        driver.findElement(By.id("code-" + code)).click();
+        driver.findElement(By.cssSelector("input[name=code][value='" + code + "']")).click();
         driver.findElement(By.id("units-" + units)).click();
         press(driver, kind);
     }

@@ -38,7 +38,7 @@ class KindBrowserTest {
     @Test
     void a_blade_sign_is_filled_in_by_keyboard_alone() {
         scripted.get(Pool.base() + "/");
-        scripted.findElement(By.id("code-1")).sendKeys(Keys.SPACE);
+        scripted.findElement(By.cssSelector("input[name=code][value='en-1991-1-4/2005']")).sendKeys(Keys.SPACE);
         WebElement start = scripted.findElement(By.tagName("html"));
         scripted.findElement(By.cssSelector("button.kind[value=projecting-sign]")).sendKeys(Keys.ENTER);
         new WebDriverWait(scripted, Duration.ofSeconds(10)).until(d -> gone(start));
@@ -62,7 +62,7 @@ class KindBrowserTest {
 
     @Test
     void a_fence_without_scripts_is_asked_what_it_is_fixed_to() {
-        begin(plain, 1, "metric", "A banner fence");
+        begin(plain, "en-1991-1-4/2005", "metric", "A banner fence");
         type(plain, "site.basic-speed", "26");
         new Select(plain.findElement(By.id("site.averaging"))).selectByVisibleText("10 min mean");
         plain.findElement(By.id("site.terrain-II")).click();
@@ -85,7 +85,7 @@ class KindBrowserTest {
 
     @Test
     void a_hill_near_by_opens_its_sizes_and_flat_ground_shuts_them() {
-        begin(scripted, 1, "metric", "A panel on a wall");
+        begin(scripted, "en-1991-1-4/2005", "metric", "A panel on a wall");
         assertThat(scripted.findElement(By.id("site.topography.height")).isDisplayed()).isFalse();
         scripted.findElement(By.id("site.ground-nearby-hill")).click();
         assertThat(scripted.findElement(By.id("site.topography.height")).isDisplayed()).isTrue();

@@ -112,11 +112,11 @@ class PlaceFormTest {
     @Test
     void a_value_of_another_code_travels_along_and_is_left_out_of_the_job() {
         Map<String, String> form = sign();
-        form.putAll(Map.of("site.region", "A2", "site.duration-rule", "code", "site.stands-for", "6"));
+        form.putAll(Map.of("site.region", "A2", "site.k4", "1.1", "site.stands-for", "6"));
         assertThat(Pool.fields(send(form, "redraw").body())).containsEntry("site.region", "A2").containsEntry("site.stands-for", "6");
         JsonNode site = job(form).path("site");
         assertThat(site.has("region")).isFalse();
-        assertThat(site.has("duration-rule")).isFalse();
+        assertThat(site.has("k4")).isFalse();
         assertThat(site.path("stands-for").stringValue()).isEqualTo("6 months");
     }
 
