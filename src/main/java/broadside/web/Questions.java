@@ -144,7 +144,9 @@ final class Questions {
         Dimension dimension = field.dimension().orElseThrow();
         Unit unit = words.unit(dimension, units);
         boolean letters = units == Units.US && dimension == Dimension.LENGTH || SIGNED.contains(field.name());
-        return made("text", path, words.label() + ", in " + unit.symbol(), unit.symbol(), words.hint(),
+        boolean another = path.equals("site.basic-speed") && SiteFields.IN_PLACE_OF_SPEED.stream().anyMatch(this::takes);
+        String hint = another ? words.hint() + "; leave it empty where the zone or region below is given" : words.hint();
+        return made("text", path, words.label() + ", in " + unit.symbol(), unit.symbol(), hint,
             reading(answers.get(path), dimension, unit), List.of(), letters ? null : "decimal", "short");
     }
 
@@ -193,7 +195,7 @@ final class Questions {
 
     private List<Choice> choices(Field field, String path) {
         List<Choice> choices = new ArrayList<>();
-        choices.add(new Choice("", "", field.required() || field.name().equals("averaging") ? "Choose" : path.contains("boards[") ? "Not said: a rectangle" : "Not said", "", answers.blank(path)));
+        choices.add(new Choice("", "", field.required() || field.name().equals("averaging") ? "Choose" : path.contains(".boards[") || path.contains(".replaces.") ? "Not said: a rectangle" : "Not said", "", answers.blank(path)));
         for (String value : field.choices()) {
             choices.add(new Choice("", value, ChoiceWords.of(field.name(), value).words(), "", answers.get(path).equals(value)));
         }

@@ -2,6 +2,7 @@ package broadside.web;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import broadside.codes.WindCode;
 import broadside.job.JobText;
 import broadside.job.Shapes;
 import java.net.http.HttpResponse;
@@ -19,7 +20,6 @@ import tools.jackson.databind.JsonNode;
 class KindFormTest {
 
     private static final String EN = "en-1991-1-4/2005";
-    private static final String US = "asce-7/16";
 
     /** Every answer of each kind, as typed, without the head of its path. */
     private static final Map<Kind, Map<String, String>> ANSWERS = Map.of(
@@ -52,8 +52,8 @@ class KindFormTest {
 
     private static Map<String, String> full(Kind kind, String code) {
         Map<String, String> form = blank(kind, code);
-        form.putAll(code.equals(EN) ? Map.of("site.basic-speed", "26", "site.averaging", "10 min mean", "site.terrain", "II")
-            : Map.of("site.basic-speed", "51", "site.averaging", "3 s gust", "site.terrain", "C"));
+        WindCode of = Pool.ASSESSOR.codes().code(code).orElseThrow();
+        form.putAll(Map.of("site.basic-speed", "30", "site.averaging", of.terms().averaging().words(), "site.terrain", "unknown"));
         ANSWERS.get(kind).forEach((path, text) -> form.put("items[0]." + path, text));
         return form;
     }
@@ -93,7 +93,7 @@ class KindFormTest {
     @ParameterizedTest
     @EnumSource(Kind.class)
     void each_kind_is_filled_in_and_answered(Kind kind) {
-        for (String code : List.of(EN, US)) {
+        for (String code : Pool.ASSESSOR.codes().editions()) {
             String place = place(full(kind, code));
             HttpResponse<String> answer = Pool.get(place);
             assertThat(answer.statusCode()).isEqualTo(200);

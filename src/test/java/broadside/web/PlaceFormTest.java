@@ -121,6 +121,38 @@ class PlaceFormTest {
     }
 
     @Test
+    void a_zone_stands_in_place_of_the_speed() {
+        Map<String, String> form = sign();
+        form.put("basis.code", "en-1991-1-4/2005-de");
+        form.put("drawn-for", "en-1991-1-4/2005-de");
+        form.put("site.basic-speed", "");
+        form.put("site.averaging", "");
+        String asked = send(form, "assess").body();
+        assertThat(asked).contains("href=\"#site.basic-speed\"").contains("href=\"#site.averaging\"").contains("id=\"site.wind-zone\"")
+            .contains("leave it empty where the zone or region below is given");
+        form.put("site.wind-zone", "2");
+        JsonNode site = job(form).path("site");
+        assertThat(site.has("basic-speed")).isFalse();
+        assertThat(site.path("wind-zone").stringValue()).isEqualTo("2");
+        assertThat(Pool.get("/fill?code=en-1991-1-4/2005").body()).doesNotContain("leave it empty where");
+    }
+
+    @Test
+    void a_roughness_length_is_typed_with_or_without_its_unit_or_not_known() {
+        Map<String, String> form = sign();
+        form.putAll(Map.of("basis.code", "open-flow/1", "drawn-for", "open-flow/1", "site.averaging", "3 s gust", "site.terrain", "0.05"));
+        assertThat(job(form).path("site").path("terrain").stringValue()).isEqualTo("0.05 m");
+        form.put("site.terrain", "2 in");
+        assertThat(job(form).path("site").path("terrain").stringValue()).isEqualTo("2 in");
+        form.put("site.terrain", "Unknown");
+        assertThat(job(form).path("site").path("terrain").stringValue()).isEqualTo("unknown");
+        form.put("site.terrain", "");
+        assertThat(Pool.plain(send(form, "assess").body())).contains("Roughness length of the ground on the windward side is missing: type it here");
+        form.put("site.terrain", "rough");
+        assertThat(send(form, "assess").statusCode()).isEqualTo(422);
+    }
+
+    @Test
     void a_converted_speed_that_is_offered_is_taken_with_its_kind() {
         Map<String, String> form = sign();
         form.putAll(Map.of("site.basic-speed", "38", "site.averaging", "3 s gust"));
