@@ -61,7 +61,7 @@ final class SideBySide {
         String terrain = chosen ? job.site().ground().terrain() : typed.flatMap(Job.Compared::terrain).orElseGet(() -> match(job.site(), own, code));
         SiteOptions options = chosen ? job.site().options() : SiteOptions.NONE;
         Speed used = new Speed(speed, String.format(Locale.ROOT, "%.4g m/s", speed));
-        Site site = bare(job.site(), used, code, terrain, options.without("risk-category", "regional-speed", "wind-zone"));
+        Site site = bare(job.site(), used, code, terrain, options.without("risk-category", "regional-speed", "wind-zone", "duration-rule", "season", "season-factor", "structure-class"));
         Job.Basis basis = chosen ? job.basis() : new Job.Basis(key.substring(0, key.indexOf('/')), key.substring(key.indexOf('/') + 1), Optional.empty(), Optional.empty());
         Job other = new Job(Map.of(), basis, site, List.of(item), job.remarks(), List.of(), List.of());
         ItemResult result = assessor.assess(other).items().get(0);
