@@ -95,8 +95,8 @@ class EveryCodeAndKindTest {
             }
             if (result.loads().isEmpty()) {
                 assertThat(result.refusal().orElseThrow().reason()).isNotBlank();
-                assertThat(kind).isEqualTo("facade-panel");
-                assertThat(key).startsWith("open-flow");
+                boolean narrowBlade = kind.equals("projecting-sign") && result.refusal().get().reason().contains("narrower than");
+                assertThat(narrowBlade || kind.equals("facade-panel") && key.startsWith("open-flow")).as(kind + " by " + key).isTrue();
                 continue;
             }
             Loads loads = result.loads().get();

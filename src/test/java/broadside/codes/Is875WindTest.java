@@ -169,13 +169,13 @@ class Is875WindTest {
         assertThat(value(result(site, SIGN), "member-pressure/edge-on")).isCloseTo(927.78, within(1e-9));
     }
 
-    /** Board of 25 m²: K_a 0.9, p_d = 0.9 x 0.9 x 1325.4; of 17.5 m²: 0.95. Walls and edges have none. */
+    /** Board of 50 m² on two posts, 25 m² each: K_a 0.9, p_d = 0.9 x 0.9 x 1325.4; 17.5 m² each: 0.95. Walls and edges have none. */
     @Test
     void the_area_factor_is_for_boards_and_not_for_walls_and_edges() {
-        ItemResult board = result(DELHI, sign("10 m", "2.5 m", "2 m"));
+        ItemResult board = result(DELHI, sign("20 m", "2.5 m", "2 m"));
         assertThat(value(board, "design-pressure")).isCloseTo(0.81 * 1325.4, within(1e-9));
         assertThat(value(board, "member-pressure/edge-on")).isCloseTo(0.9 * 1325.4, within(1e-9));
-        assertThat(value(result(DELHI, sign("7 m", "2.5 m", "2 m")), "area-factor")).isCloseTo(0.95, within(1e-12));
+        assertThat(value(result(DELHI, sign("14 m", "2.5 m", "2 m")), "area-factor")).isCloseTo(0.95, within(1e-12));
         assertThat(value(result(DELHI, Is875Jobs.hoarding("40 m", "2.5 m", "0 m", "")), "area-factor")).isEqualTo(1);
     }
 
