@@ -56,6 +56,11 @@ public final class Edition {
         return shapes.containsKey(table) || basis.map(b -> b.has(table)).orElse(false);
     }
 
+    /** The names of the tables of this edition and of the one that it stands on. */
+    public List<String> tables() {
+        return java.util.stream.Stream.concat(shapes.keySet().stream(), basis.stream().flatMap(b -> b.tables().stream())).distinct().sorted().toList();
+    }
+
     public boolean isOverlay() {
         return basis.isPresent();
     }

@@ -18,6 +18,7 @@ import java.util.TreeMap;
 public final class TableLibrary {
 
     private static final String PROPERTIES = "edition.properties";
+    private static final String CONSTANTS = "constants";
     private static final String BIBLIOGRAPHY = "publications.csv";
 
     private final Map<String, Edition> editions;
@@ -109,12 +110,27 @@ public final class TableLibrary {
                 throw new TableFormat(key + "/" + name, 1, "a folder of an edition holds edition.properties and .csv files only");
             }
         });
+        basis.ifPresent(b -> tables.forEach((name, table) -> fits(key, name, table, b)));
         Edition edition = new Edition(key, properties, tables, basis);
         for (String needed : List.of("title", "publication", "edition", "procedure", "averaging", "level", "status")) {
             edition.property(needed);
         }
         editions.put(key, edition);
         return edition;
+    }
+
+    /** An overlay changes tables of its edition, or adds one that the edition allows; a slip in a name must not go unseen. */
+    private static void fits(String key, String name, TableFile table, Edition basis) {
+        List<String> more = basis.hasProperty("overlay-tables") ? List.of(basis.property("overlay-tables").split("\\s*,\\s*")) : List.of();
+        if (!basis.has(name) && !more.contains(name)) {
+            throw new TableFormat(table.name(), 1, "is no table of " + basis.key() + ": an overlay changes " + String.join(", ", basis.tables())
+                + (more.isEmpty() ? "" : ", or adds " + String.join(", ", more)));
+        }
+        if (name.equals(CONSTANTS) && basis.has(name)) {
+            table.body().stream().map(row -> row.get(0)).filter(number -> !basis.rows(name).has(number)).findFirst().ifPresent(number -> {
+                throw new TableFormat(table.name(), 1, "\"" + number + "\" is no number of " + basis.key() + "; it has " + String.join(", ", basis.rows(name).keys()));
+            });
+        }
     }
 
     private static Properties properties(String key, byte[] bytes) {

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import broadside.job.JobText;
+import broadside.table.TableFiles;
 import broadside.table.TableLibrary;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -115,6 +116,34 @@ class CodeTablesTest {
             assertThat(run.errors()).containsExactly("asce-7/16-own/constants.csv:12: expected 5 cells, found 4");
             assertThat(run.out()).isEmpty();
         }
+    }
+
+    @Test
+    void anOverlayOfATableOrNumberThatIsNotThereIsOneLine() throws IOException {
+        CommandLineRun number = CommandLineRun.of("tables", "--code-tables", tables("gust-facter, 0.95, -, office sheet 4, read"));
+        assertThat(number.status()).isEqualTo(2);
+        assertThat(number.errors()).hasSize(1).first().asString().startsWith("asce-7/16-own/constants.csv:1: \"gust-facter\" is no number of asce-7/16; it has ");
+        Files.move(folder.resolve("tables/asce-7/16-own/constants.csv"), folder.resolve("tables/asce-7/16-own/constant.csv"));
+        CommandLineRun table = CommandLineRun.of("check", job(folder, JOB), "--code-tables", folder.resolve("tables"));
+        assertThat(table.status()).isEqualTo(2);
+        assertThat(table.errors()).hasSize(1).first().asString().startsWith("asce-7/16-own/constant.csv:1: is no table of asce-7/16: an overlay changes ").contains("solid-signs");
+    }
+
+    /** A new edition with a procedure that is there is a folder of tables and no Java: here the one of 2005 under another year, with one number changed. */
+    @Test
+    void aNewEditionNeedsNoJava() throws IOException {
+        Path own = Files.createDirectories(folder.resolve("tables/en-1991-1-4/2031"));
+        for (java.util.Map.Entry<String, byte[]> file : TableFiles.shipped("code-tables").entrySet()) {
+            if (file.getKey().startsWith("en-1991-1-4/2005/")) {
+                String text = new String(file.getValue(), java.nio.charset.StandardCharsets.UTF_8).replace("title=EN 1991-1-4:2005 + A1:2010, recommended values",
+                    "title=Demonstration of an edition of 2031").replaceAll("signboard-cf( *), 1.80", "signboard-cf$1, 1.95");
+                Files.writeString(own.resolve(file.getKey().substring("en-1991-1-4/2005/".length())), text);
+            }
+        }
+        Path job = job(folder, "bakery-sign.json", "\"edition\": \"2005\"", "\"edition\": \"2031\"");
+        JsonNode item = item(CommandLineRun.of("check", job, "--json", "--code-tables", folder.resolve("tables")));
+        assertThat(step(item, "coefficient/all")).isEqualTo(1.95);
+        assertThat(CommandLineRun.of("check", job, "--side-by-side", "--code-tables", folder.resolve("tables")).out()).contains("Demonstration of an edition of 2031 (this job)");
     }
 
     @Test
