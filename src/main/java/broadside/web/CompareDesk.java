@@ -41,10 +41,11 @@ final class CompareDesk {
 
     void show(Context ctx) {
         JsonNode job = Token.read(ctx.queryParam("j"));
-        show(ctx, 200, job, item(ctx.queryParam("item")), List.of());
+        show(ctx, job, job, item(ctx.queryParam("item")), List.of());
     }
 
-    private void show(Context ctx, int status, JsonNode node, int item, List<String> problems) {
+    /** The page of a job; what was typed for other codes may not fit and is shown as it is, with what is wrong. */
+    private void show(Context ctx, JsonNode node, JsonNode typed, int item, List<String> problems) {
         Job job = reader.read(node).orThrow();
         Sheet sheet = sheet(job, item);
         String token = Token.of(node);
@@ -58,8 +59,8 @@ final class CompareDesk {
                 others.add(new SheetView.Change("/side-by-side?item=" + i + "&j=" + token, job.items().get(i).mark()));
             }
         }
-        Page page = new Page(SheetView.of(sheet, "/side-by-side.svg?" + here, List.of(), downloads), token, item, speeds(job, node), others, problems);
-        pages.show(ctx, status, "compare", new Pages.Frame((problems.isEmpty() ? "" : "Error: ") + sheet.title(), "", pages.frame("").made()), page);
+        Page page = new Page(SheetView.of(sheet, "/side-by-side.svg?" + here, List.of(), downloads), token, item, speeds(job, typed), others, problems);
+        pages.show(ctx, problems.isEmpty() ? 200 : 422, "compare", new Pages.Frame((problems.isEmpty() ? "" : "Error: ") + sheet.title(), "", pages.frame("").made()), page);
     }
 
     private Sheet sheet(Job job, int item) {
@@ -117,7 +118,7 @@ final class CompareDesk {
         if (problems.isEmpty()) {
             ctx.redirect("/side-by-side?item=" + item + "&j=" + Token.of(job), HttpStatus.SEE_OTHER);
         } else {
-            show(ctx, 422, before, item, problems.stream().map(p -> told(p, comparison)).toList());
+            show(ctx, before, job, item, problems.stream().map(p -> told(p, comparison)).toList());
         }
     }
 

@@ -51,7 +51,7 @@ class AnswerTest {
     @ParameterizedTest
     @ValueSource(strings = {"", "%", "AAAA", "a b", "////", "q1Y", "null", "%00", "bVE9T-QwEP0rIzc0"})
     void damaged_links_get_a_plain_page(String token) {
-        for (String page : new String[] {"/answer", "/fill", "/job.json", "/summary.pdf", "/drawing.svg"}) {
+        for (String page : new String[] {"/answer", "/fill", "/job.json", "/summary.pdf", "/drawing.svg", "/side-by-side", "/side-by-side.svg", "/side-by-side.pdf"}) {
             HttpResponse<String> answer = Pool.get(page + "?item=0&j=" + java.net.URLEncoder.encode(token, StandardCharsets.UTF_8));
             assertThat(answer.statusCode()).isEqualTo(400);
             assertThat(answer.body()).contains("This link does not hold a job").doesNotContain("Exception");
@@ -62,7 +62,7 @@ class AnswerTest {
     void links_to_json_that_is_no_job_are_no_error_of_the_server() throws Exception {
         for (String text : new String[] {"null", "[]", "3", "\"x\"", "{}", "{\"items\":[]}", "{\"items\":[null]}", "{\"items\":{\"a\":1}}", "{\"items\":[{\"kind\":3}]}",
             "{\"items\":[{\"kind\":\"post-sign\",\"boards\":{\"a\":1},\"posts\":[1]}],\"site\":7,\"basis\":[]}", "{\"basis\":{\"code\":\"a/b\",\"edition\":\"..\"},\"items\":[{}]}"}) {
-            for (String page : new String[] {"/answer", "/fill", "/job.json", "/summary.pdf", "/drawing.svg"}) {
+            for (String page : new String[] {"/answer", "/fill", "/job.json", "/summary.pdf", "/drawing.svg", "/side-by-side", "/side-by-side.svg", "/side-by-side.pdf"}) {
                 HttpResponse<String> answer = Pool.get(page + "?item=0&j=" + packed(text));
                 assertThat(answer.statusCode()).as(page + " " + text).isBetween(200, 499);
             }
