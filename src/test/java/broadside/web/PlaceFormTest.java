@@ -138,6 +138,18 @@ class PlaceFormTest {
     }
 
     @Test
+    void a_region_with_its_return_period_stands_in_place_of_the_speed() {
+        Map<String, String> form = sign();
+        form.putAll(Map.of("basis.code", "as-nzs-1170-2/2021", "drawn-for", "as-nzs-1170-2/2021", "site.basic-speed", "", "site.averaging", "", "site.terrain", "unknown",
+            "site.region", "A", "site.return-period", "500"));
+        JsonNode job = job(form);
+        assertThat(job.path("site").has("basic-speed")).isFalse();
+        assertThat(Pool.get("/answer?j=" + Token.of(job)).body()).contains("kN");
+        form.remove("site.return-period");
+        assertThat(send(form, "assess").statusCode()).isEqualTo(422);
+    }
+
+    @Test
     void a_roughness_length_is_typed_with_or_without_its_unit_or_not_known() {
         Map<String, String> form = sign();
         form.putAll(Map.of("basis.code", "open-flow/1", "drawn-for", "open-flow/1", "site.averaging", "3 s gust", "site.terrain", "0.05"));
