@@ -6,6 +6,7 @@ import broadside.codes.CodeLibrary;
 import broadside.codes.SiteTerms;
 import broadside.codes.WindCode;
 import broadside.quantity.Density;
+import broadside.quantity.Dimension;
 import broadside.quantity.Length;
 import broadside.quantity.Period;
 import broadside.quantity.Pressure;
@@ -13,6 +14,7 @@ import broadside.quantity.Quantity;
 import broadside.quantity.Rounding;
 import broadside.quantity.Show;
 import broadside.quantity.Speed;
+import broadside.quantity.Unit;
 import broadside.site.Averaging;
 import broadside.site.Site;
 import broadside.site.SiteOptions;
@@ -27,6 +29,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Stream;
 
 /** Reads the site and holds it against what the chosen code wants to know. */
 final class SiteReader {
@@ -95,14 +98,16 @@ final class SiteReader {
         try {
             return code.basicSpeed(options(values), values.quantity("return-period", Period.class));
         } catch (IllegalArgumentException e) {
-            problems.add(new Problem(values.path(), e.getMessage()));
+            String wrong = Stream.of("region", "wind-zone", "regional-speed").filter(n -> options(values).names().contains(n)).findFirst().orElse("basic-speed");
+            problems.add(new Problem(values.at(wrong), e.getMessage()));
             return Optional.empty();
         }
     }
 
     private void speedIsGiven(WindCode code, Values values, Optional<Speed> speed, Optional<Speed> other, Optional<Averaging> averaging) {
         boolean typed = values.quantity("basic-speed", Speed.class).isPresent();
-        if (speed.isEmpty() && other.isEmpty() && !told(values.at("basic-speed"))) {
+        boolean told = Stream.of("basic-speed", "region", "wind-zone", "regional-speed").anyMatch(n -> told(values.at(n)));
+        if (speed.isEmpty() && other.isEmpty() && !told) {
             problems.add(new Problem(values.at("basic-speed"), "is missing: basic wind speed as the code defines it, like \"25 m/s\""));
         } else if (typed && averaging.isEmpty() && !told(values.at("averaging"))) {
             problems.add(new Problem(values.at("averaging"), "is missing: averaging time of the basic speed, one of " + String.join(", ", Averaging.allWords())));
@@ -143,9 +148,7 @@ final class SiteReader {
         String name = code.edition().property("title");
         terrain.filter(t -> !terms.hasTerrain(t)).ifPresent(t -> problems.add(new Problem(values.at("terrain"), "\"" + StructureReader.clean(t)
             + "\" is not a terrain class of " + name + "; it has " + terms.terrainNames())));
-        averaging.filter(a -> !terms.averagings().contains(a)).ifPresent(a -> problems.add(new Problem(values.at("averaging"), name
-            + " defines its basic speed as a " + terms.averaging().words() + ", and this one is a " + a.words() + ". "
-            + speed.map(s -> offer(s, a, terms.averaging())).orElse(""))));
+        averaging.filter(a -> !terms.averagings().contains(a)).ifPresent(a -> wrongAveraging(name, values, speed, a, terms.averaging()));
         for (String option : options(values).names()) {
             if (!option.equals("stands-for") && !terms.options().contains(option)) {
                 problems.add(new Problem(values.at(option), "is not a value of " + name + "; beside the wind and the ground it takes "
@@ -161,15 +164,23 @@ final class SiteReader {
     }
 
     /** The conversion that can be taken over, with what it rests on. */
-    private String offer(Speed speed, Averaging from, Averaging to) {
+    private void wrongAveraging(String name, Values values, Optional<Speed> speed, Averaging from, Averaging to) {
+        Optional<String> converted = speed.flatMap(s -> converted(s, from, to));
+        String offer = speed.map(s -> converted.map(text -> " In open country at 10 m " + s.typed() + " as a " + from.words() + " is about " + text + " as a " + to.words()
+            + " (ratios after Durst); type that with \"" + to.words() + "\" if it is what you mean.")
+            .orElse(" There is no conversion from a " + from.words() + " here; type the speed as a " + to.words() + ".")).orElse("");
+        problems.add(new Problem(values.at("averaging"), name + " defines its basic speed as a " + to.words() + ", and this one is a " + from.words() + "." + offer,
+            converted.map(text -> text + " as a " + to.words()).stream().toList()));
+    }
+
+    private Optional<String> converted(Speed speed, Averaging from, Averaging to) {
         try {
-            double converted = conversion.convert(speed, from, to, new Trace());
+            double found = conversion.convert(speed, from, to == Averaging.GUST_0_2_S ? Averaging.GUST_3_S : to, new Trace());
             boolean miles = speed.typed().toLowerCase(Locale.ROOT).contains("mph");
-            String text = miles ? Show.number(converted / 0.44704, 4, Rounding.UP) + " mph" : Show.number(converted, 4, Rounding.UP) + " m/s";
-            return "In open country at 10 m " + speed.typed() + " as a " + from.words() + " is about " + text + " as a " + to.words()
-                + " (ratios after Durst); type that with \"" + to.words() + "\" if it is what you mean.";
+            double unit = Unit.of(Dimension.SPEED, miles ? "mph" : "m/s").orElseThrow().toSi();
+            return Optional.of(Show.number(found / unit, 4, Rounding.UP) + (miles ? " mph" : " m/s"));
         } catch (OutsideTable e) {
-            return "There is no conversion from a " + from.words() + " here; type the speed as a " + to.words() + ".";
+            return Optional.empty();
         }
     }
 

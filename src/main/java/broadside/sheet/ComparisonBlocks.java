@@ -24,8 +24,9 @@ import broadside.sheet.Block.Table;
 import broadside.sheet.Block.Tone;
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Optional;
+import java.util.Map;
 
 /** The document "side by side": one item by every code, with the spread and why the codes differ. */
 public final class ComparisonBlocks {
@@ -180,12 +181,12 @@ public final class ComparisonBlocks {
         blocks.add(new Notes(comparison.lines().stream().map(l -> l.name() + ": " + l.how() + "; " + speed(l) + ", terrain " + l.terrain() + ".").toList()));
         blocks.add(new Paragraph("Left out of the comparison: the user's own factors, an authority's least pressure, season and duration, risk categories. The classes of terrain were matched "
             + "by their roughness; hills are counted by each code's own rule.", Tone.SMALL));
-        for (Line line : comparison.lines()) {
-            Optional<Steps> steps = CalculationBlocks.steps(line.steps(), format, step -> "");
-            steps.ifPresent(s -> {
-                blocks.add(new Heading(3, "Speed for " + line.name(), anchor + "speed-" + comparison.lines().indexOf(line)));
-                blocks.add(s);
-            });
+        Map<Steps, List<Line>> bySteps = new LinkedHashMap<>();
+        comparison.lines().forEach(l -> CalculationBlocks.steps(l.steps(), format, step -> "").ifPresent(s -> bySteps.computeIfAbsent(s, k -> new ArrayList<>()).add(l)));
+        int number = 0;
+        for (Map.Entry<Steps, List<Line>> each : bySteps.entrySet()) {
+            blocks.add(new Heading(3, "Speed for " + String.join("; ", each.getValue().stream().map(Line::name).toList()), anchor + "speed-" + number++));
+            blocks.add(each.getKey());
         }
     }
 }

@@ -24,6 +24,9 @@ import java.util.List;
 /** The blocks of one item: answer, drawing, cases, posts, what was assumed, what was not checked. */
 final class ItemBlocks {
 
+    /** Lines of the answer. */
+    private static final int MOST_LINES = 5;
+
     static List<Block> of(Assessment assessment, ItemResult item, Format format, String anchor, int level) {
         List<Block> blocks = new ArrayList<>();
         if (item.loads().isEmpty()) {
@@ -65,7 +68,7 @@ final class ItemBlocks {
             lines.add(Fact.of("Torsion about the middle of the posts", format.both(torsion, Dimension.MOMENT) + ", " + loads.level().name(),
                 format.moment(Math.abs(other.governs("torsion").torsion())) + " " + companion + ", " + Format.caseWords(loads.governs("torsion").name())));
         }
-        lines.addAll(reactions(loads, format));
+        lines.addAll(reactions(loads, format).stream().limit(MOST_LINES - 1 - lines.size()).toList());
         lines.add(sure(item));
         return new Answer(lines);
     }
