@@ -44,11 +44,13 @@ public final class FootActions {
         private final Combination combination;
         private final double force;
         private final double moment;
+        private final String state;
 
         Combined(Combination combination, CaseAction recorded) {
             this.combination = combination;
             this.force = recorded.force();
             this.moment = recorded.force() * recorded.height();
+            this.state = recorded.state();
         }
 
         Combination combination() {
@@ -57,6 +59,11 @@ public final class FootActions {
 
         public String name() {
             return combination.name();
+        }
+
+        /** Arrangement of the item, empty for the item as it stands. */
+        public String state() {
+            return state;
         }
 
         /** Force on all panels, N. */

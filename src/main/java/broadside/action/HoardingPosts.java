@@ -59,7 +59,7 @@ public final class HoardingPosts {
             Share most = shares(hoarding, bay, open, shut).stream().max(Comparator.comparingDouble(Share::moment)).orElseThrow();
             worst.add(most);
             posts.add(new PostAction(posts.size() + 1, bay.at(), most.zone(), most.placed().shut() ? bay.leaf() : 0,
-                Optional.of(bay.to() - bay.from()), most.named(), most.force(), most.named(), most.moment()));
+                Optional.of(bay.to() - bay.from()), "", most.named(), most.force(), most.named(), most.moment()));
         }
         record(posts, worst, symbols, trace);
         return posts;

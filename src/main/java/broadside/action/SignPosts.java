@@ -65,7 +65,7 @@ public final class SignPosts {
             String panel = row.drag().moment() == 0 ? "M" : "M_{panel}";
             double m = ends(trace.line("post-moment/1", "M_{p1}", "moment at the foot of the post").in(panel, forMoment.moment(), "N m"), panel,
                 forMoment.moment(), "M_{d1}", row.drag().moment(), "N m");
-            return new PostAction(1, row.x(), "", 0, Optional.empty(), forMoment.name(), v, forShear.name(), m);
+            return new PostAction(1, row.x(), "", 0, Optional.empty(), forMoment.state(), forMoment.name(), v, forShear.name(), m);
         }
         String x = "x_{" + part + "}";
         trace.given(x, "post " + part + " from the middle of the posts, to the right", row.x(), "m", "");
@@ -81,7 +81,7 @@ public final class SignPosts {
             .in(panel, forMoment.moment(), "N m").in("n", row.count()).in("J", j, "N m²").in(x, row.x(), "m").in("S", row.spread(), "m²"),
             "abs(" + panel + " / n + J " + x + " / S)", Math.abs(forMoment.moment() / row.count() + j * row.x() / row.spread()),
             "M_{d" + part + "}", row.drag().moment(), "N m");
-        return new PostAction(number, row.x(), "", 0, Optional.empty(), forMoment.name(), v, forShear.name(), m);
+        return new PostAction(number, row.x(), "", 0, Optional.empty(), forMoment.state(), forMoment.name(), v, forShear.name(), m);
     }
 
     /** Ends a step with what the panels give, and with the wind on the post itself where it is known. */

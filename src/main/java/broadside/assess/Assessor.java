@@ -117,7 +117,7 @@ public final class Assessor {
     private ItemResult result(Job job, Item item, WindCode code, Trace sheet, Outcome outcome, Optional<Refusal> refusal, Optional<Loads> loads) {
         Outcome told = refusal.filter(Refusal::ofScope).isPresent() ? Outcome.OUTSIDE_SCOPE : outcome;
         List<Note> notes = new ArrayList<>(scope.size(item).stream().toList());
-        notes.addAll(Notes.of(job, item, code, sheet));
+        notes.addAll(Notes.of(job, item, code, sheet, loads.isPresent()));
         return new ItemResult(item, told, refusal, loads, notes, sheet);
     }
 }

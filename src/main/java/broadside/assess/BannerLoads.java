@@ -48,6 +48,7 @@ final class BannerLoads {
         double end = line(sheet, "end-pull", "T", "resultant at one end").in("H_m", larger, "N").in("R", across, "N").gives("(H_m² + R²)^0.5",
             Math.hypot(larger, across), "N");
         return List.of(new Reaction("end-pull", "Resultant at one end", end, "N", uneven.name()),
+            new Reaction("line-pull/larger", "Pull along the span, the larger of both curves", larger, "N", worst.name()),
             new Reaction("line-pull", "Pull along the span, by the parabola", pull, "N", worst.name()),
             new Reaction("line-pull/catenary", "Pull along the span, by the catenary", catenary, "N", worst.name()),
             new Reaction("end-reaction", "What one end takes along the wind", across, "N", uneven.name()));

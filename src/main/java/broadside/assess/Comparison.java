@@ -20,7 +20,8 @@ public record Comparison(Item item, List<Line> lines, Gust gust) {
      * The item by one code.
      *
      * @param key       edition
-     * @param title     its name
+     * @param title     its title
+     * @param name      the same in short
      * @param chosen    whether this is the code of the job
      * @param plain     whether it is plain fluid mechanics and no code
      * @param speed     basic speed that was used, m/s
@@ -31,15 +32,8 @@ public record Comparison(Item item, List<Line> lines, Gust gust) {
      * @param why       what is particular to the code, in words
      * @param steps     conversion of the speed
      */
-    public record Line(String key, String title, boolean chosen, boolean plain, double speed, String terrain, String how, Optional<Found> found,
-                       Optional<ItemResult.Refusal> refusal, String why, Trace steps) {
-
-        /** The title up to its first comma. */
-        public String name() {
-            int comma = title.indexOf(',');
-            return comma < 0 ? title : title.substring(0, comma);
-        }
-    }
+    public record Line(String key, String title, String name, boolean chosen, boolean plain, double speed, String terrain, String how, Optional<Found> found,
+                       Optional<ItemResult.Refusal> refusal, String why, Trace steps) { }
 
     /**
      * What one code gives.

@@ -67,7 +67,8 @@ final class ItemLoads implements Item.Kinds<Loads> {
         Map<String, CaseAction> governing = governing(cases);
         EdgeOn edgeOn = edgeOn(sign.panels(), i -> sign.boards().get(i).depth().metres());
         double weight = Weights.boards(sign, sheet);
-        List<Reaction> reactions = Replacement.of(sign, job, code, governing, sheet);
+        List<Reaction> reactions = new ArrayList<>(Replacement.of(sign, job, code, governing, sheet));
+        reactions.addAll(VShape.of(sign, governing, sheet));
         Optional<PostDrag> all = drag.stream().reduce(PostDrag::plus);
         return new Loads(velocity(sign.panels()), cases, governing, new Loads.Supports(posts, all, reactions, Balances.sign(sign, combinations, posts)),
             Optional.of(edgeOn), code.level(job.site()), weight, Foot.GROUND);

@@ -49,8 +49,10 @@ final class ItemNotes implements Item.Kinds<List<Note>> {
         if (sign.boards().stream().anyMatch(b -> b.depth().metres() == 0)) {
             add(Note.Kind.ASSUMPTION, "The thickness of a board was not given: wind along the face counts friction on its faces only.");
         }
-        if (sign.faces().count() == 2) {
-            add(Note.Kind.ASSUMPTION, "Two parallel faces back to back are taken as one board. Faces that open in a V are outside the scope.");
+        if (sign.faces().opening() > 0) {
+            add(Note.Kind.CAUTION, "The cases are those of one face alone. Two faces that open in a V take at most twice that: the upper bracket, which is no code result.");
+        } else if (sign.faces().count() == 2) {
+            add(Note.Kind.ASSUMPTION, "Two parallel faces back to back are taken as one board.");
         }
         if (sign.posts().count() > 1) {
             add(Note.Kind.ASSUMPTION, "The posts share force alike and take torsion as a couple: stiff board, equal posts.");
@@ -112,6 +114,9 @@ final class ItemNotes implements Item.Kinds<List<Note>> {
     public List<Note> bannerFence(BannerFence fence) {
         add(Note.Kind.ASSUMPTION, "The cover counts with the solidity given for it; what the fence behind it adds is not counted. The line is closed from panel to panel and stands on the "
             + "ground.");
+        if (!fence.fenceKnown()) {
+            add(Note.Kind.ASSUMPTION, "The solidity of the bare fence was not given: " + fence.fenceSolidity() + " is taken.");
+        }
         boolean bare = sheet.steps().stream().anyMatch(s -> s.name().startsWith("force/") && s.name().endsWith("/" + BannerFence.BARE));
         if (!bare) {
             add(Note.Kind.NOT_CHECKED, code.edition().property("title") + " has no rule for a fence as open as the bare one: its loads are not given.");

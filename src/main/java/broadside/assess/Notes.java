@@ -3,6 +3,7 @@ package broadside.assess;
 import broadside.codes.WindCode;
 import broadside.panel.Hoarding;
 import broadside.panel.Item;
+import broadside.panel.Panel;
 import broadside.panel.PostSign;
 import broadside.quantity.Period;
 import broadside.site.Site;
@@ -24,14 +25,20 @@ final class Notes {
 
     private final List<Note> notes = new ArrayList<>();
 
-    static List<Note> of(Job job, Item item, WindCode code, Trace sheet) {
+    /** The sentences; without loads only those that do not speak of any. */
+    static List<Note> of(Job job, Item item, WindCode code, Trace sheet, boolean loads) {
         Notes notes = new Notes();
+        if (!loads) {
+            notes.heldBy(job, item);
+            notes.always();
+            return notes.notes;
+        }
         notes.overrides(sheet);
-        notes.site(job.site(), code, sheet);
+        notes.site(job.site(), code, sheet, job.head("ground-nearby").filter("flat"::equals).isPresent());
         notes.unused(job.site(), code, sheet);
         notes.returnPeriod(job.site(), sheet);
         notes.stay(job.site());
-        notes.leastHeight(job.site(), sheet);
+        notes.leastHeight(job.site(), item, code, sheet);
         notes.leastPressures(job.site(), sheet);
         notes.notes.addAll(item.choose(new ItemNotes(job, code, sheet)));
         notes.solidity(job, item, sheet);
@@ -53,7 +60,7 @@ final class Notes {
         }
     }
 
-    private void site(Site site, WindCode code, Trace sheet) {
+    private void site(Site site, WindCode code, Trace sheet, boolean flat) {
         if (site.ground().unknown().contains(Site.Unknown.TERRAIN)) {
             add(Note.Kind.ASSUMPTION, "The terrain was not known: class " + site.ground().terrain() + ", the smoothest of the code, is taken, which gives the largest load. "
                 + "Anyone who looks at the place can say which class it is.");
@@ -62,7 +69,7 @@ final class Notes {
             add(Note.Kind.CAUTION, "Whether the ground near by is higher or lower was not known: the worst value that the code can give is taken. Height, length and distance of the slope "
                 + "would lower it, or show that there is none.");
         } else if (site.ground().topography().isEmpty() && site.options().number("topographic-factor").isEmpty()) {
-            add(Note.Kind.ASSUMPTION, "The ground is taken as flat: no hill, ridge or escarpment was given. If the ground within 1 km (3300 ft) is higher or lower "
+            add(Note.Kind.ASSUMPTION, "The ground is taken as flat: " + (flat ? "so it was answered." : "no hill, ridge or escarpment was given.") + " If the ground within 1 km (3300 ft) is higher or lower "
                 + "by more than 10 m (33 ft), the load can be much larger.");
         }
         site.ground().topography().ifPresent(ground -> topography(ground, sheet));
@@ -125,13 +132,13 @@ final class Notes {
         }
     }
 
-    /** A class of terrain that lifts the item to the least height of its profile, so that the choice of class decides. */
-    private void leastHeight(Site site, Trace sheet) {
-        boolean below = sheet.steps().stream().filter(s -> s.name().startsWith("profile-height")).anyMatch(s -> s.inputs().size() == 2
-            && s.value() > s.inputs().get(0).value() * (1 + 1e-9));
-        if (below) {
-            add(Note.Kind.CAUTION, "In terrain " + site.ground().terrain() + " the item stands below the least height of the wind profile: the choice of class sets everything. If there is open "
-                + "ground near by on the windward side, take the smoother class.");
+    /** A class of terrain that lifts a panel to the least height of its profile, so that the choice of class decides. */
+    private void leastHeight(Site site, Item item, WindCode code, Trace sheet) {
+        List<String> below = item.panels().stream().map(Panel::part).filter(part -> sheet.find("profile-height" + (part.isEmpty() ? "" : "/" + part))
+            .filter(s -> s.inputs().size() == 2 && s.value() > s.inputs().get(0).value() * (1 + 1e-9)).isPresent()).toList();
+        if (!below.isEmpty() && !site.ground().terrain().equals(code.terms().smoothest())) {
+            add(Note.Kind.CAUTION, "In terrain " + site.ground().terrain() + " " + (item.panels().size() == 1 ? "the item" : "board " + String.join(", ", below))
+                + " stands below the least height of the wind profile: the choice of class sets everything there. If there is open ground near by on the windward side, take the smoother class.");
         }
     }
 
@@ -171,8 +178,8 @@ final class Notes {
             if (uses(sheet, "signboard-rule")) {
                 add(Note.Kind.ASSUMPTION, "The code's rule for signboards has no reduction for openings: the board is counted as closed.");
             }
-            add(Note.Kind.CAUTION, "The solidity was given by " + job.remark(item.mark(), "solidity-by").orElse("an unnamed source")
-                + ". A printer's figure for a mesh is not an aerodynamic one.");
+            add(Note.Kind.CAUTION, job.remark(item.mark(), "solidity-by").map(who -> "The solidity was given by " + who + ".").orElse("Who gave the solidity was not said.")
+                + " A printer's figure for a mesh is not an aerodynamic one.");
         }
     }
 

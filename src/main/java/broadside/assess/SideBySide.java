@@ -3,6 +3,7 @@ package broadside.assess;
 import broadside.action.CaseAction;
 import broadside.codes.CodeLibrary;
 import broadside.codes.WindCode;
+import broadside.panel.BannerFence;
 import broadside.panel.Item;
 import broadside.panel.Panel;
 import broadside.quantity.Speed;
@@ -18,6 +19,8 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 /**
  * Works out one item by every code. The basic speed of the job is brought to the wind of 50 years by the law of its own
@@ -66,8 +69,8 @@ final class SideBySide {
         Job other = new Job(Map.of(), basis, site, List.of(item), job.remarks(), List.of(), List.of());
         ItemResult result = assessor.assess(other).items().get(0);
         String how = how(chosen, typed, own, code);
-        return new Comparison.Line(key, code.edition().property("title"), chosen, code.edition().hasProperty("no-code"), speed, terrain, how,
-            result.loads().map(l -> found(item, l, result.sheet())), result.refusal(), code.edition().hasProperty("differs") ? code.edition().property("differs") : "",
+        return new Comparison.Line(key, code.edition().property("title"), code.edition().property(code.edition().hasProperty("short") ? "short" : "title"), chosen, code.edition().hasProperty("no-code"), speed, terrain, how,
+            result.loads().map(l -> found(item, l, result.sheet())), result.refusal(), differs(code, item),
             steps);
     }
 
@@ -134,13 +137,19 @@ final class SideBySide {
             return "a speed typed for this code, brought to 50 years";
         }
         return same(own.terms().averaging(), code.terms().averaging()) ? "the same 50-year wind" : "the same 50-year wind, from a " + own.terms().averaging().words()
-            + " to a " + code.terms().averaging().words() + " after Durst";
+            + " to a " + (code.terms().averaging() == Averaging.GUST_0_2_S ? "3 s gust after Durst, the number that this code calls a 0.2 s gust"
+                : code.terms().averaging().words() + " after Durst");
+    }
+
+    /** What is particular to a code: in general, and for this kind of item. */
+    private static String differs(WindCode code, Item item) {
+        return Stream.of("differs", "differs-" + item.kind()).filter(code.edition()::hasProperty).map(code.edition()::property).collect(Collectors.joining(" "));
     }
 
     private static Comparison.Found found(Item item, Loads loads, Trace sheet) {
-        CaseAction governing = loads.cases().stream().filter(c -> c.state().isEmpty()).max(java.util.Comparator.comparingDouble(CaseAction::force)).orElseThrow();
+        CaseAction governing = loads.governs("base-shear");
         double area = item.panels().stream().mapToDouble(Panel::area).sum();
-        double greatest = loads.cases().stream().filter(c -> c.state().isEmpty()).flatMap(c -> c.zones().stream()).flatMap(z -> z.zones().stream())
+        double greatest = loads.cases().stream().filter(c -> !c.state().equals(BannerFence.BARE)).flatMap(c -> c.zones().stream()).flatMap(z -> z.zones().stream())
             .mapToDouble(z -> Math.abs(z.pressure())).max().orElse(0);
         long recalled = sheet.steps().stream().filter(s -> s.status() == Status.RECALLED).count();
         return new Comparison.Found(loads.velocity().pressure(), governing.force() / area, greatest, governing.force(),

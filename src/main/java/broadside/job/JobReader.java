@@ -158,7 +158,9 @@ public final class JobReader {
         for (Field field : Shapes.HEADER) {
             values.text(field.name()).ifPresent(text -> header.put(field.name(), text));
         }
-        values.object("site").flatMap(s -> s.text("terrain-reason")).ifPresent(text -> header.put("terrain-reason", text));
+        for (String name : List.of("terrain-reason", "ground-nearby")) {
+            values.object("site").flatMap(s -> s.text(name)).ifPresent(text -> header.put(name, text));
+        }
         return header;
     }
 

@@ -37,7 +37,7 @@ final class KindReader {
         if (length.isEmpty() || height.isEmpty() || count.filter(n -> n >= 1 && n <= 1000).isEmpty() || values.text("mark").isEmpty()) {
             return Optional.empty();
         }
-        return Optional.of(new BannerFence(values.text("mark").get(), length.get(), height.get(), count.get(), cover, fence,
+        return Optional.of(new BannerFence(values.text("mark").get(), length.get(), height.get(), count.get(), cover, fence, values.number("fence-solidity").isPresent(),
             sizes.shelter(values), ItemReader.carrying(values)));
     }
 

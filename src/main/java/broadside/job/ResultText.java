@@ -129,6 +129,9 @@ public final class ResultText {
         if (post.gate() > 0) {
             node.put("gate_leaf_m", post.gate());
         }
+        if (!post.state().isEmpty()) {
+            node.put("state", post.state());
+        }
         node.put("case", post.named()).put("shear_N", post.shear()).put("shear_case", post.shearCase()).put("moment_Nm", post.moment())
             .put("companion_moment_Nm", post.atLevel(level.factor()).moment());
     }

@@ -9,9 +9,10 @@ import java.util.List;
  * @param count           number of panels in the line
  * @param coverSolidity   solid area over gross area of the fabric
  * @param fenceSolidity   the same of the bare fence
+ * @param fenceKnown      whether that was given
  * @param shelter         factor on the wind by a wall or fence in front that stays there, 1 for none
  */
-public record BannerFence(String mark, Length panelLength, Length panelHeight, int count, double coverSolidity, double fenceSolidity,
+public record BannerFence(String mark, Length panelLength, Length panelHeight, int count, double coverSolidity, double fenceSolidity, boolean fenceKnown,
                           double shelter, List<Carrying> carrying) implements Item {
 
     /** Name of the bare line in steps and tables. */

@@ -14,6 +14,8 @@ import broadside.panel.Item;
 import broadside.panel.Panel;
 import broadside.panel.PostSign;
 import broadside.quantity.Dimension;
+import broadside.quantity.Rounding;
+import broadside.quantity.Show;
 import broadside.quantity.Units;
 import broadside.sheet.Block.Column;
 import broadside.sheet.Block.Paragraph;
@@ -34,20 +36,21 @@ final class CaseTables {
     static List<Block> of(Item item, Loads loads, Format format) {
         List<Block> blocks = new ArrayList<>();
         boolean sign = item instanceof PostSign;
-        blocks.add(cases(loads, sign, format, loads.level().name()));
-        blocks.add(cases(loads.companion(), sign, format, loads.level().shown() + ", " + loads.level().rule()));
-        blocks.add(new Paragraph(directions(loads, sign) + " Loads are rounded up from unrounded values, at display only.", Tone.SMALL));
+        blocks.add(cases(item, loads, format, loads.level().name()));
+        blocks.add(cases(item, loads.companion(), format, loads.level().shown() + ", " + loads.level().rule()));
+        blocks.add(new Paragraph(directions(item, loads) + " Loads are rounded up from unrounded values, at display only.", Tone.SMALL));
         blocks.add(zones(item, loads, format));
         if (!loads.posts().isEmpty()) {
             blocks.add(posts(item, loads, format));
         }
-        if (!loads.reactions().isEmpty()) {
+        if (loads.reactions().stream().anyMatch(r -> !r.unit().equals("1"))) {
             blocks.add(reactions(loads, format));
         }
+        loads.reactions().stream().filter(r -> r.unit().equals("1")).forEach(r -> blocks.add(new Paragraph(r.label() + ": " + ratio(r) + ".", Tone.PLAIN)));
         loads.supports().drag().ifPresent(drag -> blocks.add(new Paragraph("Wind on the posts themselves, inside the base shear and base moment above: force "
             + format.both(drag.force(), Dimension.FORCE) + ", moment at the ground " + format.both(drag.moment(), Dimension.MOMENT) + ", "
             + loads.level().name() + ".", Tone.PLAIN)));
-        loads.edgeOn().ifPresent(edge -> blocks.add(new Paragraph("Wind along the face (own rule, of no code: pressure on the edge and friction on both faces): force "
+        loads.edgeOn().ifPresent(edge -> blocks.add(new Paragraph("Wind on the edge and along both faces (own rule, of no code): force "
             + format.both(edge.force(), Dimension.FORCE) + (loads.foot() == Foot.GROUND ? ", moment at the ground " + format.both(edge.moment(), Dimension.MOMENT) : "")
             + ", " + loads.level().name() + ".", Tone.PLAIN)));
         if (loads.selfWeight() > 0) {
@@ -56,17 +59,20 @@ final class CaseTables {
         return blocks;
     }
 
-    private static String directions(Loads loads, boolean sign) {
+    private static String directions(Item item, Loads loads) {
+        boolean sign = item instanceof PostSign;
         if (loads.governs("base-shear").direction().endsWith("ward")) {
             return "Forces are magnitudes; pressures that pull the panel off the wall are negative.";
         }
         String both = "Forces are magnitudes. The wind was taken on the front and on the back and from both ends; where a case is not shown for an end, "
             + "the end shown is the worse.";
-        return loads.foot() != Foot.GROUND ? both : both + " Torsion is about the middle" + (sign ? " of the posts" : "; the posts are not worked out from it")
+        return loads.foot() != Foot.GROUND || item instanceof BannerFence ? both : both + " Torsion is about the middle" + (sign ? " of the posts" : item instanceof Hoarding ? "; the posts are not worked out from it" : "")
             + "; it is positive when it turns the right side backwards, seen from the front.";
     }
 
-    private static Table cases(Loads loads, boolean sign, Format format, String level) {
+    private static Table cases(Item item, Loads loads, Format format, String level) {
+        boolean sign = item instanceof PostSign;
+        boolean torsion = sign || item instanceof Hoarding;
         List<Row> rows = new ArrayList<>();
         for (CaseAction c : loads.cases()) {
             List<String> governs = new ArrayList<>();
@@ -82,7 +88,7 @@ final class CaseTables {
                 cells.add(format.force(c.baseShear()));
                 cells.add(format.moment(c.baseMoment()));
             }
-            if (loads.foot() == Foot.GROUND) {
+            if (torsion) {
                 cells.add(torsion(c, format));
             }
             cells.add(marked ? String.join(", ", governs) : "-");
@@ -94,7 +100,7 @@ final class CaseTables {
             columns.add(new Column(loads.foot() == Foot.WALL ? "Shear" : "Base shear", true, 3));
             columns.add(new Column(loads.foot() == Foot.WALL ? "Moment at the wall" : "Base moment", true, 3));
         }
-        if (loads.foot() == Foot.GROUND) {
+        if (torsion) {
             columns.add(new Column("Torsion", true, 3));
         }
         columns.add(new Column("Governs", false, 3));
@@ -104,7 +110,12 @@ final class CaseTables {
 
     /** The case, and the arrangement of the item that it belongs to. */
     static String name(CaseAction c) {
-        return Format.caseName(c.name()) + switch (c.state()) {
+        return Format.caseName(c.name()) + arrangement(c.state());
+    }
+
+    /** An arrangement of the item, behind a comma. */
+    static String arrangement(String state) {
+        return switch (state) {
             case PostSign.ENVELOPE -> ", as one board";
             case BannerFence.BARE -> ", bare fence";
             default -> "";
@@ -116,6 +127,9 @@ final class CaseTables {
         List<Reaction> companion = loads.companion().reactions();
         for (int i = 0; i < loads.reactions().size(); i++) {
             Reaction r = loads.reactions().get(i);
+            if (r.unit().equals("1")) {
+                continue;
+            }
             rows.add(new Row(List.of(r.label(), value(r, format), value(companion.get(i), format)), false));
         }
         return new Table("What its supports must take; weights are unfactored", List.of(new Column("What", false, 9),
@@ -123,11 +137,12 @@ final class CaseTables {
     }
 
     private static String value(Reaction r, Format format) {
-        return switch (r.unit()) {
-            case "N" -> format.force(r.value());
-            case "N m" -> format.moment(r.value());
-            default -> format.plain(r.value());
-        };
+        return r.unit().equals("N") ? format.force(r.value()) : format.moment(r.value());
+    }
+
+    /** A ratio in words. */
+    static String ratio(Reaction r) {
+        return Show.number(r.value(), 3, Rounding.UP) + " times";
     }
 
     private static boolean same(CaseAction a, CaseAction b) {
@@ -154,7 +169,8 @@ final class CaseTables {
         if (wall) {
             columns.add(new Column("Moment per " + (format.units() == Units.US ? "foot" : "metre") + ", " + loads.level().name(), true, 4));
         }
-        return new Table("Net pressures by zone, both faces together; places are measured from the left end, seen from the front" + (item instanceof FacadePanel ? "; for a panel on a wall from the corner" : ""), columns, rows);
+        return new Table(item instanceof FacadePanel ? "Pressures by zone; places are measured from the nearer corner of the building"
+            : "Net pressures by zone, both faces together; places are measured from the left end, seen from the front", columns, rows);
     }
 
     private static List<Row> zoneRows(Item item, CaseAction c, CaseAction companion, int index, Format format) {
@@ -188,7 +204,7 @@ final class CaseTables {
         for (PostAction p : shown) {
             boolean worst = p.moment() >= most * (1 - 1e-9);
             String carries = p.share().map(s -> format.length(s) + (p.gate() > 0 ? " and " + format.length(p.gate()) + " of gate" : "")).orElse("by statics");
-            rows.add(new Row(List.of(Integer.toString(p.post()), format.length(p.position()), p.zone().isEmpty() ? Format.caseName(p.named())
+            rows.add(new Row(List.of(Integer.toString(p.post()), format.length(p.position()), p.zone().isEmpty() ? Format.caseName(p.named()) + arrangement(p.state())
                 : HoardingDrawing.shortName(p.zone()), carries, format.force(p.shear())
                 + (p.shearCase().equals(p.named()) ? "" : " (" + Format.caseName(p.shearCase()) + ")"), format.moment(p.moment()),
                 format.moment(p.atLevel(loads.level().factor()).moment()), String.join(", ", remarks(p, worst))), worst));

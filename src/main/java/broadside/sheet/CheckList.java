@@ -92,7 +92,7 @@ final class CheckList {
 
     private void status() {
         fact("Status", SheetMaker.PRELIMINARY);
-        fact("Scope", "wind loads on flat panels and at the foot of their posts, by the code named here");
+        fact("Scope", "wind loads on flat panels and what they come to at their supports, by the code named here");
         fact("Not checked", "see \"What was not checked\" and group 10");
         group("2 Status");
     }

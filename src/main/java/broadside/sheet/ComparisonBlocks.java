@@ -77,6 +77,8 @@ public final class ComparisonBlocks {
     private void answer(Comparison comparison, boolean many, String anchor) {
         blocks.add(new Heading(2, many ? "What the codes say, " + comparison.item().mark() : "What the codes say", anchor + "answer"));
         List<Line> codes = comparison.codes();
+        comparison.lines().get(0).refusal().filter(ItemResult.Refusal::ofScope).ifPresent(r -> blocks.add(new Paragraph(ItemResult.OUTSIDE + ". " + r.clause() + ": " + r.reason()
+            + " Send to the engineer: " + r.instead() + ".", Tone.CAUTION)));
         if (codes.isEmpty()) {
             blocks.add(new Answer(List.of(Fact.of("Codes", "no code covers this item", "see the reasons below"))));
             return;

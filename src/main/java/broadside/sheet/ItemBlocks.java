@@ -59,17 +59,17 @@ final class ItemBlocks {
         List<Fact> lines = new ArrayList<>();
         String companion = loads.level().shown();
         Loads other = loads.companion();
-        lines.add(Fact.of("Governing case", governs(item, loads), loads.governs("base-moment").label() + raised(item)));
+        lines.add(Fact.of("Governing case", CaseTables.name(loads.governs("base-moment")), loads.governs("base-moment").label() + others(item, loads) + raised(item)));
         lines.add(Fact.of("Wind force", format.both(loads.governs("base-shear").force(), Dimension.FORCE) + ", " + loads.level().name(),
             format.force(other.governs("base-shear").force()) + " " + companion));
         lines.add(moment(loads, other, format));
         double torsion = Math.abs(loads.governs("torsion").torsion());
         if (item.item() instanceof PostSign && torsion > 0) {
             lines.add(Fact.of("Torsion about the middle of the posts", format.both(torsion, Dimension.MOMENT) + ", " + loads.level().name(),
-                format.moment(Math.abs(other.governs("torsion").torsion())) + " " + companion + ", " + Format.caseWords(loads.governs("torsion").name())));
+                format.moment(Math.abs(other.governs("torsion").torsion())) + " " + companion + ", case " + CaseTables.name(loads.governs("torsion"))));
         }
         lines.addAll(reactions(loads, format).stream().limit(MOST_LINES - 1 - lines.size()).toList());
-        lines.add(sure(item));
+        lines.add(sure(item, loads));
         return new Answer(lines);
     }
 
@@ -81,31 +81,30 @@ final class ItemBlocks {
     /** The wind on one line: speed with its averaging time, terrain, and what it comes to. */
     private static String wind(Assessment assessment, ItemResult item, Loads loads, Format format) {
         Site site = assessment.job().site();
+        String unknown = (site.ground().unknown().contains(Site.Unknown.TERRAIN) ? "; the terrain was not known, the smoothest is taken" : "")
+            + (site.ground().shapeUnknown() ? "; hills were not known, the worst value of the code is taken" : "");
         return "Wind: " + Format.speed(site.basicSpeed()) + ", " + site.averaging().words() + (item.sheet().find("probability-factor").isPresent() ? ", " + site.returnPeriod().orElseThrow().typed() : "")
             + "; terrain " + site.ground().terrain() + "; velocity pressure " + format.nearest(loads.velocity().pressure(), Dimension.PRESSURE) + " at "
-            + format.length(loads.velocity().height()) + ", " + loads.level().name() + ".";
+            + format.length(loads.velocity().height()) + ", " + loads.level().name() + unknown + ".";
     }
 
-    /** Which case governs what; one name when one case governs all. */
-    private static String governs(ItemResult item, Loads loads) {
-        boolean sign = item.item() instanceof PostSign;
+    /** Which cases govern posts and torsion, where they are others than the one that governs the moment. */
+    private static String others(ItemResult item, Loads loads) {
         String base = CaseTables.name(loads.governs("base-moment"));
-        String post = loads.worstPost().map(p -> Format.caseName(p.named())).orElse(base);
-        String torsion = sign && loads.governs("torsion").torsion() != 0 ? CaseTables.name(loads.governs("torsion")) : base;
-        if (post.equals(base) && torsion.equals(base)) {
-            return base;
+        String post = loads.worstPost().map(p -> Format.caseName(p.named()) + CaseTables.arrangement(p.state())).orElse(base);
+        String torsion = item.item() instanceof PostSign && loads.governs("torsion").torsion() != 0 ? CaseTables.name(loads.governs("torsion")) : base;
+        if (post.equals(torsion)) {
+            return post.equals(base) ? "" : "; posts and torsion: " + post;
         }
-        if (post.equals(base)) {
-            return base + "; torsion: " + torsion;
-        }
-        return base + "; " + (post.equals(torsion) ? "posts and torsion: " + post : "posts: " + post + (torsion.equals(base) ? "" : "; torsion: " + torsion));
+        return (post.equals(base) ? "" : "; posts: " + post) + (torsion.equals(base) ? "" : "; torsion: " + torsion);
     }
 
     private static Fact moment(Loads loads, Loads other, Format format) {
         String companion = loads.level().shown();
         return loads.worstPost()
             .map(p -> Fact.of("Moment at the foot of the worst post", format.both(p.moment(), Dimension.MOMENT) + ", " + loads.level().name(),
-                format.moment(other.worstPost().orElseThrow().moment()) + " " + companion + ", " + worstPosts(loads, p) + ", " + Format.caseWords(p.named())))
+                format.moment(other.worstPost().orElseThrow().moment()) + " " + companion + ", " + worstPosts(loads, p) + ", case " + Format.caseName(p.named())
+                    + CaseTables.arrangement(p.state())))
             .orElseGet(() -> loads.foot() == Foot.NONE ? height(loads, format) : Fact.of(loads.foot() == Foot.WALL ? "Moment at the wall" : "Moment at the ground, whole length", format.both(loads.governs("base-moment").baseMoment(), Dimension.MOMENT) + ", "
                 + loads.level().name(), format.moment(other.governs("base-moment").baseMoment()) + " " + companion));
     }
@@ -117,7 +116,7 @@ final class ItemBlocks {
     /** What supports other than posts must take, the greatest first. */
     private static List<Fact> reactions(Loads loads, Format format) {
         return loads.reactions().stream().filter(r -> !r.named().isEmpty() || r.unit().equals("1")).limit(2).map(r -> Fact.of(r.label(), r.unit().equals("1")
-            ? format.plain(r.value()) + " times" : (r.unit().equals("N") ? format.force(r.value()) : format.moment(r.value())) + ", " + loads.level().name())).toList();
+            ? CaseTables.ratio(r) : (r.unit().equals("N") ? format.force(r.value()) : format.moment(r.value())) + ", " + loads.level().name())).toList();
     }
 
     /** The posts that share the greatest moment. */
@@ -128,13 +127,13 @@ final class ItemBlocks {
     }
 
     /** How well the sources of the calculation are known. */
-    private static Fact sure(ItemResult item) {
+    private static Fact sure(ItemResult item, Loads loads) {
         List<Step> steps = item.sheet().steps();
         long recalled = steps.stream().filter(s -> s.status() == Status.RECALLED).count();
         long quoted = steps.stream().filter(s -> s.status() == Status.SECOND_HAND).count();
         String first = recalled == 0 ? "no step rests on memory" : recalled + " of " + steps.size() + " steps rest on figures not yet checked against print";
         return Fact.of("How sure", first, (quoted > 0 ? quoted + " more on figures seen quoted or in another edition; " : "")
-            + "loads only: no post, footing or ground was checked");
+            + (loads.foot() == Foot.GROUND && loads.supports().posts().size() > 0 ? "loads only: no post, footing or ground was checked" : "loads only: what holds it was not checked"));
     }
 
     private static List<Paragraph> overrides(ItemResult item) {
