@@ -26,7 +26,7 @@ final class AsNzsRegions {
     /** Throws with words for the person who typed it when there is no such region. */
     void checkName(String region) {
         if (!regions.has(region)) {
-            throw new IllegalArgumentException("region must be one of those of " + title + " that are known here: " + String.join(", ", regions.keys()));
+            throw new IllegalArgumentException("must be one of the regions of " + title + " that are known here: " + String.join(", ", regions.keys()));
         }
     }
 

@@ -75,13 +75,20 @@ class AsNzsRegionsTest {
 
     @ParameterizedTest
     @CsvSource(delimiter = '|', value = {
-        "2011 | A | 3 years | site: the formula of region A holds for a return-period of 5 years or more; for 1 year the table has 30 m/s",
-        "2011 | C | 1 year | site: the formula of region C holds for a return-period of 5 years or more",
-        "2011 | Z | 500 years | site: region must be one of those of AS/NZS 1170.2:2011 that are known here: A, W, B, B1, B2, C, D",
-        "2021 | W | 500 years | site: region must be one of those of AS/NZS 1170.2:2021 that are known here: A, B, B1, B2, C, D",
+        "2011 | A | 3 years | site.region: the formula of region A holds for a return-period of 5 years or more; for 1 year the table has 30 m/s",
+        "2011 | C | 1 year | site.region: the formula of region C holds for a return-period of 5 years or more",
+        "2011 | Z | 500 years | site.region: must be one of the regions of AS/NZS 1170.2:2011 that are known here: A, W, B, B1, B2, C, D",
+        "2021 | W | 500 years | site.region: must be one of the regions of AS/NZS 1170.2:2021 that are known here: A, B, B1, B2, C, D",
         "2021 | A | 0.5 years | site.return-period: must lie between 1 year and 10 000 years"})
     void what_has_no_speed_is_refused(String edition, String region, String period, String problem) {
         assertThat(problems(job(edition, region(region, period) + TERRAIN, BOARD))).contains(problem);
+    }
+
+    /** What is wrong with a region is told once, and not again as a missing speed. */
+    @Test
+    void a_region_without_a_speed_is_one_problem() {
+        assertThat(problems(job("2021", region("Z", "500 years") + TERRAIN, BOARD))).hasSize(1);
+        assertThat(problems(job("2021", "\"terrain\":\"2\"", BOARD))).hasSize(1).allMatch(p -> p.startsWith("site.basic-speed: is missing"));
     }
 
     @Test
