@@ -11,7 +11,9 @@ import broadside.trace.Step;
 import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 
 /**
  * Wind on one post of a sign: on what stands free of the boards, from the ground to the top of the highest board.
@@ -54,25 +56,33 @@ public record PostDrag(double force, double moment) {
         trace.given("b_p", "width of a post across the wind", section.width(), "m", "");
         List<PostDrag> posts = new ArrayList<>();
         List<Double> positions = sign.posts().positions();
+        Map<List<Stretch>, PostDrag> known = new HashMap<>();
         for (int i = 0; i < positions.size(); i++) {
             List<Stretch> bare = bare(sign, positions.get(i), section.width() / 2);
-            PostDrag drag = new PostDrag(0, 0);
-            for (int k = 0; k < bare.size(); k++) {
-                String part = "post-" + (i + 1) + (bare.size() == 1 ? "" : "-" + (k + 1));
-                drag = drag.plus(stretch(bare.get(k), section, code, rule, site, trace.part(part)));
-            }
+            boolean again = known.containsKey(bare);
+            String post = "post-" + (i + 1);
+            PostDrag drag = again ? known.get(bare) : worked(bare, post, section, code, rule, site, trace);
+            known.put(bare, drag);
             posts.add(drag);
             String which = Integer.toString(i + 1);
             trace.line("post-own/force/" + which, "F_{d" + which + "}", "wind on post " + which + " itself").from(STATICS, Status.DERIVED)
-                .reads("sum over the lengths that stand free", drag.force(), "N");
+                .reads(again ? "as on a post before, which stands as free" : "sum over the lengths that stand free", drag.force(), "N");
             trace.line("post-own/moment/" + which, "M_{d" + which + "}", "its moment at the foot of post " + which).from(STATICS, Status.DERIVED)
-                .reads("sum over the lengths that stand free", drag.moment(), "N m");
+                .reads(again ? "as on a post before, which stands as free" : "sum over the lengths that stand free", drag.moment(), "N m");
         }
         double force = posts.stream().mapToDouble(PostDrag::force).sum();
         double moment = posts.stream().mapToDouble(PostDrag::moment).sum();
         trace.line("posts-drag", "F_{post}", "wind on all posts").from(STATICS, Status.DERIVED).reads("sum over the posts", force, "N");
         trace.line("posts-drag-moment", "M_{post}", "its moment at the ground line").from(STATICS, Status.DERIVED).reads("sum over the posts", moment, "N m");
         return posts;
+    }
+
+    private static PostDrag worked(List<Stretch> bare, String post, PostSection section, WindCode code, MemberRule rule, Site site, Trace trace) {
+        PostDrag drag = new PostDrag(0, 0);
+        for (int k = 0; k < bare.size(); k++) {
+            drag = drag.plus(stretch(bare.get(k), section, code, rule, site, trace.part(post + (bare.size() == 1 ? "" : "-" + (k + 1)))));
+        }
+        return drag;
     }
 
     private static PostDrag stretch(Stretch bare, PostSection section, WindCode code, MemberRule rule, Site site, Trace trace) {

@@ -136,14 +136,14 @@ class CodeTablesTest {
         for (java.util.Map.Entry<String, byte[]> file : TableFiles.shipped("code-tables").entrySet()) {
             if (file.getKey().startsWith("en-1991-1-4/2005/")) {
                 String text = new String(file.getValue(), java.nio.charset.StandardCharsets.UTF_8).replace("title=EN 1991-1-4:2005 + A1:2010, recommended values",
-                    "title=Demonstration of an edition of 2031").replaceAll("signboard-cf( *), 1.80", "signboard-cf$1, 1.95");
+                    "title=Demonstration of an edition of 2031").replace("short=EN 1991-1-4:2005", "short=Demonstration of 2031").replaceAll("signboard-cf( *), 1.80", "signboard-cf$1, 1.95");
                 Files.writeString(own.resolve(file.getKey().substring("en-1991-1-4/2005/".length())), text);
             }
         }
         Path job = job(folder, "bakery-sign.json", "\"edition\": \"2005\"", "\"edition\": \"2031\"");
         JsonNode item = item(CommandLineRun.of("check", job, "--json", "--code-tables", folder.resolve("tables")));
         assertThat(step(item, "coefficient/all")).isEqualTo(1.95);
-        assertThat(CommandLineRun.of("check", job, "--side-by-side", "--code-tables", folder.resolve("tables")).out()).contains("Demonstration of an edition of 2031 (this job)");
+        assertThat(CommandLineRun.of("check", job, "--side-by-side", "--code-tables", folder.resolve("tables")).out()).contains("Demonstration of 2031 (this job)");
     }
 
     @Test
