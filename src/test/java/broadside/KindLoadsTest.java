@@ -117,6 +117,25 @@ class KindLoadsTest {
         assertThat(step(item, "replacement-ratio/moment")).isCloseTo(2.16 / 0.731525 * 3.5 / 3.2625 * q, within(1e-9));
     }
 
+    /** An old disc filled pi/4 of the rectangle around it, an old triangle half: the ratio is larger by as much, and the wind on the posts is in neither moment. */
+    @Test
+    void the_outline_of_the_old_board_counts() {
+        String sign = "{'mark': 'S1', 'kind': 'post-sign', 'boards': [{'width': '1 m', 'height': '1 m', 'clearance': '3 m'}], 'posts': {'count': 1, 'section': 'CHS 114.3x5'}, "
+            + "'replaces': {'width': '1 m', 'height': '1 m', 'clearance': '3 m', 'shape': '%s'}}";
+        assertThat(step(en(sign.formatted("rectangle")), "replacement-ratio/moment")).isCloseTo(1, within(1e-12));
+        assertThat(step(en(sign.formatted("disc")), "replacement-ratio/moment")).isCloseTo(4 / Math.PI, within(1e-12));
+        assertThat(step(en(sign.formatted("triangle")), "replacement-ratio/area")).isCloseTo(2, within(1e-12));
+    }
+
+    /** Board 2 m wide, posts 0.2 m wide: a post is covered only when its whole width is. */
+    @Test
+    void a_post_that_is_covered_in_part_stands_free() {
+        String sign = "{'mark': 'S1', 'kind': 'post-sign', 'boards': [{'width': '2 m', 'height': '2 m', 'clearance': '2 m'}], 'posts': {'count': 2, 'spacing': '%s m', "
+            + "'shape': 'square', 'width': '0.2 m'}}";
+        assertThat(step(en(sign.formatted("1.8")), "post-length/post-1")).isEqualTo(2);
+        assertThat(step(en(sign.formatted("1.82")), "post-length/post-1")).isEqualTo(4);
+    }
+
     @Test
     void with_data_of_the_old_post_the_loads_are_assessed() {
         ItemResult item = en("{'mark': 'S1', 'kind': 'post-sign', 'boards': [{'width': '1 m', 'height': '1 m', 'clearance': '2 m'}], "

@@ -28,9 +28,9 @@ public record PostDrag(double force, double moment) {
     /** A stretch of a post that the wind meets, m above the ground. */
     public record Stretch(double from, double to) { }
 
-    /** The stretches of a post at a distance from the middle of the posts that no board stands before. */
+    /** The stretches of a post at a distance from the middle of the posts that no board covers over the post's whole width. */
     public static List<Stretch> bare(PostSign sign, double at, double halfWidth) {
-        List<Panel> before = sign.panels().stream().filter(p -> Math.abs(p.middle() - at) < p.width() / 2 + halfWidth)
+        List<Panel> before = sign.panels().stream().filter(p -> Math.abs(p.middle() - at) + halfWidth <= p.width() / 2 + 1e-9)
             .sorted(Comparator.comparingDouble(Panel::clearance)).toList();
         double top = sign.panels().stream().mapToDouble(Panel::top).max().orElseThrow();
         List<Stretch> bare = new ArrayList<>();

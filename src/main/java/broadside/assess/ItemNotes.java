@@ -99,6 +99,10 @@ final class ItemNotes implements Item.Kinds<List<Note>> {
 
     @Override
     public List<Note> hoarding(Hoarding hoarding) {
+        if (sheet.steps().stream().anyMatch(s -> s.name().startsWith("signboard-rule"))) {
+            add(Note.Kind.CAUTION, "A hoarding with so large a gap below counts as a signboard: one coefficient over its whole length and no higher pressure at its ends. On the ground the first "
+                + "bays would get more; so they do by other codes.");
+        }
         if (hoarding.spacing().isEmpty()) {
             add(Note.Kind.ASSUMPTION, "The spacing of the posts was not given: there is no moment for each post.");
         }

@@ -178,6 +178,10 @@ final class Notes {
             if (uses(sheet, "signboard-rule")) {
                 add(Note.Kind.ASSUMPTION, "The code's rule for signboards has no reduction for openings: the board is counted as closed.");
             }
+            if (uses(sheet, "lattice-coefficient") || uses(sheet, "solid-area-pressure")) {
+                add(Note.Kind.CAUTION, "So open a panel counts as a lattice or an open sign, whose rule has no higher pressure at an end. A panel that is a little more closed gets more. "
+                    + "Where the openness is not sure, take the panel as closed.");
+            }
             add(Note.Kind.CAUTION, job.remark(item.mark(), "solidity-by").map(who -> "The solidity was given by " + who + ".").orElse("Who gave the solidity was not said.")
                 + " A printer's figure for a mesh is not an aerodynamic one.");
         }

@@ -59,19 +59,42 @@ final class SideBySide {
         boolean chosen = key.equals(job.basis().key());
         Optional<Job.Compared> typed = job.compared().stream().filter(c -> c.key().equals(key)).findFirst();
         Trace steps = new Trace();
-        double speed = chosen ? fifty(job.site(), own, steps) : typed.flatMap(Job.Compared::speed)
-            .map(s -> fifty(bare(job.site(), s, code, "", SiteOptions.NONE), code, steps)).orElseGet(() -> converted(job.site(), own, code, steps));
         String terrain = chosen ? job.site().ground().terrain() : typed.flatMap(Job.Compared::terrain).orElseGet(() -> match(job.site(), own, code));
-        SiteOptions options = chosen ? job.site().options() : SiteOptions.NONE;
-        Speed used = new Speed(speed, String.format(Locale.ROOT, "%.4g m/s", speed));
-        Site site = bare(job.site(), used, code, terrain, options.without("risk-category", "regional-speed", "wind-zone", "duration-rule", "season", "season-factor", "structure-class"));
+        Run run = chosen ? chosen(job.site(), code, steps) : typed.flatMap(Job.Compared::speed).map(s -> typed(job.site(), s, code, terrain, steps))
+            .orElseGet(() -> converted(job.site(), own, code, terrain, steps));
         Job.Basis basis = chosen ? job.basis() : new Job.Basis(key.substring(0, key.indexOf('/')), key.substring(key.indexOf('/') + 1), Optional.empty(), Optional.empty());
-        Job other = new Job(Map.of(), basis, site, List.of(item), job.remarks(), List.of(), List.of());
-        ItemResult result = assessor.assess(other).items().get(0);
-        String how = how(chosen, typed, own, code);
-        return new Comparison.Line(key, code.edition().property("title"), code.edition().property(code.edition().hasProperty("short") ? "short" : "title"), chosen, code.edition().hasProperty("no-code"), speed, terrain, how,
-            result.loads().map(l -> found(item, l, result.sheet())), result.refusal(), differs(code, item),
-            steps);
+        ItemResult result = assessor.assess(new Job(Map.of(), basis, run.site(), List.of(item), job.remarks(), List.of(), List.of())).items().get(0);
+        String name = code.edition().property(code.edition().hasProperty("short") ? "short" : "title");
+        return new Comparison.Line(key, code.edition().property("title"), name, chosen, code.edition().hasProperty("no-code"), run.site().basicSpeed().metresPerSecond(), terrain,
+            how(chosen, typed, own, code), result.loads().map(l -> found(item, l, run.ratio(), result.sheet())), result.refusal(), differs(code, item), steps);
+    }
+
+    /** The site that one code is given, and the wind of 50 years over its basic speed. */
+    private record Run(Site site, double ratio) { }
+
+    /** The site of the job as it is, without what lowers or raises the wind for a while or by an authority. */
+    private static Run chosen(Site site, WindCode code, Trace steps) {
+        steps.given("V_1", "basic wind speed, " + site.averaging().words(), site.basicSpeed().metresPerSecond(), "m/s", site.basicSpeed().typed());
+        double k = code.fiftyYearRatio(site, steps);
+        boolean strength = code.level(site).name().equals("strength");
+        return new Run(new Site(site.name(), site.basicSpeed(), site.averaging(), strength ? site.returnPeriod() : Optional.empty(), site.ground(), Optional.empty(),
+            site.options().without("duration-rule", "season", "season-factor", "structure-class")), k);
+    }
+
+    private static Run typed(Site site, Speed speed, WindCode code, String terrain, Trace steps) {
+        Site other = bare(site, speed, code, terrain);
+        steps.given("V", "basic wind speed typed for this code, " + code.terms().averaging().words(), speed.metresPerSecond(), "m/s", speed.typed());
+        return new Run(other, code.fiftyYearRatio(other, steps));
+    }
+
+    /** The basic speed of the other code: through the wind of 50 years and the averaging time of that code. */
+    private Run converted(Site site, WindCode own, WindCode code, String terrain, Trace steps) {
+        double v = averaged(fifty(site, own, steps), site.averaging(), code.terms().averaging(), steps);
+        Trace part = steps.part("other");
+        double k = code.fiftyYearRatio(bare(site, site.basicSpeed(), code, terrain), part);
+        double basic = part.line("basic-speed", "V", "basic wind speed of this code, " + code.terms().averaging().words()).in("V_{50}", v, "m/s").in("k_{50}", k)
+            .from("as above", Status.DERIVED).gives("V_{50} / k_{50}", v / k, "m/s");
+        return new Run(bare(site, new Speed(basic, String.format(Locale.ROOT, "%.4g m/s", basic)), code, terrain), k);
     }
 
     /** The basic speed of a site brought to the wind of 50 years, m/s. */
@@ -82,10 +105,7 @@ final class SideBySide {
             .from("as above", Status.DERIVED).gives("k_{50} V_1", k * v, "m/s");
     }
 
-    private double converted(Site site, WindCode own, WindCode code, Trace steps) {
-        double v50 = fifty(site, own, steps);
-        Averaging from = site.averaging();
-        Averaging to = code.terms().averaging();
+    private double averaged(double v50, Averaging from, Averaging to, Trace steps) {
         if (same(from, to)) {
             return v50;
         }
@@ -97,9 +117,9 @@ final class SideBySide {
         return a == b || a.seconds() <= 3 && b.seconds() <= 3 && a.seconds() != 1 && b.seconds() != 1;
     }
 
-    private static Site bare(Site site, Speed speed, WindCode code, String terrain, SiteOptions options) {
+    private static Site bare(Site site, Speed speed, WindCode code, String terrain) {
         Site.Ground ground = new Site.Ground(terrain, site.ground().altitude(), site.ground().topography(), site.ground().unknown());
-        return new Site(site.name(), speed, code.terms().averaging(), Optional.empty(), ground, Optional.empty(), options);
+        return new Site(site.name(), speed, code.terms().averaging(), Optional.empty(), ground, Optional.empty(), SiteOptions.NONE);
     }
 
     /** The class of the other code that stands for about the same ground. */
@@ -131,10 +151,10 @@ final class SideBySide {
 
     private static String how(boolean chosen, Optional<Job.Compared> typed, WindCode own, WindCode code) {
         if (chosen) {
-            return "the speed of this job, brought to 50 years";
+            return "the speed of this job";
         }
         if (typed.flatMap(Job.Compared::speed).isPresent()) {
-            return "a speed typed for this code, brought to 50 years";
+            return "a speed typed for this code";
         }
         return same(own.terms().averaging(), code.terms().averaging()) ? "the same 50-year wind" : "the same 50-year wind, from a " + own.terms().averaging().words()
             + " to a " + (code.terms().averaging() == Averaging.GUST_0_2_S ? "3 s gust after Durst, the number that this code calls a 0.2 s gust"
@@ -146,13 +166,14 @@ final class SideBySide {
         return Stream.of("differs", "differs-" + item.kind()).filter(code.edition()::hasProperty).map(code.edition()::property).collect(Collectors.joining(" "));
     }
 
-    private static Comparison.Found found(Item item, Loads loads, Trace sheet) {
+    private static Comparison.Found found(Item item, Loads loads, double ratio, Trace sheet) {
+        double level = ratio * ratio;
         CaseAction governing = loads.governs("base-shear");
         double area = item.panels().stream().mapToDouble(Panel::area).sum();
         double greatest = loads.cases().stream().filter(c -> !c.state().equals(BannerFence.BARE)).flatMap(c -> c.zones().stream()).flatMap(z -> z.zones().stream())
             .mapToDouble(z -> Math.abs(z.pressure())).max().orElse(0);
         long recalled = sheet.steps().stream().filter(s -> s.status() == Status.RECALLED).count();
-        return new Comparison.Found(loads.velocity().pressure(), governing.force() / area, greatest, governing.force(),
-            loads.governs("base-moment").baseMoment(), (double) recalled / sheet.steps().size());
+        return new Comparison.Found(level * loads.velocity().pressure(), level * governing.force() / area, level * greatest, level * governing.force(),
+            level * loads.governs("base-moment").baseMoment(), (double) recalled / sheet.steps().size());
     }
 }

@@ -22,7 +22,7 @@ final class En1991Lattice {
         this.lattice = edition.curve("lattice");
     }
 
-    /** One case, the wind square on; a wall takes the pressure at its top and a board that at its middle. */
+    /** The wind square on, and for a board the force off its middle as on a closed one, which the clause does not ask for; a wall takes the pressure at its top and a board that at its middle. */
     List<LoadCase> cases(Panel panel, boolean wall, Site site, WindCode code, Trace trace) {
         Coefficient printed = lattice.at("c_f0", panel.solidity());
         Source place = printed.source();
@@ -42,7 +42,14 @@ final class En1991Lattice {
             trace.line(name, symbol, "net pressure on the gross area").in("q_p", qp, "Pa").in("c_f", c)
                 .from(place.publicationAndEdition() + ", 5.3(2)", place.status()), "q_p c_f", qp * c);
         double b = panel.width();
-        return List.of(new LoadCase(wall ? "wall" : "centred", "plane lattice, wind square on", Windward.NONE,
-            List.of(new ZonePressure("all", "w_{all}", 0, b, b, c, w)), 0, Optional.empty(), 0, 0));
+        List<ZonePressure> all = List.of(new ZonePressure("all", "w_{all}", 0, b, b, c, w));
+        LoadCase square = new LoadCase(wall ? "wall" : "centred", "plane lattice, wind square on", Windward.NONE, all, 0, Optional.empty(), 0, 0);
+        if (wall) {
+            return List.of(square);
+        }
+        ShiftRule rule = new ShiftRule(constants.number("signboard-eccentricity"), constants.source("signboard-eccentricity"));
+        LoadCase right = new LoadCase("eccentric", "plane lattice, force a quarter of the width off the middle, as for a closed board", Windward.RIGHT, all, rule.factor() * b,
+            Optional.of(rule), 0, 0);
+        return List.of(square, right, right.mirrored(b));
     }
 }

@@ -45,23 +45,23 @@ final class Is875Pressure {
             design(new Named("design-pressure/local", "p_{d,l}", "design wind pressure for the local coefficient", "K_{d,l}"), local, ka, pz, trace));
     }
 
-    /** Pressure on which the force coefficient of a slender member is put, Pa: without the area factor. */
+    /** Pressure on which the force coefficient of a slender member is put, Pa: without the area factor, and with K_d of circular forms, which is safe for others. */
     double ofMember(double pz, Site site, Trace trace) {
-        double kd = directionality("solid signs", site, trace);
+        double kd = directionality("circular forms", site, trace);
         double least = constants.number("least-design-pressure");
         return trace.line("member-pressure", "q_m", "pressure for members and edges: the design wind pressure without the area factor").in("K_d", kd)
             .in("p_z", pz, "Pa").from(place.citation(), place.status())
             .gives("max(K_d p_z; " + Numbers.plain(least) + " p_z)", Math.max(kd * pz, least * pz), "Pa");
     }
 
-    /** 1.0 where the site has a cyclone factor above 1, which only a cyclone-affected region has. */
+    /** 1.0 where the site has a cyclone factor, also one of 1.00, which only a cyclone-affected region has. */
     private double directionality(String structure, Site site, Trace trace) {
         return trace.once("directionality factor, " + structure, () -> {
             Trace.Line line = trace.line("directionality-factor", "K_d", "directionality factor");
             if (site.options().number("directionality").isPresent()) {
                 return line.from("given", Status.GIVEN).reads("as given", site.options().number("directionality").get(), "1");
             }
-            boolean cyclone = trace.steps().stream().anyMatch(s -> s.name().startsWith("cyclone-factor") && Numbers.above(s.value(), 1));
+            boolean cyclone = site.options().number("k4").isPresent() || trace.overridesUsed().stream().anyMatch(o -> o.name().startsWith("cyclone-factor"));
             return directionality.number(cyclone ? "cyclone-affected regions" : structure, "value").into(line);
         }, known -> known);
     }

@@ -31,6 +31,15 @@ public record Board(String mark, Shape shape, Length width, Length height, Lengt
         }
     }
 
+    /** Area of the board over that of the rectangle around it. */
+    public double areaShare() {
+        return switch (shape) {
+            case RECTANGLE -> 1;
+            case DISC -> Math.PI / 4;
+            case TRIANGLE -> 0.5;
+        };
+    }
+
     Panel panel(String part, int posts) {
         return new Panel(part, Panel.Kind.BOARD, width.metres(), height.metres(), clearance.metres(), offset.metres(), solidity, 0, 0, 1, posts,
             new Panel.AsTyped(width.typed(), height.typed(), clearance.typed(), offset.typed()));

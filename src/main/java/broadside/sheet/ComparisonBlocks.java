@@ -171,7 +171,7 @@ public final class ComparisonBlocks {
     private static String method(Comparison.Gust gust) {
         double more = Math.pow(gust.largest() / gust.used(), 2) - 1;
         double less = 1 - Math.pow(gust.smallest() / gust.used(), 2);
-        return "Every code is given the wind that is passed once in 50 years, so that all loads stand at one level: characteristic, before any partial or load factor. From a mean to a gust "
+        return "Every code is given its own basic speed for the same wind, and its loads are brought to the wind that is passed once in 50 years: all stand at one level, characteristic. A least pressure or speed of a code counts before that. From a mean to a gust "
             + "the speed is converted by the ratios after Durst for open country, which give " + Show.number(gust.used(), 3, Rounding.NEAREST) + " for the 3 s gust over the 10 minute mean. Other "
             + "sources give " + Format.count(gust.smallest()) + " to " + Format.count(gust.largest()) + ": a pressure from a converted speed may be up to " + Math.round(more * 100)
             + " % larger or " + Math.round(less * 100) + " % smaller than shown. A speed of the place as each code defines it is better: it can be typed for each code.";

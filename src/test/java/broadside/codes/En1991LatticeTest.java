@@ -22,7 +22,8 @@ class En1991LatticeTest {
 
     private static LoadCase only(Panel panel, Trace trace) {
         List<LoadCase> cases = code("").netPressures(panel, site(26, "II"), trace);
-        assertThat(cases).hasSize(1);
+        assertThat(cases.get(0).name()).isIn("wall", "centred");
+        assertThat(cases).hasSize(cases.get(0).name().equals("wall") ? 1 : 3);
         return cases.get(0);
     }
 
