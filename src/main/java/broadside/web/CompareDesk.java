@@ -27,10 +27,19 @@ final class CompareDesk {
     private final Documents documents;
 
     /** The page; {@code speeds} has one line for each code, {@code others} the other items of the job. */
-    public record Page(SheetView.Page sheet, String token, int item, List<Speed> speeds, List<SheetView.Change> others, List<String> problems) { }
+    public record Page(SheetView.Page sheet, String token, int item, List<Speed> speeds, List<SheetView.Change> others, List<FormView.Line> problems) { }
 
     /** What was typed for one code. */
-    public record Speed(String key, String title, String kind, String speed, String terrain, String classes) { }
+    public record Speed(String key, String title, Box speed, Box terrain, String kind, String classes) { }
+
+    /** One box; {@code problem} is empty when it is in order. */
+    public record Box(String id, String typed, String problem) {
+
+        /** The ids that describe the box. */
+        public String describedBy() {
+            return id + "-hint" + (problem.isEmpty() ? "" : " " + id + "-problem");
+        }
+    }
 
     CompareDesk(Pages pages, Assessor assessor, JobReader reader, Documents documents) {
         this.pages = pages;
@@ -45,7 +54,7 @@ final class CompareDesk {
     }
 
     /** The page of a job; what was typed for other codes may not fit and is shown as it is, with what is wrong. */
-    private void show(Context ctx, JsonNode node, JsonNode typed, int item, List<String> problems) {
+    private void show(Context ctx, JsonNode node, JsonNode typed, int item, List<Problem> problems) {
         Job job = reader.read(node).orThrow();
         Sheet sheet = sheet(job, item);
         String token = Token.of(node);
@@ -59,7 +68,8 @@ final class CompareDesk {
                 others.add(new SheetView.Change("/side-by-side?item=" + i + "&j=" + token, job.items().get(i).mark()));
             }
         }
-        Page page = new Page(SheetView.of(sheet, "/side-by-side.svg?" + here, List.of(), downloads), token, item, speeds(job, typed), others, problems);
+        Page page = new Page(SheetView.of(sheet, "/side-by-side.svg?" + here, List.of(), downloads), token, item, speeds(job, typed, problems), others,
+            problems.stream().map(p -> line(p, typed)).toList());
         pages.show(ctx, problems.isEmpty() ? 200 : 422, "compare", new Pages.Frame((problems.isEmpty() ? "" : "Error: ") + sheet.title(), "", pages.frame("").made()), page);
     }
 
@@ -71,26 +81,36 @@ final class CompareDesk {
         return documents.sideBySide(assessor, assessment, job.items().get(item));
     }
 
-    private List<Speed> speeds(Job job, JsonNode node) {
+    private List<Speed> speeds(Job job, JsonNode node, List<Problem> problems) {
         List<Speed> speeds = new ArrayList<>();
         for (String key : assessor.codes().editions()) {
             WindCode code = assessor.codes().code(key).orElseThrow();
             if (!key.equals(job.basis().key())) {
-                Optional<JsonNode> typed = typed(node, key);
-                speeds.add(new Speed(key, code.edition().property("title"), code.terms().averaging().words(), typed.map(t -> t.path("basic-speed").asString("")).orElse(""),
-                    typed.map(t -> t.path("terrain").asString("")).orElse(""), code.terms().terrainNames()));
+                speeds.add(new Speed(key, code.edition().property("title"), box("basic-speed", key, node, problems), box("terrain", key, node, problems),
+                    code.terms().averaging().words(), code.terms().terrainNames()));
             }
         }
         return speeds;
     }
 
-    private static Optional<JsonNode> typed(JsonNode node, String key) {
-        for (JsonNode each : node.path("comparison")) {
-            if (key.equals(each.path("code").asString("") + "/" + each.path("edition").asString(""))) {
-                return Optional.of(each);
+    private Box box(String name, String key, JsonNode node, List<Problem> problems) {
+        JsonNode all = node.path("comparison");
+        for (int i = 0; i < all.size(); i++) {
+            if (key.equals(key(all.path(i)))) {
+                String path = "comparison[" + i + "]." + name;
+                String problem = problems.stream().filter(p -> p.path().equals(path)).findFirst().map(Problem::text).orElse("");
+                return new Box(id(name, key), all.path(i).path(name).asString(""), problem);
             }
         }
-        return Optional.empty();
+        return new Box(id(name, key), "", "");
+    }
+
+    private static String key(JsonNode compared) {
+        return compared.path("code").asString("") + "/" + compared.path("edition").asString("");
+    }
+
+    private static String id(String name, String key) {
+        return name + "-" + key.replace('/', '-');
     }
 
     /** Takes the speeds that were typed into the job and shows the page again. */
@@ -118,15 +138,26 @@ final class CompareDesk {
         if (problems.isEmpty()) {
             ctx.redirect("/side-by-side?item=" + item + "&j=" + Token.of(job), HttpStatus.SEE_OTHER);
         } else {
-            show(ctx, before, job, item, problems.stream().map(p -> told(p, comparison)).toList());
+            show(ctx, before, job, item, problems.stream().map(p -> told(p, job)).toList());
         }
     }
 
-    /** A problem with the name of its code in place of its path. */
-    private String told(Problem problem, ArrayNode comparison) {
-        int index = problem.path().startsWith("comparison[") ? Integer.parseInt(problem.path().replaceAll("\\D", "")) : -1;
-        String code = index < 0 ? "" : comparison.get(index).path("code").asString("") + "/" + comparison.get(index).path("edition").asString("");
-        return assessor.codes().code(code).map(c -> c.edition().property("title") + ": ").orElse("") + problem.text();
+    /** A problem in which the code has its short name. */
+    private Problem told(Problem problem, JsonNode job) {
+        return CodeName.told(problem, compared(problem, job).flatMap(node -> assessor.codes().code(key(node))));
+    }
+
+    /** A line of the list on top, with the name of its code, and leading to the box. */
+    private FormView.Line line(Problem problem, JsonNode job) {
+        Optional<JsonNode> node = compared(problem, job);
+        String name = problem.path().substring(problem.path().lastIndexOf('.') + 1);
+        String target = node.filter(n -> n.has(name)).map(n -> id(name, key(n))).orElse("");
+        return new FormView.Line(target, node.flatMap(n -> assessor.codes().code(key(n))).map(c -> CodeName.of(c) + ": ").orElse("") + problem.text());
+    }
+
+    private static Optional<JsonNode> compared(Problem problem, JsonNode job) {
+        java.util.regex.Matcher found = java.util.regex.Pattern.compile("^comparison\\[(\\d{1,3})\\].*").matcher(problem.path());
+        return found.matches() ? Optional.of(job.path("comparison").path(Integer.parseInt(found.group(1)))) : Optional.empty();
     }
 
     private static void put(ObjectNode node, String name, String text) {

@@ -61,6 +61,27 @@ class CompareTest {
     }
 
     @Test
+    void each_wrong_box_says_so_itself_and_all_that_was_typed_stays() {
+        Map<String, String> typed = new java.util.LinkedHashMap<>(Map.of("j", TOKEN, "item", "0", "speed:is-875-3/2015", "44", "terrain:is-875-3/2015", "9",
+            "speed:asce-7/22", "115 mph", "terrain:asce-7/22", "II", "speed:as-nzs-1170-2/2011", "900 m/s", "terrain:open-flow/1", "0.05 m"));
+        String page = Pool.post("/side-by-side", typed).body();
+        for (String id : java.util.List.of("basic-speed-is-875-3-2015", "terrain-is-875-3-2015", "terrain-asce-7-22", "basic-speed-as-nzs-1170-2-2011")) {
+            assertThat(page).contains("href=\"#" + id + "\"", "id=\"" + id + "-problem\"").containsPattern("id=\"" + id + "\"[^>]*aria-describedby=\"" + id + "-hint " + id
+                + "-problem\"[^>]*aria-invalid=\"true\"");
+        }
+        assertThat(page.split("aria-invalid").length - 1).isEqualTo(4);
+        assertThat(page).contains("value=\"44\"", "value=\"9\"", "value=\"115 mph\"", "value=\"II\"", "value=\"900 m/s\"", "value=\"0.05 m\"");
+        typed.putAll(Map.of("speed:is-875-3/2015", "44 m/s", "terrain:is-875-3/2015", "2"));
+        String again = Pool.post("/side-by-side", typed).body();
+        assertThat(again.split("aria-invalid").length - 1).isEqualTo(2);
+        assertThat(again).contains("value=\"44 m/s\"", "value=\"115 mph\"", "value=\"II\"", "value=\"900 m/s\"", "value=\"0.05 m\"");
+        typed.putAll(Map.of("terrain:asce-7/22", "C", "speed:as-nzs-1170-2/2011", "45 m/s"));
+        HttpResponse<String> right = Pool.post("/side-by-side", typed);
+        assertThat(right.statusCode()).isEqualTo(303);
+        assertThat(Token.read(right.headers().firstValue("location").orElseThrow().replaceAll(".*j=", "")).path("comparison").size()).isEqualTo(4);
+    }
+
+    @Test
     void an_item_that_is_not_there_is_not_found() {
         assertThat(Pool.get("/side-by-side?item=7&j=" + TOKEN).statusCode()).isEqualTo(404);
         assertThat(Pool.get("/side-by-side?item=x&j=" + TOKEN).statusCode()).isEqualTo(404);
