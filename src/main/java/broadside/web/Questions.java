@@ -34,6 +34,10 @@ final class Questions {
     private static final String ROUGHNESS_HINT = "Sea 0.0002, smooth 0.005, open 0.03, roughly open 0.1, rough 0.25, very rough 0.5 (classes of Davenport and Wieringa). "
         + "A smoother ground gives a larger load. Type unknown if you don't know: the smoothest counts";
 
+    private static final String ZONE_HINT = ". A zone alone counts with the profile of the terrain; a zone named with its site counts with a simplified pressure, in which "
+        + "the terrain plays no part";
+    private static final String TERRAIN_HINT = ". Where a zone with a simplified pressure was chosen it is not used, but the job file asks for it";
+
     private final Answers answers;
     private final Optional<WindCode> code;
     private final HeldByChoices heldBy;
@@ -112,8 +116,13 @@ final class Questions {
 
     private Input input(Shape shape, Field field, String path) {
         Wording words = Wording.of(shape.name(), field);
+        Map<String, String> listed = shape.name().equals("site") ? code.map(c -> TableChoices.of(c.edition(), field.name())).orElse(Map.of()) : Map.of();
         if (path.equals("site.terrain")) {
             return terrain(path, words);
+        }
+        if (!listed.isEmpty()) {
+            return made("select", path, words.label(), "", field.name().equals("wind-zone") && simplified() ? words.hint() + ZONE_HINT : words.hint(), null,
+                choices(path, "Not said", listed), "", "");
         }
         if (RADIOS.contains(field.name())) {
             return made("radio", path, words.label(), "", words.hint(), null, written(field, path), "", field.name().equals("held-by") ? "many" : "");
@@ -136,7 +145,7 @@ final class Questions {
                 "Here it is " + code.orElseThrow().terms().terrainNames() + ". " + ROUGHNESS_HINT, reading(answers.get(path), Dimension.LENGTH, unit),
                 List.of(), null, "short");
         }
-        return made("radio", path, words.label(), "", code.isPresent() ? words.hint()
+        return made("radio", path, words.label(), "", code.isPresent() ? words.hint() + (simplified() ? TERRAIN_HINT : "")
             : "Each code has its own classes: choose the code above, then show its questions", null, terrains(path), "", "");
     }
 
@@ -194,16 +203,24 @@ final class Questions {
     }
 
     private List<Choice> choices(Field field, String path) {
-        List<Choice> choices = new ArrayList<>();
-        choices.add(new Choice("", "", field.required() || field.name().equals("averaging") ? "Choose" : path.contains(".boards[") || path.contains(".replaces.") ? "Not said: a rectangle" : "Not said", "", answers.blank(path)));
-        for (String value : field.choices()) {
-            choices.add(new Choice("", value, ChoiceWords.of(field.name(), value).words(), "", answers.get(path).equals(value)));
-        }
-        boolean known = answers.blank(path) || field.choices().contains(answers.get(path));
-        if (!known) {
+        Map<String, String> words = new LinkedHashMap<>();
+        field.choices().forEach(value -> words.put(value, ChoiceWords.of(field.name(), value).words()));
+        return choices(path, field.required() || field.name().equals("averaging") ? "Choose"
+            : path.contains(".boards[") || path.contains(".replaces.") ? "Not said: a rectangle" : "Not said", words);
+    }
+
+    /** The answers of a select; what was typed elsewhere and is none of them stays as it is. */
+    private List<Choice> choices(String path, String blank, Map<String, String> words) {
+        List<Choice> choices = new ArrayList<>(List.of(new Choice("", "", blank, "", answers.blank(path))));
+        words.forEach((value, text) -> choices.add(new Choice("", value, text, "", answers.get(path).equals(value))));
+        if (!answers.blank(path) && !words.containsKey(answers.get(path))) {
             choices.add(new Choice("", answers.get(path), answers.get(path), "", true));
         }
         return choices;
+    }
+
+    private boolean simplified() {
+        return code.filter(c -> TableChoices.simplified(c.edition())).isPresent();
     }
 
     private static String capital(String text) {

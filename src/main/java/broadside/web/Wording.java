@@ -36,10 +36,10 @@ record Wording(String label, String hint, String metric, String us) {
         site.name|Name of the place|
         site.basic-speed|Basic wind speed|From the wind map or the national annex for this place
         site.averaging|Kind of speed|A gust and a mean of the same wind differ by half
-        site.region|Wind region|As on the code's map; it stands in place of the speed
+        site.region|Wind region|As on the code's map; with a return period it stands in place of the speed
         site.regional-speed|Regional wind speed|In place of the region and the basic speed
         site.wind-zone|Wind zone|As on the national map; it stands in place of the speed
-        site.season|Season in which it stands|In the words of the national annex
+        site.season|Season in which it stands|As the national annex divides the year
         site.return-period|Once in how many years|The basic speed of most codes is passed once in 50 years
         site.stands-for|How long it stands||months|months
         site.duration-rule|Is the load lowered for the short stay?|

@@ -138,6 +138,21 @@ class PlaceFormTest {
     }
 
     @Test
+    void answers_that_stand_in_the_tables_of_a_code_are_choices() {
+        String germany = Pool.plain(Pool.get("/fill?kind=hoarding&code=en-1991-1-4/2005-de").body());
+        assertThat(germany).containsPattern("<select id=\"site.wind-zone\"").contains("<option value=\"2\">Zone 2: 25.0 m/s</option>",
+            "<option value=\"2 coast\">Zone 2 coast: simplified pressure up to 25 m</option>", "in which the terrain plays no part", "it is not used, but the job file asks for it");
+        assertThat(germany.split("value=\"2 inland\"").length).isEqualTo(2);
+        assertThat(Pool.plain(Pool.get("/fill?code=en-1991-1-4/2005-uk").body())).contains("<option value=\"April to September\">April to September</option>",
+            "<option value=\"two months from May to August\">Two months from May to August</option>").doesNotContain("it is not used, but");
+        assertThat(Pool.get("/fill?code=as-nzs-1170-2/2011").body()).containsPattern("<select id=\"site.region\"").contains("<option value=\"W\">W</option>");
+        assertThat(Pool.get("/fill?code=as-nzs-1170-2/2021").body()).doesNotContain("<option value=\"W\">");
+        Map<String, String> form = sign();
+        form.putAll(Map.of("basis.code", "as-nzs-1170-2/2021", "drawn-for", "as-nzs-1170-2/2021", "site.region", "A2"));
+        assertThat(Pool.fields(send(form, "code").body())).containsEntry("site.region", "A2");
+    }
+
+    @Test
     void a_region_with_its_return_period_stands_in_place_of_the_speed() {
         Map<String, String> form = sign();
         form.putAll(Map.of("basis.code", "as-nzs-1170-2/2021", "drawn-for", "as-nzs-1170-2/2021", "site.basic-speed", "", "site.averaging", "", "site.terrain", "unknown",
