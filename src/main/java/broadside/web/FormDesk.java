@@ -206,7 +206,7 @@ final class FormDesk {
     }
 
     private void show(Context ctx, int status, Draft draft, List<Problem> problems, String note) {
-        FormProblems listed = new FormProblems(problems);
+        FormProblems listed = new FormProblems(problems.stream().map(p -> CodeName.told(p, assessor.codes().code(draft.answers().get("basis.code")))).toList());
         FormLayout layout = new FormLayout(draft.answers(), assessor.codes(), scope, listed, draft.index());
         List<FormView.Part> parts = layout.parts();
         JsonNode job = forms.read(draft.answers(), draft.items(), draft.index()).job();
@@ -220,7 +220,7 @@ final class FormDesk {
 
     private static FormView.Units units(Draft draft) {
         boolean us = FormReader.units(draft.answers()) == Units.US;
-        return new FormView.Units(us ? "feet and inches, mph and lb" : "metres, m/s and kg",
+        return new FormView.Units(us ? "feet and inches, mph and lb, and inches for a thickness or the gap to a wall" : "metres, m/s and kg, and mm for a thickness or the gap to a wall",
             us ? new Button("units:metric", "Change to metres", "") : new Button("units:us", "Change to feet and inches", ""));
     }
 

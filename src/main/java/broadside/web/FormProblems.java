@@ -12,6 +12,9 @@ final class FormProblems {
 
     private static final String VERBS = "(is|are|must|has|have|stands|of|gives|leave|leaves|names) .*";
 
+    /** A question that cannot be the subject of a sentence. */
+    private static final String CLAUSE = "(From|How|More|Once|What|Who|Why) .*";
+
     /** What is said where "What is it fixed to?" was not answered. */
     static final String HELD_BY = "choose what it is fixed to";
 
@@ -77,7 +80,7 @@ final class FormProblems {
 
     private static String joined(String label, String text) {
         boolean verb = text.matches("(?s)" + VERBS);
-        if (label.endsWith("?")) {
+        if (label.endsWith("?") || verb && label.matches(CLAUSE)) {
             return verb ? "The answer to \"" + label + "\" " + text : text.substring(0, 1).toUpperCase(Locale.ROOT) + text.substring(1);
         }
         return verb ? label + " " + text : label + ": " + text;

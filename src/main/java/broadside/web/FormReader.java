@@ -261,7 +261,12 @@ final class FormReader {
         }
 
         private String missing(Field field) {
-            return "is missing: " + field.dimension().map(d -> "type it like " + d.example(units))
+            boolean roughness = field.name().equals("terrain") && code.filter(c -> c.terms().byRoughness()).isPresent();
+            return "is missing: " + (roughness ? "type a roughness length such as 0.05 m" : example(field));
+        }
+
+        private String example(Field field) {
+            return field.dimension().map(d -> "type it like " + d.example(units))
                 .orElse(field.holds() == Field.Holds.WHOLE ? "type a whole number like 2"
                     : field.choices().isEmpty() && !terrainClass(field) ? "type it here" : "choose one of those below");
         }

@@ -73,9 +73,14 @@ public final class FormView {
         }
     }
 
-    /** One question. {@code label} holds the unit in words; null stands for an attribute that is left out. */
+    /** One question; one that is not {@code optional} has to be answered. {@code label} holds the unit in words; null stands for an attribute that is left out. */
     public record Input(String kind, String id, String label, String unit, String hint, String typed, String reading, String problem,
-                        List<Button> readings, List<Choice> choices, String keypad, String width) {
+                        List<Button> readings, List<Choice> choices, String keypad, String width, boolean optional) {
+
+        /** The same question, said to be one that may stay empty. */
+        Input asOptional() {
+            return new Input(kind, id, label, unit, hint, typed, reading, problem, readings, choices, keypad, width, true);
+        }
 
         public boolean wrong() {
             return !problem.isEmpty();

@@ -13,6 +13,8 @@ import broadside.web.FormView.Bit;
 import broadside.web.FormView.Button;
 import broadside.web.FormView.Choice;
 import broadside.web.FormView.Input;
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -26,6 +28,12 @@ final class Questions {
 
     /** Lengths that may be below zero: no keypad without a minus. */
     private static final Set<String> SIGNED = Set.of("offset", "distance-from-crest", "altitude", "ground-elevation");
+
+    /** Answers that a job file may leave out, and the form only where something else stands for them. */
+    private static final Set<String> NEEDED = Set.of("held-by", "basic-speed", "averaging");
+
+    /** Units of the boxes for thicknesses and gaps. */
+    private static final Set<String> SMALL_UNITS = Set.of("mm", "in");
 
     /** Questions whose few answers are written out one below the other. */
     private static final Set<String> RADIOS = Set.of("held-by", "ground-nearby", "feature", "backing", "duration-rule");
@@ -115,6 +123,21 @@ final class Questions {
     }
 
     private Input input(Shape shape, Field field, String path) {
+        Input input = made(shape, field, path);
+        return field.required() || NEEDED.contains(field.name()) || neededBeside(shape.name() + "." + field.name()) ? input : input.asOptional();
+    }
+
+    /** Whether an answer is needed with some other answers, so that it is not said to be optional. */
+    private boolean neededBeside(String name) {
+        return switch (name) {
+            case "posts.spacing", "brackets.spacing" -> true;
+            case "site.altitude" -> code.filter(c -> c.edition().has("altitude-factor")).isPresent();
+            case "site.return-period" -> takes("region");
+            default -> false;
+        };
+    }
+
+    private Input made(Shape shape, Field field, String path) {
         Wording words = Wording.of(shape.name(), field);
         Map<String, String> listed = shape.name().equals("site") ? code.map(c -> TableChoices.of(c.edition(), field.name())).orElse(Map.of()) : Map.of();
         if (path.equals("site.terrain")) {
@@ -159,13 +182,16 @@ final class Questions {
             reading(answers.get(path), dimension, unit), List.of(), letters ? null : "decimal", "short");
     }
 
-    /** The value read, in both systems; empty when there is none yet. */
+    /** The value read, in both systems; empty when there is none yet. In a box for thicknesses and gaps less than 1 mm is asked about. */
     static String reading(String typed, Dimension dimension, Unit unit) {
         if (typed.isBlank() || !(Typed.read(typed, dimension, unit) instanceof Reading.Value value)) {
             return "";
         }
-        String both = dimension == Dimension.PERIOD ? "" : "= " + Show.both(Typed.quantity(dimension, value.si(), typed));
-        return value.warnings().isEmpty() ? both : both + ". " + String.join(". ", value.warnings());
+        double size = Math.abs(value.si());
+        boolean tiny = SMALL_UNITS.contains(unit.symbol()) && size > 0 && size < 0.001;
+        String both = tiny ? "= " + new BigDecimal(value.si() * 1000).round(new MathContext(3)).stripTrailingZeros().toPlainString() + " mm: is that meant?"
+            : dimension == Dimension.PERIOD ? "" : "= " + Show.both(Typed.quantity(dimension, value.si(), typed));
+        return value.warnings().isEmpty() ? both : both + (tiny ? " " : ". ") + String.join(". ", value.warnings());
     }
 
     private Input made(String kind, String path, String label, String unit, String hint, String reading, List<Choice> choices, String keypad,
@@ -174,11 +200,11 @@ final class Questions {
         labels.put(path, label.replaceAll(", in [^,]*$", ""));
         List<Button> readings = problems.options(path).stream().map(o -> new Button("set:" + path + "=" + o, o, path)).toList();
         return new Input(kind, path, label, unit, hint, answers.get(path), reading, problems.sentence(path, labels.get(path)), readings, choices,
-            keypad, width);
+            keypad, width, false);
     }
 
     private String hint(Field field, Wording words) {
-        return field.name().equals("averaging") ? code.map(c -> c.edition().property("title") + " defines it as a " + c.terms().averaging().words()).orElse(words.hint()) : words.hint();
+        return field.name().equals("averaging") ? code.map(c -> CodeName.of(c) + " defines it as a " + c.terms().averaging().words()).orElse(words.hint()) : words.hint();
     }
 
     private List<Choice> terrains(String path) {

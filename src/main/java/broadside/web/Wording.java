@@ -62,7 +62,7 @@ record Wording(String label, String hint, String metric, String us) {
         site.direction-multiplier|Direction multiplier|M_d, 1 where nothing else is known
         site.shielding-multiplier|Shielding multiplier|M_s, 1 where nothing stands around that will stay
         site.climate-multiplier|Climate change multiplier|M_c
-        topography.feature|What the ground does near by|
+        topography.feature|Shape of the ground near by|
         topography.height|Height of the slope|From its foot to its crest
         topography.upwind-length|Length of the slope|In plan, from the foot to the crest on the windward side
         topography.downwind-length|How long the slope behind the crest is|In plan
@@ -129,7 +129,7 @@ record Wording(String label, String hint, String metric, String us) {
         projecting-sign.depth|Thickness|Of the board or box|mm|in
         projecting-sign.mass|Mass|Of the sign with its brackets
         brackets.count|Number of brackets|One above the other
-        brackets.spacing|Distance between brackets|From middle to middle
+        brackets.spacing|Distance between brackets|From middle to middle; empty for one bracket
         spanned-banner.width|Length of the banner|From one end to the other
         spanned-banner.height|Height|Of the fabric
         spanned-banner.bottom|Height of its lower edge|Above the ground
@@ -137,7 +137,7 @@ record Wording(String label, String hint, String metric, String us) {
         spanned-banner.solidity|Closed part|1 for closed fabric, 0.8 when a fifth of it is open; slits do not count
         spanned-banner.mass-per-area|Mass of the fabric||g/m2|lb/ft2
         posts.count|Number of posts|
-        posts.spacing|Distance between posts|From middle to middle
+        posts.spacing|Distance between posts|From middle to middle; empty for one post
         posts.section|Section of a post|Such as CHS 114.3x5
         posts.grade|Grade of the posts|Such as S355
         posts.shape|Outline of a post|

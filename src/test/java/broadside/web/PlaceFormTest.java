@@ -10,6 +10,8 @@ import broadside.codes.WindCode;
 import broadside.job.JobText;
 import broadside.job.Shapes;
 import broadside.panel.Panel;
+import broadside.quantity.Dimension;
+import broadside.quantity.Unit;
 import broadside.site.Averaging;
 import broadside.site.Site;
 import broadside.table.TableLibrary;
@@ -153,6 +155,38 @@ class PlaceFormTest {
     }
 
     @Test
+    void what_may_stay_empty_is_marked() {
+        String page = Pool.plain(Pool.get("/fill?kind=post-sign&code=en-1991-1-4/2005-de").body());
+        assertThat(page).contains("Answers marked (optional) may stay empty", ">Mark</label>", ">Wind zone (optional)</label>", ">Width, in m</label>", ">Thickness, in mm (optional)</label>",
+            ">Height above the sea, in m (optional)</label>", ">Distance between posts, in m</label>", ">Basic wind speed, in m/s</label>");
+        assertThat(Pool.get("/fill?code=en-1991-1-4/2005-uk").body()).contains(">Height above the sea, in m</label>");
+        assertThat(page).doesNotContain("What is it fixed to? (optional)", "*</label>");
+    }
+
+    @Test
+    void sentences_hold_the_short_name_of_the_code_and_read_well() {
+        assertThat(Pool.plain(Pool.get("/fill?code=en-1991-1-4/2005-de").body())).contains(">EN 1991-1-4:2005 + A1:2010 defines it as a 10 min mean<");
+        Map<String, String> form = sign();
+        form.putAll(Map.of("site.terrain", "C", "site.ground-nearby", "hill"));
+        assertThat(Pool.plain(send(form, "assess").body())).contains("Shape of the ground near by is missing: choose one of those below",
+            "The answer to \"From the crest to the item\" is missing: type it like");
+        form.put("site.ground-nearby", "flat");
+        assertThat(Pool.plain(send(form, "assess").body())).contains("is not a terrain class of EN 1991-1-4:2005 + A1:2010; it has 0, I,");
+    }
+
+    @Test
+    void less_than_a_millimetre_is_asked_about() {
+        assertThat(Questions.reading("0.1", Dimension.LENGTH, Unit.of(Dimension.LENGTH, "mm").orElseThrow())).isEqualTo("= 0.1 mm: is that meant?");
+        assertThat(Questions.reading("0.0002 m", Dimension.LENGTH, Unit.of(Dimension.LENGTH, "in").orElseThrow())).isEqualTo("= 0.2 mm: is that meant?");
+        assertThat(Questions.reading("0.1", Dimension.LENGTH, Unit.of(Dimension.LENGTH, "in").orElseThrow())).doesNotContain("meant");
+        assertThat(Questions.reading("0.0002", Dimension.LENGTH, Unit.of(Dimension.LENGTH, "m").orElseThrow())).doesNotContain("meant");
+        assertThat(Questions.reading("0", Dimension.LENGTH, Unit.of(Dimension.LENGTH, "mm").orElseThrow())).doesNotContain("meant");
+        Map<String, String> form = sign();
+        form.put("items[0].boards[0].depth", "0.1");
+        assertThat(Pool.plain(send(form, "code").body())).contains(">= 0.1 mm: is that meant?</p>", "and mm for a thickness or the gap to a wall");
+    }
+
+    @Test
     void a_region_with_its_return_period_stands_in_place_of_the_speed() {
         Map<String, String> form = sign();
         form.putAll(Map.of("basis.code", "as-nzs-1170-2/2021", "drawn-for", "as-nzs-1170-2/2021", "site.basic-speed", "", "site.averaging", "", "site.terrain", "unknown",
@@ -174,7 +208,7 @@ class PlaceFormTest {
         form.put("site.terrain", "Unknown");
         assertThat(job(form).path("site").path("terrain").stringValue()).isEqualTo("unknown");
         form.put("site.terrain", "");
-        assertThat(Pool.plain(send(form, "assess").body())).contains("Roughness length of the ground on the windward side is missing: type it here");
+        assertThat(Pool.plain(send(form, "assess").body())).contains("Roughness length of the ground on the windward side is missing: type a roughness length such as 0.05 m");
         form.put("site.terrain", "rough");
         assertThat(send(form, "assess").statusCode()).isEqualTo(422);
     }
