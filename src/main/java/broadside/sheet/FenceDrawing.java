@@ -52,7 +52,7 @@ final class FenceDrawing {
         double ground = front.y(0);
         double from = front.x(0);
         double to = last.x(fence.length());
-        front.text((from + to) / 2, 12, "elevation, seen from the front", Anchor.MIDDLE, Ink.BLACK);
+        front.text((from + to) / 2, 12, ItemDrawing.elevation(loads), Anchor.MIDDLE, Ink.BLACK);
         stretches.forEach(this::draw);
         for (double end : new double[] {from, to}) {
             front.help(end, front.y(height), end, 34);
@@ -139,7 +139,7 @@ final class FenceDrawing {
         }
         brace.ifPresent(lever -> block(side, lever));
         blocks.forEach(b -> block(side, b[0]));
-        loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(0, c.height(), "F " + format.force(c.force()) + " in all", format.length(c.height())));
+        loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(0, c.height(), "F " + format.force(c.force()) + " in all", ItemDrawing.otherCase(loads.get()), format.length(c.height())));
         double below = levers(side, blocks, ground);
         double list = carries(front, startY + 24);
         double bar = ItemDrawing.barLength(SIDE * 2 / scale, format.units());

@@ -34,7 +34,7 @@ final class HoardingDrawing {
         double scale = Math.min((ItemDrawing.WIDTH - 2 * MARGIN) / length, 120 / top);
         double ground = 58 + top * scale;
         Canvas front = new Canvas(MARGIN + ((ItemDrawing.WIDTH - 2 * MARGIN) - length * scale) / 2, ground, scale);
-        front.text(ItemDrawing.WIDTH / 2, 12, "elevation, seen from the front", Anchor.MIDDLE, Ink.BLACK);
+        front.text(ItemDrawing.WIDTH / 2, 12, ItemDrawing.elevation(loads), Anchor.MIDDLE, Ink.BLACK);
         front.ground(front.x(0) - 20, front.x(length) + 20);
         for (Panel panel : hoarding.panels()) {
             front.box(left(panel), panel.clearance(), panel.width(), panel.height(), Canvas.THICK, Fill.PAPER);
@@ -106,7 +106,7 @@ final class HoardingDrawing {
         double[][] panels = {{hoarding.clearance().metres(), hoarding.height().metres(), 0}};
         SideView view = new SideView(side, ItemDrawing.WIDTH / 2 - 110, ItemDrawing.WIDTH / 2 + 110, top, 0);
         view.draw(panels);
-        loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(0, c.height(), "F " + format.force(c.force()) + " in all",
+        loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(0, c.height(), "F " + format.force(c.force()) + " in all", ItemDrawing.otherCase(loads.get()),
             format.length(c.height())));
         double dim = ItemDrawing.WIDTH / 2 + 80;
         side.help(side.x(0.06), side.y(top), dim + 4, side.y(top));

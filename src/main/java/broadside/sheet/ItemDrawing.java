@@ -2,6 +2,7 @@ package broadside.sheet;
 
 import broadside.action.CaseAction;
 import broadside.assess.Loads;
+import broadside.codes.LoadCase.Windward;
 import broadside.panel.Item;
 import broadside.quantity.Units;
 import java.util.Optional;
@@ -26,11 +27,37 @@ public final class ItemDrawing {
             + format.length(l.governs("base-moment").height()) + " above the ground.").orElse(".");
     }
 
-    /** The case whose zones are drawn: the one that governs the moment, or the first with zones where that one has none. */
+    /** The case whose zones are drawn: the one that governs the moment, or the first with zones where that one has none; met from the left end where both ends are alike. */
     static CaseAction shown(Loads loads) {
         CaseAction governing = loads.governs("base-moment");
-        return zoned(governing) ? governing
-            : loads.cases().stream().filter(c -> c.direction().equals("front") && zoned(c)).findFirst().orElse(governing);
+        return fromLeft(loads, zoned(governing) ? governing
+            : loads.cases().stream().filter(c -> c.direction().equals("front") && zoned(c)).findFirst().orElse(governing));
+    }
+
+    /** The same case met from the left end, where that end does no less; posts and panels are counted from the left too. */
+    static CaseAction fromLeft(Loads loads, CaseAction action) {
+        return loads.cases().stream().filter(c -> c.direction().equals(action.direction()) && c.windward() == Windward.LEFT && alike(c, action)
+            && equal(c.force(), action.force()) && equal(c.baseMoment(), action.baseMoment()) && equal(Math.abs(c.torsion()), Math.abs(action.torsion())))
+            .findFirst().orElse(action);
+    }
+
+    /** "case B" where the force of the side view is not that of the case whose zones are drawn, else empty. */
+    static String otherCase(Loads loads) {
+        CaseAction governing = loads.governs("base-moment");
+        return alike(governing, shown(loads)) ? "" : Format.caseWords(governing.name());
+    }
+
+    /** Title of the elevation; it names the case of the zones where the force beside it is of another. */
+    static String elevation(Optional<Loads> loads) {
+        return loads.filter(l -> !otherCase(l).isEmpty()).map(l -> "elevation, zones of " + Format.caseWords(shown(l).name())).orElse("elevation, seen from the front");
+    }
+
+    private static boolean alike(CaseAction one, CaseAction other) {
+        return one.name().equals(other.name()) && one.state().equals(other.state());
+    }
+
+    private static boolean equal(double one, double other) {
+        return Math.abs(one - other) <= 1e-9 * Math.max(Math.abs(one), Math.abs(other));
     }
 
     private static boolean zoned(CaseAction action) {

@@ -29,15 +29,23 @@ record SideView(Canvas view, double left, double right, double top, double behin
         view.arrow(left, windY, left + 34, windY, Canvas.THIN);
     }
 
-    /** The force at its height, with its label and that height as text. */
-    void force(double depth, double height, String label, String text) {
+    /** The force at its height, with its label, its case where it has to be told, and that height as text. */
+    void force(double depth, double height, String label, String ofCase, String text) {
         double tip = view.x(-POST) - Math.max(3, depth * view.scale());
         double y = view.y(height);
         view.arrow(tip - 40, y, tip - 1, y, 2);
         view.boldText(tip - 6, y - 6, label, Anchor.END, Ink.ACCENT);
+        if (!ofCase.isEmpty()) {
+            view.boldText(tip - 6, y + 12, ofCase, Anchor.END, Ink.ACCENT);
+        }
         double dim = Math.max(view.x(POST), view.x(behind)) + 26;
         view.help(view.x(POST), y, dim + 4, y);
         view.line(dim, y, dim, view.y(0), Canvas.THIN, Ink.BLACK, false);
-        view.text(dim + 4, (y + view.y(0)) / 2 + 3, text, Anchor.START, Ink.BLACK);
+        double middle = (y + view.y(0)) / 2;
+        if (dim + 4 + Canvas.width(text) > ItemDrawing.WIDTH) {
+            view.turnedText(dim + 11, Math.min(middle, view.y(0) - Canvas.width(text) / 2), text);
+        } else {
+            view.text(dim + 4, middle + 3, text, Anchor.START, Ink.BLACK);
+        }
     }
 }

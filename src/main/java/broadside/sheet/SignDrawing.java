@@ -12,12 +12,16 @@ import broadside.sheet.Drawing.Ink;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
+import java.util.stream.Stream;
 
 /** Elevation and side view of a sign on posts. */
 final class SignDrawing {
 
     private static final double TALLEST = 122;
     private static final double ROOM = 220;
+    /** Where the words of the side view begin. */
+    private static final double BESIDE = 323;
 
     private final PostSign sign;
     private final Optional<Loads> loads;
@@ -39,10 +43,10 @@ final class SignDrawing {
     }
 
     Drawing make() {
-        double scale = Math.min(TALLEST / top, ROOM / (right - left));
+        double scale = scale();
         double tall = top * scale;
         double ground = 46 + tall;
-        double margin = sign.boards().size() == 1 ? 78 : 110;
+        double margin = margin();
         Canvas front = new Canvas(margin - left * scale, ground, scale);
         front.ground(margin - 30, margin + (right - left) * scale + 30);
         posts(front);
@@ -53,9 +57,27 @@ final class SignDrawing {
         side(side);
         double bar = ItemDrawing.barLength(right - left, format.units());
         front.scaleBar(margin, ground + 34, bar, ItemDrawing.barText(bar, format));
-        front.text(front.x((left + right) / 2), 12, "elevation, seen from the front", Anchor.MIDDLE, Ink.BLACK);
+        front.text(front.x((left + right) / 2), 12, ItemDrawing.elevation(loads), Anchor.MIDDLE, Ink.BLACK);
         front.text(ItemDrawing.WIDTH - 78, 12, "side view", Anchor.MIDDLE, Ink.BLACK);
         return new Drawing(ItemDrawing.WIDTH, ground + 44, front.shapes());
+    }
+
+    /** Room on the left for the dimensions upward, points. */
+    private double margin() {
+        double widest = sign.boards().stream().flatMap(b -> Stream.of(b.height().typed(), b.clearance().typed())).mapToDouble(Canvas::width).max().orElseThrow();
+        return sign.boards().size() == 1 ? Math.max(78, 26 + widest) : Math.max(98, 46 + widest);
+    }
+
+    /** Points for each metre: the boards leave room for the side view, and several boards for their widths beside them. */
+    private double scale() {
+        double scale = TALLEST / top;
+        if (sign.boards().size() == 1) {
+            return Math.min(scale, Math.min(ROOM, BESIDE - 25 - margin()) / (right - left));
+        }
+        for (Board board : sign.boards()) {
+            scale = Math.min(scale, Math.max(40, BESIDE - 5 - margin() - Canvas.width(wide(board))) / (edge(board) - left));
+        }
+        return scale;
     }
 
     private void posts(Canvas front) {
@@ -82,10 +104,11 @@ final class SignDrawing {
             return;
         }
         CaseAction governing = ItemDrawing.shown(loads.get());
+        CaseAction turning = ItemDrawing.fromLeft(loads.get(), loads.get().governs("torsion"));
         double most = governing.zones().stream().flatMap(p -> p.zones().stream()).mapToDouble(ZonePressure::pressure).max().orElseThrow();
-        for (int i = 0; i < governing.zones().size(); i++) {
-            PanelZones panel = governing.zones().get(i);
+        for (int i = 0; i < sign.boards().size(); i++) {
             Board board = sign.boards().get(i);
+            PanelZones panel = zones(governing, i);
             for (ZonePressure zone : panel.zones()) {
                 if (board.shape() == Board.Shape.RECTANGLE) {
                     front.hatch(panel.left() + zone.from(), board.clearance().metres(), zone.width(), board.height().metres(), 5 * most / zone.pressure());
@@ -93,29 +116,51 @@ final class SignDrawing {
                 if (panel.zones().size() > 1) {
                     front.line(front.x(panel.left() + zone.from()), front.y(board.clearance().metres()), front.x(panel.left() + zone.from()),
                         front.y(board.clearance().metres() + board.height().metres()), Canvas.THIN, Ink.BLACK, true);
-                    String name = HoardingDrawing.shortName(zone.zone());
-                    boolean narrow = zone.width() * front.scale() < 5.2 * name.length();
-                    front.boldText(front.x(panel.left() + (zone.from() + zone.to()) / 2), front.y(board.clearance().metres()) + (narrow ? 11 : -4),
-                        name, Anchor.MIDDLE, Ink.BLACK);
                 }
             }
-        }
-        CaseAction turning = loads.get().governs("torsion");
-        double beside = sign.boards().size() == 1 ? front.x(right) + 6 : front.x(turning.side()) + 8;
-        front.target(turning.side(), turning.height(), beside, clear(front, front.y(turning.height()) - 5), "F of " + Format.caseName(turning.name()));
-    }
-
-    /** The height on paper nearest to the one wanted at which a label does not stand on the width of one of several boards. */
-    private double clear(Canvas front, double wanted) {
-        List<Double> taken = sign.boards().size() == 1 ? List.of()
-            : sign.boards().stream().map(b -> front.y(b.clearance().metres() + b.height().metres() / 2) + 3).toList();
-        for (int i = 0; i < 60; i++) {
-            double y = wanted + (i % 2 == 0 ? -i : i) / 2.0;
-            if (taken.stream().allMatch(t -> Math.abs(t - y) >= 10)) {
-                return y;
+            if (panel.zones().size() > 1) {
+                new ZoneNames(front, board, turning).write(panel);
             }
         }
-        return wanted;
+        force(front, turning);
+    }
+
+    /** The zones of one board, from its left edge: its own, or what lies on it of the panel that it is part of where boards close together count as one. */
+    private PanelZones zones(CaseAction action, int index) {
+        Optional<PanelZones> own = action.zones().stream().filter(p -> p.part().equals(sign.part(index))).findFirst();
+        Board board = sign.boards().get(index);
+        double from = board.offset().metres() - board.width().metres() / 2;
+        double to = from + board.width().metres();
+        List<String> parts = IntStream.range(0, sign.boards().size()).mapToObj(sign::part).toList();
+        return own.or(() -> action.zones().stream().filter(p -> !parts.contains(p.part()) && p.left() <= from + 1e-6
+            && p.left() + p.zones().get(p.zones().size() - 1).to() >= to - 1e-6).findFirst().map(p -> onBoard(p, from, to)))
+            .orElseGet(() -> new PanelZones(sign.part(index), from, List.of(), List.of()));
+    }
+
+    private static PanelZones onBoard(PanelZones panel, double from, double to) {
+        List<ZonePressure> zones = new ArrayList<>();
+        for (ZonePressure zone : panel.zones()) {
+            double start = Math.max(from, panel.left() + zone.from());
+            double end = Math.min(to, panel.left() + zone.to());
+            if (end > start) {
+                zones.add(new ZonePressure(zone.zone(), zone.symbol(), start - from, end - from, end - start, zone.coefficient(), zone.pressure()));
+            }
+        }
+        return new PanelZones(panel.part(), from, zones, List.of());
+    }
+
+    /** The point at which the force acts; its label stands beside a single board where there is room, else above all boards and dimensions. */
+    private void force(Canvas front, CaseAction turning) {
+        String label = "F, " + Format.caseWords(turning.name());
+        boolean single = sign.boards().size() == 1;
+        if (single && front.x(right) + 6 + Canvas.width(label) < BESIDE) {
+            front.target(turning.side(), turning.height(), front.x(right) + 6, front.y(turning.height()) - 5, label);
+            return;
+        }
+        double above = front.y(top) - (single ? 22 : 11);
+        double at = front.x(turning.side());
+        front.line(at, front.y(turning.height()) - 6, at, above + 3, Canvas.THIN, Ink.ACCENT, false);
+        front.target(turning.side(), turning.height(), Math.max(4, at - label.length() * 2.6), above, label);
     }
 
     private void dimensions(Canvas front) {
@@ -139,22 +184,37 @@ final class SignDrawing {
             double w = board.width().metres();
             double at = boards.size() == 1 ? front.y(y + h) - 8 : front.y(y + h) + 11;
             double middle = board.offset().metres();
-            String aside = middle == 0 ? "" : middle > 0 ? ", " + board.offset().typed() + " to the right" : ", " + board.offset().typed().replace("-", "")
-                + " to the left";
             if (boards.size() == 1) {
-                front.across(middle - w / 2, middle + w / 2, at, board.width().typed() + aside);
+                front.across(middle - w / 2, middle + w / 2, at, board.width().typed() + aside(board));
             } else {
-                front.text(front.x(middle + w / 2) + 5, front.y(y + h / 2) + 3, board.width().typed() + " wide" + aside, Anchor.START, Ink.BLACK);
+                front.text(front.x(edge(board)) + 5, front.y(y + h / 2) + 3, wide(board), Anchor.START, Ink.BLACK);
             }
         }
         if (boards.size() > 1) {
-            front.help(dim - 42, front.y(top), dim, front.y(top));
-            front.upward(0, top, dim - 38, format.length(top));
+            double whole = 24;
+            front.help(whole - 4, front.y(top), dim, front.y(top));
+            front.upwardPaper(front.y(0), front.y(top), whole);
+            front.turnedText(whole - 5, front.y(top / 2), format.length(top));
         }
         List<Double> posts = sign.posts().positions();
         if (posts.size() > 1) {
             front.across(posts.get(0), posts.get(1), front.y(0) + 20, sign.posts().spacing().orElseThrow().typed());
         }
+    }
+
+    /** The right edge of a board, or of the last post where that stands out beside it, m. */
+    private double edge(Board board) {
+        List<Double> posts = sign.posts().positions();
+        return Math.max(board.offset().metres() + board.width().metres() / 2, posts.get(posts.size() - 1) + 0.05);
+    }
+
+    private static String wide(Board board) {
+        return board.width().typed() + " wide" + aside(board).replace(" to the ", " ");
+    }
+
+    private static String aside(Board board) {
+        double middle = board.offset().metres();
+        return middle == 0 ? "" : ", " + board.offset().typed().replace("-", "") + (middle > 0 ? " to the right" : " to the left");
     }
 
     private void side(Canvas side) {
@@ -163,6 +223,6 @@ final class SignDrawing {
         SideView view = new SideView(side, ItemDrawing.WIDTH - 150, ItemDrawing.WIDTH - 8, top, 0);
         view.draw(panels);
         loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(panels[0][2], c.height(), "F " + format.force(c.force()),
-            format.length(c.height())));
+            ItemDrawing.otherCase(loads.get()), format.length(c.height())));
     }
 }

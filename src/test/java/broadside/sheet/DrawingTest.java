@@ -50,9 +50,17 @@ class DrawingTest {
     private static final String BLADE = "'kind':'projecting-sign','projection':'0.9 m','height':'2.4 m','bottom':'3 m','gap':'0.1 m','brackets':{'count':2,'spacing':'1.8 m'}";
     private static final String BANNER = "'kind':'spanned-banner','width':'10 m','height':'1.2 m','bottom':'5.5 m','sag':'0.5 m'";
 
+    private static final String BOARD = "{'width':'3 m','height':'2 m','clearance':'2.5 m'}";
+    private static final String SIGN = "'kind':'post-sign','boards':[" + BOARD + "],'posts':{'count':2,'spacing':'1.6 m'}";
+    private static final String STACK = SIGN.replace(BOARD, "{'mark':'a','width':'3 m','height':'0.6 m','clearance':'3.2 m'},"
+        + "{'mark':'b','width':'2 m','height':'0.6 m','clearance':'2.5 m'},{'mark':'c','width':'1.2 m','height':'0.4 m','clearance':'2 m','offset':'0.3 m'}");
+    private static final String US_STACK = STACK.replace("'3 m'", "'9 ft 11 1/4 in'").replace("'3.2 m'", "'10 ft 11 1/4 in'").replace("'0.6 m'", "'1 ft 11 1/2 in'")
+        .replace("'2.5 m'", "'8 ft 2 1/2 in'").replace("'2 m'", "'6 ft 6 1/2 in'").replace("'0.3 m'", "'-1 ft 1 1/4 in'");
+
     /** Sizes that are usual, and sizes at which something could leave the paper. */
     static List<String> items() {
-        return List.of(FENCE, FENCE + CARRIED, FENCE.replace(":40", ":1") + CARRIED, FENCE.replace(":40", ":5"), FENCE.replace(":40", ":1000").replace("3.45 m", "0.5 m"),
+        return List.of(SIGN, SIGN.replace("'3 m'", "'23 ft 11 1/4 in'").replace("'2 m'", "'6 ft 11 1/4 in'").replace("'2.5 m'", "'8 ft 2 1/2 in'"), STACK, US_STACK,
+            FENCE, FENCE + CARRIED, FENCE.replace(":40", ":1") + CARRIED, FENCE.replace(":40", ":5"), FENCE.replace(":40", ":1000").replace("3.45 m", "0.5 m"),
             FENCE.replace("3.45 m", "11 ft 4 in").replace("'2 m'", "'6 ft 6 in'") + CARRIED.replace("1.2 m", "3 ft 11 1/4 in"),
             FENCE + CARRIED.replace("1.2 m", "15 m"), FENCE.replace("'2 m'", "'0.4 m'"),
             FACADE, FACADE.replace("4 m", "0.3 m").replace("2 m", "0.3 m").replace("1.5 m", "41 m").replace("20 m", "60 m"),
@@ -133,7 +141,8 @@ class DrawingTest {
     private static double[] box(Text text) {
         double wide = text.text().length() * (text.bold() ? 5.2 : 4.8);
         double left = text.anchor() == Anchor.START ? text.x() : text.anchor() == Anchor.END ? text.x() - wide : text.x() - wide / 2;
-        return new double[] {left, text.y() - 6.5, left + wide, text.y() + 1};
+        return text.turn() == 90 ? new double[] {text.x() - 6.5, text.y() - wide / 2, text.x() + 1, text.y() + wide / 2}
+            : new double[] {left, text.y() - 6.5, left + wide, text.y() + 1};
     }
 
     private static List<String> touching(Drawing drawing) {
@@ -154,6 +163,39 @@ class DrawingTest {
     private static List<String> texts(String item, String head) {
         ItemResult result = assessed(item, head);
         return ItemDrawing.of(result.item(), zoned(result).or(result::loads), Units.METRIC).shapes().stream().filter(Text.class::isInstance).map(s -> ((Text) s).text()).toList();
+    }
+
+    @Test
+    void names_on_stacked_boards_stand_inside_them_and_the_force_above() {
+        ItemResult result = assessed(STACK, US.replace("\"units\":\"us\",", ""));
+        Drawing drawing = ItemDrawing.of(result.item(), result.loads(), Units.METRIC);
+        List<double[]> boards = drawing.shapes().stream().filter(s -> s instanceof Outline o && o.weight() == 1.4).map(s -> ((Outline) s).points())
+            .map(p -> new double[] {p.get(0), p.get(5), p.get(2), p.get(1)}).toList();
+        List<Text> names = drawing.shapes().stream().filter(s -> s instanceof Text t && t.bold() && t.text().matches("(\\d?s-\\d+s|0-s)")).map(Text.class::cast).toList();
+        assertThat(names).hasSizeGreaterThan(1).allSatisfy(name -> {
+            double[] box = box(name);
+            assertThat(boards).anyMatch(b -> b[0] <= box[0] && b[1] <= box[1] && box[2] <= b[2] && box[3] <= b[3]);
+        });
+        Text force = drawing.shapes().stream().filter(s -> s instanceof Text t && t.text().startsWith("F, case ")).map(Text.class::cast).findFirst().orElseThrow();
+        assertThat(force.y()).isLessThan(boards.stream().mapToDouble(b -> b[1]).min().orElseThrow());
+        assertThat(names).extracting(Text::text).contains("0-s");
+        assertThat(texts(STACK, EN)).contains("F, case eccentric");
+    }
+
+    @Test
+    void a_force_of_another_case_than_the_zones_says_so() {
+        List<String> texts = texts(STACK, US);
+        assertThat(texts).contains("elevation, zones of case C").anyMatch(t -> t.matches("case [AB]"));
+        assertThat(texts(SIGN, EN)).contains("elevation, seen from the front").noneMatch(t -> t.startsWith("case "));
+    }
+
+    @Test
+    void a_line_with_ends_alike_is_met_from_the_left() {
+        Loads loads = assessed(FENCE, EN).loads().orElseThrow();
+        assertThat(ItemDrawing.shown(loads).windward()).isEqualTo(Windward.LEFT);
+        List<ZonePressure> zones = ItemDrawing.shown(loads).zones().get(0).zones();
+        assertThat(zones.get(0).zone()).isEqualTo("A");
+        assertThat(zones.get(0).pressure()).isEqualTo(zones.stream().mapToDouble(ZonePressure::pressure).max().orElseThrow());
     }
 
     @Test
