@@ -4,6 +4,7 @@ import broadside.assess.BadJob;
 import broadside.codes.CodeLibrary;
 import broadside.job.JobReader;
 import broadside.job.JobText;
+import broadside.table.Edition;
 import broadside.table.TableFiles;
 import broadside.web.FormView.Choice;
 import io.javalin.http.Context;
@@ -23,8 +24,8 @@ final class StartDesk {
     private final FormDesk forms;
     private final Start start;
 
-    /** What the start page shows. */
-    public record Start(List<Choice> codes, List<Kind> kinds, List<Example> examples) { }
+    /** What the start page shows; each code stands before its national values. */
+    public record Start(List<List<Choice>> codes, List<Kind> kinds, List<Example> examples) { }
 
     /** A demo job that ships with the tool. */
     public record Example(String href, String title, String what) { }
@@ -68,15 +69,19 @@ final class StartDesk {
         return bytes.length > PDF.length && java.util.Arrays.equals(bytes, 0, PDF.length, PDF, 0, PDF.length);
     }
 
-    private static List<Choice> codes(CodeLibrary codes) {
-        List<Choice> choices = new ArrayList<>();
+    private static List<List<Choice>> codes(CodeLibrary codes) {
+        List<List<Choice>> groups = new ArrayList<>();
         for (String key : codes.editions()) {
-            choices.add(new Choice("code-" + choices.size(), key, codes.code(key).orElseThrow().edition().property("title"), "", false));
-            for (String overlay : codes.overlays(key)) {
-                choices.add(new Choice("code-" + choices.size(), overlay, codes.code(overlay).orElseThrow().edition().property("title"), "", false));
-            }
+            List<Choice> group = new ArrayList<>(List.of(choice(codes, key, "title")));
+            codes.overlays(key).forEach(overlay -> group.add(choice(codes, overlay, "short")));
+            groups.add(group);
         }
-        return choices;
+        return groups;
+    }
+
+    private static Choice choice(CodeLibrary codes, String key, String name) {
+        Edition edition = codes.code(key).orElseThrow().edition();
+        return new Choice("code-" + key.replace('/', '-'), key, edition.property(edition.hasProperty(name) ? name : "title"), "", false);
     }
 
     private static List<Example> examples(CodeLibrary codes) {
