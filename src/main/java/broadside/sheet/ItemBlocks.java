@@ -157,7 +157,7 @@ final class ItemBlocks {
         return "Drawn to scale, dimensions as typed." + item.loads().map(l -> " Hatched the denser the higher the pressure, zones as in "
             + Format.caseWords(ItemDrawing.shown(l).name()) + Format.end(ItemDrawing.shown(l))
             + (item.item() instanceof PostSign ? "; the circle marks the force of " + Format.caseWords(l.governs("torsion").name())
-                + Format.end(l.governs("torsion")).replace(", force to the", ", towards the") : "") + ".").orElse("");
+                + Format.end(ItemDrawing.fromLeft(l, l.governs("torsion"))).replace(", force to the", ", towards the") : "") + ".").orElse("");
     }
 
     private static Notes notes(ItemResult item, Note.Kind... kinds) {
