@@ -183,6 +183,18 @@ class DrawingTest {
     }
 
     @Test
+    void boards_that_count_as_one_are_hatched_as_such() {
+        ItemResult result = assessed(STACK, EN);
+        assertThat(result.loads().orElseThrow().governs("base-moment").state()).isEqualTo("envelope");
+        Drawing drawing = ItemDrawing.of(result.item(), result.loads(), Units.METRIC);
+        for (Outline board : drawing.shapes().stream().filter(s -> s instanceof Outline o && o.weight() == 1.4).map(Outline.class::cast).limit(3).toList()) {
+            List<Double> p = board.points();
+            assertThat(drawing.shapes()).as("strokes in " + p).anyMatch(s -> s instanceof Line l && l.weight() == 0.4 && l.x1() < l.x2() && l.y1() > l.y2() && l.x1() >= p.get(0) - 0.01
+                && l.x2() <= p.get(2) + 0.01 && l.y1() <= p.get(1) + 0.01 && l.y2() >= p.get(5) - 0.01);
+        }
+    }
+
+    @Test
     void a_force_of_another_case_than_the_zones_says_so() {
         List<String> texts = texts(STACK, US);
         assertThat(texts).contains("elevation, zones of case C").anyMatch(t -> t.matches("case [AB]"));

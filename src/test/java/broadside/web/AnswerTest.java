@@ -33,6 +33,28 @@ class AnswerTest {
     }
 
     @Test
+    void the_start_page_has_national_values_below_their_code_with_short_words() {
+        String page = Pool.plain(Pool.get("/").body());
+        Pool.ASSESSOR.codes().editions().forEach(key -> {
+            int code = page.indexOf("value=\"" + key + "\"");
+            assertThat(code).as(key).isPositive();
+            Pool.ASSESSOR.codes().overlays(key).forEach(overlay -> {
+                assertThat(page.indexOf("value=\"" + overlay + "\"")).isGreaterThan(code);
+                assertThat(page.substring(code)).contains("class=\"choice national\"",
+                    ">" + Pool.ASSESSOR.codes().code(overlay).orElseThrow().edition().property("short") + "</label>");
+            });
+        });
+        assertThat(page.split("type=\"radio\" name=\"code\"").length - 1).isEqualTo(Pool.ASSESSOR.codes().editions().stream()
+            .mapToInt(key -> 1 + Pool.ASSESSOR.codes().overlays(key).size()).sum());
+    }
+
+    @Test
+    void captions_wrap_and_a_wide_drawing_can_be_opened_alone() {
+        String page = Pool.get("/answer?j=" + Token.of(broadside.job.JobText.read(Pool.SIGN.getBytes(java.nio.charset.StandardCharsets.UTF_8)))).body();
+        assertThat(page).contains("<caption><span>", "class=\"sideways\"").containsPattern("<a href=\"/drawing.svg[^\"]*picture=0\">open it alone</a>");
+    }
+
+    @Test
     void a_token_gives_the_job_back() throws Exception {
         JsonNode job = json(Pool.SIGN);
         assertThat(Token.read(Token.of(job))).isEqualTo(job);
