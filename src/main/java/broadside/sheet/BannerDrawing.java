@@ -76,7 +76,8 @@ final class BannerDrawing {
             zones.draw(front, panel, panel.left() + width / 2, 0, width);
         }
         CaseAction worst = loads.get().governs("base-shear");
-        front.target(width / 2 + worst.side(), worst.height(), front.x(width) + TIE + 8, "F of " + Format.caseName(worst.name()));
+        front.target(width / 2 + worst.side(), worst.height(), front.x(width) + TIE + 8, "F,");
+        front.boldText(front.x(width) + TIE + 8, front.y(worst.height()) + 7, Format.caseWords(worst.name()), Anchor.START, Ink.ACCENT);
     }
 
     /** Seen from above: the wind blows upward on the paper, and the banner bows that way. */

@@ -88,7 +88,7 @@ final class BladeDrawing {
             zones.draw(front, panel, panel.left(), gap, out);
         }
         CaseAction turning = loads.get().governs("base-moment");
-        front.target(turning.side(), turning.height(), front.x(out) + 18, "F of " + Format.caseName(turning.name()));
+        front.target(turning.side(), turning.height(), front.x(out) + 18, "F, " + Format.caseWords(turning.name()));
     }
 
     private void dimensions(GroundDrawing hung, List<Double> brackets) {
