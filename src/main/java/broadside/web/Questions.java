@@ -145,7 +145,7 @@ final class Questions {
         }
         if (!listed.isEmpty()) {
             return made("select", path, words.label(), "", field.name().equals("wind-zone") && simplified() ? words.hint() + ZONE_HINT : words.hint(), null,
-                choices(path, "Not said", listed), "", "");
+                choices(path, "Not said", listed), "", "wide");
         }
         if (RADIOS.contains(field.name())) {
             return made("radio", path, words.label(), "", words.hint(), null, written(field, path), "", field.name().equals("held-by") ? "many" : "");
