@@ -29,8 +29,9 @@ public final class FencePanels {
      */
     public static List<Reaction> of(PanelCases line, double length, int count, String what, Trace trace) {
         List<Worst> worst = new ArrayList<>();
+        List<Along> cases = line.cases().stream().map(load -> PanelForce.of(line.panel(), load)).map(of -> new Along(of, of.line())).toList();
         for (int i = 0; i < count; i++) {
-            worst.add(worst(line, i, length));
+            worst.add(worst(cases, i, length));
         }
         Worst most = worst.stream().reduce((a, b) -> b.moment() > a.moment() * (1 + 1e-9) ? b : a).orElseThrow();
         Worst least = worst.stream().reduce((a, b) -> b.moment() < a.moment() * (1 - 1e-9) ? b : a).orElseThrow();
@@ -41,14 +42,15 @@ public final class FencePanels {
         return reactions;
     }
 
-    private static Worst worst(PanelCases line, int index, double length) {
+    /** A case and how it is spread along the line. */
+    private record Along(PanelForce of, LineLoad line) { }
+
+    private static Worst worst(List<Along> cases, int index, double length) {
         Worst worst = null;
-        for (LoadCase load : line.cases()) {
-            PanelForce of = PanelForce.of(line.panel(), load);
-            LineLoad along = of.line();
-            double force = along.force(index * length, (index + 1) * length);
-            if (worst == null || force * of.height() > worst.moment() * (1 + 1e-9)) {
-                worst = new Worst(index, of, force);
+        for (Along each : cases) {
+            double force = each.line().force(index * length, (index + 1) * length);
+            if (worst == null || force * each.of().height() > worst.moment() * (1 + 1e-9)) {
+                worst = new Worst(index, each.of(), force);
             }
         }
         return worst;

@@ -32,8 +32,8 @@ public final class HoardingPosts {
         }
     }
 
-    /** A panel in one case with the place of its left edge, m from the left end of the hoarding. */
-    private record Placed(PanelForce panel, double left, boolean shut) { }
+    /** A panel in one case, its load along it, and the place of its left edge, m from the left end of the hoarding. */
+    private record Placed(PanelForce panel, LineLoad line, double left, boolean shut) { }
 
     /** A post in one case. */
     private record Share(Placed placed, Bay bay, String zone, double from, double to, double force) {
@@ -55,8 +55,10 @@ public final class HoardingPosts {
                                        Trace trace) {
         List<PostAction> posts = new ArrayList<>();
         List<Share> worst = new ArrayList<>();
+        List<List<Placed>> stretches = open.stream().map(stretch -> placed(hoarding, stretch, false)).toList();
+        List<Placed> whole = shut.map(s -> placed(hoarding, s, true)).orElse(List.of());
         for (Bay bay : bays(hoarding, spacing)) {
-            Share most = shares(hoarding, bay, open, shut).stream().max(Comparator.comparingDouble(Share::moment)).orElseThrow();
+            Share most = shares(bay, stretches.get(bay.stretch()), whole).stream().max(Comparator.comparingDouble(Share::moment)).orElseThrow();
             worst.add(most);
             posts.add(new PostAction(posts.size() + 1, bay.at(), most.zone(), most.placed().shut() ? bay.leaf() : 0,
                 Optional.of(bay.to() - bay.from()), "", most.named(), most.force(), most.named(), most.moment()));
@@ -65,15 +67,16 @@ public final class HoardingPosts {
         return posts;
     }
 
-    private static List<Share> shares(Hoarding hoarding, Bay bay, List<PanelCases> open, Optional<PanelCases> shut) {
+    private static List<Share> shares(Bay bay, List<Placed> stretch, List<Placed> whole) {
         List<Share> shares = new ArrayList<>();
-        PanelCases stretch = open.get(bay.stretch());
-        for (LoadCase load : spread(stretch)) {
-            shares.add(share(placed(hoarding, stretch.panel(), load, false), bay, bay.from(), bay.to()));
-        }
-        shut.ifPresent(whole -> spread(whole).forEach(load -> shares.add(share(placed(hoarding, whole.panel(), load, true), bay,
-            bay.from() - bay.leafLeft(), bay.to() + bay.leafRight()))));
+        stretch.forEach(placed -> shares.add(share(placed, bay, bay.from(), bay.to())));
+        whole.forEach(placed -> shares.add(share(placed, bay, bay.from() - bay.leafLeft(), bay.to() + bay.leafRight())));
         return shares;
+    }
+
+    /** The cases of a stretch that tell how pressure is spread along it, each in its place. */
+    private static List<Placed> placed(Hoarding hoarding, PanelCases stretch, boolean shut) {
+        return spread(stretch).stream().map(load -> placed(hoarding, stretch.panel(), load, shut)).toList();
     }
 
     /**
@@ -90,12 +93,12 @@ public final class HoardingPosts {
     }
 
     private static Placed placed(Hoarding hoarding, Panel panel, LoadCase load, boolean shut) {
-        return new Placed(PanelForce.of(panel, load), panel.middle() - panel.width() / 2 + hoarding.length().metres() / 2, shut);
+        PanelForce force = PanelForce.of(panel, load);
+        return new Placed(force, force.line(), panel.middle() - panel.width() / 2 + hoarding.length().metres() / 2, shut);
     }
 
     private static Share share(Placed placed, Bay bay, double from, double to) {
-        LineLoad line = placed.panel().line();
-        double force = line.force(from - placed.left(), to - placed.left());
+        double force = placed.line().force(from - placed.left(), to - placed.left());
         return new Share(placed, bay, zone(placed.panel(), bay.at() - placed.left()), from, to, force);
     }
 
@@ -207,15 +210,9 @@ public final class HoardingPosts {
 
     /** Force on the boards in the first zoned or square case, gates open, N, and the sum of what its posts carry. */
     public static double[] balance(Hoarding hoarding, double spacing, List<PanelCases> open) {
-        double loads = 0;
-        for (PanelCases stretch : open) {
-            loads += PanelForce.of(stretch.panel(), spread(stretch).get(0)).force();
-        }
-        double reactions = 0;
-        for (Bay bay : bays(hoarding, spacing)) {
-            PanelCases stretch = open.get(bay.stretch());
-            reactions += share(placed(hoarding, stretch.panel(), spread(stretch).get(0), false), bay, bay.from(), bay.to()).force();
-        }
+        List<Placed> first = open.stream().map(stretch -> placed(hoarding, stretch.panel(), spread(stretch).get(0), false)).toList();
+        double loads = first.stream().mapToDouble(placed -> placed.panel().force()).sum();
+        double reactions = bays(hoarding, spacing).stream().mapToDouble(bay -> share(first.get(bay.stretch()), bay, bay.from(), bay.to()).force()).sum();
         return new double[] {loads, reactions};
     }
 

@@ -143,7 +143,12 @@ final class Notes {
     }
 
     private static boolean uses(Trace sheet, String step) {
-        return sheet.steps().stream().anyMatch(s -> s.name().startsWith(step));
+        for (Step each : sheet.steps()) {
+            if (each.name().startsWith(step)) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** Which least pressures hold a zone up. */

@@ -6,11 +6,14 @@ import broadside.table.Coefficient;
 import broadside.table.Edition;
 import broadside.table.Rows;
 import broadside.table.Source;
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
 
 /** The single numbers of an edition, from its constants.csv. */
 final class Constants {
 
     private final Rows rows;
+    private final Map<String, Coefficient> entries = new ConcurrentHashMap<>();
 
     Constants(Edition edition) {
         this.rows = edition.rows("constants");
@@ -39,6 +42,10 @@ final class Constants {
 
     /** The number with its source, to be recorded. */
     Coefficient entry(String key) {
+        return entries.computeIfAbsent(key, this::read);
+    }
+
+    private Coefficient read(String key) {
         Coefficient found = rows.number(key, "value");
         return new Coefficient(found.value(), found.unit(), found.source(), "as printed");
     }

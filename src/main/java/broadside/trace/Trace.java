@@ -1,6 +1,7 @@
 package broadside.trace;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
@@ -80,11 +81,11 @@ public final class Trace {
     }
 
     public List<Given> givens() {
-        return List.copyOf(givens);
+        return Collections.unmodifiableList(givens);
     }
 
     public List<Step> steps() {
-        return List.copyOf(steps);
+        return Collections.unmodifiableList(steps);
     }
 
     /** The value of a step that was recorded, by its whole name; the last one when it was recorded more than once. */
