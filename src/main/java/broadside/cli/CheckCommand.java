@@ -9,10 +9,12 @@ import broadside.sheet.SheetMaker;
 import java.io.PrintStream;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
+import java.util.concurrent.CompletableFuture;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.ParentCommand;
+import tools.jackson.databind.JsonNode;
 
 /** Assesses a job file: a table, or the result as JSON. */
 @Command(name = "check", mixinStandardHelpOptions = true, description = "Assesses a job file or a Broadside PDF and prints the loads.")
@@ -32,8 +34,9 @@ final class CheckCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        CompletableFuture<JsonNode> begun = JobFiles.begin(job);
         Tool tool = parent.tool();
-        Assessment assessment = assess(tool, JobFiles.open(job, tool.reader()), job);
+        Assessment assessment = assess(tool, JobFiles.open(job, begun, tool.reader()), job);
         PrintStream out = Terminal.out();
         if (sideBySide) {
             assessment.job().items().forEach(item -> TextTable.print(ComparisonBlocks.sheet(tool.assessor(), assessment, item, ""), out));

@@ -15,10 +15,12 @@ import java.nio.file.Path;
 import java.time.LocalDate;
 import java.time.format.DateTimeParseException;
 import java.util.concurrent.Callable;
+import java.util.concurrent.CompletableFuture;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.ParentCommand;
+import tools.jackson.databind.JsonNode;
 
 /** Writes the PDF load summary of a job. */
 @Command(name = "summary", mixinStandardHelpOptions = true, description = "Writes the PDF load summary of a job file or a Broadside PDF.")
@@ -47,8 +49,9 @@ final class SummaryCommand implements Callable<Integer> {
         if (Files.isDirectory(output) || output.toAbsolutePath().getParent() != null && !Files.isWritable(output.toAbsolutePath().getParent())) {
             throw new Refused(output + ": the file cannot be written");
         }
+        CompletableFuture<JsonNode> begun = JobFiles.begin(job);
         Tool tool = parent.tool();
-        JobFiles.Opened opened = JobFiles.open(job, tool.reader());
+        JobFiles.Opened opened = JobFiles.open(job, begun, tool.reader());
         if (same(job, output)) {
             throw new Refused(output + ": is the job itself; give the PDF another name");
         }
