@@ -23,7 +23,7 @@ import org.apache.pdfbox.pdmodel.interactive.documentnavigation.outline.PDOutlin
 /** What a PDF holds around its pages: the tree of tags, bookmarks, the colour profile and the job file. */
 final class Envelope {
 
-    static final int LEVEL = 4;
+    static final int LEVEL = 2;
 
     private final PDDocument document;
     private final COSDictionary catalog;
