@@ -39,6 +39,7 @@ final class Notes {
         notes.returnPeriod(job.site(), sheet);
         notes.stay(job.site());
         notes.leastHeight(job.site(), item, code, sheet);
+        notes.noRegion(sheet);
         notes.leastPressures(job.site(), sheet);
         notes.notes.addAll(item.choose(new ItemNotes(job, code, sheet)));
         notes.solidity(job, item, sheet);
@@ -139,6 +140,16 @@ final class Notes {
         if (!below.isEmpty() && !site.ground().terrain().equals(code.terms().smoothest())) {
             add(Note.Kind.CAUTION, "In terrain " + site.ground().terrain() + " " + (item.panels().size() == 1 ? "the item" : "board " + String.join(", ", below))
                 + " stands below the least height of the wind profile: the choice of class sets everything there. If there is open ground near by on the windward side, take the smoother class.");
+        }
+    }
+
+    /** A multiplier that some regions raise and that is not raised, as no region was given: the speed alone does not tell it. */
+    private void noRegion(Trace sheet) {
+        for (Step step : sheet.steps()) {
+            if (step.formula().contains("as no region is given")) {
+                add(Note.Kind.CAUTION, "No region was given: the " + step.meaning() + " is " + step.formula() + ". Give the region where it is one of these: the load is then larger.");
+                return;
+            }
         }
     }
 

@@ -2,7 +2,6 @@ package broadside.job;
 
 import static broadside.quantity.Dimension.DENSITY;
 import static broadside.quantity.Dimension.LENGTH;
-import static broadside.quantity.Dimension.MASS;
 import static broadside.quantity.Dimension.PERIOD;
 import static broadside.quantity.Dimension.PRESSURE;
 import static broadside.quantity.Dimension.SPEED;
@@ -60,17 +59,6 @@ public final class Shapes {
         Field.number("direction-multiplier", "direction multiplier M_d (AS/NZS 1170.2)"),
         Field.number("shielding-multiplier", "shielding multiplier M_s (AS/NZS 1170.2)"),
         Field.number("climate-multiplier", "climate change multiplier M_c (AS/NZS 1170.2)")));
-
-    static final Shape BOARD = new Shape("board", List.of(
-        Field.text("mark", "mark of the board"),
-        Field.quantity("width", LENGTH, "across the wind").needed(),
-        Field.quantity("height", LENGTH, "of the board itself").needed(),
-        Field.quantity("clearance", LENGTH, "gap between the ground and the lower edge").needed(),
-        Field.choice("shape", "outline", List.of("rectangle", "disc", "triangle")),
-        Field.quantity("offset", LENGTH, "of the board's middle from the middle of the posts, positive to the right"),
-        Field.quantity("depth", LENGTH, "thickness of the board or box"),
-        Field.number("solidity", "solid area over gross area, 1 for a closed board"),
-        Field.quantity("mass", MASS, "mass of the board")));
 
     private static final List<Field> REMARKS = List.of(
         Field.choice("held-by", "what it is fixed to", HeldBy.WORDS),
