@@ -147,7 +147,7 @@ final class Notes {
     private void noRegion(Trace sheet) {
         for (Step step : sheet.steps()) {
             if (step.formula().contains("as no region is given")) {
-                add(Note.Kind.CAUTION, "No region was given: the " + step.meaning() + " is " + step.formula() + ". Give the region where it is one of these: the load is then larger.");
+                add(Note.Kind.CAUTION, "The " + step.meaning() + " is " + step.formula() + ". Give the region where it is one of these: the load is then larger.");
                 return;
             }
         }
