@@ -77,6 +77,13 @@ record Printed(double si, Optional<Unit> unit, String text) {
             case "kg/m³" -> Optional.of(Dimension.DENSITY);
             case "m²" -> Optional.of(Dimension.AREA);
             case "years" -> Optional.of(Dimension.PERIOD);
+            case "rad" -> Optional.of(Dimension.ANGLE);
+            case "Pa/m" -> Optional.of(Dimension.PRESSURE_PER_DEPTH);
+            case "N/m" -> Optional.of(Dimension.FORCE_PER_LENGTH);
+            case "kg/m" -> Optional.of(Dimension.MASS_PER_LENGTH);
+            case "m³" -> Optional.of(Dimension.VOLUME);
+            case "m⁴" -> Optional.of(Dimension.INERTIA);
+            case "Hz" -> Optional.of(Dimension.FREQUENCY);
             default -> Optional.empty();
         };
     }

@@ -14,7 +14,13 @@ public enum Dimension {
     AREA("area", "m2", "2.9 m2", "31 ft2", 1e-6, 1e6),
     DENSITY("density", "kg/m3", "1.25 kg/m3", "0.078 lb/ft3", 0.5, 25000),
     MASS_PER_AREA("mass per area", "kg/m2", "0.25 kg/m2", "0.05 lb/ft2", 0.01, 1000),
-    PERIOD("period", "years", "50 years", "50 years", 1.0 / 366, 1e5);
+    PERIOD("period", "years", "50 years", "50 years", 1.0 / 366, 1e5),
+    PRESSURE_PER_DEPTH("pressure per depth", "Pa/m", "23.6 kPa/m", "150 psf/ft", 100, 1e7),
+    FORCE_PER_LENGTH("force per length", "N/m", "4.4 kN/m", "300 lbf/ft", 1, 1e7),
+    MASS_PER_LENGTH("mass per length", "kg/m", "13.5 kg/m", "9.1 lb/ft", 0.01, 1e5),
+    VOLUME("volume", "m3", "0.5 m3", "18 ft3", 1e-7, 1e5),
+    INERTIA("second moment of area", "m4", "192 cm4", "7.2 in4", 1e-10, 10),
+    FREQUENCY("frequency", "Hz", "2.5 Hz", "2.5 Hz", 0.01, 1000);
 
     private final String word;
     private final String siUnit;

@@ -19,6 +19,8 @@ final class DisplayUnits {
             case PRESSURE -> unit(dimension, metric ? "kPa" : "psf");
             case FORCE -> unit(dimension, metric ? "kN" : "kip");
             case MOMENT -> unit(dimension, metric ? "kN m" : "kip ft");
+            case PRESSURE_PER_DEPTH -> unit(dimension, metric ? "kPa/m" : "psf/ft");
+            case FORCE_PER_LENGTH -> unit(dimension, metric ? "kN/m" : "lbf/ft");
             default -> small(dimension, system);
         };
     }
@@ -28,6 +30,7 @@ final class DisplayUnits {
         boolean metric = system == Units.METRIC;
         return switch (dimension) {
             case PRESSURE -> metric ? BigDecimal.valueOf(100) : NEVER;
+            case PRESSURE_PER_DEPTH, FORCE_PER_LENGTH -> metric ? BigDecimal.valueOf(1000) : NEVER;
             case FORCE, MOMENT -> BigDecimal.valueOf(metric ? 1000 : 10_000);
             default -> NEVER;
         };
@@ -48,7 +51,12 @@ final class DisplayUnits {
             case AREA -> "ft2";
             case DENSITY -> "lb/ft3";
             case MASS_PER_AREA -> "lb/ft2";
-            case ANGLE, PERIOD -> smallMetric(dimension);
+            case PRESSURE_PER_DEPTH -> "psf/ft";
+            case FORCE_PER_LENGTH -> "lbf/ft";
+            case MASS_PER_LENGTH -> "lb/ft";
+            case VOLUME -> "ft3";
+            case INERTIA -> "in4";
+            case ANGLE, PERIOD, FREQUENCY -> smallMetric(dimension);
         };
     }
 

@@ -59,6 +59,7 @@ public final class Typed {
             case DENSITY -> new Density(si, typed);
             case MASS_PER_AREA -> new MassPerArea(si, typed);
             case PERIOD -> new Period(si, typed);
+            case PRESSURE_PER_DEPTH, FORCE_PER_LENGTH, MASS_PER_LENGTH, VOLUME, INERTIA, FREQUENCY -> new Measure(dimension, si, typed);
         };
     }
 

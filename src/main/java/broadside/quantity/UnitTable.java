@@ -4,13 +4,19 @@ import static broadside.quantity.Dimension.ANGLE;
 import static broadside.quantity.Dimension.AREA;
 import static broadside.quantity.Dimension.DENSITY;
 import static broadside.quantity.Dimension.FORCE;
+import static broadside.quantity.Dimension.FORCE_PER_LENGTH;
+import static broadside.quantity.Dimension.FREQUENCY;
+import static broadside.quantity.Dimension.INERTIA;
 import static broadside.quantity.Dimension.LENGTH;
 import static broadside.quantity.Dimension.MASS;
 import static broadside.quantity.Dimension.MASS_PER_AREA;
+import static broadside.quantity.Dimension.MASS_PER_LENGTH;
 import static broadside.quantity.Dimension.MOMENT;
 import static broadside.quantity.Dimension.PERIOD;
 import static broadside.quantity.Dimension.PRESSURE;
+import static broadside.quantity.Dimension.PRESSURE_PER_DEPTH;
 import static broadside.quantity.Dimension.SPEED;
+import static broadside.quantity.Dimension.VOLUME;
 import static broadside.quantity.Units.METRIC;
 import static broadside.quantity.Units.US;
 
@@ -85,6 +91,24 @@ final class UnitTable {
             row(MASS_PER_AREA, METRIC, "kg/m2", "1", "1", "kg/sq m"),
             row(MASS_PER_AREA, METRIC, "g/m2", "0.001", "1", "g/sq m,gsm"),
             row(MASS_PER_AREA, US, "lb/ft2", "0.45359237", "0.09290304", "lbs/ft2,lb/sq ft"),
+            row(PRESSURE_PER_DEPTH, METRIC, "Pa/m", "1", "1", "N/m3"),
+            row(PRESSURE_PER_DEPTH, METRIC, "kPa/m", "1000", "1", "kN/m3,kN/m2/m"),
+            row(PRESSURE_PER_DEPTH, US, "psf/ft", LBF, "0.028316846592", "lb/ft2/ft,lb/ft3,pcf"),
+            row(FORCE_PER_LENGTH, METRIC, "N/m", "1", "1", ""),
+            row(FORCE_PER_LENGTH, METRIC, "kN/m", "1000", "1", ""),
+            row(FORCE_PER_LENGTH, US, "lbf/ft", LBF, "0.3048", "plf,lb/ft"),
+            row(MASS_PER_LENGTH, METRIC, "kg/m", "1", "1", ""),
+            row(MASS_PER_LENGTH, US, "lb/ft", "0.45359237", "0.3048", "plf"),
+            row(VOLUME, METRIC, "m3", "1", "1", "cu m"),
+            row(VOLUME, METRIC, "cm3", "0.000001", "1", "cu cm"),
+            row(VOLUME, METRIC, "mm3", "0.000000001", "1", "cu mm"),
+            row(VOLUME, US, "ft3", "0.028316846592", "1", "cu ft"),
+            row(VOLUME, US, "in3", "0.000016387064", "1", "cu in"),
+            row(INERTIA, METRIC, "m4", "1", "1", ""),
+            row(INERTIA, METRIC, "cm4", "0.00000001", "1", ""),
+            row(INERTIA, METRIC, "mm4", "0.000000000001", "1", ""),
+            row(INERTIA, US, "in4", "0.0000004162314256", "1", ""),
+            row(FREQUENCY, METRIC, "Hz", "1", "1", "hertz,1/s"),
             row(PERIOD, METRIC, "months", "1", "12", "month,mo"),
             row(PERIOD, METRIC, "weeks", "7", "365.2425", "week,wk"),
             row(PERIOD, METRIC, "days", "1", "365.2425", "day"));
@@ -151,7 +175,7 @@ final class UnitTable {
         BigDecimal top = new BigDecimal(over);
         BigDecimal bottom = new BigDecimal(under);
         double factor = top.divide(bottom, MathContext.DECIMAL128).doubleValue();
-        return new Row(new Unit(symbol, d, factor, system), top, bottom, List.of(spellings.split(",")));
+        return new Row(new Unit(symbol, d, factor, system), top, bottom, spellings.isEmpty() ? List.of() : List.of(spellings.split(",")));
     }
 
     private static Map<Dimension, Map<String, Row>> bySpelling() {

@@ -36,9 +36,14 @@ public record Step(String name, String symbol, String meaning, Way way, String f
     }
 
     public Step {
+        finite(name, value);
+        inputs = List.copyOf(inputs);
+    }
+
+    static double finite(String name, double value) {
         if (!Double.isFinite(value)) {
             throw new ArithmeticException("the step " + name + " gave " + value + ", which is no result");
         }
-        inputs = List.copyOf(inputs);
+        return value;
     }
 }

@@ -21,7 +21,7 @@ public final class Trace {
     public record Given(String symbol, String meaning, double value, String unit, String typed) { }
 
     private final List<Given> givens;
-    private final List<Step> steps;
+    private final List<Step> steps; // null on a quiet sheet
     private final List<OwnValue> overrides;
     private final Set<OwnValue> used;
     private final Map<String, Double> found;
@@ -42,6 +42,14 @@ public final class Trace {
         this.used = used;
         this.found = found;
         this.suffix = suffix;
+    }
+
+    /**
+     * A sheet that keeps nothing and only hands the values back, with the user's own values in their places: for trying
+     * out what is then recorded once it is chosen.
+     */
+    public Trace quiet() {
+        return new Trace(givens, null, overrides, used, found, suffix);
     }
 
     /** The same sheet, with {@code part} behind a slash in the name of each step that is recorded through it. */
@@ -68,9 +76,11 @@ public final class Trace {
 
     /** Notes a value that the user gave and hands it back. */
     public double given(String symbol, String meaning, double value, String unit, String typed) {
-        Given given = new Given(symbol, meaning, value, unit, typed);
-        if (!givens.contains(given)) {
-            givens.add(given);
+        if (steps != null) {
+            Given given = new Given(symbol, meaning, value, unit, typed);
+            if (!givens.contains(given)) {
+                givens.add(given);
+            }
         }
         return value;
     }
@@ -109,7 +119,7 @@ public final class Trace {
         private final String name;
         private final String symbol;
         private final String meaning;
-        private final List<Step.Input> inputs = new ArrayList<>(6);
+        private final List<Step.Input> inputs = steps == null ? List.of() : new ArrayList<>(6);
         private String place = "";
         private Status status = Status.DERIVED;
 
@@ -121,7 +131,9 @@ public final class Trace {
 
         /** A value that goes in, under the symbol that the formula uses. */
         public Line in(String inputSymbol, double value, String unit) {
-            inputs.add(new Step.Input(inputSymbol, value, unit));
+            if (steps != null) {
+                inputs.add(new Step.Input(inputSymbol, value, unit));
+            }
             return this;
         }
 
@@ -149,6 +161,9 @@ public final class Trace {
 
         private double record(Step.Way way, String formula, double value, String unit) {
             Optional<OwnValue> own = ownValue(unit);
+            if (steps == null) {
+                return own.map(OwnValue::value).orElse(Step.finite(name, value));
+            }
             if (own.isEmpty()) {
                 steps.add(new Step(name, symbol, meaning, way, formula, inputs, value, unit, place, status, Optional.empty()));
                 return value;

@@ -204,6 +204,12 @@ record Wording(String label, String hint, String metric, String us) {
             case DENSITY -> metric ? "kg/m3" : "lb/ft3";
             case MASS_PER_AREA -> metric ? "kg/m2" : "lb/ft2";
             case PERIOD -> "years";
+            case PRESSURE_PER_DEPTH -> metric ? "kPa/m" : "psf/ft";
+            case FORCE_PER_LENGTH -> metric ? "kN/m" : "lbf/ft";
+            case MASS_PER_LENGTH -> metric ? "kg/m" : "lb/ft";
+            case VOLUME -> metric ? "m3" : "ft3";
+            case INERTIA -> metric ? "cm4" : "in4";
+            case FREQUENCY -> "Hz";
         };
     }
 

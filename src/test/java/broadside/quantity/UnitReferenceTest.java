@@ -7,6 +7,7 @@ import static javax.measure.MetricPrefix.MILLI;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 import static tech.units.indriya.unit.Units.GRAM;
+import static tech.units.indriya.unit.Units.HERTZ;
 import static tech.units.indriya.unit.Units.KILOGRAM;
 import static tech.units.indriya.unit.Units.KILOMETRE_PER_HOUR;
 import static tech.units.indriya.unit.Units.METRE;
@@ -98,6 +99,12 @@ class UnitReferenceTest {
         map.put(Dimension.DENSITY, KILOGRAM.divide(METRE.pow(3)));
         map.put(Dimension.MASS_PER_AREA, KILOGRAM.divide(SQUARE_METRE));
         map.put(Dimension.PERIOD, YEAR);
+        map.put(Dimension.PRESSURE_PER_DEPTH, PASCAL.divide(METRE));
+        map.put(Dimension.FORCE_PER_LENGTH, NEWTON.divide(METRE));
+        map.put(Dimension.MASS_PER_LENGTH, KILOGRAM.divide(METRE));
+        map.put(Dimension.VOLUME, METRE.pow(3));
+        map.put(Dimension.INERTIA, METRE.pow(4));
+        map.put(Dimension.FREQUENCY, HERTZ);
         return map;
     }
 
@@ -124,6 +131,14 @@ class UnitReferenceTest {
                     "lb/ft3", USCustomary.POUND.divide(foot.pow(3)));
             case MASS_PER_AREA -> Map.of("kg/m2", KILOGRAM.divide(SQUARE_METRE), "g/m2", GRAM.divide(SQUARE_METRE),
                     "lb/ft2", USCustomary.POUND.divide(USCustomary.SQUARE_FOOT));
+            case PRESSURE_PER_DEPTH -> Map.of("Pa/m", PASCAL.divide(METRE), "kPa/m", KILO(PASCAL).divide(METRE),
+                    "psf/ft", LBF.divide(USCustomary.SQUARE_FOOT).divide(foot));
+            case FORCE_PER_LENGTH -> Map.of("N/m", NEWTON.divide(METRE), "kN/m", KILO(NEWTON).divide(METRE), "lbf/ft", LBF.divide(foot));
+            case MASS_PER_LENGTH -> Map.of("kg/m", KILOGRAM.divide(METRE), "lb/ft", USCustomary.POUND.divide(foot));
+            case VOLUME -> Map.of("m3", METRE.pow(3), "cm3", CENTI(METRE).pow(3), "mm3", MILLI(METRE).pow(3), "ft3", foot.pow(3),
+                    "in3", USCustomary.INCH.pow(3));
+            case INERTIA -> Map.of("m4", METRE.pow(4), "cm4", CENTI(METRE).pow(4), "mm4", MILLI(METRE).pow(4), "in4", USCustomary.INCH.pow(4));
+            case FREQUENCY -> Map.of("Hz", HERTZ);
             case PERIOD -> Map.of("years", YEAR, "months", MONTH, "weeks", WEEK, "days", DAY);
         };
     }
