@@ -20,8 +20,13 @@ import java.util.Map;
  *
  * @param force   N
  * @param moment  at the ground line, N m
+ * @param squares sum of force times the square of its height, N m2
+ * @param cubes   sum of force times the cube of its height, N m3
  */
-public record PostDrag(double force, double moment) {
+public record PostDrag(double force, double moment, double squares, double cubes) {
+
+    /** No wind on the post. */
+    public static final PostDrag NONE = new PostDrag(0, 0, 0, 0);
 
     private static final String STATICS = "statics";
 
@@ -78,7 +83,7 @@ public record PostDrag(double force, double moment) {
     }
 
     private static PostDrag worked(List<Stretch> bare, String post, PostSection section, WindCode code, MemberRule rule, Site site, Trace trace) {
-        PostDrag drag = new PostDrag(0, 0);
+        PostDrag drag = NONE;
         for (int k = 0; k < bare.size(); k++) {
             drag = drag.plus(stretch(bare.get(k), section, code, rule, site, trace.part(post + (bare.size() == 1 ? "" : "-" + (k + 1)))));
         }
@@ -98,7 +103,9 @@ public record PostDrag(double force, double moment) {
             .reads("middle of the length that stands free", (bare.from() + bare.to()) / 2, "m");
         double moment = trace.line("post-drag-moment", "M_d", "its moment at the ground line").in("F_d", force, "N").in("z_d", arm, "m")
             .from(STATICS, Status.DERIVED).gives("F_d z_d", force * arm, "N m");
-        return new PostDrag(force, moment);
+        double perMetre = force / length;
+        return new PostDrag(force, moment, perMetre * (Math.pow(bare.to(), 3) - Math.pow(bare.from(), 3)) / 3,
+            perMetre * (Math.pow(bare.to(), 4) - Math.pow(bare.from(), 4)) / 4);
     }
 
     /** The symbol by which the code writes the height of the wind: that of the boards. */
@@ -111,6 +118,6 @@ public record PostDrag(double force, double moment) {
     }
 
     public PostDrag plus(PostDrag other) {
-        return new PostDrag(force + other.force, moment + other.moment);
+        return new PostDrag(force + other.force, moment + other.moment, squares + other.squares, cubes + other.cubes);
     }
 }

@@ -26,7 +26,7 @@ public final class SignPosts {
                 .reads("from the positions of the posts", spread, "m²");
         }
         for (int i = 0; i < positions.size(); i++) {
-            posts.add(post(i + 1, new Row(positions.get(i), positions.size(), spread, drag.isEmpty() ? new PostDrag(0, 0) : drag.get(i)), combinations, trace));
+            posts.add(post(i + 1, new Row(positions.get(i), positions.size(), spread, drag.isEmpty() ? PostDrag.NONE : drag.get(i)), combinations, trace));
         }
         PostAction hardest = posts.stream().max(Comparator.comparingDouble(PostAction::shear)).orElseThrow();
         PostAction most = posts.stream().max(Comparator.comparingDouble(PostAction::moment)).orElseThrow();
@@ -104,6 +104,18 @@ public final class SignPosts {
                 symbol.equals("J") ? "N m²" : "N m");
     }
 
+    /** What each post takes from the wind on the boards, in every combination. */
+    public static List<PostCase> cases(List<Double> positions, List<FootActions.Combined> combinations) {
+        double spread = positions.stream().mapToDouble(x -> x * x).sum();
+        List<PostCase> cases = new ArrayList<>();
+        for (FootActions.Combined combined : combinations) {
+            for (int i = 0; i < positions.size(); i++) {
+                cases.add(PostCase.of(i + 1, positions.get(i), positions.size(), spread, combined));
+            }
+        }
+        return cases;
+    }
+
     /** Sums of the posts' shears, N, and moments, N m, by the wind on the panels in one combination, each post worked out by itself. */
     public static double[] sums(FootActions.Combined combined, List<Double> positions) {
         double spread = positions.stream().mapToDouble(x -> x * x).sum();
@@ -111,7 +123,7 @@ public final class SignPosts {
         double moment = 0;
         for (double x : positions) {
             shear += combined.force() / positions.size() + (spread == 0 ? 0 : combined.combination().torsion() * x / spread);
-            moment += new Row(x, positions.size(), spread, new PostDrag(0, 0)).signedMoment(combined);
+            moment += new Row(x, positions.size(), spread, PostDrag.NONE).signedMoment(combined);
         }
         return new double[] {shear, moment};
     }

@@ -7,6 +7,7 @@ import broadside.codes.NotCovered;
 import broadside.codes.WindCode;
 import broadside.panel.Item;
 import broadside.site.SpeedConversion;
+import broadside.support.UnfitAnswer;
 import broadside.table.Edition;
 import broadside.table.OutsideTable;
 import broadside.table.Rows;
@@ -54,12 +55,24 @@ public final class Assessor {
      * @throws BadJob when the code is not there, or an override names no step of the calculation
      */
     public Assessment assess(Job job) {
+        return assess(job, true);
+    }
+
+    /** The same without what carries the items. */
+    Assessment loadsOnly(Job job) {
+        return assess(job, false);
+    }
+
+    private Assessment assess(Job job, boolean supports) {
         WindCode code = codes.code(job.basis().key()).orElseThrow(() -> new BadJob(List.of(new Problem("basis.code",
             "\"" + job.basis().key() + "\" is not among the codes: " + String.join(", ", codes.editions())))));
         List<ItemResult> results = new ArrayList<>();
         for (int i = 0; i < job.items().size(); i++) {
             try {
-                results.add(assess(job, job.items().get(i), code));
+                results.add(assess(job, job.items().get(i), code, supports));
+            } catch (UnfitAnswer e) {
+                String path = e.field().startsWith("basis.") ? e.field() : "items[" + i + "]." + e.field();
+                throw new BadJob(List.of(new Problem(path, e.getMessage())));
             } catch (ArithmeticException e) {
                 throw new BadJob(List.of(new Problem("items[" + i + "]", "the values given lead to no result: " + e.getMessage())));
             }
@@ -92,14 +105,14 @@ public final class Assessor {
         }
     }
 
-    private ItemResult assess(Job job, Item item, WindCode code) {
+    private ItemResult assess(Job job, Item item, WindCode code, boolean supports) {
         Trace sheet = new Trace(job.overrides());
         Optional<Scope.Outside> outside = scope.of(job, item);
         if (outside.isPresent() && !outside.get().showsLoads()) {
             return result(job, item, code, sheet, Outcome.OUTSIDE_SCOPE, outside.map(Scope.Outside::refusal), Optional.empty());
         }
         try {
-            Loads loads = item.choose(new ItemLoads(job, code, new ItemLoads.Rules(edgeOnRule, stackRule, codes.memberRule(code)), sheet));
+            Loads loads = item.choose(new ItemLoads(job, code, new ItemLoads.Rules(edgeOnRule, stackRule, codes.memberRule(code)), carriers(supports, job, item, code, outside), sheet));
             Companions.record(loads, sheet);
             return result(job, item, code, sheet, outside.isPresent() ? Outcome.OUTSIDE_SCOPE : Outcome.ASSESSED, outside.map(Scope.Outside::refusal),
                 Optional.of(loads));
@@ -114,10 +127,16 @@ public final class Assessor {
         }
     }
 
+    /** What carries an item is checked where it was made for it and is no larger than this tool is meant for. */
+    private Optional<Carriers> carriers(boolean supports, Job job, Item item, WindCode code, Optional<Scope.Outside> outside) {
+        boolean own = job.remark(item.mark(), "held-by").filter(h -> h.startsWith("existing")).isEmpty();
+        return supports && outside.isEmpty() && own && scope.size(item).isEmpty() ? Optional.of(new Carriers(job, code, supportRules)) : Optional.empty();
+    }
+
     private ItemResult result(Job job, Item item, WindCode code, Trace sheet, Outcome outcome, Optional<Refusal> refusal, Optional<Loads> loads) {
         Outcome told = refusal.filter(Refusal::ofScope).isPresent() ? Outcome.OUTSIDE_SCOPE : outcome;
         List<Note> notes = new ArrayList<>(scope.size(item).stream().toList());
-        notes.addAll(Notes.of(job, item, code, sheet, loads.isPresent()));
+        notes.addAll(Notes.of(job, item, code, sheet, loads));
         return new ItemResult(item, told, refusal, loads, notes, sheet);
     }
 }

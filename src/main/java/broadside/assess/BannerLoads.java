@@ -25,7 +25,7 @@ final class BannerLoads {
         List<CaseAction> cases = FootActions.of(panels, by.symbols(), new Standing("", Foot.NONE, List.of()), sheet).cases();
         CaseAction worst = ItemLoads.most(cases, CaseAction::baseShear);
         CaseAction uneven = ItemLoads.most(cases, c -> c.force() * (0.5 + Math.abs(c.side()) / banner.width().metres()));
-        return new Loads(by.velocity(banner.panels()), cases, Map.of("base-shear", worst), Loads.Supports.of(ends(banner, worst, uneven, by)),
+        return new Loads(by.velocity(banner.panels()), cases, Map.of("base-shear", worst), Loads.Supports.of(ends(banner, worst, uneven, by), Optional.empty()),
             Optional.empty(), by.code().level(by.job().site()), 0, Foot.NONE);
     }
 

@@ -22,8 +22,8 @@ public record Job(Map<String, String> header, Basis basis, Site site, List<Item>
     /** What was typed for one code of the comparison; {@code key} is that of its edition. */
     public record Compared(String key, Optional<Speed> speed, Optional<String> terrain) { }
 
-    /** The code by which loads are found; {@code stability} names the rule for overturning, where one is chosen. */
-    public record Basis(String code, String edition, Optional<String> overlay, Optional<String> stability) {
+    /** The code by which loads are found; {@code stability} and {@code design} name the rules for overturning and for posts, where they are chosen. */
+    public record Basis(String code, String edition, Optional<String> overlay, Optional<String> stability, Optional<String> design) {
 
         /** Key of the edition or overlay among the tables. */
         public String key() {

@@ -41,8 +41,9 @@ public record Loads(Velocity velocity, List<CaseAction> cases, Map<String, CaseA
      * @param drag       wind on all posts themselves, inside the base actions; empty where it is not known
      * @param reactions  brackets, ends, panels of a line
      * @param balance    sum of loads and sum of reactions
+     * @param carried    what carries the item, pre-sized; empty where it is loads only
      */
-    public record Supports(List<PostAction> posts, Optional<PostDrag> drag, List<Reaction> reactions, List<Balance> balance) {
+    public record Supports(List<PostAction> posts, Optional<PostDrag> drag, List<Reaction> reactions, List<Balance> balance, Optional<Carried> carried) {
 
         public Supports {
             posts = List.copyOf(posts);
@@ -50,8 +51,8 @@ public record Loads(Velocity velocity, List<CaseAction> cases, Map<String, CaseA
             balance = List.copyOf(balance);
         }
 
-        static Supports of(List<Reaction> reactions) {
-            return new Supports(List.of(), Optional.empty(), reactions, List.of());
+        static Supports of(List<Reaction> reactions, Optional<Carried> carried) {
+            return new Supports(List.of(), Optional.empty(), reactions, List.of(), carried);
         }
     }
 
@@ -66,6 +67,11 @@ public record Loads(Velocity velocity, List<CaseAction> cases, Map<String, CaseA
 
     public List<Reaction> reactions() {
         return supports.reactions();
+    }
+
+    /** What carries the item, pre-sized; empty where it is loads only. */
+    public Optional<Carried> carried() {
+        return supports.carried();
     }
 
     public List<Balance> balance() {
@@ -83,7 +89,7 @@ public record Loads(Velocity velocity, List<CaseAction> cases, Map<String, CaseA
         Map<String, CaseAction> governs = new TreeMap<>();
         governing.forEach((quantity, action) -> governs.put(quantity, action.atLevel(f)));
         Supports other = new Supports(posts().stream().map(p -> p.atLevel(f)).toList(), supports.drag(),
-            reactions().stream().map(r -> r.atLevel(f)).toList(), balance());
+            reactions().stream().map(r -> r.atLevel(f)).toList(), balance(), carried());
         return new Loads(velocity, cases.stream().map(c -> c.atLevel(f)).toList(), governs, other, edgeOn, level, selfWeight, foot);
     }
 

@@ -16,6 +16,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 
 /** The sentences that go with a result: what was assumed, what to mind, what was not checked. */
 final class Notes {
@@ -26,9 +27,9 @@ final class Notes {
     private final List<Note> notes = new ArrayList<>();
 
     /** The sentences; without loads only those that do not speak of any. */
-    static List<Note> of(Job job, Item item, WindCode code, Trace sheet, boolean loads) {
+    static List<Note> of(Job job, Item item, WindCode code, Trace sheet, Optional<Loads> loads) {
         Notes notes = new Notes();
-        if (!loads) {
+        if (loads.isEmpty()) {
             notes.heldBy(job, item);
             notes.always();
             return notes.notes;
@@ -44,7 +45,7 @@ final class Notes {
         notes.notes.addAll(item.choose(new ItemNotes(job, code, sheet)));
         notes.solidity(job, item, sheet);
         notes.heldBy(job, item);
-        notes.carrying(item);
+        notes.carrying(item, loads.get());
         notes.statuses(sheet);
         notes.always();
         return notes.notes;
@@ -210,13 +211,16 @@ final class Notes {
         }
     }
 
-    private void carrying(Item item) {
-        if (!item.carrying().isEmpty()) {
-            add(Note.Kind.NOT_CHECKED, "What carries it is kept as typed and not checked: " + String.join("; ",
-                item.carrying().stream().map(c -> c.name() + " " + c.typed()).toList()) + ".");
-        } else if (item instanceof PostSign || item instanceof Hoarding) {
-            add(Note.Kind.NOT_CHECKED, "Posts, footing and ground: loads only.");
-        }
+    /** What was assumed about what carries it, or that nothing of it was checked. */
+    private void carrying(Item item, Loads loads) {
+        loads.carried().ifPresentOrElse(carried -> carried.parts().forEach(part -> part.assumed().forEach(a -> add(Note.Kind.ASSUMPTION, part.title() + ": " + a))), () -> {
+            if (!item.carrying().isEmpty()) {
+                add(Note.Kind.NOT_CHECKED, "What carries it is kept as typed and not checked: " + String.join("; ",
+                    item.carrying().stream().map(c -> c.name() + " " + c.typed()).toList()) + ".");
+            } else if (item instanceof PostSign || item instanceof Hoarding) {
+                add(Note.Kind.NOT_CHECKED, "Posts, footing and ground: loads only.");
+            }
+        });
     }
 
     private void statuses(Trace sheet) {

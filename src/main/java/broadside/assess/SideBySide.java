@@ -62,8 +62,8 @@ final class SideBySide {
         String terrain = chosen ? job.site().ground().terrain() : typed.flatMap(Job.Compared::terrain).orElseGet(() -> match(job.site(), own, code));
         Run run = chosen ? chosen(job.site(), code, steps) : typed.flatMap(Job.Compared::speed).map(s -> typed(job.site(), s, code, terrain, steps))
             .orElseGet(() -> converted(job.site(), own, code, terrain, steps));
-        Job.Basis basis = chosen ? job.basis() : new Job.Basis(key.substring(0, key.indexOf('/')), key.substring(key.indexOf('/') + 1), Optional.empty(), Optional.empty());
-        ItemResult result = assessor.assess(new Job(Map.of(), basis, run.site(), List.of(item), job.remarks(), List.of(), List.of())).items().get(0);
+        Job.Basis basis = chosen ? job.basis() : new Job.Basis(key.substring(0, key.indexOf('/')), key.substring(key.indexOf('/') + 1), Optional.empty(), Optional.empty(), Optional.empty());
+        ItemResult result = assessor.loadsOnly(new Job(Map.of(), basis, run.site(), List.of(item), job.remarks(), List.of(), List.of())).items().get(0);
         String name = code.edition().property(code.edition().hasProperty("short") ? "short" : "title");
         return new Comparison.Line(key, code.edition().property("title"), name, chosen, code.edition().hasProperty("no-code"), run.site().basicSpeed().metresPerSecond(), terrain,
             how(chosen, typed, own, code), result.loads().map(l -> found(item, l, run.ratio(), result.sheet())), result.refusal(), differs(code, item), steps);

@@ -3,10 +3,12 @@ package broadside.job;
 import broadside.assess.Problem;
 import broadside.codes.WindCode;
 import broadside.panel.Board;
+import broadside.panel.Footing;
 import broadside.panel.Hoarding;
 import broadside.panel.Item;
 import broadside.panel.PostSection;
 import broadside.panel.PostSign;
+import broadside.panel.PostType;
 import broadside.panel.Posts;
 import broadside.quantity.Angle;
 import broadside.quantity.Length;
@@ -31,16 +33,18 @@ final class ItemReader {
 
     private final List<Problem> problems;
     private final Optional<WindCode> code;
+    private final SupportReader supports;
 
     /** Reads items that are to be worked out by a code, where the code is known. */
     ItemReader(List<Problem> problems, Optional<WindCode> code) {
         this.problems = problems;
         this.code = code;
+        this.supports = new SupportReader(this, problems);
     }
 
     /** The item, or nothing when something needed is missing; what does not fit is noted. */
     Optional<Item> read(Values values) {
-        KindReader others = new KindReader(this, problems);
+        KindReader others = new KindReader(this, supports, problems);
         return values.text("kind").flatMap(kind -> switch (kind) {
             case "hoarding" -> hoarding(values);
             case "banner-fence" -> others.bannerFence(values);
@@ -66,10 +70,11 @@ final class ItemReader {
             problem(values, "boards", "has " + values.list("boards").size() + " entries; a sign has at most 20 boards");
         }
         Optional<Posts> posts = values.object("posts").map(this::posts).orElse(Optional.of(new Posts(1, Optional.empty(), Optional.empty())));
+        Optional<Footing> footing = supports.footing(values);
         if (boards.isEmpty() || boards.size() != values.list("boards").size() || posts.isEmpty() || values.text("mark").isEmpty()) {
             return Optional.empty();
         }
-        return Optional.of(new PostSign(values.text("mark").get(), boards, new PostSign.Faces(faces, opening), posts.get(), replaces,
+        return Optional.of(new PostSign(values.text("mark").get(), boards, new PostSign.Faces(faces, opening), posts.get(), footing, replaces,
             carrying(values)));
     }
 
@@ -103,7 +108,7 @@ final class ItemReader {
         if (count > 1 && spacing.isEmpty()) {
             problem(values, "spacing", "is missing: two or more posts need the distance between them, like \"2 m\" or \"6 ft\"");
         }
-        return count < 1 ? Optional.empty() : Optional.of(new Posts(count, spacing, section(values)));
+        return count < 1 ? Optional.empty() : Optional.of(new Posts(count, spacing, section(values), SupportReader.posts(values)));
     }
 
     /** Outer sizes of a post: from its designation, or as typed. */
@@ -139,7 +144,8 @@ final class ItemReader {
             return Optional.empty();
         }
         Hoarding hoarding = new Hoarding(values.text("mark").get(), length.get(), height.get(), clearance, solidity, left, right, shelter(values), gates,
-            spacing, carrying(values));
+            spacing, new Hoarding.Held(values.object("posts").map(SupportReader::posts).orElse(PostType.NONE), supports.footing(values), supports.kentledge(values)),
+            carrying(values));
         if (hoarding.panels().isEmpty()) {
             problem(values, gates.isEmpty() ? "length" : "gates", "leaves no hoarding to assess");
             return Optional.empty();

@@ -74,7 +74,7 @@ public final class JobReader {
         if (code.isEmpty() || edition.isEmpty()) {
             return Optional.empty();
         }
-        Job.Basis basis = new Job.Basis(code.get(), edition.get(), values.text("overlay"), values.text("stability"));
+        Job.Basis basis = new Job.Basis(code.get(), edition.get(), values.text("overlay"), values.text("stability"), values.text("design"));
         String plain = code.get() + "/" + edition.get();
         if (!codes.editions().contains(plain)) {
             problems.add(new Problem(values.at("code"), "\"" + StructureReader.clean(plain) + "\" is not among the codes: "

@@ -4,6 +4,8 @@ import broadside.assess.Problem;
 import broadside.panel.BannerFence;
 import broadside.panel.Building;
 import broadside.panel.FacadePanel;
+import broadside.panel.FenceFeet;
+import broadside.panel.Fixings;
 import broadside.panel.Item;
 import broadside.panel.ProjectingSign;
 import broadside.panel.SpannedBanner;
@@ -20,10 +22,12 @@ final class KindReader {
     private static final Length ZERO = Length.metres(0);
 
     private final ItemReader sizes;
+    private final SupportReader supports;
     private final List<Problem> problems;
 
-    KindReader(ItemReader sizes, List<Problem> problems) {
+    KindReader(ItemReader sizes, SupportReader supports, List<Problem> problems) {
         this.sizes = sizes;
+        this.supports = supports;
         this.problems = problems;
     }
 
@@ -34,11 +38,12 @@ final class KindReader {
         count.filter(n -> n < 1 || n > 1000).ifPresent(n -> problem(values, "panels", "must lie between 1 and 1000"));
         double cover = sizes.solidity(values, "cover-solidity");
         double fence = values.number("fence-solidity").isPresent() ? sizes.solidity(values, "fence-solidity") : 0.25;
+        FenceFeet feet = supports.feet(values);
         if (length.isEmpty() || height.isEmpty() || count.filter(n -> n >= 1 && n <= 1000).isEmpty() || values.text("mark").isEmpty()) {
             return Optional.empty();
         }
         return Optional.of(new BannerFence(values.text("mark").get(), length.get(), height.get(), count.get(), cover, fence, values.number("fence-solidity").isPresent(),
-            sizes.shelter(values), ItemReader.carrying(values)));
+            sizes.shelter(values), feet, ItemReader.carrying(values)));
     }
 
     Optional<Item> facadePanel(Values values) {
@@ -47,14 +52,15 @@ final class KindReader {
         Optional<Length> bottom = sizes.notBelow(values, "bottom", "the lower edge would lie below the ground");
         Optional<Length> corner = sizes.notBelow(values, "distance-from-corner", "it is measured from the corner along the wall");
         Optional<Building> building = values.object("building").flatMap(this::building);
+        Optional<Fixings> fixings = supports.fixings(values);
         building.ifPresent(b -> inside(values, b, width, height, bottom, corner));
         if (width.isEmpty() || height.isEmpty() || bottom.isEmpty() || corner.isEmpty() || building.isEmpty() || values.text("mark").isEmpty()
             || values.text("backing").isEmpty()) {
             return Optional.empty();
         }
         return Optional.of(new FacadePanel(values.text("mark").get(), FacadePanel.Backing.valueOf(values.text("backing").get().toUpperCase(Locale.ROOT)),
-            width.get(), height.get(), bottom.get(), corner.get(), building.get(), sizes.notBelow(values, "gap", "a gap is not below zero"), mass(values),
-            ItemReader.carrying(values)));
+            width.get(), height.get(), bottom.get(), corner.get(), building.get(), sizes.notBelow(values, "gap", "a gap is not below zero"),
+            sizes.notBelow(values, "depth", "a thickness is not below zero").orElse(ZERO), mass(values), fixings, ItemReader.carrying(values)));
     }
 
     /** A panel must lie on its wall. */
@@ -100,7 +106,7 @@ final class KindReader {
             return Optional.empty();
         }
         return Optional.of(new ProjectingSign(values.text("mark").get(), projection.get(), height.get(), bottom.get(), gap, depth, mass(values),
-            new ProjectingSign.Brackets(Math.max(1, count), spacing), ItemReader.carrying(values)));
+            new ProjectingSign.Brackets(Math.max(1, count), spacing), supports.fixings(values), ItemReader.carrying(values)));
     }
 
     Optional<Item> spannedBanner(Values values) {

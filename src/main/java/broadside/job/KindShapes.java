@@ -1,10 +1,13 @@
 package broadside.job;
 
 import static broadside.quantity.Dimension.ANGLE;
+import static broadside.quantity.Dimension.DENSITY;
 import static broadside.quantity.Dimension.FORCE;
 import static broadside.quantity.Dimension.LENGTH;
 import static broadside.quantity.Dimension.MASS;
 import static broadside.quantity.Dimension.MASS_PER_AREA;
+import static broadside.quantity.Dimension.PRESSURE;
+import static broadside.quantity.Dimension.PRESSURE_PER_DEPTH;
 
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -13,13 +16,31 @@ import java.util.Map;
 /** The fields of each kind of item. */
 final class KindShapes {
 
+    private static final List<String> YES_NO = List.of("yes", "no");
+    private static final List<String> DURATIONS = List.of("short", "instantaneous");
+
     private static final Shape FOOTING = new Shape("footing", List.of(
-        Field.text("kind", "planted, pier or pad"),
-        Field.text("shape", "round or square"),
-        Field.quantity("width", LENGTH, "width or diameter"),
-        Field.quantity("length", LENGTH, "length in plan"),
-        Field.quantity("depth", LENGTH, "depth below the ground"),
-        Field.text("ground", "class of the ground")));
+        Field.choice("kind", "planted: the post stands in the ground; pier: a shaft of concrete; pad: a block that holds by its weight", List.of("planted", "pier", "pad")),
+        Field.choice("shape", "outline in plan", List.of("round", "square", "rectangular")),
+        Field.quantity("width", LENGTH, "diameter or width of the post, the concrete or the shaft; of a pad along the wind"),
+        Field.quantity("length", LENGTH, "of a pad across the wind"),
+        Field.quantity("depth", LENGTH, "depth below the ground; empty to have it sized"),
+        Field.text("ground", "ground in words: good, average, poor, or rock, soft rock, gravel, sand, clay"),
+        Field.choice("rule", "rule for the depth; empty for the one that fits what is known", List.of("ground-factor", "ibc", "broms-clay", "broms-sand")),
+        Field.quantity("lateral-bearing", PRESSURE_PER_DEPTH, "allowable lateral bearing of the soil for each metre of depth"),
+        Field.quantity("cohesion", PRESSURE, "undrained shear strength of clay"),
+        Field.quantity("friction-angle", ANGLE, "angle of friction of sand"),
+        Field.quantity("soil-density", DENSITY, "density of the soil"),
+        Field.quantity("bearing", PRESSURE, "allowable pressure on the soil under a pad"),
+        Field.number("friction", "friction coefficient under a pad"),
+        Field.number("safety-factor", "factor on the loads of an ultimate method"),
+        Field.choice("paved", "whether a rigid floor or pavement holds the post at the ground", YES_NO),
+        Field.choice("half-inch-motion", "whether 12.7 mm of motion at the ground does no harm, so that lateral bearing counts twice (IBC)", YES_NO),
+        Field.choice("third-increase", "whether the increase of a third for wind is counted (IBC, alternate combinations)", YES_NO),
+        Field.choice("slope", "whether the ground near the footing slopes", List.of("flat", "sloping", "unknown")),
+        Field.choice("water", "ground water: deep below the footing, or high", List.of("deep", "high", "unknown")),
+        Field.quantity("frost-depth", LENGTH, "depth to which the ground freezes"),
+        Field.choice("services", "whether buried services were located", List.of("located", "not located"))));
 
     private static final Shape FIXINGS = new Shape("fixings", List.of(
         Field.whole("columns", "columns of fixings"),
@@ -65,8 +86,11 @@ final class KindShapes {
             Field.object("posts", new Shape("posts", List.of(
                 Field.whole("count", "number of posts").needed(),
                 Field.quantity("spacing", LENGTH, "distance between posts"),
-                Field.text("section", "section of a post, such as CHS 114.3x5"),
+                Field.text("section", "section of a post, such as CHS 114.3x5; auto to have one chosen and counted in the loads"),
                 Field.text("grade", "material grade"),
+                Field.text("series", "series that a section is chosen from, such as chs-hot"),
+                Field.text("deflection-limit", "limit on the deflection by its name, such as tdb4 or l-80"),
+                Field.choice("load-duration", "class of load duration of timber", DURATIONS),
                 Field.choice("shape", "outline of a post, where no section is given", List.of("round", "square", "rectangular")),
                 Field.quantity("width", LENGTH, "width of a post across the wind, where no section is given"),
                 Field.quantity("depth", LENGTH, "depth of a post along the wind"))), "posts"),
@@ -89,13 +113,20 @@ final class KindShapes {
                 Field.quantity("width", LENGTH, "width of the gate").needed())), "gates"),
             Field.object("posts", new Shape("hoarding-posts", List.of(
                 Field.quantity("spacing", LENGTH, "distance between posts").needed(),
-                Field.text("section", "section of a post"),
-                Field.text("grade", "material grade"))), "posts"),
+                Field.text("section", "section of a post, such as CHS 114.3x5; empty to have one chosen"),
+                Field.text("grade", "material grade"),
+                Field.text("series", "series that a section is chosen from, such as chs-hot"),
+                Field.text("deflection-limit", "limit on the deflection by its name, such as tdb4 or l-80"),
+                Field.choice("load-duration", "class of load duration of timber", DURATIONS))), "posts"),
             Field.object("footing", FOOTING, "footing"),
             Field.object("ballast", new Shape("ballast", List.of(
                 Field.quantity("mass", MASS, "mass at each brace"),
                 Field.quantity("lever", LENGTH, "from the face to the middle of the ballast"),
-                Field.text("ground", "surface that it stands on"))), "ballast on raking braces")));
+                Field.quantity("front-mass", MASS, "mass on the foot below the face, at each brace"),
+                Field.quantity("face-mass", MASS, "mass of boards, post and brace that go with one brace"),
+                Field.text("ground", "surface that it stands on"),
+                Field.number("friction", "friction coefficient on that surface"),
+                Field.text("friction-reason", "why the friction coefficient may be above 1"))), "ballast on raking braces")));
     }
 
     private static Shape bannerFence() {
@@ -116,7 +147,11 @@ final class KindShapes {
                 Field.quantity("lever", LENGTH, "from the line of the fence to the foot of the brace").needed(),
                 Field.quantity("mass", MASS, "mass on the foot of the brace").needed())), "brace of each panel"),
             Field.text("ground", "surface that it stands on"),
-            Field.text("stakes", "stakes, where the ground takes them")));
+            Field.number("friction", "friction coefficient on that surface"),
+            Field.text("friction-reason", "why the friction coefficient may be above 1"),
+            Field.text("stakes", "stakes, where the ground takes them"),
+            Field.quantity("stake-proof-load", FORCE, "pull that each stake was proved to hold on site"),
+            Field.whole("stakes-per-panel", "stakes that hold one panel against each direction")));
     }
 
     private static Shape facadePanel() {

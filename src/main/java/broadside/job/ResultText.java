@@ -5,6 +5,7 @@ import broadside.action.CaseAction;
 import broadside.action.Foot;
 import broadside.action.PostAction;
 import broadside.assess.Assessment;
+import broadside.assess.Carried;
 import broadside.assess.ItemResult;
 import broadside.assess.Loads;
 import broadside.codes.Level;
@@ -14,6 +15,7 @@ import broadside.trace.Step;
 import broadside.trace.Trace;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import tools.jackson.databind.JsonNode;
 import tools.jackson.databind.node.ArrayNode;
 import tools.jackson.databind.node.ObjectNode;
@@ -43,7 +45,7 @@ public final class ResultText {
         result.refusal().filter(r -> !r.ofScope()).ifPresent(r -> node.putObject("reason").put("code", r.code()).put("clause", r.clause()).put("reason", r.reason())
             .put("instead", r.instead()));
         result.loads().ifPresent(l -> loads(node, l));
-        node.putArray("supports");
+        supports(node, result.loads().flatMap(Loads::carried));
         node.putArray("limits");
         ArrayNode notes = node.putArray("notes");
         result.notes().forEach(n -> notes.addObject().put("kind", n.kind().word()).put("text", n.text()));
@@ -51,6 +53,38 @@ public final class ResultText {
         givens(node.putArray("given"), result.sheet());
         ArrayNode steps = node.putArray("steps");
         result.sheet().steps().forEach(s -> step(steps.addObject(), s));
+    }
+
+    /** Every check in one list, and each part with what it is, what was tried and what must be confirmed. */
+    private static void supports(ObjectNode node, Optional<Carried> carried) {
+        ArrayNode checks = node.putArray("supports");
+        carried.ifPresent(c -> {
+            c.checks().forEach(k -> checks.addObject().put("check", k.name()).put("rule", k.rule()).put("demand", k.demand()).put("capacity", k.capacity())
+                .put("unit", k.unit()).put("utilisation", k.utilisation()).put("passes", k.passes()).put("case", k.named()).put("status", k.status().word()));
+            ArrayNode parts = node.putArray("carried-by");
+            c.parts().forEach(p -> part(parts.addObject(), p));
+        });
+    }
+
+    private static void part(ObjectNode node, Carried.Part part) {
+        node.put("part", part.key()).put("title", part.title());
+        part.refused().ifPresent(why -> node.put("refused", why));
+        ArrayNode results = node.putArray("results");
+        for (Carried.Result r : part.results()) {
+            ObjectNode each = results.addObject().put("name", r.key()).put("label", r.label());
+            if (r.unit().isEmpty()) {
+                each.put("text", r.text());
+            } else {
+                each.put("value", r.value()).put("unit", r.unit());
+            }
+        }
+        ArrayNode tried = node.putArray("tried");
+        part.choices().forEach(t -> tried.addObject().put("section", t.designation()).put("mass_kg_per_m", t.mass()).put("utilisation", t.utilisation())
+            .put("check", t.by()).put("chosen", t.chosen()).put("why-not", t.why()));
+        ArrayNode assumed = node.putArray("to-confirm");
+        part.assumed().forEach(assumed::add);
+        ArrayNode remarks = node.putArray("remarks");
+        part.remarks().forEach(remarks::add);
     }
 
     private static void loads(ObjectNode node, Loads loads) {

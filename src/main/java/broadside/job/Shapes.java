@@ -17,7 +17,9 @@ public final class Shapes {
         Field.text("code", "key of the wind code, such as en-1991-1-4").needed(),
         Field.text("edition", "edition of the code, such as 2005").needed(),
         Field.text("overlay", "national or own overlay of the edition; null for none"),
-        Field.text("stability", "rule for overturning, such as en-1990-equ")));
+        Field.text("stability", "rule for overturning and sliding, such as en-1990-equ; empty for the one that goes with the code"),
+        Field.choice("design", "rules for posts: en, Eurocodes; us-asd, allowable stress; us-strength, load and resistance factors; empty for those that go with the code",
+            List.of("en", "us-asd", "us-strength"))));
 
     static final Shape TOPOGRAPHY = new Shape("topography", List.of(
         Field.choice("feature", "shape of the ground", List.of("hill", "ridge", "escarpment")).needed(),

@@ -11,9 +11,10 @@ import java.util.List;
  * @param fenceSolidity   the same of the bare fence
  * @param fenceKnown      whether that was given
  * @param shelter         factor on the wind by a wall or fence in front that stays there, 1 for none
+ * @param feet            what holds each panel
  */
 public record BannerFence(String mark, Length panelLength, Length panelHeight, int count, double coverSolidity, double fenceSolidity, boolean fenceKnown,
-                          double shelter, List<Carrying> carrying) implements Item {
+                          double shelter, FenceFeet feet, List<Carrying> carrying) implements Item {
 
     /** Name of the bare line in steps and tables. */
     public static final String BARE = "bare-fence";

@@ -12,9 +12,11 @@ import java.util.Optional;
  * @param bottom          height of the lower edge above the ground
  * @param fromCorner      from the nearer vertical corner of the building to the panel
  * @param gap             between the wall and the panel
+ * @param depth           thickness, zero where it is not known
+ * @param fixings         where they were typed
  */
 public record FacadePanel(String mark, Backing backing, Length width, Length height, Length bottom, Length fromCorner, Building building,
-                          Optional<Length> gap, Optional<Mass> mass, List<Carrying> carrying) implements Item {
+                          Optional<Length> gap, Length depth, Optional<Mass> mass, Optional<Fixings> fixings, List<Carrying> carrying) implements Item {
 
     /** What is behind the panel, with the word used in a job file. */
     public enum Backing {

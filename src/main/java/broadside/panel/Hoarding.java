@@ -15,12 +15,19 @@ import java.util.Optional;
  * @param shelter     factor on the wind by a wall or fence in front that stays there, 1 for none
  * @param gates       openings; an open gate makes two new free ends
  * @param spacing     distance of the posts, where it is known
+ * @param held        what carries it
  */
 public record Hoarding(String mark, Length length, Length height, Length clearance, double solidity, Length returnLeft,
-                       Length returnRight, double shelter, List<Gate> gates, Optional<Length> spacing, List<Carrying> carrying) implements Item {
+                       Length returnRight, double shelter, List<Gate> gates, Optional<Length> spacing, Held held, List<Carrying> carrying) implements Item {
 
     /** A stretch narrower than this comes from binary rounding or is no hoarding, m. */
     private static final double NARROWEST = 0.005;
+
+    /** What carries it: posts with a footing each, or raking braces with ballast. */
+    public record Held(PostType posts, Optional<Footing> footing, Optional<Kentledge> kentledge) {
+
+        public static final Held NONE = new Held(PostType.NONE, Optional.empty(), Optional.empty());
+    }
 
     /** An opening; {@code from} is measured from the left end. */
     public record Gate(Length from, Length width) {

@@ -8,9 +8,11 @@ import java.util.Optional;
  * One or more boards on one or more posts.
  *
  * @param faces     parallel faces of one box are one board with depth
+ * @param footing   of each post, where something was typed
  * @param replaces  the old board on the same posts, where there was one
  */
-public record PostSign(String mark, List<Board> boards, Faces faces, Posts posts, Optional<Board> replaces, List<Carrying> carrying) implements Item {
+public record PostSign(String mark, List<Board> boards, Faces faces, Posts posts, Optional<Footing> footing, Optional<Board> replaces, List<Carrying> carrying)
+    implements Item {
 
     /** Name of the old board in steps and tables. */
     public static final String REPLACED = "replaced-board";
@@ -27,6 +29,11 @@ public record PostSign(String mark, List<Board> boards, Faces faces, Posts posts
         if (boards.isEmpty()) {
             throw new IllegalArgumentException("a sign needs a board");
         }
+    }
+
+    /** The same sign on posts with the outline of a section that was found or chosen. */
+    public PostSign with(PostSection outline) {
+        return new PostSign(mark, boards, faces, posts.with(outline), footing, replaces, carrying);
     }
 
     @Override

@@ -13,9 +13,10 @@ import java.util.Optional;
  * @param gap         between the wall and the inner edge
  * @param depth       thickness, zero where it is not known
  * @param brackets    that carry it, one above the other
+ * @param fixings     of each bracket, where they were typed
  */
 public record ProjectingSign(String mark, Length projection, Length height, Length bottom, Length gap, Length depth, Optional<Mass> mass,
-                             Brackets brackets, List<Carrying> carrying) implements Item {
+                             Brackets brackets, Optional<Fixings> fixings, List<Carrying> carrying) implements Item {
 
     /** Brackets one above the other; one bracket needs no spacing. */
     public record Brackets(int count, Optional<Length> spacing) {

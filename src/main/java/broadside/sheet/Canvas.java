@@ -90,6 +90,13 @@ final class Canvas {
         shapes.add(new Drawing.Outline(points, weight, Ink.BLACK, fill));
     }
 
+    /** A tipping edge: a small wedge below the ground line. */
+    void tippingEdge(double at) {
+        double x = x(at);
+        double y = y(0) + 1;
+        shapes.add(new Drawing.Outline(List.of(x, y, x - 4, y + 7, x + 4, y + 7), THIN, Ink.BLACK, Fill.INK));
+    }
+
     void circle(double middle, double height, double radius) {
         shapes.add(new Drawing.Circle(x(middle), y(height), radius * scale, THICK, Ink.BLACK, Fill.PAPER));
     }

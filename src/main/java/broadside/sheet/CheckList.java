@@ -1,6 +1,7 @@
 package broadside.sheet;
 
 import broadside.assess.Assessment;
+import broadside.assess.Carried;
 import broadside.assess.ItemResult;
 import broadside.assess.Job;
 import broadside.assess.Note;
@@ -104,7 +105,7 @@ final class CheckList {
         fact("Lighting and openings", job.remark(item.mark(), "lighting").orElse(""));
         fact("Fixed to", job.remark(item.mark(), "fixed-to").orElse(""));
         for (Item.Carrying carrying : item.carrying()) {
-            fact("As typed, not checked: " + carrying.name(), carrying.typed());
+            fact("As typed: " + carrying.name(), carrying.typed());
         }
         group("3 Sign" + (many ? " " + item.mark() : ""));
     }
@@ -165,11 +166,21 @@ final class CheckList {
     }
 
     private void foundation() {
-        for (String label : List.of("Soil and its source", "Footing, concrete, reinforcement, base plate, anchors", "Factors against overturning and sliding",
-            "Friction", "Water table and uplift")) {
-            fact(label, NOT_HERE);
+        for (ItemResult item : assessment.items()) {
+            Optional<Carried> carried = item.loads().flatMap(l -> l.carried());
+            String which = assessment.items().size() > 1 ? ", " + item.item().mark() : "";
+            if (carried.isEmpty()) {
+                fact("What carries it" + which, "loads only: not checked");
+                continue;
+            }
+            for (Carried.Part part : carried.get().parts()) {
+                fact(part.title() + which, part.refused().orElseGet(() -> String.join("; ", part.results().stream().map(r -> r.label() + " " + CarriedBlocks.value(r, format)).toList())));
+                part.checks().forEach(c -> facts.add(Fact.of(c.name() + which, "share " + CarriedBlocks.share(c.utilisation()), c.rule())));
+                part.assumed().forEach(a -> facts.add(new Fact("assumed, to be confirmed" + which, a, "", true)));
+            }
         }
-        facts.add(new Fact("Buried services", "services not located", "", true));
+        fact("Reinforcement, base plate, anchors", "not worked out: for the engineer");
+        facts.add(new Fact("Buried services", "services not located, unless the sheet says otherwise", "", true));
         group("7 Foundation or ballast");
     }
 

@@ -4,9 +4,6 @@ import broadside.action.CaseAction.PanelZones;
 import broadside.assess.Loads;
 import broadside.panel.BannerFence;
 import broadside.panel.Item;
-import broadside.quantity.Dimension;
-import broadside.quantity.Reading;
-import broadside.quantity.Typed;
 import broadside.sheet.Drawing.Anchor;
 import broadside.sheet.Drawing.Fill;
 import broadside.sheet.Drawing.Ink;
@@ -95,7 +92,7 @@ final class FenceDrawing {
         loads.ifPresent(l -> zones(at, l, from, to));
         for (int i = stretch.first(); i <= stretch.last(); i++) {
             at.help(at.x(i * each), at.y(0), at.x(i * each), at.y(height));
-            if (length("foot length").isPresent() || length("brace lever").isPresent()) {
+            if (foot().isPresent() || brace().isPresent()) {
                 at.line(at.x(i * each), at.y(0) + 4, at.x(i * each), at.y(0), 3, Ink.BLACK, false);
             }
         }
@@ -122,10 +119,10 @@ final class FenceDrawing {
     }
 
     private Drawing side(Canvas front, double startY) {
-        List<double[]> blocks = blocks();
-        Optional<Double> brace = length("brace lever");
-        double reach = Math.max(brace.orElse(0.0), blocks.stream().mapToDouble(b -> b[0]).max().orElse(0));
-        double foot = length("foot length").orElse(0.0);
+        List<Double> blocks = blocks();
+        Optional<Double> brace = brace();
+        double reach = Math.max(brace.orElse(0.0), blocks.stream().mapToDouble(b -> b).max().orElse(0));
+        double foot = foot().orElse(0.0);
         double widest = Math.max(reach, foot / 2);
         double scale = Math.min(SIDE / height, widest > 0 ? REACH / widest : SIDE / height);
         double ground = startY + 30 + height * scale;
@@ -136,9 +133,12 @@ final class FenceDrawing {
         view.draw(new double[][] {{0, height, 0}});
         if (foot > 0) {
             side.line(side.x(-foot / 2), ground - 1.5, side.x(foot / 2), ground - 1.5, 3, Ink.BLACK, false);
+            side.tippingEdge(-foot / 2);
+            side.tippingEdge(foot / 2);
         }
         brace.ifPresent(lever -> block(side, lever));
-        blocks.forEach(b -> block(side, b[0]));
+        brace.ifPresent(side::tippingEdge);
+        blocks.forEach(b -> block(side, b));
         loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(0, c.height(), "F " + format.force(c.force()) + " in all", ItemDrawing.otherCase(loads.get()), format.length(c.height())));
         double below = levers(side, blocks, ground);
         double list = carries(front, startY + 24);
@@ -154,10 +154,10 @@ final class FenceDrawing {
     }
 
     /** Dimensions of levers below the ground, one line for each different length. */
-    private double levers(Canvas side, List<double[]> blocks, double ground) {
+    private double levers(Canvas side, List<Double> blocks, double ground) {
         List<Double> levers = new ArrayList<>();
-        length("brace lever").ifPresent(levers::add);
-        blocks.forEach(b -> levers.add(b[0]));
+        brace().ifPresent(levers::add);
+        levers.addAll(blocks);
         double y = ground;
         for (double lever : levers.stream().distinct().sorted().limit(3).toList()) {
             y += 18;
@@ -182,23 +182,16 @@ final class FenceDrawing {
         return y;
     }
 
-    /** Levers of the blocks that were typed as "25 kg at 0.6 m". */
-    private List<double[]> blocks() {
-        List<double[]> found = new ArrayList<>();
-        for (Item.Carrying each : fence.carrying()) {
-            int at = each.typed().lastIndexOf(" at ");
-            if (each.name().equals("block") && at >= 0) {
-                read(each.typed().substring(at + 4)).ifPresent(lever -> found.add(new double[] {lever}));
-            }
-        }
-        return found;
+    /** Levers of the blocks behind the fence, m. */
+    private List<Double> blocks() {
+        return fence.feet().blocks().stream().map(b -> b.lever().metres()).filter(l -> l > 0).toList();
     }
 
-    private Optional<Double> length(String name) {
-        return fence.carrying().stream().filter(c -> c.name().equals(name)).findFirst().flatMap(c -> read(c.typed()));
+    private Optional<Double> brace() {
+        return fence.feet().brace().map(b -> b.lever().metres());
     }
 
-    private static Optional<Double> read(String typed) {
-        return Typed.read(typed, Dimension.LENGTH) instanceof Reading.Value value && value.si() > 0 ? Optional.of(value.si()) : Optional.empty();
+    private Optional<Double> foot() {
+        return fence.feet().footLength().map(l -> l.metres());
     }
 }

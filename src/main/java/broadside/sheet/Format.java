@@ -15,6 +15,10 @@ import java.util.Locale;
 /** Numbers as they are shown: three figures in answers, four in the calculation; loads are rounded up, and only here. */
 final class Format {
 
+    /** Lengths below this are shown in millimetres, m: deflections. */
+    private static final double SMALL = 0.3;
+    private static final double MILLIMETRES = 1000;
+
     private final Units units;
 
     Format(Units units) {
@@ -84,6 +88,32 @@ final class Format {
         return load(kilograms, Dimension.MASS);
     }
 
+    /** A mass for each metre, or for each foot where feet lead. */
+    String massPerLength(double kilogramsPerMetre) {
+        return load(kilogramsPerMetre, Dimension.MASS_PER_LENGTH);
+    }
+
+    /** A value by its SI unit, rounded up as a load is; sizes as they are. */
+    String amount(double si, String unit) {
+        return shown(si, unit, Rounding.UP);
+    }
+
+    /** A capacity, rounded down. */
+    String capacity(double si, String unit) {
+        return shown(si, unit, Rounding.DOWN);
+    }
+
+    private String shown(double si, String unit, Rounding rounding) {
+        return switch (unit) {
+            case "1" -> Show.number(si, 3, rounding);
+            case "m" -> si >= SMALL ? length(si) : Show.number(si * MILLIMETRES, 3, rounding) + " mm";
+            case "rad" -> Show.of(si, Dimension.ANGLE, units, 3, rounding).text();
+            case "m³" -> Show.of(si, Dimension.VOLUME, units, 3, rounding).text();
+            case "Hz" -> Show.number(si, 3, rounding) + " Hz";
+            default -> dimension(unit).map(d -> Math.abs(si) < 1e-6 ? "0" : Show.of(si, d, units, 3, rounding).text()).orElse(Show.number(si, 3, rounding) + " " + unit);
+        };
+    }
+
     String plain(double number) {
         return Show.number(number, 4, Rounding.NEAREST);
     }
@@ -130,6 +160,9 @@ final class Format {
             case "N" -> java.util.Optional.of(Dimension.FORCE);
             case "N m" -> java.util.Optional.of(Dimension.MOMENT);
             case "kg" -> java.util.Optional.of(Dimension.MASS);
+            case "N/m" -> java.util.Optional.of(Dimension.FORCE_PER_LENGTH);
+            case "kg/m" -> java.util.Optional.of(Dimension.MASS_PER_LENGTH);
+            case "Pa/m" -> java.util.Optional.of(Dimension.PRESSURE_PER_DEPTH);
             default -> java.util.Optional.empty();
         };
     }

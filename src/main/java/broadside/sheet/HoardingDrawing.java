@@ -4,6 +4,7 @@ import broadside.action.CaseAction.PanelZones;
 import broadside.action.PostAction;
 import broadside.assess.Loads;
 import broadside.panel.Hoarding;
+import broadside.panel.Kentledge;
 import broadside.panel.Panel;
 import broadside.sheet.Drawing.Anchor;
 import broadside.sheet.Drawing.Fill;
@@ -105,7 +106,9 @@ final class HoardingDrawing {
         Canvas side = front.view(ItemDrawing.WIDTH / 2, ground, scale);
         double[][] panels = {{hoarding.clearance().metres(), hoarding.height().metres(), 0}};
         SideView view = new SideView(side, ItemDrawing.WIDTH / 2 - 110, ItemDrawing.WIDTH / 2 + 110, top, 0);
+        hoarding.held().kentledge().ifPresent(k -> braced(side, k));
         view.draw(panels);
+        FootingDrawing.of(loads).ifPresent(f -> f.draw(side, format));
         loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(0, c.height(), "F " + format.force(c.force()) + " in all", ItemDrawing.otherCase(loads.get()),
             format.length(c.height())));
         double dim = ItemDrawing.WIDTH / 2 + 80;
@@ -118,6 +121,17 @@ final class HoardingDrawing {
         side.text(ItemDrawing.WIDTH / 2, startY + 6, "side view, larger scale", Anchor.MIDDLE, Ink.BLACK);
         double bar = ItemDrawing.barLength(4 * top, format.units());
         side.scaleBar(ItemDrawing.WIDTH / 2 - 200, ground, bar / 2, ItemDrawing.barText(bar / 2, format));
-        return new Drawing(ItemDrawing.WIDTH, ground + 12, front.shapes());
+        return new Drawing(ItemDrawing.WIDTH, ground + Math.max(14, FootingDrawing.of(loads).map(f -> f.room(scale)).orElse(0.0)), front.shapes());
+    }
+
+    /** The raking brace, the ballast on its foot, and the two tipping edges. */
+    private void braced(Canvas side, Kentledge kentledge) {
+        kentledge.lever().ifPresent(lever -> {
+            double at = Math.min(lever.metres(), 100 / side.scale());
+            side.line(side.x(0), side.y(top * 0.9), side.x(at), side.y(0), Canvas.THICK, Ink.BLACK, false);
+            side.box(at - 6 / side.scale(), 0, 12 / side.scale(), 10 / side.scale(), Canvas.THICK, Fill.PAPER);
+            side.tippingEdge(0);
+            side.tippingEdge(at);
+        });
     }
 }

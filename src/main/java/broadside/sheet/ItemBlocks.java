@@ -47,6 +47,7 @@ final class ItemBlocks {
         item.loads().ifPresent(loads -> {
             blocks.add(new Heading(level, "Loads by case", anchor + "cases"));
             blocks.addAll(CaseTables.of(item.item(), loads, format));
+            loads.carried().ifPresent(c -> blocks.addAll(CarriedBlocks.of(c, format, anchor, level)));
         });
         blocks.add(new Heading(level, "What was assumed", anchor + "assumed"));
         blocks.add(notes(item, Note.Kind.ASSUMPTION, Note.Kind.CAUTION));
@@ -64,12 +65,16 @@ final class ItemBlocks {
             format.force(other.governs("base-shear").force()) + " " + companion));
         lines.add(moment(loads, other, format));
         double torsion = Math.abs(loads.governs("torsion").torsion());
+        List<Fact> more = new ArrayList<>();
         if (item.item() instanceof PostSign && torsion > 0) {
-            lines.add(Fact.of("Torsion about the middle of the posts", format.both(torsion, Dimension.MOMENT) + ", " + loads.level().name(),
+            more.add(Fact.of("Torsion about the middle of the posts", format.both(torsion, Dimension.MOMENT) + ", " + loads.level().name(),
                 format.moment(Math.abs(other.governs("torsion").torsion())) + " " + companion + ", case " + CaseTables.name(loads.governs("torsion"))));
         }
-        lines.addAll(reactions(loads, format).stream().limit(MOST_LINES - 1 - lines.size()).toList());
-        lines.add(sure(item, loads));
+        more.addAll(reactions(loads, format));
+        List<Fact> last = new ArrayList<>(loads.carried().map(c -> CarriedBlocks.answer(c, format)).stream().toList());
+        last.add(sure(item, loads));
+        lines.addAll(more.stream().limit(Math.max(0, MOST_LINES - last.size() - lines.size())).toList());
+        lines.addAll(last);
         return new Answer(lines);
     }
 
@@ -132,8 +137,13 @@ final class ItemBlocks {
         long recalled = steps.stream().filter(s -> s.status() == Status.RECALLED).count();
         long quoted = steps.stream().filter(s -> s.status() == Status.SECOND_HAND).count();
         String first = recalled == 0 ? "no step rests on memory" : recalled + " of " + steps.size() + " steps rest on figures not yet checked against print";
-        return Fact.of("How sure", first, (quoted > 0 ? quoted + " more on figures seen quoted or in another edition; " : "")
-            + (loads.foot() == Foot.GROUND && loads.supports().posts().size() > 0 ? "loads only: no post, footing or ground was checked" : "loads only: what holds it was not checked"));
+        return Fact.of("How sure", first, (quoted > 0 ? quoted + " more on figures seen quoted or in another edition; " : "") + scope(loads));
+    }
+
+    /** What was checked of what holds it, in one phrase. */
+    private static String scope(Loads loads) {
+        return loads.carried().isPresent() ? "what carries it is pre-sized only, for an engineer's review"
+            : loads.foot() == Foot.GROUND && loads.supports().posts().size() > 0 ? "loads only: no post, footing or ground was checked" : "loads only: what holds it was not checked";
     }
 
     private static List<Paragraph> overrides(ItemResult item) {

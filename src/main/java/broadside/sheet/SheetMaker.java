@@ -41,6 +41,10 @@ public final class SheetMaker {
             }
             blocks.addAll(ItemBlocks.of(assessment, item, format, anchor, many ? 3 : 2));
         }
+        for (int i = 0; i < assessment.items().size(); i++) {
+            blocks.addAll(SiteSheet.of(assessment, assessment.items().get(i), format, many ? "item-" + (i + 1) + "-" : ""));
+        }
+        blocks.add(new Block.NewPage());
         blocks.addAll(CheckList.of(assessment, format, job.head("date").orElse(date)));
         for (int i = 0; i < assessment.items().size(); i++) {
             blocks.addAll(CalculationBlocks.of(assessment.items().get(i), format, many ? "item-" + (i + 1) + "-" : "", many));

@@ -59,7 +59,8 @@ final class SignDrawing {
         front.scaleBar(margin, ground + 34, bar, ItemDrawing.barText(bar, format));
         front.text(front.x((left + right) / 2), 12, ItemDrawing.elevation(loads), Anchor.MIDDLE, Ink.BLACK);
         front.text(ItemDrawing.WIDTH - 78, 12, "side view", Anchor.MIDDLE, Ink.BLACK);
-        return new Drawing(ItemDrawing.WIDTH, ground + 44, front.shapes());
+        double below = FootingDrawing.of(loads).map(f -> f.room(scale)).orElse(0.0);
+        return new Drawing(ItemDrawing.WIDTH, ground + Math.max(44, below), front.shapes());
     }
 
     /** Room on the left for the dimensions upward, points. */
@@ -222,6 +223,7 @@ final class SignDrawing {
             .toArray(double[][]::new);
         SideView view = new SideView(side, ItemDrawing.WIDTH - 150, ItemDrawing.WIDTH - 8, top, 0);
         view.draw(panels);
+        FootingDrawing.of(loads).ifPresent(f -> f.draw(side, format));
         loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(panels[0][2], c.height(), "F " + format.force(c.force()),
             ItemDrawing.otherCase(loads.get()), format.length(c.height())));
     }

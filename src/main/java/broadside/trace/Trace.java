@@ -49,7 +49,7 @@ public final class Trace {
      * out what is then recorded once it is chosen.
      */
     public Trace quiet() {
-        return new Trace(givens, null, overrides, used, found, suffix);
+        return new Trace(givens, null, overrides, used, new HashMap<>(found), suffix);
     }
 
     /** The same sheet, with {@code part} behind a slash in the name of each step that is recorded through it. */

@@ -36,6 +36,19 @@ record ChoiceWords(String words, String small) {
         duration-rule|code|Yes: the code's own rule for a short stay counts|
         authority-minimum-level|code|At the level of the code's own loads|
         authority-minimum-level|service|At service level (allowable stress)|
+        kind|planted|Planted: the post stands in the ground|
+        kind|pier|Pier: a shaft of concrete|
+        kind|pad|Pad: a block that holds by its weight|
+        rule|ground-factor|Ground factor|
+        rule|ibc|IBC, lateral bearing|
+        rule|broms-clay|Broms, clay|
+        rule|broms-sand|Broms, sand|
+        design|en|Eurocodes|
+        design|us-asd|United States, allowable stress|
+        design|us-strength|United States, load and resistance factors|
+        slope|unknown|I don't know|
+        water|unknown|I don't know|
+        water|deep|Deep below the footing|
         enclosure|enclosed|No: doors and windows are shut in a storm|enclosed
         enclosure|partially enclosed|Yes, mostly on one side|partially enclosed
         enclosure|open|Yes, on all sides|open

@@ -123,25 +123,55 @@ final class KindQuestions {
             case POST_SIGN -> {
                 Shape posts = ask.shape(shape, "posts");
                 bits.addAll(Bit.rows(ask.ask(posts, item + ".posts", "count", "spacing", "section", "grade")));
+                bits.add(choice(posts));
                 bits.add(Bit.fold("The section has no name: its outline and sizes", item + ".posts-outline", ask.open(item + ".posts", "shape", "width", "depth"),
                     Bit.rows(ask.ask(posts, item + ".posts", "shape", "width", "depth"))));
             }
-            case HOARDING -> bits.addAll(Bit.rows(ask.rest(ask.shape(shape, "posts"), item + ".posts", Set.of())));
+            case HOARDING -> {
+                Shape posts = ask.shape(shape, "posts");
+                bits.addAll(Bit.rows(ask.ask(posts, item + ".posts", "spacing", "section", "grade")));
+                bits.add(choice(posts));
+            }
             case BANNER_FENCE -> {
                 bits.addAll(Bit.rows(ask.ask(shape, item, "foot-length", "foot-mass", "panel-mass")));
                 bits.add(entries("Blocks weigh it down", "block", "Block ", "Add a block", "support"));
                 bits.addAll(Bit.rows(ask.ask(shape, item, "ground", "stakes")));
+                bits.add(ask.fold("The friction or the hold of stakes was measured", shape, item, "friction", "friction-reason", "stake-proof-load", "stakes-per-panel"));
             }
             case FACADE_PANEL -> bits.addAll(Bit.rows(ask.ask(shape, item, "mass")));
             case PROJECTING_SIGN -> bits.addAll(Bit.rows(ask.rest(ask.shape(shape, "brackets"), item + ".brackets", Set.of())));
             case SPANNED_BANNER -> bits.add(ask.fold("The weight of the fabric is known", shape, item, "mass-per-area"));
         }
         for (Field field : shape.fields()) {
-            if (field.holds() == Field.Holds.OBJECT && !PLAIN.contains(field.name())) {
+            if (field.name().equals("footing")) {
+                bits.add(footing());
+            } else if (field.holds() == Field.Holds.OBJECT && !PLAIN.contains(field.name())) {
                 bits.add(below(SENTENCES.getOrDefault(field.name(), capital(field.meaning())), field.name()));
             }
         }
         return bits;
+    }
+
+    /** How a section is chosen where none is typed. */
+    private Bit choice(Shape posts) {
+        return ask.fold("A section is chosen where none is typed: from which series, and by which limit", posts, item + ".posts", "series", "deflection-limit",
+            "load-duration");
+    }
+
+    /** The footing: what is asked first, then what is known of the soil and what stands around it. */
+    private Bit footing() {
+        Shape footing = ask.shape(shape, "footing");
+        String path = item + ".footing";
+        anchors.put(path, path);
+        List<Bit> inside = new ArrayList<>(Bit.rows(ask.ask(footing, path, "kind", "shape", "width", "length", "depth", "ground")));
+        inside.add(rows("More is known of the soil", footing, path, "rule", "lateral-bearing", "cohesion", "friction-angle", "soil-density", "bearing", "friction",
+            "safety-factor", "half-inch-motion", "third-increase"));
+        inside.add(rows("Pavement, slope, water, frost and buried services", footing, path, "paved", "slope", "water", "frost-depth", "services"));
+        return Bit.fold(SENTENCES.get("footing"), path, ask.open(path), inside);
+    }
+
+    private Bit rows(String sentence, Shape of, String path, String... names) {
+        return Bit.fold(sentence, path + "-" + names[0] + "-fold", ask.open(path, names), Bit.rows(ask.ask(of, path, names)));
     }
 
     /** The entries of a list of which there may be none, folded. */

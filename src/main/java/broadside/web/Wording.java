@@ -32,7 +32,8 @@ record Wording(String label, String hint, String metric, String us) {
         job.date|Date of the job|Like 2026-12-01
         job.engineer|Engineer, with licence|The person who will review it
         job.remarks|Remarks|
-        basis.stability|Rule for overturning|
+        basis.stability|Rule for overturning and sliding|Such as en-1990-equ, asd-0.6 or factor-1.5; left empty, the one that goes with the code
+        basis.design|Rules for posts|Left empty, those that go with the code
         site.name|Name of the place|
         site.basic-speed|Basic wind speed|From the wind map or the national annex for this place
         site.averaging|Kind of speed|A gust and a mean of the same wind differ by half
@@ -105,6 +106,10 @@ record Wording(String label, String hint, String metric, String us) {
         banner-fence.foot-length|Length of a foot|Across the line of the fence
         banner-fence.ground|What it stands on|Such as grass, asphalt or gravel, and whether it can be wet
         banner-fence.stakes|Stakes|Where the ground takes them
+        banner-fence.friction|Friction coefficient|Left empty, the lowest printed value for that surface
+        banner-fence.friction-reason|Why it may be above 1|
+        banner-fence.stake-proof-load|Proof load of one stake|Pulled on this ground, on this day; without one, stakes do not count
+        banner-fence.stakes-per-panel|Stakes that hold one panel|Against each direction
         block.mass|Mass of the block|
         block.lever|From the line of the fence to the middle of the block|
         brace.lever|From the line of the fence to the foot of the brace|
@@ -138,23 +143,48 @@ record Wording(String label, String hint, String metric, String us) {
         spanned-banner.mass-per-area|Mass of the fabric||g/m2|lb/ft2
         posts.count|Number of posts|
         posts.spacing|Distance between posts|From middle to middle; empty for one post
-        posts.section|Section of a post|Such as CHS 114.3x5
-        posts.grade|Grade of the posts|Such as S355
+        posts.section|Section of a post|Such as CHS 114.3x5, SHS 100x5 hot, PIPE 4 STD or TIMBER 100x100; left empty, one is proposed
+        posts.grade|Grade of the posts|Such as S355, A53 B or C24; left empty, the usual one of the section
+        posts.series|Series to choose from|Such as chs-hot, shs-hot, us-pipe or timber-metric; left empty, the usual ones of the code
+        posts.deflection-limit|Limit on the deflection|Such as tdb4 or l-80; left empty, the usual one of the code
+        posts.load-duration|Duration of the wind on timber|Short is the safe one
         posts.shape|Outline of a post|
         posts.width|Width of a post|Across the wind, or its diameter|mm|in
         posts.depth|Depth of a post|Along the wind|mm|in
         hoarding-posts.spacing|Distance between posts|From middle to middle
-        hoarding-posts.section|Section of a post|Such as SHS 100x5
-        hoarding-posts.grade|Grade of the posts|Such as S355
-        footing.kind|Kind of footing|planted, pier or pad
-        footing.shape|Shape in plan|round or square
-        footing.width|Width or diameter|
-        footing.length|Length in plan|
-        footing.depth|Depth below the ground|
-        footing.ground|Class of the ground|
-        ballast.mass|Mass at each brace|
+        hoarding-posts.section|Section of a post|Such as CHS 114.3x5, SHS 100x5 hot, PIPE 4 STD or TIMBER 100x100; left empty, one is proposed
+        hoarding-posts.grade|Grade of the posts|Such as S355, A53 B or C24; left empty, the usual one of the section
+        hoarding-posts.series|Series to choose from|Such as chs-hot, shs-hot, us-pipe or timber-metric; left empty, the usual ones of the code
+        hoarding-posts.deflection-limit|Limit on the deflection|Such as tdb4 or l-80; left empty, the usual one of the code
+        hoarding-posts.load-duration|Duration of the wind on timber|Short is the safe one
+        footing.kind|Kind of footing|Left empty, posts planted in concrete
+        footing.shape|Outline in plan|
+        footing.width|Width or diameter|Of the concrete or of the post in the ground; of a pad along the wind
+        footing.length|Length of a pad|Across the wind
+        footing.depth|Depth below the ground|Left empty, it is sized
+        footing.ground|Ground|good, average or poor; or rock, soft rock, gravel, sand or clay; left empty, the poorest is taken
+        footing.rule|Rule for the depth|Left empty, the one that fits what is known
+        footing.lateral-bearing|Allowable lateral bearing|For each metre or foot of depth
+        footing.cohesion|Undrained shear strength|Of clay
+        footing.friction-angle|Angle of friction|Of sand
+        footing.soil-density|Density of the soil|
+        footing.bearing|Allowable pressure under a pad|
+        footing.friction|Friction coefficient under a pad|
+        footing.safety-factor|Factor on the loads of an ultimate method|
+        footing.half-inch-motion|May the post move 12.7 mm (half an inch) at the ground?|IBC then counts lateral bearing twice
+        footing.third-increase|Does the increase of a third for wind count?|IBC, alternate load combinations only
+        footing.paved|Does a rigid floor or pavement hold the post at the ground?|
+        footing.slope|Does the ground near it slope?|
+        footing.water|Ground water|
+        footing.frost-depth|Depth of frost|
+        footing.services|Buried services|
+        ballast.mass|Mass on the foot of each brace|Left empty, it is sized
         ballast.lever|From the face to the middle of the ballast|
-        ballast.ground|Surface that it stands on|
+        ballast.front-mass|Mass on the foot below the face|At each brace
+        ballast.face-mass|Mass of boards and post|That goes with one brace
+        ballast.ground|Surface that it stands on|Such as concrete, asphalt, gravel or grass
+        ballast.friction|Friction coefficient|Left empty, the lowest printed value for that surface
+        ballast.friction-reason|Why it may be above 1|
         fixings.columns|Columns of fixings|Side by side
         fixings.rows|Rows of fixings|One above the other
         fixings.horizontal-pitch|Distance between columns||mm|in

@@ -48,7 +48,7 @@ final class Cases {
             list.add(new Hoarding.Gate(Length.metres(gates[i]), Length.metres(gates[i + 1])));
         }
         return new Hoarding("H1", Length.metres(length), Length.metres(2), Length.metres(0), 1, Length.metres(0), Length.metres(0), 1, list, Optional.empty(),
-            List.of());
+            Hoarding.Held.NONE, List.of());
     }
 
     static List<PanelCases> open(Hoarding hoarding) {

@@ -90,7 +90,8 @@ final class En1991Inputs {
 
         FacadePanel panel(FacadePanel.Backing backing, Building.Enclosure enclosure) {
             return new FacadePanel("F1", backing, Length.metres(panelWidth), Length.metres(panelHeight), Length.metres(bottom), Length.metres(corner),
-                new Building(Length.metres(width), Length.metres(depth), Length.metres(height), Optional.empty(), enclosure), Optional.empty(), Optional.empty(), List.of());
+                new Building(Length.metres(width), Length.metres(depth), Length.metres(height), Optional.empty(), enclosure), Optional.empty(), Length.metres(0), Optional.empty(), Optional.empty(),
+                List.of());
         }
     }
 

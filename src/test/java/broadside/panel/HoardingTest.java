@@ -18,7 +18,7 @@ class HoardingTest {
 
     private static Hoarding hoarding(double length, Hoarding.Gate... gates) {
         return new Hoarding("H1", Length.metres(length), Length.metres(2.4), Length.metres(0.1), 0.9, Length.metres(1.5), Length.metres(2), 1, List.of(gates),
-            Optional.empty(), List.of());
+            Optional.empty(), Hoarding.Held.NONE, List.of());
     }
 
     private static Panel panel(String part, double width, double middle, double left, double right) {

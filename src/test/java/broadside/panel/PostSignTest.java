@@ -20,7 +20,7 @@ class PostSignTest {
     }
 
     private static PostSign sign(Board... boards) {
-        return new PostSign("S1", List.of(boards), new PostSign.Faces(1, 0), new Posts(1, Optional.empty(), Optional.empty()), Optional.empty(), List.of());
+        return new PostSign("S1", List.of(boards), new PostSign.Faces(1, 0), new Posts(1, Optional.empty(), Optional.empty()), Optional.empty(), Optional.empty(), List.of());
     }
 
     @Test
@@ -43,7 +43,7 @@ class PostSignTest {
     void aSignNeedsABoardAndKeepsItsOwnList() {
         assertThatThrownBy(PostSignTest::sign).isInstanceOf(IllegalArgumentException.class);
         List<Board> boards = new ArrayList<>(List.of(board("", 0)));
-        PostSign sign = new PostSign("S1", boards, new PostSign.Faces(1, 0), new Posts(1, Optional.empty(), Optional.empty()), Optional.empty(), List.of());
+        PostSign sign = new PostSign("S1", boards, new PostSign.Faces(1, 0), new Posts(1, Optional.empty(), Optional.empty()), Optional.empty(), Optional.empty(), List.of());
         boards.clear();
         assertThat(sign.boards()).hasSize(1);
     }
