@@ -7,6 +7,7 @@ import broadside.codes.NotCovered;
 import broadside.codes.WindCode;
 import broadside.panel.Item;
 import broadside.site.SpeedConversion;
+import broadside.support.Catalogue;
 import broadside.table.Edition;
 import broadside.table.OutsideTable;
 import broadside.table.Rows;
@@ -28,8 +29,11 @@ public final class Assessor {
     private final Scope scope;
     private final About about;
     private final SideBySide sideBySide;
+    private final TableLibrary tables;
+    private Catalogue catalogue; // made when first asked for
 
     public Assessor(TableLibrary tables) {
+        this.tables = tables;
         this.codes = new CodeLibrary(tables);
         Edition own = tables.edition("own-rules/1").orElseThrow();
         this.edgeOnRule = own.rows("edge-on");
@@ -46,6 +50,14 @@ public final class Assessor {
 
     public About about() {
         return about;
+    }
+
+    /** Sections and grades of posts. */
+    public synchronized Catalogue catalogue() {
+        if (catalogue == null) {
+            catalogue = new Catalogue(tables);
+        }
+        return catalogue;
     }
 
     /**
