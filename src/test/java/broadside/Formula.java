@@ -5,7 +5,7 @@ import java.util.Set;
 
 /**
  * Works out the formula texts of the calculation sheet, as a reader with a pocket calculator would: symbols side by side
- * are multiplied, ½ and ² are what they look like, max takes its parts between semicolons.
+ * are multiplied, ½, π and ² are what they look like, max takes its parts between semicolons.
  */
 final class Formula {
 
@@ -87,6 +87,9 @@ final class Formula {
             double inside = sum();
             close();
             return inside;
+        }
+        if (take('π')) {
+            return Math.PI;
         }
         if (Character.isDigit(c)) {
             int start = at;

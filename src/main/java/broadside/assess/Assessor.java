@@ -7,6 +7,7 @@ import broadside.codes.NotCovered;
 import broadside.codes.WindCode;
 import broadside.panel.Item;
 import broadside.site.SpeedConversion;
+import broadside.support.Catalogue;
 import broadside.support.UnfitAnswer;
 import broadside.table.Edition;
 import broadside.table.OutsideTable;
@@ -29,6 +30,7 @@ public final class Assessor {
     private final Scope scope;
     private final About about;
     private final SideBySide sideBySide;
+    private final SupportRules supportRules;
 
     public Assessor(TableLibrary tables) {
         this.codes = new CodeLibrary(tables);
@@ -36,6 +38,7 @@ public final class Assessor {
         this.edgeOnRule = own.rows("edge-on");
         this.stackRule = own.rows("stacks");
         this.scope = new Scope(own.rows("scope"), own.rows("size-limits"));
+        this.supportRules = SupportRules.of(tables, new Catalogue(tables));
         this.about = About.of(tables.digest());
         Edition gusts = tables.edition("gust-factors/1").orElseThrow();
         this.sideBySide = new SideBySide(this, new SpeedConversion(gusts.curve("durst")), own.rows("terrain-match"), gusts.rows("gust-over-ten-minutes"));
@@ -47,6 +50,11 @@ public final class Assessor {
 
     public About about() {
         return about;
+    }
+
+    /** Sections and grades of posts. */
+    public Catalogue catalogue() {
+        return supportRules.catalogue();
     }
 
     /**

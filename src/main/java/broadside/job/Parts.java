@@ -9,9 +9,11 @@ import broadside.quantity.Speed;
 import broadside.quantity.Typed;
 import broadside.site.Averaging;
 import broadside.site.SpeedConversion;
+import broadside.support.Catalogue;
 import broadside.table.OutsideTable;
 import broadside.trace.Status;
 import broadside.trace.Trace;
+import java.util.function.Supplier;
 import tools.jackson.databind.JsonNode;
 
 /** Published checks of one part of the calculation, without a job: a speed, a plate in the wind. */
@@ -22,10 +24,12 @@ final class Parts {
 
     private final SpeedConversion conversion;
     private final CodeLibrary codes;
+    private final Supplier<Catalogue> catalogue;
 
-    Parts(SpeedConversion conversion, CodeLibrary codes) {
+    Parts(SpeedConversion conversion, CodeLibrary codes, Supplier<Catalogue> catalogue) {
         this.conversion = conversion;
         this.codes = codes;
+        this.catalogue = catalogue;
     }
 
     Trace run(JsonNode given) {
@@ -33,8 +37,9 @@ final class Parts {
         return switch (part) {
             case "convert-speed" -> convertSpeed(given);
             case "plate-drag" -> plateDrag(given);
-            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed "
-                + "and plate-drag");
+            case "section" -> SectionParts.section(given, catalogue.get());
+            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed, "
+                + "plate-drag and section");
         };
     }
 

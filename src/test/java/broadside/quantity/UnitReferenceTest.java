@@ -118,7 +118,7 @@ class UnitReferenceTest {
             case PRESSURE -> Map.of("Pa", PASCAL, "kPa", KILO(PASCAL), "MPa", MEGA(PASCAL),
                     "N/m2", NEWTON.divide(SQUARE_METRE), "kN/m2", KILO(NEWTON).divide(SQUARE_METRE),
                     "kgf/m2", KGF.divide(SQUARE_METRE), "psf", LBF.divide(USCustomary.SQUARE_FOOT),
-                    "psi", LBF.divide(SQUARE_INCH));
+                    "psi", LBF.divide(SQUARE_INCH), "ksi", LBF.multiply(1000).divide(SQUARE_INCH));
             case FORCE -> Map.of("N", NEWTON, "kN", KILO(NEWTON), "lbf", LBF, "kip", LBF.multiply(1000),
                     "kgf", KGF);
             case MOMENT -> Map.of("N m", NEWTON.multiply(METRE), "kN m", KILO(NEWTON).multiply(METRE),
