@@ -33,8 +33,9 @@ final class Parts {
         return switch (part) {
             case "convert-speed" -> convertSpeed(given);
             case "plate-drag" -> plateDrag(given);
-            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed "
-                + "and plate-drag");
+            case "tip-mass-frequency", "post-bending-asd", "post-modulus-needed", "post-torsion" -> PostParts.shipped().run(part, given);
+            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed, "
+                + "plate-drag, " + String.join(", ", PostParts.NAMES));
         };
     }
 
