@@ -38,8 +38,9 @@ final class Parts {
             case "convert-speed" -> convertSpeed(given);
             case "plate-drag" -> plateDrag(given);
             case "section" -> SectionParts.section(given, catalogue.get());
+            case "tip-mass-frequency", "post-bending-asd", "post-modulus-needed", "post-torsion" -> PostParts.shipped().run(part, given);
             default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed, "
-                + "plate-drag and section");
+                + "plate-drag, section, " + String.join(", ", PostParts.NAMES));
         };
     }
 
