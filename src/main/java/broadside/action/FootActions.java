@@ -18,7 +18,17 @@ public final class FootActions {
     private static final String STATICS = "statics";
 
     /** The actions of every case, front and back, and the combinations that posts are worked out from. */
-    public record Result(List<CaseAction> cases, List<Combined> combinations) { }
+    public record Result(List<CaseAction> cases, List<Combined> combinations) {
+
+        /** Together with those of another arrangement of the item. */
+        public Result with(Result other) {
+            List<CaseAction> allCases = new ArrayList<>(cases);
+            allCases.addAll(other.cases);
+            List<Combined> all = new ArrayList<>(combinations);
+            all.addAll(other.combinations);
+            return new Result(allCases, all);
+        }
+    }
 
     /**
      * How the item stands.

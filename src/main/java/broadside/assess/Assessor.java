@@ -31,8 +31,10 @@ public final class Assessor {
     private final About about;
     private final SideBySide sideBySide;
     private final SupportRules supportRules;
+    private final TableLibrary tables;
 
     public Assessor(TableLibrary tables) {
+        this.tables = tables;
         this.codes = new CodeLibrary(tables);
         Edition own = tables.edition("own-rules/1").orElseThrow();
         this.edgeOnRule = own.rows("edge-on");
@@ -50,6 +52,10 @@ public final class Assessor {
 
     public About about() {
         return about;
+    }
+
+    public TableLibrary tables() {
+        return tables;
     }
 
     /** Sections and grades of posts. */

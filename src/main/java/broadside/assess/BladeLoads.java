@@ -32,7 +32,8 @@ final class BladeLoads {
         EdgeOn edgeOn = by.edgeOn(sign.panels(), i -> sign.depth().metres());
         double weight = Weights.of(sign.mass(), "mass of the sign", sheet);
         List<Reaction> reactions = brackets(sign, governing, edgeOn, weight, sheet);
-        return new Loads(by.velocity(sign.panels()), cases, governing, Loads.Supports.of(reactions), Optional.of(edgeOn),
+        Optional<Carried> carried = by.carriers().flatMap(c -> sign.fixings().map(f -> FixingCarrier.blade(sign, f, governing, edgeOn, by, c)));
+        return new Loads(by.velocity(sign.panels()), cases, governing, Loads.Supports.of(reactions, carried), Optional.of(edgeOn),
             by.code().level(by.job().site()), weight, Foot.WALL);
     }
 

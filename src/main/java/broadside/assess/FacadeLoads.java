@@ -29,7 +29,8 @@ final class FacadeLoads {
         double weight = Weights.of(facade.mass(), "mass of the panel", sheet);
         List<Reaction> reactions = weight == 0 ? List.of() : List.of(new Reaction("self-weight", "Weight along the wall", weight, "N", ""));
         Map<String, CaseAction> governing = Map.of("base-shear", ItemLoads.most(cases, CaseAction::force));
-        return new Loads(by.velocity(facade.panels()), cases, governing, Loads.Supports.of(reactions), Optional.empty(), by.code().level(by.job().site()),
+        Optional<Carried> carried = by.carriers().flatMap(c -> facade.fixings().map(f -> FixingCarrier.facade(facade, f, cases, by, c)));
+        return new Loads(by.velocity(facade.panels()), cases, governing, Loads.Supports.of(reactions, carried), Optional.empty(), by.code().level(by.job().site()),
             weight, Foot.NONE);
     }
 

@@ -28,7 +28,8 @@ final class FenceLoads {
             cases.addAll(FootActions.of(List.of(line), by.symbols(), new Standing(BannerFence.BARE, Foot.GROUND, List.of()), part).cases());
             reactions.addAll(FencePanels.of(line, fence.panelLength().metres(), fence.count(), "without its cover", part));
         });
-        return new Loads(by.velocity(fence.panels()), cases, governing, Loads.Supports.of(reactions), Optional.of(by.edgeOn(fence.panels(), i -> 0)),
+        Optional<Carried> carried = by.carriers().map(c -> FenceCarrier.fence(fence, governing.get("base-shear"), c, by.sheet()));
+        return new Loads(by.velocity(fence.panels()), cases, governing, Loads.Supports.of(reactions, carried), Optional.of(by.edgeOn(fence.panels(), i -> 0)),
             by.code().level(by.job().site()), 0, Foot.GROUND);
     }
 

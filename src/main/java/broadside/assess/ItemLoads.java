@@ -22,9 +22,11 @@ import broadside.panel.Panel;
 import broadside.panel.PostSign;
 import broadside.panel.ProjectingSign;
 import broadside.panel.SpannedBanner;
+import broadside.support.WindLevels;
 import broadside.table.Rows;
 import broadside.trace.Trace;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -37,12 +39,15 @@ final class ItemLoads implements Item.Kinds<Loads> {
     private final Job job;
     private final WindCode code;
     private final Rules rules;
+    private final Optional<Carriers> carriers;
     private final Trace sheet;
 
     /** Rules of this tool and the rule for posts, beside the code. */
     record Rules(Rows edgeOn, Rows stacks, Optional<MemberRule> posts) { }
 
-    ItemLoads(Job job, WindCode code, Rules rules, Trace sheet) {
+    /** Loads of an item; {@code carriers} is empty where they are loads only. */
+    ItemLoads(Job job, WindCode code, Rules rules, Optional<Carriers> carriers, Trace sheet) {
+        this.carriers = carriers;
         this.job = job;
         this.code = code;
         this.rules = rules;
@@ -50,28 +55,34 @@ final class ItemLoads implements Item.Kinds<Loads> {
     }
 
     @Override
-    public Loads postSign(PostSign sign) {
-        List<PanelCases> panels = panels(sign.mark(), "posts", sign.panels(), sheet);
+    public Loads postSign(PostSign typed) {
+        List<PanelCases> panels = panels(typed.mark(), "posts", typed.panels(), sheet);
+        Optional<List<PanelCases>> one = Stack.of(typed, rules.stacks(), sheet).map(e -> panels(typed.mark(), "posts", e, sheet.part(PostSign.ENVELOPE)));
+        EdgeOn edgeOn = edgeOn(typed.panels(), i -> typed.boards().get(i).depth().metres());
+        Optional<SignCarrier> carrier = carriers.map(c -> new SignCarrier(c, typed, standing(panels, one, List.of(), sheet.quiet()).combinations(), edgeOn, this));
+        PostSign sign = carrier.map(SignCarrier::sign).orElse(typed);
         List<PostDrag> drag = rules.posts().map(rule -> PostDrag.of(sign, code, rule, job.site(), sheet)).orElse(List.of());
-        FootActions.Result actions = FootActions.of(panels, code.symbols(), new Standing("", Foot.GROUND, drag), sheet);
-        List<CaseAction> cases = new ArrayList<>(actions.cases());
-        List<FootActions.Combined> combinations = new ArrayList<>(actions.combinations());
-        Stack.of(sign, rules.stacks(), sheet).ifPresent(envelope -> {
-            Trace part = sheet.part(PostSign.ENVELOPE);
-            FootActions.Result one = FootActions.of(panels(sign.mark(), "posts", envelope, part), code.symbols(),
-                new Standing(PostSign.ENVELOPE, Foot.GROUND, drag), part);
-            cases.addAll(one.cases());
-            combinations.addAll(one.combinations());
-        });
-        List<PostAction> posts = SignPosts.of(sign.posts().positions(), combinations, drag, sheet);
-        Map<String, CaseAction> governing = governing(cases);
-        EdgeOn edgeOn = edgeOn(sign.panels(), i -> sign.boards().get(i).depth().metres());
+        FootActions.Result actions = standing(panels, one, drag, sheet);
+        List<PostAction> posts = SignPosts.of(sign.posts().positions(), actions.combinations(), drag, sheet);
+        Map<String, CaseAction> governing = governing(actions.cases());
         double weight = Weights.boards(sign, sheet);
         List<Reaction> reactions = new ArrayList<>(Replacement.of(sign, job, code, governing, sheet));
         reactions.addAll(VShape.of(sign, governing, sheet));
         Optional<PostDrag> all = drag.stream().reduce(PostDrag::plus);
-        return new Loads(velocity(sign.panels()), cases, governing, new Loads.Supports(posts, all, reactions, Balances.sign(sign, combinations, posts)),
-            Optional.of(edgeOn), code.level(job.site()), weight, Foot.GROUND);
+        Optional<Carried> carried = carrier.map(SignCarrier::carried);
+        return new Loads(velocity(sign.panels()), actions.cases(), governing, new Loads.Supports(posts, all, reactions, Balances.sign(sign, actions.combinations(), posts),
+            carried), Optional.of(edgeOn), code.level(job.site()), weight, Foot.GROUND);
+    }
+
+    /** Boards apart, and as one where they hang close to each other. */
+    private FootActions.Result standing(List<PanelCases> panels, Optional<List<PanelCases>> one, List<PostDrag> drag, Trace trace) {
+        FootActions.Result apart = FootActions.of(panels, code.symbols(), new Standing("", Foot.GROUND, drag), trace);
+        return one.map(envelope -> apart.with(FootActions.of(envelope, code.symbols(), new Standing(PostSign.ENVELOPE, Foot.GROUND, drag), trace.part(PostSign.ENVELOPE))))
+            .orElse(apart);
+    }
+
+    Optional<MemberRule> memberRule() {
+        return rules.posts();
     }
 
     @Override
@@ -80,9 +91,22 @@ final class ItemLoads implements Item.Kinds<Loads> {
         FootActions.Result actions = FootActions.of(panels, code.symbols(), new Standing("", Foot.GROUND, List.of()), sheet);
         List<PostAction> posts = hoarding.spacing().map(spacing -> HoardingPosts.of(hoarding, spacing.metres(), panels, shut(hoarding),
             code.symbols(), sheet)).orElse(List.of());
+        EdgeOn edgeOn = edgeOn(hoarding.panels(), i -> 0);
+        Optional<Carried> carried = posts.isEmpty() ? Optional.empty() : carriers.map(c -> hoarding(hoarding, posts, edgeOn, c));
         return new Loads(velocity(hoarding.panels()), actions.cases(), governing(actions.cases()),
-            new Loads.Supports(posts, Optional.empty(), List.of(), posts.isEmpty() ? List.of() : Balances.hoarding(hoarding, panels)),
-            Optional.of(edgeOn(hoarding.panels(), i -> 0)), code.level(job.site()), 0, Foot.GROUND);
+            new Loads.Supports(posts, Optional.empty(), List.of(), posts.isEmpty() ? List.of() : Balances.hoarding(hoarding, panels), carried),
+            Optional.of(edgeOn), code.level(job.site()), 0, Foot.GROUND);
+    }
+
+    private Carried hoarding(Hoarding hoarding, List<PostAction> posts, EdgeOn edgeOn, Carriers by) {
+        if (hoarding.held().kentledge().isPresent()) {
+            return FenceCarrier.hoarding(hoarding, hoarding.held().kentledge().get(), by, sheet);
+        }
+        PostAction worst = posts.stream().max(Comparator.comparingDouble(PostAction::moment)).orElseThrow();
+        PostDemands demands = PostDemands.of(hoarding, worst, edgeOn, posts.size(), by.rules().own().number("board-mass", "value"), sheet);
+        PostCarrier carrier = new PostCarrier(by, hoarding.held().posts(), hoarding.held().footing(), demands, outline -> PostDrag.NONE);
+        WindLevels levels = by.levels(sheet);
+        return carrier.carry(carrier.choose(levels, sheet.quiet()), levels, sheet);
     }
 
     /** The whole wall while its gates are shut. */
@@ -108,6 +132,11 @@ final class ItemLoads implements Item.Kinds<Loads> {
     @Override
     public Loads spannedBanner(SpannedBanner banner) {
         return BannerLoads.of(banner, this);
+    }
+
+    /** What carries the item is checked by these; empty where it is loads only. */
+    Optional<Carriers> carriers() {
+        return carriers;
     }
 
     Job job() {

@@ -32,6 +32,11 @@ final class Weights {
         return mass.map(m -> weight(m.kilograms(), what, sheet)).orElse(0.0);
     }
 
+    /** Weight of a mass in kg, N. */
+    static double newtons(double mass) {
+        return mass * G;
+    }
+
     private static double weight(double mass, String what, Trace sheet) {
         sheet.given("m", what, mass, "kg", "");
         sheet.given("g_n", "standard acceleration of free fall", G, "m/s²", "");
