@@ -22,6 +22,7 @@ import java.util.Set;
 /** Job in, assessment out: the one door that the page, the commands and the document use. */
 public final class Assessor {
 
+    private final TableLibrary tables;
     private final CodeLibrary codes;
     private final Rows edgeOnRule;
     private final Rows stackRule;
@@ -30,6 +31,7 @@ public final class Assessor {
     private final SideBySide sideBySide;
 
     public Assessor(TableLibrary tables) {
+        this.tables = tables;
         this.codes = new CodeLibrary(tables);
         Edition own = tables.edition("own-rules/1").orElseThrow();
         this.edgeOnRule = own.rows("edge-on");
@@ -42,6 +44,11 @@ public final class Assessor {
 
     public CodeLibrary codes() {
         return codes;
+    }
+
+    /** The tables that it works from. */
+    public TableLibrary tables() {
+        return tables;
     }
 
     public About about() {

@@ -10,11 +10,12 @@ import broadside.quantity.Typed;
 import broadside.site.Averaging;
 import broadside.site.SpeedConversion;
 import broadside.table.OutsideTable;
+import broadside.table.TableLibrary;
 import broadside.trace.Status;
 import broadside.trace.Trace;
 import tools.jackson.databind.JsonNode;
 
-/** Published checks of one part of the calculation, without a job: a speed, a plate in the wind. */
+/** Published checks of one part of the calculation, without a job: a speed, a plate in the wind, a footing. */
 final class Parts {
 
     private static final String FASTEST_MILE = "fastest mile";
@@ -22,10 +23,12 @@ final class Parts {
 
     private final SpeedConversion conversion;
     private final CodeLibrary codes;
+    private final GroundParts ground;
 
-    Parts(SpeedConversion conversion, CodeLibrary codes) {
+    Parts(SpeedConversion conversion, CodeLibrary codes, TableLibrary tables) {
         this.conversion = conversion;
         this.codes = codes;
+        this.ground = new GroundParts(tables);
     }
 
     Trace run(JsonNode given) {
@@ -33,8 +36,9 @@ final class Parts {
         return switch (part) {
             case "convert-speed" -> convertSpeed(given);
             case "plate-drag" -> plateDrag(given);
-            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed "
-                + "and plate-drag");
+            case "embedment-ibc", "pier-broms-clay", "broms-clay-capacity", "pad" -> ground.run(part, given);
+            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed, "
+                + "plate-drag, embedment-ibc, pier-broms-clay, broms-clay-capacity and pad");
         };
     }
 
@@ -77,7 +81,7 @@ final class Parts {
         return trace.given(symbol, name + " of the plate", value, "m", PublishedChecks.text(given, name));
     }
 
-    private static double positive(JsonNode given, String name, Dimension dimension, String example) {
+    static double positive(JsonNode given, String name, Dimension dimension, String example) {
         Reading reading = Typed.read(PublishedChecks.text(given, name), dimension);
         if (!(reading instanceof Reading.Value value) || !(value.si() > 0)) {
             throw PublishedChecks.bad(name + ": a " + dimension.word() + " above zero is typed with its unit, like \"" + example + "\"");

@@ -44,8 +44,12 @@ public final class GroundTables {
         return Known.of(broms, key);
     }
 
-    Known loadFactor(String key) {
-        return Known.of(loadFactors, key);
+    /** Factor on the loads of an ultimate method where none was typed. */
+    public Known loadFactor() {
+        Known overload = Known.of(loadFactors, "overload");
+        Known under = Known.of(loadFactors, "undercapacity");
+        return new Known(overload.value() / under.value(), "1", "overload factor " + overload.text() + " over undercapacity factor " + under.text(),
+            overload.place(), overload.status().weaker(under.status()));
     }
 
     /** A size, density or limit of "footing-sizes". */
