@@ -47,7 +47,8 @@ final class GroundParts {
         double h = typed(given, "height", Dimension.LENGTH, "h", "height of the force above the ground", trace);
         double b = typed(given, "width", Dimension.LENGTH, "b", "width of the footing across the force", trace);
         double lateral = Parts.positive(given, "lateral-bearing", Dimension.PRESSURE_PER_DEPTH, "150 psf/ft");
-        double moment = trace.line("ground-moment", "M_g", "moment at the ground").in("P", p, "N").in("h", h, "m").from("statics", Status.DERIVED).gives("P h", p * h, "N m");
+        double moment = trace.line("ground-moment", "M_g", "moment at the ground").in("P", p, "N").in("h", h, "m").from("statics", Status.DERIVED)
+            .gives("P h", p * h, "N m");
         IbcEmbedment.Soil soil = new IbcEmbedment.Soil(Known.typed(lateral, "Pa/m", PublishedChecks.text(given, "lateral-bearing")), flag(given, "doubled"),
             flag(given, "increased"));
         IbcEmbedment rule = new IbcEmbedment(tables, soil, flag(given, "constrained"), trace);
@@ -105,7 +106,8 @@ final class GroundParts {
         if (depth == 0 && (own || atGround)) {
             throw PublishedChecks.bad("concrete-density and force need the depth of the pad");
         }
-        Known density = own ? Known.typed(Parts.positive(given, "concrete-density", Dimension.DENSITY, "2400 kg/m3"), "kg/m³", PublishedChecks.text(given, "concrete-density"))
+        Known density = own ? Known.typed(Parts.positive(given, "concrete-density", Dimension.DENSITY, "2400 kg/m3"), "kg/m³",
+            PublishedChecks.text(given, "concrete-density"))
             : tables.size("concrete-density");
         Pad pad = new Pad(tables, density);
         double vertical = typed(given, "vertical", Dimension.FORCE, own ? "G_f" : "N", "vertical load", trace);
@@ -115,8 +117,8 @@ final class GroundParts {
         double moment = atGround ? pad.baseMoment(typed(given, "force", Dimension.FORCE, "V_f", "shear at the ground", trace), typed, depth, trace) : typed;
         pad.pressure(n, moment, "M_b", block, trace);
         double resisting = pad.resisting(n, along, trace);
-        trace.line("overturning-ratio", "n_o", "resisting moment over the moment at the base, without factors").in("M_R", resisting, "N m").in("M_b", moment, "N m")
-            .from("definition", Status.DERIVED).gives("M_R / M_b", resisting / moment, "1");
+        trace.line("overturning-ratio", "n_o", "resisting moment over the moment at the base, without factors").in("M_R", resisting, "N m")
+            .in("M_b", moment, "N m").from("definition", Status.DERIVED).gives("M_R / M_b", resisting / moment, "1");
         return trace;
     }
 

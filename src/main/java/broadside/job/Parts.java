@@ -37,7 +37,8 @@ final class Parts {
             case "convert-speed" -> convertSpeed(given);
             case "plate-drag" -> plateDrag(given);
             case "embedment-ibc", "pier-broms-clay", "broms-clay-capacity", "pad" -> ground.run(part, given);
-            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed, "
+            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part)
+                + "\" is not one that this version checks; it knows convert-speed, "
                 + "plate-drag, embedment-ibc, pier-broms-clay, broms-clay-capacity and pad");
         };
     }

@@ -26,7 +26,8 @@ public final class BromsClay implements DepthRule {
      */
     public BromsClay(GroundTables tables, Known cohesion, Known factor, Trace trace) {
         if (!(cohesion.value() > 0)) {
-            throw new UnfitAnswer("footing.cohesion", "clay without strength holds nothing: give its undrained shear strength, such as \"40 kPa\", or another rule");
+            throw new UnfitAnswer("footing.cohesion",
+                "clay without strength holds nothing: give its undrained shear strength, such as \"40 kPa\", or another rule");
         }
         this.tables = tables;
         this.soil = cohesion;
@@ -101,12 +102,12 @@ public final class BromsClay implements DepthRule {
             .from(dead.place(), dead.status()).gives("d_f - " + dead.text() + " b", length - zone, "m");
         double k = trace.line("pier-reaction", "k", "reaction of the soil for each metre").in("c_u", cohesion, "Pa").in("b", width, "m")
             .from(reaction.place(), reaction.status()).gives(reaction.text() + " c_u b", reaction.value() * cohesion * width, "N/m");
-        double beta = trace.line("quadratic-coefficient", "β", "coefficient of P in P² + β P = k² L_0²").in("k", k, "N/m").in("h", height, "m").in("b", width, "m")
-            .in("L_0", reach, "m").from("moments about the point of zero shear", Status.DERIVED)
+        double beta = trace.line("quadratic-coefficient", "β", "coefficient of P in P² + β P = k² L_0²").in("k", k, "N/m").in("h", height, "m")
+            .in("b", width, "m").in("L_0", reach, "m").from("moments about the point of zero shear", Status.DERIVED)
             .gives("4 k (h + " + dead.text() + " b + 0.5 L_0)", 4 * k * (height + zone + 0.5 * reach), "N");
-        double p = trace.line("ultimate-lateral-load", "P_u", "ultimate load of the pile, without a factor").in("β", beta, "N").in("k", k, "N/m").in("L_0", reach, "m")
-            .from("root of the quadratic above", Status.DERIVED).gives("(k L_0)² / (0.5 β + (0.25 β² + (k L_0)²)^0.5)",
-                k * reach * k * reach / (0.5 * beta + Math.sqrt(beta * beta / 4 + k * reach * k * reach)), "N");
+        double p = trace.line("ultimate-lateral-load", "P_u", "ultimate load of the pile, without a factor").in("β", beta, "N").in("k", k, "N/m")
+            .in("L_0", reach, "m").from("root of the quadratic above", Status.DERIVED)
+            .gives("(k L_0)² / (0.5 β + (0.25 β² + (k L_0)²)^0.5)", k * reach * k * reach / (0.5 * beta + Math.sqrt(beta * beta / 4 + k * reach * k * reach)), "N");
         double f = zeroShear(p, "P_u", width, trace);
         trace.line("pier-lower-part", "g", "length below that turns the moment").in("L_0", reach, "m").in("f", f, "m").from(dead.place(), dead.status())
             .gives("L_0 - f", reach - f, "m");

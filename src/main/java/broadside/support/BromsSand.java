@@ -14,7 +14,7 @@ import broadside.trace.Trace;
  */
 public final class BromsSand implements DepthRule {
 
-    private final GroundTables tables;
+    private final Known pressures;
     private final Status soil;
     private final double unitWeight;
     private final double passive;
@@ -30,15 +30,17 @@ public final class BromsSand implements DepthRule {
         Known least = tables.size("least-friction");
         Known most = tables.size("most-friction");
         if (!(angle.value() >= least.value() - 1e-9 && angle.value() <= most.value() + 1e-9)) {
-            throw new UnfitAnswer("footing.friction-angle", "an angle of friction of sand lies between " + degrees(least) + " and " + degrees(most) + " degrees");
+            throw new UnfitAnswer("footing.friction-angle", "an angle of friction of sand lies between " + degrees(least) + " and " + degrees(most)
+                + " degrees");
         }
         if (!(density.value() > 0)) {
             throw new UnfitAnswer("footing.soil-density", "the density of the soil must be above zero, and above that of water where the water stands high");
         }
-        this.tables = tables;
+        this.pressures = tables.broms("sand-pressure");
         this.soil = angle.status().weaker(density.status());
         double phi = angle.into(trace.line("friction-angle", "φ", "angle of friction of the sand"));
-        double sine = trace.line("friction-angle-sine", "s_φ", "its sine").in("φ", phi, "rad").from("trigonometry", Status.DERIVED).reads("sine of φ", Math.sin(phi), "1");
+        double sine = trace.line("friction-angle-sine", "s_φ", "its sine").in("φ", phi, "rad").from("trigonometry", Status.DERIVED)
+            .reads("sine of φ", Math.sin(phi), "1");
         this.passive = trace.line("passive-coefficient", "K_p", "coefficient of passive pressure").in("s_φ", sine).from("Rankine", Status.RECALLED)
             .gives("(1 + s_φ) / (1 - s_φ)", (1 + sine) / (1 - sine), "1");
         double rho = density.into(trace.line("soil-density", "ρ_s", "density of the soil that counts"));
@@ -59,7 +61,7 @@ public final class BromsSand implements DepthRule {
 
     @Override
     public Status status() {
-        return soil.weaker(tables.broms("sand-pressure").status());
+        return soil.weaker(pressures.status());
     }
 
     @Override
@@ -83,7 +85,7 @@ public final class BromsSand implements DepthRule {
         double v = factoredShear(factor, c, trace);
         double m = factoredMoment(factor, c, trace);
         double root = Root.depth(d -> demand(v, m, d, quiet) - resistance(c.width(), d, quiet));
-        return trace.line("embedment-depth", "d", "embedment needed").from(tables.broms("sand-pressure").place(), status())
+        return trace.line("embedment-depth", "d", "embedment needed").from(pressures.place(), status())
             .reads("found by trial, so that the soil resists what is asked about the foot of the pile", root, "m");
     }
 
@@ -106,7 +108,6 @@ public final class BromsSand implements DepthRule {
     }
 
     private double resistance(double width, double depth, Trace trace) {
-        Known pressures = tables.broms("sand-pressure");
         return trace.line("foot-resistance", "M_{R,t}", "moment of the soil about the foot of the pile").in("γ", unitWeight, "Pa/m").in("b", width, "m")
             .in("d_f", depth, "m").in("K_p", passive).from(pressures.place(), pressures.status())
             .gives(pressures.text() + " γ b d_f^3 K_p / 6", pressures.value() * unitWeight * width * depth * depth * depth * passive / 6, "N m");
@@ -114,12 +115,11 @@ public final class BromsSand implements DepthRule {
 
     /** Greatest moment in the pier, N m, below the ground where its shear is zero. */
     private double moment(double shear, double moment, double width, Trace trace) {
-        Known pressures = tables.broms("sand-pressure");
-        double f = trace.line("pier-zero-shear", "f", "depth of zero shear").in("V_F", shear, "N").in("γ", unitWeight, "Pa/m").in("b", width, "m").in("K_p", passive)
-            .from(pressures.place(), pressures.status())
+        double f = trace.line("pier-zero-shear", "f", "depth of zero shear").in("V_F", shear, "N").in("γ", unitWeight, "Pa/m").in("b", width, "m")
+            .in("K_p", passive).from(pressures.place(), pressures.status())
             .gives("(2 V_F / (" + pressures.text() + " γ b K_p))^0.5", Math.sqrt(2 * shear / (pressures.value() * unitWeight * width * passive)), "m");
-        return trace.line("pier-moment", "M_max", "greatest moment in the pier, with the factor").in("M_F", moment, "N m").in("V_F", shear, "N").in("f", f, "m")
-            .from("statics", Status.DERIVED).gives("M_F + 2 V_F f / 3", moment + 2 * shear * f / 3, "N m");
+        return trace.line("pier-moment", "M_max", "greatest moment in the pier, with the factor").in("M_F", moment, "N m").in("V_F", shear, "N")
+            .in("f", f, "m").from("statics", Status.DERIVED).gives("M_F + 2 V_F f / 3", moment + 2 * shear * f / 3, "N m");
     }
 
     /**

@@ -59,8 +59,10 @@ final class FootingRules {
     DepthRule rule(Trace trace) {
         return switch (chosen()) {
             case IBC -> new IbcEmbedment(tables, new IbcEmbedment.Soil(lateral(), ground.doubled(), ground.increased()), ground.paved(), trace);
-            case CLAY -> new BromsClay(tables, typed("cohesion", "Pa", soil.cohesion(), "the undrained shear strength of the clay, such as \"40 kPa\""), factor(), trace);
-            case SAND -> new BromsSand(tables, typed("friction-angle", "rad", soil.friction(), "the angle of friction of the sand, such as \"30 deg\""), density(), factor(),
+            case CLAY -> new BromsClay(tables, typed("cohesion", "Pa", soil.cohesion(),
+                "the undrained shear strength of the clay, such as \"40 kPa\""), factor(), trace);
+            case SAND -> new BromsSand(tables, typed("friction-angle", "rad", soil.friction(),
+                "the angle of friction of the sand, such as \"30 deg\""), density(), factor(),
                 trace);
             default -> new GroundFactor(tables, tables.factor(words.presumedGround()), trace);
         };
@@ -97,7 +99,8 @@ final class FootingRules {
             return dry;
         }
         Known water = tables.size("water-density");
-        return new Known(dry.value() - water.value(), dry.unit(), dry.how() + ", less " + water.text() + " kg/m3 of water: the water stands high", dry.place(),
+        return new Known(dry.value() - water.value(), dry.unit(), dry.how() + ", less " + water.text() + " kg/m3 of water: the water stands high",
+            dry.place(),
             dry.status().weaker(water.status()));
     }
 
@@ -107,7 +110,8 @@ final class FootingRules {
 
     /** What the ground under a pad can take. */
     Pad.Soil pad() {
-        Known bearing = soil.bearing().map(b -> positive("bearing", Known.typed(b.si(), "Pa", b.typed()))).orElseGet(() -> tables.vertical(words.presumedClass()));
+        Known bearing = soil.bearing().map(b -> positive("bearing", Known.typed(b.si(), "Pa",
+            b.typed()))).orElseGet(() -> tables.vertical(words.presumedClass()));
         if (soil.sliding().isPresent()) {
             return new Pad.Soil(bearing, positive("friction", Known.typed(soil.sliding().get(), "1", Double.toString(soil.sliding().get()))), false);
         }

@@ -37,6 +37,22 @@ public final class Footings {
                 throw new IllegalArgumentException("a footing needs a load");
             }
         }
+
+        /** The loads that no other exceeds in both shear and moment: more of either never helps a footing. */
+        List<FootLoad> worst() {
+            List<FootLoad> worst = new ArrayList<>(loads.size());
+            for (FootLoad load : loads) {
+                if (worst.stream().noneMatch(w -> covers(w, load))) {
+                    worst.removeIf(w -> covers(load, w));
+                    worst.add(load);
+                }
+            }
+            return worst;
+        }
+
+        private static boolean covers(FootLoad more, FootLoad less) {
+            return more.shear() >= less.shear() && more.moment() >= less.moment();
+        }
     }
 
     public Footings(TableLibrary tables) {
@@ -62,11 +78,12 @@ public final class Footings {
         FootingResult result = footing.kind() == Footing.Kind.PAD ? new PadFooting(tables, rules, footing, request, assumed, remarks).hold(trace)
             : new ShaftFooting(tables, rules, footing, request, assumed, remarks).hold(trace);
         if (request.torsion() > 0) {
-            trace.line("footing-torsion", "T_f", "torsion at the foot, at the level of the code").from("taken over from the loads of the post", Status.DERIVED)
-                .reads("greatest of all cases", request.torsion(), "N m");
+            trace.line("footing-torsion", "T_f", "torsion at the foot, at the level of the code")
+                .from("taken over from the loads of the post", Status.DERIVED).reads("greatest of all cases", request.torsion(), "N m");
             remarks.add("Torsion of the footing is shown and not checked.");
         }
-        return new FootingResult(result.kind(), result.rule(), result.sized(), result.round(), result.depth(), result.width(), result.length(), result.concrete(),
+        return new FootingResult(result.kind(), result.rule(), result.sized(), result.round(), result.depth(), result.width(), result.length(),
+            result.concrete(),
             result.checks(), assumed, remarks);
     }
 

@@ -15,6 +15,8 @@ public final class GroundFactor implements DepthRule {
 
     private final GroundTables tables;
     private final Known ground;
+    private final Known divisor;
+    private final Known modelFactor;
     private final double factor;
     private final double model;
 
@@ -22,8 +24,10 @@ public final class GroundFactor implements DepthRule {
     public GroundFactor(GroundTables tables, Known ground, Trace trace) {
         this.tables = tables;
         this.ground = ground;
+        this.divisor = tables.factorRule("divisor");
+        this.modelFactor = tables.factorRule("model-factor");
         this.factor = ground.into(trace.line("ground-factor", "G", "ground factor"));
-        this.model = tables.factorRule("model-factor").into(trace.line("ground-model-factor", "γ_m", "model factor on the resistance of the ground"));
+        this.model = modelFactor.into(trace.line("ground-model-factor", "γ_m", "model factor on the resistance of the ground"));
     }
 
     @Override
@@ -33,7 +37,7 @@ public final class GroundFactor implements DepthRule {
 
     @Override
     public Status status() {
-        return ground.status().weaker(tables.factorRule("divisor").status());
+        return ground.status().weaker(divisor.status());
     }
 
     @Override
@@ -60,7 +64,7 @@ public final class GroundFactor implements DepthRule {
     public double needed(Column column, Trace trace) {
         Trace quiet = trace.quiet();
         double root = Root.depth(p -> demand(column, p, quiet) - design(resistance(column, p, quiet), quiet));
-        return trace.line("embedment-depth", "d", "embedment needed").from(tables.factorRule("divisor").place(), status())
+        return trace.line("embedment-depth", "d", "embedment needed").from(divisor.place(), status())
             .reads("found by trial, so that the ground resists what is asked of it", root, "m");
     }
 
@@ -76,7 +80,6 @@ public final class GroundFactor implements DepthRule {
 
     /** Moment, N m, that the ground can turn at a depth, m, before any factor. */
     double resistance(Column c, double depth, Trace trace) {
-        Known divisor = tables.factorRule("divisor");
         return trace.line("ground-resistance", "M_gr", "moment that the ground resists").in("G", factor, "Pa/m").in("b", c.width(), "m").in("d_f", depth, "m")
             .from(divisor.place(), status()).gives("G b d_f^3 / " + divisor.text(), factor * c.width() * depth * depth * depth / divisor.value(), "N m");
     }
@@ -84,13 +87,12 @@ public final class GroundFactor implements DepthRule {
     /** Moment about the fulcrum, N m. */
     double demand(Column c, double depth, Trace trace) {
         return trace.line("ground-demand", "M_q", "moment about the fulcrum in the ground").in("M_d", c.moment(), "N m").in("V_d", c.shear(), "N")
-            .in("d_f", depth, "m").from("fulcrum at the depth over √2: PD 6547, planted posts", tables.factorRule("divisor").status())
+            .in("d_f", depth, "m").from("fulcrum at the depth over √2: PD 6547, planted posts", divisor.status())
             .gives("M_d + V_d d_f / 2^0.5", c.moment() + c.shear() * depth / Math.sqrt(2), "N m");
     }
 
     private double design(double resistance, Trace trace) {
-        Known by = tables.factorRule("model-factor");
         return trace.line("ground-resistance-design", "M_{gr,d}", "the same with the model factor").in("M_gr", resistance, "N m").in("γ_m", model)
-            .from(by.place(), by.status()).gives("M_gr / γ_m", resistance / model, "N m");
+            .from(modelFactor.place(), modelFactor.status()).gives("M_gr / γ_m", resistance / model, "N m");
     }
 }

@@ -5,6 +5,8 @@ import broadside.table.Rows;
 import broadside.table.TableLibrary;
 import java.math.BigDecimal;
 import java.math.RoundingMode;
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
 
 /** The figures of posts in the ground, from the tables of "ground/1". A missing table stops the start. */
 public final class GroundTables {
@@ -19,6 +21,7 @@ public final class GroundTables {
     private final Rows loadFactors;
     private final Rows sizes;
     private final Rows words;
+    private final Map<String, Known> read = new ConcurrentHashMap<>();
 
     public GroundTables(TableLibrary tables) {
         Edition ground = tables.edition("ground/1").orElseThrow();
@@ -33,15 +36,15 @@ public final class GroundTables {
     }
 
     Known ibc(String key) {
-        return Known.of(ibc, key);
+        return read.computeIfAbsent("ibc " + key, k -> Known.of(ibc, key));
     }
 
     Known factorRule(String key) {
-        return Known.of(factorRule, key);
+        return read.computeIfAbsent("factor " + key, k -> Known.of(factorRule, key));
     }
 
     Known broms(String key) {
-        return Known.of(broms, key);
+        return read.computeIfAbsent("broms " + key, k -> Known.of(broms, key));
     }
 
     /** Factor on the loads of an ultimate method where none was typed. */
@@ -54,7 +57,7 @@ public final class GroundTables {
 
     /** A size, density or limit of "footing-sizes". */
     public Known size(String key) {
-        return Known.of(sizes, key);
+        return read.computeIfAbsent("size " + key, k -> Known.of(sizes, key));
     }
 
     /** Ground factor G of good, average or poor ground, Pa/m. */

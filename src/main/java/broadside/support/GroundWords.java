@@ -49,7 +49,8 @@ final class GroundWords {
         refuseBad();
         return soilClass().orElseGet(() -> {
             String lowest = tables.lowestSoil();
-            note("The soil is assumed to be class " + lowest + " of the presumptive values (" + tables.soil(lowest) + "), the lowest of the table. Confirm the soil.");
+            note("The soil is assumed to be class " + lowest + " of the presumptive values (" + tables.soil(lowest)
+                + "), the lowest of the table. Confirm the soil.");
             return lowest;
         });
     }
@@ -72,7 +73,8 @@ final class GroundWords {
 
     private void refuseBad() {
         if (isBad()) {
-            throw new UnfitAnswer("footing.ground", "there is no presumptive value for " + word.orElseThrow() + ": the soil must be tested, and its values typed");
+            throw new UnfitAnswer("footing.ground", "there is no presumptive value for " + word.orElseThrow()
+                + ": the soil must be tested, and its values typed");
         }
     }
 }

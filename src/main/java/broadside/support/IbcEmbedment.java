@@ -31,6 +31,12 @@ public final class IbcEmbedment implements DepthRule {
     private final boolean paved;
     private final double lateral;
     private final double factor;
+    private final Known constant;
+    private final Known height;
+    private final Known most;
+    private final Known limit;
+    private final double share;
+    private final String pressurePlace;
 
     /**
      * Takes the soil and records it.
@@ -41,6 +47,12 @@ public final class IbcEmbedment implements DepthRule {
         this.tables = tables;
         this.soil = soil;
         this.paved = paved;
+        this.constant = tables.ibc(paved ? "constrained" : "constant");
+        this.height = tables.ibc("height");
+        this.most = tables.ibc("depth-limit");
+        this.limit = tables.ibc("lateral-limit");
+        this.share = paved ? 1 : tables.ibc("share").value();
+        this.pressurePlace = tables.ibc("share").place() + "; " + limit.place();
         this.lateral = soil.lateral().into(trace.line("lateral-bearing", "S", "allowable lateral bearing for each metre of depth"));
         this.factor = factor(trace);
     }
@@ -103,20 +115,16 @@ public final class IbcEmbedment implements DepthRule {
         return paved ? constrained(column, depth, symbol, trace) : unconstrained(column, depth, symbol, trace);
     }
 
-    private double pressure(String meaning, String name, double depth, String symbol, double share, Trace trace) {
-        Known most = tables.ibc("depth-limit");
-        Known limit = tables.ibc("lateral-limit");
+    private double pressure(String meaning, String name, double depth, String symbol, Trace trace) {
         String shared = share > 1 ? " / " + (int) share : "";
         return trace.line("lateral-pressure", name, meaning).in("k_S", factor).in("S", lateral, "Pa/m").in(symbol, depth, "m")
-            .from(tables.ibc("share").place() + "; " + limit.place(), limit.status().weaker(soil.lateral().status()))
+            .from(pressurePlace, limit.status().weaker(soil.lateral().status()))
             .gives("min(k_S S min(" + symbol + "; " + most.text() + ")" + shared + "; " + limit.text() + " S)",
                 Math.min(factor * lateral * Math.min(depth, most.value()) / share, limit.value() * lateral), "Pa");
     }
 
     private double unconstrained(Column c, double depth, String symbol, Trace trace) {
-        Known constant = tables.ibc("constant");
-        Known height = tables.ibc("height");
-        double s1 = pressure("allowable lateral pressure at a third of the depth", "S_1", depth, symbol, tables.ibc("share").value(), trace);
+        double s1 = pressure("allowable lateral pressure at a third of the depth", "S_1", depth, symbol, trace);
         if (c.shear() < NO_FORCE || c.moment() > c.shear() / PUSH / PUSH) {
             double aH = constant.value() * c.moment() / (s1 * c.width());
             return trace.line("embedment-depth", "d", "embedment needed").in("M_g", c.moment(), "N m").in("S_1", s1, "Pa").in("b", c.width(), "m")
@@ -133,8 +141,7 @@ public final class IbcEmbedment implements DepthRule {
     }
 
     private double constrained(Column c, double depth, String symbol, Trace trace) {
-        Known constant = tables.ibc("constrained");
-        double s3 = pressure("allowable lateral pressure at the foot of the post", "S_3", depth, symbol, 1, trace);
+        double s3 = pressure("allowable lateral pressure at the foot of the post", "S_3", depth, symbol, trace);
         return trace.line("embedment-depth", "d", "embedment needed").in("M_g", c.moment(), "N m").in("S_3", s3, "Pa").in("b", c.width(), "m")
             .from(constant.place(), constant.status())
             .gives("(" + constant.text() + " M_g / (S_3 b))^0.5", Math.sqrt(constant.value() * c.moment() / (s3 * c.width())), "m");

@@ -12,9 +12,14 @@ import java.util.stream.Stream;
 /**
  * A figure in SI with how it was found and where it stands.
  *
- * @param how  such as "150 psf/ft at class 4" or "as typed: 100 psf/ft"
+ * @param how   such as "150 psf/ft at class 4" or "as typed: 100 psf/ft"
+ * @param text  the number as it stands in a formula text
  */
-public record Known(double value, String unit, String how, String place, Status status) {
+public record Known(double value, String unit, String how, String place, Status status, String text) {
+
+    public Known(double value, String unit, String how, String place, Status status) {
+        this(value, unit, how, place, status, BigDecimal.valueOf(value).stripTrailingZeros().toPlainString());
+    }
 
     /** A number of a table with columns "value" and "unit". */
     static Known of(Rows rows, String key) {
@@ -49,10 +54,5 @@ public record Known(double value, String unit, String how, String place, Status 
     /** Records the figure as the value of this step and hands it back. */
     public double into(Trace.Line line) {
         return line.from(place, status).reads(how, value, unit);
-    }
-
-    /** The number as it stands in a formula text. */
-    String text() {
-        return BigDecimal.valueOf(value).stripTrailingZeros().toPlainString();
     }
 }

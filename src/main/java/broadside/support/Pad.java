@@ -87,24 +87,24 @@ public final class Pad {
             return trace.line("bearing-pressure", "q_max", meaning).in("N", vertical, "N").in("L", across, "m").in("c", c, "m").from(STATICS, Status.READ)
                 .gives("2 N / (L c)", 2 * vertical / (across * c), "Pa");
         }
-        trace.line("bearing-pressure-least", "q_min", "least pressure on the ground").in("N", vertical, "N").in("B", along, "m").in("L", across, "m").in("e", e, "m")
-            .from(STATICS, Status.READ).gives("N / (B L) (1 - 6 e / B)", vertical / (along * across) * (1 - 6 * e / along), "Pa");
+        trace.line("bearing-pressure-least", "q_min", "least pressure on the ground").in("N", vertical, "N").in("B", along, "m").in("L", across, "m")
+            .in("e", e, "m").from(STATICS, Status.READ).gives("N / (B L) (1 - 6 e / B)", vertical / (along * across) * (1 - 6 * e / along), "Pa");
         return trace.line("bearing-pressure", "q_max", meaning).in("N", vertical, "N").in("B", along, "m").in("L", across, "m").in("e", e, "m")
             .from(STATICS, Status.READ).gives("N / (B L) (1 + 6 e / B)", vertical / (along * across) * (1 + 6 * e / along), "Pa");
     }
 
     /** Moment, N m, that the weight resists about the edge, recorded as "M_R". */
     public double resisting(double vertical, double along, Trace trace) {
-        return trace.line("resisting-moment", "M_R", "moment of the weight about the edge").in("N", vertical, "N").in("B", along, "m").from(STATICS, Status.READ)
-            .gives("N B / 2", vertical * along / 2, "N m");
+        return trace.line("resisting-moment", "M_R", "moment of the weight about the edge").in("N", vertical, "N").in("B", along, "m")
+            .from(STATICS, Status.READ).gives("N B / 2", vertical * along / 2, "N m");
     }
 
     /** Overturning by a rule of stability whose factors were recorded; {@code moment} is that at the base, N m. */
     Check overturning(Stability rule, Block block, double vertical, double moment, String named, Trace trace) {
         double resisting = resisting(vertical, block.along(), trace);
         double demand = rule.demand("overturning", "M_E", "M_b", moment, "N m", trace);
-        double capacity = trace.line("overturning-capacity", "M_C", "resisting moment with the factor on weight").in("γ_g", rule.onWeight()).in("M_R", resisting, "N m")
-            .from(rule.place(), rule.status()).gives("γ_g M_R", rule.onWeight() * resisting, "N m");
+        double capacity = trace.line("overturning-capacity", "M_C", "resisting moment with the factor on weight").in("γ_g", rule.onWeight())
+            .in("M_R", resisting, "N m").from(rule.place(), rule.status()).gives("γ_g M_R", rule.onWeight() * resisting, "N m");
         rule.ratio("overturning", capacity, "M_C", moment, "M_b", "N m", trace);
         return Check.of("overturning", rule.title(), new Check.In("M_E", demand), new Check.In("M_C", capacity), "N m", named, rule.status(), trace);
     }
@@ -122,8 +122,8 @@ public final class Pad {
 
     private double cohesive(Stability rule, double cohesion, Block block, double vertical, double baseMoment, Status status, Trace trace) {
         Known limit = tables.ibc("cohesion-limit");
-        double e = trace.line("sliding-eccentricity", "e_s", "resultant from the middle of the base, with the factors").in("γ_w", rule.onWind()).in("k_w", rule.level())
-            .in("M_b", baseMoment, "N m").in("γ_g", rule.onWeight()).in("N", vertical, "N").from(STATICS, Status.READ)
+        double e = trace.line("sliding-eccentricity", "e_s", "resultant from the middle of the base, with the factors").in("γ_w", rule.onWind())
+            .in("k_w", rule.level()).in("M_b", baseMoment, "N m").in("γ_g", rule.onWeight()).in("N", vertical, "N").from(STATICS, Status.READ)
             .gives("γ_w k_w M_b / (γ_g N)", rule.onWind() * rule.level() * baseMoment / (rule.onWeight() * vertical), "m");
         double c = trace.line("sliding-contact-length", "c_s", "length in contact, with the factors").in("B", block.along(), "m").in("e_s", e, "m")
             .from(STATICS, Status.READ).gives("max(0; min(B; 3 (B / 2 - e_s)))", Math.max(0, Math.min(block.along(), 3 * (block.along() / 2 - e))), "m");
@@ -138,7 +138,7 @@ public final class Pad {
         boolean held = contact(vertical, service, "M_s", block.along(), trace.quiet()) > 0;
         double capacity = held ? allowed : trace.line("bearing-none", "q_0", "pressure that balances the moment").from(STATICS, Status.READ)
             .reads("none: the resultant leaves the base", 0, "Pa");
-        return Check.of("bearing", "pressure under the pad at the level of service", new Check.In(held ? "q_max" : "q_w", q), new Check.In(held ? "q_a" : "q_0", capacity), "Pa",
-            named, soil.bearing().status().weaker(Status.READ), trace);
+        return Check.of("bearing", "pressure under the pad at the level of service", new Check.In(held ? "q_max" : "q_w", q),
+            new Check.In(held ? "q_a" : "q_0", capacity), "Pa", named, soil.bearing().status().weaker(Status.READ), trace);
     }
 }

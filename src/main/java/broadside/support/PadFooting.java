@@ -17,6 +17,7 @@ final class PadFooting {
     private final Footings.Request request;
     private final List<Assumed> assumed;
     private final List<String> remarks;
+    private final List<FootLoad> loads;
     private final Pad pad;
 
     PadFooting(GroundTables tables, FootingRules rules, Footing footing, Footings.Request request, List<Assumed> assumed, List<String> remarks) {
@@ -24,6 +25,7 @@ final class PadFooting {
         this.rules = rules;
         this.footing = footing;
         this.request = request;
+        this.loads = request.worst();
         this.assumed = assumed;
         this.remarks = remarks;
         this.pad = new Pad(tables, rules.lessWater(tables.size("concrete-density")));
@@ -58,7 +60,8 @@ final class PadFooting {
         GroundRemarks.add(footing.ground(), Optional.empty(), depth, assumed, remarks);
         double volume = trace.line("concrete-volume", "V_c", "volume of the hole").in("B", along, "m").in("L", across, "m").in("d_f", depth, "m")
             .from("geometry", Status.DERIVED).gives("B L d_f", along * across * depth, "m³");
-        return new FootingResult(footing.kind(), "pad by its weight, " + request.rule().title(), sized, false, depth, along, across, volume, checks, assumed, remarks);
+        return new FootingResult(footing.kind(), "pad by its weight, " + request.rule().title(), sized, false, depth, along, across, volume, checks,
+            assumed, remarks);
     }
 
     private Setting setting(Pad.Soil soil, Trace trace) {
@@ -95,7 +98,8 @@ final class PadFooting {
         long low = Math.max(1, Math.round(GroundTables.roundedUp(request.postWidth(), step) / step)) - 1;
         long high = Math.round(widest.value() / step);
         if (!holds(setting, high, step, depth, quiet)) {
-            throw new UnfitAnswer("footing.width", "no pad of this depth up to " + widest.text() + " m wide holds these loads: give another depth, a planted post, or ask an engineer");
+            throw new UnfitAnswer("footing.width", "no pad of this depth up to " + widest.text()
+                + " m wide holds these loads: give another depth, a planted post, or ask an engineer");
         }
         while (high - low > 1) {
             long middle = (low + high) / 2;
@@ -112,7 +116,8 @@ final class PadFooting {
     private boolean holds(Setting setting, long steps, double step, double depth, Trace quiet) {
         double along = GroundTables.roundedUp(steps * step, step);
         Pad.Block block = new Pad.Block(along, footing.length().map(Length::metres).orElse(along), depth, request.weight());
-        return rows(setting, block).stream().allMatch(row -> request.loads().stream().allMatch(l -> row.of(l, pad.vertical(block, quiet), quiet).passes()));
+        double vertical = pad.vertical(block, quiet);
+        return rows(setting, block).stream().allMatch(row -> loads.stream().allMatch(l -> row.of(l, vertical, quiet).passes()));
     }
 
     private List<Row> rows(Setting setting, Pad.Block block) {
@@ -121,8 +126,8 @@ final class PadFooting {
             (load, n, t) -> pad.sliding(setting.stability(), setting.soil(), setting.friction(), block, n, load, base(load, block, t.quiet()), t),
             (load, n, t) -> {
                 double moment = base(load, block, t.quiet());
-                double service = t.line("pad-moment-service", "M_s", "moment at the base at the level of service").in("k_s", setting.service()).in("M_b", moment, "N m")
-                    .from("level of service", Status.DERIVED).gives("k_s M_b", setting.service() * moment, "N m");
+                double service = t.line("pad-moment-service", "M_s", "moment at the base at the level of service").in("k_s", setting.service())
+                    .in("M_b", moment, "N m").from("level of service", Status.DERIVED).gives("k_s M_b", setting.service() * moment, "N m");
                 return pad.bearing(setting.soil(), setting.bearing(), block, n, service, load.named(), t);
             });
     }
@@ -141,8 +146,8 @@ final class PadFooting {
         FootLoad last = null;
         for (int i = 0; i < rows.size(); i++) {
             Row row = rows.get(i);
-            FootLoad governing = request.loads().get(0);
-            for (FootLoad load : request.loads()) {
+            FootLoad governing = loads.get(0);
+            for (FootLoad load : loads) {
                 if (row.of(load, vertical, quiet).utilisation() > row.of(governing, vertical, quiet).utilisation()) {
                     governing = load;
                 }

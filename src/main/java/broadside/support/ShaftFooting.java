@@ -17,6 +17,7 @@ final class ShaftFooting {
     private final FootingRules rules;
     private final Footing footing;
     private final Footings.Request request;
+    private final List<FootLoad> loads;
     private final List<Assumed> assumed;
     private final List<String> remarks;
 
@@ -25,6 +26,7 @@ final class ShaftFooting {
         this.rules = rules;
         this.footing = footing;
         this.request = request;
+        this.loads = request.worst();
         this.assumed = assumed;
         this.remarks = remarks;
     }
@@ -43,14 +45,11 @@ final class ShaftFooting {
         Trace quiet = trace.quiet();
         Optional<Length> typed = footing.depth();
         FootLoad first = worst(l -> rule.needed(column(setting, l, quiet), quiet));
-        if (typed.isEmpty()) {
-            rule.needed(column(setting, first, trace), trace);
-        }
         double depth = typed.isPresent() ? trace.given("d_f", "depth of the footing", typed.get().metres(), "m", typed.get().typed())
-            : sized(setting, first, quiet, trace);
+            : sized(setting, rule.needed(column(setting, first, trace), trace), trace);
         ToDoubleFunction<FootLoad> use = l -> rule.check(column(setting, l, quiet), depth, false, l.named(), quiet).utilisation();
         FootLoad governing = worst(use);
-        if (use.applyAsDouble(governing) <= use.applyAsDouble(first) + ALIKE) {
+        if (governing != first && use.applyAsDouble(governing) <= use.applyAsDouble(first) + ALIKE) {
             governing = first;
         }
         boolean same = typed.isEmpty() && governing == first;
@@ -63,9 +62,12 @@ final class ShaftFooting {
 
     /** The load with the greatest value; the first of equals. */
     private FootLoad worst(ToDoubleFunction<FootLoad> value) {
-        FootLoad worst = request.loads().get(0);
+        FootLoad worst = loads.get(0);
+        if (loads.size() == 1) {
+            return worst;
+        }
         double most = value.applyAsDouble(worst);
-        for (FootLoad load : request.loads()) {
+        for (FootLoad load : loads) {
             double found = value.applyAsDouble(load);
             if (found > most) {
                 most = found;
@@ -80,12 +82,14 @@ final class ShaftFooting {
         footing.length().ifPresent(l -> Footings.above("length", 0, l.metres(), "a length above zero is needed"));
         if (footing.width().isPresent()) {
             Length typed = footing.width().get();
-            Footings.above("width", post, typed.metres(), "the footing must be wider than zero and not narrower than its post (" + millimetres(post) + " mm)");
+            Footings.above("width", post, typed.metres(), "the footing must be wider than zero and not narrower than its post (" + millimetres(post)
+                + " mm)");
             return trace.given("b", "width of the footing across the wind", typed.metres(), "m", typed.typed());
         }
         Known usual = tables.size("surround");
         double width = Math.max(usual.value(), GroundTables.roundedUp(post, tables.size("depth-step").value()));
-        assumed.add(new Assumed("The concrete around the post is assumed to be " + millimetres(width) + " mm wide" + (footing.round() ? ", round." : ", square.")));
+        assumed.add(new Assumed("The concrete around the post is assumed to be " + millimetres(width) + " mm wide"
+            + (footing.round() ? ", round." : ", square.")));
         return trace.line("footing-width", "b", "width of the footing across the wind").from(usual.place(), usual.status())
             .reads(width > usual.value() ? "as wide as the post, rounded up" : "assumed: " + usual.how(), width, "m");
     }
@@ -99,25 +103,27 @@ final class ShaftFooting {
         String place = "level of the rule for the footing";
         double shear = trace.line("ground-shear", setting.rule().shearSymbol(), "shear at the ground, at the level of the rule").in("k_f", setting.level())
             .in("V_f", foot.shear(), "N").from(place, Status.DERIVED).gives("k_f V_f", setting.level() * foot.shear(), "N");
-        double moment = trace.line("ground-moment", setting.rule().momentSymbol(), "moment at the ground, at the level of the rule").in("k_f", setting.level())
+        double moment = trace.line("ground-moment", setting.rule().momentSymbol(), "moment at the ground, at the level of the rule")
+            .in("k_f", setting.level())
             .in("M_f", foot.moment(), "N m").from(place, Status.DERIVED).gives("k_f M_f", setting.level() * foot.moment(), "N m");
         return new DepthRule.Column(shear, moment, setting.width());
     }
 
-    private double sized(Setting setting, FootLoad load, Trace quiet, Trace trace) {
-        double needed = setting.rule().needed(column(setting, load, quiet), quiet);
+    private double sized(Setting setting, double needed, Trace trace) {
         Known least = tables.size("least-depth");
         Known step = tables.size("depth-step");
         double ratio = setting.rule().least(setting.width());
         double depth = GroundTables.roundedUp(Math.max(needed, Math.max(least.value(), ratio)), step.value());
-        String how = ratio > needed && ratio > least.value() ? "the least multiple of the width, rounded up" : least.value() > needed ? "the least embedment" : "rounded up";
+        String how = ratio > needed && ratio > least.value() ? "the least multiple of the width, rounded up"
+            : least.value() > needed ? "the least embedment" : "rounded up";
         return trace.line("footing-depth", "d_f", "depth of the footing").from(step.place(), step.status()).reads(how, depth, "m");
     }
 
     private void notes(Setting setting, double depth) {
         double least = setting.rule().least(setting.width());
         if (depth < least - ALIKE) {
-            remarks.add("The depth is less than " + tables.factorRule("least-ratio").text() + " times the width of the footing, which guidance gives as the least.");
+            remarks.add("The depth is less than " + tables.factorRule("least-ratio").text()
+                + " times the width of the footing, which guidance gives as the least.");
         }
         boolean ibc = rules.chosen().equals(FootingRules.IBC);
         if (!footing.round() && ibc) {
@@ -130,7 +136,8 @@ final class ShaftFooting {
     }
 
     private double volume(double width, double other, double depth, Trace trace) {
-        Trace.Line line = trace.line("concrete-volume", "V_c", "volume of the hole").in("b", width, "m").in("d_f", depth, "m").from("geometry", Status.DERIVED);
+        Trace.Line line = trace.line("concrete-volume", "V_c", "volume of the hole").in("b", width, "m").in("d_f", depth, "m")
+            .from("geometry", Status.DERIVED);
         return footing.round() ? line.reads("π b² d_f / 4, round", Math.PI * width * width * depth / 4, "m³")
             : line.reads("width by length by depth", width * other * depth, "m³");
     }

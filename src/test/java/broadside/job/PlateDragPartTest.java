@@ -48,7 +48,7 @@ class PlateDragPartTest {
         "\"height\": \"2 m\"|\"height\": \"2 m\", \"solidity\": \"half\"|solidity must be a number above 0",
         "\"height\": \"2 m\"|\"height\": \"2 m\", \"on-ground\": \"no\"|on-ground must be true or false",
         "\"height\": \"2 m\"|\"height\": \"2 mm\"|the Reynolds number is below 10000",
-        "\"part\": \"plate-drag\"|\"part\": \"kite\"|it knows convert-speed and plate-drag"})
+        "\"part\": \"plate-drag\"|\"part\": \"kite\"|it knows convert-speed, plate-drag"})
     void whatDoesNotFitIsSaid(String old, String other, String reason) {
         PublishedCheck.Line line = run(PLATE.replace(old, other), "force", "\"1742 N\"", "\"1 N\"");
         assertThat(line.passed()).isFalse();
