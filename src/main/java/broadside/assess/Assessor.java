@@ -24,6 +24,7 @@ import java.util.Set;
 /** Job in, assessment out: the one door that the page, the commands and the document use. */
 public final class Assessor {
 
+    private final TableLibrary tables;
     private final CodeLibrary codes;
     private final Rows edgeOnRule;
     private final Rows stackRule;
@@ -48,6 +49,11 @@ public final class Assessor {
 
     public CodeLibrary codes() {
         return codes;
+    }
+
+    /** The tables that it works from. */
+    public TableLibrary tables() {
+        return tables;
     }
 
     public About about() {

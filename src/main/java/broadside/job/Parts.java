@@ -10,26 +10,34 @@ import broadside.quantity.Typed;
 import broadside.site.Averaging;
 import broadside.site.SpeedConversion;
 import broadside.support.Catalogue;
+import broadside.support.PostRules;
 import broadside.table.OutsideTable;
+import broadside.table.TableLibrary;
 import broadside.trace.Status;
 import broadside.trace.Trace;
-import java.util.function.Supplier;
 import tools.jackson.databind.JsonNode;
 
-/** Published checks of one part of the calculation, without a job: a speed, a plate in the wind. */
+/** Published checks of one part of the calculation, without a job: a speed, a plate in the wind, a footing. */
 final class Parts {
 
     private static final String FASTEST_MILE = "fastest mile";
     private static final String OPEN_FLOW = "open-flow/1";
 
+    private static final String NAMES = "convert-speed, plate-drag, section, tip-mass-frequency, post-bending-asd, post-modulus-needed, post-torsion, embedment-ibc, "
+        + "pier-broms-clay, broms-clay-capacity, pad";
+
     private final SpeedConversion conversion;
     private final CodeLibrary codes;
-    private final Supplier<Catalogue> catalogue;
+    private final Catalogue catalogue;
+    private final GroundParts ground;
+    private final PostParts posts;
 
-    Parts(SpeedConversion conversion, CodeLibrary codes, Supplier<Catalogue> catalogue) {
+    Parts(SpeedConversion conversion, CodeLibrary codes, Catalogue catalogue, TableLibrary tables) {
         this.conversion = conversion;
         this.codes = codes;
         this.catalogue = catalogue;
+        this.ground = new GroundParts(tables);
+        this.posts = new PostParts(tables.edition(PostRules.EDITION).orElseThrow());
     }
 
     Trace run(JsonNode given) {
@@ -37,10 +45,10 @@ final class Parts {
         return switch (part) {
             case "convert-speed" -> convertSpeed(given);
             case "plate-drag" -> plateDrag(given);
-            case "section" -> SectionParts.section(given, catalogue.get());
-            case "tip-mass-frequency", "post-bending-asd", "post-modulus-needed", "post-torsion" -> PostParts.shipped().run(part, given);
-            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed, "
-                + "plate-drag, section, " + String.join(", ", PostParts.NAMES));
+            case "section" -> SectionParts.section(given, catalogue);
+            case "tip-mass-frequency", "post-bending-asd", "post-modulus-needed", "post-torsion" -> posts.run(part, given);
+            case "embedment-ibc", "pier-broms-clay", "broms-clay-capacity", "pad" -> ground.run(part, given);
+            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows " + NAMES);
         };
     }
 
@@ -83,7 +91,7 @@ final class Parts {
         return trace.given(symbol, name + " of the plate", value, "m", PublishedChecks.text(given, name));
     }
 
-    private static double positive(JsonNode given, String name, Dimension dimension, String example) {
+    static double positive(JsonNode given, String name, Dimension dimension, String example) {
         Reading reading = Typed.read(PublishedChecks.text(given, name), dimension);
         if (!(reading instanceof Reading.Value value) || !(value.si() > 0)) {
             throw PublishedChecks.bad(name + ": a " + dimension.word() + " above zero is typed with its unit, like \"" + example + "\"");

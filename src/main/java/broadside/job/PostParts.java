@@ -4,10 +4,8 @@ import broadside.quantity.Dimension;
 import broadside.quantity.Reading;
 import broadside.quantity.Typed;
 import broadside.support.PostFrequency;
-import broadside.support.PostRules;
 import broadside.support.TubeTorsion;
 import broadside.table.Edition;
-import broadside.table.TableLibrary;
 import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.List;
@@ -25,11 +23,6 @@ final class PostParts {
 
     PostParts(Edition edition) {
         this.edition = edition;
-    }
-
-    /** With the tables that ship. */
-    static PostParts shipped() {
-        return new PostParts(TableLibrary.shipped().edition(PostRules.EDITION).orElseThrow());
     }
 
     Trace run(String part, JsonNode given) {

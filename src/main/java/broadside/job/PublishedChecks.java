@@ -27,7 +27,7 @@ public final class PublishedChecks {
     public PublishedChecks(Assessor assessor, JobReader reader, SpeedConversion conversion) {
         this.assessor = assessor;
         this.reader = reader;
-        this.parts = new Parts(conversion, assessor.codes(), assessor::catalogue);
+        this.parts = new Parts(conversion, assessor.codes(), assessor.catalogue(), assessor.tables());
     }
 
     /** The cases that ship with the tool. */
