@@ -32,7 +32,6 @@ public final class Assessor {
     private final About about;
     private final SideBySide sideBySide;
     private final SupportRules supportRules;
-    private final TableLibrary tables;
 
     public Assessor(TableLibrary tables) {
         this.tables = tables;
@@ -58,10 +57,6 @@ public final class Assessor {
 
     public About about() {
         return about;
-    }
-
-    public TableLibrary tables() {
-        return tables;
     }
 
     /** Sections and grades of posts. */
