@@ -33,8 +33,9 @@ final class Parts {
         return switch (part) {
             case "convert-speed" -> convertSpeed(given);
             case "plate-drag" -> plateDrag(given);
-            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed "
-                + "and plate-drag");
+            case "bolt-group", "facade-fixings", "stay", "frame-ballast", "edge-pull", "block-footing" -> BallastParts.run(part, given);
+            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed, "
+                + "plate-drag, " + String.join(", ", BallastParts.NAMES));
         };
     }
 
