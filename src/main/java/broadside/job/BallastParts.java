@@ -41,7 +41,8 @@ final class BallastParts {
             switch (part) {
                 case "bolt-group" -> boltGroup(given, trace);
                 case "facade-fixings" -> facadeFixings(given, trace);
-                case "stay" -> Stay.of(Shipped.STABILITY, force(given, "force", "H_1", "force along the ground", trace), si(given, "angle", Dimension.ANGLE, "45 deg"),
+                case "stay" -> Stay.of(Shipped.STABILITY, force(given, "force", "H_1", "force along the ground", trace), si(given, "angle", Dimension.ANGLE,
+                    "45 deg"),
                     Optional.empty(), trace);
                 case "frame-ballast" -> frameBallast(given, trace);
                 case "edge-pull" -> edgePull(given, trace);
@@ -65,7 +66,8 @@ final class BallastParts {
         Check.In up = given.has("vertical") ? force(given, "vertical", "P_y", "load upward", trace) : nothing("P_y", trace);
         double ex = trace.given("e_x", "of the upward load, to the right of the centroid", optional(given, "vertical-arm"), "m", "");
         double ey = trace.given("e_y", "of the load to the right, above the centroid", optional(given, "horizontal-arm"), "m", "");
-        double moment = trace.line("group-moment", "M_1", "moment about the centroid").in("P_y", up.value(), "N").in("e_x", ex, "m").in("P_x", right.value(), "N")
+        double moment = trace.line("group-moment", "M_1", "moment about the centroid").in("P_y", up.value(), "N").in("e_x", ex, "m")
+            .in("P_x", right.value(), "N")
             .in("e_y", ey, "m").from("statics", Status.DERIVED).gives("P_y e_x - P_x e_y", up.value() * ex - right.value() * ey, "N m");
         EccentricGroup.of(bolts, new EccentricGroup.Load(right, up, new Check.In("M_1", moment)), trace);
     }
@@ -92,7 +94,8 @@ final class BallastParts {
                 si(given, "permanent", Dimension.FORCE, "4.5 kN"), trace);
         }
         if (given.has("friction")) {
-            frame.sliding(number(given, "friction"), si(given, "vertical", Dimension.FORCE, "11.6 kN"), si(given, "horizontal", Dimension.FORCE, "2.5 kN"), trace);
+            frame.sliding(number(given, "friction"), si(given, "vertical", Dimension.FORCE, "11.6 kN"), si(given, "horizontal", Dimension.FORCE, "2.5 kN"),
+                trace);
         }
     }
 
@@ -100,7 +103,8 @@ final class BallastParts {
         double q = trace.given("q_1", "wind pressure", si(given, "pressure", Dimension.PRESSURE, "0.7 kN/m2"), "Pa", PublishedChecks.text(given, "pressure"));
         double c = trace.given("c_1", "coefficient", given.has("coefficient") ? number(given, "coefficient") : 1, "1", "");
         double w = trace.line("pressure", "w_1", "net pressure").in("q_1", q, "Pa").in("c_1", c).from("statics", Status.DERIVED).gives("q_1 c_1", q * c, "Pa");
-        EdgePull.of(new Check.In("w_1", w), si(given, "width", Dimension.LENGTH, "3 m"), si(given, "height", Dimension.LENGTH, "3 m"), si(given, "sag", Dimension.LENGTH, "0.3 m"), trace);
+        EdgePull.of(new Check.In("w_1", w), si(given, "width", Dimension.LENGTH, "3 m"), si(given, "height", Dimension.LENGTH, "3 m"), si(given, "sag",
+            Dimension.LENGTH, "0.3 m"), trace);
     }
 
     private static void blockFooting(JsonNode given, Trace trace) {
@@ -108,8 +112,8 @@ final class BallastParts {
         double c = trace.given("c_1", "coefficient", number(given, "coefficient"), "1", "");
         double b = trace.given("b_1", "width of the panel", si(given, "panel-width", Dimension.LENGTH, "3 m"), "m", "");
         double h = trace.given("h_1", "height of the panel, on the ground", si(given, "panel-height", Dimension.LENGTH, "2 m"), "m", "");
-        double f = trace.line("force", "F_1", "force on the panel").in("q_1", q, "Pa").in("c_1", c).in("b_1", b, "m").in("h_1", h, "m").from("statics", Status.DERIVED)
-            .gives("q_1 c_1 b_1 h_1", q * c * b * h, "N");
+        double f = trace.line("force", "F_1", "force on the panel").in("q_1", q, "Pa").in("c_1", c).in("b_1", b, "m").in("h_1", h, "m")
+            .from("statics", Status.DERIVED).gives("q_1 c_1 b_1 h_1", q * c * b * h, "N");
         double z = trace.line("lever-arm", "z_1", "height of the force").in("h_1", h, "m").from("statics", Status.DERIVED).gives("h_1 / 2", h / 2, "m");
         BlockFooting.Block block = new BlockFooting.Block(si(given, "width", Dimension.LENGTH, "0.3 m"), si(given, "length", Dimension.LENGTH, "0.3 m"),
             si(given, "depth", Dimension.LENGTH, "1 m"), si(given, "density", Dimension.DENSITY, "2400 kg/m3"));

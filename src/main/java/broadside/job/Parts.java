@@ -34,7 +34,8 @@ final class Parts {
             case "convert-speed" -> convertSpeed(given);
             case "plate-drag" -> plateDrag(given);
             case "bolt-group", "facade-fixings", "stay", "frame-ballast", "edge-pull", "block-footing" -> BallastParts.run(part, given);
-            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows convert-speed, "
+            default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part)
+                + "\" is not one that this version checks; it knows convert-speed, "
                 + "plate-drag, " + String.join(", ", BallastParts.NAMES));
         };
     }

@@ -37,11 +37,11 @@ public final class BlockFooting {
         double l = trace.given("l_F", "length of the block", block.length(), "m", "");
         double d = trace.given("d_F", "depth of the block", block.depth(), "m", "");
         double rho = trace.given("ρ_F", "density of the block", block.density(), "kg/m³", "");
-        double arm = trace.line("lever-arm/base", "z_B", "height of the force above the base of the block").in(height.symbol(), height.value(), "m").in("d_F", d, "m")
-            .from("statics", Status.DERIVED).gives(height.symbol() + " + d_F", height.value() + d, "m");
+        double arm = trace.line("lever-arm/base", "z_B", "height of the force above the base of the block").in(height.symbol(), height.value(), "m")
+            .in("d_F", d, "m").from("statics", Status.DERIVED).gives(height.symbol() + " + d_F", height.value() + d, "m");
         RuleFactors.Action acts = by.action(new PanelWind("wind on the panel", "", force, new Check.In("z_B", arm), true), trace);
-        double resists = trace.line("resisting-moment", "R_d", "weight of the block about its edge").in("γ_G", by.weight()).in("g_n", by.gravity(), "m/s²").in("ρ_F", rho, "kg/m³")
-            .in("b_F", b, "m").in("l_F", l, "m").in("d_F", d, "m").from("statics", by.status()).gives("γ_G g_n ρ_F b_F l_F d_F b_F / 2",
+        double resists = trace.line("resisting-moment", "R_d", "weight of the block about its edge").in("γ_G", by.weight()).in("g_n", by.gravity(), "m/s²")
+            .in("ρ_F", rho, "kg/m³").in("b_F", b, "m").in("l_F", l, "m").in("d_F", d, "m").from("statics", by.status()).gives("γ_G g_n ρ_F b_F l_F d_F b_F / 2",
                 by.weight() * by.gravity() * rho * b * l * d * b / 2, "N m");
         double ratio = RuleFactors.ratio(trace.line("overturning-ratio", "r_o", "resisting over overturning moment, at the base"), new Check.In("R_d", resists),
             new Check.In("M_d", acts.moment()), "N m", by.status());

@@ -63,24 +63,27 @@ public final class BracketFixings {
         String e = load.along().symbol();
         Trace square = trace.part("square-on");
         Trace beside = trace.part("along");
-        double shear = square.line("fixing-shear", "V_1", "shear of each fixing, wind square on").in(w, load.normal().value(), "N").in("G", weight, "N").in("n_1", all)
-            .from(STATICS, Status.RECALLED).gives("(" + w + "² + G²)^0.5 / n_1", Math.pow(load.normal().value() * load.normal().value() + weight * weight, 0.5) / all, "N");
+        double shear = square.line("fixing-shear", "V_1", "shear of each fixing, wind square on").in(w, load.normal().value(), "N").in("G", weight, "N")
+            .in("n_1", all)
+            .from(STATICS, Status.RECALLED).gives("(" + w + "² + G²)^0.5 / n_1", Math.pow(load.normal().value() * load.normal().value() + weight * weight,
+            0.5) / all, "N");
         List<Check> checks = new ArrayList<>();
-        Optional<Double> first = turned.flatMap(t -> hung.map(g -> square.line("fixing-tension", "T_1", "pull on the hardest fixing, wind square on").in("T_W", t, "N")
-            .in("T_G", g, "N").from(STATICS, Status.RECALLED).gives("T_W + T_G", t + g, "N")));
+        Optional<Double> first = turned.flatMap(t -> hung.map(g -> square.line("fixing-tension", "T_1", "pull on the hardest fixing, wind square on")
+            .in("T_W", t, "N").in("T_G", g, "N").from(STATICS, Status.RECALLED).gives("T_W + T_G", t + g, "N")));
         first.ifPresent(t -> checks.addAll(FixingChecks.of(fixings, t, shear, "wind square on", remarks, square)));
-        Optional<Double> second = hung.map(g -> beside.line("fixing-tension", "T_1", "pull on the hardest fixing, wind along the blade").in(e, load.along().value(), "N")
+        Optional<Double> second = hung.map(g -> beside.line("fixing-tension", "T_1", "pull on the hardest fixing, wind along the blade")
+            .in(e, load.along().value(), "N")
             .in("n_1", all).in("T_G", g, "N").from(STATICS, Status.RECALLED).gives(e + " / n_1 + T_G", load.along().value() / all + g, "N"));
-        double down = beside.line("fixing-shear", "V_1", "shear of each fixing, wind along the blade").in("G", weight, "N").in("n_1", all).from(STATICS, Status.RECALLED)
-            .gives("G / n_1", weight / all, "N");
+        double down = beside.line("fixing-shear", "V_1", "shear of each fixing, wind along the blade").in("G", weight, "N").in("n_1", all)
+            .from(STATICS, Status.RECALLED).gives("G / n_1", weight / all, "N");
         second.ifPresent(t -> checks.addAll(FixingChecks.of(fixings, t, down, "wind along the blade", remarks, beside)));
         return new FixingPulls(first.flatMap(t -> second.map(u -> Math.max(t, u))), Math.max(shear, down), checks, assumptions, remarks);
     }
 
     private static Optional<Double> turned(Fixings fixings, BladeLoad load, double arm, double all, List<String> remarks, Trace trace) {
         String w = load.normal().symbol();
-        double moment = trace.line("bracket-moment/wind", "M_W", "moment of the wind square on, about an upright axis at the wall").in(w, load.normal().value(), "N")
-            .in("a_1", arm, "m").from(STATICS, Status.RECALLED).gives(w + " a_1", load.normal().value() * arm, "N m");
+        double moment = trace.line("bracket-moment/wind", "M_W", "moment of the wind square on, about an upright axis at the wall")
+            .in(w, load.normal().value(), "N").in("a_1", arm, "m").from(STATICS, Status.RECALLED).gives(w + " a_1", load.normal().value() * arm, "N m");
         if (fixings.columns() == 1) {
             remarks.add("One column of fixings gives no couple against wind square on: a moment of " + shown(moment)
                 + " must be taken by the bracket plate leaning on the wall, which is not checked here. Two columns of fixings would take it.");
@@ -88,15 +91,16 @@ public final class BracketFixings {
         }
         double columns = trace.given("n_x", "columns of fixings under one bracket", fixings.columns(), "1", "");
         double pitch = trace.given("s_x", "distance of the columns", fixings.horizontal(), "m", "");
-        return Optional.of(trace.line("fixing-tension/wind", "T_W", "pull from the wind on the outer columns, linear about the middle of the group").in("M_W", moment, "N m")
-            .in("n_1", all).in("n_x", columns).in("s_x", pitch, "m").from(STATICS, Status.RECALLED)
+        return Optional.of(trace.line("fixing-tension/wind", "T_W", "pull from the wind on the outer columns, linear about the middle of the group")
+            .in("M_W", moment, "N m").in("n_1", all).in("n_x", columns).in("s_x", pitch, "m").from(STATICS, Status.RECALLED)
             .gives("6 M_W / (n_1 (n_x + 1) s_x)", 6 * moment / (all * (columns + 1) * pitch), "N"));
     }
 
     private static Optional<Double> hung(Fixings fixings, Brackets brackets, double weight, double arm, List<String> remarks, Trace trace) {
         double moment = trace.line("bracket-moment/weight", "M_G", "moment of the weight about the wall").in("G", weight, "N").in("a_1", arm, "m")
             .from(STATICS, Status.RECALLED).gives("G a_1", weight * arm, "N m");
-        Trace.Line line = trace.line("fixing-tension/weight", "T_G", "pull from the weight on the top fixings").in("M_G", moment, "N m").from(STATICS, Status.RECALLED);
+        Trace.Line line = trace.line("fixing-tension/weight", "T_G", "pull from the weight on the top fixings").in("M_G", moment, "N m")
+            .from(STATICS, Status.RECALLED);
         if (brackets.count() > 1) {
             double spread = trace.given("h_B", "from the lowest bracket to the highest", brackets.spread(), "m", "");
             double top = trace.given("n_t", "fixings of the top bracket", fixings.count(), "1", "");

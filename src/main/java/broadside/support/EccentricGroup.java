@@ -43,8 +43,8 @@ public final class EccentricGroup {
         List<At> from = fixings.stream().map(f -> new At(f.x() - cx, f.y() - cy)).toList();
         double n = trace.given("n", "fixings of the group", count, "1", "");
         double squares = from.stream().mapToDouble(f -> f.x() * f.x() + f.y() * f.y()).sum();
-        double polar = load.moment().value() == 0 ? squares : trace.line("group-inertia", "I_p", "sum of the squares of the distances from the centroid").from(PLACE, Status.READ)
-            .reads("sum of x² + y² over " + count + " fixings", squares, "m²");
+        double polar = load.moment().value() == 0 ? squares : trace.line("group-inertia", "I_p", "sum of the squares of the distances from the centroid")
+            .from(PLACE, Status.READ).reads("sum of x² + y² over " + count + " fixings", squares, "m²");
         double turn = polar > TINY ? load.moment().value() / polar : 0;
         if (polar <= TINY && load.moment().value() != 0) {
             throw new UnfitAnswer("fixings", "fixings in one place take no moment in their plane");
@@ -65,8 +65,10 @@ public final class EccentricGroup {
     }
 
     private static double record(At hardest, Load load, double n, double polar, Trace trace) {
-        double x = trace.line("fixing-place/x", "x_1", "place of the hardest fixing, to the right of the centroid").from(PLACE, Status.READ).reads("found by trying all", hardest.x(), "m");
-        double y = trace.line("fixing-place/y", "y_1", "place of the hardest fixing, above the centroid").from(PLACE, Status.READ).reads("found by trying all", hardest.y(), "m");
+        double x = trace.line("fixing-place/x", "x_1", "place of the hardest fixing, to the right of the centroid").from(PLACE, Status.READ)
+            .reads("found by trying all", hardest.x(), "m");
+        double y = trace.line("fixing-place/y", "y_1", "place of the hardest fixing, above the centroid").from(PLACE, Status.READ)
+            .reads("found by trying all", hardest.y(), "m");
         String m = load.moment().symbol();
         double right = trace.line("fixing-shear/x", "V_x", "its force to the right").in(load.right().symbol(), load.right().value(), "N").in("n", n)
             .in(m, load.moment().value(), "N m").in("I_p", polar, "m²").in("y_1", y, "m").from(PLACE, Status.READ)
@@ -74,14 +76,16 @@ public final class EccentricGroup {
         double up = trace.line("fixing-shear/y", "V_y", "its force upward").in(load.up().symbol(), load.up().value(), "N").in("n", n)
             .in(m, load.moment().value(), "N m").in("I_p", polar, "m²").in("x_1", x, "m").from(PLACE, Status.READ)
             .gives(load.up().symbol() + " / n + " + m + " / I_p x_1", load.up().value() / n + load.moment().value() / polar * x, "N");
-        return resultant(trace.line("fixing-shear", "V_1", "shear of the hardest fixing").in("V_x", right, "N").in("V_y", up, "N"), "(V_x² + V_y²)^0.5", right, up);
+        return resultant(trace.line("fixing-shear", "V_1", "shear of the hardest fixing").in("V_x", right, "N")
+            .in("V_y", up, "N"), "(V_x² + V_y²)^0.5", right, up);
     }
 
     private static double direct(Load load, double n, Trace trace) {
         String x = load.right().symbol();
         String y = load.up().symbol();
-        return trace.line("fixing-shear", "V_1", "shear of each fixing, an equal share").in(x, load.right().value(), "N").in(y, load.up().value(), "N").in("n", n)
-            .from(PLACE, Status.READ).gives("(" + x + "² + " + y + "²)^0.5 / n", Math.pow(load.right().value() * load.right().value() + load.up().value() * load.up().value(), 0.5) / n, "N");
+        return trace.line("fixing-shear", "V_1", "shear of each fixing, an equal share").in(x, load.right().value(), "N").in(y, load.up().value(), "N")
+            .in("n", n).from(PLACE, Status.READ).gives("(" + x + "² + " + y + "²)^0.5 / n", Math.pow(load.right().value() * load.right().value()
+            + load.up().value() * load.up().value(), 0.5) / n, "N");
     }
 
     private static double resultant(Trace.Line line, String formula, double x, double y) {

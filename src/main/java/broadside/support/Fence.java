@@ -39,7 +39,8 @@ record Fence(double panel, double foot, double half, List<Block> blocks, Optiona
         for (int i = 0; i < feet.blocks().size(); i++) {
             FenceFeet.Block each = feet.blocks().get(i);
             String n = String.valueOf(i + 1);
-            blocks.add(new Block(notNegative(trace.given("m_{b" + n + "}", "mass of block " + n, each.mass().kilograms(), "kg", each.mass().typed()), "blocks[" + i + "].mass"),
+            blocks.add(new Block(notNegative(trace.given("m_{b" + n + "}", "mass of block " + n, each.mass().kilograms(), "kg", each.mass().typed()),
+                "blocks[" + i + "].mass"),
                 trace.given("x_{b" + n + "}", "distance of block " + n + " behind the line", each.lever().metres(), "m", each.lever().typed())));
         }
         if (!blocks.isEmpty() || feet.brace().isPresent()) {
@@ -89,10 +90,12 @@ record Fence(double panel, double foot, double half, List<Block> blocks, Optiona
         return trace.given("b_f", "length of a foot across the line", length, "m", feet.footLength().get().typed());
     }
 
-    private static Optional<Double> stakes(FenceFeet.Stakes stakes, double length, Assumed assumed, List<String> assumptions, List<String> remarks, Trace trace) {
+    private static Optional<Double> stakes(FenceFeet.Stakes stakes, double length, Assumed assumed, List<String> assumptions, List<String> remarks,
+        Trace trace) {
         if (stakes.proofLoad().isEmpty()) {
             if (stakes.words().isPresent() || stakes.count().isPresent()) {
-                remarks.add("Stakes are not counted: what they hold depends on the ground. They count with a proof load, measured on this ground; wet ground holds about half.");
+                remarks.add("Stakes are not counted: what they hold depends on the ground. They count with a proof load, measured on this ground; "
+                    + "wet ground holds about half.");
             }
             return Optional.empty();
         }
@@ -107,7 +110,8 @@ record Fence(double panel, double foot, double half, List<Block> blocks, Optiona
         if (stakes.count().isEmpty()) {
             assumptions.add("The number of stakes was not given: one on each side of each panel is counted, at the ends of the foot.");
         }
-        remarks.add("Stakes count against tipping only, upwards at the windward end of the foot; their proof load must be of this ground as it will be, since wet ground holds about half.");
+        remarks.add("Stakes count against tipping only, upwards at the windward end of the foot; "
+            + "their proof load must be of this ground as it will be, since wet ground holds about half.");
         double each = trace.given("P_s", "proof load of one stake", proof, "N", stakes.proofLoad().get().typed());
         double n = trace.given("n_s", "stakes on each side of a panel", count, "1", "");
         double factor = assumed.fixing("stake-factor", "γ_s", "pull-out over what may be counted on", trace);

@@ -79,7 +79,8 @@ public final class FenceStability {
             return List.of(new Way("to the back", onFoot(fence, by, "to the back", "-", trace)),
                 new Way("to the front", onFoot(fence, by, "to the front", "+", trace)));
         }
-        return List.of(new Way("towards the brace", onBrace(fence, by, trace)), new Way("away from the brace", onFoot(fence, by, "away from the brace", "+", trace)));
+        return List.of(new Way("towards the brace", onBrace(fence, by, trace)), new Way("away from the brace", onFoot(fence, by, "away from the brace", "+",
+            trace)));
     }
 
     /** About the leeward end of the foot; {@code sign} minus for wind from the front, when what stands behind the line is near that end. */
@@ -107,7 +108,8 @@ public final class FenceStability {
     /** About the foot of the brace, whose own ballast stands on the tipping edge. */
     private static double onBrace(Fence fence, RuleFactors by, Trace trace) {
         double lever = fence.brace().orElseThrow().lever();
-        Trace.Line line = trace.line("resisting-moment/towards-the-brace", "R_d", "moment that resists tipping about the foot of the brace, whose own ballast does not help");
+        Trace.Line line = trace.line("resisting-moment/towards-the-brace", "R_d",
+            "moment that resists tipping about the foot of the brace, whose own ballast does not help");
         line.in("γ_G", by.weight()).in("g_n", by.gravity(), "m/s²").in("m_p", fence.panel(), "kg").in("m_f", fence.foot(), "kg").in("L_B", lever, "m");
         StringBuilder formula = new StringBuilder("γ_G g_n ((m_p + m_f) L_B");
         double sum = (fence.panel() + fence.foot()) * lever;
@@ -155,7 +157,8 @@ public final class FenceStability {
         List<Turn> turns = new ArrayList<>();
         List<Check> checks = new ArrayList<>();
         for (Way way : ways) {
-            double ratio = RuleFactors.ratio(part.line(way.step("overturning-ratio"), "r_o", "resisting over overturning moment" + (way.name().isEmpty() ? "" : ", " + way.name())),
+            double ratio = RuleFactors.ratio(part.line(way.step("overturning-ratio"), "r_o", "resisting over overturning moment" + (way.name().isEmpty() ? ""
+                : ", " + way.name())),
                 new Check.In("R_d", way.resists()), new Check.In("M_d", acts.moment()), "N m", by.status());
             checks.add(by.overturning(("overturning " + way.name()).strip(), new Check.In("r_o", ratio), wind, part));
             turns.add(new Turn(way.name(), ratio, fence.brace().isPresent() ? uplift(way, acts, fence.brace().get(), by, part) : 0));
@@ -167,8 +170,9 @@ public final class FenceStability {
     }
 
     private static double uplift(Way way, RuleFactors.Action acts, Fence.Brace brace, RuleFactors by, Trace part) {
-        return part.line(way.step("uplift"), "Z", "uplift of the windward foot, tipping " + way.name()).in("M_d", acts.moment(), "N m").in("R_d", way.resists(), "N m")
-            .in("L_B", brace.lever(), "m").from(STATICS, by.status()).gives("max(0; (M_d - R_d) / L_B)", Math.max(0, (acts.moment() - way.resists()) / brace.lever()), "N");
+        return part.line(way.step("uplift"), "Z", "uplift of the windward foot, tipping " + way.name()).in("M_d", acts.moment(), "N m")
+            .in("R_d", way.resists(), "N m").in("L_B", brace.lever(), "m").from(STATICS, by.status()).gives("max(0; (M_d - R_d) / L_B)", Math.max(0,
+            (acts.moment() - way.resists()) / brace.lever()), "N");
     }
 
     /** Blocks on the line, and on the foot of the brace where there is one, in place of those typed. */
@@ -186,9 +190,10 @@ public final class FenceStability {
             return new BallastNeed(wind.named(), line, 0);
         }
         double reach = fence.brace().get().lever();
-        double line = needLine("ballast-mass/line", "blocks on the line of each panel, for the wind towards the brace", fence, acts, by, part).in("L_B", reach, "m")
-            .gives("max(0; " + asked + " / (γ_G g_n L_B) - (m_p + m_f))", Math.max(0, moment / (unit * reach) - held), "kg");
-        double brace = needLine("ballast-mass/brace", "on the foot of the brace, with those blocks, for the wind away from it and against sliding", fence, acts, by, part)
+        double line = needLine("ballast-mass/line", "blocks on the line of each panel, for the wind towards the brace", fence, acts, by, part)
+            .in("L_B", reach, "m").gives("max(0; " + asked + " / (γ_G g_n L_B) - (m_p + m_f))", Math.max(0, moment / (unit * reach) - held), "kg");
+        double brace = needLine("ballast-mass/brace", "on the foot of the brace, with those blocks, for the wind away from it and against sliding", fence,
+            acts, by, part)
             .in("L_B", reach, "m").in("a_f", fence.half(), "m").in("m_L", line, "kg").in("η_s", by.slide()).in("F_d", acts.force(), "N").in("μ", mu)
             .gives("max(0; " + asked + " / (γ_G g_n L_B) - (m_p + m_f + m_L) a_f / L_B; η_s F_d / (μ γ_G g_n) - (m_p + m_f) - m_L)",
                 Math.max(Math.max(0, moment / (unit * reach) - (held + line) * fence.half() / reach), sliding - line), "kg");
@@ -196,14 +201,14 @@ public final class FenceStability {
     }
 
     private static Trace.Line needLine(String step, String meaning, Fence fence, RuleFactors.Action acts, RuleFactors by, Trace part) {
-        Trace.Line line = part.line(step, step.endsWith("line") ? "m_L" : "m_N", meaning).in("η_o", by.required()).in("M_d", acts.moment(), "N m").in("γ_G", by.weight())
-            .in("g_n", by.gravity(), "m/s²").in("m_p", fence.panel(), "kg").in("m_f", fence.foot(), "kg").from(STATICS, by.status());
+        Trace.Line line = part.line(step, step.endsWith("line") ? "m_L" : "m_N", meaning).in("η_o", by.required()).in("M_d", acts.moment(), "N m")
+            .in("γ_G", by.weight()).in("g_n", by.gravity(), "m/s²").in("m_p", fence.panel(), "kg").in("m_f", fence.foot(), "kg").from(STATICS, by.status());
         return fence.stakes().isPresent() ? line.in("M_s", fence.stakes().get(), "N m") : line;
     }
 
     private static double perMetre(BallastNeed need, double length, Trace trace) {
-        double total = trace.line("ballast-mass/panel", "m_T", "ballast of each panel in all, for the hardest wind on one: " + need.named()).from(STATICS, Status.DERIVED)
-            .reads("the most on the line and the most on the foot of the brace", need.total(), "kg");
+        double total = trace.line("ballast-mass/panel", "m_T", "ballast of each panel in all, for the hardest wind on one: " + need.named())
+            .from(STATICS, Status.DERIVED).reads("the most on the line and the most on the foot of the brace", need.total(), "kg");
         double b = trace.given("l_p", "length of one panel", length, "m", "");
         return trace.line("ballast-mass-per-metre", "m'", "the same along the line").in("m_T", total, "kg").in("l_p", b, "m").from(STATICS, Status.DERIVED)
             .gives("m_T / l_p", total / b, "kg/m");

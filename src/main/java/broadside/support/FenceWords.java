@@ -31,10 +31,12 @@ final class FenceWords {
             BallastNeed other = braced.apply(fence.with(new Fence.Brace(reach, 0)));
             remarks.add("Will not stand on blocks alone: the " + need.named() + " needs " + kg(need.line()) + " of blocks, and more than " + kg(limit)
                 + " on one panel are no longer blocks. What would hold it: braces that reach " + reach + " m behind the line, with " + kg(other.brace())
-                + " on the foot of each brace and " + kg(other.line()) + " on the line of each panel; returns at the ends; or taking the cover off" + bare(stands) + ".");
+                + " on the foot of each brace and " + kg(other.line()) + " on the line of each panel; returns at the ends; or taking the cover off"
+                + bare(stands) + ".");
         } else if (fence.brace().isPresent() && Math.max(need.line(), need.brace()) > limit) {
             remarks.add("Even braced, the " + need.named() + " needs " + kg(need.line()) + " on the line of each panel and " + kg(need.brace())
-                + " on the foot of each brace, and more than " + kg(limit) + " in one place are no longer blocks. What would hold it: a longer brace, returns, or taking the cover off"
+                + " on the foot of each brace, and more than " + kg(limit)
+                + " in one place are no longer blocks. What would hold it: a longer brace, returns, or taking the cover off"
                 + bare(stands) + ".");
         }
     }

@@ -47,17 +47,21 @@ final class FixingChecks {
         Optional<Double> most = fixings.tension().map(f -> trace.given("T_a", "allowable tension of one fixing", f.newtons(), "N", f.typed()));
         Optional<Double> slip = fixings.shear().map(f -> trace.given("V_a", "allowable shear of one fixing", f.newtons(), "N", f.typed()));
         if (most.isPresent() && slip.isPresent()) {
-            double used = trace.line("fixing-utilisation", "η_f", "tension and shear of the hardest fixing over what is allowed").in("T_1", tension, "N").in("T_a", most.get(), "N")
-                .in("V_1", shear, "N").in("V_a", slip.get(), "N").from(LINEAR, Status.READ).gives("T_1 / T_a + V_1 / V_a", tension / most.get() + shear / slip.get(), "1");
+            double used = trace.line("fixing-utilisation", "η_f", "tension and shear of the hardest fixing over what is allowed").in("T_1", tension, "N")
+                .in("T_a", most.get(), "N")
+                .in("V_1", shear, "N").in("V_a", slip.get(), "N").from(LINEAR, Status.READ).gives("T_1 / T_a + V_1 / V_a", tension / most.get()
+                + shear / slip.get(), "1");
             double limit = trace.line("fixing-limit", "η_a", "most that the sum may be").from(LINEAR, Status.READ).reads("the whole", 1, "1");
             checks.add(Check.of("fixings", LINEAR, new Check.In("η_f", used), new Check.In("η_a", limit), "1", named, Status.READ, trace));
             return checks;
         }
-        most.ifPresent(t -> checks.add(Check.of("fixings in tension", "tension at allowable stress", new Check.In("T_1", tension), new Check.In("T_a", t), "N", named,
+        most.ifPresent(t -> checks.add(Check.of("fixings in tension", "tension at allowable stress", new Check.In("T_1", tension), new Check.In("T_a", t),
+            "N", named,
             Status.DERIVED, trace)));
         slip.ifPresent(v -> checks.add(Check.of("fixings in shear", "shear at allowable stress", new Check.In("V_1", shear), new Check.In("V_a", v), "N", named,
             Status.DERIVED, trace)));
-        remark(checks.isEmpty() ? "The fixings are not checked: no allowable loads were given. The pulls are at the level of allowable stress, to be held against a pull-out test or the data of the maker."
+        remark(checks.isEmpty() ? "The fixings are not checked: no allowable loads were given. The pulls are at the level of "
+            + "allowable stress, to be held against a pull-out test or the data of the maker."
             : "Tension and shear act together: with one allowable load only, the other and both together are not checked.", remarks);
         return checks;
     }

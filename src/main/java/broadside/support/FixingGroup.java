@@ -51,8 +51,8 @@ public final class FixingGroup {
         double weight = weight(load.mass(), assumed, assumptions, trace);
         double wind = sharing == Sharing.EQUAL ? equalShare(load, columns, rows, trace) : byArea(fixings, load, remarks, trace);
         double hung = hung(fixings, load, weight, assumptions, trace);
-        double tension = trace.line("fixing-tension", "T_1", "pull on the hardest fixing").in("T_W", wind, "N").in("T_G", hung, "N").from(STATICS, Status.RECALLED)
-            .gives("T_W + T_G", wind + hung, "N");
+        double tension = trace.line("fixing-tension", "T_1", "pull on the hardest fixing").in("T_W", wind, "N").in("T_G", hung, "N")
+            .from(STATICS, Status.RECALLED).gives("T_W + T_G", wind + hung, "N");
         double shear = shear(fixings, load, weight, trace);
         List<Check> checks = FixingChecks.of(fixings, tension, shear, "suction", remarks, trace);
         remarks.add("Prying of thin plates and of brackets is not counted.");
@@ -75,13 +75,16 @@ public final class FixingGroup {
         String p = load.suction().symbol();
         double b = width(load, trace);
         double h = height(load, trace);
-        return trace.line("fixing-tension/wind", "T_W", "suction on the panel, the same on every fixing").in(p, load.suction().value(), "Pa").in("b_1", b, "m").in("h_1", h, "m")
-            .in("n_x", columns).in("n_y", rows).from(STATICS, Status.READ).gives(p + " b_1 h_1 / (n_x n_y)", load.suction().value() * b * h / (columns * rows), "N");
+        return trace.line("fixing-tension/wind", "T_W", "suction on the panel, the same on every fixing").in(p, load.suction().value(), "Pa")
+            .in("b_1", b, "m").in("h_1", h, "m").in("n_x", columns).in("n_y", rows).from(STATICS, Status.READ).gives(p + " b_1 h_1 / (n_x n_y)",
+            load.suction().value() * b * h / (columns * rows), "N");
     }
 
     private double byArea(Fixings fixings, PanelLoad load, List<String> remarks, Trace trace) {
-        double across = reach(fixings.columns(), fixings.horizontal(), width(load, trace), new Names("x", "b_1", "fixings.horizontal-pitch", "width"), remarks, trace);
-        double along = reach(fixings.rows(), fixings.vertical(), height(load, trace), new Names("y", "h_1", "fixings.vertical-pitch", "height"), remarks, trace);
+        double across = reach(fixings.columns(), fixings.horizontal(), width(load, trace), new Names("x", "b_1", "fixings.horizontal-pitch", "width"),
+            remarks, trace);
+        double along = reach(fixings.rows(), fixings.vertical(), height(load, trace), new Names("y", "h_1", "fixings.vertical-pitch", "height"), remarks,
+            trace);
         String p = load.suction().symbol();
         Trace.Line line = trace.line("fixing-tension/wind", "T_W", "suction on the area of the hardest fixing");
         if (Math.max(fixings.columns(), fixings.rows()) < assumed.fixing("continuity-from")) {
@@ -111,7 +114,8 @@ public final class FixingGroup {
         }
         trace.given(s, "pitch of the fixings", pitch, "m", "");
         if (size - (lines - 1) * pitch > 2 * pitch) {
-            FixingChecks.remark("The panel stands out beyond its outer fixings by more than their pitch: the outer ones may take more than the area around them.", remarks);
+            FixingChecks.remark("The panel stands out beyond its outer fixings by more than their pitch: "
+                + "the outer ones may take more than the area around them.", remarks);
         }
         return line.in(names.size(), size, "m").in(n, lines).in(s, pitch, "m").from(STATICS, Status.RECALLED)
             .gives("max(" + s + "; " + names.size() + " / 2 - (" + n + " - 2) " + s + " / 2)", Math.max(pitch, size / 2 - (lines - 2) * pitch / 2), "m");
@@ -124,7 +128,8 @@ public final class FixingGroup {
             .in("n_x", fixings.columns()).from("statics: elastic distribution about the middle of the group", Status.READ);
         if (fixings.rows() == 1) {
             if (weight * off > 0) {
-                assumptions.add("One row of fixings at half the height: the weight that hangs off the wall is held by them and by the lower edge, which leans on the wall.");
+                assumptions.add("One row of fixings at half the height: the weight that hangs off the wall is held by them "
+                    + "and by the lower edge, which leans on the wall.");
             }
             double h = height(load, trace);
             return line.in("h_1", h, "m").gives("G e_1 / (n_x h_1 / 2)", weight * off / (fixings.columns() * h / 2), "N");

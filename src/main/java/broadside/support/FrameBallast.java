@@ -35,9 +35,10 @@ public final class FrameBallast {
         double g = trace.given("G_1", "permanent load on the windward legs", permanent, "N", "");
         double lift = trace.line("uplift", "Z", "uplift of the windward legs by the wind").in("M_1", m, "N m").in("a_1", a, "m").from("statics", Status.DERIVED)
             .gives("M_1 / a_1", m / a, "N");
-        double net = trace.line("uplift/net", "Z_n", "what the permanent load leaves of it").in("Z", lift, "N").in("G_1", g, "N").from("statics", Status.DERIVED)
-            .gives("max(0; Z - G_1)", Math.max(0, lift - g), "N");
-        double factor = trace.line("factor-on-weight", "γ_G", "factor on favourable weight").from(rule.place(), rule.status()).reads(rule.key(), rule.onWeight(), "1");
+        double net = trace.line("uplift/net", "Z_n", "what the permanent load leaves of it").in("Z", lift, "N").in("G_1", g, "N")
+            .from("statics", Status.DERIVED).gives("max(0; Z - G_1)", Math.max(0, lift - g), "N");
+        double factor = trace.line("factor-on-weight", "γ_G", "factor on favourable weight").from(rule.place(), rule.status())
+            .reads(rule.key(), rule.onWeight(), "1");
         double weight = trace.line("ballast-weight", "G_2", "weight of the ballast").in("Z_n", net, "N").in("γ_G", factor).from(rule.place(), rule.status())
             .gives("Z_n / γ_G", net / factor, "N");
         double fall = assumed.gravity(trace);
@@ -54,7 +55,8 @@ public final class FrameBallast {
         double mu = trace.given("μ", "friction coefficient", friction, "1", "");
         double v = trace.given("V_d", "vertical force", vertical, "N", "");
         double h = trace.given("H_d", "force along the ground", along, "N", "");
-        double factor = trace.line("ratio-required/sliding", "η_s", "ratio that must be reached against sliding").from(rule.place(), rule.status()).reads(rule.key(), rule.required(), "1");
+        double factor = trace.line("ratio-required/sliding", "η_s", "ratio that must be reached against sliding").from(rule.place(), rule.status())
+            .reads(rule.key(), rule.required(), "1");
         double allowed = trace.line("sliding-resistance", "H_a", "force along the ground that friction allows").in("μ", mu).in("V_d", v, "N").in("η_s", factor)
             .from(rule.place(), rule.status()).gives("μ V_d / η_s", mu * v / factor, "N");
         return Check.of("sliding", rule.title() + ", " + rule.place(), new Check.In("H_d", h), new Check.In("H_a", allowed), "N", "", rule.status(), trace);

@@ -63,11 +63,11 @@ public final class KentledgeStability {
             stands.add(stand(wind, post, resists, grip, by, trace.part(wind.part())));
         }
         BallastNeed need = stands.stream().map(Stand::need).reduce(BallastNeed::and).orElseThrow();
-        double total = trace.line("ballast-mass/post", "m_T", "ballast of each post in all, for the hardest wind on one: " + need.named()).from(STATICS, Status.DERIVED)
-            .reads("the most below the face and the most on the foot of the brace", need.total(), "kg");
+        double total = trace.line("ballast-mass/post", "m_T", "ballast of each post in all, for the hardest wind on one: " + need.named())
+            .from(STATICS, Status.DERIVED).reads("the most below the face and the most on the foot of the brace", need.total(), "kg");
         double s = trace.given("l_p", "spacing of the posts", spacing, "m", "");
-        double perMetre = trace.line("ballast-mass-per-metre", "m'", "the same along the line").in("m_T", total, "kg").in("l_p", s, "m").from(STATICS, Status.DERIVED)
-            .gives("m_T / l_p", total / s, "kg/m");
+        double perMetre = trace.line("ballast-mass-per-metre", "m'", "the same along the line").in("m_T", total, "kg").in("l_p", s, "m")
+            .from(STATICS, Status.DERIVED).gives("m_T / l_p", total / s, "kg/m");
         return new StabilityResult(stands, need, perMetre, assumptions, remarks);
     }
 
@@ -92,7 +92,8 @@ public final class KentledgeStability {
     }
 
     private static Resists resists(Post post, double mu, RuleFactors by, Trace trace) {
-        double towards = trace.line("resisting-moment/towards-the-brace", "R_1", "moment that resists tipping about the foot of the brace, whose own ballast does not help")
+        double towards = trace.line("resisting-moment/towards-the-brace", "R_1",
+            "moment that resists tipping about the foot of the brace, whose own ballast does not help")
             .in("γ_G", by.weight()).in("g_n", by.gravity(), "m/s²").in("m_p", post.face(), "kg").in("m_f", post.front(), "kg").in("L_B", post.lever(), "m")
             .from(STATICS, by.rule().status())
             .gives("γ_G g_n (m_p + m_f) L_B", by.weight() * by.gravity() * (post.face() + post.front()) * post.lever(), "N m");
@@ -116,13 +117,14 @@ public final class KentledgeStability {
         return new Stand(wind, turns, ratio, checks, need(wind, post, acts, grip.value(), by, part));
     }
 
-    private static Turn turn(String name, Check.In resists, RuleFactors.Action acts, Post post, PanelWind wind, RuleFactors by, List<Check> checks, Trace part) {
+    private static Turn turn(String name, Check.In resists, RuleFactors.Action acts, Post post, PanelWind wind, RuleFactors by, List<Check> checks,
+        Trace part) {
         String slug = "/" + name.replace(' ', '-');
         double ratio = RuleFactors.ratio(part.line("overturning-ratio" + slug, "r_o", "resisting over overturning moment, " + name), resists,
             new Check.In("M_d", acts.moment()), "N m", by.status());
         checks.add(by.overturning("overturning " + name, new Check.In("r_o", ratio), wind, part));
-        double uplift = part.line("uplift" + slug, "Z", "uplift of the windward foot, tipping " + name).in("M_d", acts.moment(), "N m").in(resists.symbol(), resists.value(), "N m")
-            .in("L_B", post.lever(), "m").from(STATICS, by.status())
+        double uplift = part.line("uplift" + slug, "Z", "uplift of the windward foot, tipping " + name).in("M_d", acts.moment(), "N m")
+            .in(resists.symbol(), resists.value(), "N m").in("L_B", post.lever(), "m").from(STATICS, by.status())
             .gives("max(0; (M_d - " + resists.symbol() + ") / L_B)", Math.max(0, (acts.moment() - resists.value()) / post.lever()), "N");
         return new Turn(name, ratio, uplift);
     }
@@ -133,7 +135,8 @@ public final class KentledgeStability {
         double front = part.line("ballast-mass/front", "m_L", "ballast below the face at each post, for the wind towards the brace").in("η_o", by.required())
             .in("M_d", acts.moment(), "N m").in("γ_G", by.weight()).in("g_n", by.gravity(), "m/s²").in("L_B", post.lever(), "m").in("m_p", post.face(), "kg")
             .from(STATICS, by.status()).gives("max(0; η_o M_d / (γ_G g_n L_B) - m_p)", Math.max(0, both - post.face()), "kg");
-        double brace = part.line("ballast-mass/brace", "m_N", "ballast on the foot of each brace, for the wind from behind and against sliding").in("η_o", by.required())
+        double brace = part.line("ballast-mass/brace", "m_N", "ballast on the foot of each brace, for the wind from behind and against sliding")
+            .in("η_o", by.required())
             .in("M_d", acts.moment(), "N m").in("γ_G", by.weight()).in("g_n", by.gravity(), "m/s²").in("L_B", post.lever(), "m").in("m_p", post.face(), "kg")
             .in("m_L", front, "kg").in("η_s", by.slide()).in("F_d", acts.force(), "N").in("μ", mu).from(STATICS, by.status())
             .gives("max(η_o M_d / (γ_G g_n L_B); η_s F_d / (μ γ_G g_n) - m_p - m_L)",

@@ -13,7 +13,8 @@ public record PanelWind(String named, String part, Check.In force, Check.In heig
 
     public PanelWind {
         if (!(force.value() >= 0) || !(height.value() >= 0)) {
-            throw new IllegalArgumentException("force and height of the wind are magnitudes; " + named + " has " + force.value() + " N at " + height.value() + " m");
+            throw new IllegalArgumentException("force and height of the wind are magnitudes; " + named + " has " + force.value() + " N at " + height.value()
+                + " m");
         }
     }
 }

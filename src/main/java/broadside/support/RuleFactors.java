@@ -25,7 +25,8 @@ record RuleFactors(StabilityRule rule, StabilityRule sliding, double weight, dou
         StabilityRule sliding = rules.sliding(rule);
         String named = rule.title() + " (" + rule.key() + ")";
         double g = assumed.gravity(trace);
-        double weight = trace.line("factor-on-weight", "γ_G", "factor on favourable weight").from(rule.place(), rule.status()).reads(named, rule.onWeight(), "1");
+        double weight = trace.line("factor-on-weight", "γ_G", "factor on favourable weight").from(rule.place(), rule.status())
+            .reads(named, rule.onWeight(), "1");
         double wind = trace.line("factor-on-wind", "γ_W", "factor on the wind").from(rule.place(), rule.status()).reads(named, rule.onWind(), "1");
         double level = trace.line("wind-level", "γ_L", "from the wind of the code to the " + (rule.strength() ? "strength" : "service") + " level")
             .from(levels.place(), levels.status()).reads("by the code", rule.strength() ? levels.strength() : levels.service(), "1");
@@ -69,6 +70,7 @@ record RuleFactors(StabilityRule rule, StabilityRule sliding, double weight, dou
 
     /** Check of a ratio against sliding, recorded before. */
     Check sliding(Check.In ratio, PanelWind on, Status friction, Trace trace) {
-        return Check.of("sliding", sliding.title() + ", " + sliding.place(), new Check.In("η_s", slide), ratio, "1", on.named(), status.weaker(friction), trace);
+        return Check.of("sliding", sliding.title() + ", " + sliding.place(), new Check.In("η_s", slide), ratio, "1", on.named(), status.weaker(friction),
+            trace);
     }
 }

@@ -51,7 +51,8 @@ public record Stay(double tension, double uplift, double strength, List<Check> c
         double strength = trace.line("stay-strength", "U_s", "ultimate strength that the stay needs").in("γ_s", factor).in("T_s", tension, "N")
             .from("Baytown, Texas, sign code section 118-241 (d)", Status.READ).gives("γ_s T_s", factor * tension, "N");
         List<Check> checks = new ArrayList<>();
-        ultimate.ifPresent(u -> checks.add(Check.of("stay", "pull at most 1/5 of the ultimate strength, Baytown, Texas, sign code section 118-241 (d)", new Check.In("U_s", strength),
+        ultimate.ifPresent(u -> checks.add(Check.of("stay", "pull at most 1/5 of the ultimate strength, Baytown, Texas, sign code section 118-241 (d)",
+            new Check.In("U_s", strength),
             new Check.In("U_u", trace.given("U_u", "ultimate strength of the stay", u.newtons(), "N", u.typed())), "N", "", Status.READ, trace)));
         return new Stay(tension, uplift, strength, checks, List.of("The initial pull of the stay comes on top.",
             "Chains, cables and wires do not count as bracing in at least one city code (Redwood City): ask the authority."));

@@ -112,12 +112,13 @@ class FenceStabilityTest {
     /** Nothing known but blocks: 60 kg on a foot of 0.6 m. */
     @Test
     void whatIsNotKnownCountsAsNothingAndIsSaid() {
-        FenceFeet unknown = new FenceFeet(Optional.empty(), Optional.empty(), Optional.empty(), List.of(new FenceFeet.Block(Mass.kilograms(60), Length.metres(0))),
+        FenceFeet unknown = new FenceFeet(Optional.empty(), Optional.empty(), Optional.empty(), List.of(new FenceFeet.Block(Mass.kilograms(60),
+            Length.metres(0))),
             Optional.empty(), ground("grass"), new FenceFeet.Stakes(Optional.empty(), Optional.empty(), Optional.empty()));
         StabilityResult result = assess(unknown, "factor-1.5", 100, 1.0);
         assertThat(ratio(result, "")).isCloseTo(60 * 0.3 * G / 100, within(1e-9));
         assertThat(result.panels().get(0).sliding()).isCloseTo(0.25 * 60 * G / 100, within(1e-9));
-        assertThat(result.assumptions()).hasSize(3).anyMatch(a -> a.contains("0.6 m is taken"));
+        assertThat(result.assumptions()).hasSize(4).anyMatch(a -> a.contains("0.6 m is taken"));
         FenceFeet nothing = new FenceFeet(Optional.empty(), Optional.empty(), Optional.empty(), List.of(), Optional.empty(), ground("grass"),
             new FenceFeet.Stakes(Optional.empty(), Optional.empty(), Optional.empty()));
         assertThat(assess(nothing, "factor-1.5", 100, 1.0).checks()).allMatch(c -> c.utilisation() == Check.MOST);
@@ -126,7 +127,8 @@ class FenceStabilityTest {
     @Test
     void eachWindHasItsChecksAndTheHardestNamesTheNeed() {
         Trace trace = new Trace();
-        List<PanelWind> winds = List.of(wind("hardest-covered", 900, 1.1, true, trace), wind("mean-covered", 500, 1.1, true, trace), wind("hardest-bare", 150, 1.0, false, trace));
+        List<PanelWind> winds = List.of(wind("hardest-covered", 900, 1.1, true, trace), wind("mean-covered", 500, 1.1, true, trace), wind("hardest-bare",
+            150, 1.0, false, trace));
         StabilityResult result = FENCES.assess(feet(18, 25, 0.65, friction(0.4), Optional.empty(), 25, 0), 3.45, winds, RULES.of("factor-1.5"), PLAIN, trace);
         assertThat(result.panels()).hasSize(3);
         assertThat(result.need().named()).isEqualTo("hardest covered");

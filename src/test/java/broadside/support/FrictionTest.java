@@ -25,10 +25,13 @@ class FrictionTest {
     }
 
     @ParameterizedTest
-    @CsvSource({"concrete on concrete, 0.4, second-hand", "Steel  on Concrete, 0.1, second-hand", "steel on steel, 0.1, second-hand", "wood on clay, 0.25, second-hand",
+    @CsvSource({"concrete on concrete, 0.4, second-hand", "Steel  on Concrete, 0.1, second-hand", "steel on steel, 0.1, second-hand",
+        "wood on clay, 0.25, second-hand",
         "concrete on loam, 0.4, second-hand", "steel on sand, 0.2, second-hand", "rubber on dry asphalt, 0.5, recalled", "rubber on wet asphalt, 0.3, recalled",
-        "asphalt, 0.3, recalled", "concrete, 0.3, recalled", "paving, 0.3, recalled", "clay, 0.25, second-hand", "loam, 0.4, second-hand", "sand, 0.25, second-hand",
-        "gravel, 0.35, second-hand", "grass, 0.25, derived", "wet grass, 0.2, recalled", "steel on trowelled concrete, 0.5, second-hand", "steel on grass, 0.25, derived"})
+        "asphalt, 0.3, recalled", "concrete, 0.3, recalled", "paving, 0.3, recalled", "clay, 0.25, second-hand", "loam, 0.4, second-hand",
+        "sand, 0.25, second-hand",
+        "gravel, 0.35, second-hand", "grass, 0.25, derived", "wet grass, 0.2, recalled", "steel on trowelled concrete, 0.5, second-hand",
+        "steel on grass, 0.2, derived"})
     void theLowestPublishedValueThatAppliesIsTaken(String words, double mu, String status) {
         assertThat(of(words).value()).isEqualTo(mu);
         assertThat(of(words).status().word()).isEqualTo(status);

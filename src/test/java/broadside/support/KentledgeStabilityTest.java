@@ -22,7 +22,8 @@ class KentledgeStabilityTest {
 
     private static StabilityResult assess(Kentledge kentledge, double force) {
         Trace trace = new Trace();
-        return new KentledgeStability(STABILITY).assess(kentledge, 2.4, List.of(wind("worst-zone", force, 1.2, true, trace), wind("ordinary-zone", force / 2, 1.2, true, trace)),
+        return new KentledgeStability(STABILITY).assess(kentledge, 2.4, List.of(wind("worst-zone", force, 1.2, true, trace), wind("ordinary-zone", force / 2,
+            1.2, true, trace)),
             RULES.of("twf-1.5"), PLAIN, trace);
     }
 
@@ -55,9 +56,11 @@ class KentledgeStabilityTest {
 
     @Test
     void whatIsMissingIsSaidOrRefused() {
-        Kentledge unknown = new Kentledge(Optional.empty(), Optional.of(broadside.quantity.Length.metres(2)), Optional.empty(), Optional.empty(), Stands.ground("clay"));
+        Kentledge unknown = new Kentledge(Optional.empty(), Optional.of(broadside.quantity.Length.metres(2)), Optional.empty(), Optional.empty(),
+            Stands.ground("clay"));
         assertThat(assess(unknown, 2000).assumptions()).hasSize(4);
-        assertThatThrownBy(() -> assess(new Kentledge(Stands.mass(5), Optional.empty(), Stands.mass(5), Stands.mass(5), Stands.friction(0.4)), 1)).isInstanceOf(UnfitAnswer.class)
+        assertThatThrownBy(() -> assess(new Kentledge(Stands.mass(5), Optional.empty(), Stands.mass(5), Stands.mass(5), Stands.friction(0.4)),
+            1)).isInstanceOf(UnfitAnswer.class)
             .satisfies(e -> assertThat(((UnfitAnswer) e).field()).isEqualTo("ballast.lever"));
         assertThatThrownBy(() -> assess(kentledge(5, 0, 5, 5, 0.4), 1)).isInstanceOf(UnfitAnswer.class);
         assertThatThrownBy(() -> assess(kentledge(5, 2, -5, 5, 0.4), 1)).satisfies(e -> assertThat(((UnfitAnswer) e).field()).isEqualTo("ballast.front-mass"));

@@ -59,7 +59,8 @@ final class Stands {
     }
 
     static Fixings allowed(Fixings of, double tension, double shear) {
-        return new Fixings(of.columns(), of.rows(), of.horizontalPitch(), of.verticalPitch(), Optional.of(Force.newtons(tension)), Optional.of(Force.newtons(shear)));
+        return new Fixings(of.columns(), of.rows(), of.horizontalPitch(), of.verticalPitch(), Optional.of(Force.newtons(tension)),
+            Optional.of(Force.newtons(shear)));
     }
 
     /** A wind recorded on the sheet under F_f and z_f. */
