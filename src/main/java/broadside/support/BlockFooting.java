@@ -11,7 +11,7 @@ import broadside.trace.Trace;
 public final class BlockFooting {
 
     private final StabilityRules rules;
-    private final Assumed assumed;
+    private final StabilityNumbers assumed;
 
     /** Width of the block along the wind, length across it and depth, m; mass per volume, kg/m3. */
     public record Block(double width, double length, double depth, double density) { }
@@ -19,7 +19,7 @@ public final class BlockFooting {
     /** Reads the tables of stability. */
     public BlockFooting(Edition stability) {
         this.rules = new StabilityRules(stability);
-        this.assumed = new Assumed(stability);
+        this.assumed = new StabilityNumbers(stability);
     }
 
     /**

@@ -20,7 +20,7 @@ public final class BracketFixings {
 
     private static final String STATICS = "statics of a projecting sign";
 
-    private final Assumed assumed;
+    private final StabilityNumbers assumed;
 
     /**
      * What the blade brings, at the level of allowable stress.
@@ -33,7 +33,7 @@ public final class BracketFixings {
 
     /** Reads the tables of stability. */
     public BracketFixings(Edition stability) {
-        this.assumed = new Assumed(stability);
+        this.assumed = new StabilityNumbers(stability);
     }
 
     /**

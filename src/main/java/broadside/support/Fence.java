@@ -29,7 +29,7 @@ record Fence(double panel, double foot, double half, List<Block> blocks, Optiona
         blocks = List.copyOf(blocks);
     }
 
-    static Fence of(FenceFeet feet, Assumed assumed, List<String> assumptions, List<String> remarks, Trace trace) {
+    static Fence of(FenceFeet feet, StabilityNumbers assumed, List<String> assumptions, List<String> remarks, Trace trace) {
         double panel = mass(feet.panelMass(), "panel-mass", "m_p", "mass of one panel with its cover", assumptions, trace);
         double foot = mass(feet.footMass(), "foot-mass", "m_f", "mass of the feet of one panel", assumptions, trace);
         double length = footLength(feet, assumed, assumptions, trace);
@@ -77,7 +77,7 @@ record Fence(double panel, double foot, double half, List<Block> blocks, Optiona
         return mass;
     }
 
-    private static double footLength(FenceFeet feet, Assumed assumed, List<String> assumptions, Trace trace) {
+    private static double footLength(FenceFeet feet, StabilityNumbers assumed, List<String> assumptions, Trace trace) {
         if (feet.footLength().isEmpty()) {
             double length = assumed.length("foot-length", "b_f", "length of a foot across the line", trace);
             assumptions.add("The length of the feet was not given: " + length + " m is taken, half of it on each side of the line.");
@@ -90,7 +90,7 @@ record Fence(double panel, double foot, double half, List<Block> blocks, Optiona
         return trace.given("b_f", "length of a foot across the line", length, "m", feet.footLength().get().typed());
     }
 
-    private static Optional<Double> stakes(FenceFeet.Stakes stakes, double length, Assumed assumed, List<String> assumptions, List<String> remarks,
+    private static Optional<Double> stakes(FenceFeet.Stakes stakes, double length, StabilityNumbers assumed, List<String> assumptions, List<String> remarks,
         Trace trace) {
         if (stakes.proofLoad().isEmpty()) {
             if (stakes.words().isPresent() || stakes.count().isPresent()) {

@@ -20,7 +20,7 @@ public final class FenceStability {
 
     private final StabilityRules rules;
     private final Friction friction;
-    private final Assumed assumed;
+    private final StabilityNumbers assumed;
 
     /** A way of tipping and what resists it, R_d in N m. */
     private record Way(String name, double resists) {
@@ -33,7 +33,7 @@ public final class FenceStability {
     public FenceStability(Edition stability) {
         this.rules = new StabilityRules(stability);
         this.friction = new Friction(stability);
-        this.assumed = new Assumed(stability);
+        this.assumed = new StabilityNumbers(stability);
     }
 
     /**

@@ -8,9 +8,9 @@ import java.util.function.Function;
 /** Says plainly when a fence does not stand on blocks, and what would hold it. */
 final class FenceWords {
 
-    private final Assumed assumed;
+    private final StabilityNumbers assumed;
 
-    FenceWords(Assumed assumed) {
+    FenceWords(StabilityNumbers assumed) {
         this.assumed = assumed;
     }
 

@@ -15,7 +15,7 @@ public final class FixingGroup {
 
     private static final String STATICS = "statics";
 
-    private final Assumed assumed;
+    private final StabilityNumbers assumed;
 
     /** How suction is shared: each fixing takes the area around it, or all take the same. */
     public enum Sharing { BY_AREA, EQUAL }
@@ -34,7 +34,7 @@ public final class FixingGroup {
 
     /** Reads the tables of stability. */
     public FixingGroup(Edition stability) {
-        this.assumed = new Assumed(stability);
+        this.assumed = new StabilityNumbers(stability);
     }
 
     /**
@@ -60,7 +60,7 @@ public final class FixingGroup {
     }
 
     /** Weight, N, recorded as G; zero where no mass was given. */
-    static double weight(Optional<Mass> mass, Assumed assumed, List<String> assumptions, Trace trace) {
+    static double weight(Optional<Mass> mass, StabilityNumbers assumed, List<String> assumptions, Trace trace) {
         if (mass.isEmpty()) {
             assumptions.add("The mass was not given: the fixings are loaded by the wind alone.");
         }

@@ -10,12 +10,12 @@ public final class FrameBallast {
     private static final String KEY = "frame-ballast-0.9";
 
     private final StabilityRules rules;
-    private final Assumed assumed;
+    private final StabilityNumbers assumed;
 
     /** Reads the tables of stability. */
     public FrameBallast(Edition stability) {
         this.rules = new StabilityRules(stability);
-        this.assumed = new Assumed(stability);
+        this.assumed = new StabilityNumbers(stability);
     }
 
     /**

@@ -24,7 +24,7 @@ public final class KentledgeStability {
 
     private final StabilityRules rules;
     private final Friction friction;
-    private final Assumed assumed;
+    private final StabilityNumbers assumed;
 
     /** Masses in kg as recorded: face m_p and front ballast m_f below it, brace ballast m_B at the lever L_B, m. */
     private record Post(double face, double front, double brace, double lever) { }
@@ -36,7 +36,7 @@ public final class KentledgeStability {
     public KentledgeStability(Edition stability) {
         this.rules = new StabilityRules(stability);
         this.friction = new Friction(stability);
-        this.assumed = new Assumed(stability);
+        this.assumed = new StabilityNumbers(stability);
     }
 
     /**

@@ -21,7 +21,7 @@ record RuleFactors(StabilityRule rule, StabilityRule sliding, double weight, dou
     /** Wind of one case at the level of the rule: force F_d, N, and moment at the ground M_d, N m. */
     record Action(double force, double moment) { }
 
-    static RuleFactors of(StabilityRule rule, StabilityRules rules, WindLevels levels, Assumed assumed, Trace trace) {
+    static RuleFactors of(StabilityRule rule, StabilityRules rules, WindLevels levels, StabilityNumbers assumed, Trace trace) {
         StabilityRule sliding = rules.sliding(rule);
         String named = rule.title() + " (" + rule.key() + ")";
         double g = assumed.gravity(trace);

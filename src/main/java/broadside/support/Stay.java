@@ -46,7 +46,7 @@ public record Stay(double tension, double uplift, double strength, List<Check> c
             .from(STATICS, Status.DERIVED).gives(h + " / cos(θ)", force.value() / Math.cos(theta), "N");
         double uplift = trace.line("stay-uplift", "Z_s", "uplift of the anchor, and push on the mast").in(h, force.value(), "N").in("θ", theta, "rad")
             .from(STATICS, Status.DERIVED).gives(h + " tan(θ)", force.value() * Math.tan(theta), "N");
-        Assumed assumed = new Assumed(stability);
+        StabilityNumbers assumed = new StabilityNumbers(stability);
         double factor = assumed.fixing("guy-factor", "γ_s", "ultimate strength over the pull that is allowed", trace);
         double strength = trace.line("stay-strength", "U_s", "ultimate strength that the stay needs").in("γ_s", factor).in("T_s", tension, "N")
             .from("Baytown, Texas, sign code section 118-241 (d)", Status.READ).gives("γ_s T_s", factor * tension, "N");

@@ -6,12 +6,12 @@ import broadside.table.Rows;
 import broadside.trace.Trace;
 
 /** Numbers taken where nothing was typed, from assumptions.csv, and the numbers of fixings.csv. */
-final class Assumed {
+final class StabilityNumbers {
 
     private final Rows own;
     private final Rows fixings;
 
-    Assumed(Edition stability) {
+    StabilityNumbers(Edition stability) {
         this.own = stability.rows("assumptions");
         this.fixings = stability.rows("fixings");
     }
