@@ -9,7 +9,7 @@ import java.util.Set;
  */
 final class Formula {
 
-    private static final Set<String> FUNCTIONS = Set.of("ln", "exp", "max", "min", "abs");
+    private static final Set<String> FUNCTIONS = Set.of("ln", "exp", "max", "min", "abs", "sin", "cos", "tan");
 
     private final String text;
     private final Map<String, Double> values;
@@ -121,6 +121,9 @@ final class Formula {
             case "ln" -> Math.log(value);
             case "exp" -> Math.exp(value);
             case "abs" -> Math.abs(value);
+            case "sin" -> Math.sin(value);
+            case "cos" -> Math.cos(value);
+            case "tan" -> Math.tan(value);
             default -> value;
         };
     }

@@ -24,19 +24,21 @@ final class Parts {
     private static final String OPEN_FLOW = "open-flow/1";
 
     private static final String NAMES = "convert-speed, plate-drag, section, tip-mass-frequency, post-bending-asd, post-modulus-needed, post-torsion, embedment-ibc, "
-        + "pier-broms-clay, broms-clay-capacity, pad";
+        + "pier-broms-clay, broms-clay-capacity, pad, bolt-group, facade-fixings, stay, frame-ballast, edge-pull, block-footing";
 
     private final SpeedConversion conversion;
     private final CodeLibrary codes;
     private final Catalogue catalogue;
     private final GroundParts ground;
     private final PostParts posts;
+    private final BallastParts ballast;
 
     Parts(SpeedConversion conversion, CodeLibrary codes, Catalogue catalogue, TableLibrary tables) {
         this.conversion = conversion;
         this.codes = codes;
         this.catalogue = catalogue;
         this.ground = new GroundParts(tables);
+        this.ballast = new BallastParts(tables.edition("stability/1").orElseThrow());
         this.posts = new PostParts(tables.edition(PostRules.EDITION).orElseThrow());
     }
 
@@ -48,6 +50,7 @@ final class Parts {
             case "section" -> SectionParts.section(given, catalogue);
             case "tip-mass-frequency", "post-bending-asd", "post-modulus-needed", "post-torsion" -> posts.run(part, given);
             case "embedment-ibc", "pier-broms-clay", "broms-clay-capacity", "pad" -> ground.run(part, given);
+            case "bolt-group", "facade-fixings", "stay", "frame-ballast", "edge-pull", "block-footing" -> ballast.run(part, given);
             default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows " + NAMES);
         };
     }
