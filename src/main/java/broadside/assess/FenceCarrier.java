@@ -9,7 +9,7 @@ import broadside.panel.Kentledge;
 import broadside.support.BallastNeed;
 import broadside.support.Check;
 import broadside.support.PanelWind;
-import broadside.support.Standing;
+import broadside.support.StabilityResult;
 import broadside.trace.Status;
 import broadside.trace.Step;
 import broadside.trace.Trace;
@@ -30,7 +30,7 @@ final class FenceCarrier {
             }
         }
         winds.add(mean(fence, governing, sheet));
-        Standing standing = by.rules().fences().assess(fence.feet(), fence.panelLength().metres(), winds, by.stability(), by.levels(sheet), sheet);
+        StabilityResult standing = by.rules().fences().assess(fence.feet(), fence.panelLength().metres(), winds, by.stability(), by.levels(sheet), sheet);
         return new Carried(List.of(ballast(standing, "panel", fence.feet().brace().isPresent(), by)));
     }
 
@@ -67,14 +67,14 @@ final class FenceCarrier {
                     new Check.In("z_p", arm), true));
             }
         }
-        Standing standing = by.rules().kentledge().assess(kentledge, hoarding.spacing().orElseThrow().metres(), winds, by.stability(), by.levels(sheet), sheet);
+        StabilityResult standing = by.rules().kentledge().assess(kentledge, hoarding.spacing().orElseThrow().metres(), winds, by.stability(), by.levels(sheet), sheet);
         Part part = ballast(standing, "post", true, by);
         List<String> remarks = new ArrayList<>(part.remarks());
         remarks.add("Posts, braces and their joints are not checked: only whether the frames tip, slide or lift.");
         return new Carried(List.of(new Part(part.key(), part.title(), part.results(), part.checks(), List.of(), part.assumed(), remarks, Optional.empty())));
     }
 
-    private static Part ballast(Standing standing, String each, boolean braced, Carriers by) {
+    private static Part ballast(StabilityResult standing, String each, boolean braced, Carriers by) {
         BallastNeed need = standing.need();
         List<Result> results = new ArrayList<>();
         boolean enough = standing.checks().stream().allMatch(Check::passes);

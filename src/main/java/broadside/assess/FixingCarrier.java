@@ -85,8 +85,8 @@ final class FixingCarrier {
             .from(levels.place(), levels.status()).gives("k_s M_w", levels.service() * turning.baseMoment(), "N m");
         double along = sheet.line("blade-wind/along", "W_e", "wind along the blade, at allowable stress").in("k_s", levels.service()).in("F_e", edgeOn.force(), "N")
             .from(levels.place(), levels.status()).gives("k_s F_e", levels.service() * edgeOn.force(), "N");
-        BracketFixings.BladeLoad load = new BracketFixings.BladeLoad(new Check.In("W_n", normal), new Check.In("M_n", moment), new Check.In("W_e", along),
-            sign.panels().get(0).middle(), sign.mass());
+        BracketFixings.BladeLoad load = new BracketFixings.BladeLoad(new Check.In("W_n", normal), new Check.In("W_e", along),
+            Optional.of(new Check.In("M_n", moment)), sign.panels().get(0).middle(), sign.mass());
         FixingPulls pulls = by.rules().brackets().assess(fixings, sign.brackets(), load, sheet);
         return new Carried(List.of(part(pulls, fixings, pulls.assumptions())));
     }

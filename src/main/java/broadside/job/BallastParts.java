@@ -53,7 +53,7 @@ final class BallastParts {
         return trace;
     }
 
-    private static void boltGroup(JsonNode given, Trace trace) {
+    private void boltGroup(JsonNode given, Trace trace) {
         List<EccentricGroup.At> bolts = new ArrayList<>();
         for (JsonNode bolt : given.path("bolts")) {
             bolts.add(new EccentricGroup.At(si(bolt, "x", Dimension.LENGTH, "70 mm"), si(bolt, "y", Dimension.LENGTH, "150 mm")));
@@ -71,7 +71,7 @@ final class BallastParts {
         EccentricGroup.of(bolts, new EccentricGroup.Load(right, up, new Check.In("M_1", moment)), trace);
     }
 
-    private static void facadeFixings(JsonNode given, Trace trace) {
+    private void facadeFixings(JsonNode given, Trace trace) {
         String sharing = PublishedChecks.text(given, "sharing");
         if (!List.of("equal", "by area").contains(sharing)) {
             throw PublishedChecks.bad("sharing is \"equal\" or \"by area\"");
@@ -86,7 +86,7 @@ final class BallastParts {
             sharing.equals("equal") ? FixingGroup.Sharing.EQUAL : FixingGroup.Sharing.BY_AREA, trace);
     }
 
-    private static void frameBallast(JsonNode given, Trace trace) {
+    private void frameBallast(JsonNode given, Trace trace) {
         FrameBallast frame = new FrameBallast(stability);
         if (given.has("moment")) {
             frame.ballast(si(given, "moment", Dimension.MOMENT, "25 kN m"), si(given, "leg-spacing", Dimension.LENGTH, "2.5 m"),
@@ -98,7 +98,7 @@ final class BallastParts {
         }
     }
 
-    private static void edgePull(JsonNode given, Trace trace) {
+    private void edgePull(JsonNode given, Trace trace) {
         double q = trace.given("q_1", "wind pressure", si(given, "pressure", Dimension.PRESSURE, "0.7 kN/m2"), "Pa", PublishedChecks.text(given, "pressure"));
         double c = trace.given("c_1", "coefficient", given.has("coefficient") ? number(given, "coefficient") : 1, "1", "");
         double w = trace.line("pressure", "w_1", "net pressure").in("q_1", q, "Pa").in("c_1", c).from("statics", Status.DERIVED).gives("q_1 c_1", q * c, "Pa");
@@ -106,7 +106,7 @@ final class BallastParts {
             Dimension.LENGTH, "0.3 m"), trace);
     }
 
-    private static void blockFooting(JsonNode given, Trace trace) {
+    private void blockFooting(JsonNode given, Trace trace) {
         double q = trace.given("q_1", "wind pressure", si(given, "pressure", Dimension.PRESSURE, "0.5 kN/m2"), "Pa", PublishedChecks.text(given, "pressure"));
         double c = trace.given("c_1", "coefficient", number(given, "coefficient"), "1", "");
         double b = trace.given("b_1", "width of the panel", si(given, "panel-width", Dimension.LENGTH, "3 m"), "m", "");
@@ -162,6 +162,4 @@ final class BallastParts {
         }
         throw PublishedChecks.bad(name + ": a " + dimension.word() + " is typed with its unit, like \"" + example + "\"");
     }
-
-    private BallastParts() { }
 }

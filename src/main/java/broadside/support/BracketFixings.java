@@ -27,9 +27,16 @@ public final class BracketFixings {
      *
      * @param normal  wind square on the blade, from either side, recorded before, N
      * @param along   wind along the blade, recorded before, N
+     * @param turning moment of that wind about the upright axis at the wall, recorded before, N m; empty where the wind acts in the middle of the blade
      * @param arm     from the wall to the middle of the blade, m
      */
-    public record BladeLoad(Check.In normal, Check.In along, double arm, Optional<Mass> mass) { }
+    public record BladeLoad(Check.In normal, Check.In along, Optional<Check.In> turning, double arm, Optional<Mass> mass) {
+
+        /** Wind in the middle of the blade. */
+        public BladeLoad(Check.In normal, Check.In along, double arm, Optional<Mass> mass) {
+            this(normal, along, Optional.empty(), arm, mass);
+        }
+    }
 
     /** Reads the tables of stability. */
     public BracketFixings(Edition stability) {
@@ -82,8 +89,9 @@ public final class BracketFixings {
 
     private static Optional<Double> turned(Fixings fixings, BladeLoad load, double arm, double all, List<String> remarks, Trace trace) {
         String w = load.normal().symbol();
-        double moment = trace.line("bracket-moment/wind", "M_W", "moment of the wind square on, about an upright axis at the wall")
-            .in(w, load.normal().value(), "N").in("a_1", arm, "m").from(STATICS, Status.RECALLED).gives(w + " a_1", load.normal().value() * arm, "N m");
+        Trace.Line about = trace.line("bracket-moment/wind", "M_W", "moment of the wind square on, about an upright axis at the wall");
+        double moment = load.turning().map(m -> about.in(m.symbol(), m.value(), "N m").from(STATICS, Status.RECALLED).gives(m.symbol(), m.value(), "N m"))
+            .orElseGet(() -> about.in(w, load.normal().value(), "N").in("a_1", arm, "m").from(STATICS, Status.RECALLED).gives(w + " a_1", load.normal().value() * arm, "N m"));
         if (fixings.columns() == 1) {
             remarks.add("One column of fixings gives no couple against wind square on: a moment of " + shown(moment)
                 + " must be taken by the bracket plate leaning on the wall, which is not checked here. Two columns of fixings would take it.");
