@@ -38,10 +38,9 @@ public final class Catalogue {
     private final Map<String, Series> listed = new HashMap<>();
     private final Set<String> replaced = new HashSet<>();
     private final SectionShape shape;
-    private final Edition home;
-    private Map<String, String> byKey; // these three are made when first asked for
+    private final Grades grades;
+    private Map<String, String> byKey; // these two are made when first asked for
     private List<Section> all;
-    private Grades grades;
 
     /**
      * Opens the catalogue. Properties are worked out series by series, when a series is first asked for.
@@ -49,9 +48,10 @@ public final class Catalogue {
      * @throws TableFormat where a table is broken, or two series list different sections under one designation
      */
     public Catalogue(TableLibrary tables) {
-        this.home = materials(tables);
+        Edition home = materials(tables);
         Materials materials = new Materials(home);
         this.shape = new SectionShape(materials);
+        this.grades = new Grades(home);
         List<Edition> editions = of(SECTIONS, tables);
         for (Edition edition : editions) {
             Series each = Series.of(edition, materials);
@@ -168,13 +168,6 @@ public final class Catalogue {
         return Optional.ofNullable(byKey.get(key)).map(designation -> listed.get(designation).listed(designation, shape));
     }
 
-    private synchronized Grades grades() {
-        if (grades == null) {
-            grades = new Grades(home);
-        }
-        return grades;
-    }
-
     private Optional<Section> sized(Designation typed) {
         Series like = like(typed.prefix());
         boolean round = like.form() == Form.ROUND_TUBE;
@@ -231,7 +224,7 @@ public final class Catalogue {
      * @throws UnfitAnswer where no grade of the material has that name
      */
     public Grade grade(String name, Material material) {
-        return grades().find(name, material);
+        return grades.find(name, material);
     }
 
     /**
@@ -240,16 +233,16 @@ public final class Catalogue {
      * @throws UnfitAnswer where no grade of its material and form has that name, or its strength is not known for the wall
      */
     public Grade grade(String name, Section section) {
-        return grades().find(name, section);
+        return grades.find(name, section);
     }
 
     /** The weakest grade in common use for a section, for a job that names none. */
     public Grade defaultGrade(Section section) {
-        return grades().find(origin(section).grade(), section);
+        return grades.find(origin(section).grade(), section);
     }
 
     /** Names of the grades of a material in the practice of the United States (allowable stresses for timber), or of other countries. */
     public List<String> gradeNames(boolean us, Material material) {
-        return grades().names(us, material);
+        return grades.names(us, material);
     }
 }

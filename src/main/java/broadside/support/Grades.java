@@ -18,32 +18,49 @@ final class Grades {
 
     private static final String FIELD = "posts.grade";
 
-    private final Map<String, Entry> byName = new LinkedHashMap<>();
+    private final Rows steel;
+    private final Rows classes;
+    private final Rows timber;
+    private final Rows shear;
+    private final Rows alloys;
+    private Map<String, Entry> entries; // made when first asked for
 
     /** A grade, the practice it belongs to, and the largest wall for which it holds, m. */
     private record Entry(Grade grade, boolean us, double thickest) { }
 
     Grades(Edition edition) {
-        Rows steel = edition.rows("steel-grades");
+        this.steel = edition.rows("steel-grades");
+        this.classes = edition.rows("timber-classes");
+        this.timber = edition.rows("timber-us");
+        this.shear = edition.rows("timber-us-shear");
+        this.alloys = edition.rows("aluminium-alloys");
+    }
+
+    private synchronized Map<String, Entry> byName() {
+        if (entries == null) {
+            Map<String, Entry> made = new LinkedHashMap<>();
+            fill(made);
+            entries = made;
+        }
+        return entries;
+    }
+
+    private void fill(Map<String, Entry> made) {
         for (String name : steel.keys()) {
             boolean us = !steel.text(name, "unit").equals("N/mm2");
             double thickest = steel.isPrinted(name, "wall") ? Materials.metres(steel.number(name, "wall").value(), Materials.unit("mm")) : Double.MAX_VALUE;
-            add(name, Material.STEEL, pressure(steel, name, "strength"), Optional.empty(), pressure(steel, name, "modulus"), us, thickest);
+            add(made, name, Material.STEEL, pressure(steel, name, "strength"), Optional.empty(), pressure(steel, name, "modulus"), us, thickest);
         }
-        Rows classes = edition.rows("timber-classes");
         for (String name : classes.keys()) {
-            add(name, Material.TIMBER, pressure(classes, name, "bending"), Optional.of(pressure(classes, name, "shear")),
+            add(made, name, Material.TIMBER, pressure(classes, name, "bending"), Optional.of(pressure(classes, name, "shear")),
                 pressure(classes, name, "modulus"), false, Double.MAX_VALUE);
         }
-        Rows timber = edition.rows("timber-us");
-        Rows shear = edition.rows("timber-us-shear");
         for (String name : timber.keys()) {
-            add(name, Material.TIMBER, pressure(timber, name, "bending"), shear.has(name) ? Optional.of(pressure(shear, name, "shear")) : Optional.empty(),
+            add(made, name, Material.TIMBER, pressure(timber, name, "bending"), shear.has(name) ? Optional.of(pressure(shear, name, "shear")) : Optional.empty(),
                 pressure(timber, name, "modulus"), true, Double.MAX_VALUE);
         }
-        Rows alloys = edition.rows("aluminium-alloys");
         for (String name : alloys.keys()) {
-            add(name, Material.ALUMINIUM, pressure(alloys, name, "strength"), Optional.empty(), pressure(alloys, name, "modulus"), false, Double.MAX_VALUE);
+            add(made, name, Material.ALUMINIUM, pressure(alloys, name, "strength"), Optional.empty(), pressure(alloys, name, "modulus"), false, Double.MAX_VALUE);
         }
     }
 
@@ -51,8 +68,9 @@ final class Grades {
         return Materials.si(rows, name, column, Dimension.PRESSURE, "Pa");
     }
 
-    private void add(String name, Material material, Coefficient strength, Optional<Coefficient> shear, Coefficient modulus, boolean us, double thickest) {
-        byName.put(key(name), new Entry(new Grade(name, material, strength, shear, modulus), us, thickest));
+    private static void add(Map<String, Entry> made, String name, Material material, Coefficient strength, Optional<Coefficient> shear, Coefficient modulus,
+                            boolean us, double thickest) {
+        made.put(key(name), new Entry(new Grade(name, material, strength, shear, modulus), us, thickest));
     }
 
     /** A grade by its name, whatever its letter case, spaces and marks. */
@@ -78,7 +96,7 @@ final class Grades {
 
     private Entry entry(String name, String form, Material material) {
         String key = key(name);
-        Entry entry = byName.getOrDefault(key, byName.get(key + form));
+        Entry entry = byName().getOrDefault(key, byName().get(key + form));
         if (entry == null || entry.grade().material() != material) {
             throw new UnfitAnswer(FIELD, "the grade \"" + UnfitText.clean(name) + "\" is not known for "
                 + material.name().toLowerCase(Locale.ROOT) + "; " + fitting(material));
@@ -94,7 +112,7 @@ final class Grades {
 
     /** Names of the grades of a material in one practice, in the order of the tables. */
     List<String> names(boolean us, Material material) {
-        return byName.values().stream().filter(e -> e.us() == us && e.grade().material() == material).map(e -> e.grade().name()).toList();
+        return byName().values().stream().filter(e -> e.us() == us && e.grade().material() == material).map(e -> e.grade().name()).toList();
     }
 
     /** Letters and digits of a name in capitals, without what people write around it; a quality behind an EN steel grade is cut. */

@@ -3,9 +3,9 @@ package broadside.support;
 import broadside.quantity.Dimension;
 import broadside.quantity.Unit;
 import broadside.table.Coefficient;
+import broadside.table.Curve;
 import broadside.table.Edition;
 import broadside.table.Rows;
-import broadside.table.Source;
 import broadside.table.TableFormat;
 import broadside.trace.Status;
 import java.util.ArrayList;
@@ -25,7 +25,7 @@ final class Materials {
     private final Map<String, Coefficient> densities = new HashMap<>();
     private final Map<String, Unit> lengths = new ConcurrentHashMap<>();
     private final Rows walls;
-    private final Rectangle rectangle;
+    private final Curve rectangle;
 
     /**
      * Corners of a product, as multiples of the wall.
@@ -44,10 +44,6 @@ final class Materials {
         }
     }
 
-    /** Figures of the torsion of a solid rectangle and the formulas made of them, h_1 the larger side and b_1 the smaller. */
-    record Rectangle(double modulusBase, double modulusSlope, double inertiaSlope, double inertiaDivisor, String modulusFormula, String inertiaFormula,
-                     Source source) { }
-
     Materials(Edition edition) {
         this.name = edition.key();
         this.walls = edition.rows("design-walls");
@@ -59,7 +55,7 @@ final class Materials {
         for (String material : density.keys()) {
             densities.put(material, si(density, material, "density", Dimension.DENSITY, "kg/m³"));
         }
-        this.rectangle = rectangle(edition.rows("rectangle-torsion"));
+        this.rectangle = edition.curve("rectangle-torsion");
     }
 
     private static Corner corner(Rows rows, String row) {
@@ -73,16 +69,6 @@ final class Materials {
 
     private static double limit(Rows rows, String row, String column, double none) {
         return rows.isPrinted(row, column) ? metres(rows.number(row, column).value(), unit(rows.text(row, "unit"))) : none;
-    }
-
-    private static Rectangle rectangle(Rows rows) {
-        String base = rows.text("modulus-base", "value");
-        String slope = rows.text("modulus-slope", "value");
-        String divisor = rows.text("inertia-divisor", "value");
-        Coefficient inertia = rows.number("inertia-slope", "value");
-        return new Rectangle(rows.number("modulus-base", "value").value(), rows.number("modulus-slope", "value").value(), inertia.value(),
-            rows.number("inertia-divisor", "value").value(), "h_1 b_1² / (" + base + " + " + slope + " b_1 / h_1)",
-            "h_1 b_1^3 (1 / 3 - " + rows.text("inertia-slope", "value") + " b_1 / h_1 (1 - b_1^4 / (" + divisor + " h_1^4)))", inertia.source());
     }
 
     /** The corners of a family, such as "hot", for a wall as sold, m. */
@@ -112,7 +98,8 @@ final class Materials {
         return walls.number(standard, "factor");
     }
 
-    Rectangle rectangle() {
+    /** Torsion of a solid rectangle: modulus and inertia against h/b. */
+    Curve rectangle() {
         return rectangle;
     }
 

@@ -77,8 +77,8 @@ final class RectangularTube {
             .in("t_n", sizes.nominal(), "m").from(SectionShape.GEOMETRY, Status.DERIVED).gives(corner.nominalArea(), nominalArea(sizes, corner), "m²");
         double[] torsion = torsion(h, b, t, outerRadius, innerRadius, trace);
         double mass = SectionShape.mass(density, sizes.nominal() == t ? "A_s" : "A_n", sold, trace);
-        return new Properties(area, strong.inertia(), weak.inertia(), strong.elastic(), weak.elastic(), strong.plastic(), weak.plastic(), torsion[0], torsion[1],
-            mass);
+        return new Properties(area, strong.inertia(), weak.inertia(), strong.elastic(), weak.elastic(), strong.plastic(), weak.plastic(),
+            torsion[0], torsion[1], mass);
     }
 
     private static Rounded turned(Rounded r) {
@@ -134,9 +134,11 @@ final class RectangularTube {
         double r = trace.line("section-corner-radius/middle", "r_m", "radius of the middle line of the wall").in("r_o", outerRadius, "m")
             .in("r_i", innerRadius, "m").from(TORSION, Status.RECALLED).gives("(r_o + r_i) / 2", (outerRadius + innerRadius) / 2, "m");
         double round = trace.line("section-middle-line", "h_m", "length of the middle line of the wall").in("H_s", h, "m").in("B_s", b, "m")
-            .in("t_s", t, "m").in("r_m", r, "m").from(TORSION, Status.RECALLED).gives("2 (B_s - t_s) + 2 (H_s - t_s) - 2 r_m (4 - π)", 2 * (b - t) + 2 * (h - t) - 2 * r * (4 - Math.PI), "m");
+            .in("t_s", t, "m").in("r_m", r, "m").from(TORSION, Status.RECALLED)
+            .gives("2 (B_s - t_s) + 2 (H_s - t_s) - 2 r_m (4 - π)", 2 * (b - t) + 2 * (h - t) - 2 * r * (4 - Math.PI), "m");
         double inside = trace.line("section-middle-area", "A_m", "area inside the middle line").in("H_s", h, "m").in("B_s", b, "m")
-            .in("t_s", t, "m").in("r_m", r, "m").from(TORSION, Status.RECALLED).gives("(B_s - t_s) (H_s - t_s) - r_m² (4 - π)", (b - t) * (h - t) - r * r * (4 - Math.PI), "m²");
+            .in("t_s", t, "m").in("r_m", r, "m").from(TORSION, Status.RECALLED)
+            .gives("(B_s - t_s) (H_s - t_s) - r_m² (4 - π)", (b - t) * (h - t) - r * r * (4 - Math.PI), "m²");
         double k = trace.line("section-torsion-factor", "K_m", "factor of torsion").in("A_m", inside, "m²").in("t_s", t, "m").in("h_m", round, "m")
             .from(TORSION, Status.RECALLED).gives("2 A_m t_s / h_m", 2 * inside * t / round, "m²");
         double inertia = trace.line("section-torsion-inertia", "I_t", "torsion constant").in("t_s", t, "m").in("h_m", round, "m").in("K_m", k, "m²")

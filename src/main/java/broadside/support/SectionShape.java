@@ -2,6 +2,7 @@ package broadside.support;
 
 import broadside.support.Section.Properties;
 import broadside.table.Coefficient;
+import broadside.table.Curve;
 import broadside.trace.Status;
 import broadside.trace.Trace;
 
@@ -15,7 +16,7 @@ final class SectionShape {
 
     private static final Trace NOWHERE = new Trace().quiet();
 
-    private final Materials.Rectangle rectangle;
+    private final Curve rectangle;
 
     SectionShape(Materials materials) {
         this.rectangle = materials.rectangle();
@@ -82,15 +83,18 @@ final class SectionShape {
             .gives("H_s B_s² / 4", depth * width * width / 4, "m³");
         double larger = sides(trace.line("section-side/larger", "h_1", "larger side"), sizes).gives("max(H_s; B_s)", Math.max(depth, width), "m");
         double smaller = sides(trace.line("section-side/smaller", "b_1", "smaller side"), sizes).gives("min(H_s; B_s)", Math.min(depth, width), "m");
-        double ratio = smaller / larger;
-        double torsionInertia = trace.line("section-torsion-inertia", "I_t", "torsion constant").in("h_1", larger, "m").in("b_1", smaller, "m")
-            .from(rectangle.source().citation(), rectangle.source().status()).gives(rectangle.inertiaFormula(), larger * Math.pow(smaller, 3)
-                * (1.0 / 3 - rectangle.inertiaSlope() * ratio * (1 - Math.pow(ratio, 4) / rectangle.inertiaDivisor())), "m⁴");
-        double torsionModulus = trace.line("section-torsion-modulus", "W_t", "torsion modulus").in("h_1", larger, "m").in("b_1", smaller, "m")
-            .from(rectangle.source().citation(), rectangle.source().status())
-            .gives(rectangle.modulusFormula(), larger * smaller * smaller / (rectangle.modulusBase() + rectangle.modulusSlope() * ratio), "m³");
+        double k = rectangle.at("inertia", larger / smaller).into(trace.line("section-torsion-share/inertia", "k_I", "share of h b³, by larger over smaller side"));
+        double torsionInertia = torsion(trace.line("section-torsion-inertia", "I_t", "torsion constant").in("k_I", k), larger, smaller)
+            .gives("k_I h_1 b_1^3", k * larger * Math.pow(smaller, 3), "m⁴");
+        double w = rectangle.at("modulus", larger / smaller).into(trace.line("section-torsion-share/modulus", "k_W", "share of h b², by larger over smaller side"));
+        double torsionModulus = torsion(trace.line("section-torsion-modulus", "W_t", "torsion modulus").in("k_W", w), larger, smaller)
+            .gives("k_W h_1 b_1²", w * larger * smaller * smaller, "m³");
         double mass = mass(density, "A_s", area, trace);
         return new Properties(area, inertia, weakInertia, elastic, weakElastic, plastic, weakPlastic, torsionInertia, torsionModulus, mass);
+    }
+
+    private static Trace.Line torsion(Trace.Line line, double larger, double smaller) {
+        return line.in("h_1", larger, "m").in("b_1", smaller, "m").from("Saint-Venant's torsion of a rectangle", Status.DERIVED);
     }
 
     private static Trace.Line sides(Trace.Line line, Sizes sizes) {

@@ -23,7 +23,7 @@ final class SectionSheet {
             : size("section-depth", "H_s", "depth of the section", section.depth(), section, source, trace);
         double width = round ? depth : size("section-width", "B_s", "width of the section", section.width(), section, source, trace);
         if (section.form() == Form.SOLID_RECTANGLE) {
-            return shape.of(new Sizes(section.form(), depth, width, 0, 0, Optional.empty()), like.density(), trace);
+            return properties(section, new Sizes(section.form(), depth, width, 0, 0, Optional.empty()), like, shape, trace);
         }
         double wall;
         double nominal;
@@ -37,6 +37,10 @@ final class SectionSheet {
         }
         String finish = section.designation().endsWith(" cold") ? "cold" : section.designation().endsWith(" hot") ? "hot" : like.corners();
         Sizes sizes = new Sizes(section.form(), depth, width, wall, nominal, like.corner(printed ? like.corners() : finish, nominal));
+        return properties(section, sizes, like, shape, trace);
+    }
+
+    private static Properties properties(Section section, Sizes sizes, Series like, SectionShape shape, Trace trace) {
         sizes.problem().ifPresent(p -> {
             throw new UnfitAnswer("posts.section", section.designation() + " with the values set by the user can be no section: " + p);
         });
