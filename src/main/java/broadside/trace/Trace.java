@@ -87,7 +87,7 @@ public final class Trace {
 
     /** Begins a step; {@code name} is the fixed name of the quantity. */
     public Line line(String name, String symbol, String meaning) {
-        return new Line(name + suffix, symbol, meaning);
+        return new Line(suffix.isEmpty() ? name : name + suffix, symbol, meaning);
     }
 
     public List<Given> givens() {
