@@ -85,7 +85,9 @@ final class AluminiumPosts implements PostRule {
         double f = trace.line("post-resistance/stress", "f_m", "design strength").in("f_o", fo, "Pa").in(way.symbol, s).from(place, Status.RECALLED)
             .gives(way.formula, way == Way.FACTORED ? s * fo : fo / s, "Pa");
         double fv = shearStrength(f, trace);
-        return elastic.check(new PostValues(section), load, new ElasticPosts.Strengths(f, fv, fv, way == Way.EN ? EN + "6.2.5, elastic" : US, way == Way.EN ? EN + "6.2.6" : US,
+        double ft = load.twisted() ? trace.line("post-resistance/torsion-stress", "f_t", "design strength in torsion").in("f_v", fv, "Pa").from(place, Status.RECALLED)
+            .gives("f_v", fv, "Pa") : fv;
+        return elastic.check(new PostValues(section), load, new ElasticPosts.Strengths(f, fv, ft, way == Way.EN ? EN + "6.2.5, elastic" : US, way == Way.EN ? EN + "6.2.6" : US,
             way == Way.EN ? EN + "6.2.7" : US, way == Way.EN ? EN + "6.2.1, (6.15): elastic stresses" : US + ": elastic stresses", status, true), trace);
     }
 

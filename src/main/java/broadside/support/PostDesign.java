@@ -6,6 +6,7 @@ import broadside.table.Edition;
 import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.DoubleStream;
@@ -15,6 +16,7 @@ public final class PostDesign {
 
     private static final int LIGHTER = 3;
     private static final int HEAVIER = 4;
+    private static final int LOOK_BACK = 12;
 
     private final PostRules rules;
     private final PostDeflection deflection;
@@ -66,7 +68,7 @@ public final class PostDesign {
      * The lightest section that passes.
      *
      * @param chosen      as {@link #check} gives it; empty where none passes
-     * @param candidates  some lighter ones that fail, the chosen one and the next heavier ones, in order of mass
+     * @param candidates  three lighter ones that fail by least, the chosen one and the next heavier ones that pass, in order of mass
      */
     public record Sized(Optional<Result> chosen, List<Candidate> candidates) { }
 
@@ -100,11 +102,24 @@ public final class PostDesign {
         while (found < sections.size() && !work.passes(sections.get(found), quiet)) {
             found++;
         }
-        List<Candidate> candidates = new ArrayList<>();
-        for (int i = Math.max(0, found - LIGHTER); i < Math.min(sections.size(), found + 1 + HEAVIER); i++) {
-            candidates.add(candidate(work.result(sections.get(i), quiet)));
+        List<Candidate> candidates = new ArrayList<>(lighter(sections, found, work, quiet));
+        int kept = candidates.size();
+        for (int i = found; i < sections.size() && candidates.size() < kept + 1 + HEAVIER; i++) {
+            if (i == found || work.passes(sections.get(i), quiet)) {
+                candidates.add(candidate(work.result(sections.get(i), quiet)));
+            }
         }
         return new Sized(found < sections.size() ? Optional.of(work.result(sections.get(found), trace)) : Optional.empty(), candidates);
+    }
+
+    /** Of the last lighter sections those that failed by least, in order of mass. */
+    private static List<Candidate> lighter(List<Section> sections, int found, Work work, Trace quiet) {
+        List<Candidate> last = new ArrayList<>();
+        for (int i = Math.max(0, found - LOOK_BACK); i < found; i++) {
+            last.add(candidate(work.result(sections.get(i), quiet)));
+        }
+        List<Candidate> near = last.stream().sorted(Comparator.comparingDouble(Candidate::utilisation)).limit(LIGHTER).toList();
+        return last.stream().filter(near::contains).toList();
     }
 
     private static Candidate candidate(Result result) {

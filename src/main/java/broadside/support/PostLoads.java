@@ -33,10 +33,8 @@ final class PostLoads {
         double t = load.torsion() > 0 ? wind("post-design-torsion", s.torsion(), "torsion of the post", "T_p", load.torsion(), "", 0, "N m", k, load, trace) : 0;
         double weakV = 0;
         double weakM = 0;
-        if (load.weakShear() > 0 || along) {
+        if (load.weakShear() > 0 || load.weakMoment() > 0 || load.weightMoment() > 0 || along) {
             weakV = wind("post-design-shear/along", s.weakShear(), "shear along the face", "V_{pz}", load.weakShear(), "F_d", along ? force : 0, "N", k, load, trace);
-        }
-        if (load.weakMoment() > 0 || load.weightMoment() > 0 || along) {
             weakM = weak(load, s, along ? turning : 0, k, g, trace);
         }
         return new DesignLoad(load.named(), v, m, t, weakV, weakM, axial(load, section, g, trace), task.height());
@@ -54,12 +52,24 @@ final class PostLoads {
     private double wind(String step, String symbol, String meaning, String from, double value, String own, double ownValue, String unit, double k, PostLoad load, Trace trace) {
         double wind = found(name(from), from, meaning, value, unit, load, trace);
         Trace.Line line = trace.line(step, symbol, meaning).in("k_w", k).in(from, wind, unit).from(STATICS, Status.DERIVED);
-        return ownValue > 0 ? line.in(own, ownValue, unit).gives(from.equals("M_p") ? "k_w (M_p + M_d)" : from.equals("V_p") ? "k_w (V_p + F_d)" : "k_w (V_{pz} + F_d)", k * (wind + ownValue), unit) : line.gives(switch (from) {
+        return ownValue > 0 ? line.in(own, ownValue, unit).gives(both(from), k * (wind + ownValue), unit) : line.gives(alone(from), k * wind, unit);
+    }
+
+    private static String both(String symbol) {
+        return switch (symbol) {
+            case "V_p" -> "k_w (V_p + F_d)";
+            case "M_p" -> "k_w (M_p + M_d)";
+            default -> "k_w (V_{pz} + F_d)";
+        };
+    }
+
+    private static String alone(String symbol) {
+        return switch (symbol) {
             case "V_p" -> "k_w V_p";
             case "M_p" -> "k_w M_p";
             case "T_p" -> "k_w T_p";
             default -> "k_w V_{pz}";
-        }, k * wind, unit);
+        };
     }
 
     private static String name(String symbol) {
