@@ -24,8 +24,8 @@ public record Known(double value, String unit, String how, String place, Status 
     /** A number of a table with columns "value" and "unit". */
     static Known of(Rows rows, String key) {
         Known found = of(rows, key, "value", rows.text(key, "unit"));
-        return new Known(found.value(), found.unit(), "as printed: " + rows.text(key, "value") + (rows.text(key, "unit").equals("-") ? "" : " " + rows.text(key, "unit")),
-            found.place(), found.status());
+        String unit = rows.text(key, "unit").equals("-") ? "" : " " + rows.text(key, "unit");
+        return new Known(found.value(), found.unit(), "as printed: " + rows.text(key, "value") + unit, found.place(), found.status());
     }
 
     /** A number of a column printed in {@code printed} units; "-" for a plain number. */
