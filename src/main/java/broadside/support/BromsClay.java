@@ -107,7 +107,8 @@ public final class BromsClay implements DepthRule {
             .gives("4 k (h + " + dead.text() + " b + 0.5 L_0)", 4 * k * (height + zone + 0.5 * reach), "N");
         double p = trace.line("ultimate-lateral-load", "P_u", "ultimate load of the pile, without a factor").in("β", beta, "N").in("k", k, "N/m")
             .in("L_0", reach, "m").from("root of the quadratic above", Status.DERIVED)
-            .gives("(k L_0)² / (0.5 β + (0.25 β² + (k L_0)²)^0.5)", k * reach * k * reach / (0.5 * beta + Math.sqrt(beta * beta / 4 + k * reach * k * reach)), "N");
+            .gives("(k L_0)² / (0.5 β + (0.25 β² + (k L_0)²)^0.5)",
+                k * reach * k * reach / (0.5 * beta + Math.sqrt(beta * beta / 4 + k * reach * k * reach)), "N");
         double f = zeroShear(p, "P_u", width, trace);
         trace.line("pier-lower-part", "g", "length below that turns the moment").in("L_0", reach, "m").in("f", f, "m").from(dead.place(), dead.status())
             .gives("L_0 - f", reach - f, "m");

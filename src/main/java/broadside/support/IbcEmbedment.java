@@ -117,10 +117,12 @@ public final class IbcEmbedment implements DepthRule {
 
     private double pressure(String meaning, String name, double depth, String symbol, Trace trace) {
         String shared = share > 1 ? " / " + (int) share : "";
+        double grown = factor * lateral * Math.min(depth, most.value()) / share;
+        boolean limited = grown > limit.value() * lateral;
         return trace.line("lateral-pressure", name, meaning).in("k_S", factor).in("S", lateral, "Pa/m").in(symbol, depth, "m")
-            .from(pressurePlace, limit.status().weaker(soil.lateral().status()))
+            .from(pressurePlace, (limited ? limit : most).status().weaker(soil.lateral().status()))
             .gives("min(k_S S min(" + symbol + "; " + most.text() + ")" + shared + "; " + limit.text() + " S)",
-                Math.min(factor * lateral * Math.min(depth, most.value()) / share, limit.value() * lateral), "Pa");
+                limited ? limit.value() * lateral : grown, "Pa");
     }
 
     private double unconstrained(Column c, double depth, String symbol, Trace trace) {

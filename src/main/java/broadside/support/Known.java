@@ -12,7 +12,7 @@ import java.util.stream.Stream;
 /**
  * A figure in SI with how it was found and where it stands.
  *
- * @param how   such as "150 psf/ft at class 4" or "as typed: 100 psf/ft"
+ * @param how   such as "150 psf/ft, read at 4" or "as typed: 100 psf/ft"
  * @param text  the number as it stands in a formula text
  */
 public record Known(double value, String unit, String how, String place, Status status, String text) {
@@ -23,7 +23,9 @@ public record Known(double value, String unit, String how, String place, Status 
 
     /** A number of a table with columns "value" and "unit". */
     static Known of(Rows rows, String key) {
-        return of(rows, key, "value", rows.text(key, "unit"));
+        Known found = of(rows, key, "value", rows.text(key, "unit"));
+        String unit = rows.text(key, "unit").equals("-") ? "" : " " + rows.text(key, "unit");
+        return new Known(found.value(), found.unit(), "as printed: " + rows.text(key, "value") + unit, found.place(), found.status());
     }
 
     /** A number of a column printed in {@code printed} units; "-" for a plain number. */
@@ -35,13 +37,18 @@ public record Known(double value, String unit, String how, String place, Status 
         }
         Unit unit = Stream.of(Dimension.LENGTH, Dimension.PRESSURE, Dimension.PRESSURE_PER_DEPTH, Dimension.DENSITY, Dimension.ANGLE)
             .flatMap(d -> Unit.of(d, printed).stream()).findFirst().orElseThrow(() -> new IllegalArgumentException(key + ": " + printed + " is no unit"));
-        return new Known(found.value() * unit.toSi(), trace(unit.dimension()), rows.text(key, column) + " " + printed + ", " + found.how(), place,
+        return new Known(exact(found.value(), unit), trace(unit.dimension()), rows.text(key, column) + " " + printed + ", " + found.how(), place,
             found.source().status());
     }
 
     /** A value that the user gave, in SI. */
     public static Known typed(double value, String unit, String text) {
         return new Known(value, unit, "as typed: " + text, "given", Status.GIVEN);
+    }
+
+    /** 12 ft is 3.6576 m and not the next number beside it. */
+    private static double exact(double value, Unit unit) {
+        return BigDecimal.valueOf(value).multiply(BigDecimal.valueOf(unit.toSi())).doubleValue();
     }
 
     private static String trace(Dimension dimension) {
