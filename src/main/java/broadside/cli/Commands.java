@@ -48,6 +48,7 @@ public final class Commands implements Runnable {
             errors.println(Terminal.plain(e.getMessage()));
         } else {
             errors.println("the tool failed: " + e.getClass().getSimpleName() + (e.getMessage() == null ? "" : ", " + e.getMessage().lines().findFirst().orElse("")));
+if (System.getProperty("dbg") != null) e.printStackTrace();
         }
         return 2;
     }

@@ -49,7 +49,7 @@ public final class Trace {
      * out what is then recorded once it is chosen.
      */
     public Trace quiet() {
-        return new Trace(givens, null, overrides, used, new HashMap<>(found), suffix);
+        return new Trace(givens, null, overrides, new HashSet<>(), new HashMap<>(found), suffix);
     }
 
     /** The same sheet, with {@code part} behind a slash in the name of each step that is recorded through it. */
@@ -95,14 +95,15 @@ public final class Trace {
     }
 
     public List<Step> steps() {
-        return Collections.unmodifiableList(steps);
+        return steps == null ? List.of() : Collections.unmodifiableList(steps);
     }
 
     /** The value of a step that was recorded, by its whole name; the last one when it was recorded more than once. */
     public Optional<Step> find(String name) {
-        for (int i = steps.size() - 1; i >= 0; i--) {
-            if (steps.get(i).name().equals(name)) {
-                return Optional.of(steps.get(i));
+        List<Step> kept = steps();
+        for (int i = kept.size() - 1; i >= 0; i--) {
+            if (kept.get(i).name().equals(name)) {
+                return Optional.of(kept.get(i));
             }
         }
         return Optional.empty();

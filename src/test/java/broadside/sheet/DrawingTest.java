@@ -87,7 +87,7 @@ class DrawingTest {
         CaseAction pulled = onWall(facade, "pulled", "outward", 1400 * area, List.of(new ZonePressure("A", "p_A", 0, 0.3 * width, 0.3 * width, -1.4, -1400),
             new ZonePressure("B", "p_B", 0.3 * width, width, 0.7 * width, -0.8, -700)));
         return new Loads(new Loads.Velocity(8, 1000), List.of(pushed, pulled), Map.of("base-shear", pulled),
-            new Loads.Supports(List.of(), Optional.empty(), List.of(), List.of()), Optional.empty(),
+            new Loads.Supports(List.of(), Optional.empty(), List.of(), List.of(), Optional.empty()), Optional.empty(),
             new Level("characteristic", "factored", "factored", 1.5, "1.5", "clause", Status.DERIVED), 0, Foot.NONE);
     }
 
