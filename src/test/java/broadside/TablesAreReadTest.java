@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import broadside.assess.Assessor;
 import broadside.job.JobReader;
 import broadside.job.JobText;
+import broadside.job.PublishedChecks;
 import broadside.site.SpeedConversion;
 import broadside.table.TableFiles;
 import broadside.table.TableFormat;
@@ -66,7 +67,9 @@ class TablesAreReadTest {
             TableLibrary tables = TableLibrary.of(fewer, Map.of());
             Assessor assessor = new Assessor(tables);
             assessor.catalogue();
-            JobReader reader = new JobReader(assessor.codes(), new SpeedConversion(tables.edition("gust-factors/1").orElseThrow().curve("durst")));
+            SpeedConversion conversion = new SpeedConversion(tables.edition("gust-factors/1").orElseThrow().curve("durst"));
+            JobReader reader = new JobReader(assessor.codes(), conversion);
+            new PublishedChecks(assessor, reader, conversion);
             for (Map.Entry<String, byte[]> file : AllJobs.files().entrySet()) {
                 if (file.getKey().endsWith(".json") && !file.getKey().contains("/")) {
                     reader.read(JobText.read(file.getValue())).job().ifPresent(assessor::assess);

@@ -29,6 +29,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
+import java.util.stream.Stream;
 
 /** Posts and their footing: a typed section is checked, an empty one is chosen; the same for the footing. */
 final class PostCarrier {
@@ -56,14 +57,15 @@ final class PostCarrier {
         this.drag = drag;
     }
 
-    /** The section typed, or the lightest that passes; nothing where the text names no section, or none passes. */
+    /** The section typed, or the lightest that passes; nothing where the text names no section, its strength is not known, or none passes. */
     Optional<Chosen> choose(WindLevels levels, Trace quiet) {
         Catalogue catalogue = by.rules().catalogue();
         if (type.typed()) {
-            return catalogue.find(type.section().get()).map(s -> new Chosen(s, grade(s), true, List.of()));
+            return catalogue.find(type.section().get()).map(s -> new Chosen(s, grade(s), true, List.of())).filter(c -> catalogue.beyond(c.grade(), c.section()).isEmpty());
         }
         List<Section> sections = sections(catalogue);
         Grade grade = grade(sections.get(0));
+        sections.removeIf(s -> catalogue.beyond(grade, s).isPresent());
         PostDesign.Sized sized = by.rules().posts().size(sections, grade, task(levels), quiet);
         return sized.chosen().map(r -> new Chosen(r.section(), grade, false, sized.candidates()));
     }
@@ -71,8 +73,8 @@ final class PostCarrier {
     /** The sections to choose from: those of the series typed, or the usual ones of the rules in use. */
     private List<Section> sections(Catalogue catalogue) {
         List<String> keys = type.series().map(List::of).orElseGet(() -> catalogue.defaults(by.us(), Material.STEEL));
-        return keys.size() == 1 ? catalogue.series(keys.get(0)) : keys.stream().flatMap(k -> catalogue.series(k).stream()).sorted(Comparator.comparingDouble(Section::mass)
-            .thenComparing(Section::designation)).toList();
+        Stream<Section> sections = keys.stream().flatMap(k -> catalogue.series(k).stream());
+        return new ArrayList<>(keys.size() == 1 ? catalogue.series(keys.get(0)) : sections.sorted(Comparator.comparingDouble(Section::mass).thenComparing(Section::designation)).toList());
     }
 
     private Grade grade(Section section) {
@@ -107,9 +109,11 @@ final class PostCarrier {
     }
 
     private Part none() {
-        String why = type.typed() ? "\"" + type.section().get() + "\" names no section that is known here; known are designations such as CHS 114.3x5, SHS 100x5 hot, "
-            + "RHS 120x80x5 cold, PIPE 4 STD, HSS 4x4x1/4, TIMBER 100x100, TUBE 89x3. Loads only."
-            : "no section of the series " + type.series().orElse("in use") + " passes every check: other posts, more posts or a smaller board are needed. An engineer is needed.";
+        Catalogue catalogue = by.rules().catalogue();
+        String why = type.section().filter(t -> type.typed()).map(text -> catalogue.find(text).flatMap(s -> catalogue.beyond(grade(s), s)).map(w -> w + ". Loads only.")
+            .orElse("\"" + text + "\" names no section that is known here; known are designations such as CHS 114.3x5, SHS 100x5 hot, "
+                + "RHS 120x80x5 cold, PIPE 4 STD, HSS 4x4x1/4, TIMBER 100x100, TUBE 89x3. Loads only."))
+            .orElse("no section of the series " + type.series().orElse("in use") + " passes every check: other posts, more posts or a smaller board are needed. An engineer is needed.");
         return new Part("posts", "Posts", List.of(), List.of(), List.of(), List.of(), List.of(), Optional.of(why));
     }
 

@@ -20,9 +20,11 @@ final class PostParts {
     private static final String BEAM = "beam theory: cantilever fixed at the ground";
 
     private final Edition edition;
+    private final TubeTorsion torsion;
 
     PostParts(Edition edition) {
         this.edition = edition;
+        this.torsion = new TubeTorsion(edition);
     }
 
     Trace run(String part, JsonNode given) {
@@ -31,7 +33,7 @@ final class PostParts {
             case "tip-mass-frequency" -> frequency(given, trace);
             case "post-bending-asd" -> bending(given, trace);
             case "post-modulus-needed" -> modulus(given, trace);
-            case "post-torsion" -> new TubeTorsion(edition).capacity(put(given, "diameter", Dimension.LENGTH, "168.3 mm", "D", "m", trace),
+            case "post-torsion" -> torsion.capacity(put(given, "diameter", Dimension.LENGTH, "168.3 mm", "D", "m", trace),
                 put(given, "wall", Dimension.LENGTH, "6.4 mm", "t", "m", trace), put(given, "strength", Dimension.PRESSURE, "350 MPa", "f_y", "Pa", trace), trace);
             default -> throw new IllegalArgumentException(part);
         }

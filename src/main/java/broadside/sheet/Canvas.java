@@ -162,10 +162,20 @@ final class Canvas {
         text(atX - 4, (y(from) + y(to)) / 2 + 3, text, Anchor.END, Ink.BLACK);
     }
 
-    /** The same with its text to the right. */
+    /** The same down from {@code to}, with its text to the right. */
     void upwardRight(double from, double to, double atX, String text) {
         upwardPaper(y(from), y(to), atX);
-        text(atX + 4, (y(from) + y(to)) / 2 + 3, text, Anchor.START, Ink.BLACK);
+        beside(atX, y(to), y(from), text);
+    }
+
+    /** The text of a line upward, to its right; turned along it, from the ground on, where the paper ends. */
+    void beside(double atX, double ground, double end, String text) {
+        if (atX + 4 + width(text) > ItemDrawing.WIDTH) {
+            double away = Math.max(Math.abs(end - ground), width(text)) / 2;
+            turnedText(atX + 11, end < ground ? ground - away : ground + away, text);
+        } else {
+            text(atX + 4, (ground + end) / 2 + 3, text, Anchor.START, Ink.BLACK);
+        }
     }
 
     /** A line upward with end ticks between two heights on paper. */

@@ -31,7 +31,7 @@ record FootingDrawing(double width, double depth) {
     }
 
     /** Room that it needs below the ground line, points. */
-    double room(double scale) {
-        return depth * scale + 10;
+    double room(double scale, Format format) {
+        return Math.max(depth * scale, Canvas.width(format.length(depth))) + 10;
     }
 }

@@ -16,6 +16,8 @@ final class HoardingDrawing {
 
     private static final double MARGIN = 40;
     private static final double SIDE = 84;
+    /** Points from the lowest of the footing to the top. */
+    private static final double DEEPEST = 150;
 
     private final Hoarding hoarding;
     private final Optional<Loads> loads;
@@ -101,8 +103,8 @@ final class HoardingDrawing {
     }
 
     private Drawing side(Canvas front, double startY) {
-        double scale = SIDE / top;
-        double ground = startY + 26 + SIDE;
+        double scale = Math.min(SIDE / top, DEEPEST / (top + FootingDrawing.of(loads).map(FootingDrawing::depth).orElse(0.0)));
+        double ground = startY + 26 + top * scale;
         Canvas side = front.view(ItemDrawing.WIDTH / 2, ground, scale);
         double[][] panels = {{hoarding.clearance().metres(), hoarding.height().metres(), 0}};
         SideView view = new SideView(side, ItemDrawing.WIDTH / 2 - 110, ItemDrawing.WIDTH / 2 + 110, top, 0);
@@ -121,7 +123,7 @@ final class HoardingDrawing {
         side.text(ItemDrawing.WIDTH / 2, startY + 6, "side view, larger scale", Anchor.MIDDLE, Ink.BLACK);
         double bar = ItemDrawing.barLength(4 * top, format.units());
         side.scaleBar(ItemDrawing.WIDTH / 2 - 200, ground, bar / 2, ItemDrawing.barText(bar / 2, format));
-        return new Drawing(ItemDrawing.WIDTH, ground + Math.max(14, FootingDrawing.of(loads).map(f -> f.room(scale)).orElse(0.0)), front.shapes());
+        return new Drawing(ItemDrawing.WIDTH, ground + Math.max(14, FootingDrawing.of(loads).map(f -> f.room(scale, format)).orElse(0.0)), front.shapes());
     }
 
     /** The raking brace, the ballast on its foot, and the two tipping edges. */

@@ -41,11 +41,6 @@ record SideView(Canvas view, double left, double right, double top, double behin
         double dim = Math.max(view.x(POST), view.x(behind)) + 26;
         view.help(view.x(POST), y, dim + 4, y);
         view.line(dim, y, dim, view.y(0), Canvas.THIN, Ink.BLACK, false);
-        double middle = (y + view.y(0)) / 2;
-        if (dim + 4 + Canvas.width(text) > ItemDrawing.WIDTH) {
-            view.turnedText(dim + 11, Math.min(middle, view.y(0) - Canvas.width(text) / 2), text);
-        } else {
-            view.text(dim + 4, middle + 3, text, Anchor.START, Ink.BLACK);
-        }
+        view.beside(dim, view.y(0), y, text);
     }
 }

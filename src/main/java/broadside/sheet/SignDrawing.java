@@ -19,6 +19,8 @@ import java.util.stream.Stream;
 final class SignDrawing {
 
     private static final double TALLEST = 122;
+    /** Points from the lowest of the footing to the top. */
+    private static final double DEEPEST = 250;
     private static final double ROOM = 220;
     /** Where the words of the side view begin. */
     private static final double BESIDE = 323;
@@ -59,7 +61,7 @@ final class SignDrawing {
         front.scaleBar(margin, ground + 34, bar, ItemDrawing.barText(bar, format));
         front.text(front.x((left + right) / 2), 12, ItemDrawing.elevation(loads), Anchor.MIDDLE, Ink.BLACK);
         front.text(ItemDrawing.WIDTH - 78, 12, "side view", Anchor.MIDDLE, Ink.BLACK);
-        double below = FootingDrawing.of(loads).map(f -> f.room(scale)).orElse(0.0);
+        double below = FootingDrawing.of(loads).map(f -> f.room(scale, format)).orElse(0.0);
         return new Drawing(ItemDrawing.WIDTH, ground + Math.max(44, below), front.shapes());
     }
 
@@ -71,7 +73,7 @@ final class SignDrawing {
 
     /** Points for each metre: the boards leave room for the side view, and several boards for their widths beside them. */
     private double scale() {
-        double scale = TALLEST / top;
+        double scale = Math.min(TALLEST / top, DEEPEST / (top + FootingDrawing.of(loads).map(FootingDrawing::depth).orElse(0.0)));
         if (sign.boards().size() == 1) {
             return Math.min(scale, Math.min(ROOM, BESIDE - 25 - margin()) / (right - left));
         }

@@ -230,10 +230,15 @@ public final class Catalogue {
     /**
      * A grade by its name for a section: "A500 B" is that of its form.
      *
-     * @throws UnfitAnswer where no grade of its material and form has that name, or its strength is not known for the wall
+     * @throws UnfitAnswer where no grade of its material and form has that name, or that grade is of another form
      */
     public Grade grade(String name, Section section) {
         return grades.find(name, section);
+    }
+
+    /** Why the strength of a grade does not hold for a section; empty where it holds. */
+    public Optional<String> beyond(Grade grade, Section section) {
+        return grades.beyond(grade, section);
     }
 
     /** The weakest grade in common use for a section, for a job that names none. */

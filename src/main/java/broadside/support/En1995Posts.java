@@ -22,12 +22,8 @@ final class En1995Posts implements PostRule {
     private final Figure weights;
     private final ElasticPosts elastic;
 
-    /** Makes the rule for wind of a duration class, such as "short" or "instantaneous". */
-    En1995Posts(Edition edition, String duration) {
-        Rows durations = edition.rows("timber-duration");
-        if (!durations.has(duration)) {
-            throw new UnfitAnswer("posts.duration", "\"" + duration + "\" is no duration of load; there are " + String.join(", ", durations.keys()));
-        }
+    /** Makes the rule for wind of a duration class of the table, such as "short" or "instantaneous". */
+    En1995Posts(Edition edition, Rows durations, String duration) {
         Rows rows = edition.rows("timber-en");
         this.families = new TimberFamilies(edition);
         this.duration = duration;

@@ -78,7 +78,7 @@ final class Grades {
         return entry(name, "", material).grade();
     }
 
-    /** A grade by its name for a section: of its material, its form where the standard tells them apart, and its wall. */
+    /** A grade by its name for a section: of its material, and of its form where the standard tells them apart. */
     Grade find(String name, Section section) {
         Form form = section.form();
         String shaped = form == Form.SOLID_RECTANGLE ? "" : form == Form.ROUND_TUBE ? "ROUND" : "RECTANGULAR";
@@ -87,11 +87,14 @@ final class Grades {
         if (!shaped.isEmpty() && (found.endsWith("ROUND") || found.endsWith("RECTANGULAR")) && !found.endsWith(shaped)) {
             throw new UnfitAnswer(FIELD, "the grade " + entry.grade().name() + " is not for " + section.designation() + "; " + fitting(section.material()));
         }
-        if (section.nominalWall() > entry.thickest()) {
-            throw new UnfitAnswer(FIELD, "the strength of " + entry.grade().name() + " is known for walls up to " + Math.round(entry.thickest() * 1000)
-                + " mm only, and " + section.designation() + " is thicker");
-        }
         return entry.grade();
+    }
+
+    /** Why the strength of a grade does not hold for a section: its wall is thicker than the standard's row; empty where it holds. */
+    Optional<String> beyond(Grade grade, Section section) {
+        double thickest = byName().get(key(grade.name())).thickest();
+        return section.nominalWall() <= thickest ? Optional.empty() : Optional.of("the strength of " + grade.name() + " is known for walls up to "
+            + Math.round(thickest * 1000) + " mm only, and " + section.designation() + " is thicker");
     }
 
     private Entry entry(String name, String form, Material material) {

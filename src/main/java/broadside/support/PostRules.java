@@ -2,6 +2,10 @@ package broadside.support;
 
 import broadside.support.Section.Material;
 import broadside.table.Edition;
+import broadside.table.Rows;
+import java.util.EnumMap;
+import java.util.LinkedHashMap;
+import java.util.Map;
 
 /** The rule by which posts of a material are checked on a route. Rules are made once and kept. */
 public final class PostRules {
@@ -12,18 +16,23 @@ public final class PostRules {
     /** The duration of the wind that is safe where nothing is said. */
     public static final String SHORT = "short";
 
-    private final Edition edition;
     private final PostRule steelEn;
     private final PostRule steelAllowable;
     private final PostRule steelFactored;
     private final PostRule timberUs;
+    private final Map<AluminiumPosts.Way, PostRule> aluminium = new EnumMap<>(AluminiumPosts.Way.class);
+    private final Map<String, PostRule> timber = new LinkedHashMap<>();
 
     public PostRules(Edition edition) {
-        this.edition = edition;
         this.steelEn = new En1993Posts(edition);
         this.steelAllowable = new Aisc360Posts(edition, false);
         this.steelFactored = new Aisc360Posts(edition, true);
         this.timberUs = new NdsPosts(edition);
+        for (AluminiumPosts.Way way : AluminiumPosts.Way.values()) {
+            aluminium.put(way, new AluminiumPosts(edition, way));
+        }
+        Rows durations = edition.rows("timber-duration");
+        durations.keys().forEach(duration -> timber.put(duration, new En1995Posts(edition, durations, duration)));
     }
 
     /** The rule with wind as short-term load. */
@@ -41,8 +50,8 @@ public final class PostRules {
         return switch (route) {
             case "en" -> switch (material) {
                 case STEEL -> steelEn;
-                case ALUMINIUM -> new AluminiumPosts(edition, AluminiumPosts.Way.EN);
-                case TIMBER -> new En1995Posts(edition, duration);
+                case ALUMINIUM -> aluminium.get(AluminiumPosts.Way.EN);
+                case TIMBER -> timber(duration);
             };
             case "us-asd" -> us(material, steelAllowable, AluminiumPosts.Way.ALLOWABLE);
             case "us-strength" -> us(material, steelFactored, AluminiumPosts.Way.FACTORED);
@@ -50,10 +59,18 @@ public final class PostRules {
         };
     }
 
+    private PostRule timber(String duration) {
+        PostRule rule = timber.get(duration);
+        if (rule == null) {
+            throw new UnfitAnswer("posts.load-duration", "\"" + duration + "\" is no duration of load; there are " + String.join(", ", timber.keySet()));
+        }
+        return rule;
+    }
+
     private PostRule us(Material material, PostRule steel, AluminiumPosts.Way way) {
         return switch (material) {
             case STEEL -> steel;
-            case ALUMINIUM -> new AluminiumPosts(edition, way);
+            case ALUMINIUM -> aluminium.get(way);
             case TIMBER -> timberUs;
         };
     }

@@ -12,6 +12,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 import java.util.function.Supplier;
+import java.util.stream.Stream;
 
 /** The two pages by which an engineer decides whether to trust the rest: the code tables and the published checks. */
 final class Shelf {
@@ -31,10 +32,10 @@ final class Shelf {
                             String beyond, String entered, String note, String digest, List<String> headings, List<List<String>> rows) { }
 
     /** The published checks, by publication. */
-    public record Checks(int passed, int failed, int lines, List<Group> groups, List<CheckView> traps) { }
+    public record Checks(int passed, int failed, int lines, List<Group> groups, Group mistakes) { }
 
-    /** The checks of one publication. */
-    public record Group(String href, String key, String title, int lines, String outcome, List<CheckView> checks) { }
+    /** The checks of one publication, or all that print a mistake. */
+    public record Group(String href, String title, int lines, String outcome, List<CheckView> checks) { }
 
     /** One check. */
     public record CheckView(String title, String place, String edition, String status, String outcome, List<LineView> lines) { }
@@ -94,11 +95,12 @@ final class Shelf {
         List<PublishedCheck> all = checks.get();
         int passed = (int) all.stream().filter(PublishedCheck::passed).count();
         pages.show(ctx, 200, "checks", "Published checks", new Checks(passed, all.size() - passed, all.stream().mapToInt(c -> c.lines().size()).sum(),
-            groups(all), all.stream().filter(PublishedCheck::trap).map(Shelf::view).toList()));
+            groups(all), mistakes(all)));
     }
 
     void publication(Context ctx) {
-        Group group = groups(checks.get()).stream().filter(g -> g.href().equals("/checks/" + ctx.pathParam("publication"))).findFirst()
+        List<PublishedCheck> all = checks.get();
+        Group group = Stream.concat(groups(all).stream(), Stream.of(mistakes(all))).filter(g -> g.href().equals("/checks/" + ctx.pathParam("publication"))).findFirst()
             .orElseThrow(Refused::notFound);
         pages.show(ctx, 200, "publication", "Published checks: " + group.title(), group);
     }
@@ -107,10 +109,17 @@ final class Shelf {
         Map<String, List<PublishedCheck>> sorted = new TreeMap<>();
         all.stream().filter(c -> !c.trap()).forEach(c -> sorted.computeIfAbsent(c.source().publication(), k -> new ArrayList<>()).add(c));
         Map<String, Group> groups = new LinkedHashMap<>();
-        sorted.forEach((key, list) -> groups.put(key, new Group("/checks/" + key.replaceAll("[^A-Za-z0-9]+", "-"), key,
-            tables.publication(key).map(TableLibrary.Publication::title).orElse(key), list.stream().mapToInt(c -> c.lines().size()).sum(),
-            outcome(list.stream().allMatch(PublishedCheck::passed)), list.stream().map(Shelf::view).toList())));
+        sorted.forEach((key, list) -> groups.put(key, group(key.replaceAll("[^A-Za-z0-9]+", "-"), tables.publication(key).map(TableLibrary.Publication::title).orElse(key), list)));
         return List.copyOf(groups.values());
+    }
+
+    private static Group mistakes(List<PublishedCheck> all) {
+        return group("mistakes-in-print", "Mistakes in print that are not repeated here", all.stream().filter(PublishedCheck::trap).toList());
+    }
+
+    private static Group group(String place, String title, List<PublishedCheck> list) {
+        return new Group("/checks/" + place, title, list.stream().mapToInt(c -> c.lines().size()).sum(), outcome(list.stream().allMatch(PublishedCheck::passed)),
+            list.stream().map(Shelf::view).toList());
     }
 
     private static CheckView view(PublishedCheck check) {

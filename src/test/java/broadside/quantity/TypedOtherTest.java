@@ -80,7 +80,8 @@ class TypedOtherTest {
             100 in2 | 0.064516
             100 in² | 0.064516
             3 m | ! is a length; an area
-            3 m3 | ! no unit that is known
+            3 m3 | ! is a volume; an area
+            3 m4 | ! an area
             3 | ! no unit: an area
             """)
     void area(String typed, String expected) {
@@ -98,7 +99,7 @@ class TypedOtherTest {
             150 lb/ft³ | 2402.769506094021
             150 pcf | 2402.769506094021
             150 PCF | 2402.769506094021
-            25 kN/m3 | ! no unit that is known
+            25 kN/m3 | ! is a pressure per depth; a density
             2400 | ! no unit: a density
             """)
     void density(String typed, String expected) {

@@ -59,8 +59,9 @@ class GradesTest {
         assertThatThrownBy(() -> CATALOGUE.grade("S355\u0007" + "x".repeat(100), Material.ALUMINIUM)).isInstanceOf(UnfitAnswer.class).hasMessageContaining("S355?xxx")
             .hasMessageContaining("6082-T6");
         Section thick = CATALOGUE.find("CHS 508x20").orElseThrow();
-        assertThatThrownBy(() -> CATALOGUE.grade("S355", thick)).isInstanceOf(UnfitAnswer.class).hasMessageContaining("walls up to 16 mm");
-        assertThat(CATALOGUE.grade("S355", CATALOGUE.find("SHS 200x16").orElseThrow()).name()).isEqualTo("S355");
+        assertThat(CATALOGUE.beyond(CATALOGUE.grade("S355", thick), thick)).hasValueSatisfying(why -> assertThat(why).contains("walls up to 16 mm"));
+        Section sixteen = CATALOGUE.find("SHS 200x16").orElseThrow();
+        assertThat(CATALOGUE.beyond(CATALOGUE.grade("S355", sixteen), sixteen)).isEmpty();
     }
 
     @Test

@@ -167,6 +167,7 @@ class AnswerTest {
         assertThat(Pool.get("/tables/en-1991-1-4/2005").body()).contains("0.003").contains("straight line").contains("the last value holds");
         String checks = Pool.get("/checks").body();
         assertThat(checks).contains("Mistakes in print that are not repeated here").contains("passed").doesNotContain(">failed<");
+        assertThat(Pool.get("/checks/mistakes-in-print").body()).contains("differs from the printed one").contains("Printed").doesNotContain(">failed<");
         assertThat(Pool.get("/checks/SIGN").body()).contains("Printed").contains("Difference");
         assertThat(checks.length()).isLessThan(200 << 10);
         assertThat(Pool.get("/health").body()).startsWith("ok ");

@@ -198,6 +198,7 @@ class BrowserTest {
         pages.put("edition", "/tables/en-1991-1-4/2005");
         pages.put("checks", "/checks");
         pages.put("publication", "/checks/SIGN");
+        pages.put("mistakes", "/checks/mistakes-in-print");
         pages.put("about", "/about");
         pages.put("message", "/nowhere");
         return pages;

@@ -258,7 +258,7 @@ class FormTest {
         java.util.Random random = new java.util.Random(7);
         for (String field : List.of("items[0].fixed-to", "items[0].lighting", "site.name", "title", "client", "address", "applicant", "engineer", "reference",
             "prepared-by", "checked-by", "coordinates", "drawing-number", "site.terrain-reason", "items[0].solidity-by", "items[0].design-life",
-            "items[0].inspection-interval", "items[0].posts.grade", "items[0].posts.section", "revision", "items[0].footing.kind")) {
+            "items[0].inspection-interval", "items[0].posts.grade", "items[0].posts.section", "revision", "items[0].footing.ground")) {
             StringBuilder long_ = new StringBuilder();
             random.ints(1900, 0x4e00, 0x9fa5).forEach(c -> long_.append((char) c));
             form.put(field, long_.toString());

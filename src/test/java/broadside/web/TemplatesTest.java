@@ -95,6 +95,7 @@ class TemplatesTest {
         pages.put("edition", Pool.get("/tables/asce-7/16").body());
         pages.put("checks", Pool.get("/checks").body());
         pages.put("publication", Pool.get("/checks/BNBC20").body());
+        pages.put("publication mistakes", Pool.get("/checks/mistakes-in-print").body());
         pages.put("about", Pool.get("/about").body());
         pages.put("message plain", Pool.get("/nowhere").body());
         return pages;
