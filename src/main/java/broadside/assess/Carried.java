@@ -73,9 +73,9 @@ public record Carried(List<Part> parts) {
      * @param mass         kg/m
      * @param utilisation  greatest share of its checks
      * @param by           the check that has it
-     * @param why          why it failed; empty where it passes
+     * @param named        the case that gives it; empty for all
      */
-    public record Choice(String designation, double mass, double utilisation, String by, boolean chosen, String why) { }
+    public record Choice(String designation, double mass, double utilisation, String by, String named, boolean passes, boolean chosen) { }
 
     public List<Check> checks() {
         return parts.stream().flatMap(p -> p.checks().stream()).toList();

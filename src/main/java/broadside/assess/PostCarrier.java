@@ -122,7 +122,7 @@ final class PostCarrier {
         List<Result> results = new ArrayList<>(List.of(
             Result.words("section", "Post", section.designation() + ", " + chosen.grade().name() + (chosen.typed() ? "" : ", chosen")),
             Result.of("mass", "Mass of a post along its length", section.mass(), "kg/m"), Result.words("rule", "Rule for the post", result.title()),
-            Result.words("limit", "Limit on the deflection", result.limit())));
+            Result.words("limit", "Limit on the deflection", by.rules().posts().deflection().place(result.limit()))));
         List<String> assumed = new ArrayList<>(demands.assumed());
         if (type.grade().isEmpty()) {
             assumed.add("The grade was not given: " + chosen.grade().name() + " is taken.");
@@ -135,7 +135,8 @@ final class PostCarrier {
     }
 
     private static Choice choice(PostDesign.Candidate candidate, Section chosen) {
-        return new Choice(candidate.designation(), candidate.mass(), candidate.utilisation(), candidate.governing(), candidate.designation().equals(chosen.designation()), candidate.why());
+        return new Choice(candidate.designation(), candidate.mass(), candidate.utilisation(), candidate.governing(), candidate.named(),
+            candidate.passes(), candidate.designation().equals(chosen.designation()));
     }
 
     private Part footing(Section section, WindLevels levels, Trace sheet) {

@@ -80,7 +80,7 @@ public final class ResultText {
         }
         ArrayNode tried = node.putArray("tried");
         part.choices().forEach(t -> tried.addObject().put("section", t.designation()).put("mass_kg_per_m", t.mass()).put("utilisation", t.utilisation())
-            .put("check", t.by()).put("chosen", t.chosen()).put("why-not", t.why()));
+            .put("check", t.by()).put("case", t.named()).put("passes", t.passes()).put("chosen", t.chosen()));
         ArrayNode assumed = node.putArray("to-confirm");
         part.assumed().forEach(assumed::add);
         ArrayNode remarks = node.putArray("remarks");

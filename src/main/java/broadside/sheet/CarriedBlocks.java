@@ -39,7 +39,7 @@ final class CarriedBlocks {
             blocks.add(new Facts(part.title(), facts));
         }
         if (!part.checks().isEmpty()) {
-            blocks.add(checks(part, format));
+            blocks.addAll(checks(part, format));
         }
         if (!part.choices().isEmpty()) {
             blocks.add(choices(part, format));
@@ -50,27 +50,39 @@ final class CarriedBlocks {
         return blocks;
     }
 
-    private static Table checks(Carried.Part part, Format format) {
+    /** Demand against capacity, with the rules numbered and told once below. */
+    private static List<Block> checks(Carried.Part part, Format format) {
         List<Row> rows = new ArrayList<>();
+        List<String> rules = new ArrayList<>();
         double most = part.checks().stream().mapToDouble(Check::utilisation).max().orElse(0);
         for (Check check : part.checks()) {
             boolean governs = check.utilisation() == most;
-            rows.add(new Row(List.of(check.name(), format.amount(check.demand(), check.unit()), format.capacity(check.capacity(), check.unit()), share(check.utilisation()),
-                (check.passes() ? "met" : "not met") + (governs ? ", governs" : ""), check.named().isEmpty() ? "-" : Format.caseName(check.named()), check.rule() + "; "
-                    + check.status().shown()), governs));
+            String rule = check.rule() + "; " + check.status().shown();
+            if (!rules.contains(rule)) {
+                rules.add(rule);
+            }
+            rows.add(new Row(List.of(check.name(), ofCase(check.named()), format.amount(check.demand(), check.unit()), format.capacity(check.capacity(), check.unit()),
+                share(check.utilisation()), (check.passes() ? "met" : "NOT met") + (governs ? ", governs" : ""), Integer.toString(rules.indexOf(rule) + 1)), governs));
         }
-        return new Table(part.title() + ": demand against capacity", List.of(new Column("Check", false, 4), new Column("Demand", true, 3), new Column("Capacity", true, 3),
-            new Column("Share", true, 2), new Column("Result", false, 3), new Column("Case", false, 3), new Column("Rule and how well it is known", false, 8)), rows);
+        List<String> told = new ArrayList<>();
+        rules.forEach(rule -> told.add("Rule " + (told.size() + 1) + ": " + rule));
+        return List.of(new Table(part.title() + ": demand against capacity", List.of(new Column("Check", false, 5), new Column("Case", false, 5), new Column("Demand", true, 3),
+            new Column("Capacity", true, 3), new Column("Share", true, 2), new Column("Result", false, 4), new Column("Rule", true, 1)), rows),
+            new Paragraph(String.join(". ", told) + ".", Tone.SMALL));
+    }
+
+    private static String ofCase(String named) {
+        return named.isEmpty() ? "-" : Format.caseName(named);
     }
 
     private static Table choices(Carried.Part part, Format format) {
         List<Row> rows = new ArrayList<>();
         for (Carried.Choice choice : part.choices()) {
-            rows.add(new Row(List.of(choice.designation(), format.massPerLength(choice.mass()), share(choice.utilisation()), choice.by(),
-                choice.chosen() ? "chosen: the lightest that passes" : choice.why().isEmpty() ? "passes" : choice.why()), choice.chosen()));
+            rows.add(new Row(List.of(choice.designation(), format.massPerLength(choice.mass()), share(choice.utilisation()), choice.by(), ofCase(choice.named()),
+                choice.chosen() ? "chosen: the lightest that passes" : choice.passes() ? "passes" : "fails"), choice.chosen()));
         }
         return new Table("Sections tried, from light to heavy", List.of(new Column("Section", false, 4), new Column("Mass", true, 3), new Column("Greatest share", true, 3),
-            new Column("By", false, 4), new Column("Why", false, 7)), rows);
+            new Column("By", false, 4), new Column("Case", false, 3), new Column("Result", false, 5)), rows);
     }
 
     /** A share of what can be taken, rounded up. */
@@ -88,7 +100,8 @@ final class CarriedBlocks {
         List<String> found = new ArrayList<>();
         for (Carried.Part part : carried.parts()) {
             if (part.refused().isEmpty() && !part.results().isEmpty()) {
-                found.add(value(part.results().get(0), format));
+                Carried.Result first = part.results().get(0);
+                found.add((first.unit().isEmpty() ? "" : first.label() + " ") + value(first, format));
             }
         }
         String refused = carried.parts().stream().flatMap(p -> p.refused().stream()).findFirst().orElse("");

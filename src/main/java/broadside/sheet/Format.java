@@ -7,6 +7,7 @@ import broadside.codes.LoadCase;
 import broadside.quantity.Dimension;
 import broadside.quantity.Rounding;
 import broadside.quantity.Show;
+import broadside.quantity.Unit;
 import broadside.quantity.Shown;
 import broadside.quantity.Speed;
 import broadside.quantity.Units;
@@ -15,9 +16,10 @@ import java.util.Locale;
 /** Numbers as they are shown: three figures in answers, four in the calculation; loads are rounded up, and only here. */
 final class Format {
 
-    /** Lengths below this are shown in millimetres, m: deflections. */
+    /** Lengths below this are shown in millimetres or inches, m: deflections. */
     private static final double SMALL = 0.3;
-    private static final double MILLIMETRES = 1000;
+    /** Pressures from here on are stresses of a material, Pa. */
+    private static final double STRESS = 2e6;
 
     private final Units units;
 
@@ -106,12 +108,17 @@ final class Format {
     private String shown(double si, String unit, Rounding rounding) {
         return switch (unit) {
             case "1" -> Show.number(si, 3, rounding);
-            case "m" -> si >= SMALL ? length(si) : Show.number(si * MILLIMETRES, 3, rounding) + " mm";
+            case "m" -> si >= SMALL ? length(si) : in(si, Dimension.LENGTH, units == Units.US ? "in" : "mm", rounding);
+            case "Pa" -> si < STRESS ? Show.of(si, Dimension.PRESSURE, units, 3, rounding).text() : in(si, Dimension.PRESSURE, units == Units.US ? "psi" : "MPa", rounding);
             case "rad" -> Show.of(si, Dimension.ANGLE, units, 3, rounding).text();
             case "m³" -> Show.of(si, Dimension.VOLUME, units, 3, rounding).text();
             case "Hz" -> Show.number(si, 3, rounding) + " Hz";
             default -> dimension(unit).map(d -> Math.abs(si) < 1e-6 ? "0" : Show.of(si, d, units, 3, rounding).text()).orElse(Show.number(si, 3, rounding) + " " + unit);
         };
+    }
+
+    private static String in(double si, Dimension dimension, String unit, Rounding rounding) {
+        return Show.number(si / Unit.of(dimension, unit).orElseThrow().toSi(), 3, rounding) + " " + unit;
     }
 
     String plain(double number) {

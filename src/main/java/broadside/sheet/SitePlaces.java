@@ -1,6 +1,7 @@
 package broadside.sheet;
 
 import broadside.panel.BannerFence;
+import broadside.panel.Board;
 import broadside.panel.FacadePanel;
 import broadside.panel.Hoarding;
 import broadside.panel.Item;
@@ -15,6 +16,9 @@ import java.util.stream.Collectors;
 /** Positions for the site sheet: what is set out from where. */
 final class SitePlaces implements Item.Kinds<List<Fact>> {
 
+    /** More than these are left to the drawing. */
+    private static final int MOST_BOARDS = 5;
+
     private final Format format;
 
     SitePlaces(Format format) {
@@ -24,11 +28,16 @@ final class SitePlaces implements Item.Kinds<List<Fact>> {
     @Override
     public List<Fact> postSign(PostSign sign) {
         List<Fact> facts = new ArrayList<>();
-        for (int i = 0; i < sign.boards().size(); i++) {
-            var b = sign.boards().get(i);
-            facts.add(Fact.of("Board" + (sign.boards().size() == 1 ? "" : " " + sign.part(i)), b.width().typed() + " by " + b.height().typed() + ", lower edge "
-                + b.clearance().typed() + " above the ground" + (b.offset().metres() == 0 ? "" : ", middle " + b.offset().typed() + " from the middle of the posts")));
+        List<String> boards = new ArrayList<>();
+        for (int i = 0; i < Math.min(MOST_BOARDS, sign.boards().size()); i++) {
+            Board b = sign.boards().get(i);
+            boards.add((sign.boards().size() == 1 ? "" : sign.part(i) + " ") + b.width().typed() + " by " + b.height().typed() + ", lower edge " + b.clearance().typed()
+                + " above the ground" + (b.offset().metres() == 0 ? "" : ", middle " + b.offset().typed() + " from the middle of the posts"));
         }
+        if (sign.boards().size() > MOST_BOARDS) {
+            boards.add((sign.boards().size() - MOST_BOARDS) + " more as on the drawing");
+        }
+        facts.add(Fact.of(sign.boards().size() == 1 ? "Board" : "Boards", String.join("; ", boards)));
         facts.add(Fact.of("Posts", sign.posts().count() == 1 ? "one" : sign.posts().count() + ", from the middle: "
             + sign.posts().positions().stream().map(x -> (x < 0 ? "-" : "") + format.length(Math.abs(x))).collect(Collectors.joining(", "))));
         return facts;

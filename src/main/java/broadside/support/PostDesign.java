@@ -1,7 +1,5 @@
 package broadside.support;
 
-import broadside.quantity.Rounding;
-import broadside.quantity.Show;
 import broadside.table.Edition;
 import broadside.trace.Status;
 import broadside.trace.Trace;
@@ -60,9 +58,9 @@ public final class PostDesign {
      * @param mass         kg/m
      * @param utilisation  of its worst check
      * @param governing    name of that check
-     * @param why          why it failed, in words; empty where it passes
+     * @param named        the case that gives it; empty for all
      */
-    public record Candidate(String designation, double mass, double utilisation, String governing, boolean passes, String why) { }
+    public record Candidate(String designation, double mass, double utilisation, String governing, String named, boolean passes) { }
 
     /**
      * The lightest section that passes.
@@ -124,10 +122,7 @@ public final class PostDesign {
 
     private static Candidate candidate(Result result) {
         Check worst = result.worst();
-        boolean passes = result.passes();
-        String why = passes ? "" : worst.name() + " takes " + Show.number(worst.utilisation(), 3, Rounding.UP) + " of what the section can give"
-            + (worst.named().isEmpty() ? "" : " in the case " + worst.named());
-        return new Candidate(result.section().designation(), result.section().mass(), worst.utilisation(), worst.name(), passes, why);
+        return new Candidate(result.section().designation(), result.section().mass(), worst.utilisation(), worst.name(), worst.named(), result.passes());
     }
 
     private static Check worst(List<Check> checks) {
