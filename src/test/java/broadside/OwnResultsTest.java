@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import broadside.action.PostAction;
 import broadside.assess.Assessment;
+import broadside.assess.Carried;
 import broadside.assess.ItemResult;
 import broadside.assess.Loads;
 import broadside.quantity.Rounding;
@@ -28,7 +29,7 @@ class OwnResultsTest {
 
     @Test
     void the_demo_jobs_give_what_they_gave_before() throws IOException {
-        StringBuilder text = new StringBuilder("# Our own results for the demo jobs: job, item, velocity pressure Pa, force N, base moment N m, torsion N m, worst post N m, then what its supports must take\n");
+        StringBuilder text = new StringBuilder("# Our own results for the demo jobs: job, item, velocity pressure Pa, force N, base moment N m, torsion N m, worst post N m, then what carries it with its greatest share, then what its supports must take\n");
         AllJobs.files().keySet().stream().filter(n -> n.endsWith(".json") && !n.contains("/")).sorted().forEach(name -> {
             Assessment assessment = AllJobs.assess(AllJobs.demo(name));
             for (ItemResult item : assessment.items()) {
@@ -42,11 +43,20 @@ class OwnResultsTest {
                     Math.abs(l.governs("torsion").torsion()), l.worstPost().map(PostAction::moment).orElse(0.0)}) {
                     text.append(", ").append(Show.number(value, 7, Rounding.NEAREST));
                 }
+                l.carried().ifPresent(c -> c.parts().forEach(part -> carried(part, text)));
                 l.reactions().forEach(r -> text.append(", ").append(r.step()).append(' ').append(Show.number(r.value(), 7, Rounding.NEAREST)));
                 text.append('\n');
             }
         });
         compare("results.csv", text.toString());
+    }
+
+    /** What a part is, and the greatest share of its checks. */
+    private static void carried(Carried.Part part, StringBuilder text) {
+        text.append(", ").append(part.key());
+        part.results().stream().filter(r -> !r.key().equals("rule") && !r.key().equals("limit")).forEach(r -> text.append(' ')
+            .append(r.unit().isEmpty() ? r.text().replace(",", "") : Show.number(r.value(), 7, Rounding.NEAREST)).append(';'));
+        part.worst().ifPresent(w -> text.append(' ').append(w.name()).append(' ').append(Show.number(w.utilisation(), 7, Rounding.NEAREST)));
     }
 
     @Test

@@ -19,12 +19,16 @@ final class ItemNotes implements Item.Kinds<List<Note>> {
     private final Job job;
     private final WindCode code;
     private final Trace sheet;
+    private final Loads loads;
+    private final boolean carried;
     private final List<Note> notes = new ArrayList<>();
 
-    ItemNotes(Job job, WindCode code, Trace sheet) {
+    ItemNotes(Job job, WindCode code, Trace sheet, Loads loads) {
         this.job = job;
         this.code = code;
         this.sheet = sheet;
+        this.loads = loads;
+        this.carried = loads.carried().isPresent();
     }
 
     private void add(Note.Kind kind, String text) {
@@ -57,8 +61,9 @@ final class ItemNotes implements Item.Kinds<List<Note>> {
         if (sign.posts().count() > 1) {
             add(Note.Kind.ASSUMPTION, "The posts share force alike and take torsion as a couple: stiff board, equal posts.");
         }
-        if (sign.posts().section().isEmpty()) {
-            add(Note.Kind.NOT_CHECKED, "The wind on the posts themselves is not in these loads, as their size was not given.");
+        if (loads.supports().drag().isEmpty()) {
+            add(carried ? Note.Kind.ASSUMPTION : Note.Kind.NOT_CHECKED, "The wind on the posts themselves is not in these loads, as their size was not given"
+                + (carried ? "; the checks of post and footing count it." : "."));
         }
         if (sign.replaces().isPresent()) {
             add(Note.Kind.CAUTION, "The ratio of the new moment to the old one says nothing about what the old post, its welds and its footing can take.");
@@ -126,7 +131,9 @@ final class ItemNotes implements Item.Kinds<List<Note>> {
             add(Note.Kind.NOT_CHECKED, code.edition().property("title") + " has no rule for a fence as open as the bare one: its loads are not given.");
         }
         add(Note.Kind.CAUTION, "A cover turns a mesh fence into a sail. Cover, ties and fabric are not checked, nor their flutter.");
-        add(Note.Kind.NOT_CHECKED, "Tipping, sliding, ballast, braces and stakes.");
+        if (!carried) {
+            add(Note.Kind.NOT_CHECKED, "Tipping, sliding, ballast, braces and stakes.");
+        }
         return notes;
     }
 
@@ -136,7 +143,7 @@ final class ItemNotes implements Item.Kinds<List<Note>> {
             ? "A solid wall stands behind the panel: external pressure only, and no relief from a gap behind it is counted."
             : "The panel is the skin of the building: external and internal pressure act together.");
         add(Note.Kind.ASSUMPTION, "Where the panel lies in two zones the worse pressure counts over all of it.");
-        add(Note.Kind.NOT_CHECKED, "Fixings, anchors and the wall: loads only. Pressure equalisation in a cavity, parapets, re-entrant corners and wraps around a corner are not covered.");
+        add(Note.Kind.NOT_CHECKED, (carried ? "Anchors and the wall." : "Fixings, anchors and the wall: loads only.") + " Pressure equalisation in a cavity, parapets, re-entrant corners and wraps around a corner are not covered.");
         return notes;
     }
 

@@ -42,7 +42,7 @@ final class Notes {
         notes.leastHeight(job.site(), item, code, sheet);
         notes.noRegion(sheet);
         notes.leastPressures(job.site(), sheet);
-        notes.notes.addAll(item.choose(new ItemNotes(job, code, sheet)));
+        notes.notes.addAll(item.choose(new ItemNotes(job, code, sheet, loads.get())));
         notes.solidity(job, item, sheet);
         notes.heldBy(job, item);
         notes.carrying(item, loads.get());

@@ -6,7 +6,6 @@ import broadside.assess.Problem;
 import broadside.job.JobReader;
 import broadside.job.Shapes;
 import broadside.quantity.Units;
-import broadside.table.Rows;
 import broadside.web.FormView.Button;
 import broadside.web.FormView.Hidden;
 import broadside.web.FormView.ItemLink;
@@ -33,11 +32,10 @@ final class FormDesk {
     private final JobReader reader;
     private final FormReader forms;
     private final Sketch sketch;
-    private final Rows scope;
+    private final FormTables tables;
 
-    /** The rows of {@code scope} are the answers to "what is it fixed to?" that are outside the scope. */
-    FormDesk(Pages pages, Assessor assessor, JobReader reader, Documents documents, Rows scope) {
-        this.scope = scope;
+    FormDesk(Pages pages, Assessor assessor, JobReader reader, Documents documents, FormTables tables) {
+        this.tables = tables;
         this.pages = pages;
         this.assessor = assessor;
         this.reader = reader;
@@ -207,7 +205,7 @@ final class FormDesk {
 
     private void show(Context ctx, int status, Draft draft, List<Problem> problems, String note) {
         FormProblems listed = new FormProblems(problems.stream().map(p -> CodeName.told(p, assessor.codes().code(draft.answers().get("basis.code")))).toList());
-        FormLayout layout = new FormLayout(draft.answers(), assessor.codes(), scope, listed, draft.index());
+        FormLayout layout = new FormLayout(draft.answers(), assessor.codes(), tables, listed, draft.index());
         List<FormView.Part> parts = layout.parts();
         JsonNode job = forms.read(draft.answers(), draft.items(), draft.index()).job();
         String mark = draft.answers().get(draft.path() + ".mark");

@@ -4,7 +4,6 @@ import broadside.codes.CodeLibrary;
 import broadside.codes.WindCode;
 import broadside.job.Shape;
 import broadside.job.Shapes;
-import broadside.table.Rows;
 import broadside.web.FormView.Bit;
 import broadside.web.FormView.Button;
 import broadside.web.FormView.Choice;
@@ -29,13 +28,12 @@ final class FormLayout {
     private final String item;
     private final Map<String, String> anchors = new LinkedHashMap<>();
 
-    /** The rows of {@code scope} are the answers to "what is it fixed to?" that are outside the scope. */
-    FormLayout(Answers answers, CodeLibrary codes, Rows scope, FormProblems problems, int item) {
+    FormLayout(Answers answers, CodeLibrary codes, FormTables tables, FormProblems problems, int item) {
         this.answers = answers;
         this.codes = codes;
         this.problems = problems;
         this.item = "items[" + item + "]";
-        this.ask = new Questions(answers, code(), new HeldByChoices(scope, answers, this.item), problems);
+        this.ask = new Questions(answers, code(), new HeldByChoices(tables.scope(), answers, this.item), tables, problems);
     }
 
     List<Part> parts() {

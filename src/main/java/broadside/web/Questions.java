@@ -49,15 +49,17 @@ final class Questions {
     private final Answers answers;
     private final Optional<WindCode> code;
     private final HeldByChoices heldBy;
+    private final FormTables tables;
     private final FormProblems problems;
     private final Units units;
     private final Set<String> asked = new TreeSet<>();
     private final Map<String, String> labels = new LinkedHashMap<>();
 
-    Questions(Answers answers, Optional<WindCode> code, HeldByChoices heldBy, FormProblems problems) {
+    Questions(Answers answers, Optional<WindCode> code, HeldByChoices heldBy, FormTables tables, FormProblems problems) {
         this.answers = answers;
         this.code = code;
         this.heldBy = heldBy;
+        this.tables = tables;
         this.problems = problems;
         this.units = FormReader.units(answers);
     }
@@ -139,13 +141,14 @@ final class Questions {
 
     private Input made(Shape shape, Field field, String path) {
         Wording words = Wording.of(shape.name(), field);
-        Map<String, String> listed = shape.name().equals("site") ? code.map(c -> TableChoices.of(c.edition(), field.name())).orElse(Map.of()) : Map.of();
+        Map<String, String> listed = shape.name().equals("site") ? code.map(c -> TableChoices.of(c.edition(), field.name())).orElse(Map.of())
+            : tables.of(shape.name(), field.name());
         if (path.equals("site.terrain")) {
             return terrain(path, words);
         }
         if (!listed.isEmpty()) {
             return made("select", path, words.label(), "", field.name().equals("wind-zone") && simplified() ? words.hint() + ZONE_HINT : words.hint(), null,
-                choices(path, "Not said", listed), "", "wide");
+                choices(path, shape.name().equals("site") || field.name().equals("ground") ? "Not said" : "The usual one", listed), "", "wide");
         }
         if (RADIOS.contains(field.name())) {
             return made("radio", path, words.label(), "", words.hint(), null, written(field, path), "", field.name().equals("held-by") ? "many" : "");

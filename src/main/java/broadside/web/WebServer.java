@@ -35,7 +35,7 @@ public final class WebServer {
 
     public WebServer(Assessor assessor, JobReader reader, PublishedChecks checks, TableLibrary tables, Documents documents) {
         Pages pages = new Pages(assessor.about());
-        FormDesk forms = new FormDesk(pages, assessor, reader, documents, tables.edition("own-rules/1").orElseThrow().rows("scope"));
+        FormDesk forms = new FormDesk(pages, assessor, reader, documents, FormTables.of(tables, assessor));
         CompareDesk compare = new CompareDesk(pages, assessor, reader, documents);
         AnswerDesk answers = new AnswerDesk(pages, assessor, reader, documents, forms, compare);
         StartDesk start = new StartDesk(pages, assessor.codes(), reader, documents, forms);

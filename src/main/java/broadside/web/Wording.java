@@ -32,7 +32,7 @@ record Wording(String label, String hint, String metric, String us) {
         job.date|Date of the job|Like 2026-12-01
         job.engineer|Engineer, with licence|The person who will review it
         job.remarks|Remarks|
-        basis.stability|Rule for overturning and sliding|Such as en-1990-equ, asd-0.6 or factor-1.5; left empty, the one that goes with the code
+        basis.stability|Rule for overturning and sliding|How weight counts against wind; the usual one goes with the code
         basis.design|Rules for posts|Left empty, those that go with the code
         site.name|Name of the place|
         site.basic-speed|Basic wind speed|From the wind map or the national annex for this place
@@ -144,18 +144,18 @@ record Wording(String label, String hint, String metric, String us) {
         posts.count|Number of posts|
         posts.spacing|Distance between posts|From middle to middle; empty for one post
         posts.section|Section of a post|Such as CHS 114.3x5, SHS 100x5 hot, PIPE 4 STD or TIMBER 100x100; left empty, one is proposed
-        posts.grade|Grade of the posts|Such as S355, A53 B or C24; left empty, the usual one of the section
-        posts.series|Series to choose from|Such as chs-hot, shs-hot, us-pipe or timber-metric; left empty, the usual ones of the code
-        posts.deflection-limit|Limit on the deflection|Such as tdb4 or l-80; left empty, the usual one of the code
+        posts.grade|Grade of the posts|The usual one is the weakest in common use for the section
+        posts.series|Series to choose from|The usual ones are steel tubes of the country of the code
+        posts.deflection-limit|Limit on the deflection|The usual one goes with the code
         posts.load-duration|Duration of the wind on timber|Short is the safe one
         posts.shape|Outline of a post|
         posts.width|Width of a post|Across the wind, or its diameter|mm|in
         posts.depth|Depth of a post|Along the wind|mm|in
         hoarding-posts.spacing|Distance between posts|From middle to middle
         hoarding-posts.section|Section of a post|Such as CHS 114.3x5, SHS 100x5 hot, PIPE 4 STD or TIMBER 100x100; left empty, one is proposed
-        hoarding-posts.grade|Grade of the posts|Such as S355, A53 B or C24; left empty, the usual one of the section
-        hoarding-posts.series|Series to choose from|Such as chs-hot, shs-hot, us-pipe or timber-metric; left empty, the usual ones of the code
-        hoarding-posts.deflection-limit|Limit on the deflection|Such as tdb4 or l-80; left empty, the usual one of the code
+        hoarding-posts.grade|Grade of the posts|The usual one is the weakest in common use for the section
+        hoarding-posts.series|Series to choose from|The usual ones are steel tubes of the country of the code
+        hoarding-posts.deflection-limit|Limit on the deflection|The usual one goes with the code
         hoarding-posts.load-duration|Duration of the wind on timber|Short is the safe one
         footing.kind|Kind of footing|Left empty, posts planted in concrete
         footing.shape|Outline in plan|

@@ -190,7 +190,7 @@ class JobReaderTest {
         assertThat(sign.boards().get(0).width().typed()).isEqualTo("3 m");
         assertThat(sign.boards().get(0).mass().orElseThrow().kilograms()).isEqualTo(60);
         assertThat(sign.posts().positions()).containsExactly(-1.0, 1.0);
-        assertThat(sign.carrying()).extracting(c -> c.name() + "=" + c.typed()).contains("posts section=CHS 114.3x5", "footing width=0.6 m");
+        assertThat(sign.carrying()).extracting(c -> c.name() + "=" + c.typed()).contains("posts section=auto", "footing width=0.6 m");
         Hoarding hoarding = (Hoarding) Jobs.READER.read(Jobs.text(HOARDING).getBytes(StandardCharsets.UTF_8)).items().get(0);
         assertThat(hoarding.gates().get(0).end()).isCloseTo(26.6, within(1e-12));
         assertThat(hoarding.returnLeft().metres()).isEqualTo(2.4);

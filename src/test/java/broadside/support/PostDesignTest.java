@@ -113,7 +113,7 @@ class PostDesignTest {
                 assertThat(DESIGN.check(series.get(i), Tubes.S235, task, new Trace().quiet()).passes()).as(series.get(i).designation()).isFalse();
             }
             assertThat(found.candidates()).hasSize(8);
-            assertThat(found.candidates().subList(0, 3)).allMatch(c -> !c.passes() && c.utilisation() > 1 && c.why().contains(c.governing()));
+            assertThat(found.candidates().subList(0, 3)).allMatch(c -> !c.passes() && c.utilisation() > 1 && !c.governing().isEmpty());
             assertThat(found.candidates().get(3).designation()).isEqualTo(chosen.section().designation());
             assertThat(found.candidates().get(3).utilisation()).isEqualTo(chosen.worst().utilisation());
             assertThat(found.candidates()).isSortedAccordingTo((a, b) -> Double.compare(a.mass(), b.mass()));

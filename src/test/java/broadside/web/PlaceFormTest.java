@@ -230,8 +230,8 @@ class PlaceFormTest {
     }
 
     private static Questions questions(Optional<WindCode> code, Answers answers, FormProblems problems) {
-        HeldByChoices heldBy = new HeldByChoices(TableLibrary.shipped().edition("own-rules/1").orElseThrow().rows("scope"), answers, "items[0]");
-        return new Questions(answers, code, heldBy, problems);
+        FormTables tables = FormTables.of(TableLibrary.shipped(), Pool.ASSESSOR);
+        return new Questions(answers, code, new HeldByChoices(tables.scope(), answers, "items[0]"), tables, problems);
     }
 
     /** A code whose terrain is a roughness length and whose speed may come from a region. */
