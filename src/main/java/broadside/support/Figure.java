@@ -17,6 +17,11 @@ public record Figure(double value, String place, Status status, String how) {
         return of(rows, key, "value");
     }
 
+    /** The same with the place as its row names it, where a table gathers from many publications. */
+    Figure at(String row) {
+        return new Figure(value, row, status, how);
+    }
+
     /** Records the number as the value of this step and hands it back. */
     public double into(Trace.Line line) {
         return line.from(place, status).reads(how, value, "1");

@@ -23,7 +23,7 @@ public final class PostDeflection {
     public PostDeflection(Edition edition) {
         Rows rows = edition.rows("deflection-limits");
         names = List.copyOf(rows.keys());
-        names.forEach(key -> limits.put(key, new Limit(Figure.of(rows, key, "share"), rows.text(key, "of").equals("wind"))));
+        names.forEach(key -> limits.put(key, new Limit(Figure.of(rows, key, "share").at(rows.text(key, "place")), rows.text(key, "of").equals("wind"))));
         Rows routes = edition.rows("deflection-defaults");
         routes.keys().forEach(key -> defaults.put(key, routes.text(key, "limit")));
     }

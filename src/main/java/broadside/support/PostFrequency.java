@@ -16,7 +16,7 @@ public final class PostFrequency {
     public PostFrequency(Edition edition) {
         Rows rows = edition.rows("post-constants");
         this.massShare = Figure.of(rows, "mass-share");
-        this.least = Figure.of(rows, "least-frequency");
+        this.least = Figure.of(rows, "least-frequency").at(rows.text("least-frequency", "place"));
     }
 
     /**
@@ -34,7 +34,7 @@ public final class PostFrequency {
         double moving = trace.line("post-moving-mass", "m_1", "mass that moves").in("m_t", tip, "kg").in("k_m", share).in("m_p", post, "kg")
             .from(RAYLEIGH, massShare.status()).gives("m_t + k_m m_p", tip + share * post, "kg");
         return trace.line(step, "f_1", "lowest natural frequency").in("E", modulus, "Pa").in("I", inertia, "m⁴").in("L_t", length, "m").in("m_1", moving, "kg")
-            .from(RAYLEIGH, massShare.status()).reads("(3 E I / (L_t³ m_1))^0.5 / (2 π)",
+            .from(RAYLEIGH, massShare.status()).gives("(3 E I / (L_t^3 m_1))^0.5 / (2 π)",
                 Math.sqrt(3 * modulus * inertia / (length * length * length * moving)) / (2 * Math.PI), "Hz");
     }
 
