@@ -6,6 +6,16 @@ import broadside.report.Paper;
 import broadside.report.PdfWriter;
 import broadside.sheet.Sheet;
 import broadside.sheet.SheetMaker;
+import broadside.support.Catalogue;
+import broadside.support.OwnDrag;
+import broadside.support.PostDesign;
+import broadside.support.PostLoad;
+import broadside.support.PostRules;
+import broadside.support.PostTask;
+import broadside.support.Section;
+import broadside.support.WindLevels;
+import broadside.trace.Status;
+import broadside.trace.Trace;
 import com.sun.management.ThreadMXBean;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
@@ -16,10 +26,13 @@ import java.net.http.HttpRequest;
 import java.net.http.HttpResponse;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 
 /** Measures what the tool must reach and prints a table. Run by the command in DEVELOPERS.md, never by the tests. */
@@ -30,9 +43,10 @@ public final class Benchmark {
     public static void main(String[] args) throws Exception {
         System.out.printf(Locale.ROOT, "%-78s %12s %12s%n", "what", "measured", "at most");
         Job job = AllJobs.demo("entrance-sign.json");
-        warm("assessment of one post sign, full trace, warm", 0.2, 20_000, () -> AllJobs.assess(job));
+        warm("loads of one post sign, full trace, warm", 0.2, 20_000, () -> AllJobs.TOOL.assessor().loadsOnly(job));
         everyCodeAndKind();
         warm("one item by every code side by side, warm", 3, 1000, () -> AllJobs.TOOL.assessor().sideBySide(job, job.items().get(0)));
+        sizing(job);
         pdf(job);
         if (!Files.exists(JAR)) {
             System.out.println("no " + JAR + ": run mvn -q -DskipTests package for the rows of whole processes");
@@ -57,12 +71,38 @@ public final class Benchmark {
             double most = 0;
             for (Map.Entry<String, String> item : items.entrySet()) {
                 Job job = JobTexts.job(code[0], code[1], "{'mark': 'X1', 'kind': '" + item.getKey() + "', " + item.getValue() + "}");
-                double median = median(3000, () -> AllJobs.assess(job));
+                double median = median(3000, () -> AllJobs.TOOL.assessor().loadsOnly(job));
                 slowest = median > most ? item.getKey() : slowest;
                 most = Math.max(median, most);
             }
-            row("assessment by " + code[0] + ", slowest of six kinds, " + slowest, most, 0.3, "ms");
+            row("loads by " + code[0] + ", slowest of six kinds, " + slowest, most, 0.3, "ms");
         }
+    }
+
+    /** Choosing among 300 sections of which none but the heaviest could do; then whole assessments with what carries the item. */
+    private static void sizing(Job job) throws Exception {
+        PostDesign design = new PostDesign(AllJobs.TOOL.assessor().tables().edition(PostRules.EDITION).orElseThrow());
+        Catalogue catalogue = AllJobs.TOOL.assessor().catalogue();
+        List<Section> sections = new ArrayList<>(catalogue.sections().stream().filter(s -> s.material() == Section.Material.STEEL).toList());
+        for (int d = 400; sections.size() < 300; d += 10) {
+            sections.add(catalogue.find("CHS " + d + "x12").orElseThrow());
+        }
+        sections.sort(Comparator.comparingDouble(Section::mass));
+        List<PostLoad> loads = new ArrayList<>();
+        for (String named : List.of("A, left", "A, right", "B, left", "B, right", "along the face")) {
+            loads.add(new PostLoad(named, 90_000, 270_000, 20_000, 4000, 12_000, 800, 0, 810_000, 2_430_000));
+        }
+        PostTask task = new PostTask("en", "short", loads, new WindLevels(1, 1.5, "EN 1990", Status.RECALLED), section -> OwnDrag.NONE, 4, 4, 60, 3, Optional.empty());
+        warm("sizing from a catalogue of " + sections.size() + " sections, warm", 2, 2000, () -> design.size(sections, catalogue.grade("S355", Section.Material.STEEL), task, new Trace()));
+        warm("assessment of one post sign, post and footing sized, warm", 3, 3000, () -> AllJobs.assess(job));
+        StringBuilder ten = new StringBuilder();
+        for (int i = 0; i < 10; i++) {
+            ten.append(i == 0 ? "" : ",").append("{'mark': 'S").append(i).append("', 'kind': 'post-sign', 'boards': [{'width': '").append(1 + 0.3 * i)
+                .append(" m', 'height': '1.5 m', 'clearance': '2.5 m', 'depth': '0.05 m', 'mass': '40 kg'}], 'posts': {'count': ").append(i % 2 == 0 ? "1" : "2, 'spacing': '1.2 m'")
+                .append(", 'section': 'auto'}}");
+        }
+        Job signs = JobTexts.job("en-1991-1-4/2005", JobTexts.EN, ten.toString());
+        warm("job with ten signs, posts and footings sized, warm", 30, 500, () -> AllJobs.assess(signs));
     }
 
     private static void pdf(Job job) throws Exception {

@@ -74,13 +74,18 @@ public final class Assessor {
     }
 
     /** The same without what carries the items. */
-    Assessment loadsOnly(Job job) {
+    public Assessment loadsOnly(Job job) {
         return assess(job, false);
     }
 
     private Assessment assess(Job job, boolean supports) {
         WindCode code = codes.code(job.basis().key()).orElseThrow(() -> new BadJob(List.of(new Problem("basis.code",
             "\"" + job.basis().key() + "\" is not among the codes: " + String.join(", ", codes.editions())))));
+        try {
+            job.basis().stability().ifPresent(supportRules.stability()::of);
+        } catch (UnfitAnswer e) {
+            throw new BadJob(List.of(new Problem(e.field(), e.getMessage())));
+        }
         List<ItemResult> results = new ArrayList<>();
         for (int i = 0; i < job.items().size(); i++) {
             try {

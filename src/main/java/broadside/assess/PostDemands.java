@@ -62,7 +62,8 @@ record PostDemands(List<PostLoad> loads, double tipMass, double tipHeight, doubl
             c.squares(), c.cubes())));
         loads.add(new PostLoad(ALONG, 0, 0, 0, edge.force() / n, edge.moment() / n, most, leaning, 0, 0));
         double top = sign.boards().stream().mapToDouble(b -> b.clearance().metres() + b.height().metres()).max().orElseThrow();
-        return new PostDemands(List.copyOf(loads), mass / n, moment / mass, top, Weights.newtons(given) / n, loads.stream().mapToDouble(PostLoad::torsion).max().orElse(0), assumed);
+        double middle = sign.boards().stream().mapToDouble(b -> b.clearance().metres() + b.height().metres() / 2).max().orElseThrow();
+        return new PostDemands(List.copyOf(loads), mass / n, mass > 0 ? moment / mass : middle, top, Weights.newtons(given) / n, loads.stream().mapToDouble(PostLoad::torsion).max().orElse(0), assumed);
     }
 
     private static String named(String load, String state) {
@@ -77,7 +78,8 @@ record PostDemands(List<PostLoad> loads, double tipMass, double tipHeight, doubl
             * (worst.share().orElseThrow() + worst.gate());
         double z = worst.shear() == 0 ? middle : worst.moment() / worst.shear();
         List<PostLoad> loads = List.of(
-            new PostLoad(worst.named(), worst.shear(), worst.moment(), 0, 0, 0, Weights.newtons(mass), 0, worst.moment() * z, worst.moment() * z * z),
+            new PostLoad(worst.named(), worst.shear(), worst.moment(), 0, 0, 0, Weights.newtons(mass), 0, worst.moment() * z + worst.shear() * height * height / 12,
+                worst.moment() * z * z + worst.moment() * height * height / 4),
             new PostLoad(ALONG, 0, 0, 0, edge.force() / posts, edge.moment() / posts, Weights.newtons(mass), 0, 0, 0));
         return new PostDemands(loads, mass, middle, hoarding.clearance().metres() + height, 0, 0, List.of("The mass of the boards is not asked for: " + (long) boardMass.value()
             + " kg for each square metre are taken where mass does harm, and none where it helps."));

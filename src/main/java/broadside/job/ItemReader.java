@@ -137,7 +137,7 @@ final class ItemReader {
         Length right = returns.flatMap(r -> returnLength(r, "right", length)).orElse(ZERO);
         List<Hoarding.Gate> gates = gates(values, length);
         Optional<Length> spacing = values.object("posts").flatMap(p -> size(p, "spacing"));
-        if (length.isPresent() && spacing.isPresent() && length.get().metres() / spacing.get().metres() > 1000) {
+        if (length.isPresent() && spacing.filter(s -> s.metres() >= 0.005).isPresent() && length.get().metres() / spacing.get().metres() > 1000) {
             problem(values.object("posts").orElseThrow(), "spacing", "gives more than 1000 posts; check its unit");
         }
         if (length.isEmpty() || height.isEmpty() || values.text("mark").isEmpty()) {
