@@ -113,8 +113,8 @@ class CarriedAlikeTest {
     /** 1 ft = 0.3048 m, 1 lb = 0.45359237 kg, 1 mph = 0.44704 m/s; 1 psf = 4.4482216152605 N / 0.3048^2 m2 = 47.88025898 Pa. */
     @ParameterizedTest
     @CsvSource(delimiter = '|', quoteCharacter = '"', value = {
-        "1 | 'section': 'CHS 168.3x6.3', 'grade': 'S275' | 'planted', 'width': '0.6096 m', 'cohesion': '47.88025898 kPa' | 'planted', 'width': '24 in', 'cohesion': '1000 psf'",
-        "2 | 'section': 'PIPE 5 STD', 'grade': 'A53 B' | 'pier', 'width': '0.6096 m', 'lateral-bearing': '23.5631195769 kPa/m' | 'pier', 'width': '2 ft', 'lateral-bearing': '150 psf/ft'",
+        "1 | 'section': 'CHS 168.3x6.3', 'grade': 'S275' | 'planted', 'width': '0.6096 m', 'depth': '1.2192 m', 'cohesion': '47.88025898 kPa' | 'planted', 'width': '24 in', 'depth': '4 ft', 'cohesion': '1000 psf'",
+        "2 | 'section': 'PIPE 5 STD', 'grade': 'A53 B' | 'pier', 'width': '0.6096 m', 'depth': '2.4384 m', 'lateral-bearing': '23.5631195769 kPa/m' | 'pier', 'width': '2 ft', 'depth': '8 ft', 'lateral-bearing': '150 psf/ft'",
         "3 | 'section': 'RHS 120x80x5 cold' | 'planted', 'ground': 'poor', 'width': '0.4572 m', 'depth': '1.8288 m' | 'planted', 'ground': 'poor', 'width': '18 in', 'depth': '6 ft'",
         "1 | 'section': 'HSS 5x5x1/4' | 'pad', 'width': '2.1336 m', 'length': '1.8288 m', 'depth': '0.762 m', 'bearing': '71.82038847 kPa', 'friction': 0.4 "
             + "| 'pad', 'width': '7 ft', 'length': '6 ft', 'depth': '2 ft 6 in', 'bearing': '1500 psf', 'friction': 0.4"})

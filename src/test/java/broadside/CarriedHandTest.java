@@ -174,7 +174,7 @@ class CarriedHandTest {
             deep = (deep + 0.5 * a * (1 + Math.sqrt(1 + 4.36 * h / a))) / 2;
         }
         assertThat(step(item, "embedment-depth")).isCloseTo(deep * 0.3048, within(1e-6));
-        assertThat(part(carried, "footing", "depth").value()).as("rounded up to 50 mm").isCloseTo(Math.ceil(deep * 0.3048 / 0.05) * 0.05, within(1e-9));
+        assertThat(part(carried, "footing", "depth").value()).as("rounded up to 3 in").isCloseTo(Math.ceil(deep * 4) / 4 * 0.3048, within(1e-9));
         double chosen = part(carried, "footing", "depth").value() / 0.3048;
         double a = 2.34 * shear / (100 * chosen / 3 * 1.5);
         of(carried, "embedment", 0.5 * a * (1 + Math.sqrt(1 + 4.36 * h / a)) * 0.3048, chosen * 0.3048);

@@ -36,7 +36,7 @@ class FootingSheetTest {
                 answers.putAll(size);
                 Footing footing = GroundCases.footing(kind, false, answers);
                 Trace trace = new Trace();
-                GroundCases.FOOTINGS.hold(new Request(Optional.of(footing), load, 1500, 200, GroundCases.LEVELS, GroundCases.EQU, "en", 0.1143), trace);
+                GroundCases.FOOTINGS.hold(new Request(Optional.of(footing), load, 1500, 200, GroundCases.LEVELS, GroundCases.EQU, "en", 0.1143, false), trace);
                 return trace;
             }))));
     }

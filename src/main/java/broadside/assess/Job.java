@@ -2,9 +2,11 @@ package broadside.assess;
 
 import broadside.panel.Item;
 import broadside.quantity.Speed;
+import broadside.quantity.Units;
 import broadside.site.Site;
 import broadside.trace.OwnValue;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 
@@ -49,5 +51,13 @@ public record Job(Map<String, String> header, Basis basis, Site site, List<Item>
 
     public Job withSite(Site other) {
         return new Job(header, basis, other, items, remarks, overrides, compared);
+    }
+
+    /** The system of units: the one the job names, else the one its wind speed is typed in. */
+    public Units units() {
+        return head("units").map(u -> u.equals("us") ? Units.US : Units.METRIC).orElseGet(() -> {
+            String typed = site().basicSpeed().typed().toLowerCase(Locale.ROOT);
+            return typed.contains("mph") || typed.contains("ft/s") ? Units.US : Units.METRIC;
+        });
     }
 }

@@ -7,6 +7,8 @@ import broadside.assess.Carried.Result;
 import broadside.panel.Footing;
 import broadside.panel.PostSection;
 import broadside.panel.PostType;
+import broadside.quantity.Length;
+import broadside.quantity.Units;
 import broadside.support.Assumed;
 import broadside.support.Catalogue;
 import broadside.support.Check;
@@ -14,6 +16,7 @@ import broadside.support.FootLoad;
 import broadside.support.FootingResult;
 import broadside.support.Footings;
 import broadside.support.Grade;
+import broadside.support.NoAnswer;
 import broadside.support.OwnDrag;
 import broadside.support.PostDesign;
 import broadside.support.PostLoad;
@@ -21,6 +24,7 @@ import broadside.support.PostTask;
 import broadside.support.Section;
 import broadside.support.Section.Material;
 import broadside.support.WindLevels;
+import broadside.trace.Status;
 import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.Comparator;
@@ -44,6 +48,13 @@ final class PostCarrier {
     /** What was decided about the section before anything of it was recorded. */
     record Chosen(Section section, Grade grade, boolean typed, List<PostDesign.Candidate> candidates) { }
 
+    /** The section, or why there is none. */
+    record Decision(Optional<Chosen> chosen, String why) {
+        static Decision none(String why) {
+            return new Decision(Optional.empty(), why);
+        }
+    }
+
     /**
      * Makes a carrier.
      *
@@ -57,17 +68,29 @@ final class PostCarrier {
         this.drag = drag;
     }
 
-    /** The section typed, or the lightest that passes; nothing where the text names no section, its strength is not known, or none passes. */
-    Optional<Chosen> choose(WindLevels levels, Trace quiet) {
+    /** The section typed, or the lightest that passes. */
+    Decision choose(WindLevels levels, Trace quiet) {
         Catalogue catalogue = by.rules().catalogue();
         if (type.typed()) {
-            return catalogue.find(type.section().get()).map(s -> new Chosen(s, grade(s), true, List.of())).filter(c -> catalogue.beyond(c.grade(), c.section()).isEmpty());
+            return catalogue.find(type.section().get()).map(this::typed).orElseGet(() -> Decision.none("\"" + type.section().get() + "\" names no section that is known here; known "
+                + "are designations such as CHS 114.3x5, SHS 100x5 hot, RHS 120x80x5 cold, PIPE 4 STD, HSS 4x4x1/4, TIMBER 100x100, TUBE 89x3. Loads only."));
         }
         List<Section> sections = sections(catalogue);
         Grade grade = grade(sections.get(0));
         sections.removeIf(s -> catalogue.beyond(grade, s).isPresent());
-        PostDesign.Sized sized = by.rules().posts().size(sections, grade, task(levels), quiet);
-        return sized.chosen().map(r -> new Chosen(r.section(), grade, false, sized.candidates()));
+        try {
+            PostDesign.Sized sized = by.rules().posts().size(sections, grade, task(levels), quiet);
+            return sized.chosen().map(r -> new Decision(Optional.of(new Chosen(r.section(), grade, false, sized.candidates())), "")).orElseGet(() -> Decision.none("no section of the series "
+                + type.series().orElse("in use") + " passes every check: other posts, more posts or a smaller board are needed. An engineer is needed."));
+        } catch (NoAnswer e) {
+            return Decision.none(e.getMessage() + ". Loads only.");
+        }
+    }
+
+    private Decision typed(Section section) {
+        Grade grade = grade(section);
+        return by.rules().catalogue().beyond(grade, section).map(why -> Decision.none(why + ". Loads only."))
+            .orElseGet(() -> new Decision(Optional.of(new Chosen(section, grade, true, List.of())), ""));
     }
 
     /** The sections to choose from: those of the series typed, or the usual ones of the rules in use. */
@@ -93,28 +116,27 @@ final class PostCarrier {
     }
 
     /** Checks what was chosen, records it, and goes on down into the ground. */
-    Carried carry(Optional<Chosen> chosen, WindLevels levels, Trace sheet) {
-        List<Part> parts = new ArrayList<>();
-        if (chosen.isEmpty()) {
-            return new Carried(List.of(none()));
+    Carried carry(Decision decided, WindLevels levels, Trace sheet) {
+        if (decided.chosen().isEmpty()) {
+            return new Carried(List.of(refused("posts", "Posts", decided.why())));
         }
-        Section section = chosen.get().section();
-        by.rules().catalogue().record(section, sheet);
-        PostDesign.Result result = by.rules().posts().check(section, chosen.get().grade(), task(levels), sheet);
-        parts.add(posts(chosen.get(), result));
-        if (!result.dynamic()) {
-            parts.add(footing(section, levels, sheet));
+        Chosen chosen = decided.chosen().get();
+        List<Part> parts = new ArrayList<>();
+        try {
+            by.rules().catalogue().record(chosen.section(), sheet);
+            PostDesign.Result result = by.rules().posts().check(chosen.section(), chosen.grade(), task(levels), sheet);
+            parts.add(posts(chosen, result));
+            if (!result.dynamic()) {
+                parts.add(footing(chosen.section(), levels, sheet));
+            }
+        } catch (NoAnswer e) {
+            parts.add(parts.isEmpty() ? refused("posts", "Posts", e.getMessage() + ". Loads only.") : refused("footing", "Footing of each post", e.getMessage() + "."));
         }
         return new Carried(parts);
     }
 
-    private Part none() {
-        Catalogue catalogue = by.rules().catalogue();
-        String why = type.section().filter(t -> type.typed()).map(text -> catalogue.find(text).flatMap(s -> catalogue.beyond(grade(s), s)).map(w -> w + ". Loads only.")
-            .orElse("\"" + text + "\" names no section that is known here; known are designations such as CHS 114.3x5, SHS 100x5 hot, "
-                + "RHS 120x80x5 cold, PIPE 4 STD, HSS 4x4x1/4, TIMBER 100x100, TUBE 89x3. Loads only."))
-            .orElse("no section of the series " + type.series().orElse("in use") + " passes every check: other posts, more posts or a smaller board are needed. An engineer is needed.");
-        return new Part("posts", "Posts", List.of(), List.of(), List.of(), List.of(), List.of(), Optional.of(why));
+    private static Part refused(String key, String title, String why) {
+        return new Part(key, title, List.of(), List.of(), List.of(), List.of(), List.of(), Optional.of(why));
     }
 
     private Part posts(Chosen chosen, PostDesign.Result result) {
@@ -141,16 +163,42 @@ final class PostCarrier {
 
     private Part footing(Section section, WindLevels levels, Trace sheet) {
         OwnDrag on = own(section.outline());
+        double aside = aside(levels, sheet);
         List<FootLoad> loads = new ArrayList<>();
         for (PostLoad load : demands.loads()) {
             boolean along = load.named().equals(PostDemands.ALONG);
-            loads.add(new FootLoad(load.named(), (along ? load.weakShear() : load.shear()) + on.force(), (along ? load.weakMoment() : load.moment()) + on.moment()));
+            loads.add(new FootLoad(load.named(), (along ? load.weakShear() : load.shear()) + on.force(), (along ? load.weakMoment() : load.moment()) + on.moment() + aside));
         }
         double weight = demands.given() + Weights.newtons(section.mass() * demands.top());
         FootingResult found = by.rules().footings().hold(new Footings.Request(footing, loads, weight, demands.torsion(), levels, by.stability(), by.route(),
-            section.width()), sheet);
-        return new Part("footing", "Footing of each post", results(found), found.checks(), List.of(), found.assumed().stream().map(Assumed::text).toList(), found.remarks(),
+            section.width(), by.job().units() == Units.US), sheet);
+        List<String> remarks = new ArrayList<>(found.remarks());
+        if (aside > 0) {
+            remarks.add("The permanent moment of boards that hang to one side counts as if it acted with the wind, on the safe side.");
+        }
+        return new Part("footing", "Footing of each post", results(found), found.checks(), List.of(), found.assumed().stream().map(Assumed::text).toList(), remarks,
             Optional.empty());
+    }
+
+    /**
+     * The permanent moment of boards that hang to one side, N m at the level of the wind: it counts in the direction of the wind, over the least factor of the
+     * levels, so that none lessens it, and more on a pad that is narrower across.
+     */
+    private double aside(WindLevels levels, Trace sheet) {
+        double moment = demands.loads().stream().mapToDouble(PostLoad::weightMoment).max().orElse(0);
+        if (moment == 0) {
+            return 0;
+        }
+        double width = footing.filter(f -> f.length().isPresent()).flatMap(Footing::width).map(Length::metres).orElse(1.0);
+        double length = footing.filter(f -> f.width().isPresent()).flatMap(Footing::length).map(Length::metres).orElse(width);
+        double m = sheet.line("footing-weight-moment/boards", "M_{G1}", "moment of boards that hang to one side").from("weight of the boards", Status.DERIVED)
+            .reads("sum of weight and distance from the post", moment, "N m");
+        double k = sheet.line("footing-weight-level", "k_G", "the least of 1 and the factors of the levels").from(levels.place(), levels.status())
+            .reads("so that no factor on wind lessens a weight", Math.min(1, Math.min(levels.service(), levels.strength())), "1");
+        double r = sheet.line("footing-weight-ratio", "r_G", "width of the pad over its length, at least 1").from("geometry", Status.DERIVED)
+            .reads("as typed; 1 for a square or a shaft", Math.max(1, width / length), "1");
+        return sheet.line("footing-weight-moment", "M_{G2}", "the same, as it counts with the wind").in("r_G", r).in("M_{G1}", m, "N m").in("k_G", k)
+            .from("added to the moment of the wind: on the safe side of both directions together", Status.DERIVED).gives("r_G M_{G1} / k_G", r * m / k, "N m");
     }
 
     private List<Result> results(FootingResult found) {

@@ -24,7 +24,7 @@ import java.util.Set;
  * @param tipMass    kg on one post
  * @param tipHeight  of its middle above the ground, m
  * @param top        of the highest board, m
- * @param given      weight that was given, on the post with the least of it, N
+ * @param given      weight that was given, on the post with the least of it, N; below zero where boards beside the posts lift it
  * @param torsion    greatest of a single post, N m
  * @param assumed    what was taken without having been given
  */
@@ -41,6 +41,7 @@ record PostDemands(List<PostLoad> loads, double tipMass, double tipHeight, doubl
         double given = 0;
         double moment = 0;
         double aside = 0;
+        double givenAside = 0;
         List<String> assumed = new ArrayList<>();
         for (Board board : sign.boards()) {
             double each = board.mass().map(Mass::kilograms).orElseGet(() -> boardMass.value() * board.areaShare() * board.width().metres() * board.height().metres());
@@ -48,6 +49,7 @@ record PostDemands(List<PostLoad> loads, double tipMass, double tipHeight, doubl
             given += board.mass().map(Mass::kilograms).orElse(0.0);
             moment += each * (board.clearance().metres() + board.height().metres() / 2);
             aside += each * board.offset().metres();
+            givenAside += board.mass().map(Mass::kilograms).orElse(0.0) * board.offset().metres();
         }
         if (sign.boards().stream().anyMatch(b -> b.mass().isEmpty())) {
             boardMass.into(sheet.line("board-mass", "m_A", "mass of a board for each square metre, kg, where none was given"));
@@ -57,13 +59,15 @@ record PostDemands(List<PostLoad> loads, double tipMass, double tipHeight, doubl
         double turned = Weights.newtons(Math.abs(aside));
         double most = n > 1 ? weight + turned * at.get(at.size() - 1) / spread : weight;
         double leaning = n > 1 ? 0 : turned;
+        double least = Weights.newtons(given) / n - (n > 1 ? Weights.newtons(Math.abs(givenAside)) * at.get(at.size() - 1) / spread : 0);
         Set<PostLoad> loads = new LinkedHashSet<>();
         SignPosts.cases(at, combinations).forEach(c -> loads.add(new PostLoad(named(c.named(), c.state()), c.shear(), c.moment(), c.torsion(), 0, 0, most, leaning,
             c.squares(), c.cubes())));
         loads.add(new PostLoad(ALONG, 0, 0, 0, edge.force() / n, edge.moment() / n, most, leaning, 0, 0));
         double top = sign.boards().stream().mapToDouble(b -> b.clearance().metres() + b.height().metres()).max().orElseThrow();
         double middle = sign.boards().stream().mapToDouble(b -> b.clearance().metres() + b.height().metres() / 2).max().orElseThrow();
-        return new PostDemands(List.copyOf(loads), mass / n, mass > 0 ? moment / mass : middle, top, Weights.newtons(given) / n, loads.stream().mapToDouble(PostLoad::torsion).max().orElse(0), assumed);
+        return new PostDemands(List.copyOf(loads), mass / n, mass > 0 ? moment / mass : middle, top, least,
+            loads.stream().mapToDouble(PostLoad::torsion).max().orElse(0), assumed);
     }
 
     private static String named(String load, String state) {

@@ -18,7 +18,7 @@ final class SignCarrier {
     private final ItemLoads loads;
     private final PostCarrier carrier;
     private final WindLevels levels;
-    private final Optional<PostCarrier.Chosen> chosen;
+    private final PostCarrier.Decision decided;
     private final Trace quiet;
 
     /** Decides by the wind on the boards alone, in every combination. */
@@ -29,13 +29,13 @@ final class SignCarrier {
         PostDemands demands = PostDemands.of(typed, combinations, edgeOn, by.rules().own().number("board-mass", "value"), loads.sheet());
         this.carrier = new PostCarrier(by, typed.posts().type(), typed.footing(), demands, this::drag);
         this.levels = by.levels(loads.sheet());
-        this.chosen = carrier.choose(levels, quiet);
+        this.decided = carrier.choose(levels, quiet);
     }
 
     /** The sign with the outline of its posts, where a section was typed or asked for. */
     PostSign sign() {
         boolean counts = typed.posts().type().typed() || typed.posts().type().auto();
-        return counts && typed.posts().section().isEmpty() ? chosen.map(c -> typed.with(c.section().outline())).orElse(typed) : typed;
+        return counts && typed.posts().section().isEmpty() ? decided.chosen().map(c -> typed.with(c.section().outline())).orElse(typed) : typed;
     }
 
     /** The post with the most wind on itself. */
@@ -45,6 +45,6 @@ final class SignCarrier {
     }
 
     Carried carried() {
-        return carrier.carry(chosen, levels, loads.sheet());
+        return carrier.carry(decided, levels, loads.sheet());
     }
 }

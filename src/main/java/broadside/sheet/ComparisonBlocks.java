@@ -41,7 +41,7 @@ public final class ComparisonBlocks {
     /** The document of one item. */
     public static Sheet sheet(Assessor assessor, Assessment assessment, Item item, String date) {
         Job job = assessment.job();
-        Format format = new Format(Format.unitsOf(job));
+        Format format = new Format(job.units());
         String title = job.head("title").map(t -> t + ", side by side").orElse("Side by side");
         List<Block> blocks = new ArrayList<>();
         blocks.add(new Heading(1, title, "top"));
@@ -54,7 +54,7 @@ public final class ComparisonBlocks {
 
     /** A document with the comparison of every item behind it, each on a new page. */
     public static Sheet behind(Sheet sheet, Assessor assessor, Assessment assessment) {
-        Format format = new Format(Format.unitsOf(assessment.job()));
+        Format format = new Format(assessment.job().units());
         List<Block> blocks = new ArrayList<>(sheet.blocks());
         List<Item> items = assessment.job().items();
         for (int i = 0; i < items.size(); i++) {

@@ -1,15 +1,14 @@
 package broadside.sheet;
 
 import broadside.action.CaseAction;
-import broadside.assess.Job;
 import broadside.codes.LoadCase.Windward;
 import broadside.codes.LoadCase;
 import broadside.quantity.Dimension;
 import broadside.quantity.Rounding;
 import broadside.quantity.Show;
-import broadside.quantity.Unit;
 import broadside.quantity.Shown;
 import broadside.quantity.Speed;
+import broadside.quantity.Unit;
 import broadside.quantity.Units;
 import java.util.Locale;
 
@@ -25,14 +24,6 @@ final class Format {
 
     Format(Units units) {
         this.units = units;
-    }
-
-    /** The system of a job: the one it names, else the one its wind speed is typed in. */
-    static Units unitsOf(Job job) {
-        return job.head("units").map(u -> u.equals("us") ? Units.US : Units.METRIC).orElseGet(() -> {
-            String typed = job.site().basicSpeed().typed().toLowerCase(Locale.ROOT);
-            return typed.contains("mph") || typed.contains("ft/s") ? Units.US : Units.METRIC;
-        });
     }
 
     /** A case in words: "case A" for case-a, "case centred" for centred. */

@@ -22,7 +22,7 @@ public final class SheetMaker {
      */
     public static Sheet of(Assessment assessment, String date) {
         Job job = assessment.job();
-        Format format = new Format(Format.unitsOf(job));
+        Format format = new Format(job.units());
         List<Block> blocks = new ArrayList<>();
         String title = job.head("title").orElse("Wind load summary");
         blocks.add(new Heading(1, title, "top"));

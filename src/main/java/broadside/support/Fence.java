@@ -102,10 +102,10 @@ record Fence(double panel, double foot, double half, List<Block> blocks, Optiona
         double proof = stakes.proofLoad().get().newtons();
         int count = stakes.count().orElse(1);
         if (!(proof > 0)) {
-            throw new UnfitAnswer("stakes.proof-load", "a proof load is a pull above zero, such as 1.6 kN");
+            throw new UnfitAnswer("stake-proof-load", "a proof load is a pull above zero, such as 1.6 kN");
         }
         if (count < 1) {
-            throw new UnfitAnswer("stakes.count", "at least one stake holds a panel, or the proof load is left out");
+            throw new UnfitAnswer("stakes-per-panel", "at least one stake holds a panel, or the proof load is left out");
         }
         if (stakes.count().isEmpty()) {
             assumptions.add("The number of stakes was not given: one on each side of each panel is counted, at the ends of the foot.");

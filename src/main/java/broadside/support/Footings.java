@@ -1,6 +1,7 @@
 package broadside.support;
 
 import broadside.panel.Footing;
+import broadside.quantity.Show;
 import broadside.table.TableLibrary;
 import broadside.trace.Status;
 import broadside.trace.Trace;
@@ -27,15 +28,26 @@ public final class Footings {
      * @param rule       of stability, for a pad
      * @param route      "en", "us-asd" or "us-strength": the rule for ground that is not known
      * @param postWidth  of the post, m
+     * @param feet       whether sizes that are chosen are in feet and inches
      */
     public record Request(Optional<Footing> footing, List<FootLoad> loads, double weight, double torsion, WindLevels levels, StabilityRule rule, String route,
-                          double postWidth) {
+                          double postWidth, boolean feet) {
 
         public Request {
             loads = List.copyOf(loads);
             if (loads.isEmpty()) {
                 throw new IllegalArgumentException("a footing needs a load");
             }
+        }
+
+        /** A size of the tables that is chosen in the units of the job. */
+        Known size(GroundTables tables, String key) {
+            return tables.size(feet ? key + "-us" : key);
+        }
+
+        /** A size in words. */
+        String words(double metres) {
+            return feet ? Show.feetInches(metres) : Math.round(metres * 1000) + " mm";
         }
 
         /** The loads that no other exceeds in both shear and moment: more of either never helps a footing. */
@@ -62,7 +74,8 @@ public final class Footings {
     /**
      * Sizes or checks the footing and records what was chosen.
      *
-     * @throws UnfitAnswer for an answer that fits no rule, or when no size holds the loads
+     * @throws UnfitAnswer for an answer that fits no rule
+     * @throws NoAnswer    when no size holds the loads, or nothing is known of the ground
      */
     public FootingResult hold(Request request, Trace trace) {
         List<Assumed> assumed = new ArrayList<>();

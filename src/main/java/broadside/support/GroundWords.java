@@ -73,8 +73,7 @@ final class GroundWords {
 
     private void refuseBad() {
         if (isBad()) {
-            throw new UnfitAnswer("footing.ground", "there is no presumptive value for " + word.orElseThrow()
-                + ": the soil must be tested, and its values typed");
+            throw new NoAnswer("there is no presumptive value for " + word.orElseThrow() + ": the soil must be tested, and its values typed");
         }
     }
 }

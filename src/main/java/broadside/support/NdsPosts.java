@@ -66,7 +66,7 @@ final class NdsPosts implements PostRule {
     @Override
     public List<Check> check(Section section, Grade grade, DesignLoad load, Trace trace) {
         if (european.factor(grade).isPresent()) {
-            throw new UnfitAnswer("posts.grade", grade.name() + " is a European grade with characteristic strengths; NDS needs reference stresses, such as those of "
+            throw new NoAnswer(grade.name() + " is a European grade with characteristic strengths; NDS needs reference stresses, such as those of "
                 + "Southern Pine No.2");
         }
         PostValues post = new PostValues(section);

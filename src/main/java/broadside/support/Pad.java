@@ -44,7 +44,7 @@ public final class Pad {
         this.density = density;
     }
 
-    /** Weight on the ground, N, recorded as "N"; the sizes were recorded as "B", "L" and "d_f". */
+    /** Weight on the ground, N, recorded as "N", above zero also where boards beside the posts lift the pad; the sizes were recorded as "B", "L" and "d_f". */
     public double vertical(Block block, Trace trace) {
         double rho = density.into(trace.line("concrete-density", "ρ_c", "density of the concrete that counts"));
         double g = tables.size("gravity").into(trace.line("gravity", "g", "acceleration of free fall"));
@@ -52,7 +52,7 @@ public final class Pad {
             .in("L", block.across(), "m").in("d_f", block.depth(), "m").from("definition of weight", Status.DERIVED)
             .gives("ρ_c g B L d_f", rho * g * block.along() * block.across() * block.depth(), "N");
         return trace.line("vertical-load", "N", "weight on the ground").in("G_f", block.weight(), "N").in("W_p", own, "N").from("statics", Status.DERIVED)
-            .gives("G_f + W_p", block.weight() + own, "N");
+            .gives("max(W_p / 1000; G_f + W_p)", Math.max(own / 1000, block.weight() + own), "N");
     }
 
     /** Moment at the base, N m, of a shear and a moment at the ground recorded as "V_f" and "M_f"; recorded as "M_b". */

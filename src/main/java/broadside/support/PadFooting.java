@@ -81,8 +81,8 @@ final class PadFooting {
             Footings.above("depth", 0, typed.metres(), "a depth above zero is needed, such as \"0.6 m\"");
             return trace.given("d_f", "depth of the footing", typed.metres(), "m", typed.typed());
         }
-        Known usual = tables.size("pad-depth");
-        assumed.add(new Assumed("The depth of the pad is assumed to be " + usual.text() + " m."));
+        Known usual = request.size(tables, "pad-depth");
+        assumed.add(new Assumed("The depth of the pad is assumed to be " + request.words(usual.value()) + "."));
         return usual.into(trace.line("footing-depth", "d_f", "depth of the footing"));
     }
 
@@ -93,13 +93,12 @@ final class PadFooting {
 
     /** The least width in steps at which all checks hold; a wider pad is never worse. */
     private double sized(Setting setting, double depth, Trace quiet, Trace trace) {
-        double step = tables.size("pad-step").value();
+        double step = request.size(tables, "pad-step").value();
         Known widest = tables.size("widest-pad");
         long low = Math.max(1, Math.round(GroundTables.roundedUp(request.postWidth(), step) / step)) - 1;
         long high = Math.round(widest.value() / step);
         if (!holds(setting, high, step, depth, quiet)) {
-            throw new UnfitAnswer("footing.width", "no pad of this depth up to " + widest.text()
-                + " m wide holds these loads: give another depth, a planted post, or ask an engineer");
+            throw new NoAnswer("no pad of this depth up to " + widest.text() + " m wide holds these loads: give another depth or a planted post, or ask an engineer");
         }
         while (high - low > 1) {
             long middle = (low + high) / 2;

@@ -82,20 +82,15 @@ final class ShaftFooting {
         footing.length().ifPresent(l -> Footings.above("length", 0, l.metres(), "a length above zero is needed"));
         if (footing.width().isPresent()) {
             Length typed = footing.width().get();
-            Footings.above("width", post, typed.metres(), "the footing must be wider than zero and not narrower than its post (" + millimetres(post)
-                + " mm)");
+            Footings.above("width", post, typed.metres(), "the footing must be wider than zero and not narrower than its post (" + request.words(post) + ")");
             return trace.given("b", "width of the footing across the wind", typed.metres(), "m", typed.typed());
         }
-        Known usual = tables.size("surround");
-        double width = Math.max(usual.value(), GroundTables.roundedUp(post, tables.size("depth-step").value()));
-        assumed.add(new Assumed("The concrete around the post is assumed to be " + millimetres(width) + " mm wide"
+        Known usual = request.size(tables, "surround");
+        double width = Math.max(usual.value(), GroundTables.roundedUp(post, request.size(tables, "depth-step").value()));
+        assumed.add(new Assumed("The concrete around the post is assumed to be " + request.words(width) + " wide"
             + (footing.round() ? ", round." : ", square.")));
         return trace.line("footing-width", "b", "width of the footing across the wind").from(usual.place(), usual.status())
             .reads(width > usual.value() ? "as wide as the post, rounded up" : "assumed: " + usual.how(), width, "m");
-    }
-
-    private static long millimetres(double metres) {
-        return Math.round(metres * 1000);
     }
 
     private DepthRule.Column column(Setting setting, FootLoad load, Trace trace) {
@@ -111,9 +106,13 @@ final class ShaftFooting {
 
     private double sized(Setting setting, double needed, Trace trace) {
         Known least = tables.size("least-depth");
-        Known step = tables.size("depth-step");
+        Known step = request.size(tables, "depth-step");
         double ratio = setting.rule().least(setting.width());
         double depth = GroundTables.roundedUp(Math.max(needed, Math.max(least.value(), ratio)), step.value());
+        Known deepest = tables.size("deepest");
+        if (depth > deepest.value()) {
+            throw new NoAnswer("a footing " + deepest.text() + " m deep does not hold these loads, and deeper ones are piles: a wider footing, a pad or more posts may do, or ask an engineer");
+        }
         String how = ratio > needed && ratio > least.value() ? "the least multiple of the width, rounded up"
             : least.value() > needed ? "the least embedment" : "rounded up";
         return trace.line("footing-depth", "d_f", "depth of the footing").from(step.place(), step.status()).reads(how, depth, "m");

@@ -155,8 +155,8 @@ class FenceStabilityTest {
         refused(feet(1, 25, 0.6, friction(0.4), Optional.empty(), 5, 0, -3, 0), "blocks[1].mass");
         refused(feet(1, 25, 0.6, friction(0.4), brace(0.3, 80)), "brace.lever");
         refused(feet(1, 25, 0.6, friction(0.4), brace(1.2, -80)), "brace.mass");
-        refused(staked(feet(1, 25, 0.6, friction(0.4), Optional.empty()), 0, 1), "stakes.proof-load");
-        refused(staked(feet(1, 25, 0.6, friction(0.4), Optional.empty()), 100, 0), "stakes.count");
+        refused(staked(feet(1, 25, 0.6, friction(0.4), Optional.empty()), 0, 1), "stake-proof-load");
+        refused(staked(feet(1, 25, 0.6, friction(0.4), Optional.empty()), 100, 0), "stakes-per-panel");
     }
 
     private static void refused(FenceFeet feet, String field) {

@@ -51,7 +51,7 @@ public final class GroundCases {
     }
 
     public static Request request(Footing footing, FootLoad... loads) {
-        return new Request(Optional.of(footing), List.of(loads), 1500, 0, LEVELS, GLOBAL, "en", 0.1143);
+        return new Request(Optional.of(footing), List.of(loads), 1500, 0, LEVELS, GLOBAL, "en", 0.1143, false);
     }
 
     static FootLoad load(double shear, double moment) {
