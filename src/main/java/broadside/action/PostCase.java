@@ -2,7 +2,7 @@ package broadside.action;
 
 /**
  * What the wind on the boards does to the foot of one post in one case, at the level of the code, as magnitudes. With
- * several posts torsion goes into them as a couple; one post takes it itself.
+ * several posts torsion goes into them as a couple; one post takes it itself. The force of a board lies evenly over its height.
  *
  * @param post     its number from the left, from 1
  * @param shear    N
@@ -17,11 +17,12 @@ public record PostCase(int post, String named, String state, double shear, doubl
         double[] sums = new double[4];
         for (PanelForce panel : combined.combination().panels()) {
             double share = panel.force() * (1.0 / count + (spread == 0 ? 0 : panel.side() * x / spread));
-            double power = 1;
-            for (int k = 0; k < sums.length; k++) {
-                sums[k] += share * power;
-                power *= panel.height();
-            }
+            double z = panel.height();
+            double high = panel.panel().height() * panel.panel().height();
+            sums[0] += share;
+            sums[1] += share * z;
+            sums[2] += share * (z * z + high / 12);
+            sums[3] += share * z * (z * z + high / 4);
         }
         // A value of the user's own may stand in place of the force or of the moment.
         double forces = combined.force() / combined.combination().force();

@@ -66,7 +66,7 @@ final class SiteSequence implements Item.Kinds<List<String>> {
     private static List<String> ground(Optional<Footing> footing) {
         boolean pad = footing.filter(f -> f.kind() == Footing.Kind.PAD).isPresent();
         return List.of(SERVICES, "Compare the ground in the hole with the class named here; stop if it is softer, wet, filled or sloping.",
-            pad ? "Cast or set the pad on firm, level ground at the depth named." : "Dig to the depth named with undisturbed sides; place and compact the concrete in layers.",
-            "Set the posts plumb and let the concrete harden before they are loaded.");
+            pad ? "Cast or set the pad on firm, level ground at the depth named, posts plumb; no load before it is hard."
+                : "Dig to the depth named with undisturbed sides, compact the concrete in layers, posts plumb; no load before it is hard.");
     }
 }

@@ -33,7 +33,7 @@ final class SiteSheet {
         }
         Loads loads = item.loads().get();
         List<Block> blocks = new ArrayList<>(List.of(new NewPage(), new Heading(2, "Site sheet, " + item.item().mark(), anchor + "site-sheet"),
-            new Paragraph(SheetMaker.PRELIMINARY + ". To be built only after a licensed engineer has confirmed it.", Tone.CAUTION)));
+            new Paragraph("Nothing here is built before a licensed engineer has confirmed it.", Tone.CAUTION)));
         blocks.add(new Facts("Where it stands", place(assessment.job(), item, format)));
         List<Fact> holds = new ArrayList<>();
         loads.carried().ifPresentOrElse(c -> c.parts().forEach(p -> holds.addAll(part(p, format))),
@@ -88,7 +88,7 @@ final class SiteSheet {
     }
 
     private static List<Fact> decides(Job job) {
-        return List.of(Fact.of("Before", "the local code, the authority and the engineer of record: " + job.head("engineer").map(SiteSheet::clipped).orElse("____________________")),
+        return List.of(Fact.of("Before", "the local code, the authority, the engineer of record " + job.head("engineer").map(SiteSheet::clipped).orElse("____________________")),
             Fact.of("On site", "who stops the work, name and telephone: ____________________"));
     }
 

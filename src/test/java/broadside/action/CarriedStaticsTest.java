@@ -87,14 +87,16 @@ class CarriedStaticsTest {
         double[] couples = new double[4];
         double[] scale = new double[4];
         for (PanelForce board : combined.combination().panels()) {
-            double z = board.panel().clearance() + board.panel().height() / 2;
+            double low = board.panel().clearance();
+            double top = low + board.panel().height();
             for (var zone : board.load().zones()) {
                 double f = zone.pressure() * (zone.to() - zone.from()) * board.panel().height();
                 double x = board.panel().middle() - board.panel().width() / 2 + (zone.from() + zone.to()) / 2 + board.load().shift();
                 for (int k = 0; k < 4; k++) {
-                    sums[k] += f * Math.pow(z, k);
-                    couples[k] += f * Math.pow(z, k) * x;
-                    scale[k] += f * Math.pow(z, k) * (1 + Math.abs(x));
+                    double power = (Math.pow(top, k + 1) - Math.pow(low, k + 1)) / ((k + 1) * (top - low));
+                    sums[k] += f * power;
+                    couples[k] += f * power * x;
+                    scale[k] += f * power * (1 + Math.abs(x));
                 }
             }
         }
