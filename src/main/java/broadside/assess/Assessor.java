@@ -12,6 +12,7 @@ import broadside.support.UnfitAnswer;
 import broadside.table.Edition;
 import broadside.table.OutsideTable;
 import broadside.table.Rows;
+import broadside.table.TableFormat;
 import broadside.table.TableLibrary;
 import broadside.trace.OwnValue;
 import broadside.trace.Trace;
@@ -20,6 +21,8 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.CompletionException;
 
 /** Job in, assessment out: the one door that the page, the commands and the document use. */
 public final class Assessor {
@@ -35,15 +38,25 @@ public final class Assessor {
 
     public Assessor(TableLibrary tables) {
         this.tables = tables;
+        CompletableFuture<SupportRules> supports = CompletableFuture.supplyAsync(() -> SupportRules.of(tables, new Catalogue(tables)));
         this.codes = new CodeLibrary(tables);
         Edition own = tables.edition("own-rules/1").orElseThrow();
         this.edgeOnRule = own.rows("edge-on");
         this.stackRule = own.rows("stacks");
         this.scope = new Scope(own.rows("scope"), own.rows("size-limits"));
-        this.supportRules = SupportRules.of(tables, new Catalogue(tables));
+        this.supportRules = joined(supports);
         this.about = About.of(tables.digest());
         Edition gusts = tables.edition("gust-factors/1").orElseThrow();
         this.sideBySide = new SideBySide(this, new SpeedConversion(gusts.curve("durst")), own.rows("terrain-match"), gusts.rows("gust-over-ten-minutes"));
+    }
+
+    /** The rules that were read beside the codes; a broken table is told as it is. */
+    private static SupportRules joined(CompletableFuture<SupportRules> supports) {
+        try {
+            return supports.join();
+        } catch (CompletionException e) {
+            throw e.getCause() instanceof TableFormat broken ? broken : e;
+        }
     }
 
     public CodeLibrary codes() {

@@ -3,20 +3,33 @@ package broadside.cli;
 import broadside.table.TableFormat;
 import java.io.PrintWriter;
 import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.function.Supplier;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine;
 
 /** The commands of the tool. Errors go to standard error, one line each; no stack trace. */
 @Command(name = "broadside", mixinStandardHelpOptions = true, versionProvider = VersionText.class,
-    description = "What the wind does to a flat thing that faces it: preliminary load summaries.",
-    subcommands = {ServeCommand.class, CheckCommand.class, SummaryCommand.class, VerifyCommand.class, TablesCommand.class})
+    description = "What the wind does to a flat thing that faces it: preliminary load summaries.")
 public final class Commands implements Runnable {
 
     @Option(names = "--code-tables", scope = CommandLine.ScopeType.INHERIT, paramLabel = "DIR",
         description = "a folder with more editions and overlays, such as a firm's own values")
     private Path ownTables;
+
+    private static final Map<String, Supplier<Object>> COMMANDS = new LinkedHashMap<>();
+
+    static {
+        COMMANDS.put("serve", ServeCommand::new);
+        COMMANDS.put("check", CheckCommand::new);
+        COMMANDS.put("summary", SummaryCommand::new);
+        COMMANDS.put("verify", VerifyCommand::new);
+        COMMANDS.put("tables", TablesCommand::new);
+    }
 
     /** Most lines of problems that are printed. */
     private static final int MOST_LINES = 50;
@@ -28,6 +41,13 @@ public final class Commands implements Runnable {
 
     static int run(PrintWriter errors, String... args) {
         CommandLine line = new CommandLine(new Commands());
+        // Each command costs time to describe, so only the one named is; without a name, all are, for the help.
+        List<String> named = COMMANDS.keySet().stream().filter(List.of(args)::contains).toList();
+        COMMANDS.forEach((name, command) -> {
+            if (named.isEmpty() || named.contains(name)) {
+                line.addSubcommand(name, command.get());
+            }
+        });
         line.setErr(errors);
         line.setParameterExceptionHandler((e, given) -> {
             errors.println(Terminal.plain(e.getMessage().lines().findFirst().orElse("this command line does not fit"))
@@ -48,7 +68,6 @@ public final class Commands implements Runnable {
             errors.println(Terminal.plain(e.getMessage()));
         } else {
             errors.println("the tool failed: " + e.getClass().getSimpleName() + (e.getMessage() == null ? "" : ", " + e.getMessage().lines().findFirst().orElse("")));
-if (System.getProperty("dbg") != null) e.printStackTrace();
         }
         return 2;
     }

@@ -20,10 +20,11 @@ import java.util.regex.Pattern;
  * @param headings   headings of the body
  * @param body       cells of the body as printed, row by row, without the status column
  * @param rowStatus  status of each row
+ * @param file       the file as it is
  */
 public record TableFile(String name, String title, Source source, String form, List<String> axes, String value, Between between,
                         Ends ends, String statusText, String entered, String note, List<String> headings,
-                        List<List<String>> body, List<Status> rowStatus, String digest) {
+                        List<List<String>> body, List<Status> rowStatus, byte[] file) {
 
     public TableFile {
         axes = List.copyOf(axes);
@@ -33,6 +34,11 @@ public record TableFile(String name, String title, Source source, String form, L
     }
 
     private static final Pattern NUMBER = Pattern.compile("-?\\d+(\\.\\d+)?");
+
+    /** SHA-256 of the file. */
+    public String digest() {
+        return TableReader.digest(file);
+    }
 
     Source rowSource(int row) {
         return source.with(source.place(), rowStatus.get(row));

@@ -7,10 +7,12 @@ import java.net.URI;
 import java.net.URISyntaxException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Collections;
 import java.util.Map;
 import java.util.TreeMap;
-import java.util.jar.JarFile;
 import java.util.stream.Stream;
+import java.util.zip.ZipEntry;
+import java.util.zip.ZipFile;
 
 /** Finds the files that ship with the tool, in the jar or in the folder of compiled classes. */
 public final class TableFiles {
@@ -44,9 +46,11 @@ public final class TableFiles {
 
     private static Map<String, byte[]> inJar(Path jar, String prefix) throws IOException {
         Map<String, byte[]> files = new TreeMap<>();
-        try (JarFile open = new JarFile(jar.toFile())) {
-            for (var entry : (Iterable<java.util.jar.JarEntry>) open.stream()
-                    .filter(e -> !e.isDirectory() && e.getName().startsWith(prefix))::iterator) {
+        try (ZipFile open = new ZipFile(jar.toFile())) {
+            for (ZipEntry entry : Collections.list(open.entries())) {
+                if (entry.isDirectory() || !entry.getName().startsWith(prefix)) {
+                    continue;
+                }
                 try (InputStream in = open.getInputStream(entry)) {
                     files.put(entry.getName().substring(prefix.length()), in.readAllBytes());
                 }

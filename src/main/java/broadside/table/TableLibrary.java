@@ -13,6 +13,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Properties;
 import java.util.TreeMap;
+import java.util.concurrent.CompletableFuture;
 
 /** All editions of all codes, read and checked at the start. A broken table stops the start. */
 public final class TableLibrary {
@@ -20,15 +21,16 @@ public final class TableLibrary {
     private static final String PROPERTIES = "edition.properties";
     private static final String CONSTANTS = "constants";
     private static final String BIBLIOGRAPHY = "publications.csv";
+    private static final String OWN_BIBLIOGRAPHY = "own " + BIBLIOGRAPHY;
 
     private final Map<String, Edition> editions;
     private final Map<String, Publication> publications;
-    private final String digest;
+    private final CompletableFuture<String> digest;
 
     /** A row of the bibliography. */
     public record Publication(String key, String title, String publisher, String year) { }
 
-    private TableLibrary(Map<String, Edition> editions, Map<String, Publication> publications, String digest) {
+    private TableLibrary(Map<String, Edition> editions, Map<String, Publication> publications, CompletableFuture<String> digest) {
         this.editions = editions;
         this.publications = publications;
         this.digest = digest;
@@ -51,6 +53,10 @@ public final class TableLibrary {
                 throw new TableFormat(name, 1, "a table of this name ships with the tool; use a folder of your own");
             }
         });
+        if (own.containsKey(BIBLIOGRAPHY)) {
+            files.put(OWN_BIBLIOGRAPHY, own.get(BIBLIOGRAPHY));
+        }
+        CompletableFuture<String> digest = CompletableFuture.supplyAsync(() -> digest(files));
         Map<String, Publication> publications = Bibliography.read(BIBLIOGRAPHY, shipped.get(BIBLIOGRAPHY));
         if (own.containsKey(BIBLIOGRAPHY)) {
             Bibliography.read(BIBLIOGRAPHY, own.get(BIBLIOGRAPHY)).forEach((key, row) -> {
@@ -64,10 +70,7 @@ public final class TableLibrary {
         for (String key : folders.keySet()) {
             read(key, folders, editions, publications, new ArrayList<>());
         }
-        if (own.containsKey(BIBLIOGRAPHY)) {
-            files.put("own " + BIBLIOGRAPHY, own.get(BIBLIOGRAPHY));
-        }
-        return new TableLibrary(editions, publications, digest(files));
+        return new TableLibrary(editions, publications, digest);
     }
 
     private static Map<String, Map<String, byte[]>> folders(Map<String, byte[]> files) {
@@ -76,7 +79,7 @@ public final class TableLibrary {
             int slash = name.lastIndexOf('/');
             if (slash >= 0) {
                 folders.computeIfAbsent(name.substring(0, slash), k -> new TreeMap<>()).put(name.substring(slash + 1), bytes);
-            } else if (!name.equals(BIBLIOGRAPHY)) {
+            } else if (!name.equals(BIBLIOGRAPHY) && !name.equals(OWN_BIBLIOGRAPHY)) {
                 throw new TableFormat(name, 1, "a file outside a folder of an edition");
             }
         });
@@ -180,6 +183,6 @@ public final class TableLibrary {
 
     /** Digest of all table files, so that an old document can be explained years later. */
     public String digest() {
-        return digest;
+        return digest.join();
     }
 }

@@ -38,7 +38,7 @@ public final class TableReader {
             }
         }
         List<CSVRecord> records = body(name, lines, bodyStart);
-        return assemble(name, heading, axes, records, bodyStart, digest(bytes));
+        return assemble(name, heading, axes, records, bodyStart, bytes);
     }
 
     private static int heading(String name, List<String> lines, Map<String, String> heading, List<String> axes) {
@@ -95,7 +95,7 @@ public final class TableReader {
     }
 
     private static TableFile assemble(String name, Map<String, String> heading, List<String> axes, List<CSVRecord> records,
-                                      int start, String digest) {
+                                      int start, byte[] file) {
         String statusText = heading.get("status");
         boolean byRow = statusText.equals("by row");
         List<String> headings = List.of(records.get(0).values());
@@ -134,7 +134,7 @@ public final class TableReader {
             "between must be straight line, logarithmic or steps, found \"" + heading.get("between") + "\""));
         return new TableFile(name, heading.get("title"), source(name, heading.get("source"), weakest), form, axes, heading.get("value"),
             between, Ends.of(heading.get("beyond"), name, 1), statusText, heading.get("entered"), heading.get("note"),
-            headings.subList(0, columns), body, statuses, digest);
+            headings.subList(0, columns), body, statuses, file);
     }
 
     private static Status status(String name, int line, String word) {
