@@ -1,5 +1,6 @@
 package broadside;
 
+import broadside.assess.Assessment;
 import broadside.assess.Job;
 import broadside.report.Attachment;
 import broadside.report.Paper;
@@ -47,12 +48,14 @@ public final class Benchmark {
         everyCodeAndKind();
         warm("one item by every code side by side, warm", 3, 1000, () -> AllJobs.TOOL.assessor().sideBySide(job, job.items().get(0)));
         sizing(job);
-        pdf(job);
+        pdf("PDF of its loads, assessment and sheet included", "entrance-sign.json", 10, 10, () -> AllJobs.TOOL.assessor().loadsOnly(job));
+        pdf("PDF of that sign, post and footing sized", "entrance-sign.json", 25, 20, () -> AllJobs.assess(job));
         if (!Files.exists(JAR)) {
             System.out.println("no " + JAR + ": run mvn -q -DskipTests package for the rows of whole processes");
             return;
         }
-        row("check of one job, whole process", times(5, Benchmark::checkProcess), 700, "ms");
+        row("check of one job, loads only, whole process", times(9, () -> check("examples/old-post-sign.json")), 700, "ms");
+        row("check of one job, post and footing sized, whole process", times(9, () -> check("examples/entrance-sign.json")), 1000, "ms");
         row("first page after start, plain JVM", times(5, Benchmark::firstPage), 2000, "ms");
     }
 
@@ -105,22 +108,22 @@ public final class Benchmark {
         warm("job with ten signs, posts and footings sized, warm", 30, 500, () -> AllJobs.assess(signs));
     }
 
-    private static void pdf(Job job) throws Exception {
+    private static void pdf(String what, String file, double millis, double megabytes, Callable<Assessment> assessed) throws Exception {
         PdfWriter writer = new PdfWriter();
-        Attachment attachment = new Attachment("job.json", "the job", AllJobs.files().get("entrance-sign.json"));
+        Attachment attachment = new Attachment("job.json", "the job", AllJobs.files().get(file));
         Callable<Integer> task = () -> {
             ByteArrayOutputStream out = new ByteArrayOutputStream(200_000);
-            Sheet sheet = SheetMaker.of(AllJobs.assess(job), "2026-12-01");
+            Sheet sheet = SheetMaker.of(assessed.call(), "2026-12-01");
             writer.write(sheet, Paper.A4, attachment, out);
             return out.size();
         };
-        warm("PDF of that job, assessment and sheet included, warm", 10, 1000, task);
+        warm(what + ", warm", millis, 1000, task);
         ThreadMXBean threads = (ThreadMXBean) ManagementFactory.getThreadMXBean();
         long before = threads.getCurrentThreadAllocatedBytes();
         for (int i = 0; i < 20; i++) {
             task.call();
         }
-        row("  allocated for it", (threads.getCurrentThreadAllocatedBytes() - before) / 20.0 / 1e6, 10, "MB");
+        row("  allocated for it", (threads.getCurrentThreadAllocatedBytes() - before) / 20.0 / 1e6, megabytes, "MB");
     }
 
     private static void warm(String what, double most, int times, Callable<?> task) throws Exception {
@@ -142,9 +145,9 @@ public final class Benchmark {
         return millis[times / 2];
     }
 
-    private static double checkProcess() throws IOException, InterruptedException {
+    private static double check(String job) throws IOException, InterruptedException {
         long start = System.nanoTime();
-        Process process = java("check", "examples/entrance-sign.json").redirectOutput(ProcessBuilder.Redirect.DISCARD).start();
+        Process process = java("check", job).redirectOutput(ProcessBuilder.Redirect.DISCARD).start();
         process.waitFor();
         return (System.nanoTime() - start) / 1e6;
     }
