@@ -46,21 +46,6 @@ public final class BromsClay implements DepthRule {
     }
 
     @Override
-    public String shearSymbol() {
-        return "V_s";
-    }
-
-    @Override
-    public String momentSymbol() {
-        return "M_s";
-    }
-
-    @Override
-    public boolean strength() {
-        return false;
-    }
-
-    @Override
     public double needed(Column c, Trace trace) {
         double v = BromsSand.factoredShear(factor, c, trace);
         double m = BromsSand.factoredMoment(factor, c, trace);

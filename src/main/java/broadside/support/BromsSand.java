@@ -65,21 +65,6 @@ public final class BromsSand implements DepthRule {
     }
 
     @Override
-    public String shearSymbol() {
-        return "V_s";
-    }
-
-    @Override
-    public String momentSymbol() {
-        return "M_s";
-    }
-
-    @Override
-    public boolean strength() {
-        return false;
-    }
-
-    @Override
     public double needed(Column c, Trace trace) {
         Trace quiet = trace.quiet();
         double v = factoredShear(factor, c, trace);

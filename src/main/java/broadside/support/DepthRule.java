@@ -22,13 +22,19 @@ public interface DepthRule {
     Status status();
 
     /** Symbol of the shear at the level of the rule. */
-    String shearSymbol();
+    default String shearSymbol() {
+        return "V_s";
+    }
 
     /** Symbol of the moment at the ground at the level of the rule. */
-    String momentSymbol();
+    default String momentSymbol() {
+        return "M_s";
+    }
 
     /** Whether it takes loads at the level of strength; otherwise those of service. */
-    boolean strength();
+    default boolean strength() {
+        return false;
+    }
 
     /** Depth that is needed, m; recorded as "embedment-depth". */
     double needed(Column column, Trace trace);

@@ -54,7 +54,7 @@ final class En1993Posts implements PostRule {
 
     @Override
     public List<String> notes() {
-        return List.of("The cross-section at the foot is checked. Buckling of the post as a column, welds, holes and the base are not.");
+        return List.of(STEEL_NOTE);
     }
 
     @Override

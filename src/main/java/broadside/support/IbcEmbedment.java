@@ -90,11 +90,6 @@ public final class IbcEmbedment implements DepthRule {
     }
 
     @Override
-    public boolean strength() {
-        return false;
-    }
-
-    @Override
     public double needed(Column column, Trace trace) {
         Trace quiet = trace.quiet();
         double root = Root.depth(d -> required(column, d, "d_t", quiet) - d);

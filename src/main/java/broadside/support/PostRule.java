@@ -6,6 +6,9 @@ import java.util.List;
 /** How a code checks the cross-section of a post at its foot. The post as a column is not checked: signs weigh little. */
 public interface PostRule {
 
+    /** What no rule for steel posts here covers. */
+    String STEEL_NOTE = "The cross-section at the foot is checked. Buckling of the post as a column, welds, holes and the base are not.";
+
     /** The rule as it is printed on the sheet. */
     String title();
 
