@@ -7,7 +7,6 @@ import broadside.assess.Carried.Result;
 import broadside.panel.Footing;
 import broadside.panel.PostSection;
 import broadside.panel.PostType;
-import broadside.quantity.Length;
 import broadside.quantity.Units;
 import broadside.support.Assumed;
 import broadside.support.Catalogue;
@@ -165,9 +164,13 @@ final class PostCarrier {
         OwnDrag on = own(section.outline());
         double aside = aside(levels, sheet);
         List<FootLoad> loads = new ArrayList<>();
+        double narrow = narrow();
         for (PostLoad load : demands.loads()) {
+            // Rules for pads look along the wind on the face; a pad that is narrower across gets more of the wind along the face instead.
             boolean along = load.named().equals(PostDemands.ALONG);
-            loads.add(new FootLoad(load.named(), (along ? load.weakShear() : load.shear()) + on.force(), (along ? load.weakMoment() : load.moment()) + on.moment() + aside));
+            double r = along ? narrow : 1;
+            String named = r > 1 ? load.named() + ", times the width of the pad over its length" : load.named();
+            loads.add(new FootLoad(named, r * ((along ? load.weakShear() : load.shear()) + on.force()), r * ((along ? load.weakMoment() : load.moment()) + on.moment()) + aside));
         }
         double weight = demands.given() + Weights.newtons(section.mass() * demands.top());
         FootingResult found = by.rules().footings().hold(new Footings.Request(footing, loads, weight, demands.torsion(), levels, by.stability(), by.route(),
@@ -180,6 +183,11 @@ final class PostCarrier {
             Optional.empty());
     }
 
+    /** Width of a typed pad over its length, at least 1. */
+    private double narrow() {
+        return footing.flatMap(f -> f.width().flatMap(w -> f.length().map(l -> Math.max(1, w.metres() / l.metres())))).orElse(1.0);
+    }
+
     /**
      * The permanent moment of boards that hang to one side, N m at the level of the wind: it counts in the direction of the wind, over the least factor of the
      * levels, so that none lessens it, and more on a pad that is narrower across.
@@ -189,14 +197,12 @@ final class PostCarrier {
         if (moment == 0) {
             return 0;
         }
-        double width = footing.filter(f -> f.length().isPresent()).flatMap(Footing::width).map(Length::metres).orElse(1.0);
-        double length = footing.filter(f -> f.width().isPresent()).flatMap(Footing::length).map(Length::metres).orElse(width);
         double m = sheet.line("footing-weight-moment/boards", "M_{G1}", "moment of boards that hang to one side").from("weight of the boards", Status.DERIVED)
             .reads("sum of weight and distance from the post", moment, "N m");
         double k = sheet.line("footing-weight-level", "k_G", "the least of 1 and the factors of the levels").from(levels.place(), levels.status())
             .reads("so that no factor on wind lessens a weight", Math.min(1, Math.min(levels.service(), levels.strength())), "1");
         double r = sheet.line("footing-weight-ratio", "r_G", "width of the pad over its length, at least 1").from("geometry", Status.DERIVED)
-            .reads("as typed; 1 for a square or a shaft", Math.max(1, width / length), "1");
+            .reads("as typed; 1 for a square or a shaft", narrow(), "1");
         return sheet.line("footing-weight-moment", "M_{G2}", "the same, as it counts with the wind").in("r_G", r).in("M_{G1}", m, "N m").in("k_G", k)
             .from("added to the moment of the wind: on the safe side of both directions together", Status.DERIVED).gives("r_G M_{G1} / k_G", r * m / k, "N m");
     }
