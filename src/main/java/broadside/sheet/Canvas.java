@@ -16,6 +16,8 @@ final class Canvas {
     static final double THIN = 0.7;
     static final double THICK = 1.4;
     static final double SMALL = 9;
+    /** Base line of a text that clears the strokes below the ground line. */
+    private static final double BELOW_GROUND = 17;
 
     private final List<Shape> shapes;
     private final double originX;
@@ -174,7 +176,8 @@ final class Canvas {
             double away = Math.max(Math.abs(end - ground), width(text)) / 2;
             turnedText(atX + 11, end < ground ? ground - away : ground + away, text);
         } else {
-            text(atX + 4, (ground + end) / 2 + 3, text, Anchor.START, Ink.BLACK);
+            double middle = (ground + end) / 2 + 3;
+            text(atX + 4, end > ground ? Math.max(middle, ground + BELOW_GROUND) : middle, text, Anchor.START, Ink.BLACK);
         }
     }
 

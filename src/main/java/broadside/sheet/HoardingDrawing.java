@@ -107,13 +107,14 @@ final class HoardingDrawing {
         double ground = startY + 26 + top * scale;
         Canvas side = front.view(ItemDrawing.WIDTH / 2, ground, scale);
         double[][] panels = {{hoarding.clearance().metres(), hoarding.height().metres(), 0}};
-        SideView view = new SideView(side, ItemDrawing.WIDTH / 2 - 110, ItemDrawing.WIDTH / 2 + 110, top, 0);
+        double behind = hoarding.held().kentledge().flatMap(Kentledge::lever).map(l -> foot(side, l.metres()) + 6 / scale).orElse(0.0);
+        double dim = Math.max(ItemDrawing.WIDTH / 2 + 80, behind == 0 ? 0 : side.x(behind) + 74);
+        SideView view = new SideView(side, ItemDrawing.WIDTH / 2 - 110, dim + 30, top, behind);
         hoarding.held().kentledge().ifPresent(k -> braced(side, k));
         view.draw(panels);
         FootingDrawing.of(loads).ifPresent(f -> f.draw(side, format));
         loads.map(l -> l.governs("base-moment")).ifPresent(c -> view.force(0, c.height(), "F " + format.force(c.force()) + " in all", ItemDrawing.otherCase(loads.get()),
             format.length(c.height())));
-        double dim = ItemDrawing.WIDTH / 2 + 80;
         side.help(side.x(0.06), side.y(top), dim + 4, side.y(top));
         side.line(dim, side.y(hoarding.clearance().metres()), dim, side.y(top), Canvas.THIN, Ink.BLACK, false);
         side.text(dim + 4, (side.y(hoarding.clearance().metres()) + side.y(top)) / 2, hoarding.height().typed(), Anchor.START, Ink.BLACK);
@@ -126,10 +127,15 @@ final class HoardingDrawing {
         return new Drawing(ItemDrawing.WIDTH, ground + Math.max(14, FootingDrawing.of(loads).map(f -> f.room(scale, format)).orElse(0.0)), front.shapes());
     }
 
+    /** Where the brace stands, m: a long one is drawn shorter. */
+    private static double foot(Canvas side, double lever) {
+        return Math.min(lever, 100 / side.scale());
+    }
+
     /** The raking brace, the ballast on its foot, and the two tipping edges. */
     private void braced(Canvas side, Kentledge kentledge) {
         kentledge.lever().ifPresent(lever -> {
-            double at = Math.min(lever.metres(), 100 / side.scale());
+            double at = foot(side, lever.metres());
             side.line(side.x(0), side.y(top * 0.9), side.x(at), side.y(0), Canvas.THICK, Ink.BLACK, false);
             side.box(at - 6 / side.scale(), 0, 12 / side.scale(), 10 / side.scale(), Canvas.THICK, Fill.PAPER);
             side.tippingEdge(0);
