@@ -8,6 +8,9 @@ import broadside.assess.Loads;
 import broadside.assess.Note;
 import broadside.panel.PostSign;
 import broadside.quantity.Dimension;
+import broadside.quantity.Period;
+import broadside.quantity.Rounding;
+import broadside.quantity.Show;
 import broadside.sheet.Block.Answer;
 import broadside.sheet.Block.Fact;
 import broadside.sheet.Block.Heading;
@@ -88,9 +91,18 @@ final class ItemBlocks {
         Site site = assessment.job().site();
         String unknown = (site.ground().unknown().contains(Site.Unknown.TERRAIN) ? "; the terrain was not known, the smoothest is taken" : "")
             + (site.ground().shapeUnknown() ? "; hills were not known, the worst value of the code is taken" : "");
-        return "Wind: " + Format.speed(site.basicSpeed()) + ", " + site.averaging().words() + (item.sheet().find("probability-factor").isPresent() ? ", " + site.returnPeriod().orElseThrow().typed() : "")
+        return "Wind: " + Format.speed(site.basicSpeed()) + ", " + site.averaging().words() + returns(site, item)
             + "; terrain " + site.ground().terrain() + "; velocity pressure " + format.nearest(loads.velocity().pressure(), Dimension.PRESSURE) + " at "
             + format.length(loads.velocity().height()) + ", " + loads.level().name() + unknown + ".";
+    }
+
+    /** The return period where it counts: as typed, or as the code's rule for a short stay gives it. */
+    private static String returns(Site site, ItemResult item) {
+        if (item.sheet().find("probability-factor").isEmpty()) {
+            return "";
+        }
+        return ", " + site.returnPeriod().map(Period::typed).or(() -> item.sheet().find("return-period").map(t -> Show.number(t.value(), 3, Rounding.NEAREST) + " years"))
+            .orElse("other return period");
     }
 
     /** Which cases govern posts and torsion, where they are others than the one that governs the moment. */
