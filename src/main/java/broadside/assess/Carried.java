@@ -25,17 +25,24 @@ public record Carried(List<Part> parts) {
      * @param checks   demand against capacity
      * @param choices  sections that were tried, the chosen one among them
      * @param assumed  values that someone must confirm
+     * @param warnings what an engineer must settle before anything is built, whatever the shares say
      * @param remarks  what was found or left out, in words
      * @param refused  why no check is given at all; empty for none
      */
-    public record Part(String key, String title, List<Result> results, List<Check> checks, List<Choice> choices, List<String> assumed, List<String> remarks,
+    public record Part(String key, String title, List<Result> results, List<Check> checks, List<Choice> choices, List<String> assumed, List<String> warnings, List<String> remarks,
                        Optional<String> refused) {
         public Part {
             results = List.copyOf(results);
             checks = List.copyOf(checks);
             choices = List.copyOf(choices);
             assumed = List.copyOf(assumed);
+            warnings = List.copyOf(warnings);
             remarks = List.copyOf(remarks);
+        }
+
+        /** A part of which nothing could be found. */
+        static Part refused(String key, String title, String why) {
+            return new Part(key, title, List.of(), List.of(), List.of(), List.of(), List.of(), List.of(), Optional.of(why));
         }
 
         /** The check with the greatest share. */

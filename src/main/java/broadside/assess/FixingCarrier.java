@@ -47,7 +47,7 @@ final class FixingCarrier {
         if (facade.depth().metres() == 0) {
             assumed.add("The thickness of the panel was not given: no wind on its edge is counted.");
         }
-        return new Carried(List.of(part(pulls, fixings, assumed)));
+        return new Carried(List.of(part(pulls, fixings, assumed, "")));
     }
 
     /** The greatest suction on the area of one fixing, from the edge nearest to the corner: small areas get more by most codes. Pa, recorded as p_0. */
@@ -88,18 +88,30 @@ final class FixingCarrier {
         BracketFixings.BladeLoad load = new BracketFixings.BladeLoad(new Check.In("W_n", normal), new Check.In("W_e", along),
             Optional.of(new Check.In("M_n", moment)), sign.panels().get(0).middle(), sign.mass());
         FixingPulls pulls = by.rules().brackets().assess(fixings, sign.brackets(), load, sheet);
-        return new Carried(List.of(part(pulls, fixings, pulls.assumptions())));
+        List<String> assumed = new ArrayList<>(pulls.assumptions());
+        if (sign.gap().metres() == 0) {
+            assumed.add("No gap between wall and blade was given: none is counted, and a gap pulls harder.");
+        }
+        return new Carried(List.of(part(pulls, fixings, assumed, " of each bracket")));
     }
 
-    private static Part part(FixingPulls pulls, Fixings fixings, List<String> assumed) {
+    private static Part part(FixingPulls pulls, Fixings fixings, List<String> assumed, String each) {
         List<Result> results = new ArrayList<>();
-        pulls.tension().ifPresentOrElse(t -> results.add(Result.of("pull", "Pull on the hardest fixing, allowable stress", t, "N")),
-            () -> results.add(Result.words("pull", "Pull on the hardest fixing", "not found: the fixings give no couple")));
-        results.add(Result.of("shear", "Shear of the hardest fixing, allowable stress", pulls.shear(), "N"));
-        results.add(Result.words("fixings", "Fixings", fixings.columns() + " by " + fixings.rows()));
+        List<String> warnings = new ArrayList<>();
+        pulls.tension().ifPresentOrElse(t -> results.add(Result.of("pull", "Each fixing must hold a pull, without factors, of", t, "N")),
+            () -> warnings.add("The fixings give no couple for the moment that turns them: their pull is not found, and they are NOT enough by themselves."));
+        results.add(Result.of("shear", "Each fixing must hold a shear, without factors, of", pulls.shear(), "N"));
+        results.add(Result.words("fixings", "Fixings" + each, fixings.columns() + (fixings.columns() == 1 ? " column by " : " columns by ") + fixings.rows() + (fixings.rows() == 1 ? " row" : " rows")
+            + fixings.horizontalPitch().map(p -> ", columns " + p.typed() + " apart").orElse("") + fixings.verticalPitch().map(p -> ", rows " + p.typed() + " apart").orElse("")));
+        results.add(Result.words("allowable", "Allowable loads of one fixing, as typed", fixings.tension().map(t -> t.typed() + " pull").orElse("pull not given") + ", "
+            + fixings.shear().map(v -> v.typed() + " shear").orElse("shear not given")));
+        if (fixings.tension().isEmpty() || fixings.shear().isEmpty()) {
+            warnings.add("The allowable " + (fixings.tension().isPresent() ? "shear" : fixings.shear().isPresent() ? "pull" : "pull and shear")
+                + " of a fixing in this wall was not given: that part is not checked.");
+        }
         List<String> remarks = new ArrayList<>(pulls.remarks());
-        remarks.add("The wall and the anchors in it are not checked: a competent person tests them by pulling.");
-        return new Part("fixings", "Fixings", results, pulls.checks(), List.of(), assumed, remarks, Optional.empty());
+        remarks.add("The wall and the anchors in it are not checked, nor the bending of fixings over a gap: a competent person tests them by pulling.");
+        return new Part("fixings", "Fixings", results, pulls.checks(), List.of(), assumed, warnings, remarks, Optional.empty());
     }
 
     private FixingCarrier() { }

@@ -92,21 +92,26 @@ final class ItemLoads implements Item.Kinds<Loads> {
         List<PostAction> posts = hoarding.spacing().map(spacing -> HoardingPosts.of(hoarding, spacing.metres(), panels, shut(hoarding),
             code.symbols(), sheet)).orElse(List.of());
         EdgeOn edgeOn = edgeOn(hoarding.panels(), i -> 0);
-        Optional<Carried> carried = posts.isEmpty() ? Optional.empty() : carriers.map(c -> hoarding(hoarding, posts, edgeOn, c));
+        Optional<Carried> carried = carriers.flatMap(c -> hoarding(hoarding, posts, edgeOn, c));
         return new Loads(velocity(hoarding.panels()), actions.cases(), governing(actions.cases()),
             new Loads.Supports(posts, Optional.empty(), List.of(), posts.isEmpty() ? List.of() : Balances.hoarding(hoarding, panels), carried),
             Optional.of(edgeOn), code.level(job.site()), 0, Foot.GROUND);
     }
 
-    private Carried hoarding(Hoarding hoarding, List<PostAction> posts, EdgeOn edgeOn, Carriers by) {
-        if (hoarding.held().kentledge().isPresent()) {
-            return FenceCarrier.hoarding(hoarding, hoarding.held().kentledge().get(), by, sheet);
+    private Optional<Carried> hoarding(Hoarding hoarding, List<PostAction> posts, EdgeOn edgeOn, Carriers by) {
+        boolean feet = job.remark(hoarding.mark(), "held-by").filter("its own feet"::equals).isPresent();
+        if (hoarding.held().kentledge().isPresent() || feet && hoarding.held().footing().isEmpty()) {
+            return Optional.of(hoarding.held().kentledge().isEmpty() || posts.isEmpty() ? FenceCarrier.refused("it stands on its own feet: the distance between its posts and the distance from "
+                + "the face to the ballast are needed. Loads only.") : FenceCarrier.hoarding(hoarding, hoarding.held().kentledge().get(), by, sheet));
+        }
+        if (posts.isEmpty()) {
+            return Optional.empty();
         }
         PostAction worst = posts.stream().max(Comparator.comparingDouble(PostAction::moment)).orElseThrow();
         PostDemands demands = PostDemands.of(hoarding, worst, edgeOn, posts.size(), by.rules().own().number("board-mass", "value"), sheet);
         PostCarrier carrier = new PostCarrier(by, hoarding.held().posts(), hoarding.held().footing(), demands, outline -> PostDrag.NONE);
         WindLevels levels = by.levels(sheet);
-        return carrier.carry(carrier.choose(levels, sheet.quiet()), levels, sheet);
+        return Optional.of(carrier.carry(carrier.choose(levels, sheet.quiet()), levels, sheet));
     }
 
     /** The whole wall while its gates are shut. */

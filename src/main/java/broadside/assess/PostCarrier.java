@@ -7,6 +7,7 @@ import broadside.assess.Carried.Result;
 import broadside.panel.Footing;
 import broadside.panel.PostSection;
 import broadside.panel.PostType;
+import broadside.quantity.Show;
 import broadside.quantity.Units;
 import broadside.support.Assumed;
 import broadside.support.Catalogue;
@@ -117,7 +118,7 @@ final class PostCarrier {
     /** Checks what was chosen, records it, and goes on down into the ground. */
     Carried carry(Decision decided, WindLevels levels, Trace sheet) {
         if (decided.chosen().isEmpty()) {
-            return new Carried(List.of(refused("posts", "Posts", decided.why())));
+            return new Carried(List.of(Part.refused("posts", "Posts", decided.why())));
         }
         Chosen chosen = decided.chosen().get();
         List<Part> parts = new ArrayList<>();
@@ -129,19 +130,15 @@ final class PostCarrier {
                 parts.add(footing(chosen.section(), levels, sheet));
             }
         } catch (NoAnswer e) {
-            parts.add(parts.isEmpty() ? refused("posts", "Posts", e.getMessage() + ". Loads only.") : refused("footing", "Footing of each post", e.getMessage() + "."));
+            parts.add(parts.isEmpty() ? Part.refused("posts", "Posts", e.getMessage() + ". Loads only.") : Part.refused("footing", "Footing of each post", e.getMessage() + "."));
         }
         return new Carried(parts);
-    }
-
-    private static Part refused(String key, String title, String why) {
-        return new Part(key, title, List.of(), List.of(), List.of(), List.of(), List.of(), Optional.of(why));
     }
 
     private Part posts(Chosen chosen, PostDesign.Result result) {
         Section section = chosen.section();
         List<Result> results = new ArrayList<>(List.of(
-            Result.words("section", "Post", section.designation() + ", " + chosen.grade().name() + (chosen.typed() ? "" : ", chosen")),
+            Result.words("section", "Post", section.designation() + ", " + chosen.grade().name() + (chosen.typed() ? "" : ", chosen") + along(section)),
             Result.of("mass", "Mass of a post along its length", section.mass(), "kg/m"), Result.words("rule", "Rule for the post", result.title()),
             Result.words("limit", "Limit on the deflection", by.rules().posts().deflection().place(result.limit()))));
         List<String> assumed = new ArrayList<>(demands.assumed());
@@ -151,8 +148,14 @@ final class PostCarrier {
         List<String> remarks = new ArrayList<>(result.notes());
         remarks.add("The post is taken as held fast at the ground; what the footing turns is not in the deflection. Joints, welds, base plates and the fixing of the boards are not checked.");
         Optional<String> refused = result.dynamic() ? Optional.of("the natural frequency is below 1 Hz: it swings in gusts, which no rule here covers. " + ItemResult.OUTSIDE + ".") : Optional.empty();
-        return new Part("posts", "Posts", results, result.dynamic() ? List.of() : result.checks(), chosen.candidates().stream().map(c -> choice(c, section)).toList(), assumed, remarks,
+        return new Part("posts", "Posts", results, result.dynamic() ? List.of() : result.checks(), chosen.candidates().stream().map(c -> choice(c, section)).toList(), assumed, List.of(), remarks,
             refused);
+    }
+
+    /** Which side of a section whose sides differ lies along the wind. */
+    private String along(Section section) {
+        return section.depth() == section.width() ? "" : ", " + (by.job().units() == Units.US ? Show.feetInches(section.depth()) : Math.round(section.depth() * 1000) + " mm")
+            + " along the wind";
     }
 
     private static Choice choice(PostDesign.Candidate candidate, Section chosen) {
@@ -174,12 +177,13 @@ final class PostCarrier {
         }
         double weight = demands.given() + Weights.newtons(section.mass() * demands.top());
         FootingResult found = by.rules().footings().hold(new Footings.Request(footing, loads, weight, demands.torsion(), levels, by.stability(), by.route(),
-            section.width(), by.job().units() == Units.US), sheet);
+            Math.max(section.width(), section.depth()), by.job().units() == Units.US), sheet);
         List<String> remarks = new ArrayList<>(found.remarks());
         if (aside > 0) {
             remarks.add("The permanent moment of boards that hang to one side counts as if it acted with the wind, on the safe side.");
         }
-        return new Part("footing", "Footing of each post", results(found), found.checks(), List.of(), found.assumed().stream().map(Assumed::text).toList(), remarks,
+        return new Part("footing", "Footing of each post", results(found), found.checks(), List.of(), found.assumed().stream().filter(a -> !a.warns()).map(Assumed::text).toList(),
+            found.assumed().stream().filter(Assumed::warns).map(Assumed::text).toList(), remarks,
             Optional.empty());
     }
 
@@ -216,6 +220,7 @@ final class PostCarrier {
         if (pad) {
             results.add(Result.of("length", "Length across the wind", found.length(), "m"));
         }
+        footing.flatMap(f -> f.soil().ground()).ifPresent(g -> results.add(Result.words("ground", "Ground, as typed", g)));
         results.add(Result.of("concrete", "Concrete, the whole of the hole", found.concrete(), "m³"));
         results.add(Result.words("rule", "Rule for the ground", found.rule()));
         if (pad) {

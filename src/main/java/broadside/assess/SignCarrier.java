@@ -45,6 +45,10 @@ final class SignCarrier {
     }
 
     Carried carried() {
+        double thick = decided.chosen().map(c -> Math.max(c.section().width(), c.section().depth())).orElse(0.0);
+        if (typed.posts().spacing().filter(s -> typed.posts().count() > 1 && s.metres() < thick).isPresent()) {
+            return new Carried(List.of(Carried.Part.refused("posts", "Posts", "at that spacing the posts that are needed would overlap: set them farther apart, or use one post. Loads only.")));
+        }
         return carrier.carry(decided, levels, loads.sheet());
     }
 }

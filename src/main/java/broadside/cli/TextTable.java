@@ -29,6 +29,10 @@ final class TextTable {
             answer.lines().forEach(f -> out.println("  " + f.label() + ": " + f.value() + (f.remark().isEmpty() ? "" : "; " + f.remark())));
         } else if (block instanceof Block.Table table) {
             table(table, out);
+        } else if (block instanceof Block.Facts facts) {
+            out.println("");
+            out.println("  " + facts.caption());
+            facts.facts().forEach(f -> out.println("  " + f.label() + ": " + f.value()));
         } else if (block instanceof Block.Notes notes) {
             notes.items().forEach(n -> out.println("  - " + n));
         } else if (block instanceof Block.Paragraph paragraph) {

@@ -61,7 +61,7 @@ final class SupportReader {
         Optional<Double> mu = values.number("friction");
         mu.filter(m -> !(m > 0)).ifPresent(m -> problem(values, "friction", "must be above 0, like 0.3"));
         mu.filter(m -> m > 1 && values.text("friction-reason").isEmpty()).ifPresent(m -> problem(values, "friction", "is above 1, which is rare: "
-            + (values.path().endsWith("footing") ? "at most 1 fits here" : "give friction-reason beside it, or a value up to 1")));
+            + (values.path().endsWith("footing") ? "at most 1 fits here" : "say beside it why it may be above 1 (friction-reason), or give a value up to 1")));
         return mu;
     }
 
@@ -71,18 +71,25 @@ final class SupportReader {
 
     /** Ballast of a hoarding. */
     Optional<Kentledge> kentledge(Values item) {
-        return item.object("ballast").map(values -> new Kentledge(above(values, "mass", Mass.class), sizes.size(values, "lever"), mass(values, "front-mass"),
+        return item.object("ballast").map(values -> new Kentledge(above(values, "mass", Mass.class), near(values, "lever", 20), mass(values, "front-mass"),
             mass(values, "face-mass"), surface(values)));
     }
 
     /** What holds each panel of a fence. */
     FenceFeet feet(Values item) {
         List<FenceFeet.Block> blocks = item.list("blocks").stream().flatMap(b -> mass(b, "mass").flatMap(m -> lever(b).map(l -> new FenceFeet.Block(m, l))).stream()).toList();
-        Optional<FenceFeet.Brace> brace = item.object("brace").flatMap(b -> mass(b, "mass").flatMap(m -> sizes.size(b, "lever").map(l -> new FenceFeet.Brace(l, m))));
+        Optional<FenceFeet.Brace> brace = item.object("brace").flatMap(b -> mass(b, "mass").flatMap(m -> near(b, "lever", 20).map(l -> new FenceFeet.Brace(l, m))));
         Optional<Integer> stakes = item.whole("stakes-per-panel");
         stakes.filter(n -> n < 1 || n > 20).ifPresent(n -> problem(item, "stakes-per-panel", "must lie between 1 and 20"));
-        return new FenceFeet(mass(item, "panel-mass"), mass(item, "foot-mass"), sizes.size(item, "foot-length"), blocks, brace, surface(item),
+        return new FenceFeet(mass(item, "panel-mass"), mass(item, "foot-mass"), near(item, "foot-length", 5), blocks, brace, surface(item),
             new FenceFeet.Stakes(item.text("stakes"), above(item, "stake-proof-load", Force.class), stakes));
+    }
+
+    /** A length of a few metres at most: more is a slip of a unit. */
+    private Optional<Length> near(Values values, String name, int most) {
+        Optional<Length> found = sizes.size(values, name);
+        found.filter(l -> l.metres() > most).ifPresent(l -> problem(values, name, "must not be above " + most + " m; \"" + l.typed() + "\" is. Millimetres are typed like \"650 mm\""));
+        return found;
     }
 
     /** A block may lie on either side of the fence. */

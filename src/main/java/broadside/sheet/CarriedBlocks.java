@@ -15,9 +15,13 @@ import broadside.sheet.Block.Tone;
 import broadside.support.Check;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /** What carries an item: what it is, demand against capacity, what was tried, what must be confirmed. */
 final class CarriedBlocks {
+
+    /** What stands before a warning, whatever the shares say. */
+    static final String WARNED = "an engineer first";
 
     static List<Block> of(Carried carried, Format format, String anchor, int level) {
         List<Block> blocks = new ArrayList<>();
@@ -35,6 +39,7 @@ final class CarriedBlocks {
         if (!part.results().isEmpty()) {
             List<Fact> facts = new ArrayList<>();
             part.results().forEach(r -> facts.add(Fact.of(r.label(), value(r, format))));
+            part.warnings().forEach(w -> facts.add(new Fact(WARNED, w, "", true)));
             part.assumed().forEach(a -> facts.add(new Fact("assumed, to be confirmed", a, "", true)));
             blocks.add(new Facts(part.title(), facts));
         }
@@ -57,12 +62,12 @@ final class CarriedBlocks {
         double most = part.checks().stream().mapToDouble(Check::utilisation).max().orElse(0);
         for (Check check : part.checks()) {
             boolean governs = check.utilisation() == most;
+            List<String> pair = format.pair(check.demand(), check.capacity(), check.unit());
             String rule = check.rule() + "; " + check.status().shown();
             if (!rules.contains(rule)) {
                 rules.add(rule);
             }
-            rows.add(new Row(List.of(check.name(), ofCase(check.named()), format.amount(check.demand(), check.unit()), format.capacity(check.capacity(), check.unit()),
-                share(check.utilisation()), (check.passes() ? "met" : "NOT met") + (governs ? ", governs" : ""), Integer.toString(rules.indexOf(rule) + 1)), governs));
+            rows.add(new Row(List.of(check.name(), ofCase(check.named()), pair.get(0), pair.get(1), share(check.utilisation()), (check.passes() ? "met" : "NOT met") + (governs ? ", governs" : ""), Integer.toString(rules.indexOf(rule) + 1)), governs));
         }
         List<String> told = new ArrayList<>();
         rules.forEach(rule -> told.add("Rule " + (told.size() + 1) + ": " + rule));
@@ -95,20 +100,30 @@ final class CarriedBlocks {
         return result.unit().isEmpty() ? result.text() : format.amount(result.value(), result.unit());
     }
 
-    /** The whole of it in one line for the answer: what was found part by part, and the greatest share. */
+    /** The whole of it in one line for the answer: what was found part by part, whether it is enough, and the greatest share. */
     static Fact answer(Carried carried, Format format) {
-        List<String> found = new ArrayList<>();
-        for (Carried.Part part : carried.parts()) {
-            if (part.refused().isEmpty() && !part.results().isEmpty()) {
-                Carried.Result first = part.results().get(0);
-                found.add((first.unit().isEmpty() ? "" : first.label() + " ") + value(first, format));
-            }
-        }
-        String refused = carried.parts().stream().flatMap(p -> p.refused().stream()).findFirst().orElse("");
+        String found = String.join("; ", carried.parts().stream().filter(p -> p.refused().isEmpty() && !p.results().isEmpty()).map(p -> brief(p, format)).toList());
+        String refused = String.join(" ", carried.parts().stream().flatMap(p -> p.refused().stream().map(why -> p.title() + ": " + why)).toList());
+        List<String> warnings = carried.parts().stream().flatMap(p -> p.warnings().stream()).toList();
         String worst = carried.checks().stream().reduce((a, b) -> b.utilisation() > a.utilisation() ? b : a)
-            .map(c -> (c.passes() ? "greatest share " : "NOT ENOUGH: share ") + share(c.utilisation()) + ", " + c.name()).orElse("no check: loads only");
-        return Fact.of("What would carry it", refused.isEmpty() ? String.join("; ", found) : "not pre-sized", refused.isEmpty()
-            ? worst + "; pre-sizing for an engineer's review" : refused);
+            .map(c -> (c.passes() ? (warnings.isEmpty() ? "every" : "Otherwise every") + " check named is met, greatest share " : "NOT ENOUGH: share ") + share(c.utilisation()) + ", " + c.name()).orElse("not checked");
+        String small = (warnings.isEmpty() ? "" : WARNED.toUpperCase(Locale.ROOT) + ": " + String.join(" ", warnings) + " ") + (refused.isEmpty() ? "" : refused + " ")
+            + (carried.checks().isEmpty() && !refused.isEmpty() ? "" : worst + "; ") + "pre-sizing for an engineer's review";
+        return Fact.of("What would carry it", found.isEmpty() ? "not pre-sized" : found, small);
+    }
+
+    /** One part in a few words, with the sizes that a price needs. */
+    private static String brief(Carried.Part part, Format format) {
+        Carried.Result first = part.results().get(0);
+        if (part.key().equals("footing")) {
+            return value(first, format) + ", " + size(part, "depth", format) + " deep, " + size(part, "width", format) + (part.results().stream().anyMatch(r -> r.key().equals("length"))
+                ? " by " + size(part, "length", format) : " wide") + ", " + size(part, "concrete", format) + " of concrete each";
+        }
+        return first.unit().isEmpty() ? value(first, format) : first.label() + " " + value(first, format);
+    }
+
+    private static String size(Carried.Part part, String key, Format format) {
+        return part.results().stream().filter(r -> r.key().equals(key)).findFirst().map(r -> value(r, format)).orElse("");
     }
 
     private CarriedBlocks() { }

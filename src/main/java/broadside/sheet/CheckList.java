@@ -3,6 +3,7 @@ package broadside.sheet;
 import broadside.assess.Assessment;
 import broadside.assess.Carried;
 import broadside.assess.ItemResult;
+import broadside.assess.Loads;
 import broadside.assess.Job;
 import broadside.assess.Note;
 import broadside.panel.BannerFence;
@@ -175,12 +176,16 @@ final class CheckList {
             }
             for (Carried.Part part : carried.get().parts()) {
                 fact(part.title() + which, part.refused().orElseGet(() -> String.join("; ", part.results().stream().map(r -> r.label() + " " + CarriedBlocks.value(r, format)).toList())));
-                part.checks().forEach(c -> facts.add(Fact.of(c.name() + which, "share " + CarriedBlocks.share(c.utilisation()), c.rule())));
+                part.worst().ifPresent(c -> fact("its hardest check" + which, c.name() + (c.named().isEmpty() ? "" : ", " + Format.caseName(c.named())) + ", share "
+                    + CarriedBlocks.share(c.utilisation()) + "; " + part.checks().size() + " in all under \"What carries it\""));
+                part.warnings().forEach(w -> facts.add(new Fact(CarriedBlocks.WARNED + which, w, "", true)));
                 part.assumed().forEach(a -> facts.add(new Fact("assumed, to be confirmed" + which, a, "", true)));
             }
         }
         fact("Reinforcement, base plate, anchors", "not worked out: for the engineer");
-        facts.add(new Fact("Buried services", "services not located, unless the sheet says otherwise", "", true));
+        if (assessment.items().stream().anyMatch(i -> i.loads().flatMap(Loads::carried).flatMap(c -> c.part("footing")).isPresent())) {
+            facts.add(new Fact("Buried services", "located by whoever digs, before anything is dug or driven", "", true));
+        }
         group("7 Foundation or ballast");
     }
 

@@ -10,7 +10,9 @@ import broadside.quantity.Shown;
 import broadside.quantity.Speed;
 import broadside.quantity.Unit;
 import broadside.quantity.Units;
+import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 
 /** Numbers as they are shown: three figures in answers, four in the calculation; loads are rounded up, and only here. */
 final class Format {
@@ -91,6 +93,17 @@ final class Format {
         return shown(si, unit, Rounding.UP);
     }
 
+    /** A demand, rounded up, and a capacity, rounded down, in one unit: that of the larger. */
+    List<String> pair(double demand, double capacity, String unit) {
+        if (unit.equals("m") && Math.max(demand, capacity) >= SMALL) {
+            return List.of(length(demand), length(capacity));
+        }
+        Optional<Dimension> dimension = unit.equals("m") || unit.equals("Pa") && Math.max(demand, capacity) >= STRESS ? Optional.empty() : dimension(unit);
+        return dimension.map(d -> Show.of(Math.max(demand, capacity), d, units, 3, Rounding.UP).unit()).filter(u -> !u.isEmpty()).map(u -> List.of(
+            demand == 0 ? "0" : in(demand, dimension.get(), u, Rounding.UP), capacity == 0 ? "0" : in(capacity, dimension.get(), u, Rounding.DOWN)))
+            .orElseGet(() -> List.of(amount(demand, unit), capacity(capacity, unit)));
+    }
+
     /** A capacity, rounded down. */
     String capacity(double si, String unit) {
         return shown(si, unit, Rounding.DOWN);
@@ -150,18 +163,18 @@ final class Format {
         return dimension(unit).map(d -> Show.of(value, d, Units.US, 4, Rounding.NEAREST)).map(Shown::text).orElse("");
     }
 
-    private static java.util.Optional<Dimension> dimension(String unit) {
+    private static Optional<Dimension> dimension(String unit) {
         return switch (unit) {
-            case "m" -> java.util.Optional.of(Dimension.LENGTH);
-            case "m/s" -> java.util.Optional.of(Dimension.SPEED);
-            case "Pa" -> java.util.Optional.of(Dimension.PRESSURE);
-            case "N" -> java.util.Optional.of(Dimension.FORCE);
-            case "N m" -> java.util.Optional.of(Dimension.MOMENT);
-            case "kg" -> java.util.Optional.of(Dimension.MASS);
-            case "N/m" -> java.util.Optional.of(Dimension.FORCE_PER_LENGTH);
-            case "kg/m" -> java.util.Optional.of(Dimension.MASS_PER_LENGTH);
-            case "Pa/m" -> java.util.Optional.of(Dimension.PRESSURE_PER_DEPTH);
-            default -> java.util.Optional.empty();
+            case "m" -> Optional.of(Dimension.LENGTH);
+            case "m/s" -> Optional.of(Dimension.SPEED);
+            case "Pa" -> Optional.of(Dimension.PRESSURE);
+            case "N" -> Optional.of(Dimension.FORCE);
+            case "N m" -> Optional.of(Dimension.MOMENT);
+            case "kg" -> Optional.of(Dimension.MASS);
+            case "N/m" -> Optional.of(Dimension.FORCE_PER_LENGTH);
+            case "kg/m" -> Optional.of(Dimension.MASS_PER_LENGTH);
+            case "Pa/m" -> Optional.of(Dimension.PRESSURE_PER_DEPTH);
+            default -> Optional.empty();
         };
     }
 }

@@ -66,7 +66,7 @@ final class ItemBlocks {
         lines.add(Fact.of("Governing case", CaseTables.name(loads.governs("base-moment")), loads.governs("base-moment").label() + others(item, loads) + raised(item)));
         lines.add(Fact.of("Wind force", format.both(loads.governs("base-shear").force(), Dimension.FORCE) + ", " + loads.level().name(),
             format.force(other.governs("base-shear").force()) + " " + companion));
-        lines.add(moment(loads, other, format));
+        lines.add(moment(item, loads, other, format));
         double torsion = Math.abs(loads.governs("torsion").torsion());
         List<Fact> more = new ArrayList<>();
         if (item.item() instanceof PostSign && torsion > 0) {
@@ -116,12 +116,18 @@ final class ItemBlocks {
         return (post.equals(base) ? "" : "; posts: " + post) + (torsion.equals(base) ? "" : "; torsion: " + torsion);
     }
 
-    private static Fact moment(Loads loads, Loads other, Format format) {
+    /** What the wind on a post that was found, and is not in the loads, brings the moment to. */
+    private static String proposed(ItemResult item, Loads loads, Format format) {
+        boolean more = item.item() instanceof PostSign && loads.supports().drag().isEmpty() && loads.carried().isPresent();
+        return more ? item.sheet().find("footing-moment").map(m -> "; with the wind on the post that is proposed " + format.moment(m.value()) + ", " + loads.level().name()).orElse("") : "";
+    }
+
+    private static Fact moment(ItemResult item, Loads loads, Loads other, Format format) {
         String companion = loads.level().shown();
         return loads.worstPost()
             .map(p -> Fact.of("Moment at the foot of the worst post", format.both(p.moment(), Dimension.MOMENT) + ", " + loads.level().name(),
                 format.moment(other.worstPost().orElseThrow().moment()) + " " + companion + ", " + worstPosts(loads, p) + ", case " + Format.caseName(p.named())
-                    + CaseTables.arrangement(p.state())))
+                    + CaseTables.arrangement(p.state()) + proposed(item, loads, format)))
             .orElseGet(() -> loads.foot() == Foot.NONE ? height(loads, format) : Fact.of(loads.foot() == Foot.WALL ? "Moment at the wall" : "Moment at the ground, whole length", format.both(loads.governs("base-moment").baseMoment(), Dimension.MOMENT) + ", "
                 + loads.level().name(), format.moment(other.governs("base-moment").baseMoment()) + " " + companion));
     }

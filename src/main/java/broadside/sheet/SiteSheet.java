@@ -71,6 +71,9 @@ final class SiteSheet {
         if (!part.passes() && !worst.isEmpty()) {
             facts.add(new Fact("NOT ENOUGH", worst, "", true));
         }
+        if (!part.warnings().isEmpty()) {
+            facts.add(new Fact(CarriedBlocks.WARNED, String.join(" ", part.warnings()), "", true));
+        }
         if (!part.assumed().isEmpty()) {
             facts.add(new Fact("assumed, confirm first", String.join(" ", part.assumed()), "", true));
         }

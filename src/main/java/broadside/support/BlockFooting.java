@@ -43,8 +43,8 @@ public final class BlockFooting {
         double resists = trace.line("resisting-moment", "R_d", "weight of the block about its edge").in("γ_G", by.weight()).in("g_n", by.gravity(), "m/s²")
             .in("ρ_F", rho, "kg/m³").in("b_F", b, "m").in("l_F", l, "m").in("d_F", d, "m").from("statics", by.status()).gives("γ_G g_n ρ_F b_F l_F d_F b_F / 2",
                 by.weight() * by.gravity() * rho * b * l * d * b / 2, "N m");
-        double ratio = RuleFactors.ratio(trace.line("overturning-ratio", "r_o", "resisting over overturning moment, at the base"), new Check.In("R_d", resists),
+        RuleFactors.ratio(trace.line("overturning-ratio", "r_o", "resisting over overturning moment, at the base"), new Check.In("R_d", resists),
             new Check.In("M_d", acts.moment()), "N m", by.status());
-        return by.overturning("overturning", new Check.In("r_o", ratio), new PanelWind("wind on the panel", "", force, height, true), trace);
+        return by.overturning("overturning", new Check.In("R_d", resists), acts, new PanelWind("wind on the panel", "", force, height, true), trace);
     }
 }

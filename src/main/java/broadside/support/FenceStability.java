@@ -160,12 +160,12 @@ public final class FenceStability {
             double ratio = RuleFactors.ratio(part.line(way.step("overturning-ratio"), "r_o", "resisting over overturning moment" + (way.name().isEmpty() ? ""
                 : ", " + way.name())),
                 new Check.In("R_d", way.resists()), new Check.In("M_d", acts.moment()), "N m", by.status());
-            checks.add(by.overturning(("overturning " + way.name()).strip(), new Check.In("r_o", ratio), wind, part));
+            checks.add(by.overturning(("overturning " + way.name()).strip(), new Check.In("R_d", way.resists()), acts, wind, part));
             turns.add(new Turn(way.name(), ratio, fence.brace().isPresent() ? uplift(way, acts, fence.brace().get(), by, part) : 0));
         }
         double ratio = RuleFactors.ratio(part.line("sliding-ratio", "r_s", "friction over the force along the ground"), new Check.In("S_d", slides),
             new Check.In("F_d", acts.force()), "N", by.status().weaker(grip.status()));
-        checks.add(by.sliding(new Check.In("r_s", ratio), wind, grip.status(), part));
+        checks.add(by.sliding(new Check.In("S_d", slides), acts, wind, grip.status(), part));
         return new Stand(wind, turns, ratio, checks, need(wind, fence, acts, grip.value(), by, part));
     }
 

@@ -1,5 +1,7 @@
 package broadside.support;
 
+import broadside.quantity.Rounding;
+import broadside.quantity.Show;
 import broadside.support.StabilityResult.Stand;
 import java.util.List;
 import java.util.Optional;
@@ -30,27 +32,27 @@ final class FenceWords {
             double reach = Math.max(assumed.value("brace-lever"), 2 * fence.half());
             BallastNeed other = braced.apply(fence.with(new Fence.Brace(reach, 0)));
             remarks.add("Will not stand on blocks alone: the " + need.named() + " needs " + kg(need.line()) + " of blocks, and more than " + kg(limit)
-                + " on one panel are no longer blocks. What would hold it: braces that reach " + reach + " m behind the line, with " + kg(other.brace())
-                + " on the foot of each brace and " + kg(other.line()) + " on the line of each panel; returns at the ends; or taking the cover off"
-                + bare(stands) + ".");
+                + " on one panel are no longer blocks. " + (Math.max(other.line(), other.brace()) > limit ? "Braces do not bring it down to blocks either" : "What would hold it: braces")
+                + ": reaching " + reach + " m behind the line they need " + kg(other.brace()) + " on the foot of each and " + kg(other.line()) + " on the line of each panel. " + bare(stands, limit));
         } else if (fence.brace().isPresent() && Math.max(need.line(), need.brace()) > limit) {
             remarks.add("Even braced, the " + need.named() + " needs " + kg(need.line()) + " on the line of each panel and " + kg(need.brace())
                 + " on the foot of each brace, and more than " + kg(limit)
-                + " in one place are no longer blocks. What would hold it: a longer brace, returns, or taking the cover off"
-                + bare(stands) + ".");
+                + " in one place are no longer blocks. A longer brace or returns need less. " + bare(stands, limit));
         }
     }
 
-    private static String bare(List<Stand> stands) {
-        return most(stands, false).map(n -> ", when " + kg(n.total()) + " of ballast on each panel are enough").orElse("");
+    /** What is left with the cover taken off, where the loads of the bare fence are known. */
+    private static String bare(List<Stand> stands, double limit) {
+        return most(stands, false).map(n -> "With the cover taken off each panel needs " + kg(n.total()) + (n.total() > limit ? ", which is too much for blocks as well: at this wind it must not "
+            + "stand there as typed." : " in all.")).orElse("The loads with the cover taken off are not known.");
     }
 
     private static Optional<BallastNeed> most(List<Stand> stands, boolean covered) {
         return stands.stream().filter(s -> s.wind().covered() == covered).map(Stand::need).reduce(BallastNeed::and);
     }
 
-    /** Whole kilograms, upward. */
+    /** Kilograms as on the sheet: three figures, upward. */
     private static String kg(double mass) {
-        return (long) Math.ceil(mass - 1e-9) + " kg";
+        return Show.number(mass, 3, Rounding.UP) + " kg";
     }
 }

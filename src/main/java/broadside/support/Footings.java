@@ -86,7 +86,7 @@ public final class Footings {
             assumed.add(new Assumed("No footing was given: the post is assumed to be planted in concrete."));
         }
         if (rules.isBadGround()) {
-            remarks.add("This ground has no presumptive values: the typed values must come from tests, and what lies below must be looked at.");
+            assumed.add(new Assumed("This ground has no presumptive values: the typed values must come from tests, and what lies below must be looked at.", true));
         }
         FootingResult result = footing.kind() == Footing.Kind.PAD ? new PadFooting(tables, rules, footing, request, assumed, remarks).hold(trace)
             : new ShaftFooting(tables, rules, footing, request, assumed, remarks).hold(trace);

@@ -24,6 +24,7 @@ public final class Friction {
     private static final String ON = " on ";
 
     private final List<Pair> pairs;
+    private final List<String> none; // surfaces on which no friction can be counted
 
     /** One row of the table. */
     private record Pair(String key, String feet, List<String> grounds, Coefficient coefficient, String place) {
@@ -51,8 +52,13 @@ public final class Friction {
     /** Reads the table of the tables of stability. */
     public Friction(Edition stability) {
         Rows rows = stability.rows("friction");
-        this.pairs = rows.keys().stream().map(k -> new Pair(k, rows.text(k, "feet"), List.of(rows.text(k, "ground").split("\\s*;\\s*")), rows.number(k, "mu"),
+        this.none = rows.keys().stream().filter(k -> !rows.isPrinted(k, "mu")).flatMap(k -> grounds(rows.text(k, "ground")).stream()).toList();
+        this.pairs = rows.keys().stream().filter(k -> rows.isPrinted(k, "mu")).map(k -> new Pair(k, rows.text(k, "feet"), grounds(rows.text(k, "ground")), rows.number(k, "mu"),
             rows.text(k, "place"))).toList();
+    }
+
+    private static List<String> grounds(String text) {
+        return List.of(text.split("\\s*;\\s*"));
     }
 
     /** The words for surfaces that the table knows. */
@@ -63,6 +69,7 @@ public final class Friction {
     /**
      * Friction coefficient for a surface as typed, recorded as "friction".
      *
+     * @throws NoAnswer     for a surface on which none can be counted
      * @throws UnfitAnswer  for a typed coefficient that is not above zero, or above 1 without a reason
      */
     public Grip of(FenceFeet.Surface surface, Trace trace) {
@@ -79,7 +86,7 @@ public final class Friction {
         }
         String why = surface.reason().filter(r -> !r.isBlank()).map(r -> ": " + r).orElse("");
         double value = trace.line("friction", "μ", "friction coefficient").from("typed by the user", Status.GIVEN).reads("as typed" + why, typed, "1");
-        return new Grip(value, Status.GIVEN, List.of(), List.of());
+        return new Grip(value, Status.GIVEN, List.of("The friction of " + typed + " is as typed" + (why.isEmpty() ? ", and who measured it was not said." : why + ".")), List.of());
     }
 
     private Grip fromTable(Optional<String> ground, Trace trace) {
@@ -89,6 +96,9 @@ public final class Friction {
         int on = words.indexOf(ON);
         String feet = on < 0 ? "" : words.substring(0, on).strip();
         String surface = on < 0 ? words : words.substring(on + ON.length()).strip();
+        if (none.contains(surface)) {
+            throw new NoAnswer("no friction can be counted on " + surface + ": it does not stand there by its weight. An engineer is needed.");
+        }
         boolean knownFeet = pairs.stream().anyMatch(p -> p.feet().equals(feet));
         Predicate<Pair> stands = knownFeet ? p -> p.feet().equals(feet) || p.feet().equals(ANY) : p -> !p.feet().equals(STEEL);
         Optional<Pair> pair = lowest(p -> stands.test(p) && p.grounds().contains(surface));

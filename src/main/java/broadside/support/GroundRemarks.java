@@ -15,23 +15,23 @@ final class GroundRemarks {
      */
     static void add(Footing.Ground ground, Optional<String> rule, double depth, List<Assumed> assumed, List<String> remarks) {
         switch (ground.slope().orElse("")) {
-            case "sloping" -> remarks.add("The ground slopes: a slope takes away passive resistance, which none of these rules covers. "
-                + "An engineer must check the footing.");
+            case "sloping" -> assumed.add(new Assumed("The ground slopes: a slope takes away passive resistance, which none of these rules covers. "
+                + "An engineer must check the footing.", true));
             case "flat" -> { }
             default -> assumed.add(new Assumed("The ground is assumed to be flat around the footing. A slope or ditch nearby takes away its hold."));
         }
         switch (ground.water().orElse("")) {
-            case "high" -> remarks.add("Ground water stands high: values of the soil must be those of wet ground" + (rule.isEmpty()
+            case "high" -> assumed.add(new Assumed("Ground water stands high: values of the soil must be those of wet ground" + (rule.isEmpty()
                 ? ", and the weight of the pad counts less the water."
-                : rule.get().equals(FootingRules.SAND) ? ", and the weight of the sand counts less the water." : "."));
+                : rule.get().equals(FootingRules.SAND) ? ", and the weight of the sand counts less the water." : "."), true));
             case "deep" -> { }
             default -> assumed.add(new Assumed("Ground water is assumed to stand below the footing."));
         }
-        ground.frost().filter(f -> depth < f.metres()).ifPresent(f -> remarks.add("The footing ends above the depth of frost (" + f.typed()
-            + "): frost can lift it."));
+        ground.frost().filter(f -> depth < f.metres()).ifPresent(f -> assumed.add(new Assumed("The footing ends above the depth of frost (" + f.typed()
+            + "): frost can lift it.", true)));
         switch (ground.services().orElse("")) {
             case "located" -> { }
-            case "not located" -> remarks.add("Buried services are not located: do not dig or drive before they are.");
+            case "not located" -> assumed.add(new Assumed("Buried services are not located: do not dig or drive before they are.", true));
             default -> assumed.add(new Assumed("Buried services are not known to be located. Do not dig or drive before they are."));
         }
         if (ground.paved()) {

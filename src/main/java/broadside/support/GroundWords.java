@@ -49,7 +49,7 @@ final class GroundWords {
         refuseBad();
         return soilClass().orElseGet(() -> {
             String lowest = tables.lowestSoil();
-            note("The soil is assumed to be class " + lowest + " of the presumptive values (" + tables.soil(lowest)
+            note((word.isPresent() ? "\"" + word.get() + "\" names no class of soil. " : "") + "The soil is assumed to be class " + lowest + " of the presumptive values (" + tables.soil(lowest)
                 + "), the lowest of the table. Confirm the soil.");
             return lowest;
         });
@@ -60,7 +60,7 @@ final class GroundWords {
         refuseBad();
         return ground().orElseGet(() -> {
             String lowest = tables.lowestGround();
-            note("The ground is assumed to be " + lowest + ", the lowest ground factor. Confirm the ground.");
+            note((word.isPresent() ? "\"" + word.get() + "\" has no ground factor. " : "") + "The ground is assumed to be " + lowest + ", the lowest ground factor. Confirm the ground.");
             return lowest;
         });
     }

@@ -113,7 +113,7 @@ public final class KentledgeStability {
             turn(AWAY, new Check.In("R_2", resists.away()), acts, post, wind, by, checks, part));
         double ratio = RuleFactors.ratio(part.line("sliding-ratio", "r_s", "friction over the force along the ground"), new Check.In("S_d", resists.slides()),
             new Check.In("F_d", acts.force()), "N", by.status().weaker(grip.status()));
-        checks.add(by.sliding(new Check.In("r_s", ratio), wind, grip.status(), part));
+        checks.add(by.sliding(new Check.In("S_d", resists.slides()), acts, wind, grip.status(), part));
         return new Stand(wind, turns, ratio, checks, need(wind, post, acts, grip.value(), by, part));
     }
 
@@ -122,7 +122,7 @@ public final class KentledgeStability {
         String slug = "/" + name.replace(' ', '-');
         double ratio = RuleFactors.ratio(part.line("overturning-ratio" + slug, "r_o", "resisting over overturning moment, " + name), resists,
             new Check.In("M_d", acts.moment()), "N m", by.status());
-        checks.add(by.overturning("overturning " + name, new Check.In("r_o", ratio), wind, part));
+        checks.add(by.overturning("overturning " + name, resists, acts, wind, part));
         double uplift = part.line("uplift" + slug, "Z", "uplift of the windward foot, tipping " + name).in("M_d", acts.moment(), "N m")
             .in(resists.symbol(), resists.value(), "N m").in("L_B", post.lever(), "m").from(STATICS, by.status())
             .gives("max(0; (M_d - " + resists.symbol() + ") / L_B)", Math.max(0, (acts.moment() - resists.value()) / post.lever()), "N");

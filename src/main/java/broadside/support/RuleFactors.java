@@ -18,6 +18,8 @@ import broadside.trace.Trace;
 record RuleFactors(StabilityRule rule, StabilityRule sliding, double weight, double wind, double level, double required, double slide, double gravity,
                    Status status) {
 
+    private static final String OVERTURNING = "overturning";
+
     /** Wind of one case at the level of the rule: force F_d, N, and moment at the ground M_d, N m. */
     record Action(double force, double moment) { }
 
@@ -63,14 +65,18 @@ record RuleFactors(StabilityRule rule, StabilityRule sliding, double weight, dou
     /** Loads below this count as none, N or N m. */
     private static final double TINY = 1e-6;
 
-    /** Check of a ratio against overturning, recorded before as {@code symbol}. */
-    Check overturning(String name, Check.In ratio, PanelWind on, Trace trace) {
-        return Check.of(name, rule.title() + ", " + rule.place(), new Check.In("η_o", required), ratio, "1", on.named(), status, trace);
+    /** Check against overturning: the moment times the ratio that must be reached, against the moment that resists, recorded before. */
+    Check overturning(String name, Check.In resists, Action acts, PanelWind on, Trace trace) {
+        double asked = trace.line("overturning-demand" + (name.equals(OVERTURNING) ? "" : "/" + name.substring(OVERTURNING.length() + 1).replace(' ', '-')), "M_E",
+            "overturning moment times the ratio that must be reached").in("η_o", required).in("M_d", acts.moment(), "N m").from(rule.place(), status)
+            .gives("η_o M_d", required * acts.moment(), "N m");
+        return Check.of(name, rule.title() + ", " + rule.place(), new Check.In("M_E", asked), resists, "N m", on.named(), status, trace);
     }
 
-    /** Check of a ratio against sliding, recorded before. */
-    Check sliding(Check.In ratio, PanelWind on, Status friction, Trace trace) {
-        return Check.of("sliding", sliding.title() + ", " + sliding.place(), new Check.In("η_s", slide), ratio, "1", on.named(), status.weaker(friction),
-            trace);
+    /** Check against sliding: the force times the ratio that must be reached, against the friction, recorded before. */
+    Check sliding(Check.In resists, Action acts, PanelWind on, Status friction, Trace trace) {
+        double asked = trace.line("sliding-demand", "F_E", "force along the ground times the ratio that must be reached").in("η_s", slide).in("F_d", acts.force(), "N")
+            .from(sliding.place(), status).gives("η_s F_d", slide * acts.force(), "N");
+        return Check.of("sliding", sliding.title() + ", " + sliding.place(), new Check.In("F_E", asked), resists, "N", on.named(), status.weaker(friction), trace);
     }
 }

@@ -129,7 +129,7 @@ final class ShaftFooting {
             remarks.add("The rule allows the diagonal of a square footing as its width; its face counts here, which is safer.");
         }
         if (ibc && depth > tables.ibc("depth-limit").value()) {
-            remarks.add("The depth goes beyond what counts for the lateral pressure; an engineer must look at a footing this deep.");
+            assumed.add(new Assumed("The depth goes beyond what counts for the lateral pressure; an engineer must look at a footing this deep.", true));
         }
         GroundRemarks.add(footing.ground(), Optional.of(rules.chosen()), depth, assumed, remarks);
     }

@@ -34,7 +34,25 @@ record FormTables(Rows scope, Map<String, Map<String, String>> answers) {
             answers.put(posts + ".grade", grades);
         }
         answers.put("footing.ground", grounds(tables));
+        Map<String, String> surfaces = surfaces(rows(tables, "stability/1", "friction"));
+        answers.put("banner-fence.ground", surfaces);
+        answers.put("ballast.ground", surfaces);
         return new FormTables(rows(tables, "own-rules/1", "scope"), answers);
+    }
+
+    /** Surfaces by the name that comes first in the table, then those for feet of bare steel. */
+    private static Map<String, String> surfaces(Rows friction) {
+        Map<String, String> surfaces = new LinkedHashMap<>();
+        Map<String, String> steel = new LinkedHashMap<>();
+        for (String key : friction.keys()) {
+            boolean bare = friction.text(key, "feet").equals("steel");
+            for (String ground : friction.text(key, "ground").split("\\s*;\\s*")) {
+                String word = bare ? "steel on " + ground : ground;
+                (bare ? steel : surfaces).put(word, word.substring(0, 1).toUpperCase(Locale.ROOT) + word.substring(1) + (friction.isPrinted(key, "mu") ? "" : ": nothing holds there"));
+            }
+        }
+        surfaces.putAll(steel);
+        return surfaces;
     }
 
     /** Words for the ground, each with what the tables say it is. */

@@ -104,7 +104,7 @@ record Wording(String label, String hint, String metric, String us) {
         banner-fence.panel-mass|Mass of one panel|With its cover
         banner-fence.foot-mass|Mass of one foot|
         banner-fence.foot-length|Length of a foot|Across the line of the fence
-        banner-fence.ground|What it stands on|Such as grass, asphalt or gravel, and whether it can be wet
+        banner-fence.ground|What it stands on|Feet of bare steel grip less: they are at the end of the list
         banner-fence.stakes|Stakes|Where the ground takes them
         banner-fence.friction|Friction coefficient|Left empty, the lowest printed value for that surface
         banner-fence.friction-reason|Why it may be above 1|
@@ -182,7 +182,7 @@ record Wording(String label, String hint, String metric, String us) {
         ballast.lever|From the face to the middle of the ballast|
         ballast.front-mass|Mass on the foot below the face|At each brace
         ballast.face-mass|Mass of boards and post|That goes with one brace
-        ballast.ground|Surface that it stands on|Such as concrete, asphalt, gravel or grass
+        ballast.ground|Surface that it stands on|Feet of bare steel grip less: they are at the end of the list
         ballast.friction|Friction coefficient|Left empty, the lowest printed value for that surface
         ballast.friction-reason|Why it may be above 1|
         fixings.columns|Columns of fixings|Side by side
