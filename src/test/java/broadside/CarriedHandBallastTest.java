@@ -21,11 +21,11 @@ class CarriedHandBallastTest {
 
     private static final double G = 9.80665;
 
-    /** A ratio that has to be reached and the one that is there. */
+    /** What acts, times the ratio that has to be reached, against what resists. */
     private static void ratio(Carried carried, String name, String named, double required, double resists, double acts) {
         Check check = check(carried, name, named);
-        assertThat(check.demand()).as("asked of " + name).isEqualTo(required);
-        assertThat(check.capacity()).as(name + ", " + named).isCloseTo(resists / acts, within(1e-9 * resists / acts));
+        assertThat(check.demand()).as("asked of " + name).isCloseTo(required * acts, within(1e-9 * required * acts));
+        assertThat(check.capacity()).as(name + ", " + named).isCloseTo(resists, within(1e-9 * resists));
         assertThat(check.utilisation()).as(name).isCloseTo(required * acts / resists, within(1e-9 * required * acts / resists));
         assertThat(check.passes()).isEqualTo(required * acts <= resists * (1 + 1e-9));
     }

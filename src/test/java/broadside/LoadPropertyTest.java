@@ -191,8 +191,8 @@ class LoadPropertyTest {
             String terrain = random.terrain(en);
             String feet = board(inches / 12 + " ft " + inches % 12 + " in", high / 12 + "' " + high % 12 + "\\\"", gap + " in");
             String metres = board(inches * 25.4 + " mm", high * 2.54 + " cm", gap * 0.0254 + " m");
-            ItemResult us = RandomJobs.result(job(en, 1, terrain, "", feet).replace("\"1.0 m/s\"", "\"" + mph + " mph\""));
-            ItemResult si = RandomJobs.result(job(en, mph * 0.44704, terrain, "", metres));
+            ItemResult us = RandomJobs.loadsOnly(job(en, 1, terrain, "", feet).replace("\"1.0 m/s\"", "\"" + mph + " mph\""));
+            ItemResult si = RandomJobs.loadsOnly(job(en, mph * 0.44704, terrain, "", metres));
             for (int s = 0; s < us.sheet().steps().size(); s++) {
                 near(us.sheet().steps().get(s).value(), si.sheet().steps().get(s).value(), us.sheet().steps().get(s).name());
             }

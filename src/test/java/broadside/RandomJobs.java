@@ -77,6 +77,11 @@ final class RandomJobs {
         return assessment.items().get(0);
     }
 
+    /** Without what carries it, which is sized in the units of the job. */
+    static ItemResult loadsOnly(String job) {
+        return AllJobs.TOOL.assessor().loadsOnly(AllJobs.TOOL.reader().read(JobText.read(job.getBytes(StandardCharsets.UTF_8))).orThrow()).items().get(0);
+    }
+
     static Loads loads(String job) {
         return result(job).loads().orElseThrow(() -> new AssertionError("not covered: " + job));
     }

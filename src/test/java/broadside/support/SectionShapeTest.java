@@ -120,17 +120,18 @@ class SectionShapeTest {
         }
     }
 
-    /** TIMBER 6x8, 200 x 140 mm: A 28000 mm2, I 200^3 140/12, W 200^2 140/6, weak 140^2 200/6, 35 lb/ft3. */
+    /** TIMBER 6x8, 7.5 x 5.5 in: A 41.25 in2, I 7.5^3 5.5/12, W 7.5^2 5.5/6, weak 5.5^2 7.5/6, plastic 7.5^2 5.5/4, 35 lb/ft3. */
     @Test
     void aPostByHand() {
+        double in = 0.0254;
         Properties p = CATALOGUE.find("TIMBER 6x8").orElseThrow().properties();
-        assertThat(p.area()).isCloseTo(0.028, within(1e-12));
-        assertThat(p.inertia()).isCloseTo(93.3333e-6, within(1e-10));
-        assertThat(p.elastic()).isCloseTo(933.333e-6, within(1e-9));
-        assertThat(p.weakElastic()).isCloseTo(653.333e-6, within(1e-9));
-        assertThat(p.plastic()).isCloseTo(1400e-6, within(1e-9));
-        assertThat(p.mass()).as("35 lb/ft3 are 560.65 kg/m3").isCloseTo(0.028 * 560.646, within(1e-4));
-        assertThat(p.torsionModulus()).as("h/b 1.4286: between 0.2273 at 1.4 and 0.2310 at 1.5, 0.22836 x 200 x 140^2").isCloseTo(895.16e-6, within(0.02e-6));
+        assertThat(p.area()).isCloseTo(41.25 * in * in, within(1e-12));
+        assertThat(p.inertia()).isCloseTo(193.359375 * Math.pow(in, 4), within(1e-12));
+        assertThat(p.elastic()).isCloseTo(51.5625 * Math.pow(in, 3), within(1e-12));
+        assertThat(p.weakElastic()).isCloseTo(37.8125 * Math.pow(in, 3), within(1e-12));
+        assertThat(p.plastic()).isCloseTo(77.34375 * Math.pow(in, 3), within(1e-12));
+        assertThat(p.mass()).as("35 lb/ft3 are 560.65 kg/m3").isCloseTo(41.25 * in * in * 560.646, within(1e-4));
+        assertThat(p.torsionModulus()).as("h/b 1.3636: between 0.2234 at 1.3 and 0.2273 at 1.4, 0.225882 x 7.5 x 5.5^2").isCloseTo(51.2469 * Math.pow(in, 3), within(0.02e-6));
     }
 
     /** HSS 4x4x1/4 in the tables of the AISC manual (recalled): A 3.37 in2, I 7.80 in4, S 3.90, Z 4.69 in3, J 12.8 in4, 12.21 lb/ft. */
