@@ -22,7 +22,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.CompletableFuture;
-import java.util.concurrent.CompletionException;
 
 /** Job in, assessment out: the one door that the page, the commands and the document use. */
 public final class Assessor {
@@ -44,19 +43,10 @@ public final class Assessor {
         this.edgeOnRule = own.rows("edge-on");
         this.stackRule = own.rows("stacks");
         this.scope = new Scope(own.rows("scope"), own.rows("size-limits"));
-        this.supportRules = joined(supports);
+        this.supportRules = TableFormat.joined(supports);
         this.about = About.of(tables.digest());
         Edition gusts = tables.edition("gust-factors/1").orElseThrow();
         this.sideBySide = new SideBySide(this, new SpeedConversion(gusts.curve("durst")), own.rows("terrain-match"), gusts.rows("gust-over-ten-minutes"));
-    }
-
-    /** The rules that were read beside the codes; a broken table is told as it is. */
-    private static SupportRules joined(CompletableFuture<SupportRules> supports) {
-        try {
-            return supports.join();
-        } catch (CompletionException e) {
-            throw e.getCause() instanceof TableFormat broken ? broken : e;
-        }
     }
 
     public CodeLibrary codes() {

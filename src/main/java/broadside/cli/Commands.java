@@ -1,12 +1,14 @@
 package broadside.cli;
 
 import broadside.table.TableFormat;
+import broadside.table.TableLibrary;
 import java.io.PrintWriter;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.CompletableFuture;
 import java.util.function.Supplier;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -34,13 +36,19 @@ public final class Commands implements Runnable {
     /** Most lines of problems that are printed. */
     private static final int MOST_LINES = 50;
 
+    private final CompletableFuture<TableLibrary> shipped;
+
+    private Commands(CompletableFuture<TableLibrary> shipped) {
+        this.shipped = shipped;
+    }
+
     /** Runs a command line; returns the exit status. */
     public static int run(String... args) {
         return run(new PrintWriter(System.err, true), args);
     }
 
     static int run(PrintWriter errors, String... args) {
-        CommandLine line = new CommandLine(new Commands());
+        CommandLine line = new CommandLine(new Commands(Tool.begin()));
         // Each command costs time to describe, so only the one named is; without a name, all are, for the help.
         List<String> named = COMMANDS.keySet().stream().filter(List.of(args)::contains).toList();
         COMMANDS.forEach((name, command) -> {
@@ -73,7 +81,7 @@ public final class Commands implements Runnable {
     }
 
     Tool tool() {
-        return Tool.of(Optional.ofNullable(ownTables));
+        return Tool.of(Optional.ofNullable(ownTables), shipped);
     }
 
     /** Without a command the tool serves. */

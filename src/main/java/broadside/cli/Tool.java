@@ -12,6 +12,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.CompletableFuture;
 
 /**
  * The parts of the tool, put together once: tables, codes, assessor and readers.
@@ -23,6 +24,16 @@ import java.util.Optional;
  */
 public record Tool(TableLibrary tables, Assessor assessor, JobReader reader, PublishedChecks checks) {
 
+    /** Begins to read the tables that ship with the tool, while the command line is taken apart. */
+    static CompletableFuture<TableLibrary> begin() {
+        return CompletableFuture.supplyAsync(TableLibrary::shipped);
+    }
+
+    /** Puts the tool together from the tables that ship with it, and from those in a folder of the user's own. */
+    static Tool of(Optional<Path> ownTables, CompletableFuture<TableLibrary> shipped) {
+        return ownTables.isPresent() ? of(ownTables) : of(TableFormat.joined(shipped));
+    }
+
     /**
      * Puts the tool together.
      *
@@ -30,7 +41,10 @@ public record Tool(TableLibrary tables, Assessor assessor, JobReader reader, Pub
      * @throws TableFormat when a table is not as it must be
      */
     public static Tool of(Optional<Path> ownTables) {
-        TableLibrary tables = ownTables.map(folder -> TableLibrary.of(TableFiles.shipped("code-tables"), own(folder))).orElseGet(TableLibrary::shipped);
+        return of(ownTables.map(folder -> TableLibrary.of(TableFiles.shipped("code-tables"), own(folder))).orElseGet(TableLibrary::shipped));
+    }
+
+    private static Tool of(TableLibrary tables) {
         Assessor assessor = new Assessor(tables);
         SpeedConversion conversion = new SpeedConversion(tables.edition("gust-factors/1").orElseThrow().curve("durst"));
         JobReader reader = new JobReader(assessor.codes(), conversion);
