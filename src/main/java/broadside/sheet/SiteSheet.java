@@ -24,6 +24,8 @@ final class SiteSheet {
 
     private static final String NOT_SAID = "not said";
     private static final int LONGEST = 120;
+    /** Results that need no label. */
+    private static final Set<String> PLAIN = Set.of("section", "kind", "standing");
     /** Results that are for those who check, and not for those who build. */
     private static final Set<String> UNTOLD = Set.of("mass", "rule", "limit", "stability");
 
@@ -51,6 +53,7 @@ final class SiteSheet {
         facts.add(Fact.of("Job and place", said(job.head("title")) + job.head("reference").map(r -> ", " + clipped(r)).orElse("")
             + job.head("revision").map(r -> ", revision " + clipped(r)).orElse("") + "; " + (job.site().name().isBlank() ? said(job.head("address")) : clipped(job.site().name()))));
         facts.addAll(item.item().choose(new SitePlaces(format)));
+        job.remark(item.item().mark(), "fixed-to").ifPresent(what -> facts.add(Fact.of("Fixed to", clipped(what))));
         return facts;
     }
 
@@ -59,7 +62,7 @@ final class SiteSheet {
         List<Fact> facts = new ArrayList<>();
         part.refused().ifPresent(why -> facts.add(new Fact(part.title() + ", not pre-sized", why, "", true)));
         List<String> found = new ArrayList<>();
-        part.results().stream().filter(r -> !UNTOLD.contains(r.key())).forEach(r -> found.add(r.unit().isEmpty() ? r.text()
+        part.results().stream().filter(r -> !UNTOLD.contains(r.key())).forEach(r -> found.add(PLAIN.contains(r.key()) ? r.text()
             : r.label().substring(0, 1).toLowerCase(Locale.ROOT) + r.label().substring(1) + " " + CarriedBlocks.value(r, format)));
         String worst = part.worst().map(w -> w.name() + ", share " + CarriedBlocks.share(w.utilisation())).orElse("");
         if (part.passes() && !worst.isEmpty()) {

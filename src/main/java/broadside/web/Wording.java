@@ -105,7 +105,7 @@ record Wording(String label, String hint, String metric, String us) {
         banner-fence.foot-mass|Mass of one foot|
         banner-fence.foot-length|Length of a foot|Across the line of the fence
         banner-fence.ground|What it stands on|Feet of bare steel grip less: they are at the end of the list
-        banner-fence.stakes|Stakes|Where the ground takes them
+        banner-fence.stakes|Stakes|Say what they are; they count only against tipping, and only with the pull that was proved on this ground
         banner-fence.friction|Friction coefficient|Left empty, the lowest printed value for that surface
         banner-fence.friction-reason|Why it may be above 1|
         banner-fence.stake-proof-load|Proof load of one stake|Pulled on this ground, on this day; without one, stakes do not count
