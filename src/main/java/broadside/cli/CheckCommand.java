@@ -43,7 +43,7 @@ final class CheckCommand implements Callable<Integer> {
         } else if (json) {
             out.writeBytes(JobText.write(ResultText.of(assessment)));
         } else {
-            TextTable.print(SheetMaker.of(assessment, ""), out);
+            TextTable.print(SheetMaker.answer(assessment), out);
         }
         Terminal.finish(out);
         return assessment.allAssessed() ? 0 : 1;

@@ -12,7 +12,7 @@ final class TextTable {
         Lines out = text -> stream.println(Terminal.plain(text));
         out.println(sheet.caution());
         for (Block block : sheet.blocks()) {
-            if (block instanceof Block.NewPage || block instanceof Block.Heading h && (h.anchor().equals("check-list") || h.anchor().endsWith("-speed-0"))) {
+            if (block instanceof Block.NewPage || block instanceof Block.Heading h && h.anchor().endsWith("-speed-0")) {
                 break;
             }
             print(block, out);
