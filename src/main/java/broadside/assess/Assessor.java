@@ -33,6 +33,7 @@ public final class Assessor {
     private final Scope scope;
     private final About about;
     private final SideBySide sideBySide;
+    private final LimitFinder limitFinder;
     private final SupportRules supportRules;
 
     public Assessor(TableLibrary tables) {
@@ -46,7 +47,9 @@ public final class Assessor {
         this.supportRules = TableFormat.joined(supports);
         this.about = About.of(tables.digest());
         Edition gusts = tables.edition("gust-factors/1").orElseThrow();
-        this.sideBySide = new SideBySide(this, new SpeedConversion(gusts.curve("durst")), own.rows("terrain-match"), gusts.rows("gust-over-ten-minutes"));
+        SpeedConversion conversion = new SpeedConversion(gusts.curve("durst"));
+        this.limitFinder = new LimitFinder(conversion, own.rows("terrain-match"));
+        this.sideBySide = new SideBySide(this, conversion, own.rows("terrain-match"), gusts.rows("gust-over-ten-minutes"));
     }
 
     public CodeLibrary codes() {
@@ -104,6 +107,30 @@ public final class Assessor {
         return new Assessment(job, code, results, about);
     }
 
+    /** The same assessment with the winds at which the checks of each item are just met. */
+    public Assessment withLimits(Assessment of) {
+        List<ItemResult> items = new ArrayList<>();
+        for (ItemResult result : of.items()) {
+            items.add(result.with(limits(of, result)));
+        }
+        return new Assessment(of.job(), of.code(), items, of.about());
+    }
+
+    private Optional<Limits> limits(Assessment of, ItemResult result) {
+        try {
+            return limitFinder.of(of.job(), result, of.code(), (item, site) -> {
+                Job windy = of.job().withSite(site);
+                return item.choose(new ItemLoads(windy, of.code(), rules(of.code()), Optional.of(new Carriers(windy, of.code(), supportRules)), new Trace(windy.overrides())));
+            });
+        } catch (NotCovered | OutsideTable | UnfitAnswer e) {
+            return Optional.empty();
+        }
+    }
+
+    private ItemLoads.Rules rules(WindCode code) {
+        return new ItemLoads.Rules(edgeOnRule, stackRule, codes.memberRule(code));
+    }
+
     /** One item of a job by every code. */
     public Comparison sideBySide(Job job, Item item) {
         return sideBySide.of(job, item);
@@ -135,7 +162,7 @@ public final class Assessor {
             return result(job, item, code, sheet, Outcome.OUTSIDE_SCOPE, outside.map(Scope.Outside::refusal), Optional.empty());
         }
         try {
-            Loads loads = item.choose(new ItemLoads(job, code, new ItemLoads.Rules(edgeOnRule, stackRule, codes.memberRule(code)), carriers(supports, job, item, code, outside), sheet));
+            Loads loads = item.choose(new ItemLoads(job, code, rules(code), carriers(supports, job, item, code, outside), sheet));
             Companions.record(loads, sheet);
             return result(job, item, code, sheet, outside.isPresent() ? Outcome.OUTSIDE_SCOPE : Outcome.ASSESSED, outside.map(Scope.Outside::refusal),
                 Optional.of(loads));
@@ -160,6 +187,6 @@ public final class Assessor {
         Outcome told = refusal.filter(Refusal::ofScope).isPresent() ? Outcome.OUTSIDE_SCOPE : outcome;
         List<Note> notes = new ArrayList<>(scope.size(item).stream().toList());
         notes.addAll(Notes.of(job, item, code, sheet, loads));
-        return new ItemResult(item, told, refusal, loads, notes, sheet);
+        return new ItemResult(item, told, refusal, loads, notes, sheet, Optional.empty());
     }
 }

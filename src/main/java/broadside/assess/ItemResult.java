@@ -11,8 +11,10 @@ import java.util.Optional;
  * @param refusal  why there are no loads, or why they are loads only
  * @param loads    the loads, when the code covers the item; outside the scope they are loads only
  * @param sheet    the calculation sheet, as far as it went
+ * @param limits   the winds at which its checks are just met, where they were asked for and something was checked
  */
-public record ItemResult(Item item, Outcome outcome, Optional<Refusal> refusal, Optional<Loads> loads, List<Note> notes, Trace sheet) {
+public record ItemResult(Item item, Outcome outcome, Optional<Refusal> refusal, Optional<Loads> loads, List<Note> notes, Trace sheet,
+                         Optional<Limits> limits) {
 
     /** How it ended, with the word of the result file. */
     public enum Outcome {
@@ -45,5 +47,9 @@ public record ItemResult(Item item, Outcome outcome, Optional<Refusal> refusal, 
 
     public ItemResult {
         notes = List.copyOf(notes);
+    }
+
+    ItemResult with(Optional<Limits> found) {
+        return new ItemResult(item, outcome, refusal, loads, notes, sheet, found);
     }
 }

@@ -51,7 +51,7 @@ final class CheckCommand implements Callable<Integer> {
 
     static Assessment assess(Tool tool, JobFiles.Opened opened, Path file) {
         try {
-            return tool.assessor().assess(opened.job());
+            return tool.assessor().withLimits(tool.assessor().assess(opened.job()));
         } catch (BadJob e) {
             throw new Refused(e.problems().stream().map(p -> file + ": " + p.line()).toList());
         }

@@ -7,6 +7,7 @@ import broadside.action.PostAction;
 import broadside.assess.Assessment;
 import broadside.assess.Carried;
 import broadside.assess.ItemResult;
+import broadside.assess.Limits;
 import broadside.assess.Loads;
 import broadside.codes.Level;
 import broadside.codes.ZonePressure;
@@ -46,6 +47,7 @@ public final class ResultText {
             .put("instead", r.instead()));
         result.loads().ifPresent(l -> loads(node, l));
         supports(node, result.loads().flatMap(Loads::carried));
+        limits(node, result.limits());
         node.putArray("limits");
         ArrayNode notes = node.putArray("notes");
         result.notes().forEach(n -> notes.addObject().put("kind", n.kind().word()).put("text", n.text()));
@@ -53,6 +55,15 @@ public final class ResultText {
         givens(node.putArray("given"), result.sheet());
         ArrayNode steps = node.putArray("steps");
         result.sheet().steps().forEach(s -> step(steps.addObject(), s));
+    }
+
+    /** The winds at which checks are just met, the first to govern first. */
+    private static void limits(ObjectNode node, Optional<Limits> limits) {
+        ArrayNode list = node.putArray("limits");
+        limits.ifPresent(l -> l.list().forEach(each -> {
+            list.addObject().put("check", each.check()).put("state", each.state()).put("gust_m_s", each.inTheOpen()).put("at_height_m", 10.0).put("mean_m_s", each.mean())
+                .put("gust_at_item_m_s", each.atItem()).put("item_height_m", l.height()).put("by-square", each.bySquare());
+        }));
     }
 
     /** Every check in one list, and each part with what it is, what was tried and what must be confirmed. */

@@ -22,6 +22,9 @@ final class Format {
     /** Pressures from here on are stresses of a material, Pa. */
     private static final double STRESS = 2e6;
 
+    /** Winds above it are of no interest, m/s. */
+    private static final double STRONGEST = 100;
+
     private final Units units;
 
     Format(Units units) {
@@ -73,6 +76,15 @@ final class Format {
         String typed = speed.typed().toLowerCase(Locale.ROOT);
         Units other = typed.contains("mph") || typed.contains("ft/s") ? Units.METRIC : Units.US;
         return speed.typed() + " (" + Show.of(speed.metresPerSecond(), Dimension.SPEED, other, 3, Rounding.NEAREST).text() + ")";
+    }
+
+    /** A speed that must not be passed: rounded down, in both systems. */
+    String slow(double metresPerSecond) {
+        if (metresPerSecond > STRONGEST) {
+            return "above " + slow(STRONGEST);
+        }
+        String lead = Show.of(metresPerSecond, Dimension.SPEED, units, 3, Rounding.DOWN).text();
+        return lead + " (" + Show.of(metresPerSecond, Dimension.SPEED, units == Units.US ? Units.METRIC : Units.US, 3, Rounding.DOWN).text() + ")";
     }
 
     String length(double metres) {

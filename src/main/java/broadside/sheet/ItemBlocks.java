@@ -28,7 +28,7 @@ import java.util.List;
 final class ItemBlocks {
 
     /** Lines of the answer. */
-    private static final int MOST_LINES = 5;
+    private static final int MOST_LINES = 6;
 
     static List<Block> of(Assessment assessment, ItemResult item, Format format, String anchor, int level) {
         List<Block> blocks = new ArrayList<>();
@@ -51,6 +51,7 @@ final class ItemBlocks {
             blocks.add(new Heading(level, "Loads by case", anchor + "cases"));
             blocks.addAll(CaseTables.of(item.item(), loads, format));
             loads.carried().ifPresent(c -> blocks.addAll(CarriedBlocks.of(c, format, anchor, level)));
+            item.limits().ifPresent(l -> blocks.addAll(LimitBlocks.of(l, format, anchor, level)));
         });
         blocks.add(new Heading(level, "What was assumed", anchor + "assumed"));
         blocks.add(notes(item, Note.Kind.ASSUMPTION, Note.Kind.CAUTION));
@@ -75,6 +76,7 @@ final class ItemBlocks {
         }
         more.addAll(reactions(loads, format));
         List<Fact> last = new ArrayList<>(loads.carried().map(c -> CarriedBlocks.answer(c, format)).stream().toList());
+        LimitBlocks.answer(item, format).ifPresent(last::add);
         last.add(sure(item, loads));
         lines.addAll(more.stream().limit(Math.max(0, MOST_LINES - last.size() - lines.size())).toList());
         lines.addAll(last);

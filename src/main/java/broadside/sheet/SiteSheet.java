@@ -41,7 +41,7 @@ final class SiteSheet {
         loads.carried().ifPresentOrElse(c -> c.parts().forEach(p -> holds.addAll(part(p, format))),
             () -> holds.add(new Fact("Supports", "loads only: what holds it was not checked", "", true)));
         blocks.add(new Facts("What carries it", holds));
-        blocks.add(new Facts("Limits", limits(assessment, loads, format)));
+        blocks.add(new Facts("Limits", limits(assessment, item, loads, format)));
         blocks.add(new Paragraph("Order of work", Tone.PLAIN));
         blocks.add(new Notes(item.item().choose(new SiteSequence())));
         blocks.add(new Facts("Who decides", decides(assessment.job())));
@@ -83,12 +83,12 @@ final class SiteSheet {
         return facts;
     }
 
-    private static List<Fact> limits(Assessment assessment, Loads loads, Format format) {
+    private static List<Fact> limits(Assessment assessment, ItemResult item, Loads loads, Format format) {
         List<Fact> facts = new ArrayList<>();
         facts.add(Fact.of("Worked out for", Format.speed(assessment.job().site().basicSpeed()) + ", " + assessment.job().site().averaging().words() + ", terrain "
             + assessment.job().site().ground().terrain() + "; " + assessment.code().edition().property("title") + "; force in all "
             + format.both(loads.governs("base-shear").force(), Dimension.FORCE) + ", " + loads.level().name()));
-        facts.add(new Fact("Comes down at", "no gust is worked out here: ask the engineer before anyone relies on one", "", true));
+        facts.add(new Fact("Comes down at", LimitBlocks.comesDown(item, format), "", true));
         facts.add(Fact.of("Never", "larger, higher or more closed than drawn: every figure here changes"));
         return facts;
     }

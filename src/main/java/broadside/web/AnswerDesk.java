@@ -51,7 +51,7 @@ final class AnswerDesk {
     void show(Context ctx) {
         JsonNode job = Token.read(ctx.queryParam("j"));
         try {
-            Assessment assessment = assessor.assess(reader.read(job).orThrow());
+            Assessment assessment = assessor.withLimits(assessor.assess(reader.read(job).orThrow()));
             String token = Token.of(job);
             Sheet sheet = documents.sheet(assessment);
             List<Change> changes = changes(assessment.job(), token);
@@ -88,7 +88,7 @@ final class AnswerDesk {
 
     void pdf(Context ctx) throws InterruptedException {
         JsonNode node = Token.read(ctx.queryParam("j"));
-        pdf(ctx, node, documents.sheet(assessor.assess(reader.read(node).orThrow())), "");
+        pdf(ctx, node, documents.sheet(assessor.withLimits(assessor.assess(reader.read(node).orThrow()))), "");
     }
 
     /** The page "side by side" as a PDF. */
