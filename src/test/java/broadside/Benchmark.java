@@ -48,6 +48,7 @@ public final class Benchmark {
         everyCodeAndKind();
         warm("one item by every code side by side, warm", 3, 1000, () -> AllJobs.TOOL.assessor().sideBySide(job, job.items().get(0)));
         sizing(job);
+        limits();
         pdf("PDF of its loads, assessment and sheet included", "entrance-sign.json", 10, 10, () -> AllJobs.TOOL.assessor().loadsOnly(job));
         pdf("PDF of that sign, post and footing sized", "entrance-sign.json", 25, 20, () -> AllJobs.assess(job));
         if (!Files.exists(JAR)) {
@@ -106,6 +107,19 @@ public final class Benchmark {
         }
         Job signs = JobTexts.job("en-1991-1-4/2005", JobTexts.EN, ten.toString());
         warm("job with ten signs, posts and footings sized, warm", 30, 500, () -> AllJobs.assess(signs));
+    }
+
+    /** All limits of one item, and what one change would do to them: the demo job that takes longest. */
+    private static void limits() throws Exception {
+        double most = 0;
+        String slowest = "";
+        for (String name : List.of("entrance-sign.json", "stacked-signs.json", "granary-hoarding.json", "depot-hoarding.json", "riverside-fence.json", "optician-blade.json", "dental-panel.json")) {
+            Assessment assessed = AllJobs.assess(AllJobs.demo(name));
+            double median = median(200, () -> AllJobs.TOOL.assessor().withLimits(assessed));
+            slowest = median > most ? name.replace(".json", "") : slowest;
+            most = Math.max(median, most);
+        }
+        row("all limits of one item, warm, slowest of seven jobs, " + slowest, most, 20, "ms");
     }
 
     private static void pdf(String what, String file, double millis, double megabytes, Callable<Assessment> assessed) throws Exception {

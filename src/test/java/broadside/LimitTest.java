@@ -135,6 +135,17 @@ class LimitTest {
     }
 
     @Test
+    void what_holds_better_stands_more() {
+        Limits depot = AllJobs.TOOL.assessor().withLimits(AllJobs.assess(AllJobs.demo("depot-hoarding.json"))).items().get(0).limits().orElseThrow();
+        assertThat(depot.changes()).singleElement().satisfies(c -> assertThat(c.first().orElseThrow().inTheOpen()).isGreaterThan(depot.first().orElseThrow().inTheOpen()));
+        Limits fence = limits(job(true, draw(1, 50)), 26);
+        assertThat(fence.changes()).extracting(Limits.Change::what).anyMatch(w -> w.contains("more blocks of 25 kg")).anyMatch(w -> w.contains("a brace that reaches 1.2 m"))
+            .anyMatch(w -> w.contains("mesh that is 70 % closed"));
+        fence.changes().stream().filter(c -> c.what().contains("blocks")).forEach(c -> assertThat(c.first().orElseThrow().inTheOpen()).isGreaterThan(fence.first().orElseThrow().inTheOpen()));
+        assertThat(fence.list()).anyMatch(l -> l.state().equals("cover taken off"));
+    }
+
+    @Test
     void limits_stand_in_the_result_and_in_order() {
         for (String name : List.of("bakery-sign.json", "riverside-fence.json", "depot-hoarding.json", "optician-blade.json", "stacked-signs.json")) {
             Limits limits = AllJobs.TOOL.assessor().withLimits(AllJobs.assess(AllJobs.demo(name))).items().get(0).limits().orElseThrow();

@@ -48,7 +48,7 @@ public final class Assessor {
         this.about = About.of(tables.digest());
         Edition gusts = tables.edition("gust-factors/1").orElseThrow();
         SpeedConversion conversion = new SpeedConversion(gusts.curve("durst"));
-        this.limitFinder = new LimitFinder(conversion, own.rows("terrain-match"));
+        this.limitFinder = new LimitFinder(conversion, own.rows("terrain-match"), own.rows("supports"));
         this.sideBySide = new SideBySide(this, conversion, own.rows("terrain-match"), gusts.rows("gust-over-ten-minutes"));
     }
 

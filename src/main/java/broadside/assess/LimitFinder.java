@@ -38,10 +38,12 @@ final class LimitFinder {
 
     private final SpeedConversion conversion;
     private final Rows terrains;
+    private final Rows own;
 
-    LimitFinder(SpeedConversion conversion, Rows terrains) {
+    LimitFinder(SpeedConversion conversion, Rows terrains, Rows own) {
         this.conversion = conversion;
         this.terrains = terrains;
+        this.own = own;
     }
 
     /**
@@ -57,16 +59,39 @@ final class LimitFinder {
         }
         Item frozen = result.item().choose(new Frozen(carried.get()));
         Site site = windy(job.site());
-        LimitSearch search = new LimitSearch(multiple -> shares(loads.apply(frozen, site.withSpeed(new Speed(multiple * site.basicSpeed().metresPerSecond(), "")))));
         double height = result.loads().get().velocity().height();
         double level = code.level(site).name().equals("strength") ? Math.sqrt(code.level(site).factor()) : 1;
+        Wind wind = new Wind(site, level, height, code, loads);
+        List<Limits.Limit> found = limits(frozen, keys(carried.get()), wind);
+        found.forEach(l -> record(l, result.sheet()));
+        List<Limits.Change> changes = new ArrayList<>();
+        frozen.choose(new Changes(carried.get(), own)).forEach((what, item) -> changes.add(new Limits.Change(what, changed(item, wind))));
+        return Optional.of(new Limits(found, height, level == 1 ? "" : "the wind at the level of strength times the square root of " + code.level(site).rule(), changes));
+    }
+
+    /** The site in other winds, and the loads of an item there. */
+    private record Wind(Site site, double level, double height, WindCode code, BiFunction<Item, Site, Loads> loads) {
+
+        Loads at(Item item, double multiple) {
+            return loads.apply(item, site.withSpeed(new Speed(multiple * site.basicSpeed().metresPerSecond(), "")));
+        }
+    }
+
+    /** The limits of an item, the first to govern first. */
+    private List<Limits.Limit> limits(Item item, Set<String> keys, Wind wind) {
+        LimitSearch search = new LimitSearch(multiple -> shares(wind.at(item, multiple)));
         List<Limits.Limit> found = new ArrayList<>();
-        for (String key : keys(carried.get())) {
-            search.find(key).ifPresent(f -> found.add(limit(key, f, site, level, height, code)));
+        for (String key : keys) {
+            search.find(key).ifPresent(f -> found.add(limit(key, f, wind)));
         }
         found.sort(Comparator.comparingDouble(Limits.Limit::inTheOpen));
-        found.forEach(l -> record(l, result.sheet()));
-        return Optional.of(new Limits(found, height, level == 1 ? "" : "the wind at the level of strength times the square root of " + code.level(site).rule()));
+        return found;
+    }
+
+    /** The first limit of a changed item. */
+    private Optional<Limits.Limit> changed(Item item, Wind wind) {
+        Optional<Carried> carried = wind.at(item, 1).carried().filter(c -> c.parts().stream().allMatch(p -> p.refused().isEmpty()));
+        return carried.flatMap(c -> limits(item, keys(c), wind).stream().filter(l -> l.state().isEmpty()).findFirst());
     }
 
     /** The site in the wind that blows. */
@@ -91,15 +116,17 @@ final class LimitFinder {
         return shares;
     }
 
-    private Limits.Limit limit(String key, LimitSearch.Found found, Site site, double level, double height, WindCode code) {
+    private Limits.Limit limit(String key, LimitSearch.Found found, Wind wind) {
+        Site site = wind.site();
+        WindCode code = wind.code();
         int bar = key.indexOf('|');
-        Speed basic = new Speed(found.multiple() * site.basicSpeed().metresPerSecond() * level, "");
+        Speed basic = new Speed(found.multiple() * site.basicSpeed().metresPerSecond() * wind.level(), "");
         double gust = averaged(basic, site.averaging(), Averaging.GUST_3_S);
         Trace nowhere = new Trace().quiet();
         String open = terrains.text(OPEN, code.edition().key().substring(0, code.edition().key().indexOf('/')));
         Site flat = new Site("", site.basicSpeed(), site.averaging(), Optional.empty(), new Site.Ground(open, Optional.empty(), Optional.empty(), Set.of()), Optional.empty(),
             site.options().without("topographic-factor"));
-        double there = Math.sqrt(code.velocityPressure(site, height, nowhere) / code.velocityPressure(flat, TEN, nowhere));
+        double there = Math.sqrt(code.velocityPressure(site, wind.height(), nowhere) / code.velocityPressure(flat, TEN, nowhere));
         return new Limits.Limit(bar < 0 ? key : key.substring(0, bar), bar < 0 ? "" : key.substring(bar + 1), gust * there, gust,
             averaged(basic, site.averaging(), Averaging.MEAN_10_MIN), found.multiple(), found.bySquare());
     }

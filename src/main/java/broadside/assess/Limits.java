@@ -9,10 +9,11 @@ import java.util.Optional;
  * @param height  at which the gust at the item holds, m above the ground
  * @param level   how the wind of the code was brought to the wind that blows; empty where it is that wind
  */
-public record Limits(List<Limit> list, double height, String level) {
+public record Limits(List<Limit> list, double height, String level, List<Change> changes) {
 
     public Limits {
         list = List.copyOf(list);
+        changes = List.copyOf(changes);
     }
 
     /**
@@ -27,6 +28,9 @@ public record Limits(List<Limit> list, double height, String level) {
      * @param bySquare  found by the square of the speed, because a least value of the code holds below
      */
     public record Limit(String check, String state, double atItem, double inTheOpen, double mean, double multiple, boolean bySquare) { }
+
+    /** One thing changed, in words, and the first limit then; empty where none was found. */
+    public record Change(String what, Optional<Limit> first) { }
 
     /** The first to govern with the item as it is. */
     public Optional<Limit> first() {

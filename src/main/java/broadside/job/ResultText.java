@@ -64,6 +64,8 @@ public final class ResultText {
             list.addObject().put("check", each.check()).put("state", each.state()).put("gust_m_s", each.inTheOpen()).put("at_height_m", 10.0).put("mean_m_s", each.mean())
                 .put("gust_at_item_m_s", each.atItem()).put("item_height_m", l.height()).put("by-square", each.bySquare());
         }));
+        ArrayNode changes = node.putArray("limit-changes");
+        limits.ifPresent(l -> l.changes().forEach(c -> changes.addObject().put("with", c.what()).put("gust_m_s", c.first().map(Limits.Limit::inTheOpen).orElse(0.0))));
     }
 
     /** Every check in one list, and each part with what it is, what was tried and what must be confirmed. */

@@ -190,9 +190,11 @@ final class CheckList {
     }
 
     private void limits() {
-        for (String label : List.of("Greatest gust and equal mean", "Action levels")) {
-            fact(label, NOT_HERE);
+        for (ItemResult item : assessment.items()) {
+            fact("Greatest gust and equal mean" + (assessment.items().size() > 1 ? ", " + item.item().mark() : ""), LimitBlocks.answer(item, format).map(f -> f.value() + "; " + f.remark())
+                .orElse("not worked out: nothing was checked that the wind uses up"));
         }
+        fact("Action levels", NOT_HERE);
         fact("Who measures, and at which height", NOT_GIVEN);
         group("8 Limiting wind");
     }

@@ -43,6 +43,10 @@ final class LimitBlocks {
         blocks.add(new Table("The wind that blows, not the wind of a year; the factors of each rule are inside", List.of(new Column("Check", false, 6), new Column("Holds for", false, 4),
             new Column("3 s gust at the item, " + format.length(limits.height()), true, 4), new Column("3 s gust at 10 m in the open", true, 4), new Column("10 min mean there", true, 3),
             new Column("Governs", false, 4)), rows));
+        if (!limits.changes().isEmpty()) {
+            blocks.add(new Table("What would change it, one thing at a time", List.of(new Column("With", false, 9), new Column("3 s gust at 10 m in the open", true, 4), new Column("First check", false, 5)),
+                limits.changes().stream().map(c -> new Row(List.of(c.what(), c.first().map(l -> format.slow(l.inTheOpen())).orElse("not found"), c.first().map(Limit::check).orElse("-")), false)).toList()));
+        }
         blocks.add(new Paragraph("Found on the same calculation with other winds, for what carries it as named above, wind from the worst side; gusts and means at 10 m by the ratios of Durst for open "
             + "ground, which other publications put up to a sixth apart. " + SHORT + (limits.level().isEmpty() ? "" : " Here: " + limits.level() + ".")
             + " This is no permission to stay: act earlier, and let the engineer set the levels.", Tone.SMALL));
