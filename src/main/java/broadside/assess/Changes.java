@@ -58,12 +58,12 @@ record Changes(Carried carried, Rows own) implements Item.Kinds<Map<String, Item
         return new Hoarding(h.mark(), h.length(), h.height(), h.clearance(), h.solidity(), h.returnLeft(), h.returnRight(), h.shelter(), h.gates(), h.spacing(), held, h.carrying());
     }
 
-    private static Kentledge half(Kentledge k) {
+    private Kentledge half(Kentledge k) {
         return new Kentledge(again(k.mass()), k.lever(), again(k.frontMass()), k.faceMass(), k.surface());
     }
 
-    private static Optional<Mass> again(Optional<Mass> mass) {
-        return mass.map(m -> Mass.kilograms(1.5 * m.kilograms()));
+    private Optional<Mass> again(Optional<Mass> mass) {
+        return mass.map(m -> Mass.kilograms(value("more-ballast") * m.kilograms()));
     }
 
     @Override
