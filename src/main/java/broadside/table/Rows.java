@@ -59,6 +59,12 @@ public final class Rows {
         return row == null ? basis.orElseThrow().text(key, column) : cell(row, column);
     }
 
+    /** Where a row was printed, with its status. */
+    public Source source(String key) {
+        Row row = row(key);
+        return row == null ? basis.orElseThrow().source(key) : row.source();
+    }
+
     public boolean isPrinted(String key, String column) {
         return !text(key, column).equals("-");
     }
