@@ -82,6 +82,7 @@ final class AnswerDesk {
     private static List<Download> downloads(String token) {
         return List.of(new Download("/summary.pdf?paper=a4&j=" + token, "PDF on A4 paper"),
             new Download("/summary.pdf?paper=letter&j=" + token, "PDF on Letter paper"),
+            new Download("/card?j=" + token, "Wind card for the crew"),
             new Download("/job.json?j=" + token, "Job file, to open again"),
             new Download("/side-by-side?j=" + token, "Every code side by side"));
     }

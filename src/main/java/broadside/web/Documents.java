@@ -3,10 +3,12 @@ package broadside.web;
 import broadside.assess.Assessment;
 import broadside.assess.Assessor;
 import broadside.assess.Loads;
+import broadside.crew.ActionLevels;
 import broadside.panel.Item;
 import broadside.quantity.Units;
 import broadside.sheet.Drawing;
 import broadside.sheet.Sheet;
+import broadside.sheet.WindCard;
 import java.util.Optional;
 
 /** The makers of documents that the pages hand out: the one place where this package meets them. */
@@ -14,6 +16,9 @@ public interface Documents {
 
     /** The document of an assessed job. */
     Sheet sheet(Assessment assessment);
+
+    /** What a crew reads at arm's length, by the levels at which it acts. */
+    WindCard card(Assessment assessment, ActionLevels levels);
 
     /** The document that holds one item against every code. */
     Sheet sideBySide(Assessor assessor, Assessment assessment, Item item);

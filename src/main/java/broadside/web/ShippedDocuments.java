@@ -3,6 +3,7 @@ package broadside.web;
 import broadside.assess.Assessment;
 import broadside.assess.Assessor;
 import broadside.assess.Loads;
+import broadside.crew.ActionLevels;
 import broadside.job.JobText;
 import broadside.job.SchemaText;
 import broadside.panel.Item;
@@ -18,6 +19,7 @@ import broadside.sheet.Drawing;
 import broadside.sheet.ItemDrawing;
 import broadside.sheet.Sheet;
 import broadside.sheet.SheetMaker;
+import broadside.sheet.WindCard;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.UncheckedIOException;
@@ -43,6 +45,11 @@ public final class ShippedDocuments implements Documents {
     @Override
     public Sheet sheet(Assessment assessment) {
         return SheetMaker.of(assessment, LocalDate.now(clock).toString());
+    }
+
+    @Override
+    public WindCard card(Assessment assessment, ActionLevels levels) {
+        return WindCard.of(assessment, levels, LocalDate.now(clock).toString());
     }
 
     @Override

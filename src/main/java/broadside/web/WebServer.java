@@ -1,6 +1,7 @@
 package broadside.web;
 
 import broadside.assess.Assessor;
+import broadside.crew.Crew;
 import broadside.job.JobReader;
 import broadside.job.PublishedChecks;
 import broadside.table.TableFiles;
@@ -38,6 +39,7 @@ public final class WebServer {
         FormDesk forms = new FormDesk(pages, assessor, reader, documents, FormTables.of(tables, assessor));
         CompareDesk compare = new CompareDesk(pages, assessor, reader, documents);
         AnswerDesk answers = new AnswerDesk(pages, assessor, reader, documents, forms, compare);
+        CardDesk cards = new CardDesk(pages, assessor, reader, documents, new Crew(tables).levels());
         StartDesk start = new StartDesk(pages, assessor.codes(), reader, documents, forms);
         Shelf shelf = new Shelf(pages, tables, checks);
         this.javalin = Javalin.create(cfg -> {
@@ -52,6 +54,7 @@ public final class WebServer {
             cfg.routes.get("/answer", answers::show);
             cfg.routes.get("/summary.pdf", answers::pdf);
             cfg.routes.get("/job.json", answers::job);
+            cfg.routes.get("/card", cards::show);
             cfg.routes.get("/drawing.svg", answers::drawing);
             cfg.routes.get("/side-by-side", compare::show);
             cfg.routes.post("/side-by-side", compare::type);
