@@ -28,6 +28,7 @@ class EvacuationClassesTest {
         assertThat(found.peak()).isCloseTo(peak, within(0.5));
         assertThat(found.design()).isCloseTo(design, within(0.6));
         assertThat(found.of().limit()).isPresent();
+        assertThat(found.of().remark()).contains("farmland");
         assertThat(found.of().status()).isEqualTo(Status.READ);
         SheetCheck.holds(trace);
     }
