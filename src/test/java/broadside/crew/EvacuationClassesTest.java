@@ -90,7 +90,8 @@ class EvacuationClassesTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"action-levels", "rise-of-wind", "evacuation-classes", "event-plans", "work-limits", "handling", "comfort", "wind-scale", "lifting"})
+    @ValueSource(strings = {"action-levels", "rise-of-wind", "evacuation-classes", "event-plans", "work-limits", "handling", "comfort",
+        "wind-scale", "lifting"})
     void aMissingTableStopsTheStart(String table) {
         assertThatThrownBy(() -> Crews.without("crew/1/" + table + ".csv")).isInstanceOf(TableFormat.class).hasMessageContaining(table);
     }
