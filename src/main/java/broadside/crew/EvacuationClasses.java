@@ -24,10 +24,13 @@ public final class EvacuationClasses {
      *
      * @param limit      wind before which it is cleared; absent where it never is
      * @param often      how often that happens
+     * @param remark     what must be known with the limit; empty for nothing
      * @param byFifty    whether its pressure is that of the 50-year wind
+     * @param share      of that pressure
+     * @param factor     on the wind
      */
-    public record EvacuationClass(String key, String title, Optional<Speed> limit, String often, boolean byFifty, double share, double factor, String place,
-                                  Status status) { }
+    public record EvacuationClass(String key, String title, Optional<Speed> limit, String often, String remark, boolean byFifty, double share, double factor,
+                                  String place, Status status) { }
 
     /**
      * What a class asks for.
@@ -50,7 +53,8 @@ public final class EvacuationClasses {
 
     private EvacuationClass read(String key) {
         Optional<Speed> limit = figures.speed(key, "limit");
-        return new EvacuationClass(key, rows.text(key, "title"), limit, rows.text(key, "often"), limit.isEmpty() && !rows.isPrinted(key, "pressure"),
+        return new EvacuationClass(key, rows.text(key, "title"), limit, rows.text(key, "often"),
+            rows.isPrinted(key, "remark") ? rows.text(key, "remark") : "", limit.isEmpty() && !rows.isPrinted(key, "pressure"),
             figures.value(key, "share"), figures.value(key, "factor"), figures.place(key), figures.source(key).status());
     }
 

@@ -120,7 +120,8 @@ class ActionLevelsTest {
     void aTypedRateTakesTheTablesPlace() {
         Trace trace = new Trace();
         LeadTime.Plan plan = new LeadTime.Plan(Map.of("act", 1000.0, "prepare", 0.0, "clear", 0.0), Optional.empty(), Optional.of(0.001), Optional.empty());
-        assertThat(starts(plan, trace)).extracting(LeadTime.Start::gust).usingComparatorForType((a, b) -> Math.abs(a - b) < 1e-9 ? 0 : Double.compare(a, b), Double.class)
+        assertThat(starts(plan, trace)).extracting(LeadTime.Start::gust)
+            .usingComparatorForType((a, b) -> Math.abs(a - b) < 1e-9 ? 0 : Double.compare(a, b), Double.class)
             .containsExactly(12.0, 16.0, 18.0);
         assertThat(starts(new LeadTime.Plan(Map.of("act", 3000.0), Optional.empty(), Optional.of(0.001), Optional.empty()), new Trace()).get(1).gust())
             .isCloseTo(15, within(1e-9));

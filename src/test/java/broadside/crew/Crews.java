@@ -16,7 +16,8 @@ final class Crews {
 
     static Crew with(String table, UnaryOperator<String> change) {
         Map<String, byte[]> files = new TreeMap<>(TableFiles.shipped("code-tables"));
-        files.computeIfPresent("crew/1/" + table + ".csv", (name, bytes) -> change.apply(new String(bytes, StandardCharsets.UTF_8)).getBytes(StandardCharsets.UTF_8));
+        files.computeIfPresent("crew/1/" + table + ".csv", (name, bytes) ->
+            change.apply(new String(bytes, StandardCharsets.UTF_8)).getBytes(StandardCharsets.UTF_8));
         return new Crew(TableLibrary.of(files, Map.of()));
     }
 
@@ -27,7 +28,8 @@ final class Crews {
     }
 
     static double value(Trace trace, String step) {
-        return trace.find(step).map(Step::value).orElseThrow(() -> new AssertionError(step + " is not among " + trace.steps().stream().map(Step::name).toList()));
+        return trace.find(step).map(Step::value).orElseThrow(() ->
+            new AssertionError(step + " is not among " + trace.steps().stream().map(Step::name).toList()));
     }
 
     private Crews() { }

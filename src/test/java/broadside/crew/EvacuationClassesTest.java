@@ -28,6 +28,7 @@ class EvacuationClassesTest {
         assertThat(found.peak()).isCloseTo(peak, within(0.5));
         assertThat(found.design()).isCloseTo(design, within(0.6));
         assertThat(found.of().limit()).isPresent();
+        assertThat(found.of().remark()).contains("farmland");
         assertThat(found.of().status()).isEqualTo(Status.READ);
         SheetCheck.holds(trace);
     }
@@ -89,7 +90,8 @@ class EvacuationClassesTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"action-levels", "rise-of-wind", "evacuation-classes", "event-plans", "work-limits", "handling", "comfort", "wind-scale", "lifting"})
+    @ValueSource(strings = {"action-levels", "rise-of-wind", "evacuation-classes", "event-plans", "work-limits", "handling", "comfort",
+        "wind-scale", "lifting"})
     void aMissingTableStopsTheStart(String table) {
         assertThatThrownBy(() -> Crews.without("crew/1/" + table + ".csv")).isInstanceOf(TableFormat.class).hasMessageContaining(table);
     }

@@ -16,7 +16,10 @@ class CrewPartsTest {
         return Jobs.CHECKS.run(Map.of("a.json", text.getBytes(StandardCharsets.UTF_8))).get(0).lines().get(0);
     }
 
-    /** Limit 20 m/s, 30 min, 10 m/s in an hour, sheets held to 10 m/s: 10 - 5; edge on 0.5 x 1.2 x 100 x 0.08 x 2 = 9.6 N; four people on 2 m2 2 x (100/1.38)^0.5. */
+    /**
+     * Limit 20 m/s, 30 min, 10 m/s in an hour, sheets held to 10 m/s: 10 - 5; edge on 0.5 x 1.2 x 100 x 0.08 x 2 = 9.6 N;
+     * four people on 2 m2: 2 x (100/1.38)^0.5.
+     */
     @ParameterizedTest
     @CsvSource(delimiter = ';', quoteCharacter = '~', value = {
         "'part': 'action-levels', 'limit': '20 m/s', 'act-minutes': 30, 'work-limit': '10 m/s';start/act;'5 m/s';'0.001 m/s'",
@@ -45,7 +48,8 @@ class CrewPartsTest {
         "'part': 'handling', 'width': '2 m', 'height': '1 m', 'people': 0;people: at least one",
         "'part': 'handling', 'width': '2 m', 'height': '1 m', 'people': 1.5;people: a whole number",
         "'part': 'published-limit', 'limit': 'alerts';limit: this source prints no number",
-        "'part': 'crane-wind', 'mass': '50 kg', 'area': '3 m2', 'drag-coefficient': 1.2, 'chart-speed': '9 m/s', 'standard': true;standard: this is no standard load",
+        "'part': 'crane-wind', 'mass': '50 kg', 'area': '3 m2', 'drag-coefficient': 1.2, 'chart-speed': '9 m/s', 'standard': true;"
+            + "standard: this is no standard load",
         "'part': 'crane-wind', 'mass': '50 kg', 'area': '3 m2', 'chart-speed': '9 m/s';drag-coefficient: a plain number",
         "'part': 'crane-wind', 'mass': '50 kg', 'area': '3 m2', 'shape': 'sheet', 'chart-speed': '9 m/s';shape: this shape has no"})
     void aPartThatCannotBeWorkedOut(String given, String problem) {
