@@ -25,6 +25,9 @@ import java.util.Optional;
  */
 public record WindCard(String title, String place, String date, List<Structure> structures, String made) {
 
+    /** What a drawing shows begins with the views of it. */
+    private static final String OF = " of ";
+
     /**
      * One structure.
      *
@@ -47,7 +50,8 @@ public record WindCard(String title, String place, String date, List<Structure> 
     }
 
     private static Structure structure(ItemResult item, ActionLevels levels, Units units, Format format) {
-        String what = ItemDrawing.words(item.item(), Optional.empty(), units);
+        String drawn = ItemDrawing.words(item.item(), Optional.empty(), units);
+        String what = drawn.substring(drawn.indexOf(OF) + OF.length());
         Optional<Limit> first = item.limits().flatMap(Limits::first);
         if (first.isEmpty()) {
             return new Structure(item.item().mark(), what, "", "", "No limiting wind was found for it: nothing that carries it was checked. Ask the engineer.", true, List.of());

@@ -17,6 +17,7 @@ import tools.jackson.databind.JsonNode;
 /** The wind card: one page that holds all it needs, so that it works when it is saved or printed. */
 final class CardDesk {
 
+    private static final String LINK = "<link rel=\"stylesheet\" href=\"/card.css\">";
     private static final String STYLE = style();
     /** The style stands in the page itself, and only this style is allowed there. */
     private static final String POLICY = Guard.HEADERS.get("Content-Security-Policy") + "; style-src 'sha256-" + digest(STYLE) + "'";
@@ -28,7 +29,7 @@ final class CardDesk {
     private final ActionLevels levels;
 
     /** What the template reads. */
-    public record View(WindCard card, String style, String back) { }
+    public record View(WindCard card, String back) { }
 
     CardDesk(Pages pages, Assessor assessor, JobReader reader, Documents documents, ActionLevels levels) {
         this.pages = pages;
@@ -42,7 +43,8 @@ final class CardDesk {
         JsonNode job = Token.read(ctx.queryParam("j"));
         WindCard card = documents.card(assessor.withLimits(assessor.assess(reader.read(job).orThrow())), levels);
         ctx.header("Content-Security-Policy", POLICY);
-        pages.show(ctx, 200, "card", card.title(), new View(card, STYLE, "/answer?j=" + Token.of(job)));
+        String page = pages.text("card", pages.frame(card.title()), new View(card, "/answer?j=" + Token.of(job)));
+        ctx.contentType("text/html; charset=utf-8").result(page.replace(LINK, "<style>" + STYLE + "</style>"));
     }
 
     private static String style() {

@@ -10,6 +10,7 @@ import java.net.http.HttpRequest;
 import java.net.http.HttpResponse;
 import java.nio.charset.StandardCharsets;
 import java.util.Base64;
+import java.util.List;
 import java.util.zip.DeflaterOutputStream;
 import java.util.zip.Deflater;
 import org.junit.jupiter.api.Test;
@@ -180,5 +181,25 @@ class AnswerTest {
         for (String page : new String[] {"/", "/fill?kind=post-sign&code=en-1991-1-4/2005", "/answer?j=" + Token.of(json(Pool.SIGN)), "/tables", "/checks"}) {
             assertThat(Pool.bytes(page).body().length + files).as(page).isLessThan(200 << 10);
         }
+    }
+
+    /** A fence whose blocks do not hold the wind of the code: the card says at which gust it must be gone. */
+    @Test
+    void the_wind_card_holds_all_it_needs() {
+        String job = Pool.SIGN.replaceAll("\"items\":\\[.*\\]\\}$", "\"items\":[{\"mark\":\"F1\",\"kind\":\"banner-fence\",\"panel-length\":\"3.45 m\",\"panel-height\":\"2 m\",\"panels\":40,"
+            + "\"panel-mass\":\"18 kg\",\"foot-mass\":\"25 kg\",\"foot-length\":\"0.65 m\",\"ground\":\"asphalt\",\"held-by\":\"its own feet\"}]}");
+        var answer = Pool.get("/card?j=" + Token.of(json(job)));
+        assertThat(answer.statusCode()).isEqualTo(200);
+        String page = answer.body();
+        assertThat(page.length()).isLessThan(100 << 10);
+        assertThat(page).contains("Gone before a gust of").contains("Prepare").contains("Act").contains("Clear").contains("Who").contains("PRELIMINARY").contains("does not hold the wind")
+            .doesNotContain("src=").doesNotContain("<script").doesNotContain("<link").doesNotContain("url(");
+        assertThat(answer.headers().firstValue("Content-Security-Policy").orElseThrow()).contains("style-src 'sha256-");
+        assertThat(page.indexOf("<style>")).isPositive();
+        List<Double> gusts = java.util.regex.Pattern.compile("class=\"figure\">([0-9.]+) m/s<").matcher(page).results().map(m -> Double.valueOf(m.group(1))).toList();
+        assertThat(gusts).as("gust and mean of three levels").hasSize(6);
+        assertThat(gusts.get(0)).isLessThan(gusts.get(2));
+        assertThat(gusts.get(2)).isLessThan(gusts.get(4));
+        assertThat(gusts.get(1)).as("a mean is lower than its gust").isLessThan(gusts.get(0));
     }
 }

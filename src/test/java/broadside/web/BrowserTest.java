@@ -194,6 +194,7 @@ class BrowserTest {
         pages.put("side by side", "/side-by-side?j=" + token);
         pages.put("answer", "/answer?j=" + token);
         pages.put("answer uncovered", "/answer?j=" + uncovered);
+        pages.put("card", "/card?j=" + token);
         pages.put("tables", "/tables");
         pages.put("edition", "/tables/en-1991-1-4/2005");
         pages.put("checks", "/checks");

@@ -52,6 +52,16 @@ class GuardTest {
         }
     }
 
+    /** A card works when it is saved, so that its style stands in it; that style alone is allowed, by its digest. */
+    @Test
+    void the_card_holds_its_own_style_and_nothing_else_inline() {
+        HttpResponse<String> answer = Pool.get("/card?j=" + Token.of(JobText.read(Pool.SIGN.getBytes(StandardCharsets.UTF_8))));
+        Guard.HEADERS.forEach((name, value) -> assertThat(answer.headers().firstValue(name).orElseThrow()).as(name).startsWith(value));
+        assertThat(answer.headers().firstValue("Content-Security-Policy").orElseThrow()).contains("style-src 'sha256-").doesNotContain("unsafe");
+        assertThat(answer.body().split("<style>")).hasSize(2);
+        assertThat(answer.body()).doesNotContain(" style=").doesNotContain("<script").doesNotContainPattern("\\son[a-z]+=").doesNotContain("http://").doesNotContain("https://");
+    }
+
     @Test
     void pages_of_jobs_are_not_stored() {
         String token = Token.of(JobText.read(Pool.SIGN.getBytes(StandardCharsets.UTF_8)));

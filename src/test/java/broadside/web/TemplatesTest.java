@@ -91,6 +91,7 @@ class TemplatesTest {
         pages.put("answer uncovered", Pool.get("/answer?j=" + uncovered).body());
         pages.put("answer example", Pool.get("/answer?j=" + example()).body());
         pages.put("compare full", Pool.get("/side-by-side?j=" + token).body());
+        pages.put("card", Pool.get("/card?j=" + token).body());
         pages.put("tables", Pool.get("/tables").body());
         pages.put("edition", Pool.get("/tables/asce-7/16").body());
         pages.put("checks", Pool.get("/checks").body());
