@@ -14,7 +14,7 @@ import org.junit.jupiter.api.Test;
 /** A package may use only packages that stand before it in this list. */
 class LayersTest {
 
-    private static final List<String> ORDER = List.of("quantity", "trace", "table", "site", "panel", "aero", "codes", "action", "support", "assess", "job",
+    private static final List<String> ORDER = List.of("quantity", "trace", "table", "site", "weather", "panel", "aero", "codes", "action", "support", "assess", "job",
         "sheet", "report", "web", "cli");
 
     /** Imports, and whole names in the text. */

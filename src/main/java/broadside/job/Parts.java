@@ -24,7 +24,8 @@ final class Parts {
     private static final String OPEN_FLOW = "open-flow/1";
 
     private static final String NAMES = "convert-speed, plate-drag, section, tip-mass-frequency, post-bending-asd, post-modulus-needed, post-torsion, embedment-ibc, "
-        + "pier-broms-clay, broms-clay-capacity, pad, bolt-group, facade-fixings, stay, frame-ballast, edge-pull, block-footing";
+        + "pier-broms-clay, broms-clay-capacity, pad, bolt-group, facade-fixings, stay, frame-ballast, edge-pull, block-footing, "
+        + WeatherParts.NAMES;
 
     private final SpeedConversion conversion;
     private final CodeLibrary codes;
@@ -32,6 +33,7 @@ final class Parts {
     private final GroundParts ground;
     private final PostParts posts;
     private final BallastParts ballast;
+    private final WeatherParts weather;
 
     Parts(SpeedConversion conversion, CodeLibrary codes, Catalogue catalogue, TableLibrary tables) {
         this.conversion = conversion;
@@ -39,6 +41,7 @@ final class Parts {
         this.catalogue = catalogue;
         this.ground = new GroundParts(tables);
         this.ballast = new BallastParts(tables.edition("stability/1").orElseThrow());
+        this.weather = new WeatherParts(tables);
         this.posts = new PostParts(tables.edition(PostRules.EDITION).orElseThrow());
     }
 
@@ -51,6 +54,7 @@ final class Parts {
             case "tip-mass-frequency", "post-bending-asd", "post-modulus-needed", "post-torsion" -> posts.run(part, given);
             case "embedment-ibc", "pier-broms-clay", "broms-clay-capacity", "pad" -> ground.run(part, given);
             case "bolt-group", "facade-fixings", "stay", "frame-ballast", "edge-pull", "block-footing" -> ballast.run(part, given);
+            case "gust-factor", "beaufort", "forecast-gust", "open-wind", "gumbel-fit", "extremes", "return-level", "lifetime-risk" -> weather.run(part, given);
             default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows " + NAMES);
         };
     }
