@@ -107,8 +107,8 @@ final class WeatherParts {
         Trace trace = new Trace();
         boolean gust = given.has("gust");
         Reading.Value speed = speed(given, gust ? "gust" : "mean");
-        ForecastWind.Forecast forecast = new ForecastWind.Forecast(gust ? ForecastWind.Kind.GUST : ForecastWind.Kind.MEAN, new Speed(speed.si(), speed.typed()), meanSeconds(given));
-        forecasts.atItem(forecast, place(given), trace);
+        ForecastWind.Kind kind = gust ? ForecastWind.Kind.GUST : ForecastWind.Kind.MEAN;
+        forecasts.atItem(new ForecastWind.Forecast(kind, new Speed(speed.si(), speed.typed()), meanSeconds(given)), place(given), trace);
         return trace;
     }
 
@@ -141,7 +141,8 @@ final class WeatherParts {
      */
     private Trace extremes(JsonNode given, boolean asked) {
         Trace trace = new Trace();
-        Unit unit = Unit.of(Dimension.SPEED, PublishedChecks.text(given, "unit")).orElseThrow(() -> PublishedChecks.bad("unit must be one of speed, like \"km/h\""));
+        Unit unit = Unit.of(Dimension.SPEED, PublishedChecks.text(given, "unit"))
+            .orElseThrow(() -> PublishedChecks.bad("unit must be one of speed, like \"km/h\""));
         Gumbel.Method method = Gumbel.Method.of(PublishedChecks.text(given, "method"))
             .orElseThrow(() -> PublishedChecks.bad("method must be \"moments\" or \"maximum likelihood\""));
         List<Double> maxima = numbers(given, "series").stream().map(v -> v * unit.toSi()).toList();

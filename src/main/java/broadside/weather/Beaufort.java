@@ -118,8 +118,9 @@ public final class Beaufort {
         Force force = force(byUnit.get(scale), scale);
         trace.given("v", "mean wind speed at 10 m", speed * scale.toSi(), "m/s", Plain.number(speed) + " " + scale.symbol());
         Coefficient printed = rows.number(Integer.toString(force.number()), scale.column + "-from");
-        byUnit.forEach((each, number) -> trace.line("beaufort-force/" + each.symbol().replace("/", "-"), "B_{" + each.symbol() + "}", "force by the edges in " + each.symbol())
-            .in("v", speed * scale.toSi(), "m/s").from(printed.source().citation(), printed.source().status()).reads(rows.text(Integer.toString(number), "name"), number, "1"));
+        byUnit.forEach((each, number) -> trace.part(each.symbol().replace("/", "-"))
+            .line("beaufort-force", "B_{" + each.symbol() + "}", "force by the edges in " + each.symbol()).in("v", speed * scale.toSi(), "m/s")
+            .from(printed.source().citation(), printed.source().status()).reads(rows.text(Integer.toString(number), "name"), number, "1"));
         trace.line("beaufort-force", "B", "force by the edges in the unit of the speed, " + scale.symbol()).in("v", speed * scale.toSi(), "m/s")
             .from(printed.source().citation(), printed.source().status()).reads(force.name(), force.number(), "1");
         return new Reading(force, byUnit, told(speed, scale, force, byUnit));
@@ -129,16 +130,20 @@ public final class Beaufort {
         List<String> told = new ArrayList<>();
         byUnit.forEach((each, number) -> {
             if (number != force.number()) {
-                told.add("The printed edges in " + each.symbol() + " make this speed force " + number + ", those in " + scale.symbol() + " force " + force.number() + ".");
+                told.add("The printed edges in " + each.symbol() + " make this speed force " + number + ", those in " + scale.symbol() + " force "
+                    + force.number() + ".");
             }
         });
-        double kmh = speed * scale.toSi() / Scale.KILOMETRES_PER_HOUR.toSi();
-        for (Force each : forces(Scale.KILOMETRES_PER_HOUR)) {
+        Scale kilometres = Scale.KILOMETRES_PER_HOUR;
+        // 62 km/h through m/s and back is not 62 in binary
+        double kmh = (scale == kilometres ? speed : speed * scale.toSi() / kilometres.toSi()) * (1 + 1e-12);
+        for (Force each : forces(kilometres)) {
             each.also().ifPresent(other -> {
                 int dash = other.indexOf('-');
                 double from = Double.parseDouble(other.substring(0, dash));
                 double to = Double.parseDouble(other.substring(dash + 1));
-                if (kmh >= Math.min(from, each.from()) && kmh < Math.max(from, each.from()) || kmh > each.to().orElse(to) && kmh <= to) {
+                double next = each.to().orElse(to) + 1;
+                if (kmh >= Math.min(from, each.from()) && kmh < Math.max(from, each.from()) || kmh >= next && kmh < to + 1) {
                     told.add(String.format(Locale.ROOT, "Some tables print %s km/h for force %d where others print %s-%s.", other, each.number(),
                         Plain.number(each.from()), Plain.number(each.to().orElse(to))));
                 }

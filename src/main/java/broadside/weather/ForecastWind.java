@@ -78,7 +78,8 @@ public final class ForecastWind {
         double result = gustAtItem(mean, g, z, place.roughness(), trace);
         double open = GroundProfile.gust(trace.line("gust-open-ground", "V_o", "gust at the item if the ground there were that of the forecast"))
             .in("U_f", uf, "m/s").in("z", z, "m").in("z_{0f}", place.openRoughness(), "m").in("g", g)
-            .gives("U_f (ln(z / z_{0f}) + g) / " + ground.logTen("z_{0f}"), uf * (Math.log(z / place.openRoughness()) + g) / ground.logTen(place.openRoughness()), "m/s");
+            .gives("U_f (ln(z / z_{0f}) + g) / " + ground.logTen("z_{0f}"),
+                uf * (Math.log(z / place.openRoughness()) + g) / ground.logTen(place.openRoughness()), "m/s");
         List<Limit> all = new ArrayList<>();
         for (Peak peak : peaks(forecast.meanSeconds(), place)) {
             Trace quiet = trace.quiet();
@@ -111,7 +112,8 @@ public final class ForecastWind {
     public AtSensor atSensor(Speed gustAtItem, double meanSeconds, Place place, double sensorHeight, Trace trace) {
         double v = requireSpeed("gust", gustAtItem);
         double z = given(place, trace);
-        double zs = trace.given("z_s", "height of the sensor above the ground", ground.requireSensor(sensorHeight, place.roughness()), "m", Plain.number(sensorHeight) + " m");
+        double zs = trace.given("z_s", "height of the sensor above the ground", ground.requireSensor(sensorHeight, place.roughness()), "m",
+            Plain.number(sensorHeight) + " m");
         trace.given("V", "gust at the item", v, "m/s", gustAtItem.typed());
         double[] own = sensor(v, peak(trace), z, zs, place.roughness(), trace);
         List<Limit> means = new ArrayList<>();
@@ -151,14 +153,16 @@ public final class ForecastWind {
     }
 
     private double openMean(double gust, double g, Place place, Trace trace) {
-        return GroundProfile.gust(trace.line("open-mean", "U_f", "mean at 10 m in the open")).in("V_f", gust, "m/s").in("g", g).in("z_{0f}", place.openRoughness(), "m")
+        return GroundProfile.gust(trace.line("open-mean", "U_f", "mean at 10 m in the open")).in("V_f", gust, "m/s").in("g", g)
+            .in("z_{0f}", place.openRoughness(), "m")
             .gives("V_f / (1 + g / " + ground.logTen("z_{0f}") + ")", gust / (1 + g / ground.logTen(place.openRoughness())), "m/s");
     }
 
     private double meanAtItem(double uf, double kr, double z, double z0, Trace trace) {
         double ten = GroundProfile.profile(trace.line("mean-at-10-m", "U_10", "mean at 10 m over the ground of the item")).in("k_r", kr).in("U_f", uf, "m/s")
             .gives("k_r U_f", kr * uf, "m/s");
-        return GroundProfile.profile(trace.line("mean-at-item", "U_z", "mean at the height of the item")).in("U_10", ten, "m/s").in("z", z, "m").in("z_0", z0, "m")
+        return GroundProfile.profile(trace.line("mean-at-item", "U_z", "mean at the height of the item")).in("U_10", ten, "m/s").in("z", z, "m")
+            .in("z_0", z0, "m")
             .gives("U_10 ln(z / z_0) / " + ground.logTen("z_0"), ten * Math.log(z / z0) / ground.logTen(z0), "m/s");
     }
 
@@ -169,7 +173,8 @@ public final class ForecastWind {
     }
 
     private double turbulence(double z, double z0, Trace trace) {
-        return GroundProfile.profile(trace.line("turbulence-intensity", "I_z", "intensity of turbulence at the height of the item")).in("z", z, "m").in("z_0", z0, "m")
+        return GroundProfile.profile(trace.line("turbulence-intensity", "I_z", "intensity of turbulence at the height of the item")).in("z", z, "m")
+            .in("z_0", z0, "m")
             .gives("1 / ln(z / z_0)", 1 / Math.log(z / z0), "1");
     }
 
@@ -182,19 +187,24 @@ public final class ForecastWind {
     private double[] back(double v, double kr, double g, double z, Place place, Trace trace) {
         double z0 = place.roughness();
         double mean = meanOfGust(v, g, z, z0, trace);
-        double ten = GroundProfile.profile(trace.line("mean-at-10-m", "U_10", "mean at 10 m over the ground of the item")).in("U_z", mean, "m/s").in("z", z, "m")
+        double ten = GroundProfile.profile(trace.line("mean-at-10-m", "U_10", "mean at 10 m over the ground of the item")).in("U_z", mean, "m/s")
+            .in("z", z, "m")
             .in("z_0", z0, "m").gives("U_z " + ground.logTen("z_0") + " / ln(z / z_0)", mean * ground.logTen(z0) / Math.log(z / z0), "m/s");
-        double open = GroundProfile.profile(trace.line("open-mean", "U_f", "mean at 10 m in the open")).in("U_10", ten, "m/s").in("k_r", kr).gives("U_10 / k_r", ten / kr, "m/s");
+        double open = GroundProfile.profile(trace.line("open-mean", "U_f", "mean at 10 m in the open")).in("U_10", ten, "m/s").in("k_r", kr)
+            .gives("U_10 / k_r", ten / kr, "m/s");
         double gust = GroundProfile.gust(trace.line("open-gust", "V_f", "3 s gust at 10 m in the open")).in("U_f", open, "m/s").in("g", g)
-            .in("z_{0f}", place.openRoughness(), "m").gives("U_f (1 + g / " + ground.logTen("z_{0f}") + ")", open * (1 + g / ground.logTen(place.openRoughness())), "m/s");
+            .in("z_{0f}", place.openRoughness(), "m")
+            .gives("U_f (1 + g / " + ground.logTen("z_{0f}") + ")", open * (1 + g / ground.logTen(place.openRoughness())), "m/s");
         return new double[] {open, gust};
     }
 
     private double[] sensor(double v, double g, double z, double zs, double z0, Trace trace) {
         double mean = meanOfGust(v, g, z, z0, trace);
-        double reads = GroundProfile.profile(trace.line("sensor-mean", "U_s", "mean at the height of the sensor")).in("U_z", mean, "m/s").in("z_s", zs, "m").in("z", z, "m")
+        double reads = GroundProfile.profile(trace.line("sensor-mean", "U_s", "mean at the height of the sensor")).in("U_z", mean, "m/s")
+            .in("z_s", zs, "m").in("z", z, "m")
             .in("z_0", z0, "m").gives("U_z ln(z_s / z_0) / ln(z / z_0)", mean * Math.log(zs / z0) / Math.log(z / z0), "m/s");
-        double gust = GroundProfile.gust(trace.line("sensor-gust", "V_s", "3 s gust at the height of the sensor")).in("U_s", reads, "m/s").in("g", g).in("z_s", zs, "m")
+        double gust = GroundProfile.gust(trace.line("sensor-gust", "V_s", "3 s gust at the height of the sensor")).in("U_s", reads, "m/s")
+            .in("g", g).in("z_s", zs, "m")
             .in("z_0", z0, "m").gives("U_s (1 + g / ln(z_s / z_0))", reads * (1 + g / Math.log(zs / z0)), "m/s");
         return new double[] {reads, gust};
     }
@@ -202,15 +212,17 @@ public final class ForecastWind {
     private Limit limit(List<Limit> all, boolean least, String step, String symbol, Trace trace) {
         Comparator<Limit> by = Comparator.comparingDouble(Limit::value);
         Limit found = (least ? all.stream().min(by) : all.stream().max(by)).orElseThrow();
-        trace.line(step + (least ? "/least" : "/greatest"), symbol + (least ? "_{min}" : "_{max}"), (least ? "least" : "greatest") + " by the published relations")
+        String end = least ? "least" : "greatest";
+        trace.line(step + "/" + end, symbol + (least ? "_{min}" : "_{max}"), end + " by the published relations")
             .from("published relations of gust and mean, each by its peak factor (r - 1) ln(10 / z_0)", Status.RECALLED)
             .reads("by " + found.relation(), found.value(), "m/s");
         return found;
     }
 
-    private static double requireSpeed(String field, Speed speed) {
-        if (!(speed.metresPerSecond() > 0)) {
-            throw new UnfitWeather(field, "a wind speed above zero is needed");
+    private double requireSpeed(String field, Speed speed) {
+        double greatest = tables.number("greatest-speed");
+        if (!(speed.metresPerSecond() > 0 && speed.metresPerSecond() <= greatest)) {
+            throw new UnfitWeather(field, "a wind speed is above zero and not above the highest gust ever measured, " + Plain.number(greatest) + " m/s");
         }
         return speed.metresPerSecond();
     }

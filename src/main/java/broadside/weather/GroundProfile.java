@@ -41,7 +41,8 @@ final class GroundProfile {
     double requireSensor(double height, double z0) {
         requireHeight("sensor-height", height);
         if (height < least(z0)) {
-            throw new UnfitWeather("sensor-height", "over this ground the wind is known from " + Plain.number(least(z0)) + " m above it: a sensor stands higher");
+            throw new UnfitWeather("sensor-height", "over this ground the wind is known from " + Plain.number(least(z0))
+                + " m above it: a sensor stands higher");
         }
         return height;
     }
@@ -66,7 +67,7 @@ final class GroundProfile {
         return "ln(" + tables.text(HEIGHT) + " / " + z0 + ")";
     }
 
-    /** Ratio of the means at 10 m over the ground of the item and over that of the forecast, under the same wind aloft; recorded as "ground-ratio". */
+    /** Mean at 10 m over the ground of the item over that over the ground of the forecast, under the same wind aloft; recorded as "ground-ratio". */
     double groundRatio(double z0, double z0Forecast, Trace trace) {
         String power = tables.text("upper-wind-exponent");
         return tables.cite(trace.line("ground-ratio", "k_r", "mean at 10 m over the ground of the item over that of the forecast"), "upper-wind-exponent")

@@ -97,11 +97,13 @@ public final class Gumbel {
             throw new UnfitWeather("record", "the record is shorter than " + Plain.number(least) + " year: nothing can be said about extremes");
         }
         if (x.length < tables.number("least-maxima")) {
-            throw new UnfitWeather("maxima", "there " + (x.length == 1 ? "is 1 annual maximum" : "are " + x.length + " annual maxima") + " of complete years; at least "
-                + tables.text("least-maxima") + " are needed");
+            throw new UnfitWeather("maxima", "there " + (x.length == 1 ? "is 1 annual maximum" : "are " + x.length + " annual maxima")
+                + " of complete years; at least " + tables.text("least-maxima") + " are needed");
         }
-        if (!(x[0] > 0) || !Double.isFinite(x[x.length - 1])) {
-            throw new UnfitWeather("maxima", "annual maxima are speeds above zero");
+        double greatest = tables.number("greatest-speed");
+        if (!(x[0] > 0) || !(x[x.length - 1] <= greatest)) {
+            throw new UnfitWeather("maxima", "annual maxima are speeds above zero and not above the highest gust ever measured, "
+                + Plain.number(greatest) + " m/s");
         }
     }
 
@@ -109,14 +111,16 @@ public final class Gumbel {
         List<String> warnings = new ArrayList<>();
         double few = tables.number("short-record");
         if (n < few || years < few) {
-            warnings.add("The record gives " + n + " annual maxima; from fewer than " + Plain.number(few) + " years the speeds of long return periods are little more than a guess.");
+            warnings.add("The record gives " + n + " annual maxima; from fewer than " + Plain.number(few)
+                + " years the speeds of long return periods are little more than a guess.");
         }
         return warnings;
     }
 
     /** mean = u + gamma b; deviation = pi b / sqrt 6. */
     private static double[] moments(double mean, double deviation, Trace trace) {
-        double b = trace.line("scale", "b", "scale of the law").in("s", deviation, "m/s").from(BOOKS, Status.READ).gives("6^0.5 s / π", Math.sqrt(6) * deviation / Math.PI, "m/s");
+        double b = trace.line("scale", "b", "scale of the law").in("s", deviation, "m/s").from(BOOKS, Status.READ)
+            .gives("6^0.5 s / π", Math.sqrt(6) * deviation / Math.PI, "m/s");
         double u = trace.line("location", "u", "location of the law").in("m", mean, "m/s").in("b", b, "m/s").from(BOOKS, Status.READ)
             .gives("m - " + Plain.number(Gamma.GAMMA) + " b", mean - Gamma.GAMMA * b, "m/s");
         return new double[] {u, b};
@@ -129,8 +133,10 @@ public final class Gumbel {
             high *= 2;
         }
         double root = new BrentSolver(1e-12, 1e-12).solve(TRIALS, b -> lacking(x, mean, b), 1e-6 * deviation, high);
-        double b = trace.line("scale", "b", "scale of the law").from(LIKELIHOOD, Status.DERIVED).reads("found by trial: b = m - Σ x e^(-x / b) / Σ e^(-x / b)", root, "m/s");
-        double least = trace.line("least-maximum", "x_1", "least of the annual maxima").from("the maxima", Status.DERIVED).reads("of " + x.length + " maxima", x[0], "m/s");
+        double b = trace.line("scale", "b", "scale of the law").from(LIKELIHOOD, Status.DERIVED)
+            .reads("found by trial: b = m - Σ x e^(-x / b) / Σ e^(-x / b)", root, "m/s");
+        double least = trace.line("least-maximum", "x_1", "least of the annual maxima").from("the maxima", Status.DERIVED)
+            .reads("of " + x.length + " maxima", x[0], "m/s");
         double w = trace.line("weight", "w", "mean of the weights").in("x_1", least, "m/s").in("b", b, "m/s").from(LIKELIHOOD, Status.DERIVED)
             .reads("mean of e^(-(x - x_1) / b)", Arrays.stream(x).map(v -> Math.exp((least - v) / b)).sum() / x.length, "1");
         double u = trace.line("location", "u", "location of the law").in("x_1", least, "m/s").in("b", b, "m/s").in("w", w).from(LIKELIHOOD, Status.DERIVED)
@@ -155,19 +161,21 @@ public final class Gumbel {
      * of the law, for moments that of x = m + K s from its skewness and kurtosis. It holds the chance of the sample alone, not the doubt about the law.
      */
     public Level level(Fit fit, double years, Trace sheet) {
-        if (!(years > 1) || !Double.isFinite(years)) {
-            throw new UnfitWeather("return-period", "a return period is longer than 1 year");
+        if (!(years > 1) || !(1 - 1 / years < 1)) {
+            throw new UnfitWeather("return-period", "a return period is longer than 1 year, and no longer than can be worked out");
         }
         Trace trace = sheet.part(Plain.number(years));
         trace.given("T", "return period", years, "years", Plain.number(years) + " years");
         double y = trace.line("reduced-variate", "y", "reduced variate").in("T", years, "years").from(BOOKS, Status.READ)
             .gives("-ln(-ln(1 - 1 / T))", -Math.log(-Math.log(1 - 1 / years)), "1");
-        double x = trace.line("return-level", "x_T", "greatest speed of a year reached once in T years on average").in("u", fit.location(), "m/s").in("b", fit.scale(), "m/s")
+        double x = trace.line("return-level", "x_T", "greatest speed of a year reached once in T years on average").in("u", fit.location(), "m/s")
+            .in("b", fit.scale(), "m/s")
             .in("y", y).from(BOOKS, Status.READ).gives("u + b y", fit.location() + fit.scale() * y, "m/s");
         double error = fit.method() == Method.MOMENTS ? momentError(fit, y, trace) : likelihoodError(fit, y, trace);
         double confidence = tables.number("confidence");
         double normal = tables.cite(trace.line("normal-share", "k", "standard errors on each side"), "confidence")
-            .reads("normal law, " + Plain.number(confidence) + " on both sides", new NormalDistribution().inverseCumulativeProbability((1 + confidence) / 2), "1");
+            .reads("normal law, " + Plain.number(confidence) + " on both sides",
+                new NormalDistribution().inverseCumulativeProbability((1 + confidence) / 2), "1");
         double least = end(trace, "return-level-least", "x_{min}", "lower end of the band", x, normal, error, -1);
         double greatest = end(trace, "return-level-greatest", "x_{max}", "upper end of the band", x, normal, error, 1);
         return new Level(years, x, error, least, greatest, confidence);
@@ -182,7 +190,8 @@ public final class Gumbel {
         double g = 1 - Gamma.GAMMA + y;
         return trace.line("standard-error", "e", "standard error of the speed").in("b", fit.scale(), "m/s").in("n", fit.n()).in("y", y)
             .from("delta method with the Fisher information of the Gumbel law", Status.DERIVED)
-            .gives("b / n^0.5 (1 + 6 / π² (1 - " + Plain.number(Gamma.GAMMA) + " + y)²)^0.5", fit.scale() / Math.sqrt(fit.n()) * Math.sqrt(1 + 6 / (Math.PI * Math.PI) * g * g), "m/s");
+            .gives("b / n^0.5 (1 + 6 / π² (1 - " + Plain.number(Gamma.GAMMA) + " + y)²)^0.5",
+                fit.scale() / Math.sqrt(fit.n()) * Math.sqrt(1 + 6 / (Math.PI * Math.PI) * g * g), "m/s");
     }
 
     private double momentError(Fit fit, double y, Trace trace) {

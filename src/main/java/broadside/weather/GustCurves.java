@@ -20,13 +20,13 @@ final class GustCurves {
     GustFactors.Relation relation(String key) {
         Coefficient first = curves.number(key, "a");
         OptionalDouble ground = curves.isPrinted(key, "roughness") ? OptionalDouble.of(number(key, "roughness")) : OptionalDouble.empty();
-        return new GustFactors.Relation(key, curves.text(key, "title"), curves.text(key, "wind"), ground, first.source().status(), first.source().citation());
+        return new GustFactors.Relation(key, curves.text(key, "title"), curves.text(key, "wind"), ground, first.source().status(), curves.text(key, "place"));
     }
 
     /** A curve begins and ends at its printed times; one relative to 600 s says nothing about longer means. */
     boolean covers(String key, double gustSeconds, double meanSeconds) {
         double base = number(key, "base");
-        boolean longMean = meanSeconds > base && beyond.has(key);
+        boolean longMean = meanSeconds > base && beyond.has(key) && meanSeconds <= beyond.number(key, "to").value();
         return gustSeconds >= number(key, "from") && gustSeconds <= number(key, "to") && (meanSeconds == base || longMean
             || meanSeconds >= number(key, "from") && meanSeconds <= number(key, "to"));
     }
@@ -51,10 +51,7 @@ final class GustCurves {
         double b = beyond.number(key, "b").value();
         Coefficient found = beyond.number(key, "a");
         double value = a - b * Math.log(seconds) / Math.log(10);
-        if (!(value > 0)) {
-            throw new UnfitWeather("mean-seconds", "a mean over " + Plain.number(seconds) + " s is beyond what the curve can give");
-        }
-        return trace.line("curve", "G_T", "mean over T over the hourly mean").in("T", seconds, "s").from(found.source().citation(), found.source().status())
+        return trace.line("curve", "G_T", "mean over T over the hourly mean").in("T", seconds, "s").from(beyond.text(key, "place"), found.source().status())
             .gives(Plain.number(a) + " - " + Plain.number(b) + " ln(T) / ln(10)", value, "1");
     }
 
@@ -87,8 +84,10 @@ final class GustCurves {
     private double tanh(String key, double seconds, String time, String symbol, Trace trace) {
         Source from = source(key);
         double x = trace.line("curve-argument", "x", "argument of the curve").in(time, seconds, "s").from(from.place(), from.status())
-            .gives(text(key, "d") + " ln(" + text(key, "c") + " / " + time + ") / ln(10)", number(key, "d") * Math.log(number(key, "c") / seconds) / Math.log(10), "1");
-        return trace.line("curve", symbol, "mean over " + time + " over the mean over " + text(key, "base") + " s").in("x", x).from(from.place(), from.status())
+            .gives(text(key, "d") + " ln(" + text(key, "c") + " / " + time + ") / ln(10)",
+                number(key, "d") * Math.log(number(key, "c") / seconds) / Math.log(10), "1");
+        return trace.line("curve", symbol, "mean over " + time + " over the mean over " + text(key, "base") + " s").in("x", x)
+            .from(from.place(), from.status())
             .gives(text(key, "a") + " + " + text(key, "b") + " (1 - 2 / (exp(2 x) + 1))",
                 number(key, "a") + number(key, "b") * (1 - 2 / (Math.exp(2 * x) + 1)), "1");
     }
@@ -96,8 +95,7 @@ final class GustCurves {
     private record Source(String place, Status status) { }
 
     private Source source(String key) {
-        Coefficient a = curves.number(key, "a");
-        return new Source(a.source().citation(), a.source().status());
+        return new Source(curves.text(key, "place"), curves.number(key, "a").source().status());
     }
 
     private double number(String key, String column) {

@@ -93,7 +93,7 @@ public final class GustFactors {
         Relation relation = relation(key);
         requireTimes(gustSeconds, meanSeconds, turbulence);
         if (!covers(key, gustSeconds, meanSeconds)) {
-            throw new UnfitWeather("gust-seconds", relation.title() + " does not cover a gust of " + Plain.number(gustSeconds) + " s within " + Plain.number(meanSeconds) + " s");
+            throw new UnfitWeather("gust-seconds", relation.title() + " does not cover a gust of " + within(gustSeconds, meanSeconds));
         }
         if (key.startsWith(TABLE)) {
             return new Ratio(relation, tables.gustTable.number(row(gustSeconds, meanSeconds), key.substring(TABLE.length()))
@@ -118,7 +118,7 @@ public final class GustFactors {
     public Band band(double gustSeconds, double meanSeconds, double turbulence, Ground ground, Trace trace) {
         List<Ratio> all = ratios(gustSeconds, meanSeconds, turbulence, ground, trace);
         if (all.isEmpty()) {
-            throw new UnfitWeather("gust-seconds", "no published relation covers a gust of " + Plain.number(gustSeconds) + " s within " + Plain.number(meanSeconds) + " s");
+            throw new UnfitWeather("gust-seconds", "no published relation covers a gust of " + within(gustSeconds, meanSeconds));
         }
         Ratio least = all.stream().min(Comparator.comparingDouble(Ratio::value)).orElseThrow();
         Ratio greatest = all.stream().max(Comparator.comparingDouble(Ratio::value)).orElseThrow();
@@ -128,7 +128,8 @@ public final class GustFactors {
     }
 
     private static void named(Trace trace, String step, String symbol, String meaning, Ratio ratio) {
-        trace.line(step, symbol, meaning).from(ratio.relation().place(), ratio.relation().status()).reads("by " + ratio.relation().title(), ratio.value(), "1");
+        Relation relation = ratio.relation();
+        trace.line(step, symbol, meaning).from(relation.place(), relation.status()).reads("by " + relation.title(), ratio.value(), "1");
     }
 
     private static void requireTimes(double gustSeconds, double meanSeconds, double turbulence) {
@@ -138,6 +139,10 @@ public final class GustFactors {
         if (!(turbulence > 0) || !(turbulence < 1)) {
             throw new UnfitWeather("turbulence", "the intensity of turbulence is a number between 0 and 1, such as 0.17 in open country");
         }
+    }
+
+    private static String within(double gustSeconds, double meanSeconds) {
+        return Plain.number(gustSeconds) + " s within " + Plain.number(meanSeconds) + " s";
     }
 
     private static String row(double gustSeconds, double meanSeconds) {

@@ -1,6 +1,8 @@
 package broadside.weather;
 
 import broadside.quantity.Dimension;
+import broadside.quantity.Reading;
+import broadside.quantity.Typed;
 import broadside.quantity.Unit;
 import java.util.List;
 import java.util.Locale;
@@ -20,8 +22,10 @@ record RecordHeader(int date, int time, int mean, int gust, int width, Optional<
 
     private static final Set<String> DATES = Set.of("date", "day");
     private static final Set<String> TIMES = Set.of("time", "datetime", "date time", "date and time", "timestamp", "valid time", "hour");
-    private static final Set<String> MEANS = Set.of("mean", "wind", "wind speed", "windspeed", "speed", "average", "mean wind", "mean speed", "mean wind speed", "avg");
-    private static final Set<String> GUSTS = Set.of("gust", "gusts", "wind gust", "wind gusts", "windgust", "gust speed", "max gust", "peak gust", "maximum gust");
+    private static final Set<String> MEANS = Set.of("mean", "wind", "wind speed", "windspeed", "speed", "average", "mean wind", "mean speed",
+        "mean wind speed", "avg");
+    private static final Set<String> GUSTS = Set.of("gust", "gusts", "wind gust", "wind gusts", "windgust", "gust speed", "max gust", "peak gust",
+        "maximum gust");
     private static final Pattern CELL = Pattern.compile("([^(\\[]*)(?:[(\\[]([^)\\]]*)[)\\]])?\\s*");
 
     /** The headings, or empty when these cells are none. */
@@ -60,10 +64,9 @@ record RecordHeader(int date, int time, int mean, int gust, int width, Optional<
         }
         // read as a typed speed, so that all its names count
         String text = "1 " + words.strip().toLowerCase(Locale.ROOT);
-        return broadside.quantity.Typed.read(text, Dimension.SPEED) instanceof broadside.quantity.Reading.Value value ? Optional.of(value.unit()) : unknown(words);
-    }
-
-    private static Optional<Unit> unknown(String words) {
+        if (Typed.read(text, Dimension.SPEED) instanceof Reading.Value value) {
+            return Optional.of(value.unit());
+        }
         throw new UnfitWeather("unit", "\"" + RecordReader.shown(words) + "\" is no unit of speed; there are m/s, km/h, kn, mph, ft/s");
     }
 }

@@ -89,7 +89,7 @@ public final class RecordReader {
                 return found.get();
             }
         }
-        throw new UnfitWeather("record", "no line of headings was found: it names \"time\" and \"mean\" or \"gust\", as in \"time, mean (km/h), gust (km/h)\"");
+        throw new UnfitWeather("record", "no headings were found: they name \"time\" and \"mean\" or \"gust\", as in \"time, mean (km/h), gust (km/h)\"");
     }
 
     private record Columns(RecordHeader header, Unit mean, Unit gust) { }
@@ -108,9 +108,11 @@ public final class RecordReader {
             return null;
         }
         if (headed.isPresent() && typed.isPresent() && !headed.equals(typed)) {
-            rows.problem(Kind.UNITS, "the heading of the " + name + " says " + headed.get().symbol() + ", " + typed.get().symbol() + " was given; the heading counts");
+            rows.problem(Kind.UNITS, "the heading of the " + name + " says " + headed.get().symbol() + ", " + typed.get().symbol()
+                + " was given; the heading counts");
         }
-        return headed.or(() -> typed).orElseThrow(() -> new UnfitWeather("unit", "the unit of the " + name + " is not known: it stands in the heading, as in \"" + name + " (km/h)\""));
+        return headed.or(() -> typed).orElseThrow(() -> new UnfitWeather("unit", "the unit of the " + name
+            + " is not known: it stands in the heading, as in \"" + name + " (km/h)\""));
     }
 
     private void row(CSVRecord line, Columns columns, RecordRows rows) {
@@ -180,7 +182,8 @@ public final class RecordReader {
             return Speed.BAD;
         }
         if (si > greatest) {
-            rows.problem(row, Kind.ABSURD, "a " + name + " of \"" + shown(cell) + "\" is above the highest gust ever measured, " + Plain.number(greatest) + " m/s, and is left out");
+            rows.problem(row, Kind.ABSURD, "a " + name + " of \"" + shown(cell) + "\" is above the highest gust ever measured, "
+                + Plain.number(greatest) + " m/s, and is left out");
             return Speed.BAD;
         }
         return new Speed(OptionalDouble.of(si), false);

@@ -107,8 +107,9 @@ final class RecordRows {
             problem(kept.get(0).row(), Kind.STEP, "a single row: it is taken as one hour");
             return Duration.ofHours(1);
         }
-        return counts.entrySet().stream().max(Map.Entry.<Duration, Integer>comparingByValue().thenComparing(Map.Entry.<Duration, Integer>comparingByKey().reversed()))
-            .orElseThrow().getKey();
+        Comparator<Map.Entry<Duration, Integer>> oftenest = Map.Entry.comparingByValue();
+        Comparator<Map.Entry<Duration, Integer>> longest = Map.Entry.comparingByKey();
+        return counts.entrySet().stream().max(oftenest.thenComparing(longest.reversed())).orElseThrow().getKey();
     }
 
     private void gaps(List<Row> kept, Duration step) {
