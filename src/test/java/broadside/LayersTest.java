@@ -14,7 +14,7 @@ import org.junit.jupiter.api.Test;
 /** A package may use only packages that stand before it in this list. */
 class LayersTest {
 
-    private static final List<String> ORDER = List.of("quantity", "trace", "table", "site", "panel", "aero", "crew", "codes", "action", "support", "limit", "assess", "job",
+    private static final List<String> ORDER = List.of("quantity", "trace", "table", "site", "weather", "panel", "aero", "crew", "codes", "action", "support", "limit", "assess", "job",
         "sheet", "report", "web", "cli");
 
     /** Imports, and whole names in the text. */

@@ -12,7 +12,6 @@ public final class Crew {
     private final PublishedLimits limits;
     private final Handling handling;
     private final PersonInWind person;
-    private final WindScale scale;
     private final CraneWind crane;
 
     /** Reads the tables of crews, and of open flow the relation for slanting plates; a missing table stops the start. */
@@ -24,7 +23,6 @@ public final class Crew {
         this.limits = new PublishedLimits(crew);
         this.handling = new Handling(crew, tables.edition("open-flow/1").orElseThrow());
         this.person = new PersonInWind(crew);
-        this.scale = new WindScale(crew);
         this.crane = new CraneWind(crew);
     }
 
@@ -50,10 +48,6 @@ public final class Crew {
 
     public PersonInWind person() {
         return person;
-    }
-
-    public WindScale scale() {
-        return scale;
     }
 
     public CraneWind crane() {

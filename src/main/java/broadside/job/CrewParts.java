@@ -36,7 +36,6 @@ final class CrewParts {
                     Parts.positive(given, "air-density", Dimension.DENSITY, "1.25 kg/m3"), trace);
                 case "handling" -> handling(given, trace);
                 case "person-in-wind" -> person(given, trace);
-                case "wind-scale" -> crew.scale().of(Parts.positive(given, "speed", Dimension.SPEED, "12 m/s"), trace);
                 case "published-limit" -> crew.limits().record(PublishedChecks.text(given, "limit"), trace);
                 default -> crane(given, trace);
             }

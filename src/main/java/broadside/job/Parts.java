@@ -25,7 +25,7 @@ final class Parts {
 
     private static final String NAMES = "convert-speed, plate-drag, section, tip-mass-frequency, post-bending-asd, post-modulus-needed, post-torsion, embedment-ibc, "
         + "pier-broms-clay, broms-clay-capacity, pad, bolt-group, facade-fixings, stay, frame-ballast, edge-pull, block-footing, "
-        + "action-levels, evacuation-class, handling, person-in-wind, wind-scale, published-limit, crane-wind";
+        + "action-levels, evacuation-class, handling, person-in-wind, published-limit, crane-wind, " + WeatherParts.NAMES;
 
     private final SpeedConversion conversion;
     private final CodeLibrary codes;
@@ -34,6 +34,7 @@ final class Parts {
     private final PostParts posts;
     private final BallastParts ballast;
     private final CrewParts crew;
+    private final WeatherParts weather;
 
     Parts(SpeedConversion conversion, CodeLibrary codes, Catalogue catalogue, TableLibrary tables) {
         this.conversion = conversion;
@@ -42,6 +43,7 @@ final class Parts {
         this.ground = new GroundParts(tables);
         this.ballast = new BallastParts(tables.edition("stability/1").orElseThrow());
         this.crew = new CrewParts(tables);
+        this.weather = new WeatherParts(tables);
         this.posts = new PostParts(tables.edition(PostRules.EDITION).orElseThrow());
     }
 
@@ -54,7 +56,8 @@ final class Parts {
             case "tip-mass-frequency", "post-bending-asd", "post-modulus-needed", "post-torsion" -> posts.run(part, given);
             case "embedment-ibc", "pier-broms-clay", "broms-clay-capacity", "pad" -> ground.run(part, given);
             case "bolt-group", "facade-fixings", "stay", "frame-ballast", "edge-pull", "block-footing" -> ballast.run(part, given);
-            case "action-levels", "evacuation-class", "handling", "person-in-wind", "wind-scale", "published-limit", "crane-wind" -> crew.run(part, given);
+            case "action-levels", "evacuation-class", "handling", "person-in-wind", "published-limit", "crane-wind" -> crew.run(part, given);
+            case "gust-factor", "beaufort", "forecast-gust", "open-wind", "gumbel-fit", "extremes", "return-level", "lifetime-risk" -> weather.run(part, given);
             default -> throw PublishedChecks.bad("the part \"" + StructureReader.clean(part) + "\" is not one that this version checks; it knows " + NAMES);
         };
     }

@@ -91,7 +91,7 @@ class EvacuationClassesTest {
 
     @ParameterizedTest
     @ValueSource(strings = {"action-levels", "rise-of-wind", "evacuation-classes", "event-plans", "work-limits", "handling", "comfort",
-        "wind-scale", "lifting"})
+        "lifting"})
     void aMissingTableStopsTheStart(String table) {
         assertThatThrownBy(() -> Crews.without("crew/1/" + table + ".csv")).isInstanceOf(TableFormat.class).hasMessageContaining(table);
     }

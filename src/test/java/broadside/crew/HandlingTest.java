@@ -86,16 +86,6 @@ class HandlingTest {
         SheetCheck.holds(trace);
     }
 
-    /** Between printed bounds a force goes on to where the next begins. */
-    @ParameterizedTest
-    @CsvSource({"0, 0", "0.25, 0", "0.3, 1", "7.95, 4", "8, 5", "10.8, 6", "32.65, 11", "32.7, 12", "60, 12"})
-    void theBeaufortScale(double speed, int force) {
-        Trace trace = new Trace();
-        assertThat(CREW.scale().of(speed, trace).number()).isEqualTo(force);
-        SheetCheck.holds(trace);
-        assertThatThrownBy(() -> CREW.scale().of(-1, new Trace())).isInstanceOf(UnfitFigure.class);
-    }
-
     /** 50 kg, 3 m2, 1.2: (1.2 x 0.05/3.6)^0.5 = 0.129, so 9 m/s of the chart become 1.16. */
     @Test
     void aSheetIsNoStandardLoad() {
