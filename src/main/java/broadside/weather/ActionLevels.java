@@ -38,7 +38,8 @@ public final class ActionLevels {
             double ofSpeed = trace.line("level-of-speed", "V_s", "share of the limiting speed").in("V_{lim}", v, "m/s").in("p", share)
                 .from("share read as one of the speed", Status.DERIVED).gives("p V_{lim}", share * v, "m/s");
             double ofLoad = trace.line("level-of-load", "V_q", "speed at that share of the load").in("V_{lim}", v, "m/s").in("p", share)
-                .from("share read as one of the load, which goes with the square of the speed", Status.DERIVED).gives("p^0.5 V_{lim}", Math.sqrt(share) * v, "m/s");
+                .from("share read as one of the load, which goes with the square of the speed", Status.DERIVED)
+                .gives("p^0.5 V_{lim}", Math.sqrt(share) * v, "m/s");
             levels.add(new Level(share, ofSpeed, ofLoad));
         }
         return levels;

@@ -161,13 +161,12 @@ public final class RecordReader {
             return Speed.NONE;
         }
         String cell = cell(line, column);
-        if (NONE.contains(cell.toLowerCase(java.util.Locale.ROOT))) {
-            rows.problem(row, Kind.MISSING, "no " + name);
-            return Speed.NONE;
-        }
         double si;
         if (NUMBER.matcher(cell).matches()) {
             si = Double.parseDouble(cell.replace(',', '.')) * unit.toSi();
+        } else if (NONE.contains(cell.toLowerCase(java.util.Locale.ROOT))) {
+            rows.problem(row, Kind.MISSING, "no " + name);
+            return Speed.NONE;
         } else if (Typed.read(cell, Dimension.SPEED) instanceof Reading.Value value) {
             si = value.si();
             if (!value.unit().equals(unit)) {

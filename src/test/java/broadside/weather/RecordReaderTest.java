@@ -72,6 +72,22 @@ class RecordReaderTest {
         assertThat(record.problems().stream().filter(p -> p.row() == 13).findFirst().orElseThrow().text()).contains("3 times are missing");
     }
 
+    @ParameterizedTest
+    @ValueSource(strings = {"2026-02-29 00:00", "2026-13-01 00:00", "2026-01-01 24:30", "2026-01-01 10:60", "2026-01-01 1500",
+        "01/02/2026 15:00", "2026-01-01x15:00"})
+    void times_that_are_none_are_told(String time) {
+        WindRecord record = READER.read("time,gust (m/s)\n2026-01-01 00:00,5\n" + time + ",6\n", Optional.empty());
+        assertThat(record.problems()).anyMatch(p -> p.kind() == Kind.TIME && p.row() == 3);
+        assertThat(record.rows()).hasSize(1);
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"2028-02-29 00:00", "2028-02-29T00:00:00Z", "2028-02-28 24:00", "2028-02-29", "29.02.2028 0:00", "2028-02-29T01:00+01:00"})
+    void times_of_all_kinds(String time) {
+        WindRecord record = READER.read("time,gust (m/s)\n" + time + ",6\n", Optional.empty());
+        assertThat(record.rows().get(0).instant()).isEqualTo(java.time.Instant.parse("2028-02-29T00:00:00Z"));
+    }
+
     @Test
     void times_out_of_order_are_put_in_order() {
         WindRecord record = READER.read("time,gust (mph)\n2026-01-01T02:00Z,20\n2026-01-01T00:00Z,18\n2026-01-01T01:00Z,19\n", Optional.empty());
