@@ -20,6 +20,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.BiFunction;
+import java.util.stream.Collectors;
 
 /**
  * Turns the question round: at which gust is each check of an item just met? The item keeps what carries it; the wind is the
@@ -91,7 +92,8 @@ final class LimitFinder {
     /** The first limit of a changed item. */
     private Optional<Limits.Limit> changed(Item item, Wind wind) {
         Optional<Carried> carried = wind.at(item, 1).carried().filter(c -> c.parts().stream().allMatch(p -> p.refused().isEmpty()));
-        return carried.flatMap(c -> limits(item, keys(c), wind).stream().filter(l -> l.state().isEmpty()).findFirst());
+        Set<String> asItIs = carried.map(LimitFinder::keys).orElse(Set.of()).stream().filter(k -> !k.contains("|")).collect(Collectors.toSet());
+        return asItIs.isEmpty() ? Optional.empty() : new LimitSearch(multiple -> shares(wind.at(item, multiple))).first(asItIs).map(f -> limit(f.getKey(), f.getValue(), wind));
     }
 
     /** The site in the wind that blows. */
@@ -139,6 +141,9 @@ final class LimitFinder {
 
     private static void record(Limits.Limit limit, Trace sheet) {
         String slug = (limit.check() + (limit.state().isEmpty() ? "" : " " + limit.state())).replace(' ', '-');
+        if (sheet.find("limiting-gust/" + slug).isPresent()) {
+            return;
+        }
         String how = limit.bySquare() ? "a least value of the code holds below: by the square of the speed" : "found by trial on the whole calculation: the share is 1 there";
         sheet.line("limiting-gust/" + slug, "V_{lim}", "3 s gust at 10 m in the open at which " + limit.check() + " is just met"
             + (limit.state().isEmpty() ? "" : ", " + limit.state())).from("root of the whole calculation", Status.DERIVED).reads(how, limit.inTheOpen(), "m/s");

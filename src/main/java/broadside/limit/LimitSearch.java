@@ -1,8 +1,11 @@
 package broadside.limit;
 
+import java.util.Comparator;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
 import java.util.function.DoubleFunction;
 import org.apache.commons.math3.analysis.solvers.PegasusSolver;
 
@@ -17,6 +20,7 @@ public final class LimitSearch {
     private static final double SHARP = 1e-12;
     private static final double TINY = 1e-12;
     private static final int MOST_TRIES = 200;
+    private static final int MOST_STEPS = 12;
     /** The first bracket around what the square of the speed gives. */
     private static final double NEAR = 1e-6;
 
@@ -47,6 +51,10 @@ public final class LimitSearch {
         if (first < TINY) {
             return Optional.empty();
         }
+        OptionalDouble straight = straight(check, first);
+        if (straight.isPresent()) {
+            return Optional.of(new Found(straight.getAsDouble(), false));
+        }
         double guess = Math.min(WIDEST / 2, Math.max(2 / WIDEST, 1 / Math.sqrt(first)));
         double low = guess * (1 - NEAR);
         double high = guess * (1 + NEAR);
@@ -68,6 +76,32 @@ public final class LimitSearch {
         double at = share(check, low) == 1 ? Math.log(low) : share(check, high) == 1 ? Math.log(high)
             : new PegasusSolver(SHARP, SHARP, SHARP).solve(MOST_TRIES, x -> Math.log(Math.max(TINY, share(check, Math.exp(x)))), Math.log(low), Math.log(high));
         return Optional.of(new Found(Math.exp(at), false));
+    }
+
+    /** The first check to fail and its limit: the greatest of the shares is brought to 1. */
+    public Optional<Map.Entry<String, Found>> first(Set<String> checks) {
+        LimitSearch greatest = new LimitSearch(multiple -> Map.of("", checks.stream().mapToDouble(c -> share(c, multiple)).max().orElse(0)));
+        return greatest.find("").map(found -> Map.entry(checks.stream().max(Comparator.comparingDouble(c -> share(c, found.bySquare() ? 1 : found.multiple()))).orElseThrow(), found));
+    }
+
+    /** By the straight line through two winds, in logarithms; most checks need one or two steps. Empty where it does not settle. */
+    private OptionalDouble straight(String check, double first) {
+        double x = 0;
+        double f = Math.log(first);
+        double next = -f / 2;
+        for (int i = 0; i < MOST_STEPS && Math.abs(next) < Math.log(WIDEST) && !Double.isNaN(next); i++) {
+            double multiple = Math.exp(next);
+            double share = share(check, multiple);
+            if (Math.abs(share - 1) < SHARP) {
+                return OptionalDouble.of(multiple);
+            }
+            double value = Math.log(Math.max(TINY, share));
+            double slope = (value - f) / (next - x);
+            x = next;
+            f = value;
+            next = x - f / slope;
+        }
+        return OptionalDouble.empty();
     }
 
     private double share(String check, double multiple) {
