@@ -14,6 +14,7 @@ import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.function.Supplier;
 import java.util.Optional;
 import tools.jackson.databind.JsonNode;
 
@@ -22,12 +23,13 @@ public final class PublishedChecks {
 
     private final Assessor assessor;
     private final JobReader reader;
-    private final Parts parts;
+    private final Supplier<Parts> making;
+    private Parts parts; // made when checks are first run
 
     public PublishedChecks(Assessor assessor, JobReader reader, SpeedConversion conversion) {
         this.assessor = assessor;
         this.reader = reader;
-        this.parts = new Parts(conversion, assessor.codes(), assessor.catalogue(), assessor.tables());
+        this.making = () -> new Parts(conversion, assessor.codes(), assessor.catalogue(), assessor.tables());
     }
 
     /** The cases that ship with the tool. */
@@ -36,7 +38,8 @@ public final class PublishedChecks {
     }
 
     /** Runs files by their names; files that do not end in .json are left out. */
-    public List<PublishedCheck> run(Map<String, byte[]> files) {
+    public synchronized List<PublishedCheck> run(Map<String, byte[]> files) {
+        parts = parts == null ? making.get() : parts;
         List<PublishedCheck> checks = new ArrayList<>();
         files.forEach((name, bytes) -> {
             if (name.endsWith(".json")) {
