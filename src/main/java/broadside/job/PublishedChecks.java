@@ -14,8 +14,8 @@ import broadside.trace.Trace;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
-import java.util.function.Supplier;
 import java.util.Optional;
+import java.util.function.Supplier;
 import tools.jackson.databind.JsonNode;
 
 /** Runs published cases: files that hold a job or a part of one, and what a publication prints for it. */
