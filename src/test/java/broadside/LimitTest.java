@@ -139,7 +139,7 @@ class LimitTest {
         Limits depot = AllJobs.TOOL.assessor().withLimits(AllJobs.assess(AllJobs.demo("depot-hoarding.json"))).items().get(0).limits().orElseThrow();
         assertThat(depot.changes()).singleElement().satisfies(c -> assertThat(c.first().orElseThrow().inTheOpen()).isGreaterThan(depot.first().orElseThrow().inTheOpen()));
         Limits fence = limits(job(true, draw(1, 50)), 26);
-        assertThat(fence.changes()).extracting(Limits.Change::what).anyMatch(w -> w.contains("more blocks of 25 kg")).anyMatch(w -> w.contains("a brace that reaches 1.2 m"))
+        assertThat(fence.changes()).extracting(Limits.Change::what).anyMatch(w -> w.contains("more blocks of 25 kg (55.12 lb)")).anyMatch(w -> w.contains("a brace that reaches 1.2 m (3 ft 11 1/4 in)"))
             .anyMatch(w -> w.contains("mesh that is 70 % closed"));
         fence.changes().stream().filter(c -> c.what().contains("blocks")).forEach(c -> assertThat(c.first().orElseThrow().inTheOpen()).isGreaterThan(fence.first().orElseThrow().inTheOpen()));
         assertThat(fence.list()).anyMatch(l -> l.state().equals("cover taken off"));

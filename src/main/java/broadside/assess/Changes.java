@@ -14,6 +14,7 @@ import broadside.panel.ProjectingSign;
 import broadside.panel.SpannedBanner;
 import broadside.quantity.Length;
 import broadside.quantity.Mass;
+import broadside.quantity.Show;
 import broadside.table.Rows;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -80,12 +81,12 @@ record Changes(Carried carried, Rows own) implements Item.Kinds<Map<String, Item
         for (int i = 0; i < value("more-blocks"); i++) {
             blocks.add(new FenceFeet.Block(Mass.kilograms(block), Length.metres(0)));
         }
-        changed.put(Math.round(value("more-blocks")) + " more blocks of " + Math.round(block) + " kg on each panel", on(fence, new FenceFeet(feet.panelMass(), feet.footMass(), feet.footLength(),
+        changed.put(Math.round(value("more-blocks")) + " more blocks of " + Show.both(Mass.kilograms(block)) + " on each panel", on(fence, new FenceFeet(feet.panelMass(), feet.footMass(), feet.footLength(),
             blocks, feet.brace(), feet.surface(), feet.stakes())));
         double mass = value("brace-mass");
         FenceFeet.Brace brace = feet.brace().map(b -> new FenceFeet.Brace(b.lever(), Mass.kilograms(2 * b.mass().kilograms())))
             .orElseGet(() -> new FenceFeet.Brace(Length.metres(value("brace-reach")), Mass.kilograms(mass)));
-        changed.put(feet.brace().isPresent() ? "twice the mass on each brace" : "a brace that reaches " + value("brace-reach") + " m behind each panel, with " + Math.round(mass) + " kg on its foot",
+        changed.put(feet.brace().isPresent() ? "twice the mass on each brace" : "a brace that reaches " + Show.both(Length.metres(value("brace-reach"))) + " behind each panel, with " + Show.both(Mass.kilograms(mass)) + " on its foot",
             on(fence, new FenceFeet(feet.panelMass(), feet.footMass(), feet.footLength(), feet.blocks(), Optional.of(brace), feet.surface(), feet.stakes())));
         return changed;
     }
@@ -119,7 +120,7 @@ record Changes(Carried carried, Rows own) implements Item.Kinds<Map<String, Item
     }
 
     private String words(Footing footing) {
-        return "footings " + value("more-depth") + " m " + (footing.kind() == Footing.Kind.PAD ? "wider and longer" : "deeper");
+        return "footings " + Show.both(Length.metres(value("more-depth"))) + " " + (footing.kind() == Footing.Kind.PAD ? "wider and longer" : "deeper");
     }
 
     private Footing more(Footing f) {

@@ -37,7 +37,7 @@ public record WindCard(String title, String place, String date, List<Structure> 
      */
     public record Structure(String mark, String what, String limit, String unit, String words, boolean unsafe, List<Rung> rungs) { }
 
-    /** One level: its action, the gust at which it begins and the mean that goes with it. */
+    /** One level: its action, the gust at which it begins and the mean that goes with it; a share is one of the speed, which is the safer reading. */
     public record Rung(String name, String action, String gust, String mean, String share) { }
 
     public static WindCard of(Assessment assessment, ActionLevels levels, String date) {
@@ -67,9 +67,9 @@ public record WindCard(String title, String place, String date, List<Structure> 
 
     private static Rung rung(ActionLevels.Level level, Limit limit, Units units) {
         int colon = level.action().indexOf(':');
-        String mean = speed(level.gust() * limit.mean() / limit.inTheOpen(), units);
-        return new Rung(level.action().substring(0, Math.max(0, colon)), level.action().substring(colon + 1).strip(), speed(level.gust(), units), mean,
-            Math.round(100 * level.gust() / limit.inTheOpen()) + " % of the limiting gust, " + Math.round(100 * Math.pow(level.gust() / limit.inTheOpen(), 2)) + " % of the load; as a share of the load it "
+        String mean = speed(level.share() * limit.mean(), units);
+        return new Rung(level.action().substring(0, Math.max(0, colon)), level.action().substring(colon + 1).strip(), speed(level.bySpeed(), units), mean,
+            Math.round(100 * level.share()) + " % of the limiting gust, " + Math.round(100 * level.loadBySpeed()) + " % of the load; as a share of the load it "
                 + "would be " + speed(level.byLoad(), units));
     }
 
